@@ -1,0 +1,240 @@
+"""The rules that every room keeps, each written once.
+
+Operation: correlation (no flip), ``r(y, x) = sum k(j, i) p(y + j - c, x + i - c)``.
+Axes: arrays are (row, column); geometry is x right, y down, pixel centres at
+whole numbers. ``theta``: direction of the carrier's wave vector, from +x towards
++y, radians, folded to [0, pi). ``frequency``: cycles per pixel. ``sigma``: one
+standard deviation, pixels. ``phase``: cosine convention at the kernel's centre.
+"""
+
+from __future__ import annotations
+
+import math
+from dataclasses import dataclass
+from typing import Literal
+
+import numpy as np
+from numpy.typing import NDArray
+
+from patchlab.errors import UsageError
+
+Array = NDArray[np.float64]
+
+# ---------------------------------------------------------------- borders
+
+BorderName = Literal["zero", "edge", "mirror101", "mirror", "wrap"]
+
+
+@dataclass(frozen=True)
+class Border:
+    """One border rule under the names that other libraries give it.
+
+    ``onnx`` is the Pad operator's mode where one exists; a None in any column
+    means that the library cannot do this border and must be refused.
+    """
+
+    numpy: str
+    scipy: str
+    opencv: str
+    onnx: str | None
+
+
+BORDERS: dict[str, Border] = {
+    "zero": Border("constant", "constant", "BORDER_CONSTANT", "constant"),
+    "edge": Border("edge", "nearest", "BORDER_REPLICATE", "edge"),
+    "mirror101": Border("reflect", "mirror", "BORDER_REFLECT_101", "reflect"),
+    "mirror": Border("symmetric", "reflect", "BORDER_REFLECT", None),
+    "wrap": Border("wrap", "grid-wrap", "BORDER_WRAP", None),  # ONNX has it from opset 19 only
+}
+DEFAULT_BORDER: BorderName = "mirror101"
+
+
+def border_index(border: str, index: NDArray[np.int64], size: int) -> NDArray[np.int64]:
+    """Map coordinates outside ``0 .. size - 1`` to the pixel a border rule reads there.
+
+    Parameters
+    ----------
+    border : one of the five names
+    index : ndarray of int, any shape; at most ``size - 1`` beyond either end
+    size : int
+
+    Returns
+    -------
+    ndarray of int64: source coordinates; -1 where the rule reads a constant zero.
+    """
+    i = np.asarray(index, dtype=np.int64)
+    outside = (i < 0) | (i >= size)
+    if border == "zero":
+        return np.where(outside, -1, i)
+    if border == "edge":
+        return np.clip(i, 0, size - 1)
+    if border == "wrap":
+        return i % size
+    if border == "mirror":
+        folded = i % (2 * size)
+        return np.where(folded < size, folded, 2 * size - 1 - folded)
+    if border == "mirror101":
+        if size == 1:
+            return np.zeros_like(i)
+        period = 2 * (size - 1)
+        folded = i % period
+        return np.where(folded < size, folded, period - folded)
+    raise UsageError(f"unknown border {border!r}", remedy=f"choose one of {', '.join(BORDERS)}")
+
+
+def pad(image: NDArray[np.generic], margin: int, border: str) -> NDArray[np.generic]:
+    """Extend a (h, w) plane by ``margin`` pixels on every side under a border rule."""
+    rows = border_index(border, np.arange(-margin, image.shape[0] + margin), image.shape[0])
+    cols = border_index(border, np.arange(-margin, image.shape[1] + margin), image.shape[1])
+    out = image[np.ix_(np.maximum(rows, 0), np.maximum(cols, 0))]
+    out[rows < 0] = 0
+    out[:, cols < 0] = 0
+    return np.asarray(out)
+
+
+# ---------------------------------------------------------------- angles
+
+
+def fold_theta(theta: float, phase: float = 0.0) -> tuple[float, float]:
+    """Fold a direction to [0, pi) and carry the phase along.
+
+    A wave seen from the other side runs backwards: (theta + pi, phase) and
+    (theta, -phase) are one kernel. The phase comes back in (-pi, pi].
+    """
+    turns = math.floor(theta / math.pi)
+    folded = theta - turns * math.pi
+    if folded >= math.pi:  # rounding just below a multiple of pi
+        folded -= math.pi
+        turns += 1
+    if turns % 2:
+        phase = -phase
+    return folded, math.pi - (math.pi - phase) % (2 * math.pi)
+
+
+def orientation_lattice(count: int) -> Array:
+    """``count`` evenly spread directions ``pi j / count``: closed under mirroring.
+
+    For every theta on the lattice, pi - theta lies on it too (0 and pi/2 are
+    their own mirrors), which is what lets a plan share work between kernels.
+    """
+    if count < 1:
+        raise UsageError("a bank needs at least one orientation")
+    return np.pi * np.arange(count) / count
+
+
+def grid(size: int) -> tuple[Array, Array]:
+    """Coordinates (x, y) of a ``size`` x ``size`` kernel or patch about its middle."""
+    r = np.arange(size, dtype=np.float64) - (size - 1) / 2
+    x, y = np.meshgrid(r, r)
+    return x, y
+
+
+# ---------------------------------------------------------------- transfer and luminance
+
+REC709 = (0.2126, 0.7152, 0.0722)
+
+
+def srgb_decode(value: Array) -> Array:
+    """sRGB-coded value in [0, 1] to linear light (IEC 61966-2-1:1999)."""
+    v = np.asarray(value, dtype=np.float64)
+    return np.where(v <= 0.04045, v / 12.92, ((np.maximum(v, 0.04045) + 0.055) / 1.055) ** 2.4)
+
+
+def srgb_encode(linear: Array) -> Array:
+    """Linear light in [0, 1] to the sRGB-coded value (IEC 61966-2-1:1999)."""
+    v = np.asarray(linear, dtype=np.float64)
+    return np.where(
+        v <= 0.0031308, v * 12.92, 1.055 * np.maximum(v, 0.0031308) ** (1 / 2.4) - 0.055
+    )
+
+
+# ---------------------------------------------------------------- pixel formats
+
+
+@dataclass(frozen=True)
+class PixelFormat:
+    """A monochrome pixel format under its GenICam PFNC name.
+
+    ``float32`` is not a PFNC name; it stands for a plane of floats.
+    """
+
+    name: str
+    bits: int
+    dtype: str
+    ctype: str
+
+    @property
+    def integer(self) -> bool:
+        """True when pixels are codes that index an input table."""
+        return self.name != "float32"
+
+    @property
+    def full_scale(self) -> int:
+        """Largest code of the format (1 for float32)."""
+        return (1 << self.bits) - 1 if self.integer else 1
+
+
+PIXEL_FORMATS: dict[str, PixelFormat] = {
+    "Mono8": PixelFormat("Mono8", 8, "uint8", "uint8_t"),
+    "Mono10": PixelFormat("Mono10", 10, "uint16", "uint16_t"),
+    "Mono12": PixelFormat("Mono12", 12, "uint16", "uint16_t"),
+    "Mono16": PixelFormat("Mono16", 16, "uint16", "uint16_t"),
+    "float32": PixelFormat("float32", 32, "float32", "float"),
+}
+
+
+def pixel_format(name: str) -> PixelFormat:
+    """Look up a pixel format; an unknown name is refused with the known ones."""
+    try:
+        return PIXEL_FORMATS[name]
+    except KeyError:
+        raise UsageError(
+            f"unknown pixel format {name!r}", remedy=f"choose one of {', '.join(PIXEL_FORMATS)}"
+        ) from None
+
+
+# ---------------------------------------------------------------- precision
+
+UNIT_ROUNDOFF = 2.0**-24
+"""Half a unit in the last place of float32, the u of every error bound."""
+
+
+def gamma(n: int) -> float:
+    """Error constant of a float32 sum of ``n`` products: n u / (1 - n u).
+
+    Higham 2002, Accuracy and Stability of Numerical Algorithms, section 3.1.
+    """
+    return n * UNIT_ROUNDOFF / (1 - n * UNIT_ROUNDOFF)
+
+
+# ---------------------------------------------------------------- randomness
+
+
+def rng(seed: int, *key: str) -> np.random.Generator:
+    """The generator that belongs to (seed, key): the same on every machine and order.
+
+    The key is usually a frame's relative path, so a frame's patches do not
+    depend on which other frames there are.
+    """
+    words = [int.from_bytes(part.encode(), "little") for part in ("\0".join(key),) if key]
+    return np.random.Generator(np.random.PCG64(np.random.SeedSequence([seed, *words])))
+
+
+# ---------------------------------------------------------------- comparing kernels
+
+
+def shift_cosine(a: Array, b: Array) -> float:
+    """Largest |cos| between two kernels over all whole-pixel shifts.
+
+    Parameters
+    ----------
+    a, b : ndarray of shape (h, w) and (h', w')
+
+    Returns
+    -------
+    float in [0, 1]; the full norms are used, so what a shift pushes out counts against.
+    """
+    from scipy.signal import correlate2d
+
+    norm = float(np.linalg.norm(a) * np.linalg.norm(b))
+    return float(np.abs(correlate2d(a, b, mode="full")).max() / norm) if norm else 0.0

@@ -1,0 +1,307 @@
+"""Artefacts on disk: folders with a manifest, whole or not there at all.
+
+An artefact is a folder of files and one JSON manifest that names its format,
+version, settings, inputs, parents and the SHA-256 of every file. Files are made
+in a hidden sibling folder, which is renamed into place, so a reader never sees
+half an artefact. Arrays are ``.npy`` without pickle. The same content gives the
+same bytes: no time, no machine name, no path of the machine is written.
+"""
+
+from __future__ import annotations
+
+import dataclasses
+import hashlib
+import io
+import json
+import os
+import platform
+import shutil
+import tempfile
+from collections.abc import Callable, Mapping
+from pathlib import Path, PurePosixPath
+from typing import Any
+
+import numpy as np
+
+import patchlab.types as nouns
+from patchlab.errors import InputError, UsageError, VerificationError
+
+FORMAT = "patchlab"
+VERSION = "1.0"
+LICENCE = (
+    "The content of this folder is its maker's own. The parts that come from patchlab's "
+    "templates are granted to everyone for any use, without conditions or attribution."
+)
+
+
+def sha256(data: bytes) -> str:
+    """Hex digest of some bytes."""
+    return hashlib.sha256(data).hexdigest()
+
+
+def canonical_json(value: Any) -> bytes:
+    """JSON with sorted keys, readable, the same bytes for the same value."""
+    text = json.dumps(value, sort_keys=True, indent=1, ensure_ascii=False, allow_nan=False)
+    return (text + "\n").encode()
+
+
+def npy_bytes(array: np.ndarray[Any, Any]) -> bytes:
+    """An array as the bytes of a ``.npy`` file (no pickle)."""
+    buffer = io.BytesIO()
+    np.lib.format.write_array(buffer, np.ascontiguousarray(array), allow_pickle=False)
+    return buffer.getvalue()
+
+
+def environment() -> dict[str, str]:
+    """Versions that numbers may depend on; no name of a person or a machine."""
+    import scipy
+
+    from patchlab import __version__
+
+    return {
+        "patchlab": __version__,
+        "python": platform.python_version(),
+        "numpy": np.__version__,
+        "scipy": scipy.__version__,
+        "system": f"{platform.system()} {platform.machine()}",
+    }
+
+
+# ---------------------------------------------------------------- nouns to files and back
+
+_NOUNS: dict[str, type] = {
+    name: value
+    for name, value in vars(nouns).items()
+    if isinstance(value, type)
+    and dataclasses.is_dataclass(value)
+    and value.__module__ == nouns.__name__
+}
+
+
+def pack(noun: Any) -> tuple[Any, dict[str, bytes]]:
+    """A noun as plain JSON data and the ``.npy`` files of its arrays."""
+    files: dict[str, bytes] = {}
+
+    def plain(value: Any, name: str) -> Any:
+        if dataclasses.is_dataclass(value) and not isinstance(value, type):
+            fields = {
+                f.name: plain(getattr(value, f.name), f"{name}.{f.name}" if name else f.name)
+                for f in dataclasses.fields(value)
+            }
+            return {"is": type(value).__name__, **fields}
+        if isinstance(value, np.ndarray):
+            files[f"{name}.npy"] = npy_bytes(value)
+            return {"array": f"{name}.npy"}
+        if isinstance(value, Mapping):
+            return {str(k): plain(v, f"{name}.{k}") for k, v in value.items()}
+        if isinstance(value, list | tuple):
+            return [plain(v, f"{name}.{i}") for i, v in enumerate(value)]
+        if isinstance(value, np.generic):
+            value = value.item()
+        if isinstance(value, float) and not np.isfinite(value):
+            return {"number": str(value)}
+        return value
+
+    return plain(noun, ""), files
+
+
+def unpack(data: Any, read: Callable[[str], bytes]) -> Any:
+    """Rebuild a noun from :func:`pack`'s data; runs no code from the data."""
+    if isinstance(data, list):
+        return tuple(unpack(v, read) for v in data)
+    if not isinstance(data, dict):
+        return data
+    if set(data) == {"array"}:
+        return np.lib.format.read_array(io.BytesIO(read(data["array"])), allow_pickle=False)
+    if set(data) == {"number"}:
+        return float(data["number"])
+    values = {k: unpack(v, read) for k, v in data.items() if k != "is"}
+    if "is" not in data:
+        return values
+    if data["is"] not in _NOUNS:
+        raise InputError(f"unknown kind of content {data['is']!r}", remedy="update patchlab")
+    try:
+        return _NOUNS[data["is"]](**values)
+    except (TypeError, ValueError) as error:
+        raise InputError(f"damaged content: {error}") from None
+
+
+# ---------------------------------------------------------------- folders
+
+
+def _safe(name: str) -> PurePosixPath:
+    path = PurePosixPath(name)
+    if path.is_absolute() or ".." in path.parts or not path.parts or "\\" in name or ":" in name:
+        raise VerificationError(f"a file name {name!r} in the manifest leads out of the folder")
+    return path
+
+
+def write_artefact(
+    folder: Path,
+    kind: str,
+    files: Mapping[str, bytes],
+    *,
+    body: Mapping[str, Any] | None = None,
+    settings: Mapping[str, Any] | None = None,
+    seed: int | None = None,
+    inputs: Mapping[str, str] | None = None,
+    parents: Mapping[str, str] | None = None,
+    manifest: str = "manifest.json",
+    force: bool = False,
+) -> dict[str, Any]:
+    """Write an artefact whole, or leave everything as it was.
+
+    Parameters
+    ----------
+    folder : where it will stand
+    kind : what it is ("patches", "dictionary", "bank", ...)
+    files : relative path to bytes
+    body : further entries of the manifest
+    settings, seed, inputs, parents : where it came from; inputs are relative path to SHA-256,
+        parents are kind to content id
+    manifest : the manifest's file name
+    force : replace an artefact of the same kind that stands there
+
+    Returns
+    -------
+    dict : the manifest as written
+
+    Raises
+    ------
+    UsageError : something stands there already and may not be replaced.
+    """
+    folder = Path(folder)
+    hashes = {str(_safe(name)): sha256(data) for name, data in sorted(files.items())}
+    head: dict[str, Any] = {
+        **(body or {}),
+        "format": FORMAT,
+        "version": VERSION,
+        "kind": kind,
+        "settings": dict(settings or {}),
+        "seed": seed,
+        "inputs": dict(inputs or {}),
+        "parents": dict(parents or {}),
+        "environment": environment(),
+        "licence": LICENCE,
+        "files": hashes,
+    }
+    head["id"] = sha256(canonical_json(head))[:16]
+
+    if folder.exists():
+        standing = folder.is_dir() and ((folder / manifest).is_file() or not any(folder.iterdir()))
+        if not standing:
+            raise UsageError(
+                "this is not an artefact of patchlab, so it is left alone",
+                where=str(folder),
+                remedy="choose another output folder",
+            )
+        if any(folder.iterdir()) and not force:
+            raise UsageError(
+                "the output exists already", where=str(folder), remedy="use --force to replace it"
+            )
+    folder.parent.mkdir(parents=True, exist_ok=True)
+    work = Path(tempfile.mkdtemp(prefix=f".{folder.name}.", dir=folder.parent))
+    try:
+        for name, data in files.items():
+            target = work / _safe(name)
+            target.parent.mkdir(parents=True, exist_ok=True)
+            target.write_bytes(data)
+        (work / manifest).write_bytes(canonical_json(head))
+        os.chmod(work, 0o755)
+        if folder.exists():
+            old = Path(tempfile.mkdtemp(prefix=f".{folder.name}.", dir=folder.parent))
+            os.replace(folder, old / "old")
+            os.replace(work, folder)
+            shutil.rmtree(old, ignore_errors=True)
+        else:
+            os.replace(work, folder)
+    finally:
+        shutil.rmtree(work, ignore_errors=True)
+    return head
+
+
+def write_file(path: Path, data: bytes) -> None:
+    """Write one file whole: a temporary name beside it, then a rename."""
+    path.parent.mkdir(parents=True, exist_ok=True)
+    handle, name = tempfile.mkstemp(prefix=f".{path.name}.", dir=path.parent)
+    try:
+        with os.fdopen(handle, "wb") as out:
+            out.write(data)
+        os.chmod(name, 0o644)
+        os.replace(name, path)
+    except BaseException:
+        Path(name).unlink(missing_ok=True)
+        raise
+
+
+def read_manifest(folder: Path, kind: str, *, manifest: str = "manifest.json") -> dict[str, Any]:
+    """Read and check a manifest.
+
+    Raises
+    ------
+    InputError : no such artefact, damaged, of another kind, or of a newer major version.
+    VerificationError : a file name in it leads out of the folder.
+    """
+    path = Path(folder) / manifest
+    try:
+        head = json.loads(path.read_bytes())
+    except FileNotFoundError:
+        raise InputError(f"there is no {kind} here", where=str(folder)) from None
+    except (OSError, ValueError) as error:
+        raise InputError(f"cannot read the manifest: {error}", where=str(path)) from None
+    if not isinstance(head, dict) or head.get("format") != FORMAT:
+        raise InputError("this manifest is not patchlab's", where=str(path))
+    if str(head.get("version", "")).split(".")[0] != VERSION.split(".")[0]:
+        raise InputError(
+            f"format version {head.get('version')} is not known here (this is {VERSION})",
+            where=str(path),
+            remedy="update patchlab",
+        )
+    if head.get("kind") != kind:
+        raise InputError(f"this is a {head.get('kind')}, not a {kind}", where=str(folder))
+    if not isinstance(head.get("files"), dict):
+        raise InputError("the manifest lists no files", where=str(path))
+    for name in head["files"]:
+        _safe(name)
+    return head
+
+
+def read_file(folder: Path, head: Mapping[str, Any], name: str) -> bytes:
+    """Read one file of an artefact after checking its hash.
+
+    Raises
+    ------
+    VerificationError : it is missing, changed, or not in the manifest.
+    """
+    path = Path(folder) / _safe(name)
+    if name not in head["files"]:
+        raise VerificationError("the manifest does not know this file", where=str(path))
+    try:
+        data = path.read_bytes()
+    except OSError as error:
+        raise VerificationError(f"cannot be read ({error.strerror})", where=str(path)) from None
+    if sha256(data) != head["files"][name]:
+        raise VerificationError(
+            "was changed after it was written (its hash differs)",
+            where=str(path),
+            remedy="export the bank again, or restore the file",
+        )
+    return data
+
+
+def save(folder: Path, kind: str, noun: Any, **about: Any) -> dict[str, Any]:
+    """Write a noun as an artefact; ``about`` is passed to :func:`write_artefact`.
+
+    Extra files may be given as ``extra={name: bytes}``.
+    """
+    data, files = pack(noun)
+    files |= about.pop("extra", {})
+    files["content.json"] = canonical_json(data)
+    return write_artefact(folder, kind, files, **about)
+
+
+def load(folder: Path, kind: str) -> tuple[Any, dict[str, Any]]:
+    """Read a noun and its manifest; every file's hash is checked as it is read."""
+    head = read_manifest(folder, kind)
+    content = json.loads(read_file(folder, head, "content.json"))
+    return unpack(content, lambda name: read_file(folder, head, name)), head
