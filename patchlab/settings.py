@@ -129,7 +129,8 @@ def _validate(f: dataclasses.Field[Any], value: Any) -> None:
     if value is None and f.default is None:
         return
     expected = str(f.type).replace(" | None", "")
-    fits = {"int": int, "float": (int, float), "str": str, "bool": bool}[expected]
+    kinds: dict[str, tuple[type, ...]] = {"int": (int,), "float": (int, float), "str": (str,)}
+    fits = kinds.get(expected, (bool,))
     if not isinstance(value, fits) or (isinstance(value, bool) and expected != "bool"):
         raise UsageError(f"{name} takes a value of type {expected}, not {value!r}")
     if about["choices"] and value not in about["choices"]:

@@ -1,0 +1,396 @@
+"""The commands: each checks its words, calls the pipeline, and prints one result."""
+
+from __future__ import annotations
+
+import functools
+import json
+from collections.abc import Callable
+from pathlib import Path
+from typing import Any
+
+import click
+
+from patchlab import __version__
+from patchlab.cli.options import print_config, resolve, settings_options
+from patchlab.cli.terminal import Terminal, table
+from patchlab.errors import InputError, QualityError, UsageError, VerificationError
+
+FOLDER = click.Path(path_type=Path)
+Command = Callable[..., Any]
+
+
+def _shared(command: Command) -> Command:
+    """The options every command has; hands the command a ``terminal``."""
+
+    @click.option("--json", "as_json", is_flag=True, help="Print the result as one JSON object.")
+    @click.option("-q", "--quiet", is_flag=True, help="No notes and no bars.")
+    @functools.wraps(command)
+    def call(*args: Any, quiet: bool, **kwargs: Any) -> Any:
+        return command(*args, terminal=Terminal(quiet), **kwargs)
+
+    return call
+
+
+def _fills_a_run(command: Command) -> Command:
+    """The options of commands that write a run's folder."""
+    for option in (
+        click.option("--dry-run", is_flag=True, help="Say what would be done, write nothing."),
+        click.option("--force", is_flag=True, help="Start anew where a run stands."),
+        click.option("--resume", is_flag=True, help="Go on with the run that stands there."),
+        click.option("-o", "--out", type=FOLDER, required=True, help="The run's folder."),
+    ):
+        command = option(command)
+    return command
+
+
+def _print(result: Any, as_json: bool, people: Callable[[Any], None]) -> None:
+    if as_json:
+        click.echo(json.dumps(result, indent=1, sort_keys=True, allow_nan=False))
+    else:
+        people(result)
+
+
+def _rows(pairs: dict[str, Any]) -> None:
+    width = max(map(len, pairs))
+    for name, value in pairs.items():
+        click.echo(f"{name.ljust(width)}  {value}")
+
+
+@click.group(context_settings={"help_option_names": ["-h", "--help"], "max_content_width": 100})
+@click.version_option(__version__, message="patchlab %(version)s")
+def patchlab() -> None:
+    """Learn a camera's own kernels from its photographs and export them compiled.
+
+    `patchlab run PHOTOS -o OUT` does the whole job. Each stage is a command too, and a
+    run's folder fills stage by stage.
+
+    Exit codes: 0 done, 1 failure, 2 usage, 3 input unusable, 4 below the quality asked for
+    (--strict), 5 verification mismatch, 130 interrupted.
+    """
+
+
+def _work(
+    photos: Path, until: str, terminal: Terminal, options: dict[str, Any]
+) -> dict[str, Any] | None:
+    """Fill a run's folder up to a stage; None when the words asked for something else."""
+    settings = resolve(options, options["config"])
+    if options["print_config"]:
+        print_config(settings)
+        return None
+    from patchlab import pipeline
+
+    out = options["out"]
+    terminal.resume_hint = f"; go on with: patchlab {until} {photos} -o {out} --resume"
+    pipeline.prepare(out, photos, resume=options["resume"], force=options["force"])
+    with terminal.working():
+        desk = pipeline.Desk(out, settings, options["resume"], terminal, terminal.note)
+        if options["dry_run"]:
+            return pipeline.foresee(photos, desk)
+        return pipeline.work(photos, desk, until)
+
+
+@patchlab.command()
+@click.argument("photos", type=FOLDER)
+@_fills_a_run
+@settings_options("photos", "survey", "patches", "learn", "bank", "common")
+@_shared
+def run(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
+    """Do the whole job: PHOTOS to a compiled bank and a page."""
+    result = _work(photos, "run", terminal, options)
+    if result is None:
+        return
+    if not options["dry_run"]:
+        from patchlab import report
+
+        with terminal.working():
+            result["seconds"]["report"] = report.write(options["out"], terminal)
+        result["page"] = str(options["out"] / "report" / "index.html")
+    _print(result, as_json, _say_run)
+    if not options["dry_run"]:
+        _hold_to_quality(resolve(options, options["config"]).strict, result)
+
+
+def _frames(frames: dict[str, int]) -> str:
+    return f"{frames['used']} used, {frames['quarantined']} quarantined"
+
+
+def _say_run(result: dict[str, Any]) -> None:
+    if "bank" not in result:
+        _rows(result)
+        return
+    bank, fits, frames = result["bank"], result["fits"], result["frames"]
+    lines = {
+        "frames": _frames(frames),
+        "patches": f"{result['patches']} of {result['patch_size']}x{result['patch_size']}",
+        "components": f"{result['components']}, {'converged' if result['converged'] else 'NOT converged'}",
+        "fits": f"{fits['good']} good, {fits['poor']} poor, median R2 {fits['median_r2']:.2f}",
+        "bank": f"{bank['path']}: {bank['kernels']} kernels of {bank['size']}x{bank['size']}, "
+        f"{bank['multiplies_per_pixel']:.0f} multiplies a pixel",
+        "error": f"worst {bank['worst_error']:.2g}, proven bound {bank['error_bound']:.2g}",
+        "library": bank["library"],
+        "page": result.get("page", ""),
+        "time": f"{sum(result['seconds'].values()):.0f} s",
+    }
+    if bank["coverage"] is not None:
+        lines["coverage"] = (
+            f"{bank['coverage']:.2f} of the atoms (rotated basis {bank['coverage_rotated']:.2f})"
+        )
+    _rows(lines)
+
+
+def _hold_to_quality(strict: bool, result: dict[str, Any]) -> None:
+    short = result["warnings"]
+    if strict and short:
+        raise QualityError(f"--strict: {len(short)} warnings, the first: {short[0]}")
+
+
+@patchlab.command()
+@click.argument("photos", type=FOLDER)
+@_fills_a_run
+@settings_options("photos", "survey", "common")
+@_shared
+def survey(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
+    """Say what the camera itself does to PHOTOS: noise, blur, spectrum, marks."""
+    result = _work(photos, "survey", terminal, options)
+    if result is not None:
+        _print(result, as_json, _say_survey)
+
+
+def _say_survey(result: dict[str, Any]) -> None:
+    if "noise" not in result:
+        _rows(result)
+        return
+    noise, blur = result["noise"], result["blur"]
+    if noise["measurable"] and noise["gain_dn_per_electron"] is not None:
+        law = (
+            f"gain {noise['gain_dn_per_electron']:.4g} DN/e- "
+            f"(se {noise['gain_standard_error']:.2g}), read noise {noise['read_noise_dn']:.3g} DN"
+        )
+    else:
+        law = (
+            "measured as a curve"
+            if noise["measurable"]
+            else f"not measurable here: {noise['reason']}"
+        )
+    _rows(
+        {
+            "frames": _frames(result["frames"]),
+            "pixels": result["pixels"],
+            "noise": law,
+            "blur": f"{blur['sigma_px']:.2f} px" if blur["sigma_px"] else blur["note"],
+            "spectrum": result["spectrum"]["exponent"],
+            "table": result["table"],
+        }
+    )
+    found = {True: "found", False: "no", None: "cannot tell"}
+    click.echo()
+    table(
+        [
+            (
+                m["name"],
+                found[m["found"]],
+                f"{m['value']:.3g}",
+                f"{m['threshold']:.3g}",
+                m["remedy"],
+            )
+            for m in result["marks"]
+        ],
+        ("mark", "found", "value", "threshold", "remedy"),
+    )
+
+
+@patchlab.command()
+@click.argument("photos", type=FOLDER)
+@_fills_a_run
+@settings_options("photos", "survey", "patches", "learn", "common")
+@_shared
+def learn(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
+    """Survey PHOTOS, sample and whiten patches, and learn their basis."""
+    result = _work(photos, "learn", terminal, options)
+    if result is not None:
+        _print(result, as_json, _rows)
+
+
+@patchlab.command()
+@click.argument("run", type=FOLDER)
+@click.option("--force", is_flag=True, help="Fit again where fits stand.")
+@settings_options("common")
+@_shared
+def fit(run: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
+    """Describe each component of a RUN's dictionary by a parametric kernel."""
+    settings = resolve(options, options["config"])
+    from patchlab import pipeline
+
+    with terminal.working():
+        desk = pipeline.Desk(run, settings, not options["force"], terminal, terminal.note)
+        result = pipeline.fit_run(desk)
+    _print(result, as_json, _rows)
+
+
+@patchlab.command()
+@click.argument("run", type=FOLDER, required=False)
+@click.option("--taps", type=FOLDER, help="A .npy file of kernels (n, h, h): a bank of your own.")
+@click.option("-o", "--out", type=FOLDER, help="The bank's folder; by default RUN/bank.")
+@click.option("--force", is_flag=True, help="Replace the bank that stands there.")
+@settings_options("photos", "bank", "common")
+@_shared
+def export(run: Path | None, terminal: Terminal, as_json: bool, **options: Any) -> None:
+    """Choose a bank from a RUN's fits and export it, or export your own kernels (--taps)."""
+    settings = resolve(options, options["config"])
+    if (run is None) == (options["taps"] is None):
+        raise UsageError("export takes either a RUN or --taps FILE.npy")
+    if run is None and options["out"] is None:
+        raise UsageError("export --taps needs an output folder", remedy="add -o BANK")
+    from patchlab import pipeline
+
+    with terminal.working():
+        if run is not None:
+            desk = pipeline.Desk(run, settings, True, terminal, terminal.note)
+            result = pipeline.export_run(desk, options["out"], force=options["force"])
+        else:
+            desk = pipeline.Desk(options["out"], settings, False, terminal, terminal.note)
+            result = pipeline.export_taps(options["taps"], desk, force=options["force"])
+    _print(result, as_json, _rows)
+
+
+@patchlab.command()
+@click.argument("bank", type=FOLDER)
+@_shared
+def verify(bank: Path, terminal: Terminal, as_json: bool) -> None:
+    """Run every target that a BANK holds against the oracle; exit 5 on a mismatch."""
+    from patchlab import pipeline
+
+    with terminal.working():
+        result = pipeline.verify(bank, terminal)
+    _print(result, as_json, _say_verify)
+    if not result["passed"]:
+        bad = [c["target"] for c in result["checks"] if c["passed"] is False]
+        raise VerificationError(f"{', '.join(bad)} differ from the oracle", where=str(bank))
+
+
+def _say_verify(result: dict[str, Any]) -> None:
+    word = {True: "equal", False: "DIFFERS", None: "not run"}
+    table(
+        [
+            (
+                c["target"],
+                c["what"],
+                "" if c["worst_error"] is None else f"{c['worst_error']:.3g}",
+                "" if c["bound"] is None else f"{c['bound']:.3g}",
+                word[c["passed"]],
+                c["note"],
+            )
+            for c in result["checks"]
+        ],
+        ("target", "what", "worst error", "bound", "verdict", "note"),
+    )
+
+
+@patchlab.command()
+@click.argument("bank", type=FOLDER)
+@click.argument("pictures", type=FOLDER)
+@click.option("-o", "--out", type=FOLDER, required=True, help="Folder for maps and edgels.")
+@click.option("--false-edges", type=float, help="False elements per megapixel of flat area.")
+@click.option("--threshold", type=float, help="A strength in noise units instead of a rate.")
+@click.option("--force", is_flag=True, help="Replace what stands there.")
+@click.option("--max-bad", type=float, default=0.1, help="Share of pictures that may be unusable.")
+@_shared
+def detect(bank: Path, pictures: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
+    """Find edges in PICTURES with a BANK: maps, edgels and overlays.
+
+    Edges that steer a machine or gauge a safety part need the usual care: validate on your own
+    parts and light, and follow the codes and qualified practice that apply.
+    """
+    from patchlab import pipeline, report
+
+    with terminal.working():
+        result = pipeline.detect(
+            bank,
+            pictures,
+            options["out"],
+            rate=options["false_edges"],
+            threshold=options["threshold"],
+            max_bad=options["max_bad"],
+            force=options["force"],
+            draw=report.edge_pictures,
+            progress=terminal,
+        )
+    for bad in result["quarantined"]:
+        terminal.warn(f"{bad['path']}: {bad['reason']}")
+    _print(result, as_json, _say_detect)
+
+
+def _say_detect(result: dict[str, Any]) -> None:
+    table(
+        [(i["path"], i["edgels"], round(i["strength_threshold"], 3)) for i in result["images"]],
+        ("picture", "edgels", "threshold"),
+    )
+
+
+@patchlab.command()
+@click.argument("bank", type=FOLDER)
+@click.option("--size", default="1920x1080", help="Width x height of the picture.")
+@click.option("--repeats", default=7, type=click.IntRange(3, 100), help="Timed runs of each.")
+@_shared
+def bench(bank: Path, size: str, repeats: int, terminal: Terminal, as_json: bool) -> None:
+    """Time a BANK's targets beside the libraries that are installed, as ratios of one run."""
+    from patchlab import pipeline
+
+    try:
+        width, height = (int(part) for part in size.lower().split("x"))
+    except ValueError:
+        raise UsageError(
+            f"--size {size!r} is not WIDTHxHEIGHT", remedy="for example 1920x1080"
+        ) from None
+    with terminal.working():
+        result = pipeline.bench(bank, width, height, repeats, terminal)
+    _print(result, as_json, _say_bench)
+
+
+def _say_bench(result: dict[str, Any]) -> None:
+    table(
+        [
+            (r["target"], f"{r['median_ms']:.1f}", f"{r['ratio']:.2f}", r["note"])
+            for r in result["targets"]
+        ],
+        ("target", "median ms", "times the compiled bank", "note"),
+    )
+
+
+@patchlab.command()
+@click.argument("run", type=FOLDER)
+@_shared
+def report(run: Path, terminal: Terminal, as_json: bool) -> None:
+    """Write (again) the page of a RUN."""
+    from patchlab import report as pages
+
+    with terminal.working():
+        seconds = pages.write(run, terminal)
+    result = {"page": str(run / "report" / "index.html"), "seconds": seconds}
+    _print(result, as_json, _rows)
+
+
+@patchlab.command()
+@click.argument("first", type=FOLDER)
+@click.argument("second", type=FOLDER)
+@_shared
+def compare(first: Path, second: Path, terminal: Terminal, as_json: bool) -> None:
+    """Match two dictionaries or two banks: bit-equal, equivalent or different."""
+    from patchlab import pipeline
+
+    _print(pipeline.compare(first, second), as_json, _rows)
+
+
+@patchlab.command()
+@click.option("-o", "--out", type=FOLDER, required=True, help="Folder for the frames.")
+@click.option("--count", default=24, type=click.IntRange(1, 1000), help="Frames to render.")
+@_shared
+def scenes(out: Path, count: int, terminal: Terminal, as_json: bool) -> None:
+    """Render frames of an invented camera at an invented place, with noise and blur known."""
+    from patchlab import pipeline
+
+    if out.exists() and not out.is_dir():
+        raise InputError("the output is a file", where=str(out))
+    with terminal.working():
+        result = pipeline.scenes(out, count, terminal)
+    _print(result, as_json, _rows)

@@ -1,0 +1,420 @@
+"""What is done with a bank or a run that stands: verify, detect, bench, compare, reopen."""
+
+from __future__ import annotations
+
+import io
+from collections import Counter
+from collections.abc import Callable, Mapping
+from dataclasses import dataclass
+from pathlib import Path
+from typing import Any
+
+import numpy as np
+
+from patchlab import bank as banks
+from patchlab import edges, export, images, learn, store
+from patchlab.conventions import shift_cosine
+from patchlab.errors import InputError, PatchlabError, UsageError
+from patchlab.pipeline import tell
+from patchlab.pipeline.bundle import prove, write_bundle
+from patchlab.pipeline.desk import Desk, bank_name
+from patchlab.pipeline.run import choose, fit
+from patchlab.progress import Progress, silent
+from patchlab.types import (
+    Bank,
+    Dictionary,
+    EdgeMap,
+    Frame,
+    KernelFits,
+    PatchSet,
+    Plan,
+    Quarantined,
+    Survey,
+)
+
+Draw = Callable[[Frame, EdgeMap, int], Mapping[str, bytes]]
+
+
+def bank_folder(path: Path) -> Path:
+    """The bank at a path: the folder itself, or the bank inside a run's folder."""
+    if not (path / "bank.json").is_file() and (path / "bank" / "bank.json").is_file():
+        return path / "bank"
+    return path
+
+
+# ---------------------------------------------------------------- a run's later stages
+
+
+def _learned(desk: Desk) -> tuple[Dictionary, dict[str, Any]]:
+    (dictionary, _), head = store.load(desk.out / "dictionary", "dictionary")
+    return dictionary, head
+
+
+def fit_run(desk: Desk) -> dict[str, Any]:
+    """Fit the components of a run's dictionary."""
+    dictionary, head = _learned(desk)
+    (atom_fits, filter_fits), _ = fit(dictionary, head, desk)
+    return {"atoms": tell.fits(atom_fits), "filters": tell.fits(filter_fits)}
+
+
+def export_run(desk: Desk, out: Path | None, *, force: bool) -> dict[str, Any]:
+    """Choose and export a bank from a run's fits."""
+    folder = out or desk.out / "bank"
+    _may_write(folder, force)
+    dictionary, _ = _learned(desk)
+    (atom_fits, _), fits_head = store.load(desk.out / "fits", "fits")
+    survey, survey_head = store.load(desk.out / "survey", "survey")
+    home = folder if out else desk.out
+    bank = choose(dictionary, atom_fits, survey, bank_name(home, desk.settings), desk)
+    parents = {"fits": fits_head["id"], "survey": survey_head["id"]}
+    inputs = survey_head["inputs"]
+    return tell.bank(write_bundle(folder, bank, desk, parents=parents, inputs=inputs))
+
+
+def export_taps(path: Path, desk: Desk, *, force: bool) -> dict[str, Any]:
+    """Make a bank from kernels in a ``.npy`` file."""
+    _may_write(desk.out, force)
+    s = desk.settings
+    try:
+        data = path.read_bytes()
+        taps = np.load(io.BytesIO(data), allow_pickle=False)
+    except OSError as error:
+        raise InputError(f"cannot be read: {error.strerror}", where=str(path)) from None
+    except (ValueError, EOFError) as error:
+        raise InputError(f"is no .npy file of numbers: {error}", where=str(path)) from None
+    bank = banks.bank_from_taps(
+        taps,
+        pixels=s.pixels or "Mono8",
+        name=bank_name(desk.out, s),
+        border=s.border,
+        black=s.black,
+        white=s.white,
+    )
+    inputs = {path.name: store.sha256(data)}
+    return tell.bank(write_bundle(desk.out, bank, desk, parents={}, inputs=inputs))
+
+
+def _may_write(folder: Path, force: bool) -> None:
+    if folder.exists() and not force:
+        raise UsageError(
+            "there is something here already", where=str(folder), remedy="--force replaces it"
+        )
+
+
+# ---------------------------------------------------------------- verify
+
+
+def verify(path: Path, progress: Progress = silent) -> dict[str, Any]:
+    """Run every target of a bank; plain data, with ``passed`` for all."""
+    folder = bank_folder(path)
+    bank, plan, head = banks.read_bank(folder)
+    proof = prove(folder, bank, plan, head, progress)
+
+    def number(value: float, ran: bool | None) -> float | None:
+        return float(value) if ran is not None and np.isfinite(value) else None
+
+    return {
+        "bank": bank.name,
+        "id": head["id"],
+        "passed": proof.passed,
+        "checks": [
+            {
+                "target": c.target,
+                "what": c.what,
+                "worst_error": number(c.worst_error, c.passed),
+                "bound": number(c.bound, c.passed),
+                "passed": c.passed,
+                "note": c.note,
+            }
+            for c in proof.checks
+        ],
+    }
+
+
+# ---------------------------------------------------------------- detect
+
+
+def responder(folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any]) -> Any:
+    """The fastest engine at hand: the compiled library of this machine, else numpy."""
+    native = banks.open_native(folder, bank, head)
+    if native is not None:
+        return native.responses
+    return lambda pixels: banks.responses(bank, pixels, plan)
+
+
+def detect(
+    path: Path,
+    pictures: Path,
+    out: Path,
+    *,
+    rate: float | None,
+    threshold: float | None,
+    max_bad: float,
+    force: bool,
+    draw: Draw,
+    progress: Progress = silent,
+) -> dict[str, Any]:
+    """Edges of every picture: maps and edgels as files, counts as plain data.
+
+    Raises
+    ------
+    InputError : more than ``max_bad`` of the pictures cannot serve (exit 3).
+    UsageError : the output exists, or the bank has no promise to set a threshold from.
+    """
+    folder = bank_folder(path)
+    bank, plan, head = banks.read_bank(folder)
+    level = _level(bank, rate, threshold)
+    _may_write(out, force)
+    listing = images.list_photos(pictures)
+    if not listing.files:
+        raise InputError("there are no pictures here", where=str(pictures))
+    respond = responder(folder, bank, plan, head)
+    found: list[dict[str, Any]] = []
+    bad: list[Quarantined] = []
+    for done, name in enumerate(listing.files, 1):
+        try:
+            for frame in images.read(listing.root, name, _options(bank)):
+                found.append(_detect_one(bank, frame, respond, level, out, draw))
+        except PatchlabError as error:
+            bad.append(Quarantined(name, str(error)))
+        progress("detect", done, len(listing.files), name)
+    if len(bad) > max_bad * len(listing.files):
+        raise InputError(
+            f"{len(bad)} of {len(listing.files)} pictures cannot serve",
+            where=str(pictures),
+            remedy=f"the first: {bad[0].path}: {bad[0].reason}",
+        )
+    result = {
+        "bank": head["id"],
+        "images": found,
+        "quarantined": [{"path": q.path, "reason": q.reason} for q in bad],
+    }
+    store.write_file(out / "detect.json", store.canonical_json(result))
+    return result
+
+
+def _level(bank: Bank, rate: float | None, threshold: float | None) -> float:
+    if threshold is not None:
+        if rate is not None:
+            raise UsageError("give either --false-edges or --threshold")
+        if not threshold > 0:
+            raise UsageError(f"--threshold {threshold} is not above 0")
+        return threshold
+    if bank.thresholds is None:
+        raise UsageError(
+            "this bank carries no promise of false edges, as its noise was not measurable",
+            remedy="give --threshold a strength",
+        )
+    return edges.strength_for(bank.thresholds, 10.0 if rate is None else rate)
+
+
+def _options(bank: Bank) -> images.ReadOptions:
+    c = bank.contract
+    return images.ReadOptions(white=c.white, black=c.black, transfer=c.transfer, pixels=c.pixels)
+
+
+def _detect_one(
+    bank: Bank, frame: Frame, respond: Any, level: float, out: Path, draw: Draw
+) -> dict[str, Any]:
+    found = edges.detect(bank, frame.pixels, respond, threshold=level, invalid=frame.invalid)
+    edgels = edges.edgels(bank, frame.pixels, found, respond)
+    stem = frame.path.replace("#", "_page")
+    store.write_file(out / "edgels" / f"{stem}.csv", edges.edgels_csv(edgels))
+    for name, data in draw(frame, found, orientation_count(bank)).items():
+        store.write_file(out / name / f"{stem}.png", data)
+    return {"path": frame.path, "edgels": len(edgels), "strength_threshold": float(level)}
+
+
+def orientation_count(bank: Bank) -> int:
+    """Directions on the bank's lattice."""
+    return 1 + max((k.orientation or 0 for k in bank.kernels), default=0)
+
+
+# ---------------------------------------------------------------- compare
+
+
+def compare(first: Path, second: Path) -> dict[str, Any]:
+    """Match two dictionaries or two banks: bit-equal, equivalent (|cos| >= 0.999) or different."""
+    kind, a, one = _comparable(first)
+    other, b, two = _comparable(second)
+    if kind != other:
+        raise UsageError(f"cannot compare a {kind} with a {other}")
+    if kind == "dictionary":
+        cosines = learn.match(a, b)
+    else:
+        cosines = np.array([max(shift_cosine(k, m) for m in b) for k in a])
+    same_bytes = one == two
+    equal = a.shape == b.shape and bool((cosines >= 0.999).all())
+    return {
+        "kind": kind,
+        "verdict": "bit-equal" if same_bytes else "equivalent" if equal else "different",
+        "first": len(a),
+        "second": len(b),
+        "worst_cosine": round(float(cosines.min()), 6),
+        "median_cosine": round(float(np.median(cosines)), 6),
+        "matched_at_0.95": round(float((cosines >= 0.95).mean()), 4),
+    }
+
+
+def _comparable(path: Path) -> tuple[str, Any, Any]:
+    folder = bank_folder(path)
+    if (folder / "bank.json").is_file():
+        bank, _, head = banks.read_bank(folder)
+        return "bank", bank.taps.astype(np.float64), head["files"]["kernels.npy"]
+    if (path / "dictionary").is_dir():
+        path = path / "dictionary"
+    (dictionary, _), head = store.load(path, "dictionary")
+    return "dictionary", dictionary.atoms, head["files"]["0.atoms.npy"]
+
+
+# ---------------------------------------------------------------- scenes
+
+
+def scenes(out: Path, count: int, progress: Progress = silent) -> dict[str, Any]:
+    """Render the frames of the invented camera."""
+    images.make_sample_images(out, count, progress=progress)
+    return {"folder": str(out), "frames": count}
+
+
+# ---------------------------------------------------------------- a run, reopened for its page
+
+
+@dataclass(frozen=True, eq=False)
+class RunContent:
+    """Everything a finished run holds, for its page."""
+
+    photos: Mapping[str, Any]
+    survey: Survey
+    patches: PatchSet
+    dictionary: Dictionary
+    baseline: Dictionary
+    atom_fits: KernelFits
+    filter_fits: KernelFits
+    bank: Bank
+    plan: Plan
+    bank_head: Mapping[str, Any]
+    settings: Mapping[str, Any]
+    frame: Frame | None
+    found: EdgeMap | None
+    rate: float
+    no_edges: str = ""
+
+    @property
+    def orientations(self) -> int:
+        """Directions on the bank's lattice."""
+        return orientation_count(self.bank)
+
+    @property
+    def purpose(self) -> str:
+        """What the bank is for, as an adjective."""
+        return {"edges": "edge", "features": "feature"}.get(self.bank.purpose, self.bank.purpose)
+
+    @property
+    def families(self) -> str:
+        """How many atoms each family describes, in words."""
+        counts = Counter(f.family for f in self.atom_fits.fits)
+        return ", ".join(f"{n} {name.replace('_', '-')}" for name, n in counts.most_common())
+
+    @property
+    def warnings(self) -> tuple[str, ...]:
+        """Everything that a person should know first."""
+        return (*self.dictionary.warnings, *self.bank.warnings)
+
+
+def open_run(out: Path) -> RunContent:
+    """Read every artefact of a finished run, and find the edges of its example frame.
+
+    Raises
+    ------
+    InputError : a stage is missing; VerificationError : a file was changed.
+    """
+    survey, survey_head = store.load(out / "survey", "survey")
+    patches, _ = store.load(out / "patches", "patches")
+    (dictionary, baseline), _ = store.load(out / "dictionary", "dictionary")
+    (atom_fits, filter_fits), _ = store.load(out / "fits", "fits")
+    bank, plan, head = banks.read_bank(out / "bank")
+    frame = _example(out, survey, survey_head)
+    rate = float(head["settings"].get("false_edges", 10.0))
+    found, reason = None, "the survey kept no example frame"
+    if frame is not None:
+        found, reason = _example_edges(out / "bank", bank, plan, head, frame, rate)
+    return RunContent(
+        photos=survey_head["photos"],
+        survey=survey,
+        patches=patches,
+        dictionary=dictionary,
+        baseline=baseline,
+        atom_fits=atom_fits,
+        filter_fits=filter_fits,
+        bank=bank,
+        plan=plan,
+        bank_head=head,
+        settings={**survey_head["settings"], **head["settings"], "seed": head["seed"]},
+        frame=frame,
+        found=found,
+        rate=rate,
+        no_edges=reason,
+    )
+
+
+def _example(out: Path, survey: Survey, head: Mapping[str, Any]) -> Frame | None:
+    if "example.npy" not in head["files"]:
+        return None
+    data = store.read_file(out / "survey", head, "example.npy")
+    pixels = np.load(io.BytesIO(data), allow_pickle=False)
+    return Frame(head["example"], pixels, survey.contract)
+
+
+def _example_edges(
+    folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any], frame: Frame, rate: float
+) -> tuple[EdgeMap | None, str]:
+    if bank.thresholds is None:
+        return None, "this bank has no threshold in noise units"
+    level = edges.strength_for(bank.thresholds, rate)
+    respond = responder(folder, bank, plan, head)
+    try:
+        return edges.detect(bank, frame.pixels, respond, threshold=level), ""
+    except PatchlabError as error:
+        return None, str(error)
+
+
+# ---------------------------------------------------------------- bench
+
+
+def bench(
+    path: Path, width: int, height: int, repeats: int, progress: Progress = silent
+) -> dict[str, Any]:
+    """Times of a bank's targets and of the libraries installed, on one thread."""
+    folder = bank_folder(path)
+    bank, plan, head = banks.read_bank(folder)
+    if min(width, height) < bank.size:
+        raise UsageError(f"--size must be at least {bank.size}x{bank.size}")
+    pixels = export.bench.picture(bank, width, height)
+    targets: dict[str, tuple[export.bench.Run, str]] = {}
+    native = banks.open_native(folder, bank, head)
+    if native is not None:
+        targets["compiled library"] = (native.responses, "float32 planes")
+    targets["numpy engine"] = (lambda p: banks.responses(bank, p, plan), "float32 planes")
+    model = f"{bank.name}.onnx"
+    graph = None
+    if model in head["files"]:
+        graph = export.bench.onnx_graph(store.read_file(folder, head, model))
+    peers = [*([graph] if graph else []), *export.bench.libraries(bank)]
+    targets |= {name: (run, note) for name, run, note in peers}
+    timings = export.bench.measure(targets, pixels, repeats, progress)
+    return {
+        "bank": bank.name,
+        "size": [width, height],
+        "kernels": len(bank),
+        "targets": [
+            {
+                "target": t.target,
+                "median_ms": round(t.median_ms, 3),
+                "low_ms": round(t.low_ms, 3),
+                "high_ms": round(t.high_ms, 3),
+                "ratio": round(t.ratio, 3),
+                "note": t.note,
+            }
+            for t in timings
+        ],
+    }
