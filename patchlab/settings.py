@@ -95,6 +95,7 @@ class Settings:
     border: str = _setting(
         DEFAULT_BORDER, "bank", "What lies beyond the picture's rim.", choices=tuple(BORDERS)
     )
+    library: bool = _setting(True, "bank", "Build the shared library of this machine.")
     name: str | None = _setting(None, "bank", "C prefix of the bank; by default the folder's name.")
     # all
     seed: int = _setting(0, "common", "Seed of every draw.", low=0, high=2**31 - 1)

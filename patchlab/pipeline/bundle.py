@@ -59,7 +59,7 @@ def write_bundle(
     small = export.make_cases(bank, plan, banks.oracle, small=True)
     files = dict(export.emit_c(bank, plan, small))
     desk.progress("export", 1, 4, "C source")
-    library, said = export.compile_library(files, bank.name)
+    library, said = _library(files, bank.name, desk.settings.library)
     files |= library
     desk.progress("export", 2, 4, "library")
     graph = export.emit_onnx(bank)
@@ -84,6 +84,12 @@ def write_bundle(
         raise error
     onnx = "; ".join(graph.notes) or "written"
     return Written(folder, bank, plan, head, proof, said, onnx)
+
+
+def _library(files: Mapping[str, bytes], name: str, wanted: bool) -> tuple[export.Files, str]:
+    if not wanted:
+        return {}, "not built, as it was not asked for"
+    return export.compile_library(files, name)
 
 
 def prove(
