@@ -18,7 +18,7 @@ from pathlib import Path
 import numpy as np
 
 from patchlab import bank as banks
-from patchlab import pipeline
+from patchlab.pipeline import desk, run, use
 from patchlab.settings import Settings, from_toml
 
 HERE = Path(__file__).resolve().parent
@@ -28,7 +28,7 @@ PHOTOS = HERE.parent / "sample_images"
 def build(config: Path, folder: Path) -> Path:
     """Run the main job by one configuration; gives the bank's folder."""
     settings = Settings(**from_toml(config.read_text(), config.name), name=config.stem)
-    pipeline.work(PHOTOS, pipeline.Desk(folder, settings))
+    run.work(PHOTOS, desk.Desk(folder, settings))
     return folder / "bank"
 
 
@@ -37,9 +37,9 @@ def differences(standing: Path, fresh: Path) -> list[str]:
     if not (standing / "bank.json").is_file():
         return ["it is missing"]
     found = []
-    if not pipeline.verify(standing)["passed"]:
+    if not use.verify(standing)["passed"]:
         found.append("its targets differ from its oracle, or a file was changed")
-    match = pipeline.compare(standing, fresh)
+    match = use.compare(standing, fresh)
     if match["verdict"] == "different":
         found.append(f"a kernel moved: the worst match is at |cos| = {match['worst_cosine']}")
     old, new = (banks.read_bank(p)[0] for p in (standing, fresh))

@@ -77,16 +77,16 @@ def _work(
     if options["print_config"]:
         print_config(settings)
         return None
-    from patchlab import pipeline
+    from patchlab.pipeline import desk, run
 
     out = options["out"]
     terminal.resume_hint = f"; go on with: patchlab {until} {photos} -o {out} --resume"
-    pipeline.prepare(out, photos, resume=options["resume"], force=options["force"])
+    desk.prepare(out, photos, resume=options["resume"], force=options["force"])
     with terminal.working():
-        desk = pipeline.Desk(out, settings, options["resume"], terminal, terminal.note)
+        place = desk.Desk(out, settings, options["resume"], terminal, terminal.note)
         if options["dry_run"]:
-            return pipeline.foresee(photos, desk)
-        return pipeline.work(photos, desk, until)
+            return run.foresee(photos, place)
+        return run.work(photos, place, until)
 
 
 @patchlab.command()
@@ -119,10 +119,11 @@ def _say_run(result: dict[str, Any]) -> None:
         _rows(result)
         return
     bank, fits, frames = result["bank"], result["fits"], result["frames"]
+    state = "converged" if result["converged"] else "NOT converged"
     lines = {
         "frames": _frames(frames),
         "patches": f"{result['patches']} of {result['patch_size']}x{result['patch_size']}",
-        "components": f"{result['components']}, {'converged' if result['converged'] else 'NOT converged'}",
+        "components": f"{result['components']}, {state}",
         "fits": f"{fits['good']} good, {fits['poor']} poor, median R2 {fits['median_r2']:.2f}",
         "bank": f"{bank['path']}: {bank['kernels']} kernels of {bank['size']}x{bank['size']}, "
         f"{bank['multiplies_per_pixel']:.0f} multiplies a pixel",
@@ -219,11 +220,11 @@ def learn(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> No
 def fit(run: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Describe each component of a RUN's dictionary by a parametric kernel."""
     settings = resolve(options, options["config"])
-    from patchlab import pipeline
+    from patchlab.pipeline.desk import Desk
+    from patchlab.pipeline.run import fit_run
 
     with terminal.working():
-        desk = pipeline.Desk(run, settings, not options["force"], terminal, terminal.note)
-        result = pipeline.fit_run(desk)
+        result = fit_run(Desk(run, settings, not options["force"], terminal, terminal.note))
     _print(result, as_json, _rows)
 
 
@@ -241,15 +242,15 @@ def export(run: Path | None, terminal: Terminal, as_json: bool, **options: Any) 
         raise UsageError("export takes either a RUN or --taps FILE.npy")
     if run is None and options["out"] is None:
         raise UsageError("export --taps needs an output folder", remedy="add -o BANK")
-    from patchlab import pipeline
+    from patchlab.pipeline.desk import Desk
+    from patchlab.pipeline.run import export_run, export_taps
 
     with terminal.working():
+        desk = Desk(run or options["out"], settings, True, terminal, terminal.note)
         if run is not None:
-            desk = pipeline.Desk(run, settings, True, terminal, terminal.note)
-            result = pipeline.export_run(desk, options["out"], force=options["force"])
+            result = export_run(desk, options["out"], force=options["force"])
         else:
-            desk = pipeline.Desk(options["out"], settings, False, terminal, terminal.note)
-            result = pipeline.export_taps(options["taps"], desk, force=options["force"])
+            result = export_taps(options["taps"], desk, force=options["force"])
     _print(result, as_json, _rows)
 
 
@@ -258,10 +259,10 @@ def export(run: Path | None, terminal: Terminal, as_json: bool, **options: Any) 
 @_shared
 def verify(bank: Path, terminal: Terminal, as_json: bool) -> None:
     """Run every target that a BANK holds against the oracle; exit 5 on a mismatch."""
-    from patchlab import pipeline
+    from patchlab.pipeline import use
 
     with terminal.working():
-        result = pipeline.verify(bank, terminal)
+        result = use.verify(bank, terminal)
     _print(result, as_json, _say_verify)
     if not result["passed"]:
         bad = [c["target"] for c in result["checks"] if c["passed"] is False]
@@ -301,10 +302,11 @@ def detect(bank: Path, pictures: Path, terminal: Terminal, as_json: bool, **opti
     Edges that steer a machine or gauge a safety part need the usual care: validate on your own
     parts and light, and follow the codes and qualified practice that apply.
     """
-    from patchlab import pipeline, report
+    from patchlab import report
+    from patchlab.pipeline import use
 
     with terminal.working():
-        result = pipeline.detect(
+        result = use.detect(
             bank,
             pictures,
             options["out"],
@@ -334,7 +336,7 @@ def _say_detect(result: dict[str, Any]) -> None:
 @_shared
 def bench(bank: Path, size: str, repeats: int, terminal: Terminal, as_json: bool) -> None:
     """Time a BANK's targets beside the libraries that are installed, as ratios of one run."""
-    from patchlab import pipeline
+    from patchlab.pipeline import use
 
     try:
         width, height = (int(part) for part in size.lower().split("x"))
@@ -343,7 +345,7 @@ def bench(bank: Path, size: str, repeats: int, terminal: Terminal, as_json: bool
             f"--size {size!r} is not WIDTHxHEIGHT", remedy="for example 1920x1080"
         ) from None
     with terminal.working():
-        result = pipeline.bench(bank, width, height, repeats, terminal)
+        result = use.bench(bank, width, height, repeats, terminal)
     _print(result, as_json, _say_bench)
 
 
@@ -376,9 +378,9 @@ def report(run: Path, terminal: Terminal, as_json: bool) -> None:
 @_shared
 def compare(first: Path, second: Path, terminal: Terminal, as_json: bool) -> None:
     """Match two dictionaries or two banks: bit-equal, equivalent or different."""
-    from patchlab import pipeline
+    from patchlab.pipeline import use
 
-    _print(pipeline.compare(first, second), as_json, _rows)
+    _print(use.compare(first, second), as_json, _rows)
 
 
 @patchlab.command()
@@ -387,10 +389,10 @@ def compare(first: Path, second: Path, terminal: Terminal, as_json: bool) -> Non
 @_shared
 def scenes(out: Path, count: int, terminal: Terminal, as_json: bool) -> None:
     """Render frames of an invented camera at an invented place, with noise and blur known."""
-    from patchlab import pipeline
+    from patchlab.pipeline import use
 
     if out.exists() and not out.is_dir():
         raise InputError("the output is a file", where=str(out))
     with terminal.working():
-        result = pipeline.scenes(out, count, terminal)
+        result = use.scenes(out, count, terminal)
     _print(result, as_json, _rows)

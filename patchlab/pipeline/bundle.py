@@ -8,7 +8,8 @@ from pathlib import Path
 from typing import Any
 
 from patchlab import bank as banks
-from patchlab import export
+from patchlab import export, store
+from patchlab.errors import UsageError
 from patchlab.pipeline.desk import Desk
 from patchlab.progress import Progress, silent
 from patchlab.types import Bank, Plan
@@ -46,32 +47,31 @@ def write_bundle(
     parents: Mapping[str, str],
     inputs: Mapping[str, str],
     crop: Any = None,
-    force: bool = True,
 ) -> Written:
     """Plan a bank, generate and build every target, write the folder, prove it equal.
+
+    An artefact that stands there is replaced.
 
     Raises
     ------
     VerificationError : a target differs from the oracle; the folder stays for inspection.
     """
     plan = banks.make_plan(bank)
-    cases = export.make_cases(bank, plan, banks.oracle, crop=crop)
-    small = export.make_cases(bank, plan, banks.oracle, small=True)
-    files = dict(export.emit_c(bank, plan, small))
+    files = dict(export.emit(bank, plan))
+    files |= export.emit_selftest(bank, plan, _selftest_cases(bank, plan))
     desk.progress("export", 1, 4, "C source")
-    library, said = _library(files, bank.name, desk.settings.library)
-    files |= library
+    library, said = build_library(files, bank.name, desk.settings.library)
     desk.progress("export", 2, 4, "library")
     graph = export.emit_onnx(bank)
-    files |= graph.files
-    files |= export.vector_files(bank, cases)
+    cases = export.make_cases(bank, plan, banks.exact_responses, crop=crop)
+    files |= {**library, **graph.files, **export.vector_files(bank, cases)}
     desk.progress("export", 3, 4, "ONNX and vectors")
     head = banks.write_bank(
         folder,
         bank,
         plan,
         files,
-        force=force,
+        force=True,
         seed=desk.settings.seed,
         settings=desk.settings.plain("bank"),
         inputs=inputs,
@@ -86,10 +86,33 @@ def write_bundle(
     return Written(folder, bank, plan, head, proof, said, onnx)
 
 
-def _library(files: Mapping[str, bytes], name: str, wanted: bool) -> tuple[export.Files, str]:
+def _selftest_cases(bank: Bank, plan: Plan) -> list[export.SelftestCase]:
+    small = export.make_cases(bank, plan, banks.exact_responses, small=True)
+    return [(case.name, case.pixels, case.expected, case.tolerance) for case in small]
+
+
+def build_library(
+    files: Mapping[str, bytes], name: str, wanted: bool
+) -> tuple[dict[str, bytes], str]:
+    """This machine's shared library as a file of the bundle, and what to say of it."""
     if not wanted:
         return {}, "not built, as it was not asked for"
-    return export.compile_library(files, name)
+    compiler = export.find_compiler()
+    built = export.compile_library(files, name, compiler=compiler) if compiler else None
+    if compiler is None or built is None:
+        return {}, f"not built: {export.NO_COMPILER}"
+    path = f"lib/{export.target_name()}/{export.library_name(name)}"
+    return {path: built}, f"{path}, by {compiler.version}"
+
+
+def open_native(
+    folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any]
+) -> banks.NativeBank | None:
+    """The bank's library for this machine, or None where the folder holds none."""
+    path = f"lib/{export.target_name()}/{export.library_name(bank.name)}"
+    if path not in head["files"]:
+        return None
+    return banks.load_native(folder, bank, plan, head, path)
 
 
 def prove(
@@ -103,17 +126,27 @@ def prove(
     )
 
     def open_library(path: Path) -> export.Target:
-        native = banks.NativeBank(path, bank)
+        relative = path.relative_to(folder).as_posix()
+        native = banks.load_native(folder, bank, plan, head, relative)
         return export.Target(path.name, native.responses, native.edges)
+
+    def selftest(where: Path) -> tuple[bool, str]:
+        sources = [n for n in head["files"] if "/" not in n and n.endswith((".c", ".h"))]
+        done = export.run_selftest(
+            {name: store.read_file(where, head, name) for name in sources}, bank.name
+        )
+        if done.passed is None:
+            raise UsageError(done.output)
+        return done.passed, done.output.splitlines()[-1] if done.output else ""
 
     return export.verify(
         folder,
         bank,
         plan,
         head,
-        oracle=banks.oracle,
+        oracle=banks.exact_responses,
         engines={"engine": engine},
         open_library=open_library,
-        run_selftest=lambda where: export.run_selftest(where, bank.name),
+        run_selftest=selftest,
         progress=progress,
     )

@@ -143,3 +143,11 @@ def bank_name(out: Path, settings: Settings) -> str:
         return settings.name
     text = re.sub(r"[^0-9a-z]+", "_", out.resolve().name.lower()).strip("_")
     return text if re.match(r"[a-z]", text) else f"bank_{text}".strip("_")
+
+
+def may_write(folder: Path, force: bool) -> None:
+    """Refuse an output that stands already, unless ``force``."""
+    if folder.exists() and not force:
+        raise UsageError(
+            "there is something here already", where=str(folder), remedy="--force replaces it"
+        )

@@ -3,18 +3,24 @@
 from __future__ import annotations
 
 import functools
+import io
+from dataclasses import replace
 from pathlib import Path
 from typing import Any
 
+import numpy as np
+
 from patchlab import bank as banks
 from patchlab import camera, edges, images, learn, shapes, store
-from patchlab.errors import UsageError
+from patchlab.errors import InputError, UsageError
+from patchlab.images.sample import SampleSettings, memory_needed
 from patchlab.pipeline import tell
 from patchlab.pipeline.bundle import write_bundle
-from patchlab.pipeline.desk import RECIPE, Desk, bank_name
+from patchlab.pipeline.desk import RECIPE, Desk, bank_name, may_write
 from patchlab.types import (
     Bank,
     Dictionary,
+    Frame,
     KernelFits,
     PatchSet,
     Survey,
@@ -22,6 +28,8 @@ from patchlab.types import (
 )
 
 Head = dict[str, Any]
+EXAMPLE = (960, 1280)
+"""Largest height and width of the example frame that a run keeps for its page."""
 
 # ---------------------------------------------------------------- one stage after another
 
@@ -55,7 +63,7 @@ def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
     kind: TableKind | None = None if wanted == "auto" else wanted  # type: ignore[assignment]
     about = {
         "settings": desk.settings.plain("photos", "survey"),
-        "inputs": {f.path: f.sha256 for f in intake.frames},
+        "inputs": intake.inputs,
         "body": {"recipe": RECIPE, "photos": tell.photos(intake)},
     }
 
@@ -63,13 +71,29 @@ def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
         frames = functools.partial(images.iterate, intake)
         return camera.survey(frames, intake.contract, kind=kind, progress=desk.progress)
 
-    return desk.stage("survey", about, make)
+    def example(_: Survey) -> dict[str, bytes]:
+        return {"example.npy": store.npy_bytes(_example(intake).pixels)}
+
+    about["body"]["example"] = _example(intake).path
+    return desk.stage("survey", about, make, example)
+
+
+def _example(intake: images.Intake) -> Frame:
+    """The frame in the middle of the folder, its middle where it is large: for the page."""
+    middle = intake.frames[len(intake.frames) // 2].path
+    frame = next(f for f in images.iterate(intake) if f.path == middle)
+    top, left = (
+        max(0, (n - limit) // 2) for n, limit in zip(frame.pixels.shape, EXAMPLE, strict=True)
+    )
+    rows, cols = slice(top, top + EXAMPLE[0]), slice(left, left + EXAMPLE[1])
+    mask = None if frame.invalid is None else frame.invalid[rows, cols]
+    return replace(frame, pixels=frame.pixels[rows, cols].copy(), invalid=mask)
 
 
 def sample(intake: images.Intake, found: Survey, parent: Head, desk: Desk) -> tuple[PatchSet, Head]:
     """Draw patches, after saying what memory that and learning will take."""
     s = desk.settings
-    settings = images.SampleSettings(
+    settings = SampleSettings(
         size=s.patch_size,
         patches=s.patches,
         per_frame=s.per_frame,
@@ -77,7 +101,10 @@ def sample(intake: images.Intake, found: Survey, parent: Head, desk: Desk) -> tu
         flat_fraction=s.flat_fraction,
         normalise=s.normalise,
     )
-    need = images.memory_needed(settings) / 2**30 + 0.3  # the libraries themselves
+    bytes_needed = memory_needed(
+        settings, pixels=intake.largest, frames=len(intake.frames), jobs=desk.jobs
+    )
+    need = bytes_needed / 2**30 + 0.3  # the libraries themselves
     desk.tell(f"  at most {need:.1f} GiB of memory will be used")
     if need > s.max_memory:
         raise UsageError(
@@ -117,6 +144,7 @@ def learn_basis(
                 orthogonal=s.orthogonal,
                 restarts=s.restarts,
                 max_iterations=s.max_iterations,
+                jobs=desk.jobs,
                 progress=desk.progress,
             )
         return learned, learn.learn_pca(patches, whitening)
@@ -142,11 +170,18 @@ def fit(dictionary: Dictionary, parent: Head, desk: Desk) -> tuple[tuple[KernelF
     return desk.stage("fits", about, make, extra=tables)
 
 
-def choose(dictionary: Dictionary, fits: KernelFits, found: Survey, name: str, desk: Desk) -> Bank:
+def choose(
+    dictionary: Dictionary,
+    fits: KernelFits,
+    found: Survey,
+    patches: PatchSet,
+    name: str,
+    desk: Desk,
+) -> Bank:
     """Choose the kernels and calibrate their thresholds on noise."""
     s = desk.settings
     if s.as_learned:
-        bank = banks.bank_as_learned(dictionary, found, name=name, border=s.border)
+        bank = banks.bank_as_learned(dictionary, found, name, s.border, fits)
     else:
         settings = banks.BankSettings(
             kernels=s.kernels,
@@ -157,15 +192,14 @@ def choose(dictionary: Dictionary, fits: KernelFits, found: Survey, name: str, d
             name=name,
             seed=s.seed,
         )
-        bank = banks.choose_bank(dictionary, fits, found, settings)
-    return calibrated(bank, desk)
+        bank = banks.choose_bank(dictionary, fits, found, settings, patch_contrast=patches.contrast)
+    known = {**bank.provenance, "blur_sigma_px": found.blur_sigma_px}
+    return calibrated(replace(bank, provenance=known), desk)
 
 
 def calibrated(bank: Bank, desk: Desk) -> Bank:
     """The bank with its table of thresholds, where its strength has a noise unit."""
-    from dataclasses import replace
-
-    if bank.table.noise_sd is None or bank.as_learned or not bank.scales:
+    if bank.table.noise_sd is None or bank.purpose not in ("edges", "features"):
         return bank
     with desk.timed("thresholds"):
         found = edges.calibrate(bank, seed=desk.settings.seed, progress=desk.progress)
@@ -209,16 +243,72 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
         return tell.learned(dictionary, patches, desk)
     (atom_fits, _), fits_head = fit(dictionary, dictionary_head, desk)
     with desk.timed("bank"):
-        bank = choose(dictionary, atom_fits, found, bank_name(desk.out, desk.settings), desk)
-        crop = next(images.iterate(intake)).pixels
+        name = bank_name(desk.out, desk.settings)
+        bank = choose(dictionary, atom_fits, found, patches, name, desk)
+        crop = next(iter(images.iterate(intake))).pixels
         written = write_bundle(
             desk.out / "bank",
             bank,
             desk,
             parents={"fits": fits_head["id"], "survey": survey_head["id"]},
-            inputs={f.path: f.sha256 for f in intake.frames},
+            inputs=intake.inputs,
             crop=crop,
         )
     result = tell.run(intake, found, patches, dictionary, atom_fits, written, desk)
     store.write_file(desk.out / "run.json", store.canonical_json(result))
     return result
+
+
+# ---------------------------------------------------------------- a run's later stages
+
+
+def _learned(desk: Desk) -> tuple[Dictionary, dict[str, Any]]:
+    (dictionary, _), head = store.load(desk.out / "dictionary", "dictionary")
+    return dictionary, head
+
+
+def fit_run(desk: Desk) -> dict[str, Any]:
+    """Fit the components of a run's dictionary."""
+    dictionary, head = _learned(desk)
+    (atom_fits, filter_fits), _ = fit(dictionary, head, desk)
+    return {"atoms": tell.fits(atom_fits), "filters": tell.fits(filter_fits)}
+
+
+def export_run(desk: Desk, out: Path | None, *, force: bool) -> dict[str, Any]:
+    """Choose and export a bank from a run's fits."""
+    folder = out or desk.out / "bank"
+    may_write(folder, force)
+    dictionary, _ = _learned(desk)
+    (atom_fits, _), fits_head = store.load(desk.out / "fits", "fits")
+    survey, survey_head = store.load(desk.out / "survey", "survey")
+    home = folder if out else desk.out
+    patches, _ = store.load(desk.out / "patches", "patches")
+    name = bank_name(home, desk.settings)
+    bank = choose(dictionary, atom_fits, survey, patches, name, desk)
+    parents = {"fits": fits_head["id"], "survey": survey_head["id"]}
+    inputs = survey_head["inputs"]
+    return tell.bank(write_bundle(folder, bank, desk, parents=parents, inputs=inputs))
+
+
+def export_taps(path: Path, desk: Desk, *, force: bool) -> dict[str, Any]:
+    """Make a bank from kernels in a ``.npy`` file."""
+    may_write(desk.out, force)
+    s = desk.settings
+    try:
+        data = path.read_bytes()
+        taps = np.load(io.BytesIO(data), allow_pickle=False)
+    except OSError as error:
+        raise InputError(f"cannot be read: {error.strerror}", where=str(path)) from None
+    except (ValueError, EOFError) as error:
+        raise InputError(f"is no .npy file of numbers: {error}", where=str(path)) from None
+    bank = banks.bank_from_taps(
+        taps,
+        pixels=s.pixels or "Mono8",
+        name=bank_name(desk.out, s),
+        border=s.border,
+        black=s.black or 0.0,
+        white=s.white,
+        where=str(path),
+    )
+    inputs = {path.name: store.sha256(data)}
+    return tell.bank(write_bundle(desk.out, bank, desk, parents={}, inputs=inputs))

@@ -1,4 +1,7 @@
-"""What is done with a bank or a run that stands: verify, detect, bench, compare, reopen."""
+"""What is done with a bank or a run that stands: verify, detect, bench, compare, reopen.
+
+Nothing here needs the learner: a bank runs where numba and scikit-learn are absent.
+"""
 
 from __future__ import annotations
 
@@ -12,13 +15,11 @@ from typing import Any
 import numpy as np
 
 from patchlab import bank as banks
-from patchlab import edges, export, images, learn, store
+from patchlab import edges, export, images, store
 from patchlab.conventions import shift_cosine
 from patchlab.errors import InputError, PatchlabError, UsageError
-from patchlab.pipeline import tell
-from patchlab.pipeline.bundle import prove, write_bundle
-from patchlab.pipeline.desk import Desk, bank_name
-from patchlab.pipeline.run import choose, fit
+from patchlab.pipeline.bundle import open_native, prove
+from patchlab.pipeline.desk import may_write
 from patchlab.progress import Progress, silent
 from patchlab.types import (
     Bank,
@@ -40,65 +41,6 @@ def bank_folder(path: Path) -> Path:
     if not (path / "bank.json").is_file() and (path / "bank" / "bank.json").is_file():
         return path / "bank"
     return path
-
-
-# ---------------------------------------------------------------- a run's later stages
-
-
-def _learned(desk: Desk) -> tuple[Dictionary, dict[str, Any]]:
-    (dictionary, _), head = store.load(desk.out / "dictionary", "dictionary")
-    return dictionary, head
-
-
-def fit_run(desk: Desk) -> dict[str, Any]:
-    """Fit the components of a run's dictionary."""
-    dictionary, head = _learned(desk)
-    (atom_fits, filter_fits), _ = fit(dictionary, head, desk)
-    return {"atoms": tell.fits(atom_fits), "filters": tell.fits(filter_fits)}
-
-
-def export_run(desk: Desk, out: Path | None, *, force: bool) -> dict[str, Any]:
-    """Choose and export a bank from a run's fits."""
-    folder = out or desk.out / "bank"
-    _may_write(folder, force)
-    dictionary, _ = _learned(desk)
-    (atom_fits, _), fits_head = store.load(desk.out / "fits", "fits")
-    survey, survey_head = store.load(desk.out / "survey", "survey")
-    home = folder if out else desk.out
-    bank = choose(dictionary, atom_fits, survey, bank_name(home, desk.settings), desk)
-    parents = {"fits": fits_head["id"], "survey": survey_head["id"]}
-    inputs = survey_head["inputs"]
-    return tell.bank(write_bundle(folder, bank, desk, parents=parents, inputs=inputs))
-
-
-def export_taps(path: Path, desk: Desk, *, force: bool) -> dict[str, Any]:
-    """Make a bank from kernels in a ``.npy`` file."""
-    _may_write(desk.out, force)
-    s = desk.settings
-    try:
-        data = path.read_bytes()
-        taps = np.load(io.BytesIO(data), allow_pickle=False)
-    except OSError as error:
-        raise InputError(f"cannot be read: {error.strerror}", where=str(path)) from None
-    except (ValueError, EOFError) as error:
-        raise InputError(f"is no .npy file of numbers: {error}", where=str(path)) from None
-    bank = banks.bank_from_taps(
-        taps,
-        pixels=s.pixels or "Mono8",
-        name=bank_name(desk.out, s),
-        border=s.border,
-        black=s.black,
-        white=s.white,
-    )
-    inputs = {path.name: store.sha256(data)}
-    return tell.bank(write_bundle(desk.out, bank, desk, parents={}, inputs=inputs))
-
-
-def _may_write(folder: Path, force: bool) -> None:
-    if folder.exists() and not force:
-        raise UsageError(
-            "there is something here already", where=str(folder), remedy="--force replaces it"
-        )
 
 
 # ---------------------------------------------------------------- verify
@@ -136,7 +78,7 @@ def verify(path: Path, progress: Progress = silent) -> dict[str, Any]:
 
 def responder(folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any]) -> Any:
     """The fastest engine at hand: the compiled library of this machine, else numpy."""
-    native = banks.open_native(folder, bank, head)
+    native = open_native(folder, bank, plan, head)
     if native is not None:
         return native.responses
     return lambda pixels: banks.responses(bank, pixels, plan)
@@ -163,8 +105,8 @@ def detect(
     """
     folder = bank_folder(path)
     bank, plan, head = banks.read_bank(folder)
-    level = _level(bank, rate, threshold)
-    _may_write(out, force)
+    level, _ = edges.threshold_of(bank, rate=rate, threshold=threshold)
+    may_write(out, force)
     listing = images.list_photos(pictures)
     if not listing.files:
         raise InputError("there are no pictures here", where=str(pictures))
@@ -173,7 +115,7 @@ def detect(
     bad: list[Quarantined] = []
     for done, name in enumerate(listing.files, 1):
         try:
-            for frame in images.read(listing.root, name, _options(bank)):
+            for frame in images.read_file(listing.root, name, _options(bank)):
                 found.append(_detect_one(bank, frame, respond, level, out, draw))
         except PatchlabError as error:
             bad.append(Quarantined(name, str(error)))
@@ -193,21 +135,6 @@ def detect(
     return result
 
 
-def _level(bank: Bank, rate: float | None, threshold: float | None) -> float:
-    if threshold is not None:
-        if rate is not None:
-            raise UsageError("give either --false-edges or --threshold")
-        if not threshold > 0:
-            raise UsageError(f"--threshold {threshold} is not above 0")
-        return threshold
-    if bank.thresholds is None:
-        raise UsageError(
-            "this bank carries no promise of false edges, as its noise was not measurable",
-            remedy="give --threshold a strength",
-        )
-    return edges.strength_for(bank.thresholds, 10.0 if rate is None else rate)
-
-
 def _options(bank: Bank) -> images.ReadOptions:
     c = bank.contract
     return images.ReadOptions(white=c.white, black=c.black, transfer=c.transfer, pixels=c.pixels)
@@ -216,8 +143,14 @@ def _options(bank: Bank) -> images.ReadOptions:
 def _detect_one(
     bank: Bank, frame: Frame, respond: Any, level: float, out: Path, draw: Draw
 ) -> dict[str, Any]:
-    found = edges.detect(bank, frame.pixels, respond, threshold=level, invalid=frame.invalid)
-    edgels = edges.edgels(bank, frame.pixels, found, respond)
+    found, edgels = edges.detect_edgels(
+        bank,
+        frame.pixels,
+        respond,
+        threshold=level,
+        invalid=frame.invalid,
+        blur_px=bank.provenance.get("blur_sigma_px"),
+    )
     stem = frame.path.replace("#", "_page")
     store.write_file(out / "edgels" / f"{stem}.csv", edges.edgels_csv(edgels))
     for name, data in draw(frame, found, orientation_count(bank)).items():
@@ -240,6 +173,8 @@ def compare(first: Path, second: Path) -> dict[str, Any]:
     if kind != other:
         raise UsageError(f"cannot compare a {kind} with a {other}")
     if kind == "dictionary":
+        from patchlab import learn  # only here: a bank runs without the learner
+
         cosines = learn.match(a, b)
     else:
         cosines = np.array([max(shift_cosine(k, m) for m in b) for k in a])
@@ -272,7 +207,7 @@ def _comparable(path: Path) -> tuple[str, Any, Any]:
 
 def scenes(out: Path, count: int, progress: Progress = silent) -> dict[str, Any]:
     """Render the frames of the invented camera."""
-    images.make_sample_images(out, count, progress=progress)
+    images.make_sample_images(out, count)
     return {"folder": str(out), "frames": count}
 
 
@@ -370,10 +305,9 @@ def _example_edges(
 ) -> tuple[EdgeMap | None, str]:
     if bank.thresholds is None:
         return None, "this bank has no threshold in noise units"
-    level = edges.strength_for(bank.thresholds, rate)
     respond = responder(folder, bank, plan, head)
     try:
-        return edges.detect(bank, frame.pixels, respond, threshold=level), ""
+        return edges.detect(bank, frame.pixels, respond, rate=rate), ""
     except PatchlabError as error:
         return None, str(error)
 
@@ -391,7 +325,7 @@ def bench(
         raise UsageError(f"--size must be at least {bank.size}x{bank.size}")
     pixels = export.bench.picture(bank, width, height)
     targets: dict[str, tuple[export.bench.Run, str]] = {}
-    native = banks.open_native(folder, bank, head)
+    native = open_native(folder, bank, plan, head)
     if native is not None:
         targets["compiled library"] = (native.responses, "float32 planes")
     targets["numpy engine"] = (lambda p: banks.responses(bank, p, plan), "float32 planes")

@@ -10,7 +10,8 @@ from typing import Any
 
 import jinja2
 
-from patchlab import pipeline, store
+from patchlab import store
+from patchlab.pipeline import use
 from patchlab.progress import Progress, silent
 from patchlab.report import mosaic, plots
 
@@ -26,7 +27,7 @@ def write(run: Path, progress: Progress = silent) -> float:
     InputError : the folder holds no finished run.
     """
     start = time.perf_counter()
-    content = pipeline.open_run(run)
+    content = use.open_run(run)
     makers = _pictures(content)
     pictures = {}
     for done, (name, make) in enumerate(makers.items(), 1):
@@ -41,7 +42,7 @@ def write(run: Path, progress: Progress = silent) -> float:
     return round(time.perf_counter() - start, 3)
 
 
-def _pictures(c: pipeline.RunContent) -> Mapping[str, Callable[[], bytes]]:
+def _pictures(c: use.RunContent) -> Mapping[str, Callable[[], bytes]]:
     """Every picture of the page by its name, made when called."""
     makers: dict[str, Callable[[], bytes]] = {
         "table": lambda: plots.table_curve(c.survey),
@@ -86,13 +87,13 @@ def _beside_fits(kernels: Any, fits: Any) -> bytes:
     )
 
 
-def _baseline(c: pipeline.RunContent) -> bytes:
+def _baseline(c: use.RunContent) -> bytes:
     atoms = c.baseline.atoms[:32]
     labels = [str(i + 1) for i in range(len(atoms))]
     return mosaic.mosaic([atoms], labels, across=16, zoom=max(1, 48 // c.baseline.size))
 
 
-def _render(c: pipeline.RunContent, pictures: Mapping[str, bytes]) -> str:
+def _render(c: use.RunContent, pictures: Mapping[str, bytes]) -> str:
     environment = jinja2.Environment(
         loader=jinja2.PackageLoader("patchlab.report", "."),
         autoescape=True,
