@@ -9,6 +9,7 @@ compiles anew and nothing fails.
 
 from __future__ import annotations
 
+import hashlib
 import os
 import sys
 from collections.abc import Callable
@@ -18,6 +19,19 @@ from typing import Any, TypeVar
 import numba
 
 F = TypeVar("F", bound=Callable[..., Any])
+
+
+def _sources() -> str:
+    """A digest of the modules with compiled loops.
+
+    numba looks only at a function's own file when it decides whether its cache is stale,
+    but loops call loops of other files.
+    """
+    rooms = (Path(__file__).parent / room for room in ("learn", "shapes"))
+    digest = hashlib.sha256()
+    for path in sorted(p for room in rooms for p in room.glob("*.py")):
+        digest.update(path.read_bytes())
+    return digest.hexdigest()[:12]
 
 
 def cache_folder() -> Path | None:
@@ -30,7 +44,7 @@ def cache_folder() -> Path | None:
         )
     if not root:
         return None
-    folder = Path(root) / "patchlab" / f"numba-{numba.__version__}"
+    folder = Path(root) / "patchlab" / f"numba-{numba.__version__}-{_sources()}"
     try:
         folder.mkdir(parents=True, exist_ok=True)
     except OSError:

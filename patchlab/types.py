@@ -191,6 +191,7 @@ class NoiseModel:
     autocovariance : (2m+1, 2m+1) of the noise, centre 1; None means white
     kept_fraction : share of the pixels that were flat enough to tell
     source : "photos", "static", "dark" or "simulated"
+    points : (n, 2) measured codes and standard deviations that the law was fitted to
     """
 
     measurable: bool
@@ -204,6 +205,7 @@ class NoiseModel:
     autocovariance: F64 | None = None
     kept_fraction: float = 0.0
     source: str = "photos"
+    points: F64 = field(default_factory=lambda: np.empty((0, 2)))
 
 
 @dataclass(frozen=True)
@@ -223,6 +225,10 @@ class Survey:
     """What the camera itself does to pictures.
 
     ``blur_sigma_px`` and ``spectrum_exponent`` are None where the folder cannot tell.
+    ``spectrum_frequency`` (cycles per pixel) and ``spectrum_power`` are the radial mean in
+    linear light over the frame's mean; ``noise_power`` is the noise's share on that scale
+    and ``noise_overtakes_cpp`` the frequency above which it is the larger part, or None.
+    ``distrusted`` lists (path, reason) of frames better left out of learning.
     """
 
     contract: InputContract
@@ -234,6 +240,13 @@ class Survey:
     spectrum_spread: float | None = None
     marks: tuple[Mark, ...] = ()
     frames: int = 0
+    spectrum_frequency: F64 = field(default_factory=lambda: np.empty(0))
+    spectrum_power: F64 = field(default_factory=lambda: np.empty(0))
+    spectrum_anisotropy: float | None = None
+    noise_power: float | None = None
+    noise_overtakes_cpp: float | None = None
+    distrusted: tuple[tuple[str, str], ...] = ()
+    edge_widths_px: F64 = field(default_factory=lambda: np.empty(0))
 
 
 # ---------------------------------------------------------------- learning
@@ -434,7 +447,8 @@ class Kernel:
 class Thresholds:
     """Strength thresholds against promised false edge elements per megapixel.
 
-    Calibrated on the whole chain on pure noise. ``strength[i]`` belongs to ``rate[i]``.
+    Calibrated on the whole chain on pure noise. ``strength[i]`` belongs to ``rate[i]``;
+    ``groups[i]`` is how many connected groups per megapixel those elements come in.
     """
 
     rate: F64
@@ -443,6 +457,7 @@ class Thresholds:
     hysteresis: float
     megapixels: float
     noise: str
+    groups: F64 = field(default_factory=lambda: np.empty(0))
 
 
 @dataclass(frozen=True, eq=False)

@@ -13,7 +13,7 @@ from sklearn.datasets import load_sample_images
 from patchlab import bank as banks
 from patchlab import camera, learn, shapes
 from patchlab.conventions import REC709, srgb_decode
-from patchlab.images import SampleSettings, sample_frames
+from patchlab.images.sample import SampleSettings, sample
 from patchlab.types import Frame, InputContract, NoiseModel, Survey
 
 CONTRACT = InputContract("float32", 0.0, 1.0)
@@ -47,7 +47,7 @@ def learned(pictures, size=8, count=20_000, seed=0, **options):
     frames = [Frame(f"{i}.npy", p, CONTRACT) for i, p in enumerate(tabled)]
     table = camera.make_table("identity", CONTRACT, None)
     settings = SampleSettings(size=size, patches=count, seed=seed)
-    patches = sample_frames(frames, table, settings)
+    patches = sample(frames, table, settings, count_frames=len(frames))
     whitening = learn.whiten(patches)
     dictionary = learn.learn_ica(patches, whitening, seed=seed, restarts=1, **options)
     return patches, dictionary, shapes.fit_kernels(dictionary.atoms, "atoms")

@@ -1,1 +1,28 @@
-"""x"""
+"""Kernel fits to a bank: chosen, planned, applied, written, and the slow obvious oracle."""
+
+from patchlab.bank.apply import responses, strength
+from patchlab.bank.choose import BankSettings, choose_bank, compare_banks
+from patchlab.bank.disk import read_bank, write_bank
+from patchlab.bank.given import bank_as_learned, bank_from_taps
+from patchlab.bank.native import NativeBank, load_native
+from patchlab.bank.plan import describe, make_plan
+from patchlab.bank.reference import responses as exact_responses
+from patchlab.bank.reference import strength as exact_strength
+
+__all__ = [
+    "BankSettings",
+    "NativeBank",
+    "bank_as_learned",
+    "bank_from_taps",
+    "choose_bank",
+    "compare_banks",
+    "describe",
+    "exact_responses",
+    "exact_strength",
+    "load_native",
+    "make_plan",
+    "read_bank",
+    "responses",
+    "strength",
+    "write_bank",
+]

@@ -38,6 +38,14 @@ def main(argv: Sequence[str] | None = None) -> None:
     except OSError as error:
         _say(f"error: {error.filename or 'file system'}: {error.strerror or error}")
         sys.exit(1)
+    except Exception as error:
+        if "-v" in (argv or sys.argv) or "--verbose" in (argv or sys.argv):
+            raise
+        _say(
+            f"error: a fault of patchlab itself ({type(error).__name__}: {error}); "
+            "run again with -v to see where, and report it"
+        )
+        sys.exit(1)
     sys.exit(code if isinstance(code, int) else 0)
 
 

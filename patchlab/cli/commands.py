@@ -24,8 +24,9 @@ def _shared(command: Command) -> Command:
 
     @click.option("--json", "as_json", is_flag=True, help="Print the result as one JSON object.")
     @click.option("-q", "--quiet", is_flag=True, help="No notes and no bars.")
+    @click.option("-v", "--verbose", is_flag=True, help="Show where a fault arose.")
     @functools.wraps(command)
-    def call(*args: Any, quiet: bool, **kwargs: Any) -> Any:
+    def call(*args: Any, quiet: bool, verbose: bool, **kwargs: Any) -> Any:
         return command(*args, terminal=Terminal(quiet), **kwargs)
 
     return call

@@ -1,1 +1,38 @@
-"""x"""
+"""Plan to files: C99, shared library, ONNX, vectors; and the proof that all agree."""
+
+from patchlab.export import bench
+from patchlab.export.build import (
+    NO_COMPILER,
+    compile_library,
+    find_compiler,
+    library_name,
+    run_selftest,
+    target_name,
+)
+from patchlab.export.c99 import emit
+from patchlab.export.compare import Check, Target, Verification
+from patchlab.export.onnx import emit as emit_onnx
+from patchlab.export.selftest import Case as SelftestCase
+from patchlab.export.selftest import emit_selftest
+from patchlab.export.vectors import make_cases, vector_files
+from patchlab.export.verify import verify
+
+__all__ = [
+    "NO_COMPILER",
+    "Check",
+    "SelftestCase",
+    "Target",
+    "Verification",
+    "bench",
+    "compile_library",
+    "emit",
+    "emit_onnx",
+    "emit_selftest",
+    "find_compiler",
+    "library_name",
+    "make_cases",
+    "run_selftest",
+    "target_name",
+    "vector_files",
+    "verify",
+]

@@ -9,6 +9,7 @@ from __future__ import annotations
 import time
 from collections.abc import Callable, Iterator, Mapping
 from dataclasses import dataclass
+from importlib import util
 from typing import Any
 
 import numpy as np
@@ -43,16 +44,14 @@ def picture(bank: Bank, width: int, height: int) -> NDArray[Any]:
     scaled = low + (high - low) * unit
     if bank.contract.format.integer:
         scaled = np.rint(scaled)
-    return scaled.astype(bank.contract.format.dtype)
+    return np.asarray(scaled, dtype=bank.contract.format.dtype)
 
 
 def libraries(bank: Bank) -> Iterator[tuple[str, Run, str]]:
     """The libraries that are installed, each given the same work: table, then every kernel."""
-    try:
+    if util.find_spec("cv2") is not None and bank.border != "wrap":  # filter2D has no wrap
         import cv2
-    except ImportError:
-        cv2 = None
-    if cv2 is not None and bank.border != "wrap":
+
         cv2.setNumThreads(1)
         flag = getattr(cv2, BORDERS[bank.border].opencv)
 

@@ -1,1 +1,31 @@
-"""x"""
+"""Learning: PatchSet to Whitening to Dictionary.
+
+``whiten`` removes the patch mean and decorrelates; ``learn_ica``, ``learn_sparse`` and
+``learn_pca`` turn whitened patches into a dictionary of filters and atoms.
+"""
+
+from patchlab.learn.checkpoint import Checkpoint
+from patchlab.learn.coding import lasso
+from patchlab.learn.ica import learn_ica
+from patchlab.learn.order import amari_index, match, stability
+from patchlab.learn.pca import learn_pca
+from patchlab.learn.sparse import SparseState, encode, learn_sparse
+from patchlab.learn.whiten import Moments, moments, noise_covariance, whiten, whitening
+
+__all__ = [
+    "Checkpoint",
+    "Moments",
+    "SparseState",
+    "amari_index",
+    "encode",
+    "lasso",
+    "learn_ica",
+    "learn_pca",
+    "learn_sparse",
+    "match",
+    "moments",
+    "noise_covariance",
+    "stability",
+    "whiten",
+    "whitening",
+]

@@ -13,7 +13,6 @@ import numpy as np
 from patchlab import bank as banks
 from patchlab import camera, edges, images, learn, shapes, store
 from patchlab.errors import InputError, UsageError
-from patchlab.images.sample import SampleSettings, memory_needed
 from patchlab.pipeline import tell
 from patchlab.pipeline.bundle import write_bundle
 from patchlab.pipeline.desk import RECIPE, Desk, bank_name, may_write
@@ -93,7 +92,7 @@ def _example(intake: images.Intake) -> Frame:
 def sample(intake: images.Intake, found: Survey, parent: Head, desk: Desk) -> tuple[PatchSet, Head]:
     """Draw patches, after saying what memory that and learning will take."""
     s = desk.settings
-    settings = SampleSettings(
+    settings = images.SampleSettings(
         size=s.patch_size,
         patches=s.patches,
         per_frame=s.per_frame,
@@ -101,10 +100,10 @@ def sample(intake: images.Intake, found: Survey, parent: Head, desk: Desk) -> tu
         flat_fraction=s.flat_fraction,
         normalise=s.normalise,
     )
-    bytes_needed = memory_needed(
+    taken = images.memory_needed(
         settings, pixels=intake.largest, frames=len(intake.frames), jobs=desk.jobs
     )
-    need = bytes_needed / 2**30 + 0.3  # the libraries themselves
+    need = taken / 2**30 + 0.3  # the libraries themselves
     desk.tell(f"  at most {need:.1f} GiB of memory will be used")
     if need > s.max_memory:
         raise UsageError(
@@ -117,23 +116,33 @@ def sample(intake: images.Intake, found: Survey, parent: Head, desk: Desk) -> tu
     }
 
     def make() -> PatchSet:
-        return images.sample(intake, found.table, settings, jobs=desk.jobs, progress=desk.progress)
+        return images.sample_folder(
+            intake, found.table, settings, jobs=desk.jobs, progress=desk.progress
+        )
 
     return desk.stage("patches", about, make)
 
 
 def learn_basis(
-    patches: PatchSet, parent: Head, desk: Desk
+    patches: PatchSet, found: Survey, parent: Head, desk: Desk
 ) -> tuple[tuple[Dictionary, Dictionary], Head]:
     """Whiten and learn; principal components come along to be looked at beside."""
     s = desk.settings
     about = {"settings": s.plain("learn"), "parents": {"patches": parent["id"]}}
 
     def make() -> tuple[Dictionary, Dictionary]:
-        whitening = learn.whiten(patches, retain=s.retain)
+        noise = None
+        if found.table.noise_sd is not None:
+            coloured = found.noise.autocovariance
+            noise = learn.noise_covariance(patches, found.table.noise_sd, coloured)
+        whitening = learn.whiten(patches, retain=s.retain, noise=noise)
         if s.method == "sparse":
             learned = learn.learn_sparse(
-                patches, whitening, atoms=s.components, seed=s.seed, progress=desk.progress
+                patches,
+                whitening,
+                atoms=s.components or whitening.rank,
+                seed=s.seed,
+                progress=desk.progress,
             )
         else:
             learned = learn.learn_ica(
@@ -172,7 +181,7 @@ def fit(dictionary: Dictionary, parent: Head, desk: Desk) -> tuple[tuple[KernelF
 
 def choose(
     dictionary: Dictionary,
-    fits: KernelFits,
+    fits: tuple[KernelFits, ...],
     found: Survey,
     patches: PatchSet,
     name: str,
@@ -181,7 +190,7 @@ def choose(
     """Choose the kernels and calibrate their thresholds on noise."""
     s = desk.settings
     if s.as_learned:
-        bank = banks.bank_as_learned(dictionary, found, name, s.border, fits)
+        bank = banks.bank_as_learned(dictionary, found, name, s.border, fits[1])
     else:
         settings = banks.BankSettings(
             kernels=s.kernels,
@@ -192,7 +201,9 @@ def choose(
             name=name,
             seed=s.seed,
         )
-        bank = banks.choose_bank(dictionary, fits, found, settings, patch_contrast=patches.contrast)
+        bank = banks.choose_bank(
+            dictionary, fits[0], found, settings, patch_contrast=patches.contrast
+        )
     known = {**bank.provenance, "blur_sigma_px": found.blur_sigma_px}
     return calibrated(replace(bank, provenance=known), desk)
 
@@ -238,13 +249,13 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
     if until == "survey":
         return tell.survey(found, survey_head)
     patches, patches_head = sample(intake, found, survey_head, desk)
-    (dictionary, _), dictionary_head = learn_basis(patches, patches_head, desk)
+    (dictionary, _), dictionary_head = learn_basis(patches, found, patches_head, desk)
     if until == "learn":
         return tell.learned(dictionary, patches, desk)
-    (atom_fits, _), fits_head = fit(dictionary, dictionary_head, desk)
+    fits, fits_head = fit(dictionary, dictionary_head, desk)
     with desk.timed("bank"):
         name = bank_name(desk.out, desk.settings)
-        bank = choose(dictionary, atom_fits, found, patches, name, desk)
+        bank = choose(dictionary, fits, found, patches, name, desk)
         crop = next(iter(images.iterate(intake))).pixels
         written = write_bundle(
             desk.out / "bank",
@@ -254,7 +265,7 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
             inputs=intake.inputs,
             crop=crop,
         )
-    result = tell.run(intake, found, patches, dictionary, atom_fits, written, desk)
+    result = tell.run(intake, found, patches, dictionary, fits[0], written, desk)
     store.write_file(desk.out / "run.json", store.canonical_json(result))
     return result
 
@@ -279,12 +290,12 @@ def export_run(desk: Desk, out: Path | None, *, force: bool) -> dict[str, Any]:
     folder = out or desk.out / "bank"
     may_write(folder, force)
     dictionary, _ = _learned(desk)
-    (atom_fits, _), fits_head = store.load(desk.out / "fits", "fits")
+    fits, fits_head = store.load(desk.out / "fits", "fits")
     survey, survey_head = store.load(desk.out / "survey", "survey")
     home = folder if out else desk.out
     patches, _ = store.load(desk.out / "patches", "patches")
     name = bank_name(home, desk.settings)
-    bank = choose(dictionary, atom_fits, survey, patches, name, desk)
+    bank = choose(dictionary, fits, survey, patches, name, desk)
     parents = {"fits": fits_head["id"], "survey": survey_head["id"]}
     inputs = survey_head["inputs"]
     return tell.bank(write_bundle(folder, bank, desk, parents=parents, inputs=inputs))

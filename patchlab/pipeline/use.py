@@ -175,7 +175,8 @@ def compare(first: Path, second: Path) -> dict[str, Any]:
     if kind == "dictionary":
         from patchlab import learn  # only here: a bank runs without the learner
 
-        cosines = learn.match(a, b)
+        _, signed = learn.match(*sorted((a, b), key=len))
+        cosines = np.abs(signed)
     else:
         cosines = np.array([max(shift_cosine(k, m) for m in b) for k in a])
     same_bytes = one == two
@@ -243,6 +244,22 @@ class RunContent:
     def purpose(self) -> str:
         """What the bank is for, as an adjective."""
         return {"edges": "edge", "features": "feature"}.get(self.bank.purpose, self.bank.purpose)
+
+    @property
+    def about_bank(self) -> str:
+        """Sizes and units of the kernels, in a sentence or two."""
+        sizes = {
+            (p["sigma_u_px"], p["sigma_v_px"])
+            for p in (k.parameters for k in self.bank.kernels)
+            if "sigma_u_px" in p
+        }
+        text = ""
+        if sizes:
+            told = " and ".join(f"{u:.2f} by {v:.2f}" for u, v in sorted(sizes))
+            text = f"Widths across and along the edge, px: {told}. "
+        if self.bank.table.noise_sd is not None:
+            return text + "Every response is in units of the camera's noise."
+        return text + "The noise is not known, so kernels have unit norm instead."
 
     @property
     def families(self) -> str:

@@ -131,14 +131,14 @@ def preview(frame: Frame) -> Bytes:
     light = np.sqrt(frame.contract.light(frame.pixels))
     low, high = np.quantile(light, (0.002, 0.998))
     span = high - low or 1.0
-    return np.rint(255 * np.clip((light - low) / span, 0, 1)).astype(np.uint8)
+    return np.asarray(np.rint(255 * np.clip((light - low) / span, 0, 1)), dtype=np.uint8)
 
 
 def wheel(count: int) -> NDArray[np.uint8]:
     """A colour for each of ``count`` orientations: hue runs once round over 180 degrees."""
     turn = 2 * np.pi * np.arange(count)[:, None] / max(count, 1)
     waves = 0.5 + 0.5 * np.cos(turn - np.array([0.0, 2.1, 4.2]))
-    return np.rint(70 + 165 * waves).astype(np.uint8)
+    return np.asarray(np.rint(70 + 165 * waves), dtype=np.uint8)
 
 
 def overlay(frame: Frame, found: EdgeMap, orientations: int) -> Image.Image:

@@ -9,6 +9,7 @@ from pathlib import Path
 from typing import Any
 
 import jinja2
+import numpy as np
 
 from patchlab import store
 from patchlab.pipeline import use
@@ -74,7 +75,7 @@ def _beside_fits(kernels: Any, fits: Any) -> bytes:
     from patchlab.families import render
 
     shown = kernels[:SHOWN]
-    drawn = [render(f.family, f.parameters, fits.size) for f in fits.fits[:SHOWN]]
+    drawn = np.stack([render(f.family, f.parameters, fits.size) for f in fits.fits[:SHOWN]])
     return mosaic.mosaic(
         [shown, drawn],
         [

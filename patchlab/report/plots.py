@@ -166,7 +166,11 @@ def fit_quality(atoms: KernelFits, filters: KernelFits) -> bytes:
         for fits, colour in ((filters, SLATE), (atoms, TEAL)):
             r2 = np.clip([f.r2 for f in fits.fits], 0, 1)
             axes.hist(
-                r2, bins, color=colour, alpha=0.75, label=f"{fits.of}, median {np.median(r2):.2f}"
+                r2,
+                bins.tolist(),
+                color=colour,
+                alpha=0.75,
+                label=f"{fits.of}, median {np.median(r2):.2f}",
             )
         axes.axvline(0.8, color=AMBER, ls="--", lw=1)
         axes.set(
@@ -194,7 +198,7 @@ def orientation_and_frequency(fits: KernelFits) -> bytes:
     good = _oriented(fits)
 
     def draw(figure: Figure) -> None:
-        axes = figure.add_subplot(projection="polar")
+        axes: Any = figure.add_subplot(projection="polar")
         theta = np.array([f.parameters["theta_rad"] for f in good])
         radius = np.array([_peak_frequency(f) for f in good])
         for turn in (0.0, np.pi):
@@ -228,9 +232,8 @@ def sizes(fits: KernelFits, bank: Bank) -> bytes:
             if "sigma_u_px" in k.parameters
         }
         if chosen:
-            axes.scatter(
-                *zip(*sorted(chosen), strict=True), s=90, marker="D", color=AMBER, label="bank"
-            )
+            across, along = np.array(sorted(chosen)).T
+            axes.scatter(across, along, s=90, marker="D", color=AMBER, label="bank")
         axes.set(xlabel="sigma across the edge, px", ylabel="sigma along it, px", title="Sizes")
         axes.set_xlim(0, fits.size / 2)
         axes.set_ylim(0, fits.size)
@@ -282,7 +285,7 @@ def orientation_key(count: int) -> bytes:
     """The colours of the overlay: the direction of an edge's normal."""
 
     def draw(figure: Figure) -> None:
-        axes = figure.add_subplot(projection="polar")
+        axes: Any = figure.add_subplot(projection="polar")
         colours = wheel(count) / 255
         for turn in (0.0, np.pi):
             axes.bar(

@@ -1,0 +1,216 @@
+"""A compiled bank called from Python through ctypes.
+
+The library is code: it is loaded only on request, and only from bytes whose hash
+was checked. Those very bytes go to a private file that is loaded and removed, so
+a file changed in between is never run.
+"""
+
+from __future__ import annotations
+
+import contextlib
+import ctypes
+import os
+import tempfile
+from collections.abc import Mapping
+from pathlib import Path
+from typing import Any
+
+import numpy as np
+from numpy.typing import NDArray
+
+from patchlab.bank.reference import check_picture
+from patchlab.errors import InputError, UsageError, VerificationError
+from patchlab.store import read_file, sha256
+from patchlab.types import F32, Bank, Plan
+
+_POINTER, _STRIDE, _INT = ctypes.c_void_p, ctypes.c_ssize_t, ctypes.c_int
+_PICTURE = [_POINTER, _STRIDE, _INT, _INT, _INT, _INT]
+
+
+class NativeBank:
+    """The compiled code of a bank.
+
+    Parameters
+    ----------
+    bank, plan : what the library was made from
+    library : bytes of the shared library
+    digest : SHA-256 that the bytes must have
+
+    Raises
+    ------
+    VerificationError : the bytes have another hash, or the library is not this bank's.
+    InputError : the library does not load on this machine.
+
+    Notes
+    -----
+    Calls release the interpreter lock and share nothing, so bands may run in threads.
+    """
+
+    def __init__(self, bank: Bank, plan: Plan, library: bytes, digest: str) -> None:
+        if sha256(library) != digest:
+            raise VerificationError(
+                "the shared library was changed after it was written (its hash differs)",
+                where=bank.name,
+                remedy="export the bank again",
+            )
+        self.bank = bank
+        self._library = _load(library, bank.name)
+        self._declare()
+        if self._call("abi", _INT)() != plan.detail["abi"]:
+            raise VerificationError("the shared library belongs to another bank", where=bank.name)
+
+    def _call(self, name: str, result: Any, *arguments: Any) -> Any:
+        try:
+            function = getattr(self._library, f"{self.bank.name}_{name}")
+        except AttributeError:
+            raise VerificationError(
+                f"the shared library has no {self.bank.name}_{name}", where=self.bank.name
+            ) from None
+        function.restype, function.argtypes = result, list(arguments)
+        return function
+
+    def _declare(self) -> None:
+        self._scratch = self._call("scratch_bytes", ctypes.c_size_t, _INT, _INT)
+        self._message = self._call("message", ctypes.c_char_p, _INT)
+        self._responses = self._call(
+            "responses_rows", _INT, *_PICTURE, _POINTER, _STRIDE, _STRIDE, _POINTER
+        )
+        self._edges = self._call(
+            "edges_rows", _INT, *_PICTURE, _INT, _POINTER, _STRIDE, _POINTER, _STRIDE, _POINTER
+        )
+
+    def responses(
+        self,
+        pixels: NDArray[Any],
+        *,
+        rows: tuple[int, int] | None = None,
+        out: F32 | None = None,
+    ) -> F32:
+        """Responses of every kernel.
+
+        Parameters
+        ----------
+        pixels : ndarray (h, w) of the contract's dtype; rows may have any stride
+        rows : (first, count), a band to compute alone; the whole picture when not given
+        out : float32 ndarray (n, count, w) to write to, unit stride along x; made when not given
+
+        Returns
+        -------
+        float32 ndarray (n, count, w)
+
+        Raises
+        ------
+        InputError : the picture does not fit the bank. UsageError : a wrong band or ``out``.
+        """
+        pixels, (first, count) = self._picture(pixels, rows)
+        shape = (len(self.bank), count, pixels.shape[1])
+        out = _output(out, shape, np.float32)
+        scratch = self._memory(pixels)  # a name of its own: it must outlive the call
+        self._check(
+            self._responses(
+                *_address(pixels), first, count,
+                out.ctypes.data, out.strides[1], out.strides[0], scratch.ctypes.data,
+            )
+        )  # fmt: skip
+        return out
+
+    def edges(
+        self, pixels: NDArray[Any], scale: int, *, rows: tuple[int, int] | None = None
+    ) -> tuple[F32, NDArray[np.uint8]]:
+        """Strength of one scale and the index of the winning orientation.
+
+        Parameters
+        ----------
+        pixels : ndarray (h, w) of the contract's dtype; rows may have any stride
+        scale : position among ``bank.scales``, 0 the finest
+        rows : (first, count), a band to compute alone; the whole picture when not given
+
+        Returns
+        -------
+        float32 ndarray (count, w), uint8 ndarray (count, w)
+
+        Raises
+        ------
+        InputError : the picture does not fit the bank. UsageError : no such scale or band.
+        """
+        pixels, (first, count) = self._picture(pixels, rows)
+        strength = np.empty((count, pixels.shape[1]), dtype=np.float32)
+        turn = np.empty(strength.shape, dtype=np.uint8)
+        scratch = self._memory(pixels)
+        self._check(
+            self._edges(
+                *_address(pixels), first, count, scale,
+                strength.ctypes.data, strength.strides[0], turn.ctypes.data, turn.strides[0],
+                scratch.ctypes.data,
+            )
+        )  # fmt: skip
+        return strength, turn
+
+    def _picture(
+        self, pixels: NDArray[Any], rows: tuple[int, int] | None
+    ) -> tuple[NDArray[Any], tuple[int, int]]:
+        check_picture(self.bank, pixels)
+        if pixels.strides[1] != pixels.itemsize or abs(pixels.strides[0]) < pixels.shape[1]:
+            pixels = np.ascontiguousarray(pixels)
+        return pixels, rows or (0, pixels.shape[0])
+
+    def _memory(self, pixels: NDArray[Any]) -> NDArray[np.uint8]:
+        return np.empty(self._scratch(pixels.shape[1], pixels.shape[0]), dtype=np.uint8)
+
+    def _check(self, code: int) -> None:
+        if code:
+            message = self._message(code).decode("ascii", "replace")
+            kind = InputError if "pixel code" in message else UsageError
+            raise kind(message, where=self.bank.name)
+
+
+def _address(pixels: NDArray[Any]) -> tuple[int, int, int, int]:
+    return pixels.ctypes.data, pixels.strides[0], pixels.shape[1], pixels.shape[0]
+
+
+def _output(out: F32 | None, shape: tuple[int, ...], dtype: Any) -> F32:
+    if out is None:
+        return np.empty(shape, dtype=dtype)
+    if out.shape != shape or out.dtype != dtype or out.strides[-1] != out.itemsize:
+        raise UsageError(f"out must be {np.dtype(dtype)} {shape} with unit stride along x")
+    if not out.flags.writeable:
+        raise UsageError("out must be writeable")
+    return out
+
+
+def _load(library: bytes, name: str) -> ctypes.CDLL:
+    """Load a library from bytes; its file is private and gone afterwards where that is possible."""
+    handle, path = tempfile.mkstemp(prefix=f"{name}-", suffix=".dll" if os.name == "nt" else ".so")
+    try:
+        with os.fdopen(handle, "wb") as file:
+            file.write(library)
+        return ctypes.CDLL(path)
+    except OSError as error:
+        raise InputError(
+            f"the shared library does not load here: {error}",
+            where=name,
+            remedy="compile the bank's C source on this machine, or use the in-process engine",
+        ) from None
+    finally:
+        with contextlib.suppress(OSError):  # Windows keeps a loaded file until the process ends
+            Path(path).unlink()
+
+
+def load_native(
+    folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any], path: str
+) -> NativeBank:
+    """Load one library of a bank folder after its hash was checked.
+
+    Parameters
+    ----------
+    folder : the bank's folder
+    bank, plan, head : as :func:`patchlab.bank.disk.read_bank` gave them
+    path : the library's path in the folder, as in ``head["files"]``
+
+    Raises
+    ------
+    VerificationError : the file is unknown, missing or changed, or another bank's.
+    InputError : it does not load on this machine.
+    """
+    data = read_file(folder, head, path)
+    return NativeBank(bank, plan, data, head["files"][path])

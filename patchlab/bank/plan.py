@@ -1,0 +1,374 @@
+"""How a bank is computed: shared work, counted operations, a proven error bound.
+
+A plan is a list of *products* and a list of *sums*. A product is a set of
+coefficients dotted with a *basis* of picture values; a kernel's response is a
+signed sum of products. Five bases are known, with c the kernel's radius:
+
+====  ==================================================================
+all   ``p(y + j - c, x + i - c)``: the taps themselves (the direct plan)
+ee    rows y + j and y - j added, columns x + i and x - i added
+eo    rows added, columns subtracted
+oe    rows subtracted, columns added
+oo    both subtracted
+====  ==================================================================
+
+with j and i from 0 or 1 to c. Every kernel is the sum of its four x/y-parity
+parts, so the last four reach any kernel. A point-symmetric or antisymmetric
+kernel has only two parts, and a kernel and its mirror image have the same parts
+up to sign: equal parts are computed once. That is exact algebra; sharing needs
+the symmetry to hold bit for bit in the float32 taps.
+"""
+
+from __future__ import annotations
+
+import hashlib
+from collections.abc import Iterator, Mapping
+from dataclasses import dataclass
+from typing import Any
+
+import numpy as np
+
+from patchlab.conventions import gamma
+from patchlab.errors import UsageError
+from patchlab.types import F32, F64, Bank, Plan
+
+PARITY_BASES = ("ee", "eo", "oe", "oo")
+KINDS = ("auto", "direct", "parity")
+GROUP = 6
+"""Products that are computed together: what the registers of a core hold."""
+
+Sum = tuple[tuple[int, int], ...]
+"""A kernel as ((product, +1 or -1), ...)."""
+
+
+@dataclass(frozen=True, eq=False)
+class _Product:
+    basis: str
+    exact: F64
+    rounded: F32
+
+
+# ---------------------------------------------------------------- parity parts
+
+
+def parity_parts(kernel: F64) -> dict[str, F64]:
+    """Split a kernel into the coefficients of its four x/y-parity parts.
+
+    Parameters
+    ----------
+    kernel : float64 ndarray (h, h), h odd
+
+    Returns
+    -------
+    dict : ee (c+1, c+1), eo (c+1, c), oe (c, c+1), oo (c, c); only the entries that are
+        not zero by symmetry, j and i rising from 0 (even) or 1 (odd)
+
+    >>> parts = parity_parts(np.arange(9.0).reshape(3, 3))
+    >>> float(parts["ee"][0, 0]), float(parts["eo"][0, 0]), float(parts["oe"][0, 0])
+    (4.0, 1.0, 3.0)
+    """
+    c = kernel.shape[0] // 2
+    flip_y, flip_x = kernel[::-1], kernel[:, ::-1]
+    both = flip_y[:, ::-1]
+    quarter = slice(c, None), slice(c + 1, None)
+    even, odd = quarter
+    return {
+        "ee": ((kernel + flip_y) + (flip_x + both))[even, even] / 4,
+        "eo": ((kernel + flip_y) - (flip_x + both))[even, odd] / 4,
+        "oe": ((kernel - flip_y) + (flip_x - both))[odd, even] / 4,
+        "oo": ((kernel - flip_y) - (flip_x - both))[odd, odd] / 4,
+    }
+
+
+def basis_size(basis: str, radius: int) -> tuple[int, int]:
+    """Rows and columns of a product's coefficients."""
+    if basis == "all":
+        return 2 * radius + 1, 2 * radius + 1
+    return radius + (basis[0] == "e"), radius + (basis[1] == "e")
+
+
+def _uses(basis: str, shape: tuple[int, int]) -> F64:
+    """How many pixels each basis value is made of: 1, 2 or 4."""
+    if basis == "all":
+        return np.ones(shape)
+    rows, cols = np.full(shape[0], 2.0), np.full(shape[1], 2.0)
+    rows[: int(basis[0] == "e")] = 1
+    cols[: int(basis[1] == "e")] = 1
+    return np.outer(rows, cols)
+
+
+# ---------------------------------------------------------------- strength
+
+
+def strength_members(bank: Bank, scale: int) -> tuple[tuple[int, int | None, int | None], ...]:
+    """Which kernels make the strength of one scale.
+
+    Parameters
+    ----------
+    bank : Bank
+    scale : position among ``bank.scales``, 0 the finest
+
+    Returns
+    -------
+    tuple of (orientation, even kernel or None, odd kernel or None), by orientation
+
+    Raises
+    ------
+    UsageError : no such scale, or the scale lacks the kernels its strength is made of.
+    """
+    if not 0 <= scale < len(bank.scales):
+        raise UsageError(
+            f"scale {scale} is not in this bank, which has {len(bank.scales)}", where=bank.name
+        )
+    found = {}
+    for parity in ("even", "odd"):
+        members = bank.members(bank.scales[scale], parity)
+        found[parity] = {
+            place
+            if bank.kernels[i].orientation is None
+            else int(bank.kernels[i].orientation or 0): i
+            for place, i in enumerate(members)
+        }
+    even, odd = found["even"], found["odd"]
+    wanted = {"step": odd, "line": even, "energy": odd}[bank.strength]
+    if not wanted or (bank.strength == "energy" and set(even) != set(odd)):
+        needs = {"step": "odd kernels", "line": "even kernels", "energy": "even and odd pairs"}
+        raise UsageError(
+            f"scale {scale} has no {needs[bank.strength]} for the strength {bank.strength!r}",
+            where=bank.name,
+        )
+    return tuple(
+        (
+            turn,
+            even[turn] if bank.strength != "step" else None,
+            odd[turn] if bank.strength != "line" else None,
+        )
+        for turn in sorted(wanted)
+    )
+
+
+# ---------------------------------------------------------------- planning
+
+
+def _share(parts: Mapping[int, Mapping[str, F64]]) -> tuple[list[_Product], dict[int, Sum]]:
+    """Equal parts become one product; a negated part shares it with a minus sign."""
+    products: list[_Product] = []
+    known: dict[tuple[str, bytes], tuple[int, int]] = {}
+    sums: dict[int, Sum] = {}
+    for index, split in parts.items():
+        terms = []
+        for basis, exact in split.items():
+            if not exact.any():
+                continue
+            key = (basis, (exact + 0.0).tobytes())  # + 0.0: minus zero is zero
+            if key not in known:
+                place = len(products)
+                products.append(_Product(basis, exact, exact.astype(np.float32)))
+                known[(basis, (0.0 - exact).tobytes())] = (place, -1)
+                known[key] = (place, 1)
+            terms.append(known[key])
+        sums[index] = tuple(terms)
+    return products, sums
+
+
+def _clusters(sums: Mapping[int, Sum]) -> list[list[int]]:
+    """Kernels that share products, directly or through others."""
+    owner: dict[int, int] = {}
+    root = {index: index for index in sums}
+
+    def find(index: int) -> int:
+        while root[index] != index:
+            index = root[index]
+        return index
+
+    for index, terms in sums.items():
+        for product, _ in terms:
+            if product in owner:
+                root[find(index)] = find(owner[product])
+            owner[product] = index
+    found: dict[int, list[int]] = {}
+    for index in sums:
+        found.setdefault(find(index), []).append(index)
+    return list(found.values())
+
+
+def _worth_splitting(split: Mapping[int, Mapping[str, F64]], exact: F64) -> set[int]:
+    """Kernels for which the parity split saves more than its additions cost."""
+    products, sums = _share(split)
+    chosen: set[int] = set()
+    for cluster in _clusters(sums):
+        used = {product for index in cluster for product, _ in sums[index]}
+        coefficients = sum(products[p].exact.size for p in used)
+        # a basis value takes one addition for every group of products that reads it
+        parity = 2 * coefficients + coefficients // GROUP + sum(len(sums[i]) for i in cluster)
+        direct, _ = _share({index: {"all": exact[index]} for index in cluster})
+        if parity < sum(2 * p.exact.size for p in direct):
+            chosen.update(cluster)
+    return chosen
+
+
+def _group(products: list[_Product], sums: Mapping[int, Sum], bank: Bank) -> list[list[int]]:
+    """Products with one basis and one use (scale and parity), at most GROUP together."""
+    use: dict[int, tuple[Any, ...]] = {}
+    for index, terms in sums.items():
+        kernel = bank.kernels[index]
+        scale = -1 if kernel.scale is None else kernel.scale
+        for product, _ in terms:
+            use.setdefault(product, (scale, kernel.parity, products[product].basis))
+    groups: list[list[int]] = []
+    for key in sorted(set(use.values())):
+        same = [p for p in sorted(use) if use[p] == key]
+        count = -(-len(same) // GROUP)
+        groups += [list(map(int, part)) for part in np.array_split(same, count)]
+    return groups
+
+
+def _bounds(products: list[_Product], sums: Mapping[int, Sum], span: float) -> tuple[float, ...]:
+    """Largest |float32 response - exact response| for every kernel; see :func:`make_plan`."""
+    bounds = []
+    for index in sorted(sums):
+        total = 0.0
+        for number, _ in sums[index]:
+            p = products[number]
+            uses = _uses(p.basis, (p.exact.shape[0], p.exact.shape[1]))
+            folds = 0 if p.basis == "all" else 2
+            roundings = p.exact.size + folds + len(sums[index]) - 1
+            total += gamma(roundings) * float((np.abs(p.rounded).astype(np.float64) * uses).sum())
+            total += float((np.abs(p.rounded - p.exact) * uses).sum())
+        bounds.append(total * span)
+    return tuple(bounds)
+
+
+def _additions(products: list[_Product], groups: list[list[int]], sums: Mapping[int, Sum]) -> int:
+    """Additions for each pixel: folding rows and columns, summing products, joining them."""
+    fold_rows = {(p.basis[0], p.exact.shape[0] - (p.basis[0] == "e")) for p in products}
+    total = sum(count for kind, count in fold_rows if kind != "a")
+    for group in groups:
+        first = products[group[0]]
+        rows, cols = first.exact.shape
+        if first.basis != "all":
+            total += rows * (cols - (first.basis[1] == "e"))
+        total += len(group) * (first.exact.size - 1)
+    return int(total) + sum(max(len(terms) - 1, 0) for terms in sums.values())
+
+
+def _interface_number(bank: Bank) -> int:
+    """A number that changes with anything a program built against the bank relies on."""
+    h = hashlib.sha256(b"patchlab C interface 1\0")
+    table = bank.table
+    names = "\0".join(k.name for k in bank.kernels)
+    about = f"{bank.name}\0{table.contract.pixels}\0{bank.border}\0{bank.strength}\0{names}"
+    about += f"\0{table.kind}\0{table.slope!r}\0{table.offset!r}\0{table.scale!r}"
+    h.update(about.encode())
+    h.update(np.ascontiguousarray(bank.taps, "<f4").tobytes())
+    if table.values is not None:
+        h.update(np.ascontiguousarray(table.values, "<f4").tobytes())
+    return int(h.hexdigest()[:7], 16)
+
+
+def _lines(products: list[_Product], groups: list[list[int]]) -> tuple[str, ...]:
+    words = {
+        "all": "taps as they are",
+        "ee": "even in y, even in x",
+        "eo": "even in y, odd in x",
+        "oe": "odd in y, even in x",
+        "oo": "odd in y, odd in x",
+    }
+    return tuple(
+        f"{len(group)} x {products[group[0]].exact.shape[0]} x "
+        f"{products[group[0]].exact.shape[1]} coefficients, {words[products[group[0]].basis]}"
+        for group in groups
+    )
+
+
+def make_plan(bank: Bank, kind: str = "auto") -> Plan:
+    """Plan a bank's computation.
+
+    Parameters
+    ----------
+    bank : Bank
+    kind : "direct" (every tap), "parity" (every kernel by its parts) or "auto", which takes
+        for each set of kernels that share parts whichever needs fewer operations
+
+    Returns
+    -------
+    Plan : its ``detail`` holds ``bases`` (one a product), ``coefficients`` (float32 arrays, one a
+        product), ``sums`` (one a kernel), ``product_groups``, ``strength`` (one entry a scale, as
+        :func:`strength_members`), ``abi`` (the interface's number) and ``asked`` (the kind)
+
+    Raises
+    ------
+    UsageError : an unknown kind, or a scale that lacks the kernels its strength is made of.
+
+    Notes
+    -----
+    The bound of a kernel is the sum over its products of
+    ``gamma_n sum|coefficient| uses X + sum|rounding of the coefficient| uses X``, where n counts
+    the roundings on the longest path (products and sums, two folds, the joins), ``uses`` is how
+    many pixels a basis value is made of, and X the largest absolute working value of the input
+    contract. It holds for every order of summation, with fused multiply-adds or without (Higham
+    2002, section 3.1), barring underflow. For float32 pixels X is the contract's largest level:
+    the bound scales with the working values if larger ones are given.
+    """
+    if kind not in KINDS:
+        raise UsageError(f"unknown plan {kind!r}", remedy=f"choose one of {', '.join(KINDS)}")
+    exact = bank.taps.astype(np.float64)
+    split = {i: parity_parts(k) for i, k in enumerate(exact)}
+    chosen = set(split) if kind == "parity" else set()
+    if kind == "auto":
+        chosen = _worth_splitting(split, exact)
+    mixed = {i: split[i] if i in chosen else {"all": exact[i]} for i in split}
+    products, sums = _share(mixed)
+    groups = _group(products, sums, bank)
+    return Plan(
+        kind="parity" if any(p.basis != "all" for p in products) else "direct",
+        groups=_lines(products, groups),
+        multiplies=float(sum(p.exact.size for p in products)),
+        adds=float(_additions(products, groups, sums)),
+        error_bound=_bounds(products, sums, bank.table.span),
+        detail={
+            "bases": tuple(p.basis for p in products),
+            "coefficients": tuple(p.rounded for p in products),
+            "sums": tuple(sums[i] for i in sorted(sums)),
+            "product_groups": tuple(tuple(g) for g in groups),
+            "strength": tuple(strength_members(bank, s) for s in range(len(bank.scales))),
+            "abi": _interface_number(bank),
+            "asked": kind,
+        },
+    )
+
+
+def rebuilt_taps(plan: Plan, size: int) -> Iterator[F64]:
+    """The kernels a plan really computes, unfolded again; float64 (size, size) each.
+
+    They differ from the bank's taps by the rounding of the parts and nothing else.
+    """
+    c = size // 2
+    for terms in plan.detail["sums"]:
+        kernel = np.zeros((size, size))
+        for product, sign in terms:
+            basis = plan.detail["bases"][product]
+            values = plan.detail["coefficients"][product].astype(np.float64)
+            kernel += sign * (values if basis == "all" else _unfold(values, basis, c))
+        yield kernel
+
+
+def _unfold(values: F64, basis: str, c: int) -> F64:
+    quarter = np.zeros((c + 1, c + 1))
+    quarter[c + 1 - values.shape[0] :, c + 1 - values.shape[1] :] = values
+    half = np.concatenate([(1 if basis[1] == "e" else -1) * quarter[:, :0:-1], quarter], axis=1)
+    return np.concatenate([(1 if basis[0] == "e" else -1) * half[:0:-1], half])
+
+
+def describe(plan: Plan) -> str:
+    """The plan as a few lines for a person."""
+    kernels = len(plan.detail["sums"])
+    shared = sum(len(terms) for terms in plan.detail["sums"]) - len(plan.detail["bases"])
+    head = (
+        f"{plan.kind} plan: {kernels} kernels, {plan.multiplies:.0f} multiplies and "
+        f"{plan.adds:.0f} additions a pixel"
+    )
+    if shared:
+        head += f"; {shared} parts are shared between kernels"
+    worst = f"largest error bound {max(plan.error_bound):.3g} (working values)"
+    return "\n".join([head, *(f"  {line}" for line in plan.groups), worst])

@@ -1,0 +1,388 @@
+"""Least squares of a blurred edge run through the input table, many edge elements at once.
+
+The scene holds a step (or a line) that the lens blurs *in light*; the bank sees it
+through its input table. A model fitted to table values directly is pulled to the dark
+side, by up to a third of a pixel. So the model is ``table(low + (high - low) profile(d / blur))``
+with ``d`` the distance to the edge, and Gauss-Newton steps go through the table's slope.
+
+Six parameters a fit: position along the normal, normal direction, low, high, curvature,
+log blur. The last two stay fixed unless the residual of the straight, known-blur fit asks
+for them by a score test.
+"""
+
+from __future__ import annotations
+
+import math
+from dataclasses import dataclass
+from functools import cached_property
+from typing import Any, Literal
+
+import numpy as np
+from numpy.typing import NDArray
+from scipy.special import ndtr
+
+from patchlab.conventions import srgb_decode
+from patchlab.types import F32, F64, InputTable
+
+Profile = Literal["step", "line"]
+
+ITERATIONS = 12
+ASKS = 6.63
+"""Fall of the chi-square that frees a further parameter (1 % of straight edges, by chance)."""
+CURVATURE_PRIOR = 0.25
+"""Standard deviation of the curvature before looking, 1 / pixels."""
+BLUR_PRIOR = 0.7
+"""The same of log blur about the blur given."""
+CHUNK = 2048
+
+
+@dataclass(frozen=True, eq=False)
+class Curve:
+    """Working value against linear light (in code units), piecewise linear.
+
+    Parameters
+    ----------
+    light : increasing ndarray (n,)
+    value : ndarray (n,)
+    clipped : True when the camera saturates at both ends; otherwise the ends run on straight
+    """
+
+    light: F64
+    value: F64
+    clipped: bool
+
+    @cached_property
+    def slope(self) -> F64:
+        """Slope of each piece, (n - 1,)."""
+        return np.asarray(np.diff(self.value) / np.diff(self.light))
+
+    @cached_property
+    def pitch(self) -> float:
+        """Distance of the knots when they are evenly spread, else 0."""
+        steps = np.diff(self.light)
+        even = np.ptp(steps) <= 1e-9 * steps[0]
+        return float(steps[0]) if even else 0.0
+
+    def _piece(self, light: F64) -> NDArray[np.int64]:
+        if self.pitch:
+            i = np.floor((light - self.light[0]) / self.pitch).astype(np.int64)
+        else:
+            i = np.searchsorted(self.light, light, "right") - 1
+        return np.asarray(np.clip(i, 0, self.light.size - 2))
+
+    def at(self, light: F64) -> tuple[F64, F64]:
+        """Working values and their slope against light."""
+        inside = np.clip(light, self.light[0], self.light[-1]) if self.clipped else light
+        i = self._piece(inside)
+        slope = self.slope[i]
+        value = self.value[i] + slope * (inside - self.light[i])
+        if self.clipped:
+            slope = np.where(inside == light, slope, 0.0)
+        return value, slope
+
+    def inverse(self, value: Any) -> F64:
+        """Light whose working value this is (the nearest end beyond the table)."""
+        rising = np.maximum.accumulate(self.value)
+        return np.interp(np.asarray(value, np.float64), rising, self.light)
+
+
+def curve_of(table: InputTable) -> Curve:
+    """The curve from linear light to working values that an input table implies."""
+    contract = table.contract
+    if table.values is not None:
+        codes = np.arange(table.values.size, dtype=np.float64)
+        value = table.values.astype(np.float64)
+        if contract.transfer == "linear":
+            return Curve(codes, value, clipped=True)
+        span = contract.white - contract.black
+        use = (codes >= contract.black) & (codes <= contract.white)
+        unit = (codes[use] - contract.black) / span
+        return Curve(srgb_decode(unit) * span, value[use], clipped=True)
+    if table.kind == "identity":
+        ends = np.array([contract.black, contract.white], np.float64)
+        return Curve(ends, ends.copy(), clipped=False)
+    # squares spread the knots evenly over the root's values
+    ends = np.linspace(0, 1, 2049) ** 2 * (contract.white - contract.black) + contract.black
+    return Curve(ends, table.apply(ends.astype(np.float32)).astype(np.float64), clipped=False)
+
+
+@dataclass(frozen=True, eq=False)
+class Window:
+    """A disk of pixels: offsets (m,) from its centre pixel."""
+
+    x: NDArray[np.int64]
+    y: NDArray[np.int64]
+
+    @classmethod
+    def disk(cls, radius: float) -> Window:
+        """Pixels at most ``radius`` from the centre, in row order."""
+        r = math.floor(radius)
+        y, x = np.mgrid[-r : r + 1, -r : r + 1]
+        keep = x * x + y * y <= radius * radius
+        return cls(x[keep].astype(np.int64), y[keep].astype(np.int64))
+
+
+@dataclass(frozen=True, eq=False)
+class Fits:
+    """Fitted edges, one entry an element.
+
+    Parameters
+    ----------
+    parameters : ndarray (n, 6): position along the normal from the element's pixel (px),
+        direction towards ``high`` (radians), low, high (light in code units), curvature
+        (1 / px, positive when the edge bends towards the normal), log of the blur (px)
+    sd : ndarray (n, 6), standard errors; 0 for a parameter that was held
+    chi2 : ndarray (n,), residual sum of squares over the noise variance, per degree of freedom
+    ok : bool ndarray (n,), False where the fit did not settle
+    """
+
+    parameters: F64
+    sd: F64
+    chi2: F64
+    ok: NDArray[np.bool_]
+
+
+def _profile(u: F64, profile: Profile, *, slope: bool = True) -> tuple[F64, F64]:
+    """The blurred edge's shape at ``u`` blurs from it, and its slope."""
+    if profile == "step" and not slope:
+        return np.asarray(ndtr(u)), np.empty(0)
+    bell = np.exp(-u * u / 2)
+    if profile == "step":
+        return np.asarray(ndtr(u)), bell / math.sqrt(2 * math.pi)
+    return bell, -u * bell
+
+
+class _Problem:
+    """One chunk of windows with their data; all arrays (n, m) or (n, m, 6)."""
+
+    def __init__(
+        self, data: F64, weight: F64, window: Window, curve: Curve, profile: Profile, blur: float
+    ) -> None:
+        self.data, self.weight, self.curve, self.profile = data, weight, curve, profile
+        self.x, self.y = window.x[None].astype(float), window.y[None].astype(float)
+        self.prior = np.array([0, 0, 0, 0, CURVATURE_PRIOR**-2, BLUR_PRIOR**-2])
+        self.centre = np.array([0, 0, 0, 0, 0, math.log(blur)])
+
+    def take(self, index: NDArray[Any]) -> _Problem:
+        """The same for some of the windows."""
+        part = object.__new__(_Problem)
+        part.__dict__.update(self.__dict__)
+        part.data, part.weight = self.data[index], self.weight[index]
+        return part
+
+    def residual(self, q: F64, *, jacobian: bool = True) -> tuple[F64, F64]:
+        """Weighted data minus model, and the model's derivatives in the six parameters."""
+        p, theta, low, high, bend, log_blur = (q[:, i, None] for i in range(6))
+        cos, sin, blur = np.cos(theta), np.sin(theta), np.exp(log_blur)
+        along = -self.x * sin + self.y * cos
+        across = self.x * cos + self.y * sin
+        u = (across - p - bend * along**2 / 2) / blur
+        shape, slope = _profile(u, self.profile, slope=jacobian)
+        value, gain = self.curve.at(low + (high - low) * shape)
+        left = self.weight * (self.data - value)
+        if not jacobian:
+            return left, np.empty(0)
+        gain = gain * self.weight
+        by_u = gain * (high - low) * slope
+        columns = (
+            -by_u / blur,
+            by_u * (along + bend * along * across) / blur,
+            gain * (1 - shape),
+            gain * shape,
+            -by_u * along**2 / 2 / blur,
+            -by_u * u,
+        )
+        return left, np.stack(columns, axis=2)
+
+    def cost(self, q: F64, left: F64, active: NDArray[np.bool_]) -> F64:
+        """Sum of squares with the priors of the active parameters."""
+        off = (q - self.centre) ** 2 * self.prior * active
+        return np.asarray((left**2).sum(axis=1) + off.sum(axis=1))
+
+
+def _normal(
+    problem: _Problem, q: F64, left: F64, jac: F64, active: NDArray[np.bool_]
+) -> tuple[F64, F64]:
+    """Normal matrix and right side; held parameters get a unit row and no step."""
+    turned = jac.transpose(0, 2, 1)
+    matrix = turned @ jac
+    right = (turned @ left[:, :, None])[:, :, 0] - problem.prior * (q - problem.centre)
+    diagonal = np.arange(6)
+    matrix[:, diagonal, diagonal] += problem.prior
+    both = active[:, :, None] & active[:, None, :]
+    matrix = np.where(both, matrix, 0.0)
+    matrix[:, diagonal, diagonal] += np.where(active, 1e-12, 1.0)
+    return matrix, np.where(active, right, 0.0)
+
+
+_STEP = np.array([0.5, 0.3, np.inf, np.inf, 0.1, 0.4])
+
+
+def _descend(problem: _Problem, q: F64, active: NDArray[np.bool_]) -> tuple[F64, NDArray[np.bool_]]:
+    """Damped Gauss-Newton for every window; windows that settled are left out of later rounds."""
+    q = q.copy()
+    damping = np.full(len(q), 1e-3)
+    settled = np.zeros(len(q), bool)
+    for _ in range(ITERATIONS):
+        live = np.flatnonzero(~settled)
+        if not live.size:
+            break
+        part, on, start = problem.take(live), active[live], q[live]
+        left, jac = part.residual(start)
+        matrix, right = _normal(part, start, left, jac, on)
+        i = np.arange(6)
+        matrix[:, i, i] *= 1 + damping[live, None]
+        step = np.linalg.solve(matrix, right[:, :, None])[:, :, 0]
+        step *= np.minimum(1, (_STEP / np.maximum(np.abs(step), 1e-30)).min(axis=1))[:, None]
+        trial = start + step
+        before = part.cost(start, left, on)
+        after = part.cost(trial, part.residual(trial, jacobian=False)[0], on)
+        better = after <= before
+        q[live[better]] = trial[better]
+        damping[live] = np.where(better, damping[live] / 5, damping[live] * 8)
+        still = (np.abs(step[:, 0]) < 3e-4) & (before - after < 1e-2)
+        settled[live] = still | (damping[live] > 1e4)
+    return q, settled
+
+
+def _score(problem: _Problem, q: F64, active: NDArray[np.bool_], extra: int) -> F64:
+    """Predicted fall of the chi-square if one more parameter were let free."""
+    left, jac = problem.residual(q)
+    matrix, _ = _normal(problem, q, left, jac, active)
+    column = jac[:, :, extra]
+    cross = np.where(active, (jac * column[:, :, None]).sum(axis=1), 0.0)
+    explained = (cross * np.linalg.solve(matrix, cross[:, :, None])[:, :, 0]).sum(axis=1)
+    free = (column**2).sum(axis=1) - explained
+    push = (column * left).sum(axis=1)
+    return np.asarray(push**2 / np.maximum(free, 1e-9))
+
+
+def _errors(
+    problem: _Problem, q: F64, active: NDArray[np.bool_], correlation: F64 | None
+) -> tuple[F64, F64]:
+    """Standard errors (n, 6) for unit noise, and chi-square per degree of freedom."""
+    left, jac = problem.residual(q)
+    matrix, _ = _normal(problem, q, left, jac, active)
+    inverse = np.linalg.inv(matrix)
+    if correlation is not None:  # least squares under noise that is not white
+        seen = jac.transpose(0, 2, 1) @ (correlation @ jac)
+        inverse = inverse @ seen @ inverse
+    spread = np.sqrt(np.maximum(np.diagonal(inverse, axis1=1, axis2=2), 0.0))
+    free = np.maximum((problem.weight > 0).sum(axis=1) - active.sum(axis=1), 1)
+    return np.where(active, spread, 0.0), (left**2).sum(axis=1) / free
+
+
+def _levels(problem: _Problem, q: F64) -> F64:
+    """Fill in low and high from the pixels on either side of the starting edge."""
+    light = problem.curve.inverse(problem.data)
+    p, theta, blur = q[:, 0, None], q[:, 1, None], np.exp(q[:, 5, None])
+    u = (problem.x * np.cos(theta) + problem.y * np.sin(theta) - p) / blur
+    low, high = u < -1.0, u > 1.0
+    if problem.profile == "line":
+        low, high = np.abs(u) > 2.0, np.abs(u) < 0.7
+    out = q.copy()
+    for column, side in ((2, low), (3, high)):
+        weight = problem.weight * side + 1e-6
+        out[:, column] = (weight * light).sum(axis=1) / weight.sum(axis=1)
+    return out
+
+
+def correlation_of(window: Window, autocovariance: F64 | None) -> F64 | None:
+    """Noise correlation between the pixels of a window, (m, m); None when white."""
+    if autocovariance is None:
+        return None
+    m = autocovariance.shape[0] // 2
+    dy, dx = window.y[:, None] - window.y[None], window.x[:, None] - window.x[None]
+    near = (np.abs(dy) <= m) & (np.abs(dx) <= m)
+    rows, cols = np.clip(dy + m, 0, 2 * m), np.clip(dx + m, 0, 2 * m)
+    return np.where(near, autocovariance[rows, cols], 0.0)
+
+
+def fit_edges(
+    values: F32,
+    rows: NDArray[np.int64],
+    cols: NDArray[np.int64],
+    position: F64,
+    theta: F64,
+    *,
+    curve: Curve,
+    profile: Profile = "step",
+    blur_px: float = 0.8,
+    blur_known: bool = True,
+    noise_sd: float = 1.0,
+    radius: float = 4,
+    autocovariance: F64 | None = None,
+    invalid: NDArray[np.bool_] | None = None,
+) -> Fits:
+    """Fit a blurred step or line in a disk about each element.
+
+    Parameters
+    ----------
+    values : float32 ndarray (h, w), working values (table output)
+    rows, cols : ndarray (n,), the elements' pixels
+    position : ndarray (n,), start along the normal, pixels
+    theta : ndarray (n,), start direction, radians, towards ``high``
+    curve : light to working value
+    profile : step or line
+    blur_px : one standard deviation of the blur (for a line: of its blurred profile)
+    blur_known : False lets the blur free everywhere
+    noise_sd : of the working values
+    radius : of the disk, pixels
+    autocovariance : of the noise, for honest errors when it is not white
+    invalid : bool ndarray (h, w), pixels that do not count
+
+    Returns
+    -------
+    Fits
+
+    Notes
+    -----
+    Rao 1945 and Cramer 1946 for the bound that the standard errors state.
+    """
+    window = Window.disk(radius)
+    correlation = correlation_of(window, autocovariance)
+    parts = []
+    for begin in range(0, len(rows), CHUNK):
+        cut = slice(begin, begin + CHUNK)
+        data, weight = _gather(values, rows[cut], cols[cut], window, noise_sd, invalid)
+        problem = _Problem(data, weight, window, curve, profile, blur_px)
+        q = np.zeros((len(data), 6))
+        q[:, 0], q[:, 1], q[:, 5] = position[cut], theta[cut], math.log(blur_px)
+        parts.append(_fit_chunk(problem, _levels(problem, q), blur_known, correlation))
+    if not parts:
+        return Fits(np.empty((0, 6)), np.empty((0, 6)), np.empty(0), np.empty(0, bool))
+    return Fits(*(np.concatenate(column) for column in zip(*parts, strict=True)))
+
+
+def _gather(
+    values: F32,
+    rows: NDArray[np.int64],
+    cols: NDArray[np.int64],
+    window: Window,
+    noise_sd: float,
+    invalid: NDArray[np.bool_] | None,
+) -> tuple[F64, F64]:
+    h, w = values.shape
+    y, x = rows[:, None] + window.y, cols[:, None] + window.x
+    inside = (y >= 0) & (y < h) & (x >= 0) & (x < w)
+    y, x = np.clip(y, 0, h - 1), np.clip(x, 0, w - 1)
+    if invalid is not None:
+        inside &= ~invalid[y, x]
+    return values[y, x].astype(np.float64), inside / noise_sd
+
+
+def _fit_chunk(
+    problem: _Problem, q: F64, blur_known: bool, correlation: F64 | None
+) -> tuple[F64, F64, F64, NDArray[np.bool_]]:
+    active = np.ones(q.shape, bool)
+    active[:, 4], active[:, 5] = False, not blur_known
+    q, ok = _descend(problem, q, active)
+    for extra in (4, 5):
+        asks = (_score(problem, q, active, extra) > ASKS) & ~active[:, extra]
+        again = np.flatnonzero(asks)
+        if again.size:
+            active[again, extra] = True
+            q[again], ok[again] = _descend(problem.take(again), q[again], active[again])
+    sd, chi2 = _errors(problem, q, active, correlation)
+    ok &= np.isfinite(q).all(axis=1) & np.isfinite(sd).all(axis=1)
+    return q, sd, chi2, ok

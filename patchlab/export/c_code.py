@@ -1,0 +1,317 @@
+"""The vector code of a bank: what is computed on one chunk of pixels.
+
+Each group of products is one function; sums and the edges' winner follow. All of
+it is written once and read once for every instruction set (see the template).
+"""
+
+from __future__ import annotations
+
+from typing import Any
+
+import numpy as np
+
+from patchlab.export.c_text import lines, numbers
+from patchlab.types import Bank, Plan
+
+
+def folds(plan: Plan) -> bool:
+    """Does the plan read folded rows?"""
+    return any(basis != "all" for basis in plan.detail["bases"])
+
+
+def coefficients(number: int, plan: Plan) -> str:
+    """The coefficients of a group: by row, column, product, as they are read."""
+    group = plan.detail["product_groups"][number]
+    stack = np.stack([plan.detail["coefficients"][p] for p in group], axis=-1)
+    return (
+        f"/* {plan.groups[number]} */\n"
+        f"static const float @N@_group{number}_taps[{stack.size}] = {{\n"
+        f"{numbers(np.ascontiguousarray(stack, dtype=np.float32))}\n}};\n"
+    )
+
+
+_FOLD_TEXT = """\
+/* The middle row, then the sums and then the differences of the rows about it. */
+static @N@_TARGET void @N@_FN(fold)(const float *const *rows, ptrdiff_t at, float *s)
+{
+    int j, x;
+    for (x = 0; x < @N@_LINE; x += @N@_LANES) {
+        @N@_STORE(s + x, @N@_LOAD(rows[@N@_RADIUS] + at + x));
+    }
+    for (j = 1; j <= @N@_RADIUS; ++j) {
+        const float *const below = rows[@N@_RADIUS + j] + at;
+        const float *const above = rows[@N@_RADIUS - j] + at;
+        float *const sum = s + (ptrdiff_t)j * @N@_LINE;
+        float *const difference = s + (ptrdiff_t)(@N@_RADIUS + j) * @N@_LINE;
+        for (x = 0; x < @N@_LINE; x += @N@_LANES) {
+            const @N@_FN(vec) b = @N@_LOAD(below + x), a = @N@_LOAD(above + x);
+            @N@_STORE(sum + x, b + a);
+            @N@_STORE(difference + x, b - a);
+        }
+    }
+}
+
+"""
+
+
+def fold(plan: Plan) -> str:
+    """C function that folds the rows of a chunk, where the plan reads folded rows."""
+    return _FOLD_TEXT if folds(plan) else ""
+
+
+def _step(group: Any, left: str, right: str) -> list[str]:
+    """Two vectors of basis values go into every product of a group."""
+    adds = [
+        f"@N@_MUL_ADD({sums}{n}, {value}, k[{n}]);"
+        for n in range(len(group))
+        for sums, value in (("a", "p"), ("b", "q"))
+    ]
+    return [
+        f"const @N@_FN(vec) p = {left};",
+        f"const @N@_FN(vec) q = {right};",
+        *adds,
+        f"k += {len(group)};",
+    ]
+
+
+def group_code(number: int, plan: Plan, radius: int) -> str:
+    """C function that computes a group of products on one chunk."""
+    group = plan.detail["product_groups"][number]
+    basis = plan.detail["bases"][group[0]]
+    second = " + @N@_LANES"
+    if basis == "all":
+        arguments, first, last = "const float *const *rows, ptrdiff_t at, float *t", 0, 2 * radius
+        source = "rows[j] + at + x"
+        pre: list[str] = []
+        start, stop = 0, 2 * radius
+        values = ("@N@_LOAD(r + i)", f"@N@_LOAD(r{second} + i)")
+    else:
+        even_y, even_x = basis[0] == "e", basis[1] == "e"
+        arguments = "const float *s, float *t"
+        first, last = (0, radius) if even_y else (radius + 1, 2 * radius)
+        source = "s + (ptrdiff_t)j * @N@_LINE + x + @N@_RADIUS"
+        pre = _step(group, "@N@_LOAD(r)", f"@N@_LOAD(r{second})") if even_x else []
+        start, stop = 1, radius
+        sign = "+" if even_x else "-"
+        values = (
+            f"@N@_LOAD(r + i) {sign} @N@_LOAD(r - i)",
+            f"@N@_LOAD(r{second} + i) {sign} @N@_LOAD(r{second} - i)",
+        )
+    inner = [f"for (i = {start}; i <= {stop}; ++i) {{", *_in(_step(group, *values)), "}"]
+    block = ["{", *_in(pre), "}"] if pre else []
+    if start > stop:  # a radius of 0 has no columns about the middle
+        inner = []
+    body = [
+        "int x;",
+        "for (x = 0; x < @N@_CHUNK; x += 2 * @N@_LANES) {",
+        f"    const float *k = @N@_group{number}_taps;",
+        *(f"    @N@_FN(vec) a{n} = {{0.0f}}, b{n} = {{0.0f}};" for n in range(len(group))),
+        f"    int j{', i' if inner else ''};",
+        f"    for (j = {first}; j <= {last}; ++j) {{",
+        f"        const float *const r = {source};",
+        *_in(block, 8),
+        *_in(inner, 8),
+        "    }",
+        *(
+            f"    @N@_STORE(t + {p} * @N@_CHUNK + x{tail}, {v}{n});"
+            for n, p in enumerate(group)
+            for v, tail in (("a", ""), ("b", second))
+        ),
+        "}",
+    ]
+    head = f"static @N@_TARGET void @N@_FN(group{number})({arguments})"
+    return f"/* {plan.groups[number]} */\n{head}\n{{\n{lines(body, 4)}\n}}\n"
+
+
+def _in(rows: list[str], by: int = 4) -> list[str]:
+    return [" " * by + row for row in rows]
+
+
+def _calls(plan: Plan, wanted: set[int]) -> list[str]:
+    """Calls that compute the groups in which some of these products are."""
+    chosen = [
+        (g, plan.detail["bases"][group[0]] == "all")
+        for g, group in enumerate(plan.detail["product_groups"])
+        if wanted.intersection(group)
+    ]
+    first = ["@N@_FN(fold)(rows, at, work);"] if any(not direct for _, direct in chosen) else []
+    return first + [
+        f"@N@_FN(group{g})(rows, at, t);" if direct else f"@N@_FN(group{g})(work, t);"
+        for g, direct in chosen
+    ]
+
+
+# ---------------------------------------------------------------- sums
+
+
+def _join(terms: Any) -> tuple[str, list[str]]:
+    """Where a kernel's response stands, and the calls that put it there."""
+    if not terms:
+        return "r", ["zero(r)"]
+    at = [f"t + {p} * @N@_CHUNK" for p, _ in terms]
+    if len(terms) == 1:
+        return (at[0], []) if terms[0][1] > 0 else ("r", [f"negate(r, {at[0]})"])
+    (_, first), (_, second), *rest = terms
+    calls = []
+    if first > 0:
+        calls.append(f"{'add' if second > 0 else 'subtract'}(r, {at[0]}, {at[1]})")
+    elif second > 0:
+        calls.append(f"subtract(r, {at[1]}, {at[0]})")
+    else:
+        calls += [f"negate(r, {at[0]})", f"subtract(r, r, {at[1]})"]
+    for (_, sign), where in zip(rest, at[2:], strict=True):
+        calls.append(f"{'add' if sign > 0 else 'subtract'}(r, r, {where})")
+    return "r", calls
+
+
+_JOIN_TEXTS = {
+    "negate": ("float *to, const float *a", "-@N@_LOAD(a + x)"),
+    "add": ("float *to, const float *a, const float *b", "@N@_LOAD(a + x) + @N@_LOAD(b + x)"),
+    "subtract": ("float *to, const float *a, const float *b", "@N@_LOAD(a + x) - @N@_LOAD(b + x)"),
+}
+
+
+_ZERO_TEXT = """\
+static @N@_TARGET void @N@_FN(zero)(float *to)
+{
+    memset(to, 0, @N@_CHUNK * sizeof(float));
+}
+
+"""
+
+
+def joins(plan: Plan) -> str:
+    """The joining functions that this bank needs, and no others."""
+    used = {call.split("(")[0] for terms in plan.detail["sums"] for call in _join(terms)[1]}
+    return (_ZERO_TEXT if "zero" in used else "") + "".join(
+        f"static @N@_TARGET void @N@_FN({word})({arguments})\n{{\n    int x;\n"
+        f"    for (x = 0; x < @N@_CHUNK; x += @N@_LANES) @N@_STORE(to + x, {value});\n}}\n\n"
+        for word, (arguments, value) in _JOIN_TEXTS.items()
+        if word in used
+    )
+
+
+def responses(plan: Plan) -> str:
+    """Body of the C function that writes every plane of a chunk."""
+    wanted = {p for terms in plan.detail["sums"] for p, _ in terms}
+    body = ["float *const t = work + @N@_FOLDED; /* products */"]
+    if any(_join(terms)[0] == "r" for terms in plan.detail["sums"]):
+        body.append(f"float *const r = t + {len(plan.detail['bases'])} * @N@_CHUNK; /* a sum */")
+    body += _calls(plan, wanted)
+    for k, terms in enumerate(plan.detail["sums"]):
+        where, calls = _join(terms)
+        body += [f"@N@_FN({call.replace('(', ')(', 1)};" for call in calls]
+        target = f"(float *)(void *)(out + {k} * plane)"
+        body.append(f"@N@_FN(put)({where}, {target}, n, stream);")
+    if not wanted:
+        body += ["(void)rows;", "(void)at;"]
+    return lines(body, 4)
+
+
+# ---------------------------------------------------------------- edges
+
+
+TAKE = {
+    "TAKE_16": """\
+#define @N@_TAKE(v, turn)                                                            \\
+    do {                                                                             \\
+        const __mmask16 m = _mm512_cmp_ps_mask((__m512)(v), (__m512)best, _CMP_GT_OQ); \\
+        best = (@N@_FN(vec))_mm512_mask_mov_ps((__m512)best, m, (__m512)(v));        \\
+        who = (@N@_FN(vec))_mm512_mask_mov_ps((__m512)who, m, _mm512_set1_ps(turn)); \\
+    } while (0)
+""",
+    "TAKE_8": """\
+#define @N@_TAKE(v, turn)                                                            \\
+    do {                                                                             \\
+        const __m256 m = _mm256_cmp_ps((__m256)(v), (__m256)best, _CMP_GT_OQ);       \\
+        best = (@N@_FN(vec))_mm256_blendv_ps((__m256)best, (__m256)(v), m);          \\
+        who = (@N@_FN(vec))_mm256_blendv_ps((__m256)who, _mm256_set1_ps(turn), m);   \\
+    } while (0)
+""",
+    "TAKE_ANY": """
+/* Keep the largest value so far and whose it is; among equals the first stays. */
+#if @N@_LANES == 1
+#define @N@_TAKE(v, turn)        \\
+    do {                         \\
+        if ((v) > best) {        \\
+            best = (v);          \\
+            who = (turn);        \\
+        }                        \\
+    } while (0)
+#define @N@_ABS(v) ((v) < 0.0f ? -(v) : (v))
+#else
+typedef int @N@_FN(bits) __attribute__((vector_size(4 * @N@_LANES)));
+#ifndef @N@_TAKE
+#define @N@_TAKE(v, turn)                                                            \\
+    do {                                                                             \\
+        const @N@_FN(bits) m = (v) > best;                                           \\
+        const @N@_FN(vec) t_ = (v) - (v) + (turn);                                   \\
+        best = (@N@_FN(vec))(((@N@_FN(bits))(v) & m) | ((@N@_FN(bits))best & ~m));   \\
+        who = (@N@_FN(vec))(((@N@_FN(bits))t_ & m) | ((@N@_FN(bits))who & ~m));      \\
+    } while (0)
+#endif
+#define @N@_ABS(v) ((@N@_FN(vec))((@N@_FN(bits))(v) & 0x7fffffff))
+#endif
+""",
+}
+"""Keeping the winner, by instruction set; left out of a bank without a strength."""
+
+
+def _expression(terms: Any) -> str:
+    """A kernel's response at x."""
+    text = "".join(
+        f"{' + ' if s > 0 else ' - '}@N@_LOAD(t + {p} * @N@_CHUNK + x)" for p, s in terms
+    )
+    return text[3:] if text.startswith(" + ") else text.strip() or "zero"
+
+
+def _magnitude(plan: Plan, member: Any) -> list[str]:
+    """Statements that leave an orientation's absolute response, or squared energy, in v."""
+    _, even, odd = member
+    sums = plan.detail["sums"]
+    if even is None or odd is None:
+        only = _expression(sums[odd if even is None else even])
+        return [f"v = {only};", "v = @N@_ABS(v);"]
+    return [
+        f"e = {_expression(sums[even])};",
+        f"o = {_expression(sums[odd])};",
+        "v = e * e + o * o;",
+    ]
+
+
+def edges(bank: Bank, plan: Plan, scale: int) -> str:
+    """C function for the strength and the winner of one scale on one chunk."""
+    members = plan.detail["strength"][scale]
+    kernels = [i for _, even, odd in members for i in (even, odd) if i is not None]
+    wanted = {p for i in kernels for p, _ in plan.detail["sums"][i]}
+    energy = bank.strength == "energy"
+    loop = [*_magnitude(plan, members[0]), "best = v;"]
+    for member in members[1:]:
+        loop += [*_magnitude(plan, member), f"@N@_TAKE(v, {member[0]}.0f);"]
+    empty = any(not plan.detail["sums"][k] for k in kernels)
+    body = [
+        "float *const t = work + @N@_FOLDED; /* products */",
+        f"float *const top = t + {len(plan.detail['bases'])} * @N@_CHUNK;",
+        "float *const winner = top + @N@_CHUNK;",
+        "int x;",
+        *_calls(plan, wanted),
+        "for (x = 0; x < @N@_CHUNK; x += @N@_LANES) {",
+        f"    @N@_FN(vec) v, best{', e, o' if energy else ''}, who = {{0.0f}};",
+        *(["    const @N@_FN(vec) zero = {0.0f};"] if empty else []),
+        *([f"    who += {members[0][0]}.0f;"] if members[0][0] else []),
+        *_in(loop),
+        "    @N@_STORE(top + x, best);",
+        "    @N@_STORE(winner + x, who);",
+        "}",
+        *(["for (x = 0; x < @N@_CHUNK; ++x) top[x] = sqrtf(top[x]);"] if energy else []),
+        "memcpy(strength, top, (size_t)n * sizeof(float));",
+        "for (x = 0; x < n; ++x) orientation[x] = (unsigned char)winner[x];",
+    ]
+    if not wanted:
+        body += ["(void)rows;", "(void)at;"]
+    return (
+        f"/* Strength and winner of scale {scale}. */\n"
+        f"static @N@_TARGET void @N@_FN(edges{scale})(const float *const *rows, ptrdiff_t at,\n"
+        "    int n, float *work, float *strength, unsigned char *orientation)\n"
+        f"{{\n{lines(body, 4)}\n}}\n\n"
+    )

@@ -1,0 +1,114 @@
+"""The C self-test of a bank: small cases with their expected values in the source.
+
+It proves, on the machine it runs on, that the compiled bank equals the float64
+reference within the stated tolerances, that bands, odd strides and pictures
+stored bottom-up give the same bits, and that wrong arguments are refused.
+"""
+
+from __future__ import annotations
+
+from collections.abc import Sequence
+from typing import Any
+
+import numpy as np
+from numpy.typing import NDArray
+
+from patchlab.errors import UsageError
+from patchlab.export.c_text import fill, identifier, licence, lines, numbers, template
+from patchlab.types import Bank, Plan
+
+Case = tuple[str, NDArray[Any], NDArray[np.float64], NDArray[np.float64]]
+"""A name, pixels (h, w), expected responses (n, h, w), tolerance of each kernel (n,)."""
+
+
+def emit_selftest(bank: Bank, plan: Plan, cases: Sequence[Case]) -> dict[str, bytes]:
+    """The self-test program of a bank.
+
+    Parameters
+    ----------
+    bank : Bank
+    plan : Plan made from it
+    cases : pictures with their float64 responses and the tolerance of each kernel; names are
+        C identifiers
+
+    Returns
+    -------
+    dict : ``NAME_selftest.c``; the program prints one line a check and returns 0 when all hold
+
+    Raises
+    ------
+    UsageError : no case, a name that is not an identifier, or arrays that do not fit the bank.
+    """
+    if not cases:
+        raise UsageError("a self-test needs at least one case")
+    for case in cases:
+        _check_case(bank, case)
+    bad_code = _bad_code(bank)
+    text = fill(
+        template("selftest.c.in"),
+        {
+            "N": bank.name,
+            "LICENCE": licence(" * "),
+            "COUNT": len(bank),
+            "SIZE": bank.size,
+            "ARRAYS": "\n".join(_arrays(i, case, bank.name) for i, case in enumerate(cases)),
+            "CASES": ",\n".join(_entry(i, case) for i, case in enumerate(cases)),
+            "CASE_COUNT": len(cases),
+            "MEMBERS": _members(plan),
+            "MEMBER_COUNT": max(sum(len(s) for s in plan.detail["strength"]), 1),
+            "BAD_CODE": f"{bad_code}u" if bad_code else "0",
+            "HAS_BAD_CODE": int(bad_code is not None),
+        },
+    )
+    return {f"{bank.name}_selftest.c": text}
+
+
+def _check_case(bank: Bank, case: Case) -> None:
+    name, pixels, expected, tolerance = case
+    identifier(name, "case name")
+    fits = (
+        pixels.ndim == 2
+        and pixels.dtype == np.dtype(bank.contract.format.dtype)
+        and min(pixels.shape) >= bank.size
+        and expected.shape == (len(bank), *pixels.shape)
+        and tolerance.shape == (len(bank),)
+    )
+    if not fits:
+        raise UsageError("the arrays of this case do not fit the bank", where=name)
+
+
+def _bad_code(bank: Bank) -> int | None:
+    """A pixel code that the format forbids and its container allows, or None."""
+    form = bank.contract.format
+    if not form.integer or form.full_scale == np.iinfo(form.dtype).max:
+        return None
+    return form.full_scale + 1
+
+
+def _arrays(number: int, case: Case, name: str) -> str:
+    _, pixels, expected, tolerance = case
+    rows = [
+        f"static const {name}_pixel pixels{number}[{pixels.size}] = {{\n{numbers(pixels)}\n}};",
+        f"static const double expected{number}[{expected.size}] = {{",
+        numbers(np.asarray(expected, dtype=np.float64)),
+        "};",
+        f"static const double tolerance{number}[{tolerance.size}] = {{",
+        numbers(np.asarray(tolerance, dtype=np.float64)),
+        "};",
+    ]
+    return lines(rows)
+
+
+def _entry(number: int, case: Case) -> str:
+    h, w = case[1].shape
+    return f'    {{"{case[0]}", {w}, {h}, pixels{number}, expected{number}, tolerance{number}}}'
+
+
+def _members(plan: Plan) -> str:
+    """Rows of (scale, orientation, even kernel, odd kernel), -1 where there is none."""
+    rows = [
+        f"    {{{scale}, {turn}, {-1 if even is None else even}, {-1 if odd is None else odd}}}"
+        for scale, members in enumerate(plan.detail["strength"])
+        for turn, even, odd in members
+    ]
+    return ",\n".join(rows) or "    {-1, 0, -1, -1}"

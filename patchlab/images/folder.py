@@ -1,0 +1,409 @@
+"""A folder of photographs: found, checked, and read again frame by frame.
+
+``list_photos`` walks the folder once. ``take_in`` decodes every file once, puts
+what cannot serve on a list, and decides which pixels the folder holds.
+``iterate`` then reads the good frames, one by one, as often as it is asked.
+Nothing is ever written under the folder.
+"""
+
+from __future__ import annotations
+
+import os
+import stat
+from collections.abc import Callable, Iterator
+from dataclasses import dataclass
+from pathlib import Path
+from typing import NoReturn
+
+from patchlab.errors import InputError
+from patchlab.images.decode import SUFFIXES, decode
+from patchlab.images.develop import ReadOptions, conform
+from patchlab.progress import Progress, silent
+from patchlab.store import sha256
+from patchlab.types import Frame, InputContract, Quarantined
+from patchlab.workers import map_ordered
+
+Missed = Callable[[Quarantined], None]
+"""Told of a file that could be read before and cannot any more."""
+
+
+Task = tuple[Path, str, str, ReadOptions, InputContract]
+"""A file to read again: root, relative path, SHA-256, options, the folder's contract."""
+
+
+def ignore(missed: Quarantined) -> None:
+    """Pass over a lost file without a word: the default."""
+
+
+# ---------------------------------------------------------------- listing
+
+
+@dataclass(frozen=True)
+class Listing:
+    """What stands in a folder.
+
+    Parameters
+    ----------
+    root : the folder
+    files : pictures by their names' endings: sorted relative paths, forward slashes
+    hidden : dot files and dot folders passed over
+    other : files of other kinds passed over
+    unreadable : folders that cannot be listed, names that are not valid text
+    """
+
+    root: Path
+    files: tuple[str, ...]
+    hidden: int = 0
+    other: int = 0
+    unreadable: tuple[Quarantined, ...] = ()
+
+
+def list_photos(folder: str | Path) -> Listing:
+    """List a folder's pictures, its subfolders included; or one picture alone.
+
+    Parameters
+    ----------
+    folder : path of a folder, or of one file
+
+    Returns
+    -------
+    Listing : links to folders are followed, each folder is visited once.
+
+    Raises
+    ------
+    InputError : there is nothing at that path.
+    """
+    root = Path(folder)
+    if not root.exists():
+        raise InputError("there is no such folder or file", where=str(folder))
+    if root.is_file():
+        return Listing(root.parent, (root.name,))
+    walk = _Walk()
+    walk.enter(root, "")
+    return Listing(
+        root,
+        tuple(sorted(walk.files)),
+        walk.hidden,
+        walk.other,
+        tuple(sorted(walk.unreadable, key=lambda q: q.path)),
+    )
+
+
+class _Walk:
+    """One walk through a tree, and what it has met so far."""
+
+    def __init__(self) -> None:
+        self.files: list[str] = []
+        self.unreadable: list[Quarantined] = []
+        self.hidden = self.other = 0
+        self._visited: set[tuple[int, int]] = set()
+
+    def enter(self, folder: Path, prefix: str) -> None:
+        """Take in one folder and everything below it, in order of name."""
+        try:
+            about = folder.stat()
+            if (about.st_dev, about.st_ino) in self._visited:
+                return
+            self._visited.add((about.st_dev, about.st_ino))
+            names = sorted(os.listdir(folder))
+        except OSError as error:
+            self._lost(prefix or ".", f"the folder cannot be listed ({error.strerror})")
+            return
+        for name in names:
+            self._meet(folder / name, prefix + name)
+
+    def _meet(self, path: Path, relative: str) -> None:
+        if path.name.startswith("."):
+            self.hidden += 1
+        elif not _is_text(relative):
+            self._lost(relative, "the name is not valid text")
+        elif path.is_dir():
+            self.enter(path, relative + "/")
+        elif path.suffix.lower() in SUFFIXES and not _special(path):
+            self.files.append(relative)
+        else:
+            self.other += 1
+
+    def _lost(self, relative: str, reason: str) -> None:
+        readable = relative.encode("utf-8", "backslashreplace").decode()
+        self.unreadable.append(Quarantined(readable, reason))
+
+
+def _is_text(name: str) -> bool:
+    try:
+        name.encode()
+    except UnicodeEncodeError:  # bytes that are not UTF-8 come in as lone surrogates
+        return False
+    return True
+
+
+def _special(path: Path) -> bool:
+    """True for pipes, sockets and devices: opening one could wait forever."""
+    try:
+        return not stat.S_ISREG(path.stat().st_mode)
+    except OSError:  # a broken link is listed: it will be told with its reason when read
+        return False
+
+
+# ---------------------------------------------------------------- taking in
+
+
+@dataclass(frozen=True)
+class FrameRecord:
+    """What is kept of a frame without its pixels.
+
+    Parameters
+    ----------
+    path : the frame's name, its file's path with ``#k`` for page k of several
+    file, page : where it is
+    sha256, pixels_sha256 : of the file's bytes, and of the decoded codes
+    shape : (height, width)
+    contract : of this frame alone, before it is brought to the folder's
+    invalid : share of pixels that must not be used
+    notes : what the reader did
+    """
+
+    path: str
+    file: str
+    page: int
+    sha256: str
+    pixels_sha256: str
+    shape: tuple[int, int]
+    contract: InputContract
+    invalid: float
+    notes: tuple[str, ...]
+
+
+@dataclass(frozen=True)
+class Intake:
+    """A folder that was taken in.
+
+    Parameters
+    ----------
+    listing : Listing
+    options : ReadOptions
+    contract : which pixels the folder's frames are (after scaling, where depths are mixed)
+    frames : one record a frame, sorted by path
+    quarantined : files that could not serve
+    copies : files left out because they equal another byte for byte, with that other's path
+    """
+
+    listing: Listing
+    options: ReadOptions
+    contract: InputContract
+    frames: tuple[FrameRecord, ...]
+    quarantined: tuple[Quarantined, ...] = ()
+    copies: tuple[tuple[str, str], ...] = ()
+
+    @property
+    def root(self) -> Path:
+        """The photo folder."""
+        return self.listing.root
+
+    @property
+    def inputs(self) -> dict[str, str]:
+        """Relative path to SHA-256 of every file used, in order: what a manifest keeps."""
+        return {record.file: record.sha256 for record in self.frames}
+
+    @property
+    def tasks(self) -> tuple[Task, ...]:
+        """One task a file for :func:`reread`, in order."""
+        return tuple(
+            (self.root, file, digest, self.options, self.contract)
+            for file, digest in self.inputs.items()
+        )
+
+    @property
+    def largest(self) -> int:
+        """Pixels of the largest frame."""
+        return max(h * w for h, w in (record.shape for record in self.frames))
+
+
+def read_file(root: Path, file: str, options: ReadOptions) -> tuple[Frame, ...]:
+    """Read and decode one file below ``root``.
+
+    Raises
+    ------
+    InputError : it cannot be read or decoded.
+    """
+    return decode(_bytes(root, file), file, options)
+
+
+def _bytes(root: Path, file: str) -> bytes:
+    try:
+        return (root / file).read_bytes()
+    except FileNotFoundError:
+        raise InputError("the file has vanished", where=file) from None
+    except OSError as error:
+        raise InputError(f"cannot be read ({error.strerror})", where=file) from None
+
+
+def take_in(
+    listing: Listing,
+    options: ReadOptions | None = None,
+    *,
+    max_bad: float = 0.1,
+    mixed_depths: bool = False,
+    keep_copies: bool = False,
+    jobs: int = 1,
+    progress: Progress = silent,
+) -> Intake:
+    """Decode every file once and decide which pixels the folder holds.
+
+    Parameters
+    ----------
+    listing : Listing
+    options : ReadOptions
+    max_bad : largest share of the files that may be unusable
+    mixed_depths : allow several depths; codes are then scaled, black to black and white to
+        white, to the deepest
+    keep_copies : use a file again that equals another byte for byte
+    jobs, progress : as everywhere
+
+    Returns
+    -------
+    Intake
+
+    Raises
+    ------
+    InputError : no picture, none readable, too many bad ones (the text lists them), or frames
+        of several depths or transfers.
+    """
+    options = options or ReadOptions()
+    if not listing.files and not listing.unreadable:
+        raise InputError(
+            "there is no picture in this folder",
+            where=str(listing.root),
+            remedy=f"known endings are {', '.join(sorted(SUFFIXES))}",
+        )
+    tasks = [(listing.root, file, options) for file in listing.files]
+    found = list(map_ordered(_inspect, tasks, jobs=jobs, stage="reading", progress=progress))
+    bad = (*listing.unreadable, *(r for r in found if isinstance(r, Quarantined)))
+    good = [r for r in found if not isinstance(r, Quarantined)]
+    total = len(found) + len(listing.unreadable)
+    if not good or len(bad) > max_bad * total:
+        _refuse(listing, bad, total, max_bad)
+    copies = {} if keep_copies else _copies(good)
+    records = tuple(r for pages in good for r in pages if r.file not in copies)
+    contract = _common(records, mixed_depths, listing.root)
+    return Intake(listing, options, contract, records, bad, tuple(sorted(copies.items())))
+
+
+def _inspect(task: tuple[Path, str, ReadOptions]) -> tuple[FrameRecord, ...] | Quarantined:
+    root, file, options = task
+    digest = ""
+    try:
+        data = _bytes(root, file)
+        digest = sha256(data)
+        return tuple(_record(f, file, k) for k, f in enumerate(decode(data, file, options)))
+    except InputError as error:
+        reason = f"{error.what}; {error.remedy}" if error.remedy else error.what
+        return Quarantined(file, reason, digest)
+
+
+def _record(frame: Frame, file: str, page: int) -> FrameRecord:
+    height, width = frame.pixels.shape
+    return FrameRecord(
+        frame.path,
+        file,
+        page,
+        frame.sha256,
+        sha256(frame.pixels.tobytes()),
+        (height, width),
+        frame.contract,
+        0.0 if frame.invalid is None else float(frame.invalid.mean()),
+        frame.notes,
+    )
+
+
+def _refuse(listing: Listing, bad: tuple[Quarantined, ...], total: int, max_bad: float) -> NoReturn:
+    lines = "".join(f"\n  {q.path}: {q.reason}" for q in bad)
+    if len(bad) == total:
+        what = "none of the pictures can be read"
+    else:
+        what = f"{len(bad)} of {total} files cannot be used, above the {max_bad:.0%} allowed"
+    raise InputError(
+        what + lines + "\n", where=str(listing.root), remedy="remove them, or raise --max-bad"
+    )
+
+
+def _copies(good: list[tuple[FrameRecord, ...]]) -> dict[str, str]:
+    """Files that equal an earlier one byte for byte: they would only count it twice."""
+    first: dict[str, str] = {}
+    copies: dict[str, str] = {}
+    for pages in good:
+        kept = first.setdefault(pages[0].sha256, pages[0].file)
+        if kept != pages[0].file:
+            copies[pages[0].file] = kept
+    return copies
+
+
+def _common(records: tuple[FrameRecord, ...], mixed_depths: bool, root: Path) -> InputContract:
+    """The contract of a folder: the one its frames share, or the deepest of several."""
+    groups: dict[InputContract, list[str]] = {}
+    for record in records:
+        groups.setdefault(record.contract, []).append(record.path)
+    if len(groups) == 1:
+        return records[0].contract
+    lines = "".join(
+        f"\n  {len(paths)} of {c.pixels}, {c.black:g} to {c.white:g}, {c.transfer}: {paths[0]}"
+        for c, paths in groups.items()
+    )
+    if len({c.transfer for c in groups}) > 1:
+        raise InputError(
+            f"some frames are linear and some sRGB-coded{lines}\n",
+            where=str(root),
+            remedy="say which with --transfer linear or --transfer srgb",
+        )
+    if not mixed_depths:
+        raise InputError(
+            f"the frames differ in depth or levels{lines}\n",
+            where=str(root),
+            remedy="split the folder, give --white, or allow it with --mixed-depths",
+        )
+    return max(groups, key=lambda c: (c.format.bits, c.white, -c.black))
+
+
+# ---------------------------------------------------------------- reading again
+
+
+def iterate(
+    intake: Intake,
+    *,
+    jobs: int = 1,
+    missed: Missed = ignore,
+    stage: str = "reading",
+    progress: Progress = silent,
+) -> Iterator[Frame]:
+    """Read the good frames again, in order, brought to the folder's contract.
+
+    Parameters
+    ----------
+    intake : Intake
+    jobs, stage, progress : as everywhere; at most ``2 * jobs`` files are in memory
+    missed : told of a file that vanished or changed since it was taken in; it is passed over
+
+    Yields
+    ------
+    Frame
+    """
+    for result in map_ordered(reread, intake.tasks, jobs=jobs, stage=stage, progress=progress):
+        if isinstance(result, Quarantined):
+            missed(result)
+        else:
+            yield from result
+
+
+def reread(task: Task) -> tuple[Frame, ...] | Quarantined:
+    """Frames of one file that was taken in, or why it can no longer serve.
+
+    A top-level function of plain data, so that it can run in another process.
+    """
+    root, file, digest, options, contract = task
+    try:
+        data = _bytes(root, file)
+        if sha256(data) != digest:
+            return Quarantined(file, "the file changed while it was in use", sha256(data))
+        return tuple(conform(frame, contract) for frame in decode(data, file, options))
+    except InputError as error:
+        return Quarantined(file, error.what)

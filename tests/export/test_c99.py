@@ -1,0 +1,466 @@
+"""The generated C against the oracle, scipy and OpenCV, and against compilers."""
+
+from __future__ import annotations
+
+import ctypes
+import os
+import re
+import subprocess
+from dataclasses import replace
+
+import cv2
+import numpy as np
+import pytest
+from scipy import ndimage
+
+from patchlab.bank import reference
+from patchlab.bank.native import NativeBank
+from patchlab.bank.plan import make_plan
+from patchlab.conventions import BORDERS
+from patchlab.errors import InputError, UsageError, VerificationError
+from patchlab.export import c99
+from patchlab.export.build import (
+    FLAGS,
+    STRICT,
+    compile_library,
+    find_compiler,
+    library_name,
+    run_selftest,
+)
+from patchlab.export.c_text import double_literal, float_literal
+from patchlab.store import LICENCE, sha256
+from patchlab.types import Thresholds
+from tests.bank.banks import given_bank, lattice_bank, picture, random_bank
+
+ONE_TO_NINE = np.arange(1.0, 10.0).reshape(3, 3)
+SANITIZE = ("-O1", "-fsanitize=address,undefined", "-fno-sanitize-recover=all")
+
+
+def case(bank, plan, name, shape, seed=1):
+    pixels = picture(shape, bank.contract.pixels, seed)
+    return name, pixels, reference.responses(bank, pixels), np.array(plan.error_bound)
+
+
+def files_of(bank, kind="auto"):
+    """The C files with a self-test: smallest size, one more, and odd sides past one chunk."""
+    plan = make_plan(bank, kind)
+    shapes = {
+        "smallest": (bank.size, bank.size),
+        "one_more": (bank.size + 1, bank.size),
+        "wide": (bank.size + 2, 131),
+    }
+    cases = [case(bank, plan, name, shape) for name, shape in shapes.items()]
+    return plan, c99.emit(bank, plan) | c99.emit_selftest(bank, plan, cases)
+
+
+def native(bank, kind="auto", flags=("-O1",)):
+    plan = make_plan(bank, kind)
+    library = compile_library(c99.emit(bank, plan), bank.name, flags=flags)
+    return plan, NativeBank(bank, plan, library, sha256(library))
+
+
+# the banks whose self-tests are compiled: every basis, pixel type, table, border and strength
+VARIANTS = {
+    "step": (lattice_bank("step", count=4, size=9, pixels="Mono12", kind="stabilised"), "auto"),
+    "energy": (
+        lattice_bank(
+            "energy", families=("gd1", "gd2"), widths=((1.2, 2.0),), count=8, size=7,
+            strength="energy", border="edge",
+        ),
+        "auto",
+    ),
+    "line": (
+        lattice_bank(
+            "line", families=("gd2",), widths=((1.2, 2.0),), count=4, size=7, strength="line",
+            pixels="float32", kind="stabilised", border="zero",
+        ),
+        "auto",
+    ),
+    "direct": (random_bank(7, 5, border="mirror"), "direct"),
+    "parts": (random_bank(3, 5, border="wrap", pixels="Mono16"), "parity"),
+    "small": (
+        given_bank(
+            [[[0.5]], [[-0.5]], [[0.0]], [[3.0]]], "small", pixels="float32", border="mirror"
+        ),
+        "parity",
+    ),
+}  # fmt: skip
+
+
+@pytest.mark.parametrize("name", VARIANTS)
+def test_compiles_clean_and_passes_its_selftest(name):
+    bank, kind = VARIANTS[name]
+    _, files = files_of(bank, kind)
+    result = run_selftest(files, bank.name, flags=(*STRICT, "-O1"))
+    assert result.passed, result.output
+    assert result.output.count("\nok ") > 15
+    assert "FAIL" not in result.output
+
+
+@pytest.mark.parametrize("name", ["step", "energy", "direct"])
+def test_sanitizers_have_nothing_to_say(name):
+    bank, kind = VARIANTS[name]
+    _, files = files_of(bank, kind)
+    for lanes in (1, 16):
+        flags = (*SANITIZE, f"-D{bank.name}_MAX_LANES={lanes}")
+        result = run_selftest(files, bank.name, flags=flags)
+        assert result.passed, result.output
+
+
+@pytest.mark.parametrize("lanes", [1, 4, 8])
+def test_every_instruction_set_stays_within_the_bound(lanes):
+    bank = replace(VARIANTS["energy"][0], name="energy")
+    _, files = files_of(bank)
+    flags = (*STRICT, "-O1", f"-D{bank.name}_MAX_LANES={lanes}")
+    result = run_selftest(files, bank.name, flags=flags)
+    assert result.passed, result.output
+
+
+def test_the_selftest_can_fail():
+    bank, _ = VARIANTS["direct"]
+    plan = make_plan(bank)
+    name, pixels, expected, tolerance = case(bank, plan, "wrong", (6, 9))
+    expected = expected.copy()
+    expected[1, 2, 3] += 3 * tolerance[1]
+    files = c99.emit(bank, plan) | c99.emit_selftest(
+        bank, plan, [(name, pixels, expected, tolerance)]
+    )
+    result = run_selftest(files, bank.name, flags=("-O1",))
+    assert result.passed is False
+    assert "FAIL wrong: responses equal the reference" in result.output
+
+
+# ---------------------------------------------------------------- numbers
+
+
+@pytest.fixture(scope="module", params=BORDERS)
+def asymmetric(request):
+    """A bank of one asymmetric kernel, compiled; kernels that cannot hide a flip."""
+    bank = given_bank([ONE_TO_NINE], "asymmetric", border=request.param)
+    return request.param, native(bank)[1]
+
+
+@pytest.mark.parametrize("at", [(0, 0), (0, 69), (6, 0), (6, 69), (3, 4), (0, 63), (6, 64)])
+def test_impulse_for_every_border(asymmetric, at):
+    border, compiled = asymmetric
+    pixels = np.zeros((7, 70), dtype=np.uint8)
+    pixels[at] = 1
+    found = compiled.responses(pixels)[0]
+    np.testing.assert_array_equal(
+        found, ndimage.correlate(pixels.astype(float), ONE_TO_NINE, mode=BORDERS[border].scipy)
+    )
+    if border != "wrap":  # OpenCV's filter2D has no wrap
+        rule = getattr(cv2, BORDERS[border].opencv)
+        np.testing.assert_array_equal(
+            found, cv2.filter2D(pixels, cv2.CV_32F, ONE_TO_NINE, borderType=rule)
+        )
+    if at == (3, 4):
+        assert found[2:5, 3:6].tolist() == [[9, 8, 7], [6, 5, 4], [3, 2, 1]]
+
+
+@pytest.fixture(scope="module")
+def compiled():
+    """A mirrored two-scale bank of Mono12 pixels."""
+    bank = lattice_bank("compiled", count=4, size=9, pixels="Mono12", kind="stabilised")
+    return bank, *native(bank)
+
+
+def test_pictures_wider_than_a_tile(compiled):
+    bank, plan, fast = compiled
+    assert c99.RING_BYTES / 4 / bank.size < 6000
+    pixels = picture((11, 6000), "Mono12")
+    error = np.abs(fast.responses(pixels) - reference.responses(bank, pixels)).max(axis=(1, 2))
+    assert (error <= plan.error_bound).all()
+
+
+def test_large_pictures_take_the_streaming_stores(compiled):
+    bank, plan, fast = compiled
+    pixels = picture((401, 803), "Mono12")
+    assert 4 * len(bank) * pixels.size > 8388608
+    error = np.abs(fast.responses(pixels) - reference.responses(bank, pixels)).max(axis=(1, 2))
+    assert (error <= plan.error_bound).all()
+
+
+def test_bands_give_the_same_bits(compiled):
+    _, _, fast = compiled
+    pixels = picture((40, 77), "Mono12")
+    whole = fast.responses(pixels)
+    strength, turn = fast.edges(pixels, 1)
+    for first, count in [(0, 1), (0, 40), (39, 1), (3, 17), (20, 20)]:
+        rows = slice(first, first + count)
+        band = fast.responses(pixels, rows=(first, count))
+        np.testing.assert_array_equal(band, whole[:, rows])
+        part, winner = fast.edges(pixels, 1, rows=(first, count))
+        np.testing.assert_array_equal(part, strength[rows])
+        np.testing.assert_array_equal(winner, turn[rows])
+
+
+def test_any_strides(compiled):
+    bank, _, fast = compiled
+    pixels = picture((30, 77), "Mono12")
+    whole = fast.responses(pixels)
+    for view in (
+        np.ascontiguousarray(pixels[::-1])[::-1],
+        np.repeat(pixels, 3, axis=0)[::3],
+        np.pad(pixels, ((2, 1), (3, 5)))[2:-1, 3:-5],
+        np.asfortranarray(pixels),
+    ):
+        np.testing.assert_array_equal(fast.responses(view), whole)
+    for store in (
+        np.empty((len(bank), 33, 81), np.float32)[:, 2:32, 3:80],
+        np.empty((len(bank), 30, 77), np.float32)[::-1],
+        np.empty((len(bank), 30, 77), np.float32)[:, ::-1],
+        np.empty((30, len(bank), 77), np.float32).transpose(1, 0, 2),
+    ):
+        assert fast.responses(pixels, out=store) is store
+        np.testing.assert_array_equal(store, whole)
+
+
+def test_nothing_is_written_beside_the_output(compiled):
+    bank, _, fast = compiled
+    around = np.full((len(bank), 34, 90), 7, dtype=np.float32)
+    fast.responses(picture((30, 77), "Mono12"), out=around[:, 2:32, 4:81])
+    around[:, 2:32, 4:81] = 7
+    assert (around == 7).all()
+
+
+@pytest.mark.parametrize(
+    ("shape", "dtype", "words"),
+    [((8, 30), np.uint16, "smaller"), ((30, 30), np.uint8, "Mono12"), ((30,), np.uint16, "plane")],
+)
+def test_pictures_that_do_not_fit_are_refused(compiled, shape, dtype, words):
+    with pytest.raises(InputError, match=words):
+        compiled[2].responses(np.zeros(shape, dtype))
+
+
+def test_a_code_beyond_the_format_is_refused(compiled):
+    pixels = picture((30, 30), "Mono12")
+    pixels[29, 29] = 4096
+    with pytest.raises(InputError, match="beyond the pixel format"):
+        compiled[2].responses(pixels)
+    with pytest.raises(InputError, match="beyond the pixel format"):
+        compiled[2].edges(pixels, 0)
+
+
+def test_wrong_scales_bands_and_outputs_are_refused(compiled):
+    bank, _, fast = compiled
+    pixels = picture((30, 30), "Mono12")
+    with pytest.raises(UsageError, match="no such scale"):
+        fast.edges(pixels, 2)
+    for rows in [(-1, 2), (29, 2), (0, 31)]:
+        with pytest.raises(UsageError, match="first_row"):
+            fast.responses(pixels, rows=rows)
+    for out in (np.empty((len(bank), 30, 30)), np.empty((len(bank), 30, 60), np.float32)[..., ::2]):
+        with pytest.raises(UsageError, match="out must be"):
+            fast.responses(pixels, out=out)
+
+
+def test_every_code_has_its_own_message(compiled):
+    bank, _, fast = compiled
+    message = getattr(fast._library, f"{bank.name}_message")
+    message.restype = ctypes.c_char_p
+    found = [message(code).decode() for code in range(len(c99.CODES))]
+    assert found == [text for _, text in c99.CODES]
+    assert len(set(found)) == len(found)
+    assert message(-1) == message(len(found)) == b"unknown code"
+
+
+# ---------------------------------------------------------------- trust
+
+
+def test_a_library_is_loaded_only_with_its_own_hash(compiled):
+    bank, plan, _ = compiled
+    with pytest.raises(VerificationError, match="changed"):
+        NativeBank(bank, plan, b"not a library", sha256(b"something else"))
+    with pytest.raises(InputError, match="does not load"):
+        NativeBank(bank, plan, b"not a library", sha256(b"not a library"))
+
+
+def test_a_library_of_another_bank_is_refused(compiled):
+    bank, plan, _ = compiled
+    library = compile_library(c99.emit(bank, plan), bank.name, flags=("-O0",))
+    taps = bank.taps.copy()
+    taps[0, 0, 0] += 1
+    other = replace(bank, taps=taps)
+    with pytest.raises(VerificationError, match="another bank"):
+        NativeBank(other, make_plan(other), library, sha256(library))
+    renamed = replace(bank, name="renamed")
+    with pytest.raises(VerificationError, match="has no renamed_"):
+        NativeBank(renamed, make_plan(renamed), library, sha256(library))
+
+
+@pytest.mark.parametrize("name", ['x"; abort(); "', "a b", "../a", "é", "1a", "", "a" * 64])
+def test_names_that_could_carry_code_are_refused(name):
+    bank = random_bank(1, 3)
+    plan = make_plan(bank)
+    with pytest.raises(UsageError, match="C identifier"):
+        c99.emit(replace(bank, name=name), plan)
+    kernel = replace(bank.kernels[0], name=name)
+    with pytest.raises(UsageError, match="C identifier"):
+        c99.emit(replace(bank, kernels=(kernel,)), plan)
+    pixels = picture((3, 3))
+    with pytest.raises(UsageError):
+        c99.emit_selftest(
+            bank, plan, [(name, pixels, reference.responses(bank, pixels), np.ones(1))]
+        )
+
+
+# ---------------------------------------------------------------- text
+
+
+def literals(source: str, array: str) -> np.ndarray:
+    body = re.search(rf"{array}\[\d+\] = {{(.*?)}};", source, re.S).group(1)
+    return np.array([np.float32(word.strip().rstrip("f")) for word in body.split(",")])
+
+
+def test_literals_read_back_bit_for_bit():
+    bank = lattice_bank(count=6, size=9, pixels="Mono12", kind="stabilised")
+    plan = make_plan(bank)
+    source = c99.emit(bank, plan)["lattice.c"].decode()
+    np.testing.assert_array_equal(literals(source, "lattice_table"), bank.table.values)
+    for number, group in enumerate(plan.detail["product_groups"]):
+        taps = np.stack([plan.detail["coefficients"][p] for p in group], axis=-1)
+        found = literals(source, f"lattice_group{number}_taps")
+        assert found.tobytes() == taps.tobytes()
+
+
+def test_literals_of_awkward_numbers():
+    bits = np.random.default_rng(0).integers(0, 2**32, 20_000, dtype=np.uint32)
+    values = bits.view(np.float32)
+    awkward = np.array([0.0, -0.0, 1e-45, 3.4028235e38, 1.0, -7.0, 0.1], dtype=np.float32)
+    for value in np.concatenate([values[np.isfinite(values)], awkward]):
+        text = float_literal(value)
+        assert re.fullmatch(r"-?\d+(\.\d+)?(e[+-]\d+)?f", text)
+        assert "." in text or "e" in text
+        assert np.float32(text[:-1]).tobytes() == value.tobytes()
+    assert float(double_literal(0.1)) == 0.1
+    for value in (np.nan, np.inf):
+        with pytest.raises(UsageError, match="finite"):
+            float_literal(value)
+
+
+def test_every_file_tells_its_licence_and_the_same_bytes_come_out():
+    bank, kind = VARIANTS["direct"]
+    plan, files = files_of(bank, kind)
+    assert files == files_of(bank, kind)[1]
+    assert set(files) == {
+        "arbitrary.h", "arbitrary.c", "arbitrary_selftest.c", "CMakeLists.txt", "arbitrary.pc",
+    }  # fmt: skip
+    for name, data in files.items():
+        words = " ".join(re.sub(r"(?m)^ ?[*#]", " ", data.decode("ascii")).split())
+        assert LICENCE in words, name
+        assert not re.search(r"@[A-Za-z0-9_]+@", data.decode()), name
+    assert "CAUTION" in files["arbitrary.h"].decode()
+    assert len(plan.error_bound) == 7
+
+
+def test_thresholds_stand_in_the_header():
+    known = Thresholds(
+        np.array([1.0, 10.0, 100.0]), np.array([5.3, 4.8, 4.3]), np.zeros(3), 0.7, 6.0, "white"
+    )
+    bank = replace(random_bank(1, 3), thresholds=known)
+    header = c99.emit(bank, make_plan(bank))["arbitrary.h"].decode()
+    assert "#define arbitrary_THRESHOLD_COUNT 3\n" in header
+    words = re.search(r"_STRENGTH_THRESHOLDS \{(.*)\}", header).group(1)
+    assert [np.float32(w.strip(" f")) for w in words.split(",")] == [
+        np.float32(v) for v in known.strength
+    ]
+    without = c99.emit(replace(bank, thresholds=None), make_plan(bank))["arbitrary.h"].decode()
+    assert "THRESHOLD" not in without
+
+
+# ---------------------------------------------------------------- programs
+
+
+def program(folder, main, banks, command, suffix):
+    """Compile a program with some banks, run it, and return what it prints."""
+    sources = []
+    for bank in banks:
+        for name, data in c99.emit(bank, make_plan(bank)).items():
+            (folder / name).write_bytes(data)
+        sources.append(f"{bank.name}.c")
+    (folder / f"main.{suffix}").write_text(main)
+    subprocess.run(
+        [*command, *STRICT, "-O1", "-o", "program", f"main.{suffix}", *sources, "-lm"],
+        cwd=folder, check=True, timeout=300,
+    )  # fmt: skip
+    done = subprocess.run(
+        [str(folder / "program")], check=True, capture_output=True, text=True, timeout=60
+    )
+    return done.stdout.split()
+
+
+TWO = """
+#include "first.h"
+#include "second.h"
+#include <stdio.h>
+static float out[2 * 9 * 9];
+static char scratch[1 << 20];
+static const float limits[] = first_STRENGTH_THRESHOLDS;
+int main(void)
+{
+    static first_pixel a[9 * 9];
+    static second_pixel b[9 * 9];
+    if (first_scratch_bytes(9, 9) > sizeof scratch) return 1;
+    a[40] = 1;
+    b[40] = 1;
+    printf("%d ", first_responses(a, 9, 9, 9, out, 36, 324, scratch));
+    printf("%g %g ", (double)out[40], (double)limits[first_THRESHOLD_COUNT - 1]);
+    printf("%d ", second_responses(b, 18, 9, 9, out, 36, 324, scratch));
+    printf("%g %s\\n", (double)out[40], second_kernel_name(1));
+    return 0;
+}
+"""
+
+
+def two_banks():
+    known = Thresholds(np.array([1.0, 10.0]), np.array([5.5, 4.5]), np.zeros(2), 0.7, 6.0, "white")
+    first = given_bank(np.arange(18.0).reshape(2, 3, 3), "first")
+    second = given_bank(np.arange(50.0).reshape(2, 5, 5), "second", pixels="Mono16")
+    return replace(first, thresholds=known), second
+
+
+def test_two_banks_link_into_one_program(tmp_path):
+    command = [*find_compiler().command, *FLAGS]
+    assert program(tmp_path, TWO, two_banks(), command, "c") == [
+        "0", "4", "4.5", "0", "12", "k1",
+    ]  # fmt: skip
+
+
+def test_the_same_program_as_cpp17(tmp_path):
+    command = [*find_compiler().command, "-x", "c++", "-std=c++17"]
+    assert program(tmp_path, TWO, two_banks(), command, "cpp") == [
+        "0", "4", "4.5", "0", "12", "k1",
+    ]  # fmt: skip
+
+
+def test_strict_cpp17_takes_folds_tables_and_edges(tmp_path):
+    bank, _ = VARIANTS["energy"]
+    line, _ = VARIANTS["line"]
+    main = """
+    #include "energy.h"
+    #include "line.h"
+    #include <cstdio>
+    int main() { std::printf("%d %d\\n", energy_scale_count(), line_kernel_count()); return 0; }
+    """
+    command = [*find_compiler().command, "-x", "c++", "-std=c++17"]
+    assert program(tmp_path, main, (bank, line), command, "cpp") == ["1", "4"]
+
+
+def test_the_library_shows_only_its_own_names(compiled, tmp_path):
+    bank, plan, _ = compiled
+    (tmp_path / library_name(bank.name)).write_bytes(
+        compile_library(c99.emit(bank, plan), bank.name, flags=("-O0",))
+    )
+    nm = subprocess.run(
+        ["nm", "-D", "--defined-only", library_name(bank.name)],
+        cwd=tmp_path, capture_output=True, text=True, check=True, env={**os.environ, "LC_ALL": "C"},
+    )  # fmt: skip
+    names = {row.split()[-1] for row in nm.stdout.splitlines()}
+    assert names == {
+        f"compiled_{word}"
+        for word in (
+            "abi", "kernel_count", "kernel_name", "scale_count", "message", "scratch_bytes",
+            "responses", "responses_rows", "edges", "edges_rows",
+        )
+    }  # fmt: skip
