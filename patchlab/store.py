@@ -52,6 +52,19 @@ def npy_bytes(array: np.ndarray[Any, Any]) -> bytes:
     return buffer.getvalue()
 
 
+def npy_array(data: bytes, where: str) -> np.ndarray[Any, Any]:
+    """The array in the bytes of a ``.npy`` file (no pickle).
+
+    Raises
+    ------
+    InputError : the bytes are no such file.
+    """
+    try:
+        return np.lib.format.read_array(io.BytesIO(data), allow_pickle=False)
+    except Exception as error:  # numpy's reader raises many kinds over a damaged header
+        raise InputError(f"is not an array ({type(error).__name__})", where=where) from None
+
+
 def environment() -> dict[str, str]:
     """Versions that numbers may depend on; no name of a person or a machine."""
     import scipy
@@ -112,7 +125,7 @@ def unpack(data: Any, read: Callable[[str], bytes]) -> Any:
     if not isinstance(data, dict):
         return data
     if set(data) == {"array"}:
-        return np.lib.format.read_array(io.BytesIO(read(data["array"])), allow_pickle=False)
+        return npy_array(read(data["array"]), data["array"])
     if set(data) == {"number"}:
         return float(data["number"])
     values = {k: unpack(v, read) for k, v in data.items() if k != "is"}

@@ -8,7 +8,6 @@ hold no pickle, and names must be C identifiers before they reach any text.
 
 from __future__ import annotations
 
-import io
 import math
 from collections.abc import Mapping
 from pathlib import Path
@@ -23,6 +22,7 @@ from patchlab.conventions import BORDERS
 from patchlab.errors import InputError, UsageError, VerificationError
 from patchlab.store import (
     canonical_json,
+    npy_array,
     npy_bytes,
     read_file,
     read_manifest,
@@ -161,6 +161,7 @@ def _thresholds_entry(known: Thresholds | None) -> dict[str, Any] | None:
             "false_edges_per_megapixel": known.rate.tolist(),
             "strength": known.strength.tolist(),
             "rice": known.rice.tolist(),
+            "groups_per_megapixel": known.groups.tolist(),
             "hysteresis": float(known.hysteresis),
             "megapixels": float(known.megapixels),
             "noise": known.noise,
@@ -281,13 +282,7 @@ def _check_id(folder: Path, head: Mapping[str, Any]) -> None:
 
 
 def _array(folder: Path, head: Mapping[str, Any], name: str) -> NDArray[Any]:
-    data = read_file(folder, head, name)
-    try:
-        return np.lib.format.read_array(io.BytesIO(data), allow_pickle=False)
-    except Exception as error:  # numpy's reader raises many kinds over a damaged header
-        raise InputError(
-            f"is not an array ({type(error).__name__})", where=str(folder / name)
-        ) from None
+    return npy_array(read_file(folder, head, name), str(folder / name))
 
 
 def _one_of(value: Any, known: Any, what: str) -> Any:
@@ -373,15 +368,17 @@ def _autocovariance(folder: Path, head: Mapping[str, Any]) -> F64:
 def _thresholds(entry: Mapping[str, Any] | None) -> Thresholds | None:
     if entry is None:
         return None
-    rate, strength, rice = (
+    rate, strength, rice, groups = (
         np.array(entry[k], dtype=np.float64)
-        for k in ("false_edges_per_megapixel", "strength", "rice")
+        for k in ("false_edges_per_megapixel", "strength", "rice", "groups_per_megapixel")
     )
     if not rate.ndim == 1 or not rate.shape == strength.shape == rice.shape:
         raise InputError("thresholds need one strength for each rate")
+    if groups.shape not in (rate.shape, (0,)):
+        raise InputError("thresholds need one count of groups for each rate, or none")
     return Thresholds(
         rate, strength, rice, float(entry["hysteresis"]), float(entry["megapixels"]),
-        str(entry["noise"]),
+        str(entry["noise"]), groups,
     )  # fmt: skip
 
 

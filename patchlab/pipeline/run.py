@@ -142,6 +142,7 @@ def learn_basis(
                 whitening,
                 atoms=s.components or whitening.rank,
                 seed=s.seed,
+                jobs=desk.jobs,
                 progress=desk.progress,
             )
         else:
@@ -189,21 +190,22 @@ def choose(
 ) -> Bank:
     """Choose the kernels and calibrate their thresholds on noise."""
     s = desk.settings
-    if s.as_learned:
-        bank = banks.bank_as_learned(dictionary, found, name, s.border, fits[1])
-    else:
-        settings = banks.BankSettings(
-            kernels=s.kernels,
-            purpose=s.purpose,  # type: ignore[arg-type]  # checked by the settings
-            lines=s.lines,
-            false_edges=s.false_edges,
-            border=s.border,
-            name=name,
-            seed=s.seed,
-        )
-        bank = banks.choose_bank(
-            dictionary, fits[0], found, settings, patch_contrast=patches.contrast
-        )
+    with desk.timed("bank"):
+        if s.as_learned:
+            bank = banks.bank_as_learned(dictionary, found, name, s.border, fits[1])
+        else:
+            settings = banks.BankSettings(
+                kernels=s.kernels,
+                purpose=s.purpose,  # type: ignore[arg-type]  # checked by the settings
+                lines=s.lines,
+                false_edges=s.false_edges,
+                border=s.border,
+                name=name,
+                seed=s.seed,
+            )
+            bank = banks.choose_bank(
+                dictionary, fits[0], found, settings, patch_contrast=patches.contrast
+            )
     known = {**bank.provenance, "blur_sigma_px": found.blur_sigma_px}
     return calibrated(replace(bank, provenance=known), desk)
 
@@ -253,17 +255,16 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
     if until == "learn":
         return tell.learned(dictionary, patches, desk)
     fits, fits_head = fit(dictionary, dictionary_head, desk)
-    with desk.timed("bank"):
-        name = bank_name(desk.out, desk.settings)
-        bank = choose(dictionary, fits, found, patches, name, desk)
-        crop = next(iter(images.iterate(intake))).pixels
+    name = bank_name(desk.out, desk.settings)
+    bank = choose(dictionary, fits, found, patches, name, desk)
+    with desk.timed("export"):
         written = write_bundle(
             desk.out / "bank",
             bank,
             desk,
             parents={"fits": fits_head["id"], "survey": survey_head["id"]},
             inputs=intake.inputs,
-            crop=crop,
+            crop=next(iter(images.iterate(intake))).pixels,
         )
     result = tell.run(intake, found, patches, dictionary, fits[0], written, desk)
     store.write_file(desk.out / "run.json", store.canonical_json(result))

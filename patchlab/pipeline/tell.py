@@ -5,7 +5,7 @@ from __future__ import annotations
 from collections import Counter
 from typing import TYPE_CHECKING, Any
 
-from patchlab.types import Dictionary, KernelFits, PatchSet, Survey
+from patchlab.types import Bank, Dictionary, KernelFits, PatchSet, Survey
 
 if TYPE_CHECKING:
     from patchlab.images import Intake
@@ -98,6 +98,14 @@ def fits(found: KernelFits) -> dict[str, Any]:
     }
 
 
+def _at_budget(made: Bank) -> float:
+    """Best coverage that a bank of this many kernels reaches on the same atoms."""
+    coverage = made.coverage
+    assert coverage is not None
+    known = dict(zip(coverage.budget.tolist(), coverage.curve.tolist(), strict=True))
+    return max(float(known.get(len(made), 0.0)), coverage.learned)
+
+
 def bank(written: Written) -> dict[str, Any]:
     """An exported bank."""
     made = written.bank
@@ -110,6 +118,7 @@ def bank(written: Written) -> dict[str, Any]:
         "size": made.size,
         "pixels": made.contract.pixels,
         "coverage": _rounded(coverage.learned) if coverage else None,
+        "coverage_best": _rounded(_at_budget(made)) if coverage else None,
         "coverage_rotated": _rounded(coverage.rotated) if coverage else None,
         "coverage_untrained": _rounded(coverage.untrained) if coverage else None,
         "multiplies_per_pixel": written.plan.multiplies,

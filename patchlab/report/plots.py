@@ -146,12 +146,12 @@ def convergence(dictionary: Dictionary) -> bytes:
 
     def draw(axes: Axes) -> None:
         curve = np.asarray(dictionary.curve, dtype=np.float64)
-        axes.semilogy(np.arange(1, curve.size + 1), np.maximum(curve, 1e-16), color=TEAL)
-        axes.axhline(dictionary.tolerance, color=AMBER, ls="--", lw=1)
+        left = np.maximum(curve - curve.min(), 0)[:-1]
+        axes.semilogy(np.arange(1, left.size + 1), np.maximum(left, 1e-12), color=TEAL)
         state = "converged" if dictionary.converged else "NOT converged"
         axes.set(
-            xlabel="iteration",
-            ylabel="size of the gradient",
+            xlabel="iteration of the last stage",
+            ylabel="objective above its end",
             title=f"Learning: {state} after {dictionary.iterations} iterations",
         )
 
