@@ -135,7 +135,8 @@ def _say_run(result: dict[str, Any]) -> None:
     }
     if bank["coverage"] is not None:
         lines["coverage"] = (
-            f"{bank['coverage']:.2f} of the atoms; the best of its size {bank['coverage_best']:.2f}, "
+            f"{bank['coverage']:.2f} of the atoms; "
+            f"the best of its size {bank['coverage_best']:.2f}, "
             f"the best on a rotated basis {bank['coverage_rotated']:.2f}"
         )
     _rows(lines)

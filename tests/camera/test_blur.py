@@ -54,7 +54,7 @@ def test_blur_of_photographs_grows_as_it_must(bench):
     lights = [binned(x, 3) for x in bench.photos()]
     widths = []
     for sigma in (0.5, 0.8, 1.2):
-        frames = bench.folder(lights, contract, 0.2, 1.0, blur=sigma)
+        frames = bench.folder(lights, contract, 0.5, 1.0, blur=sigma)
         widths.append(measure_blur(frames, measure_noise(frames))[0])
     for sigma, width in zip((0.8, 1.2), widths[1:], strict=True):
         added = np.sqrt(width**2 - widths[0] ** 2 + 0.5**2)
