@@ -22,6 +22,7 @@ from patchlab.types import (
     Frame,
     KernelFits,
     PatchSet,
+    Quarantined,
     Survey,
     TableKind,
 )
@@ -70,17 +71,19 @@ def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
         frames = functools.partial(images.iterate, intake)
         return camera.survey(frames, intake.contract, kind=kind, progress=desk.progress)
 
-    def example(_: Survey) -> dict[str, bytes]:
-        return {"example.npy": store.npy_bytes(_example(intake).pixels)}
-
-    about["body"]["example"] = _example(intake).path
-    return desk.stage("survey", about, make, example)
+    example = _example(intake)
+    about["body"]["example"] = example.path
+    kept = {"example.npy": store.npy_bytes(example.pixels)}
+    return desk.stage("survey", about, make, lambda _: kept)
 
 
 def _example(intake: images.Intake) -> Frame:
     """The frame in the middle of the folder, its middle where it is large: for the page."""
-    middle = intake.frames[len(intake.frames) // 2].path
-    frame = next(f for f in images.iterate(intake) if f.path == middle)
+    middle = intake.frames[len(intake.frames) // 2]
+    pages = images.reread(next(task for task in intake.tasks if task[1] == middle.file))
+    if isinstance(pages, Quarantined):
+        raise InputError(pages.reason, where=pages.path)
+    frame = pages[middle.page]
     top, left = (
         max(0, (n - limit) // 2) for n, limit in zip(frame.pixels.shape, EXAMPLE, strict=True)
     )
