@@ -88,7 +88,9 @@ def learn_ica(
     Sources: Ablin, Cardoso & Gramfort 2018, IEEE Trans. Signal Process. 66:4040 and ICASSP
     2018; the choice of densities, Lee, Girolami & Sejnowski 1999, Neural Comput. 11:417.
     """
-    _check_options(patch_set, whitening, restarts, tolerance, max_iterations, density, jobs)
+    if whitening.mean.size != patch_set.size**2:
+        raise UsageError("the whitening belongs to another patch size", where="whitening")
+    _check_options(restarts, tolerance, max_iterations, density, jobs)
     used = leading(whitening, components)
     with one_thread(), threads(jobs) as mapper:
         learner = _Learner(
@@ -109,17 +111,53 @@ def learn_ica(
         return _result(learner, runs, tolerance)
 
 
-def _check_options(
-    patch_set: PatchSet,
+def unmix(
+    rows: Rows,
     whitening: Whitening,
-    restarts: int,
-    tolerance: float,
-    limit: int,
-    density: str,
-    jobs: int,
-) -> None:
-    if whitening.mean.size != patch_set.size**2:
-        raise UsageError("the whitening belongs to another patch size", where="whitening")
+    *,
+    seed: int = 0,
+    orthogonal: bool = True,
+    restarts: int = 1,
+    tolerance: float = 1e-6,
+    max_iterations: int = 1000,
+    density: Literal["tanh", "adaptive"] = "tanh",
+    jobs: int = 1,
+) -> Run:
+    """The best restart of :func:`learn_ica` over bare rows, none of them held out.
+
+    Parameters
+    ----------
+    rows : of the whitening's length, not necessarily patches
+    whitening : pca form
+    seed, orthogonal, restarts, tolerance, max_iterations, density, jobs : as there
+
+    Raises
+    ------
+    UsageError : a parameter out of its range.
+    """
+    _check_options(restarts, tolerance, max_iterations, density, jobs)
+    order = rng(seed, "rows").permutation(len(rows)).astype(np.int64)
+    with one_thread(), threads(jobs) as mapper:
+        learner = _Learner(
+            rows,
+            whitening,
+            order,
+            order[:0],
+            seed=seed,
+            orthogonal=orthogonal,
+            adaptive=density == "adaptive",
+            restarts=restarts,
+            tolerance=tolerance * whitening.rank,
+            limit=max_iterations,
+            mapper=mapper,
+            progress=silent,
+            checkpoint=lambda where: None,
+        )
+        runs = learner.run(None)
+    return runs[_best(runs)]
+
+
+def _check_options(restarts: int, tolerance: float, limit: int, density: str, jobs: int) -> None:
     if restarts < 1 or limit < 1 or jobs < 1:
         raise UsageError("restarts, max_iterations and jobs are at least 1")
     if not tolerance > 0:
@@ -255,10 +293,12 @@ class _Learner:
 
 def _result(learner: _Learner, runs: tuple[Run, ...], tolerance: float) -> Dictionary:
     """The best restart as a Dictionary, with what can be said about its certainty."""
-    best = min(range(len(runs)), key=lambda i: (runs[i].curve[-1], i))
+    best = _best(runs)
     run = runs[best]
-    filters, atoms, order = _components(run.W, learner.whitening)
-    others = tuple(_components(r.W, learner.whitening)[1] for i, r in enumerate(runs) if i != best)
+    filters, atoms, order = components_of(run.W, learner.whitening)
+    others = tuple(
+        components_of(r.W, learner.whitening)[1] for i, r in enumerate(runs) if i != best
+    )
     whole = Likelihood(learner.rows, run.signs, learner.mapper)
     held = Likelihood(learner.rows.whitened(np.sort(learner.held)), run.signs, learner.mapper)
     seen = identified(whole, held, run.W)
@@ -281,7 +321,11 @@ def _result(learner: _Learner, runs: tuple[Run, ...], tolerance: float) -> Dicti
     )
 
 
-def _components(W: F64, whitening: Whitening) -> tuple[F64, F64, NDArray[np.int64]]:
+def _best(runs: tuple[Run, ...]) -> int:
+    return min(range(len(runs)), key=lambda i: (runs[i].curve[-1], i))
+
+
+def components_of(W: F64, whitening: Whitening) -> tuple[F64, F64, NDArray[np.int64]]:
     """Canonical filters and atoms (k, d) of an unmixing W of whitened patches."""
     unit = W / np.linalg.norm(W, axis=1, keepdims=True)
     atoms = (whitening.D @ np.linalg.inv(unit)).T

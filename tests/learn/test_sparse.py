@@ -9,7 +9,7 @@ from sklearn.linear_model import Lasso
 
 from patchlab.errors import InputError, UsageError
 from patchlab.learn import encode, lasso, learn_ica, learn_pca, learn_sparse, match, whiten
-from patchlab.learn.sparse import SparseState, _Learner, objective
+from patchlab.learn.sparse import Learner, SparseState, objective
 from patchlab.learn.trust import split
 
 
@@ -174,7 +174,7 @@ def test_encode_works_over_independent_components(photos, whitened):
 
 
 def test_dead_atoms_are_revived_from_the_worst_coded_patches(photos, whitened):
-    learner = _Learner(photos, whitened, 40, 6.0, 0, 1e-3, map)
+    learner = Learner(photos.patches, whitened, 40, 6.0, 0, 1e-3, map)
     start = learner.start()
     once = learner.turn(start)  # under this penalty some atoms find no use
     assert once.revived > 0
