@@ -31,7 +31,7 @@ from patchlab.types import F64, Whitening
 Array = NDArray[Any]
 
 
-class _Rows(ClassNamePrefixFeaturesOutMixin, TransformerMixin, BaseEstimator):
+class _Rows(ClassNamePrefixFeaturesOutMixin, TransformerMixin, BaseEstimator):  # type: ignore[misc]
     """What the three share: checked rows, their whitening, names and tags."""
 
     n_components: int | None
