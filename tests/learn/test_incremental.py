@@ -46,7 +46,7 @@ def test_a_course_ends_near_the_optimum_and_on_the_manifold(white, start):
     W = course(objective, start)
     best = Solver(objective, Orthogonal(), 1e-9, 500).run(State(W))
     assert best.outcome == "converged"
-    assert objective(start).value - best.curve[-1] > 1.0
+    assert objective(start).value - best.curve[-1] > 0.5
     # what batches of 2048 leave: parameters over twice the batch, times half the last step
     assert objective(W).value - best.curve[-1] < 12 * 13 / 2 / 4096
     unit = W / np.linalg.norm(W, axis=1, keepdims=True)
