@@ -83,6 +83,9 @@ class Settings:
     restarts: int = _setting(
         3, "learn", "Independent starts whose atoms are pooled.", low=1, high=50
     )
+    resamples: int = _setting(
+        2, "learn", "Halves of the patches that tell how sure components are.", low=0, high=32
+    )
     max_iterations: int = _setting(400, "learn", "Iterations of one start.", low=1)
     # the bank
     kernels: int = _setting(16, "bank", "Kernels in the bank.", low=4, high=64)

@@ -334,6 +334,9 @@ class Dictionary:
     whitening : Whitening it was learned through
     pooled_atoms : ndarray (m, size, size), unit norm, atoms of every restart (this one's first)
     warnings : sentences for people
+    over_restarts, over_resamples : ndarray (k,), mean |cos| with the partner that a component
+        has in the other restarts, and in itself learned anew on halves of the patches; empty
+        or NaN where that was not measured
     """
 
     method: Literal["ica", "sparse", "pca"]
@@ -350,6 +353,8 @@ class Dictionary:
     whitening: Whitening
     pooled_atoms: F64
     warnings: tuple[str, ...] = ()
+    over_restarts: F64 = field(default_factory=lambda: np.empty(0))
+    over_resamples: F64 = field(default_factory=lambda: np.empty(0))
 
     def __post_init__(self) -> None:
         k = self.atoms.shape[0]

@@ -7,9 +7,10 @@
 from patchlab.learn.checkpoint import Checkpoint
 from patchlab.learn.coding import lasso
 from patchlab.learn.ica import learn_ica
-from patchlab.learn.order import amari_index, match, stability
+from patchlab.learn.order import amari_index, match
 from patchlab.learn.pca import learn_pca
 from patchlab.learn.sparse import SparseState, encode, learn_sparse
+from patchlab.learn.sure import shape_numbers, shape_spread
 from patchlab.learn.whiten import Moments, moments, noise_covariance, whiten, whitening
 
 __all__ = [
@@ -25,7 +26,8 @@ __all__ = [
     "match",
     "moments",
     "noise_covariance",
-    "stability",
+    "shape_numbers",
+    "shape_spread",
     "whiten",
     "whitening",
 ]

@@ -23,6 +23,7 @@ from patchlab.learn.incremental import STEPS, course
 from patchlab.learn.likelihood import Likelihood, Mapper, Rows
 from patchlab.learn.order import canonical, dictionary
 from patchlab.learn.solver import Free, Orthogonal, Solver, State
+from patchlab.learn.sure import found_again, relearned
 from patchlab.learn.trust import identified, kurtosis, split, warnings_for
 from patchlab.learn.whiten import leading, one_thread, threads
 from patchlab.progress import Progress, silent
@@ -51,6 +52,7 @@ def learn_ica(
     tolerance: float = 1e-6,
     max_iterations: int = 1000,
     density: Literal["tanh", "adaptive"] = "tanh",
+    resamples: int = 0,
     jobs: int = 1,
     progress: Progress = silent,
     checkpoint: Callable[[Checkpoint], None] | None = None,
@@ -79,6 +81,8 @@ def learn_ica(
     max_iterations : accepted steps of one restart over all patches; the course of batches that
         comes before them is not counted
     density : "tanh" (heavy tails) or "adaptive" (heavy or light, chosen per component)
+    resamples : halves of the patches on which the best restart is learned anew, from where it
+        stands, to measure how sure its components are
     jobs : threads
     progress : told stage "learn" in restarts done
     checkpoint : told where the learner stands every twenty steps and between stages
@@ -94,6 +98,8 @@ def learn_ica(
     if whitening.mean.size != patch_set.size**2:
         raise UsageError("the whitening belongs to another patch size", where="whitening")
     _check_options(restarts, tolerance, max_iterations, density, jobs)
+    if resamples < 0:
+        raise UsageError("resamples is at least 0", where="resamples")
     used = leading(whitening, components)
     with one_thread(), threads(jobs) as mapper:
         learner = _Learner(
@@ -111,7 +117,7 @@ def learn_ica(
             checkpoint=checkpoint or (lambda where: None),
         )
         runs = learner.run(resume)
-        return _result(learner, runs, tolerance)
+        return _result(learner, runs, tolerance, resamples)
 
 
 def unmix(
@@ -211,6 +217,7 @@ class _Learner:
             whole = self.rows.whitened(self.train)
             return [whole, whole] if n >= FEWEST else [whole]
         head = self.train[: max(room, FEWEST)]
+        # sorted, for the disk: even and odd places are still fair halves
         whole = replace(self.rows, index=np.sort(self.train))
         return [self.rows.whitened(head), whole] if n >= FEWEST else [whole]
 
@@ -302,6 +309,19 @@ class _Learner:
             return None
         return replace(where, stage=where.stage + 1, round=0, spent=spent, state=State(state.W))
 
+    def relearned(self, run: Run, count: int) -> list[F64]:
+        """A restart's W, learned anew on halves of the patches."""
+        return relearned(
+            self.stages[-1],
+            run.W,
+            run.signs,
+            Orthogonal() if self.orthogonal else Free(),
+            count=count,
+            tolerance=self.tolerance,
+            limit=self.limit,
+            mapper=self.mapper,
+        )
+
     def _signs(self, rows: Rows, W: F64) -> F64:
         """+1 where ``E[sech^2 y] E[y^2] > E[y tanh y]`` at unit variance, -1 elsewhere."""
         unit = W / np.linalg.norm(W, axis=1, keepdims=True)
@@ -321,7 +341,9 @@ class _Learner:
         )
 
 
-def _result(learner: _Learner, runs: tuple[Run, ...], tolerance: float) -> Dictionary:
+def _result(
+    learner: _Learner, runs: tuple[Run, ...], tolerance: float, resamples: int
+) -> Dictionary:
     """The best restart as a Dictionary, with what can be said about its certainty."""
     best = _best(runs)
     run = runs[best]
@@ -333,7 +355,7 @@ def _result(learner: _Learner, runs: tuple[Run, ...], tolerance: float) -> Dicti
     held = Likelihood(learner.rows.whitened(np.sort(learner.held)), run.signs, learner.mapper)
     seen = identified(whole, held, run.W)
     unit = run.W / np.linalg.norm(run.W, axis=1, keepdims=True)
-    return dictionary(
+    found = dictionary(
         "ica",
         learner.whitening,
         filters,
@@ -348,6 +370,14 @@ def _result(learner: _Learner, runs: tuple[Run, ...], tolerance: float) -> Dicti
         log_likelihood=-held(run.W).value,
         pooled=others,
         warnings=warnings_for(runs, best, seen, kurtosis(held.rows, unit)),
+    )
+    k = len(found)
+    sets = list(found.pooled_atoms.reshape(-1, k, found.size, found.size))
+    anew = [components_of(W, learner.whitening)[1] for W in learner.relearned(run, resamples)]
+    return replace(
+        found,
+        over_restarts=found_again(found.atoms, sets[1:]),
+        over_resamples=found_again(found.atoms, [a.reshape(found.atoms.shape) for a in anew]),
     )
 
 

@@ -163,6 +163,7 @@ def learn_basis(
                 seed=s.seed,
                 orthogonal=s.orthogonal,
                 restarts=s.restarts,
+                resamples=s.resamples,
                 max_iterations=s.max_iterations,
                 jobs=desk.jobs,
                 progress=desk.progress,
