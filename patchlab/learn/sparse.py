@@ -11,6 +11,7 @@ sparse coding, J. Mach. Learn. Res. 11:19.
 
 from __future__ import annotations
 
+import math
 from collections.abc import Callable, Mapping
 from dataclasses import dataclass, fields, replace
 from typing import Any
@@ -31,6 +32,8 @@ from patchlab.types import F32, F64, Dictionary, PatchSet, Whitening
 PENALTY = 1.2
 """Default penalty: Mairal et al. 2010 take 1.2 / sqrt(m) for patches of unit norm, and m
 whitened directions have norm sqrt(m)."""
+LEAST_PENALTY, LARGEST_PENALTY = 0.3, 3.0
+"""Bounds of a penalty that is chosen from the noise."""
 STAGES = ((8192, 512, 3e-2), (32768, 1024, 1e-2))
 """Early stages: patches, batch, and the relative gain of a pass that ends them."""
 BATCH = 2048
@@ -98,6 +101,31 @@ def learn_sparse(
             if checkpoint is not None:
                 checkpoint(state)
         return learner.result(state, tolerance)
+
+
+def penalty_from_noise(whitening: Whitening, noise: F64, atoms: int) -> float:
+    """The penalty at which noise alone would hardly use an atom.
+
+    ``sd * sqrt(2 log atoms)`` (Chen, Donoho & Saunders 1998, SIAM J. Sci. Comput. 20:33) with
+    sd the root of the noise's mean variance over the whitened directions; kept within
+    ``LEAST_PENALTY`` and ``LARGEST_PENALTY``, since almost no noise would let every atom in.
+
+    Parameters
+    ----------
+    whitening : Whitening
+    noise : ndarray (d, d), covariance (:func:`patchlab.learn.noise_covariance`)
+    atoms : how many there will be
+
+    Examples
+    --------
+    >>> from patchlab.learn import Moments, whitening
+    >>> w = whitening(Moments(100, np.zeros(3), np.diag([1.0, 2.0, 3.0])))
+    >>> round(penalty_from_noise(w, 0.5 * np.eye(3), 8), 2)
+    1.07
+    """
+    inside = np.einsum("ij,jk,ik->", whitening.K, noise, whitening.K) / whitening.rank
+    asked = math.sqrt(max(float(inside), 0.0) * 2 * math.log(max(atoms, 2)))
+    return min(max(asked, LEAST_PENALTY), LARGEST_PENALTY)
 
 
 def encode(

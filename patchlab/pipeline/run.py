@@ -141,14 +141,27 @@ def learn_basis(
             coloured = found.noise.autocovariance
             noise = learn.noise_covariance(patches, found.table.noise_sd, coloured)
         whitening = learn.whiten(patches, retain=s.retain, noise=noise)
+        choice, components = None, None if s.components == "auto" else s.components
+        if s.components == "auto" and not sparse:
+            choice = learn.choose_components(
+                patches, whitening, seed=s.seed, jobs=desk.jobs, progress=desk.progress
+            )
+            components = choice.chosen
+            desk.tell(f"  {choice.reason}")
+        assert not isinstance(components, str)  # the settings allow no other word
         left = keeper.find(rebuild) if desk.resume else None
         if left is not None:
             desk.tell("  dictionary: goes on where learning was left")
         if sparse:
+            atoms, penalty = components or whitening.rank, s.penalty
+            if penalty is None and noise is not None:
+                penalty = learn.penalty_from_noise(whitening, noise, atoms)
+                desk.tell(f"  penalty {penalty:.3g}, from the noise")
             learned = learn.learn_sparse(
                 patches,
                 whitening,
-                atoms=s.components or whitening.rank,
+                atoms=atoms,
+                penalty=penalty,
                 seed=s.seed,
                 jobs=desk.jobs,
                 progress=desk.progress,
@@ -159,7 +172,7 @@ def learn_basis(
             learned = learn.learn_ica(
                 patches,
                 whitening,
-                components=s.components,
+                components=components,
                 seed=s.seed,
                 orthogonal=s.orthogonal,
                 restarts=s.restarts,
@@ -170,7 +183,7 @@ def learn_basis(
                 checkpoint=keeper.keep,
                 resume=left,
             )
-        return learned, learn.learn_pca(patches, whitening)
+        return replace(learned, choice=choice), learn.learn_pca(patches, whitening)
 
     (learned, baseline), head = desk.stage("dictionary", about, make)
     keeper.drop()

@@ -86,6 +86,7 @@ def learned(dictionary: Dictionary, patches: PatchSet, desk: Desk) -> dict[str, 
         "identified": int(dictionary.identified.sum()),
         "log_likelihood": _rounded(dictionary.log_likelihood, 8),
         "sure": sure(dictionary),
+        "choice": choice(dictionary),
         "warnings": list(dictionary.warnings),
         "seconds": dict(desk.seconds),
     }
@@ -107,6 +108,21 @@ def sure(dictionary: Dictionary) -> dict[str, Any]:
             name: {k: _rounded(v) for k, v in s.items()}
             for name, s in learn.shape_spread(dictionary).items()
         },
+    }
+
+
+def choice(dictionary: Dictionary) -> dict[str, Any] | None:
+    """How the number of components was chosen from the data, where it was."""
+    made = dictionary.choice
+    if made is None:
+        return None
+    return {
+        "chosen": made.chosen,
+        "reason": made.reason,
+        "counts": made.counts.tolist(),
+        "gain_nats_per_pixel": [_rounded(v) for v in made.gain],
+        "standard_error": [_rounded(v) for v in made.error],
+        "found_again_median_cos": [_rounded(v) for v in made.found_again],
     }
 
 

@@ -59,6 +59,9 @@ def _pictures(c: use.RunContent) -> Mapping[str, Callable[[], bytes]]:
     }
     if sure.measured(c.dictionary):
         makers["sure"] = lambda: sure.how_sure(c.dictionary)
+    choice = c.dictionary.choice
+    if choice is not None:
+        makers["choice"] = lambda: sure.component_choice(choice)
     if c.survey.noise.measurable:
         makers["noise"] = lambda: plots.noise_curve(c.survey)
         makers["autocovariance"] = lambda: plots.autocovariance(c.survey)

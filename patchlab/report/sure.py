@@ -7,7 +7,7 @@ from matplotlib.figure import Figure
 
 from patchlab.learn import shape_numbers, shape_spread
 from patchlab.report.plots import AMBER, SLATE, TEAL, _figure
-from patchlab.types import Dictionary
+from patchlab.types import ComponentChoice, Dictionary
 
 
 def measured(known: Dictionary) -> bool:
@@ -44,6 +44,28 @@ def how_sure(known: Dictionary) -> bytes:
         )
 
     return _figure(draw, 8.4, 3.1)
+
+
+def component_choice(choice: ComponentChoice) -> bytes:
+    """The curve by which the number of components was chosen."""
+
+    def draw(figure: Figure) -> None:
+        left, right = figure.subplots(1, 2)
+        left.errorbar(choice.counts, choice.gain, choice.error, color=TEAL, marker=".", capsize=2)
+        left.set(
+            xlabel="components", ylabel="nats per pixel", title="Held-out gain over normal values"
+        )
+        right.plot(choice.counts, choice.found_again, ".-", color=SLATE)
+        right.set(
+            xlabel="components",
+            ylabel="median |cos|",
+            title="Learned anew on halves",
+            ylim=(0, 1.02),
+        )
+        for axes in (left, right):
+            axes.axvline(choice.chosen, color=AMBER, ls="--", lw=1)
+
+    return _figure(draw, 8.4, 2.9)
 
 
 def in_words(known: Dictionary) -> str:
