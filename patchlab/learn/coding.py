@@ -56,7 +56,7 @@ def _descend(
     for i in range(n):
         q, a = correlation[i], codes[i]
         own[:] = zero
-        best, step = 0, zero
+        best, step = low & high, zero
         for _ in range(20 * k):
             row = gram[best]
             for j in range(k):

@@ -56,15 +56,13 @@ VARIANTS: dict[str, dict[str, Any]] = {
     "retain 0.995": {"retain": 0.995},
 }
 AGAINST_NOISE: dict[str, dict[str, Any]] = {
+    "contrast 2 sd, share 0.5": {},
     "neither rule": {"multiple": 0.0, "share": np.inf},
-    "contrast 2 sd only": {"share": np.inf},
     "share 0.5 only": {"multiple": 0.0},
-    "contrast 2 sd, share 0.5 (default)": {},
-    "contrast 1.5 sd": {"multiple": 1.5},
-    "contrast 3 sd": {"multiple": 3.0},
-    "contrast 4 sd": {"multiple": 4.0},
-    "share 0.3": {"share": 0.3},
-    "share 0.7": {"share": 0.7},
+    "contrast 1.5 sd only": {"multiple": 1.5, "share": np.inf},
+    "contrast 1.5 sd, share 0.5": {"multiple": 1.5},
+    "contrast 1.5 sd, share 0.3": {"multiple": 1.5, "share": 0.3},
+    "contrast 3 sd, share 0.5": {"multiple": 3.0},
 }
 
 
