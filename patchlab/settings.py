@@ -24,8 +24,10 @@ def _setting(
     low: float | None = None,
     high: float | None = None,
     choices: tuple[str, ...] = (),
+    words: tuple[str, ...] = (),
 ) -> Any:
     about = {"group": group, "help": help, "low": low, "high": high, "choices": choices}
+    about["words"] = words  # what may stand in place of a number
     return field(default=default, metadata=about)
 
 
@@ -73,15 +75,29 @@ class Settings:
     method: str = _setting(
         "ica", "learn", "Learner: independent components or sparse code.", choices=("ica", "sparse")
     )
-    components: int | None = _setting(
-        None, "learn", "Components; by default all that the whitening keeps.", low=2
+    components: int | str | None = _setting(
+        None,
+        "learn",
+        "Components, or auto to choose from the data; by default all that whitening keeps.",
+        low=2,
+        words=("auto",),
     )
     retain: float = _setting(
         0.98, "learn", "Share of the variance that whitening keeps.", low=0.5, high=1.0
     )
+    penalty: float | None = _setting(
+        None,
+        "learn",
+        "Penalty of the sparse code, in whitened units; by default from the noise, else 1.2.",
+        low=0.01,
+        high=100.0,
+    )
     orthogonal: bool = _setting(True, "learn", "Keep components uncorrelated while learning.")
     restarts: int = _setting(
         3, "learn", "Independent starts whose atoms are pooled.", low=1, high=50
+    )
+    resamples: int = _setting(
+        2, "learn", "Halves of the patches that tell how sure components are.", low=0, high=32
     )
     max_iterations: int = _setting(400, "learn", "Iterations of one start.", low=1)
     # the bank
@@ -129,7 +145,9 @@ def _validate(f: dataclasses.Field[Any], value: Any) -> None:
     about, name = f.metadata, option_name(f.name)
     if value is None and f.default is None:
         return
-    expected = str(f.type).replace(" | None", "")
+    if about["words"] and value in about["words"]:
+        return
+    expected = str(f.type).replace(" | None", "").replace("int | str", "int")
     kinds: dict[str, tuple[type, ...]] = {"int": (int,), "float": (int, float), "str": (str,)}
     fits = kinds.get(expected, (bool,))
     if not isinstance(value, fits) or (isinstance(value, bool) and expected != "bool"):

@@ -315,6 +315,28 @@ class Whitening:
 
 
 @dataclass(frozen=True, eq=False)
+class ComponentChoice:
+    """How the number of components was chosen from the data.
+
+    Parameters
+    ----------
+    counts : int64 ndarray (m,), numbers that were tried, rising
+    gain : ndarray (m,), held-out likelihood above that of normal values, nats per pixel
+    error : ndarray (m,), standard error of each gap to the best
+    found_again : ndarray (m,), median |cos| of components learned anew on halves
+    chosen : the number
+    reason : a sentence
+    """
+
+    counts: NDArray[np.int64]
+    gain: F64
+    error: F64
+    found_again: F64
+    chosen: int
+    reason: str
+
+
+@dataclass(frozen=True, eq=False)
 class Dictionary:
     """Learned components in canonical order, sign and scale.
 
@@ -334,6 +356,10 @@ class Dictionary:
     whitening : Whitening it was learned through
     pooled_atoms : ndarray (m, size, size), unit norm, atoms of every restart (this one's first)
     warnings : sentences for people
+    over_restarts, over_resamples : ndarray (k,), mean |cos| with the partner that a component
+        has in the other restarts, and in itself learned anew on halves of the patches; empty
+        or NaN where that was not measured
+    choice : how the number of components was chosen, where it was left to the data
     """
 
     method: Literal["ica", "sparse", "pca"]
@@ -350,6 +376,9 @@ class Dictionary:
     whitening: Whitening
     pooled_atoms: F64
     warnings: tuple[str, ...] = ()
+    over_restarts: F64 = field(default_factory=lambda: np.empty(0))
+    over_resamples: F64 = field(default_factory=lambda: np.empty(0))
+    choice: ComponentChoice | None = None
 
     def __post_init__(self) -> None:
         k = self.atoms.shape[0]

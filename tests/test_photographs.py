@@ -12,6 +12,7 @@ from sklearn.datasets import load_sample_images
 
 from patchlab import bank as banks
 from patchlab import camera, learn, shapes
+from patchlab.bank.coverage import coverage_of
 from patchlab.conventions import REC709, srgb_decode
 from patchlab.images.sample import SampleSettings, sample
 from patchlab.types import Frame, InputContract, NoiseModel, Survey
@@ -159,3 +160,30 @@ def test_photographs_turned_by_90_degrees_give_the_bank_turned(photographs, feat
 def test_the_bank_is_stable_over_seeds(photographs, feature_bank):
     again = chosen(photographs, "features", seed=5)
     assert banks.compare_banks(feature_bank, again).min() >= 0.95
+
+
+def groups(bank):
+    """Taps of the kernels that share a size and a direction."""
+    found = {}
+    for kernel, taps in zip(bank.kernels, bank.taps, strict=True):
+        found.setdefault((kernel.scale, kernel.orientation), []).append(taps)
+    return [np.stack(g) for g in found.values()]
+
+
+def test_halves_of_the_folder_give_the_same_bank(photographs):
+    """Sure where single components are not, and as good on the other half's atoms."""
+    order = np.random.default_rng(0).permutation(len(photographs))
+    made = []
+    for seed, half in enumerate((order[:4], order[4:])):
+        _, dictionary, fits = learned([photographs[i] for i in half], 12, 20_000, seed)
+        settings = banks.BankSettings(kernels=16, purpose="features", name="b")
+        made.append((banks.choose_bank(dictionary, fits, survey_of(), settings), dictionary.atoms))
+    (one, atoms), (two, others) = made
+    assert np.mean(banks.compare_banks(one, two) >= 0.95) >= 0.95
+    for own, other, known in ((one, two, atoms), (two, one, others)):
+        loss = coverage_of(groups(own), known).mean() - coverage_of(groups(other), known).mean()
+        assert loss <= 0.01
+    k = min(len(atoms), len(others))
+    cosine = np.abs(learn.match(*sorted((atoms, others), key=len))[1])
+    assert k > 40
+    assert np.mean(cosine > 0.9) < 0.5

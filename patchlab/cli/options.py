@@ -15,7 +15,22 @@ from patchlab.settings import Settings, from_toml, option_name, to_toml
 Command = Callable[..., Any]
 
 
+class _NumberOrWord(click.ParamType):  # type: ignore[type-arg]
+    """A whole number, or one of some words; what is neither is left to the settings."""
+
+    name = "number"
+
+    def convert(self, value: Any, param: Any, ctx: Any) -> Any:
+        """The number, or the text as it stands."""
+        try:
+            return int(value)
+        except ValueError:
+            return value
+
+
 def _click_type(f: dataclasses.Field[Any]) -> Any:
+    if f.metadata["words"]:
+        return _NumberOrWord()
     if f.metadata["choices"]:
         return click.Choice(list(f.metadata["choices"]))
     return {"int": int, "float": float}.get(str(f.type).replace(" | None", ""), str)

@@ -6,10 +6,12 @@
 
 from patchlab.learn.checkpoint import Checkpoint
 from patchlab.learn.coding import lasso
+from patchlab.learn.components import choose_components
 from patchlab.learn.ica import learn_ica
-from patchlab.learn.order import amari_index, match, stability
+from patchlab.learn.order import amari_index, match
 from patchlab.learn.pca import learn_pca
-from patchlab.learn.sparse import SparseState, encode, learn_sparse
+from patchlab.learn.sparse import SparseState, encode, learn_sparse, penalty_from_noise
+from patchlab.learn.sure import shape_numbers, shape_spread
 from patchlab.learn.whiten import Moments, moments, noise_covariance, whiten, whitening
 
 __all__ = [
@@ -17,6 +19,7 @@ __all__ = [
     "Moments",
     "SparseState",
     "amari_index",
+    "choose_components",
     "encode",
     "lasso",
     "learn_ica",
@@ -25,7 +28,9 @@ __all__ = [
     "match",
     "moments",
     "noise_covariance",
-    "stability",
+    "penalty_from_noise",
+    "shape_numbers",
+    "shape_spread",
     "whiten",
     "whitening",
 ]

@@ -28,47 +28,61 @@ def _descend(
     tolerance: np.floating[Any],
     codes: NDArray[Any],
     settled: NDArray[np.bool_],
+    move: NDArray[Any],
+    bits: NDArray[Any],
+    low: np.integer[Any],
 ) -> None:
     """Code each row; ``correlation`` holds B'z and ends as the correlation of the residual.
 
     gram : (K, K); correlation, codes : (n, K), codes start at zero; all of one float type.
     A row is settled when no coordinate would move its residual correlation by more than
     ``tolerance``; after 20 K steps it is left as it stands.
+
+    move : (K,) scratch; ``bits`` is the same memory as whole numbers. Floats that are not
+    negative are ordered as their bits are, so with the index in the ``low`` bits one maximum
+    of whole numbers, which the compiler can vectorise, finds the largest move and its place
+    (of moves that differ in those last bits alone, any).
     """
     n, k = correlation.shape
     diagonal = np.empty_like(gram[0])
     inverse = np.empty_like(gram[0])
+    own = np.empty_like(gram[0])
     one = np.divide(penalty, penalty)
     zero = one - one
     for j in range(k):
         diagonal[j] = gram[j, j]
         inverse[j] = np.divide(one, diagonal[j]) if diagonal[j] > 0 else zero
-    aim, move = np.empty_like(gram[0]), np.empty_like(gram[0])
+    high = ~low
     for i in range(n):
         q, a = correlation[i], codes[i]
+        own[:] = zero
+        best, step = low & high, zero
         for _ in range(20 * k):
-            for j in range(k):
-                u = q[j] + diagonal[j] * a[j]
-                aim[j] = max(u - penalty, zero) + min(u + penalty, zero)
-                move[j] = aim[j] - diagonal[j] * a[j]
-            best = 0
-            size = abs(move[0])
-            for j in range(1, k):
-                if abs(move[j]) > size:
-                    best, size = j, abs(move[j])
-            if size <= tolerance:
-                best = k
-                for j in range(k):  # what is all but zero becomes zero, or the KKT would not hold
-                    if a[j] != 0 and aim[j] == 0:
-                        best = j
-                if best == k:
-                    settled[i] = True
-                    break
-            step = move[best] * inverse[best]
-            a[best] = aim[best] * inverse[best]
             row = gram[best]
             for j in range(k):
-                q[j] -= row[j] * step
+                r = q[j] - row[j] * step
+                q[j] = r
+                u = r + own[j]
+                aim = max(u - penalty, zero) + min(u + penalty, zero)
+                move[j] = abs(aim - own[j])
+            top = low & high
+            for j in range(k):
+                top = max(top, (bits[j] & high) | (low & j))
+            best = top & low
+            if move[best] <= tolerance:
+                rest = k
+                for j in range(k):  # what is all but zero becomes zero, or the KKT would not hold
+                    if a[j] != 0 and abs(q[j] + own[j]) <= penalty:
+                        rest = j
+                if rest == k:
+                    settled[i] = True
+                    break
+                best = rest
+            u = q[best] + own[best]
+            aim = max(u - penalty, zero) + min(u + penalty, zero)
+            step = (aim - own[best]) * inverse[best]
+            own[best] = aim
+            a[best] = aim * inverse[best]
 
 
 def _settle(
@@ -155,6 +169,8 @@ def lasso(
     if not (np.isfinite(z).all() and np.isfinite(B).all()):
         raise InputError("a value is not a finite number")
     kind: type[Any] = np.float32 if z.dtype == np.float32 else np.float64
+    whole: type[Any] = np.int32 if kind is np.float32 else np.int64
+    low = whole((1 << max(B.shape[1] - 1, 1).bit_length()) - 1)
     gram = np.ascontiguousarray(B.T @ B, kind)
     atoms = np.ascontiguousarray(B, kind)
     codes = np.zeros((len(z), B.shape[1]), kind)
@@ -163,8 +179,9 @@ def lasso(
         rows: NDArray[Any] = np.ascontiguousarray(z[start : start + CODES], kind)
         part, settled = codes[start : start + CODES], np.zeros(len(rows), np.bool_)
         target = rows @ atoms
-        limit = kind(penalty * tolerance)
-        _descend(gram, target.copy(), kind(penalty), limit, part, settled)
+        limit, move = kind(penalty * tolerance), np.zeros(B.shape[1], kind)
+        bits = move.view(whole)
+        _descend(gram, target.copy(), kind(penalty), limit, part, settled, move, bits, low)
         for i in np.flatnonzero(~settled):
             part[i] = _settle(gram, target[i], part[i], penalty, penalty * tolerance)
 

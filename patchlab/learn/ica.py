@@ -1,8 +1,9 @@
 """Independent components by preconditioned quasi-Newton maximum likelihood.
 
 The start is drawn in pixel space and mapped through the whitening, so the signs and
-the rotation of the whitening's rows do not matter. Patches are taken in growing
-subsets (8 thousand, 32 thousand, all): early steps need direction, not precision.
+the rotation of the whitening's rows do not matter. A course of stochastic steps over
+batches comes first (:mod:`patchlab.learn.incremental`): early steps need direction, not
+precision. The solver then goes on over all patches to the stated tolerance.
 """
 
 from __future__ import annotations
@@ -18,22 +19,24 @@ from numpy.typing import NDArray
 from patchlab.conventions import rng
 from patchlab.errors import UsageError
 from patchlab.learn.checkpoint import Checkpoint, Run
+from patchlab.learn.incremental import STEPS, course
 from patchlab.learn.likelihood import Likelihood, Mapper, Rows
 from patchlab.learn.order import canonical, dictionary
 from patchlab.learn.solver import Free, Orthogonal, Solver, State
+from patchlab.learn.sure import found_again, relearned
 from patchlab.learn.trust import identified, kurtosis, split, warnings_for
 from patchlab.learn.whiten import leading, one_thread, threads
 from patchlab.progress import Progress, silent
 from patchlab.types import F64, Dictionary, PatchSet, Whitening
 
-SUBSETS = (8192, 32768)
-"""Patches of the early stages; a stage of more than 60 % of all patches is left out."""
-SUBSET_TOLERANCE = 1e-5
-"""Newton decrement that ends an early stage, nats per patch and component."""
+FEWEST = 8192
+"""With fewer patches there is no course of batches: all of them are quickly seen."""
 CACHE_BYTES = 1 << 28
 """Whitened patches are kept up to this size; beyond it every pass whitens them anew."""
-ROUNDS = (10, 10, 20)
-"""Steps between two choices of the densities, at the start of the first stage."""
+ROUNDS = (30, 60, 120)
+"""Steps of the course after which the densities are chosen anew."""
+FIRST_ROUNDS = (10, 20, 40)
+"""The same for the solver's steps where there is no course."""
 EVERY = 20
 """Steps between two checkpoints."""
 
@@ -49,6 +52,7 @@ def learn_ica(
     tolerance: float = 1e-6,
     max_iterations: int = 1000,
     density: Literal["tanh", "adaptive"] = "tanh",
+    resamples: int = 0,
     jobs: int = 1,
     progress: Progress = silent,
     checkpoint: Callable[[Checkpoint], None] | None = None,
@@ -74,8 +78,11 @@ def learn_ica(
     orthogonal : keep components uncorrelated; without it that solution is relaxed further
     restarts : how many starts
     tolerance : nats per patch and component, positive
-    max_iterations : accepted steps of one restart
+    max_iterations : accepted steps of one restart over all patches; the course of batches that
+        comes before them is not counted
     density : "tanh" (heavy tails) or "adaptive" (heavy or light, chosen per component)
+    resamples : halves of the patches on which the best restart is learned anew, from where it
+        stands, to measure how sure its components are
     jobs : threads
     progress : told stage "learn" in restarts done
     checkpoint : told where the learner stands every twenty steps and between stages
@@ -88,7 +95,11 @@ def learn_ica(
     Sources: Ablin, Cardoso & Gramfort 2018, IEEE Trans. Signal Process. 66:4040 and ICASSP
     2018; the choice of densities, Lee, Girolami & Sejnowski 1999, Neural Comput. 11:417.
     """
-    _check_options(patch_set, whitening, restarts, tolerance, max_iterations, density, jobs)
+    if whitening.mean.size != patch_set.size**2:
+        raise UsageError("the whitening belongs to another patch size", where="whitening")
+    _check_options(restarts, tolerance, max_iterations, density, jobs)
+    if resamples < 0:
+        raise UsageError("resamples is at least 0", where="resamples")
     used = leading(whitening, components)
     with one_thread(), threads(jobs) as mapper:
         learner = _Learner(
@@ -106,20 +117,56 @@ def learn_ica(
             checkpoint=checkpoint or (lambda where: None),
         )
         runs = learner.run(resume)
-        return _result(learner, runs, tolerance)
+        return _result(learner, runs, tolerance, resamples)
 
 
-def _check_options(
-    patch_set: PatchSet,
+def unmix(
+    rows: Rows,
     whitening: Whitening,
-    restarts: int,
-    tolerance: float,
-    limit: int,
-    density: str,
-    jobs: int,
-) -> None:
-    if whitening.mean.size != patch_set.size**2:
-        raise UsageError("the whitening belongs to another patch size", where="whitening")
+    *,
+    seed: int = 0,
+    orthogonal: bool = True,
+    restarts: int = 1,
+    tolerance: float = 1e-6,
+    max_iterations: int = 1000,
+    density: Literal["tanh", "adaptive"] = "tanh",
+    jobs: int = 1,
+) -> Run:
+    """The best restart of :func:`learn_ica` over bare rows, none of them held out.
+
+    Parameters
+    ----------
+    rows : of the whitening's length, not necessarily patches
+    whitening : pca form
+    seed, orthogonal, restarts, tolerance, max_iterations, density, jobs : as there
+
+    Raises
+    ------
+    UsageError : a parameter out of its range.
+    """
+    _check_options(restarts, tolerance, max_iterations, density, jobs)
+    order = rng(seed, "rows").permutation(len(rows)).astype(np.int64)
+    with one_thread(), threads(jobs) as mapper:
+        learner = _Learner(
+            rows,
+            whitening,
+            order,
+            order[:0],
+            seed=seed,
+            orthogonal=orthogonal,
+            adaptive=density == "adaptive",
+            restarts=restarts,
+            tolerance=tolerance * whitening.rank,
+            limit=max_iterations,
+            mapper=mapper,
+            progress=silent,
+            checkpoint=lambda where: None,
+        )
+        runs = learner.run(None)
+    return runs[_best(runs)]
+
+
+def _check_options(restarts: int, tolerance: float, limit: int, density: str, jobs: int) -> None:
     if restarts < 1 or limit < 1 or jobs < 1:
         raise UsageError("restarts, max_iterations and jobs are at least 1")
     if not tolerance > 0:
@@ -158,15 +205,21 @@ class _Learner:
             if len(finished) == self.restarts:
                 return finished
             where = self._start(len(finished), finished)
+            self.checkpoint(where)
 
     def _stages(self) -> list[Rows]:
-        """Rows of each stage; ``train`` is in random order, so a head of it is a fair sample."""
-        n = self.train.size
-        heads = [self.train[:m] for m in SUBSETS if m < 0.6 * n]
-        stages = [self.rows.whitened(np.sort(head)) for head in heads]
+        """Rows of each stage: of the course, when there are enough, and of the solver.
+
+        ``train`` is in random order, so batches and a head of it are fair samples.
+        """
+        n, room = self.train.size, CACHE_BYTES // (4 * self.whitening.rank)
+        if n <= room:
+            whole = self.rows.whitened(self.train)
+            return [whole, whole] if n >= FEWEST else [whole]
+        head = self.train[: max(room, FEWEST)]
+        # sorted, for the disk: even and odd places are still fair halves
         whole = replace(self.rows, index=np.sort(self.train))
-        small = 4 * n * self.whitening.rank <= CACHE_BYTES
-        return [*stages, whole.whitened() if small else whole]
+        return [self.rows.whitened(head), whole] if n >= FEWEST else [whole]
 
     def _start(self, restart: int, finished: tuple[Run, ...]) -> Checkpoint:
         """A random start in pixel space, uniform over rotations of the kept directions."""
@@ -195,45 +248,79 @@ class _Learner:
             self.checkpoint(where)
 
     def _solve(self, where: Checkpoint) -> Checkpoint:
-        """Run the solver through one round."""
-        rows, last = self.stages[where.stage], where.stage == len(self.stages) - 1
-        tolerance = self.tolerance if last else SUBSET_TOLERANCE * self.whitening.rank
-        tolerance = max(tolerance, self.tolerance)
+        """One round: of the course of batches, or of the solver."""
+        if where.stage < len(self.stages) - 1:
+            return self._walk(where)
         limit = self.limit - where.spent
-        if self.adaptive and where.stage == 0 and where.round < len(ROUNDS):
-            limit = min(limit, ROUNDS[where.round])
+        if self.adaptive and len(self.stages) == 1 and where.round < len(FIRST_ROUNDS):
+            limit = min(limit, FIRST_ROUNDS[where.round])
         first: list[float] = []
 
         def after(state: State) -> None:
             first.append(state.decrement)
-            self._tell(where.restart, len(rows), tolerance, first[0], state)
+            self._tell(where.restart, first[0], state)
             if state.iterations % EVERY == 0 and not state.outcome:
                 self.checkpoint(replace(where, state=state))
 
-        free = last and not self.orthogonal
         solver = Solver(
-            Likelihood(rows, where.signs, self.mapper),
-            Free() if free else Orthogonal(),
-            tolerance,
+            Likelihood(self.stages[-1], where.signs, self.mapper),
+            Orthogonal() if self.orthogonal else Free(),
+            self.tolerance,
             limit,
             after,
         )
         return replace(where, state=solver.run(where.state))
 
+    def _walk(self, where: Checkpoint) -> Checkpoint:
+        """Steps over batches, up to the next choice of the densities."""
+        ends = (0, *ROUNDS, STEPS) if self.adaptive else (0, STEPS)
+
+        def after(step: int) -> None:
+            if step % EVERY == 0:
+                self.progress(
+                    "learn",
+                    where.restart + 0.3 * step / STEPS,
+                    self.restarts,
+                    f"restart {where.restart + 1} of {self.restarts}, batch {step} of {STEPS}",
+                )
+
+        W = course(
+            Likelihood(self.stages[0], where.signs, self.mapper),
+            where.state.W,
+            start=ends[where.round],
+            stop=ends[where.round + 1],
+            after=after,
+        )
+        return replace(where, state=State(W))
+
     def _next(self, where: Checkpoint) -> Checkpoint | None:
         """The next round (other densities) or stage; None when the restart is finished."""
         spent, state = where.spent + where.state.iterations, where.state
-        fresh = State(state.W)
-        if spent >= self.limit and state.outcome != "converged":
+        last = where.stage == len(self.stages) - 1
+        if last and spent >= self.limit and state.outcome != "converged":
             return None
-        if self.adaptive and where.round < len(ROUNDS) + 3:
+        early = ROUNDS if not last else FIRST_ROUNDS if len(self.stages) == 1 else ()
+        if self.adaptive and where.round < len(early) + 3 * last:
             signs = self._signs(self.stages[where.stage], state.W)
-            early = where.stage == 0 and where.round < len(ROUNDS)
-            if early or not np.array_equal(signs, where.signs):
+            if where.round < len(early) or not np.array_equal(signs, where.signs):
+                fresh = State(state.W)
                 return replace(where, round=where.round + 1, spent=spent, state=fresh, signs=signs)
-        if where.stage == len(self.stages) - 1:
+        if last:
             return None
-        return replace(where, stage=where.stage + 1, round=0, spent=spent, state=fresh)
+        return replace(where, stage=where.stage + 1, round=0, spent=spent, state=State(state.W))
+
+    def relearned(self, run: Run, count: int) -> list[F64]:
+        """A restart's W, learned anew on halves of the patches."""
+        return relearned(
+            self.stages[-1],
+            run.W,
+            run.signs,
+            Orthogonal() if self.orthogonal else Free(),
+            count=count,
+            tolerance=self.tolerance,
+            limit=self.limit,
+            mapper=self.mapper,
+        )
 
     def _signs(self, rows: Rows, W: F64) -> F64:
         """+1 where ``E[sech^2 y] E[y^2] > E[y tanh y]`` at unit variance, -1 elsewhere."""
@@ -241,29 +328,34 @@ class _Learner:
         at = Likelihood(rows, np.ones(len(W)), self.mapper)(unit)
         return np.where(at.slope * at.energy >= np.diag(at.score), 1.0, -1.0)
 
-    def _tell(self, restart: int, n: int, tolerance: float, first: float, state: State) -> None:
-        ratio = max(first / tolerance, 1 + 1e-9)
-        left = math.log(max(state.decrement / tolerance, 1.0)) / math.log(ratio)
+    def _tell(self, restart: int, first: float, state: State) -> None:
+        ratio = max(first / self.tolerance, 1 + 1e-9)
+        left = math.log(max(state.decrement / self.tolerance, 1.0)) / math.log(ratio)
+        before = 0.3 * (len(self.stages) - 1)
         self.progress(
             "learn",
-            restart + min(max(1 - left, 0.0), 1.0) * (0.9 if n == self.train.size else 0.1),
+            restart + before + min(max(1 - left, 0.0), 1.0) * (0.99 - before),
             self.restarts,
-            f"restart {restart + 1} of {self.restarts}, {n} patches, step {state.iterations}, "
-            f"decrement {state.decrement:.1e}",
+            f"restart {restart + 1} of {self.restarts}, {self.train.size} patches, "
+            f"step {state.iterations}, decrement {state.decrement:.1e}",
         )
 
 
-def _result(learner: _Learner, runs: tuple[Run, ...], tolerance: float) -> Dictionary:
+def _result(
+    learner: _Learner, runs: tuple[Run, ...], tolerance: float, resamples: int
+) -> Dictionary:
     """The best restart as a Dictionary, with what can be said about its certainty."""
-    best = min(range(len(runs)), key=lambda i: (runs[i].curve[-1], i))
+    best = _best(runs)
     run = runs[best]
-    filters, atoms, order = _components(run.W, learner.whitening)
-    others = tuple(_components(r.W, learner.whitening)[1] for i, r in enumerate(runs) if i != best)
+    filters, atoms, order = components_of(run.W, learner.whitening)
+    others = tuple(
+        components_of(r.W, learner.whitening)[1] for i, r in enumerate(runs) if i != best
+    )
     whole = Likelihood(learner.rows, run.signs, learner.mapper)
     held = Likelihood(learner.rows.whitened(np.sort(learner.held)), run.signs, learner.mapper)
     seen = identified(whole, held, run.W)
     unit = run.W / np.linalg.norm(run.W, axis=1, keepdims=True)
-    return dictionary(
+    found = dictionary(
         "ica",
         learner.whitening,
         filters,
@@ -279,9 +371,21 @@ def _result(learner: _Learner, runs: tuple[Run, ...], tolerance: float) -> Dicti
         pooled=others,
         warnings=warnings_for(runs, best, seen, kurtosis(held.rows, unit)),
     )
+    k = len(found)
+    sets = list(found.pooled_atoms.reshape(-1, k, found.size, found.size))
+    anew = [components_of(W, learner.whitening)[1] for W in learner.relearned(run, resamples)]
+    return replace(
+        found,
+        over_restarts=found_again(found.atoms, sets[1:]),
+        over_resamples=found_again(found.atoms, [a.reshape(found.atoms.shape) for a in anew]),
+    )
 
 
-def _components(W: F64, whitening: Whitening) -> tuple[F64, F64, NDArray[np.int64]]:
+def _best(runs: tuple[Run, ...]) -> int:
+    return min(range(len(runs)), key=lambda i: (runs[i].curve[-1], i))
+
+
+def components_of(W: F64, whitening: Whitening) -> tuple[F64, F64, NDArray[np.int64]]:
     """Canonical filters and atoms (k, d) of an unmixing W of whitened patches."""
     unit = W / np.linalg.norm(W, axis=1, keepdims=True)
     atoms = (whitening.D @ np.linalg.inv(unit)).T

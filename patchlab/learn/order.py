@@ -147,21 +147,6 @@ def match(a: F64, b: F64) -> tuple[NDArray[np.int64], F64]:
     return partner.astype(np.int64), np.asarray(cosine[rows, partner])
 
 
-def stability(known: Dictionary) -> F64:
-    """How well each component is found again by the other restarts.
-
-    Returns
-    -------
-    ndarray (k,): mean |cos| with its partner in every other restart's atoms, by optimal
-    matching; NaN when the dictionary holds one restart.
-    """
-    k = len(known)
-    others = known.pooled_atoms[k:].reshape(-1, k, known.size, known.size)
-    if not len(others):
-        return np.full(k, np.nan)
-    return np.asarray(np.mean([np.abs(match(known.atoms, o)[1]) for o in others], axis=0))
-
-
 def _unit(atoms: F64) -> F64:
     flat = np.asarray(atoms, dtype=np.float64).reshape(len(atoms), -1)
     return np.asarray(flat / np.maximum(np.linalg.norm(flat, axis=1, keepdims=True), 1e-300))

@@ -11,6 +11,7 @@ sparse coding, J. Mach. Learn. Res. 11:19.
 
 from __future__ import annotations
 
+import math
 from collections.abc import Callable, Mapping
 from dataclasses import dataclass, fields, replace
 from typing import Any
@@ -31,6 +32,8 @@ from patchlab.types import F32, F64, Dictionary, PatchSet, Whitening
 PENALTY = 1.2
 """Default penalty: Mairal et al. 2010 take 1.2 / sqrt(m) for patches of unit norm, and m
 whitened directions have norm sqrt(m)."""
+LEAST_PENALTY, LARGEST_PENALTY = 0.3, 3.0
+"""Bounds of a penalty that is chosen from the noise."""
 STAGES = ((8192, 512, 3e-2), (32768, 1024, 1e-2))
 """Early stages: patches, batch, and the relative gain of a pass that ends them."""
 BATCH = 2048
@@ -86,9 +89,11 @@ def learn_sparse(
     """
     used = leading(whitening, None)
     penalty = PENALTY if penalty is None else penalty
-    _check_options(patch_set, used, atoms, penalty, tolerance, max_iterations, jobs)
+    if used.mean.size != patch_set.size**2:
+        raise UsageError("the whitening belongs to another patch size", where="whitening")
+    check_options(used, atoms, penalty, tolerance, max_iterations, jobs)
     with one_thread(), threads(jobs) as mapper:
-        learner = _Learner(patch_set, used, atoms, penalty, seed, tolerance, mapper)
+        learner = Learner(patch_set.patches, used, atoms, penalty, seed, tolerance, mapper)
         state = resume or learner.start()
         while not state.outcome:
             state = learner.follow(state, learner.turn(state), max_iterations)
@@ -96,6 +101,31 @@ def learn_sparse(
             if checkpoint is not None:
                 checkpoint(state)
         return learner.result(state, tolerance)
+
+
+def penalty_from_noise(whitening: Whitening, noise: F64, atoms: int) -> float:
+    """The penalty at which noise alone would hardly use an atom.
+
+    ``sd * sqrt(2 log atoms)`` (Chen, Donoho & Saunders 1998, SIAM J. Sci. Comput. 20:33) with
+    sd the root of the noise's mean variance over the whitened directions; kept within
+    ``LEAST_PENALTY`` and ``LARGEST_PENALTY``, since almost no noise would let every atom in.
+
+    Parameters
+    ----------
+    whitening : Whitening
+    noise : ndarray (d, d), covariance (:func:`patchlab.learn.noise_covariance`)
+    atoms : how many there will be
+
+    Examples
+    --------
+    >>> from patchlab.learn import Moments, whitening
+    >>> w = whitening(Moments(100, np.zeros(3), np.diag([1.0, 2.0, 3.0])))
+    >>> round(penalty_from_noise(w, 0.5 * np.eye(3), 8), 2)
+    1.07
+    """
+    inside = np.einsum("ij,jk,ik->", whitening.K, noise, whitening.K) / whitening.rank
+    asked = math.sqrt(max(float(inside), 0.0) * 2 * math.log(max(atoms, 2)))
+    return min(max(asked, LEAST_PENALTY), LARGEST_PENALTY)
 
 
 def encode(
@@ -131,17 +161,10 @@ def encode(
         return np.asarray(lasso(z, B / norm, penalty, tolerance=tolerance) / norm)
 
 
-def _check_options(
-    patch_set: PatchSet,
-    whitening: Whitening,
-    atoms: int,
-    penalty: float,
-    tolerance: float,
-    limit: int,
-    jobs: int,
+def check_options(
+    whitening: Whitening, atoms: int, penalty: float, tolerance: float, limit: int, jobs: int
 ) -> None:
-    if whitening.mean.size != patch_set.size**2:
-        raise UsageError("the whitening belongs to another patch size", where="whitening")
+    """Refuse options of :func:`learn_sparse` that are out of their range."""
     if not 1 <= atoms <= 4 * whitening.rank:
         raise UsageError(
             f"{atoms} atoms are not in 1 to {4 * whitening.rank}, four times the rank",
@@ -211,12 +234,12 @@ class SparseState:
             ) from None
 
 
-class _Learner:
+class Learner:
     """One call of :func:`learn_sparse`."""
 
     def __init__(
         self,
-        patch_set: PatchSet,
+        patches: F32,
         whitening: Whitening,
         atoms: int,
         penalty: float,
@@ -224,8 +247,8 @@ class _Learner:
         tolerance: float,
         mapper: Mapper,
     ) -> None:
-        rows = Rows.of(patch_set.patches, whitening)
-        self.train, held = split(len(patch_set), seed)
+        rows = Rows.of(patches, whitening)
+        self.train, held = split(len(patches), seed)
         self.whitening, self.rows, self.atoms = whitening, rows, atoms
         self.penalty, self.seed, self.mapper = penalty, seed, mapper
         self.held = rows.whitened(np.sort(held)).data
@@ -310,14 +333,21 @@ class _Learner:
             total += float(objective(z, B, self._code(z, B), self.penalty).sum())
         return total / len(self.held)
 
-    def result(self, state: SparseState, tolerance: float) -> Dictionary:
-        """The dictionary in canonical form, its code statistics from one more pass."""
-        second, fourth, used = (np.zeros(self.atoms) for _ in range(3))
-        for at in range(0, self.train.size, BATCH):
-            codes = self._code(self._read(np.sort(self.train)[at : at + BATCH]), state.B)
+    def statistics(self, B: F64) -> tuple[F64, F64, NDArray[np.int64]]:
+        """Sums of the codes' second and fourth powers, and how often each atom is used."""
+        second, fourth = np.zeros(self.atoms), np.zeros(self.atoms)
+        used = np.zeros(self.atoms, dtype=np.int64)
+        rows = np.sort(self.train)
+        for at in range(0, rows.size, BATCH):
+            codes = self._code(self._read(rows[at : at + BATCH]), B)
             second += np.sum(codes**2, axis=0, dtype=np.float64)
             fourth += np.sum(codes**4, axis=0, dtype=np.float64)
             used += np.count_nonzero(codes, axis=0)
+        return second, fourth, used
+
+    def result(self, state: SparseState, tolerance: float) -> Dictionary:
+        """The dictionary in canonical form, its code statistics from one more pass."""
+        second, fourth, used = self.statistics(state.B)
         n = self.train.size
         K, D = self.whitening.K, self.whitening.D
         filters, atoms, order = canonical(_dual(state.B) @ K, (D @ state.B).T, second / n)

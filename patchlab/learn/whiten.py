@@ -200,15 +200,17 @@ def whitening(
     rank: int | None = None,
     form: Literal["pca", "zca"] = "pca",
     noise: F64 | None = None,
+    keep_dc: bool = False,
 ) -> Whitening:
     """Whitening from moments; the parameters and errors of :func:`whiten`.
 
-    ``K D`` is the identity (pca) or the projector on the kept directions (zca).
+    ``K D`` is the identity (pca) or the projector on the kept directions (zca). With
+    ``keep_dc`` the constant direction stays: for rows that are not patches.
     """
     d = known.mean.size
-    _check_options(d, retain, rank, form)
+    _check_options(d, retain, rank, form, keep_dc)
     with one_thread():
-        spectrum, U = _eigen(known.covariance)
+        spectrum, U = _eigen(known.covariance, keep_dc)
     numeric = _numeric_rank(known, spectrum)
     if rank is None:
         rank, notes = cut(spectrum[:numeric], retain, known.samples)
@@ -225,8 +227,8 @@ def whitening(
     if form == "zca":
         K, D = U @ K, D @ U.T
         K, D = (K + K.T) / 2, (D + D.T) / 2
-    mean = known.mean - known.mean.mean()
-    removed = _removed(spectrum, rank, numeric, notes)
+    mean = known.mean if keep_dc else known.mean - known.mean.mean()
+    removed = _removed(spectrum, rank, numeric, notes)[keep_dc:]
     return Whitening(
         np.ascontiguousarray(K),
         np.ascontiguousarray(D),
@@ -239,33 +241,37 @@ def whitening(
     )
 
 
-def _check_options(d: int, retain: float, rank: int | None, form: str) -> None:
+def _check_options(d: int, retain: float, rank: int | None, form: str, keep_dc: bool) -> None:
     if not 0 < retain <= 1:
         raise UsageError(f"retain {retain} is not in (0, 1]", where="retain")
-    if rank is not None and not 1 <= rank < d:
+    if rank is not None and not 1 <= rank < d + keep_dc:
         raise UsageError(
-            f"rank {rank} is not in 1 to {d - 1}",
+            f"rank {rank} is not in 1 to {d - 1 + keep_dc}",
             where="rank",
-            remedy=f"{d} pixels less the patch mean leave {d - 1} directions",
+            remedy="" if keep_dc else f"{d} pixels less the patch mean leave {d - 1} directions",
         )
     if form not in ("pca", "zca"):
         raise UsageError(f"unknown form {form!r}", where="form", remedy="choose pca or zca")
 
 
-def _eigen(covariance: F64) -> tuple[F64, F64]:
+def _eigen(covariance: F64, keep_dc: bool) -> tuple[F64, F64]:
     """Eigenvalues (d,), falling, and (d, d - 1) eigenvectors, all orthogonal to the constant.
+
+    With ``keep_dc``, all d eigenvectors.
 
     The problem is solved in an orthonormal basis of the zero-mean patches, so the DC is
     gone by construction; its eigenvalue is listed last, as zero. Each vector's largest
     absolute entry is positive.
     """
     d = len(covariance)
-    ones = np.ones((d, 1)) / np.sqrt(d)
-    basis = np.linalg.qr(np.hstack([ones, np.eye(d)[:, 1:]]))[0][:, 1:]
+    basis = np.eye(d)
+    if not keep_dc:
+        ones = np.ones((d, 1)) / np.sqrt(d)
+        basis = np.linalg.qr(np.hstack([ones, basis[:, 1:]]))[0][:, 1:]
     values, vectors = np.linalg.eigh(basis.T @ covariance @ basis)
     U = basis @ vectors[:, ::-1]
-    U *= np.sign(U[np.argmax(np.abs(U), axis=0), np.arange(d - 1)])
-    return np.append(np.maximum(values[::-1], 0), 0.0), U
+    U *= np.sign(U[np.argmax(np.abs(U), axis=0), np.arange(U.shape[1])])
+    return np.append(np.maximum(values[::-1], 0), np.zeros(d - U.shape[1])), U
 
 
 def _numeric_rank(known: Moments, spectrum: F64) -> int:

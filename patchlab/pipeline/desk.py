@@ -20,12 +20,13 @@ from typing import Any
 
 from patchlab import store
 from patchlab.errors import UsageError
+from patchlab.pipeline import keep
 from patchlab.progress import Progress, silent
 from patchlab.settings import Settings
 from patchlab.workers import usable_cores
 
 ROOMS = ("survey", "patches", "dictionary", "fits", "bank", "report")
-RECIPE = 1
+RECIPE = 2
 """Raised whenever a stage would give another result for the same settings."""
 
 
@@ -131,10 +132,13 @@ def prepare(out: Path, photos: Path | None, *, resume: bool, force: bool) -> Non
     for left in out.glob(".*.*"):
         if left.is_dir() and left.name.split(".")[1] in ROOMS:
             shutil.rmtree(left, ignore_errors=True)
+    for half in out.glob(f".{keep.FILE}.*"):
+        half.unlink(missing_ok=True)
     if force and not resume:
         for name in ROOMS:
             shutil.rmtree(out / name, ignore_errors=True)
         (out / "run.json").unlink(missing_ok=True)
+        (out / keep.FILE).unlink(missing_ok=True)
 
 
 def bank_name(out: Path, settings: Settings) -> str:

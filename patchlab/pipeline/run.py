@@ -16,6 +16,7 @@ from patchlab.errors import InputError, UsageError
 from patchlab.pipeline import tell
 from patchlab.pipeline.bundle import write_bundle
 from patchlab.pipeline.desk import RECIPE, Desk, bank_name, may_write
+from patchlab.pipeline.keep import Keeper
 from patchlab.types import (
     Bank,
     Dictionary,
@@ -133,36 +134,62 @@ def learn_basis(
     s = desk.settings
     about = {"settings": s.plain("learn"), "parents": {"patches": parent["id"]}}
 
+    keeper = Keeper.of(desk.out, {**about, "seed": s.seed, "recipe": RECIPE})
+    sparse = s.method == "sparse"
+    rebuild: Any = learn.SparseState.from_arrays if sparse else learn.Checkpoint.from_arrays
+
     def make() -> tuple[Dictionary, Dictionary]:
         noise = None
         if found.table.noise_sd is not None:
             coloured = found.noise.autocovariance
             noise = learn.noise_covariance(patches, found.table.noise_sd, coloured)
         whitening = learn.whiten(patches, retain=s.retain, noise=noise)
-        if s.method == "sparse":
+        choice, components = None, None if s.components == "auto" else s.components
+        if s.components == "auto" and not sparse:
+            choice = learn.choose_components(
+                patches, whitening, seed=s.seed, jobs=desk.jobs, progress=desk.progress
+            )
+            components = choice.chosen
+            desk.tell(f"  {choice.reason}")
+        assert not isinstance(components, str)  # the settings allow no other word
+        left = keeper.find(rebuild) if desk.resume else None
+        if left is not None:
+            desk.tell("  dictionary: goes on where learning was left")
+        if sparse:
+            atoms, penalty = components or whitening.rank, s.penalty
+            if penalty is None and noise is not None:
+                penalty = learn.penalty_from_noise(whitening, noise, atoms)
+                desk.tell(f"  penalty {penalty:.3g}, from the noise")
             learned = learn.learn_sparse(
                 patches,
                 whitening,
-                atoms=s.components or whitening.rank,
+                atoms=atoms,
+                penalty=penalty,
                 seed=s.seed,
                 jobs=desk.jobs,
                 progress=desk.progress,
+                checkpoint=keeper.keep,
+                resume=left,
             )
         else:
             learned = learn.learn_ica(
                 patches,
                 whitening,
-                components=s.components,
+                components=components,
                 seed=s.seed,
                 orthogonal=s.orthogonal,
                 restarts=s.restarts,
+                resamples=s.resamples,
                 max_iterations=s.max_iterations,
                 jobs=desk.jobs,
                 progress=desk.progress,
+                checkpoint=keeper.keep,
+                resume=left,
             )
-        return learned, learn.learn_pca(patches, whitening)
+        return replace(learned, choice=choice), learn.learn_pca(patches, whitening)
 
     (learned, baseline), head = desk.stage("dictionary", about, make)
+    keeper.drop()
     return (learned, baseline), head
 
 

@@ -5,7 +5,10 @@ from __future__ import annotations
 from collections import Counter
 from typing import TYPE_CHECKING, Any
 
-from patchlab.types import Bank, Dictionary, KernelFits, PatchSet, Survey
+import numpy as np
+
+from patchlab import learn
+from patchlab.types import F64, Bank, Dictionary, KernelFits, PatchSet, Survey
 
 if TYPE_CHECKING:
     from patchlab.images import Intake
@@ -82,8 +85,44 @@ def learned(dictionary: Dictionary, patches: PatchSet, desk: Desk) -> dict[str, 
         "iterations": dictionary.iterations,
         "identified": int(dictionary.identified.sum()),
         "log_likelihood": _rounded(dictionary.log_likelihood, 8),
+        "sure": sure(dictionary),
+        "choice": choice(dictionary),
         "warnings": list(dictionary.warnings),
         "seconds": dict(desk.seconds),
+    }
+
+
+def sure(dictionary: Dictionary) -> dict[str, Any]:
+    """How well components, and their shapes as a crowd, are found again."""
+
+    def found(values: F64) -> dict[str, float | None] | None:
+        if not np.isfinite(values).any():
+            return None
+        share, middle = float(np.mean(values > 0.9)), float(np.median(values))
+        return {"share_above_0.9": _rounded(share), "median_cos": _rounded(middle)}
+
+    return {
+        "over_restarts": found(dictionary.over_restarts),
+        "over_halves": found(dictionary.over_resamples),
+        "shapes_over_restarts": {
+            name: {k: _rounded(v) for k, v in s.items()}
+            for name, s in learn.shape_spread(dictionary).items()
+        },
+    }
+
+
+def choice(dictionary: Dictionary) -> dict[str, Any] | None:
+    """How the number of components was chosen from the data, where it was."""
+    made = dictionary.choice
+    if made is None:
+        return None
+    return {
+        "chosen": made.chosen,
+        "reason": made.reason,
+        "counts": made.counts.tolist(),
+        "gain_nats_per_pixel": [_rounded(v) for v in made.gain],
+        "standard_error": [_rounded(v) for v in made.error],
+        "found_again_median_cos": [_rounded(v) for v in made.found_again],
     }
 
 

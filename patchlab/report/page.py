@@ -14,7 +14,7 @@ import numpy as np
 from patchlab import store
 from patchlab.pipeline import use
 from patchlab.progress import Progress, silent
-from patchlab.report import mosaic, plots
+from patchlab.report import mosaic, plots, sure
 
 SHOWN = 96
 """Most components drawn in one mosaic; the page says how many there are."""
@@ -57,6 +57,11 @@ def _pictures(c: use.RunContent) -> Mapping[str, Callable[[], bytes]]:
         "sizes": lambda: plots.sizes(c.atom_fits, c.bank),
         "bank": lambda: mosaic.bank_sheet(c.bank),
     }
+    if sure.measured(c.dictionary):
+        makers["sure"] = lambda: sure.how_sure(c.dictionary)
+    choice = c.dictionary.choice
+    if choice is not None:
+        makers["choice"] = lambda: sure.component_choice(choice)
     if c.survey.noise.measurable:
         makers["noise"] = lambda: plots.noise_curve(c.survey)
         makers["autocovariance"] = lambda: plots.autocovariance(c.survey)
@@ -106,4 +111,6 @@ def _render(c: use.RunContent, pictures: Mapping[str, bytes]) -> str:
         name: "data:image/png;base64," + base64.b64encode(data).decode()
         for name, data in pictures.items()
     }
-    return environment.get_template("page.html").render(c=c, pictures=embedded, shown=SHOWN)
+    return environment.get_template("page.html").render(
+        c=c, pictures=embedded, shown=SHOWN, how_sure=sure.in_words(c.dictionary)
+    )

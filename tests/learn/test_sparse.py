@@ -8,8 +8,17 @@ from sklearn.decomposition import MiniBatchDictionaryLearning
 from sklearn.linear_model import Lasso
 
 from patchlab.errors import InputError, UsageError
-from patchlab.learn import encode, lasso, learn_ica, learn_pca, learn_sparse, match, whiten
-from patchlab.learn.sparse import SparseState, _Learner, objective
+from patchlab.learn import (
+    encode,
+    lasso,
+    learn_ica,
+    learn_pca,
+    learn_sparse,
+    match,
+    penalty_from_noise,
+    whiten,
+)
+from patchlab.learn.sparse import Learner, SparseState, objective
 from patchlab.learn.trust import split
 
 
@@ -174,7 +183,7 @@ def test_encode_works_over_independent_components(photos, whitened):
 
 
 def test_dead_atoms_are_revived_from_the_worst_coded_patches(photos, whitened):
-    learner = _Learner(photos, whitened, 40, 6.0, 0, 1e-3, map)
+    learner = Learner(photos.patches, whitened, 40, 6.0, 0, 1e-3, map)
     start = learner.start()
     once = learner.turn(start)  # under this penalty some atoms find no use
     assert once.revived > 0
@@ -221,3 +230,18 @@ def test_wrong_parameters_are_refused(photos, whitened, options):
         learn_sparse(photos, whitened, **{"atoms": 30, **options})
     with pytest.raises(UsageError, match="64 pixels"):
         encode(learn_pca(photos, whitened), np.zeros((1, 9), np.float32))
+
+
+def test_noise_alone_hardly_uses_an_atom_at_the_penalty_from_noise(photos):
+    w = whiten(photos)
+    variance = 0.3 * w.spectrum[w.rank - 1]
+    noise = np.random.default_rng(0).normal(0, np.sqrt(variance), (2000, 64))
+    known = learn_ica(photos, w, restarts=1, tolerance=1e-3)
+    penalty = penalty_from_noise(w, variance * np.eye(64), len(known))
+    atoms = known.whitening.K @ known.atoms.reshape(len(known), -1).T
+    B = atoms / np.linalg.norm(atoms, axis=0)
+    used = np.count_nonzero(lasso(noise @ w.K.T, B, penalty), axis=1)
+    assert used.mean() < 1
+    assert np.count_nonzero(lasso(noise @ w.K.T, B, penalty / 3), axis=1).mean() > 5
+    tiny, huge = (penalty_from_noise(w, v * np.eye(64), 50) for v in (0.0, 1e6))
+    assert 0 < tiny < penalty < huge < 10
