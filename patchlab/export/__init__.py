@@ -12,18 +12,21 @@ from patchlab.export.build import (
 from patchlab.export.c99 import emit
 from patchlab.export.compare import Check, Target, Verification
 from patchlab.export.onnx import emit as emit_onnx
+from patchlab.export.runtime import RUNTIME, open_runtime, runtime_files
 from patchlab.export.selftest import Case as SelftestCase
 from patchlab.export.selftest import emit_selftest
 from patchlab.export.vectors import make_cases, vector_files
-from patchlab.export.verify import verify
+from patchlab.export.verify import broken_target, verify
 
 __all__ = [
     "NO_COMPILER",
+    "RUNTIME",
     "Check",
     "SelftestCase",
     "Target",
     "Verification",
     "bench",
+    "broken_target",
     "compile_library",
     "emit",
     "emit_onnx",
@@ -31,7 +34,9 @@ __all__ = [
     "find_compiler",
     "library_name",
     "make_cases",
+    "open_runtime",
     "run_selftest",
+    "runtime_files",
     "target_name",
     "vector_files",
     "verify",

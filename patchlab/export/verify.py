@@ -38,7 +38,7 @@ from patchlab.types import F32, Bank, Plan
 
 SelfTestRunner = Callable[[Path], tuple[bool, str]]
 
-__all__ = ["Check", "Target", "Verification", "lines", "verify"]
+__all__ = ["Check", "Target", "Verification", "broken_target", "lines", "verify"]
 
 
 def verify(
@@ -173,12 +173,12 @@ def _opened(files: _Files, name: str, open_library: Callable[[Path], Target]) ->
     except UsageError as error:
         return Target(title, not_run=str(error))
     except (PatchlabError, OSError) as error:
-        return _broken(title, error)
+        return broken_target(title, error)
     return Target(title, opened.responses, opened.edges, opened.bounds)
 
 
-def _broken(title: str, error: Exception) -> Target:
-    """A target that cannot be opened fails as soon as it is run."""
+def broken_target(title: str, error: Exception) -> Target:
+    """A target that cannot be opened: it fails as soon as it is run."""
 
     def refuse(pixels: Pixels) -> F32:
         raise VerificationError(str(error))
@@ -204,7 +204,7 @@ def _onnx_targets(bank: Bank, files: _Files) -> Iterator[Target]:
             yield Target(title, not_run=str(error))
             continue
         except Exception as error:  # a damaged file makes each runtime raise its own kind
-            yield _broken(title, error)
+            yield broken_target(title, error)
             continue
         yield _onnx_target(title, bank, plain, edges, slow=title == "onnx reference")
 
