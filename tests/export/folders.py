@@ -61,3 +61,14 @@ def put(folder: Path, name: str, data: bytes) -> None:
     (folder / name).parent.mkdir(parents=True, exist_ok=True)
     (folder / name).write_bytes(data)
     reseal(folder, lambda head: head["files"].update({name: sha256(data)}))
+
+
+def scene(bank, shape=(90, 121), seed=3):
+    """Bars and discs of many contrasts in noise, in the bank's pixels."""
+    rng = np.random.default_rng(seed)
+    y, x = np.mgrid[: shape[0], : shape[1]]
+    light = 0.4 + 0.15 * (x > 50) + 0.2 * (np.hypot(x - 85, y - 40) < 22)
+    light = light + 0.1 * ((x + 2 * y) % 61 < 4) + rng.normal(0, 0.02, shape)
+    form = bank.contract.format
+    codes = np.clip(light, 0, 1) * form.full_scale
+    return (np.rint(codes) if form.integer else codes).astype(form.dtype)

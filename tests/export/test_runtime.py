@@ -22,24 +22,13 @@ from patchlab.export.patchlab_bank import BankError
 from patchlab.pipeline import bundle
 from patchlab.store import LICENCE
 from tests.bank.banks import picture
-from tests.export.folders import BANKS, put, reseal, write
+from tests.export.folders import BANKS, put, reseal, scene, write
 
 
 @pytest.fixture(scope="module")
 def folders(tmp_path_factory):
     root = tmp_path_factory.mktemp("banks")
     return {name: write(root / name, bank) for name, bank in BANKS.items()}
-
-
-def scene(bank, shape=(90, 121), seed=3):
-    """Bars and discs of many contrasts in noise, in the bank's pixels."""
-    rng = np.random.default_rng(seed)
-    y, x = np.mgrid[: shape[0], : shape[1]]
-    light = 0.4 + 0.15 * (x > 50) + 0.2 * (np.hypot(x - 85, y - 40) < 22)
-    light = light + 0.1 * ((x + 2 * y) % 61 < 4) + rng.normal(0, 0.02, shape)
-    form = bank.contract.format
-    codes = np.clip(light, 0, 1) * form.full_scale
-    return (np.rint(codes) if form.integer else codes).astype(form.dtype)
 
 
 @pytest.mark.parametrize("name", BANKS)
