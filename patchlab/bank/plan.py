@@ -12,11 +12,12 @@ oe    rows subtracted, columns added
 oo    both subtracted
 ====  ==================================================================
 
-with j and i from 0 or 1 to c. Every kernel is the sum of its four x/y-parity
-parts, so the last four reach any kernel. A point-symmetric or antisymmetric
-kernel has only two parts, and a kernel and its mirror image have the same parts
-up to sign: equal parts are computed once. That is exact algebra; sharing needs
-the symmetry to hold bit for bit in the float32 taps.
+with j and i from 0 or 1 to c; rows and columns of zeros at the rim are cut off.
+Every kernel is the sum of its four x/y-parity parts, so the last four reach any
+kernel. A point-symmetric or antisymmetric kernel has only two parts, and a kernel
+and its mirror image have the same parts up to sign: equal parts are computed
+once. That is exact algebra; sharing needs the symmetry to hold bit for bit in
+the float32 taps.
 """
 
 from __future__ import annotations
@@ -87,6 +88,16 @@ def basis_size(basis: str, radius: int) -> tuple[int, int]:
     return radius + (basis[0] == "e"), radius + (basis[1] == "e")
 
 
+def _trimmed(basis: str, part: F64) -> F64:
+    """A product's coefficients without the zeros beyond its own support."""
+    rows, cols = np.nonzero(part)
+    if basis == "all":  # stays centred
+        c = part.shape[0] // 2
+        a, b = (int(np.abs(at - c).max(initial=0)) for at in (rows, cols))
+        return part[c - a : c + a + 1, c - b : c + b + 1]
+    return part[: rows.max(initial=0) + 1, : cols.max(initial=0) + 1]
+
+
 def _uses(basis: str, shape: tuple[int, int]) -> F64:
     """How many pixels each basis value is made of: 1, 2 or 4."""
     if basis == "all":
@@ -153,18 +164,19 @@ def strength_members(bank: Bank, scale: int) -> tuple[tuple[int, int | None, int
 def _share(parts: Mapping[int, Mapping[str, F64]]) -> tuple[list[_Product], dict[int, Sum]]:
     """Equal parts become one product; a negated part shares it with a minus sign."""
     products: list[_Product] = []
-    known: dict[tuple[str, bytes], tuple[int, int]] = {}
+    known: dict[tuple[str, tuple[int, ...], bytes], tuple[int, int]] = {}
     sums: dict[int, Sum] = {}
     for index, split in parts.items():
         terms = []
-        for basis, exact in split.items():
-            if not exact.any():
+        for basis, part in split.items():
+            if not part.any():
                 continue
-            key = (basis, (exact + 0.0).tobytes())  # + 0.0: minus zero is zero
+            exact = _trimmed(basis, part)
+            key = (basis, exact.shape, (exact + 0.0).tobytes())  # + 0.0: minus zero is zero
             if key not in known:
                 place = len(products)
                 products.append(_Product(basis, exact, exact.astype(np.float32)))
-                known[(basis, (0.0 - exact).tobytes())] = (place, -1)
+                known[(basis, exact.shape, (0.0 - exact).tobytes())] = (place, -1)
                 known[key] = (place, 1)
             terms.append(known[key])
         sums[index] = tuple(terms)
@@ -208,13 +220,14 @@ def _worth_splitting(split: Mapping[int, Mapping[str, F64]], exact: F64) -> set[
 
 
 def _group(products: list[_Product], sums: Mapping[int, Sum], bank: Bank) -> list[list[int]]:
-    """Products with one basis and one use (scale and parity), at most GROUP together."""
+    """Products of one basis, shape and use (scale and parity), at most GROUP together."""
     use: dict[int, tuple[Any, ...]] = {}
     for index, terms in sums.items():
         kernel = bank.kernels[index]
         scale = -1 if kernel.scale is None else kernel.scale
         for product, _ in terms:
-            use.setdefault(product, (scale, kernel.parity, products[product].basis))
+            p = products[product]
+            use.setdefault(product, (scale, kernel.parity, p.basis, p.exact.shape))
     groups: list[list[int]] = []
     for key in sorted(set(use.values())):
         same = [p for p in sorted(use) if use[p] == key]
@@ -349,13 +362,17 @@ def rebuilt_taps(plan: Plan, size: int) -> Iterator[F64]:
         for product, sign in terms:
             basis = plan.detail["bases"][product]
             values = plan.detail["coefficients"][product].astype(np.float64)
-            kernel += sign * (values if basis == "all" else _unfold(values, basis, c))
+            kernel += sign * _unfold(values, basis, c)
         yield kernel
 
 
 def _unfold(values: F64, basis: str, c: int) -> F64:
+    rows, cols = values.shape
+    if basis == "all":
+        return np.pad(values, ((c - rows // 2,) * 2, (c - cols // 2,) * 2))
+    top, left = int(basis[0] == "o"), int(basis[1] == "o")
     quarter = np.zeros((c + 1, c + 1))
-    quarter[c + 1 - values.shape[0] :, c + 1 - values.shape[1] :] = values
+    quarter[top : top + rows, left : left + cols] = values
     half = np.concatenate([(1 if basis[1] == "e" else -1) * quarter[:, :0:-1], quarter], axis=1)
     return np.concatenate([(1 if basis[0] == "e" else -1) * half[:0:-1], half])
 
