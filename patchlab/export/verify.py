@@ -33,6 +33,7 @@ from patchlab.export.compare import (
 )
 from patchlab.export.onnx import Runner, conv_bound, reference_runner
 from patchlab.export.vectors import Case, Oracle, Pixels, load_cases, make_probes, strongest
+from patchlab.export.wasm import wasm_target
 from patchlab.progress import Progress, silent
 from patchlab.types import F32, Bank, Plan
 
@@ -81,6 +82,7 @@ def verify(
     targets = [
         *(engines or {}).values(),
         *_libraries(files, open_library, library),
+        *_wasm(bank, files),
         *_onnx_targets(bank, files),
     ]
     for done, target in enumerate(targets):
@@ -184,6 +186,19 @@ def broken_target(title: str, error: Exception) -> Target:
         raise VerificationError(str(error))
 
     return Target(title, refuse)
+
+
+def _wasm(bank: Bank, files: _Files) -> Iterator[Target]:
+    """The WebAssembly module, where the folder holds one, in Node."""
+    module, loader = (f"lib/wasm32/{bank.name}.{end}" for end in ("wasm", "mjs"))
+    if module in files.head["files"]:
+        title = f"WebAssembly {module}"
+        try:
+            yield wasm_target(bank, files.read(module), files.read(loader))
+        except UsageError as error:
+            yield Target(title, not_run=str(error))
+        except PatchlabError as error:
+            yield broken_target(title, error)
 
 
 # ---------------------------------------------------------------- ONNX

@@ -11,8 +11,9 @@ from patchlab import bank as banks
 from patchlab import edges, export, store
 from patchlab.edges import thin
 from patchlab.errors import PatchlabError, UsageError
-from patchlab.pipeline.desk import Desk
+from patchlab.pipeline.desk import Desk, may_write
 from patchlab.progress import Progress, silent
+from patchlab.settings import Settings
 from patchlab.types import Bank, Plan
 
 
@@ -61,7 +62,7 @@ def write_bundle(
     files = dict(export.emit(bank, plan))
     files |= export.emit_selftest(bank, plan, _selftest_cases(bank, plan))
     desk.progress("export", 1, 4, "C source")
-    library, said = build_library(files, bank.name, desk.settings.library)
+    library, said = build_libraries(files, bank, plan, desk.settings)
     desk.progress("export", 2, 4, "library")
     graph = export.emit_onnx(bank)
     cases = export.make_cases(bank, plan, banks.exact_responses, crop=crop)
@@ -91,6 +92,32 @@ def write_bundle(
 def _selftest_cases(bank: Bank, plan: Plan) -> list[export.SelftestCase]:
     small = export.make_cases(bank, plan, banks.exact_responses, small=True)
     return [(case.name, case.pixels, case.expected, case.tolerance) for case in small]
+
+
+def add_libraries(folder: Path, out: Path, desk: Desk, *, force: bool) -> Written:
+    """Write a bank that stands anew, with the libraries of the targets asked for added.
+
+    Raises
+    ------
+    UsageError : a target that cannot be built, or the output stands and may not be replaced.
+    VerificationError : a file was changed since it was written, or a target differs.
+    """
+    export.parse_targets(desk.settings.target)
+    if out != folder:
+        may_write(out, force)
+    bank, plan, head = banks.read_bank(folder)
+    files = {name: store.read_file(folder, head, name) for name in head["files"]}
+    library, said = build_libraries(files, bank, plan, desk.settings)
+    own = banks.bank_files(bank, plan)[0]
+    files = {name: data for name, data in (files | library).items() if name not in own}
+    about = {key: head[key] for key in ("seed", "settings", "inputs", "parents")}
+    head = banks.write_bank(out, bank, plan, files, force=True, **about)
+    proof = prove(out, bank, plan, head, desk.progress)
+    error = proof.error()
+    if error is not None:
+        raise error
+    graph = f"{bank.name}.onnx" in files
+    return Written(out, bank, plan, head, proof, said, "kept" if graph else "none")
 
 
 def edge_rules(bank: Bank) -> dict[str, Any] | None:
@@ -129,6 +156,21 @@ def build_library(
         return {}, f"not built: {export.NO_COMPILER}"
     path = f"lib/{export.target_name()}/{export.library_name(name)}"
     return {path: built}, f"{path}, by {compiler.version}"
+
+
+def build_libraries(
+    files: Mapping[str, bytes], bank: Bank, plan: Plan, settings: Settings
+) -> tuple[dict[str, bytes], str]:
+    """The libraries of every target asked for, and what to say of them."""
+    targets = export.parse_targets(settings.target)
+    wanted = settings.library and export.HOST in targets
+    library, said = build_library(files, bank.name, wanted)
+    for target in targets:
+        if target != export.HOST:
+            made = export.cross_compile(files, bank, plan, target)
+            library |= {path: data for path, data in made.items() if path not in library}
+            said += f"; {export.library_path(bank.name, target)}"
+    return library, said
 
 
 def own_library(bank: Bank) -> str:
