@@ -112,6 +112,12 @@ class Settings:
         DEFAULT_BORDER, "bank", "What lies beyond the picture's rim.", choices=tuple(BORDERS)
     )
     library: bool = _setting(True, "bank", "Build the shared library of this machine.")
+    target: str = _setting(
+        "host",
+        "bank",
+        "Machines to compile for, with commas: host, aarch64-linux, "
+        "x86_64-linux, x86_64-windows, wasm32.",
+    )
     name: str | None = _setting(None, "bank", "C prefix of the bank; by default the folder's name.")
     # all
     seed: int = _setting(0, "common", "Seed of every draw.", low=0, high=2**31 - 1)

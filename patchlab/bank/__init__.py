@@ -2,7 +2,7 @@
 
 from patchlab.bank.apply import responses, strength
 from patchlab.bank.choose import BankSettings, choose_bank, compare_banks
-from patchlab.bank.disk import read_bank, write_bank
+from patchlab.bank.disk import bank_files, read_bank, write_bank
 from patchlab.bank.given import bank_as_learned, bank_from_taps
 from patchlab.bank.native import NativeBank, load_native
 from patchlab.bank.plan import describe, make_plan
@@ -13,6 +13,7 @@ __all__ = [
     "BankSettings",
     "NativeBank",
     "bank_as_learned",
+    "bank_files",
     "bank_from_taps",
     "choose_bank",
     "compare_banks",

@@ -158,9 +158,11 @@ def _products(padded: F32, basis: str, taps: F32, c: int, folds: dict[tuple[str,
     scaled = np.empty_like(total)
     value = np.empty(shape, dtype=np.float32)
     factors = np.ascontiguousarray(taps.transpose(1, 2, 0))[..., None, None]
-    for j, row in enumerate(factors):
+    # the taps as they are may reach less far than the bank's kernels; they stay centred
+    top, left = ((c - n // 2) * (basis == "all") for n in taps.shape[1:])
+    for j, row in enumerate(factors, top):
         lines = _fold_rows(padded, basis, j, c, shape[0], folds)
-        for i, factor in enumerate(row):
+        for i, factor in enumerate(row, left):
             np.multiply(factor, _fold_columns(lines, basis, i, c, value), out=scaled)
             np.add(total, scaled, out=total)
     return total

@@ -12,89 +12,38 @@ oe    rows subtracted, columns added
 oo    both subtracted
 ====  ==================================================================
 
-with j and i from 0 or 1 to c. Every kernel is the sum of its four x/y-parity
-parts, so the last four reach any kernel. A point-symmetric or antisymmetric
-kernel has only two parts, and a kernel and its mirror image have the same parts
-up to sign: equal parts are computed once. That is exact algebra; sharing needs
-the symmetry to hold bit for bit in the float32 taps.
+with j and i from 0 or 1 to c; rows and columns of zeros at the rim are cut off.
+Every kernel is the sum of its four x/y-parity parts, so the last four reach any
+kernel. A point-symmetric or antisymmetric kernel has only two parts, and a kernel
+and its mirror image have the same parts up to sign: equal parts are computed
+once. That is exact algebra; sharing needs the symmetry to hold bit for bit in
+the float32 taps.
 """
 
 from __future__ import annotations
 
 import hashlib
 from collections.abc import Iterator, Mapping
-from dataclasses import dataclass
 from typing import Any
 
 import numpy as np
 
+from patchlab.bank.products import (
+    Product,
+    Sum,
+    clusters,
+    parity_parts,
+    share,
+    unfold,
+    uses_of,
+)
 from patchlab.conventions import gamma
 from patchlab.errors import UsageError
-from patchlab.types import F32, F64, Bank, Plan
+from patchlab.types import F64, Bank, Plan
 
-PARITY_BASES = ("ee", "eo", "oe", "oo")
 KINDS = ("auto", "direct", "parity")
 GROUP = 6
 """Products that are computed together: what the registers of a core hold."""
-
-Sum = tuple[tuple[int, int], ...]
-"""A kernel as ((product, +1 or -1), ...)."""
-
-
-@dataclass(frozen=True, eq=False)
-class _Product:
-    basis: str
-    exact: F64
-    rounded: F32
-
-
-# ---------------------------------------------------------------- parity parts
-
-
-def parity_parts(kernel: F64) -> dict[str, F64]:
-    """Split a kernel into the coefficients of its four x/y-parity parts.
-
-    Parameters
-    ----------
-    kernel : float64 ndarray (h, h), h odd
-
-    Returns
-    -------
-    dict : ee (c+1, c+1), eo (c+1, c), oe (c, c+1), oo (c, c); only the entries that are
-        not zero by symmetry, j and i rising from 0 (even) or 1 (odd)
-
-    >>> parts = parity_parts(np.arange(9.0).reshape(3, 3))
-    >>> float(parts["ee"][0, 0]), float(parts["eo"][0, 0]), float(parts["oe"][0, 0])
-    (4.0, 1.0, 3.0)
-    """
-    c = kernel.shape[0] // 2
-    flip_y, flip_x = kernel[::-1], kernel[:, ::-1]
-    both = flip_y[:, ::-1]
-    quarter = slice(c, None), slice(c + 1, None)
-    even, odd = quarter
-    return {
-        "ee": ((kernel + flip_y) + (flip_x + both))[even, even] / 4,
-        "eo": ((kernel + flip_y) - (flip_x + both))[even, odd] / 4,
-        "oe": ((kernel - flip_y) + (flip_x - both))[odd, even] / 4,
-        "oo": ((kernel - flip_y) - (flip_x - both))[odd, odd] / 4,
-    }
-
-
-def basis_size(basis: str, radius: int) -> tuple[int, int]:
-    """Rows and columns of a product's coefficients."""
-    if basis == "all":
-        return 2 * radius + 1, 2 * radius + 1
-    return radius + (basis[0] == "e"), radius + (basis[1] == "e")
-
-
-def _uses(basis: str, shape: tuple[int, int]) -> F64:
-    """How many pixels each basis value is made of: 1, 2 or 4."""
-    if basis == "all":
-        return np.ones(shape)
-    rows, cols = np.full(shape[0], 2.0), np.full(shape[1], 2.0)
-    rows[: int(basis[0] == "e")] = 1
-    cols[: int(basis[1] == "e")] = 1
-    return np.outer(rows, cols)
 
 
 # ---------------------------------------------------------------- strength
@@ -150,71 +99,30 @@ def strength_members(bank: Bank, scale: int) -> tuple[tuple[int, int | None, int
 # ---------------------------------------------------------------- planning
 
 
-def _share(parts: Mapping[int, Mapping[str, F64]]) -> tuple[list[_Product], dict[int, Sum]]:
-    """Equal parts become one product; a negated part shares it with a minus sign."""
-    products: list[_Product] = []
-    known: dict[tuple[str, bytes], tuple[int, int]] = {}
-    sums: dict[int, Sum] = {}
-    for index, split in parts.items():
-        terms = []
-        for basis, exact in split.items():
-            if not exact.any():
-                continue
-            key = (basis, (exact + 0.0).tobytes())  # + 0.0: minus zero is zero
-            if key not in known:
-                place = len(products)
-                products.append(_Product(basis, exact, exact.astype(np.float32)))
-                known[(basis, (0.0 - exact).tobytes())] = (place, -1)
-                known[key] = (place, 1)
-            terms.append(known[key])
-        sums[index] = tuple(terms)
-    return products, sums
-
-
-def _clusters(sums: Mapping[int, Sum]) -> list[list[int]]:
-    """Kernels that share products, directly or through others."""
-    owner: dict[int, int] = {}
-    root = {index: index for index in sums}
-
-    def find(index: int) -> int:
-        while root[index] != index:
-            index = root[index]
-        return index
-
-    for index, terms in sums.items():
-        for product, _ in terms:
-            if product in owner:
-                root[find(index)] = find(owner[product])
-            owner[product] = index
-    found: dict[int, list[int]] = {}
-    for index in sums:
-        found.setdefault(find(index), []).append(index)
-    return list(found.values())
-
-
 def _worth_splitting(split: Mapping[int, Mapping[str, F64]], exact: F64) -> set[int]:
     """Kernels for which the parity split saves more than its additions cost."""
-    products, sums = _share(split)
+    products, sums = share(split)
     chosen: set[int] = set()
-    for cluster in _clusters(sums):
+    for cluster in clusters(sums):
         used = {product for index in cluster for product, _ in sums[index]}
         coefficients = sum(products[p].exact.size for p in used)
         # a basis value takes one addition for every group of products that reads it
         parity = 2 * coefficients + coefficients // GROUP + sum(len(sums[i]) for i in cluster)
-        direct, _ = _share({index: {"all": exact[index]} for index in cluster})
+        direct, _ = share({index: {"all": exact[index]} for index in cluster})
         if parity < sum(2 * p.exact.size for p in direct):
             chosen.update(cluster)
     return chosen
 
 
-def _group(products: list[_Product], sums: Mapping[int, Sum], bank: Bank) -> list[list[int]]:
-    """Products with one basis and one use (scale and parity), at most GROUP together."""
+def _group(products: list[Product], sums: Mapping[int, Sum], bank: Bank) -> list[list[int]]:
+    """Products of one basis, shape and use (scale and parity), at most GROUP together."""
     use: dict[int, tuple[Any, ...]] = {}
     for index, terms in sums.items():
         kernel = bank.kernels[index]
         scale = -1 if kernel.scale is None else kernel.scale
         for product, _ in terms:
-            use.setdefault(product, (scale, kernel.parity, products[product].basis))
+            p = products[product]
+            use.setdefault(product, (scale, kernel.parity, p.basis, p.exact.shape))
     groups: list[list[int]] = []
     for key in sorted(set(use.values())):
         same = [p for p in sorted(use) if use[p] == key]
@@ -223,14 +131,14 @@ def _group(products: list[_Product], sums: Mapping[int, Sum], bank: Bank) -> lis
     return groups
 
 
-def _bounds(products: list[_Product], sums: Mapping[int, Sum], span: float) -> tuple[float, ...]:
+def _bounds(products: list[Product], sums: Mapping[int, Sum], span: float) -> tuple[float, ...]:
     """Largest |float32 response - exact response| for every kernel; see :func:`make_plan`."""
     bounds = []
     for index in sorted(sums):
         total = 0.0
         for number, _ in sums[index]:
             p = products[number]
-            uses = _uses(p.basis, (p.exact.shape[0], p.exact.shape[1]))
+            uses = uses_of(p.basis, (p.exact.shape[0], p.exact.shape[1]))
             folds = 0 if p.basis == "all" else 2
             roundings = p.exact.size + folds + len(sums[index]) - 1
             total += gamma(roundings) * float((np.abs(p.rounded).astype(np.float64) * uses).sum())
@@ -239,7 +147,7 @@ def _bounds(products: list[_Product], sums: Mapping[int, Sum], span: float) -> t
     return tuple(bounds)
 
 
-def _additions(products: list[_Product], groups: list[list[int]], sums: Mapping[int, Sum]) -> int:
+def _additions(products: list[Product], groups: list[list[int]], sums: Mapping[int, Sum]) -> int:
     """Additions for each pixel: folding rows and columns, summing products, joining them."""
     fold_rows = {(p.basis[0], p.exact.shape[0] - (p.basis[0] == "e")) for p in products}
     total = sum(count for kind, count in fold_rows if kind != "a")
@@ -266,7 +174,7 @@ def _interface_number(bank: Bank) -> int:
     return int(h.hexdigest()[:7], 16)
 
 
-def _lines(products: list[_Product], groups: list[list[int]]) -> tuple[str, ...]:
+def _lines(products: list[Product], groups: list[list[int]]) -> tuple[str, ...]:
     words = {
         "all": "taps as they are",
         "ee": "even in y, even in x",
@@ -318,7 +226,7 @@ def make_plan(bank: Bank, kind: str = "auto") -> Plan:
     if kind == "auto":
         chosen = _worth_splitting(split, exact)
     mixed = {i: split[i] if i in chosen else {"all": exact[i]} for i in split}
-    products, sums = _share(mixed)
+    products, sums = share(mixed)
     groups = _group(products, sums, bank)
     return Plan(
         kind="parity" if any(p.basis != "all" for p in products) else "direct",
@@ -349,15 +257,8 @@ def rebuilt_taps(plan: Plan, size: int) -> Iterator[F64]:
         for product, sign in terms:
             basis = plan.detail["bases"][product]
             values = plan.detail["coefficients"][product].astype(np.float64)
-            kernel += sign * (values if basis == "all" else _unfold(values, basis, c))
+            kernel += sign * unfold(values, basis, c)
         yield kernel
-
-
-def _unfold(values: F64, basis: str, c: int) -> F64:
-    quarter = np.zeros((c + 1, c + 1))
-    quarter[c + 1 - values.shape[0] :, c + 1 - values.shape[1] :] = values
-    half = np.concatenate([(1 if basis[1] == "e" else -1) * quarter[:, :0:-1], quarter], axis=1)
-    return np.concatenate([(1 if basis[0] == "e" else -1) * half[:0:-1], half])
 
 
 def describe(plan: Plan) -> str:

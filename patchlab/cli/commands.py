@@ -239,7 +239,10 @@ def fit(run: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
 @settings_options("photos", "bank", "common")
 @_shared
 def export(run: Path | None, terminal: Terminal, as_json: bool, **options: Any) -> None:
-    """Choose a bank from a RUN's fits and export it, or export your own kernels (--taps)."""
+    """Choose a bank from a RUN's fits and export it, or export your own kernels (--taps).
+
+    Where RUN is a bank's folder, the bank stays and the libraries of --target are added.
+    """
     settings = resolve(options, options["config"])
     if (run is None) == (options["taps"] is None):
         raise UsageError("export takes either a RUN or --taps FILE.npy")

@@ -12,27 +12,47 @@ from patchlab.export.build import (
 from patchlab.export.c99 import emit
 from patchlab.export.compare import Check, Target, Verification
 from patchlab.export.onnx import emit as emit_onnx
+from patchlab.export.runtime import RUNTIME, open_runtime, runtime_files
 from patchlab.export.selftest import Case as SelftestCase
 from patchlab.export.selftest import emit_selftest
+from patchlab.export.targets import (
+    HOST,
+    TARGETS,
+    cross_compile,
+    library_path,
+    parse_targets,
+)
 from patchlab.export.vectors import make_cases, vector_files
-from patchlab.export.verify import verify
+from patchlab.export.verify import broken_target, verify
+from patchlab.export.wasm import find_node, wasm_target
 
 __all__ = [
+    "HOST",
     "NO_COMPILER",
+    "RUNTIME",
+    "TARGETS",
     "Check",
     "SelftestCase",
     "Target",
     "Verification",
     "bench",
+    "broken_target",
     "compile_library",
+    "cross_compile",
     "emit",
     "emit_onnx",
     "emit_selftest",
     "find_compiler",
+    "find_node",
     "library_name",
+    "library_path",
     "make_cases",
+    "open_runtime",
+    "parse_targets",
     "run_selftest",
+    "runtime_files",
     "target_name",
     "vector_files",
     "verify",
+    "wasm_target",
 ]

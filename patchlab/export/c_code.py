@@ -78,36 +78,36 @@ def group_code(number: int, plan: Plan, radius: int) -> str:
     """C function that computes a group of products on one chunk."""
     group = plan.detail["product_groups"][number]
     basis = plan.detail["bases"][group[0]]
+    height, width = plan.detail["coefficients"][group[0]].shape
     second = " + @N@_LANES"
     if basis == "all":
-        arguments, first, last = "const float *const *rows, ptrdiff_t at, float *t", 0, 2 * radius
+        arguments, first = "const float *const *rows, ptrdiff_t at, float *t", radius - height // 2
         source = "rows[j] + at + x"
         pre: list[str] = []
-        start, stop = 0, 2 * radius
+        start = radius - width // 2
         values = ("@N@_LOAD(r + i)", f"@N@_LOAD(r{second} + i)")
     else:
         even_y, even_x = basis[0] == "e", basis[1] == "e"
         arguments = "const float *s, float *t"
-        first, last = (0, radius) if even_y else (radius + 1, 2 * radius)
+        first = 0 if even_y else radius + 1
         source = "s + (ptrdiff_t)j * @N@_LINE + x + @N@_RADIUS"
         pre = _step(group, "@N@_LOAD(r)", f"@N@_LOAD(r{second})") if even_x else []
-        start, stop = 1, radius
+        start, width = 1, width - even_x
         sign = "+" if even_x else "-"
         values = (
             f"@N@_LOAD(r + i) {sign} @N@_LOAD(r - i)",
             f"@N@_LOAD(r{second} + i) {sign} @N@_LOAD(r{second} - i)",
         )
-    inner = [f"for (i = {start}; i <= {stop}; ++i) {{", *_in(_step(group, *values)), "}"]
+    loop = f"for (i = {start}; i < {start + width}; ++i) {{"
+    inner = [loop, *_in(_step(group, *values)), "}"] if width else []  # or the middle one alone
     block = ["{", *_in(pre), "}"] if pre else []
-    if start > stop:  # a radius of 0 has no columns about the middle
-        inner = []
     body = [
         "int x;",
         "for (x = 0; x < @N@_CHUNK; x += 2 * @N@_LANES) {",
         f"    const float *k = @N@_group{number}_taps;",
         *(f"    @N@_FN(vec) a{n} = {{0.0f}}, b{n} = {{0.0f}};" for n in range(len(group))),
         f"    int j{', i' if inner else ''};",
-        f"    for (j = {first}; j <= {last}; ++j) {{",
+        f"    for (j = {first}; j < {first + height}; ++j) {{",
         f"        const float *const r = {source};",
         *_in(block, 8),
         *_in(inner, 8),

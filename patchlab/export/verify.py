@@ -33,12 +33,13 @@ from patchlab.export.compare import (
 )
 from patchlab.export.onnx import Runner, conv_bound, reference_runner
 from patchlab.export.vectors import Case, Oracle, Pixels, load_cases, make_probes, strongest
+from patchlab.export.wasm import wasm_target
 from patchlab.progress import Progress, silent
 from patchlab.types import F32, Bank, Plan
 
 SelfTestRunner = Callable[[Path], tuple[bool, str]]
 
-__all__ = ["Check", "Target", "Verification", "lines", "verify"]
+__all__ = ["Check", "Target", "Verification", "broken_target", "lines", "verify"]
 
 
 def verify(
@@ -81,6 +82,7 @@ def verify(
     targets = [
         *(engines or {}).values(),
         *_libraries(files, open_library, library),
+        *_wasm(bank, files),
         *_onnx_targets(bank, files),
     ]
     for done, target in enumerate(targets):
@@ -173,17 +175,30 @@ def _opened(files: _Files, name: str, open_library: Callable[[Path], Target]) ->
     except UsageError as error:
         return Target(title, not_run=str(error))
     except (PatchlabError, OSError) as error:
-        return _broken(title, error)
+        return broken_target(title, error)
     return Target(title, opened.responses, opened.edges, opened.bounds)
 
 
-def _broken(title: str, error: Exception) -> Target:
-    """A target that cannot be opened fails as soon as it is run."""
+def broken_target(title: str, error: Exception) -> Target:
+    """A target that cannot be opened: it fails as soon as it is run."""
 
     def refuse(pixels: Pixels) -> F32:
         raise VerificationError(str(error))
 
     return Target(title, refuse)
+
+
+def _wasm(bank: Bank, files: _Files) -> Iterator[Target]:
+    """The WebAssembly module, where the folder holds one, in Node."""
+    module, loader = (f"lib/wasm32/{bank.name}.{end}" for end in ("wasm", "mjs"))
+    if module in files.head["files"]:
+        title = f"WebAssembly {module}"
+        try:
+            yield wasm_target(bank, files.read(module), files.read(loader))
+        except UsageError as error:
+            yield Target(title, not_run=str(error))
+        except PatchlabError as error:
+            yield broken_target(title, error)
 
 
 # ---------------------------------------------------------------- ONNX
@@ -204,7 +219,7 @@ def _onnx_targets(bank: Bank, files: _Files) -> Iterator[Target]:
             yield Target(title, not_run=str(error))
             continue
         except Exception as error:  # a damaged file makes each runtime raise its own kind
-            yield _broken(title, error)
+            yield broken_target(title, error)
             continue
         yield _onnx_target(title, bank, plain, edges, slow=title == "onnx reference")
 

@@ -8,10 +8,12 @@ from pathlib import Path
 from typing import Any
 
 from patchlab import bank as banks
-from patchlab import export, store
-from patchlab.errors import UsageError
-from patchlab.pipeline.desk import Desk
+from patchlab import edges, export, store
+from patchlab.edges import thin
+from patchlab.errors import PatchlabError, UsageError
+from patchlab.pipeline.desk import Desk, may_write
 from patchlab.progress import Progress, silent
+from patchlab.settings import Settings
 from patchlab.types import Bank, Plan
 
 
@@ -60,11 +62,12 @@ def write_bundle(
     files = dict(export.emit(bank, plan))
     files |= export.emit_selftest(bank, plan, _selftest_cases(bank, plan))
     desk.progress("export", 1, 4, "C source")
-    library, said = build_library(files, bank.name, desk.settings.library)
+    library, said = build_libraries(files, bank, plan, desk.settings)
     desk.progress("export", 2, 4, "library")
     graph = export.emit_onnx(bank)
     cases = export.make_cases(bank, plan, banks.exact_responses, crop=crop)
     files |= {**library, **graph.files, **export.vector_files(bank, cases)}
+    files |= export.runtime_files(edge_rules(bank))
     desk.progress("export", 3, 4, "ONNX and vectors")
     head = banks.write_bank(
         folder,
@@ -91,6 +94,56 @@ def _selftest_cases(bank: Bank, plan: Plan) -> list[export.SelftestCase]:
     return [(case.name, case.pixels, case.expected, case.tolerance) for case in small]
 
 
+def add_libraries(folder: Path, out: Path, desk: Desk, *, force: bool) -> Written:
+    """Write a bank that stands anew, with the libraries of the targets asked for added.
+
+    Raises
+    ------
+    UsageError : a target that cannot be built, or the output stands and may not be replaced.
+    VerificationError : a file was changed since it was written, or a target differs.
+    """
+    export.parse_targets(desk.settings.target)
+    if out != folder:
+        may_write(out, force)
+    bank, plan, head = banks.read_bank(folder)
+    files = {name: store.read_file(folder, head, name) for name in head["files"]}
+    library, said = build_libraries(files, bank, plan, desk.settings)
+    own = banks.bank_files(bank, plan)[0]
+    files = {name: data for name, data in (files | library).items() if name not in own}
+    about = {key: head[key] for key in ("seed", "settings", "inputs", "parents")}
+    head = banks.write_bank(out, bank, plan, files, force=True, **about)
+    proof = prove(out, bank, plan, head, desk.progress)
+    error = proof.error()
+    if error is not None:
+        raise error
+    graph = f"{bank.name}.onnx" in files
+    return Written(out, bank, plan, head, proof, said, "kept" if graph else "none")
+
+
+def edge_rules(bank: Bank) -> dict[str, Any] | None:
+    """How responses become edges, as plain data for the runtime; None where they cannot."""
+    try:
+        shapes = edges.shapes_of(bank)
+    except UsageError:
+        return None
+    known = bank.thresholds
+    return {
+        "hysteresis": thin.HYSTERESIS if known is None else known.hysteresis,
+        "dilation_px": thin.DILATION_PX,
+        "relative_floor": thin.RELATIVE_FLOOR,
+        "window_sigmas": thin.WINDOW_SIGMAS,
+        "scales": [
+            {
+                "scale": s.scale,
+                "angles_rad": s.angles.tolist(),
+                "sigma_px": s.sigma_px,
+                "reach_px": s.reach_px,
+            }
+            for s in shapes
+        ],
+    }
+
+
 def build_library(
     files: Mapping[str, bytes], name: str, wanted: bool
 ) -> tuple[dict[str, bytes], str]:
@@ -105,11 +158,31 @@ def build_library(
     return {path: built}, f"{path}, by {compiler.version}"
 
 
+def build_libraries(
+    files: Mapping[str, bytes], bank: Bank, plan: Plan, settings: Settings
+) -> tuple[dict[str, bytes], str]:
+    """The libraries of every target asked for, and what to say of them."""
+    targets = export.parse_targets(settings.target)
+    wanted = settings.library and export.HOST in targets
+    library, said = build_library(files, bank.name, wanted)
+    for target in targets:
+        if target != export.HOST:
+            made = export.cross_compile(files, bank, plan, target)
+            library |= {path: data for path, data in made.items() if path not in library}
+            said += f"; {export.library_path(bank.name, target)}"
+    return library, said
+
+
+def own_library(bank: Bank) -> str:
+    """Where the library of this machine stands in a bank's folder."""
+    return f"lib/{export.target_name()}/{export.library_name(bank.name)}"
+
+
 def open_native(
     folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any]
 ) -> banks.NativeBank | None:
     """The bank's library for this machine, or None where the folder holds none."""
-    path = f"lib/{export.target_name()}/{export.library_name(bank.name)}"
+    path = own_library(bank)
     if path not in head["files"]:
         return None
     return banks.load_native(folder, bank, plan, head, path)
@@ -124,6 +197,8 @@ def prove(
         lambda pixels: banks.responses(bank, pixels, plan),
         lambda pixels, scale: banks.strength(bank, pixels, scale, plan),
     )
+
+    engines = {"engine": engine, **_runtimes(folder, bank, head)}
 
     def open_library(path: Path) -> export.Target:
         relative = path.relative_to(folder).as_posix()
@@ -145,8 +220,36 @@ def prove(
         plan,
         head,
         oracle=banks.exact_responses,
-        engines={"engine": engine},
+        engines=engines,
         open_library=open_library,
         run_selftest=selftest,
         progress=progress,
     )
+
+
+def _runtimes(folder: Path, bank: Bank, head: Mapping[str, Any]) -> dict[str, export.Target]:
+    """The folder's Python runtime, with numpy alone and with this machine's library."""
+    if export.RUNTIME not in head["files"]:
+        return {"runtime": export.Target("Python runtime", not_run="the folder holds none")}
+    try:
+        module = export.open_runtime(store.read_file(folder, head, export.RUNTIME))
+    except PatchlabError as error:
+        return {"runtime": export.broken_target("Python runtime", error)}
+    found = {"numpy": _runtime("Python runtime, numpy", module, folder, bank, False)}
+    if own_library(bank) in head["files"]:
+        found["library"] = _runtime("Python runtime, library", module, folder, bank, True)
+    return found
+
+
+def _runtime(name: str, module: Any, folder: Path, bank: Bank, library: bool) -> export.Target:
+    try:
+        loaded = module.load(folder, library=library)
+    except Exception as error:  # the folder's code, and a folder that may be damaged
+        return export.broken_target(name, error)
+    strengths = None
+    if loaded.scales:
+
+        def strengths(pixels: Any, place: int) -> Any:
+            return loaded.strengths(pixels, loaded.scales[place])
+
+    return export.Target(name, loaded.responses, strengths)

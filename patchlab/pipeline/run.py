@@ -13,8 +13,9 @@ import numpy as np
 from patchlab import bank as banks
 from patchlab import camera, edges, images, learn, shapes, store
 from patchlab.errors import InputError, UsageError
+from patchlab.export import parse_targets
 from patchlab.pipeline import tell
-from patchlab.pipeline.bundle import write_bundle
+from patchlab.pipeline.bundle import add_libraries, write_bundle
 from patchlab.pipeline.desk import RECIPE, Desk, bank_name, may_write
 from patchlab.pipeline.keep import Keeper
 from patchlab.types import (
@@ -276,6 +277,8 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
     ------
     InputError, UsageError, Interrupted : finished stages are kept.
     """
+    if until == "run":
+        parse_targets(desk.settings.target)  # what cannot be built is said before the work
     intake = take_in(photos, desk)
     found, survey_head = survey(intake, desk)
     if until == "survey":
@@ -317,8 +320,11 @@ def fit_run(desk: Desk) -> dict[str, Any]:
 
 
 def export_run(desk: Desk, out: Path | None, *, force: bool) -> dict[str, Any]:
-    """Choose and export a bank from a run's fits."""
+    """Choose and export a bank from a run's fits; to a bank's folder add the targets asked for."""
+    if (desk.out / "bank.json").is_file():
+        return tell.bank(add_libraries(desk.out, out or desk.out, desk, force=force))
     folder = out or desk.out / "bank"
+    parse_targets(desk.settings.target)
     may_write(folder, force)
     dictionary, _ = _learned(desk)
     fits, fits_head = store.load(desk.out / "fits", "fits")
@@ -336,6 +342,7 @@ def export_taps(path: Path, desk: Desk, *, force: bool) -> dict[str, Any]:
     """Make a bank from kernels in a ``.npy`` file."""
     may_write(desk.out, force)
     s = desk.settings
+    parse_targets(s.target)
     try:
         data = path.read_bytes()
         taps = np.load(io.BytesIO(data), allow_pickle=False)

@@ -20,6 +20,7 @@ from patchlab.conventions import shift_cosine
 from patchlab.errors import InputError, PatchlabError, UsageError
 from patchlab.pipeline.bundle import open_native, prove
 from patchlab.pipeline.desk import may_write
+from patchlab.pipeline.loaded import bank_folder
 from patchlab.progress import Progress, silent
 from patchlab.types import (
     Bank,
@@ -37,13 +38,6 @@ SHOWN_WITHOUT_PROMISE = 0.98
 """Quantile of the responses that serves the page's example where noise is not known."""
 
 Draw = Callable[[Frame, EdgeMap, int], Mapping[str, bytes]]
-
-
-def bank_folder(path: Path) -> Path:
-    """The bank at a path: the folder itself, or the bank inside a run's folder."""
-    if not (path / "bank.json").is_file() and (path / "bank" / "bank.json").is_file():
-        return path / "bank"
-    return path
 
 
 # ---------------------------------------------------------------- verify

@@ -150,3 +150,23 @@ def test_the_interface_number_follows_the_content():
     assert len(numbers) == 5
     assert make_plan(lattice_bank()).detail["abi"] == make_plan(bank).detail["abi"]
     assert all(0 < n < 2**31 for n in numbers)
+
+
+@pytest.mark.parametrize("kind", ["direct", "parity"])
+def test_zeros_at_the_rim_cost_nothing(kind):
+    wide = given_bank(np.pad(random_bank(3, 5).taps, ((0, 0), (3, 3), (3, 3))))
+    plan = make_plan(wide, kind)
+    assert plan.multiplies == 3 * 25
+    assert plan.error_bound == make_plan(random_bank(3, 5), kind).error_bound
+    for rebuilt, taps in zip(rebuilt_taps(plan, 11), wide.taps, strict=True):
+        np.testing.assert_allclose(rebuilt, taps, rtol=0, atol=4 * UNIT_ROUNDOFF)
+
+
+def test_oblong_support_is_cut_along_both_sides():
+    taps = np.zeros((2, 9, 9))
+    taps[0, 4, 1:8] = np.arange(7.0)
+    taps[1, 3:6, 4] = (1.0, 5.0, 2.0)
+    plan = make_plan(given_bank(taps), "direct")
+    assert [c.shape for c in plan.detail["coefficients"]] == [(1, 7), (3, 1)]
+    assert plan.multiplies == 10
+    assert len(plan.detail["product_groups"]) == 2

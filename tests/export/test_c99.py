@@ -78,6 +78,17 @@ VARIANTS = {
     ),
     "direct": (random_bank(7, 5, border="mirror"), "direct"),
     "parts": (random_bank(3, 5, border="wrap", pixels="Mono16"), "parity"),
+    "padded": (
+        given_bank(
+            np.concatenate([
+                np.pad(random_bank(2, 3).taps, ((0, 0), (2, 2), (3, 1))),
+                np.pad(lattice_bank(widths=((1.0, 1.5),), count=2, size=5).taps,
+                       ((0, 0), (1, 1), (1, 1))),
+            ]),
+            "padded",
+        ),
+        "auto",
+    ),
     "small": (
         given_bank(
             [[[0.5]], [[-0.5]], [[0.0]], [[3.0]]], "small", pixels="float32", border="mirror"
