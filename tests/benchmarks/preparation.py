@@ -60,20 +60,15 @@ VARIANTS: dict[str, dict[str, Any]] = {
 }
 AGAINST_NOISE: dict[str, dict[str, Any]] = {
     "contrast 2 sd, share 0.5": {},
-    "neither rule": {"multiple": 0.0, "share": np.inf},
+    "contrast 1.25 sd, share 0.5": {"multiple": 1.25},
+    "contrast 1.25 sd, share 0.5, no flattest dropped": {"multiple": 1.25, "flat": 0.0},
     "share 0.5 only": {"multiple": 0.0},
+    "share 0.5 only, no flattest dropped": {"multiple": 0.0, "flat": 0.0},
+    "share 0.3 only": {"multiple": 0.0, "share": 0.3},
+    "neither rule": {"multiple": 0.0, "share": np.inf},
     "contrast 1.5 sd only": {"multiple": 1.5, "share": np.inf},
-    "contrast 1.5 sd, share 0.5": {"multiple": 1.5},
-    "contrast 1.5 sd, share 0.3": {"multiple": 1.5, "share": 0.3},
     "contrast 3 sd, share 0.5": {"multiple": 3.0},
 }
-
-
-def toned(plane: np.ndarray, tone: str) -> np.ndarray:
-    light = np.maximum(plane, 0)
-    return {"log": lambda: np.log(light + 0.01), "sqrt": lambda: np.sqrt(light)}.get(
-        tone, lambda: light
-    )()
 
 
 def steepest(rows: np.ndarray, flat: float) -> np.ndarray:
