@@ -381,12 +381,28 @@ def report(run: Path, terminal: Terminal, as_json: bool) -> None:
 @patchlab.command()
 @click.argument("first", type=FOLDER)
 @click.argument("second", type=FOLDER)
+@click.option("-o", "--out", type=FOLDER, help="Folder for pictures of the pairs and differences.")
+@click.option("--force", is_flag=True, help="Replace what stands there.")
 @_shared
-def compare(first: Path, second: Path, terminal: Terminal, as_json: bool) -> None:
-    """Match two dictionaries or two banks: bit-equal, equivalent or different."""
-    from patchlab.pipeline import use
+def compare(first: Path, second: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
+    """Match two dictionaries, fits or banks: bit-equal, equivalent or different.
 
-    _print(use.compare(first, second), as_json, _rows)
+    They may come from different cameras: their shapes are compared as crowds too.
+    """
+    from patchlab.pipeline import compare as pairs
+    from patchlab.pipeline.desk import may_write
+
+    if options["out"] is not None:
+        may_write(options["out"], options["force"])
+    found = pairs.compare(first, second)
+    result = found.plain()
+    if options["out"] is not None:
+        from patchlab import report, store
+
+        for name, data in report.comparison_pictures(found).items():
+            store.write_file(options["out"] / name, data)
+        result["pictures"] = str(options["out"])
+    _print(result, as_json, _rows)
 
 
 @patchlab.command()

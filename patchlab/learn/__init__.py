@@ -11,7 +11,7 @@ from patchlab.learn.ica import learn_ica
 from patchlab.learn.order import amari_index, match
 from patchlab.learn.pca import learn_pca
 from patchlab.learn.sparse import SparseState, encode, learn_sparse, penalty_from_noise
-from patchlab.learn.sure import shape_numbers, shape_spread
+from patchlab.learn.sure import crowd_distance, shape_numbers, shape_spread
 from patchlab.learn.whiten import Moments, moments, noise_covariance, whiten, whitening
 
 __all__ = [
@@ -20,6 +20,7 @@ __all__ = [
     "SparseState",
     "amari_index",
     "choose_components",
+    "crowd_distance",
     "encode",
     "lasso",
     "learn_ica",

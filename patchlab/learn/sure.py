@@ -114,11 +114,25 @@ def shape_spread(known: Dictionary) -> dict[str, dict[str, float]]:
     out = {}
     for name in SHAPES:
         pairs = combinations([n[name] for n in numbers], 2)
-        circular = name == "orientation"
-        distance = max(_distance(a, b, circular) for a, b in pairs)
-        chance = (1.747 if circular else 1.358) * (2 / k) ** 0.5
-        out[name] = {"distance": distance, "chance": chance}
+        found = [crowd_distance(a, b, name == "orientation") for a, b in pairs]
+        out[name] = {"distance": max(d for d, _ in found), "chance": found[0][1]}
     return out
+
+
+def crowd_distance(a: F64, b: F64, circular: bool) -> tuple[float, float]:
+    """How far two samples (n,) and (m,) differ, and what chance exceeds once in twenty.
+
+    Kolmogorov-Smirnov's distance, Kuiper's when ``circular``; the asymptotic quantiles of
+    Stephens 1970.
+
+    Examples
+    --------
+    >>> distance, chance = crowd_distance(np.arange(50.0), np.arange(50.0) + 5, False)
+    >>> round(distance, 6), round(chance, 3)
+    (0.1, 0.272)
+    """
+    chance = (1.747 if circular else 1.358) * (1 / len(a) + 1 / len(b)) ** 0.5
+    return _distance(a, b, circular), float(chance)
 
 
 def _distance(a: F64, b: F64, circular: bool) -> float:

@@ -1,4 +1,4 @@
-"""What is done with a bank or a run that stands: verify, detect, bench, compare, reopen.
+"""What is done with a bank or a run that stands: verify, detect, bench, reopen.
 
 Nothing here needs the learner: a bank runs where numba and scikit-learn are absent.
 """
@@ -16,7 +16,6 @@ import numpy as np
 
 from patchlab import bank as banks
 from patchlab import edges, export, images, store
-from patchlab.conventions import shift_cosine
 from patchlab.errors import InputError, PatchlabError, UsageError
 from patchlab.pipeline.bundle import open_native, prove
 from patchlab.pipeline.desk import may_write
@@ -158,46 +157,6 @@ def _detect_one(
 def orientation_count(bank: Bank) -> int:
     """Directions on the bank's lattice."""
     return 1 + max((k.orientation or 0 for k in bank.kernels), default=0)
-
-
-# ---------------------------------------------------------------- compare
-
-
-def compare(first: Path, second: Path) -> dict[str, Any]:
-    """Match two dictionaries or two banks: bit-equal, equivalent (|cos| >= 0.999) or different."""
-    kind, a, one = _comparable(first)
-    other, b, two = _comparable(second)
-    if kind != other:
-        raise UsageError(f"cannot compare a {kind} with a {other}")
-    if kind == "dictionary":
-        from patchlab import learn  # only here: a bank runs without the learner
-
-        _, signed = learn.match(*sorted((a, b), key=len))
-        cosines = np.abs(signed)
-    else:
-        cosines = np.array([max(shift_cosine(k, m) for m in b) for k in a])
-    same_bytes = one == two
-    equal = a.shape == b.shape and bool((cosines >= 0.999).all())
-    return {
-        "kind": kind,
-        "verdict": "bit-equal" if same_bytes else "equivalent" if equal else "different",
-        "first": len(a),
-        "second": len(b),
-        "worst_cosine": round(float(cosines.min()), 6),
-        "median_cosine": round(float(np.median(cosines)), 6),
-        "matched_at_0.95": round(float((cosines >= 0.95).mean()), 4),
-    }
-
-
-def _comparable(path: Path) -> tuple[str, Any, Any]:
-    folder = bank_folder(path)
-    if (folder / "bank.json").is_file():
-        bank, _, head = banks.read_bank(folder)
-        return "bank", bank.taps.astype(np.float64), head["files"]["kernels.npy"]
-    if (path / "dictionary").is_dir():
-        path = path / "dictionary"
-    (dictionary, _), head = store.load(path, "dictionary")
-    return "dictionary", dictionary.atoms, head["files"]["0.atoms.npy"]
 
 
 # ---------------------------------------------------------------- scenes

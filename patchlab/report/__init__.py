@@ -1,6 +1,7 @@
 """Pictures for people: mosaics, plots and the page of a run."""
 
+from patchlab.report.compare import comparison_pictures
 from patchlab.report.mosaic import edge_pictures
 from patchlab.report.page import write
 
-__all__ = ["edge_pictures", "write"]
+__all__ = ["comparison_pictures", "edge_pictures", "write"]

@@ -52,6 +52,7 @@ def mosaic(
     verdicts: Sequence[str] = (),
     across: int = 8,
     zoom: int = 4,
+    as_is: bool = False,
 ) -> bytes:
     """Draw cells of tiles side by side (an atom beside its fit), numbered.
 
@@ -62,12 +63,14 @@ def mosaic(
     verdicts : k of good, poor, failed: the colour of the line under each cell
     across : cells in a row
     zoom : picture pixels for a tap
+    as_is : the tiles are on one scale already; otherwise each is brought to unit norm
 
     Returns
     -------
     bytes of a PNG
     """
-    scaled = [_unit(np.asarray(tiles, dtype=np.float64)) for tiles in columns]
+    scaled = [np.asarray(tiles, dtype=np.float64) for tiles in columns]
+    scaled = scaled if as_is else [_unit(tiles) for tiles in scaled]
     limit = max(limit_of(tiles) for tiles in scaled)
     k, h, w = scaled[0].shape
     cell_w, cell_h = len(scaled) * (w * zoom + 2) - 2, h * zoom

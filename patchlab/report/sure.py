@@ -5,7 +5,6 @@ from __future__ import annotations
 import numpy as np
 from matplotlib.figure import Figure
 
-from patchlab.learn import shape_numbers, shape_spread
 from patchlab.report.plots import AMBER, SLATE, TEAL, _figure
 from patchlab.types import ComponentChoice, Dictionary
 
@@ -18,6 +17,7 @@ def measured(known: Dictionary) -> bool:
 
 def how_sure(known: Dictionary) -> bytes:
     """Left: how well each component is found again. Right: frequencies, restart by restart."""
+    from patchlab import learn  # only here: edges are drawn without the learner
 
     def draw(figure: Figure) -> None:
         left, right = figure.subplots(1, 2)
@@ -34,7 +34,7 @@ def how_sure(known: Dictionary) -> bytes:
         left.legend()
         sets = known.pooled_atoms.reshape(-1, len(known), known.size, known.size)
         for i, atoms in enumerate(sets):
-            at = np.sort(shape_numbers(atoms)["frequency"])
+            at = np.sort(learn.shape_numbers(atoms)["frequency"])
             colour = TEAL if i == 0 else SLATE
             right.step(at, np.linspace(0, 100, at.size), color=colour, lw=1.6 if i == 0 else 0.9)
         right.set(
@@ -70,6 +70,8 @@ def component_choice(choice: ComponentChoice) -> bytes:
 
 def in_words(known: Dictionary) -> str:
     """What the picture says, in a sentence or two."""
+    from patchlab import learn
+
     said = []
     starts = len(known.pooled_atoms) // len(known)
     for values, where in (
@@ -81,7 +83,7 @@ def in_words(known: Dictionary) -> str:
             said.append(
                 f"{share:.0f} % of the components are found again at |cos| above 0.9 {where}."
             )
-    spread = shape_spread(known)
+    spread = learn.shape_spread(known)
     if spread:
         told = ", ".join(f"{n} {s['distance']:.2f} ({s['chance']:.2f})" for n, s in spread.items())
         said.append(

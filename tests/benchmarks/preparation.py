@@ -39,6 +39,7 @@ class Preparation:
     tone: str = "log"
     normalise: bool = True
     flat: float = 0.3
+    by_picture: bool = False
     retain: float = 0.98
     multiple: float = 2.0
     share: float = 0.5
@@ -50,6 +51,8 @@ VARIANTS: dict[str, dict[str, Any]] = {
     "square root of light": {"tone": "sqrt"},
     "linear light": {"tone": "linear"},
     "no flattest dropped": {"flat": 0.0},
+    "flattest 15 % dropped": {"flat": 0.15},
+    "flattest 30 % of each picture dropped": {"by_picture": True},
     "flattest 60 % dropped": {"flat": 0.6},
     "retain 0.95": {"retain": 0.95},
     "retain 0.99": {"retain": 0.99},
@@ -57,20 +60,20 @@ VARIANTS: dict[str, dict[str, Any]] = {
 }
 AGAINST_NOISE: dict[str, dict[str, Any]] = {
     "contrast 2 sd, share 0.5": {},
-    "neither rule": {"multiple": 0.0, "share": np.inf},
+    "contrast 1.25 sd, share 0.5": {"multiple": 1.25},
+    "contrast 1.25 sd, share 0.5, no flattest dropped": {"multiple": 1.25, "flat": 0.0},
     "share 0.5 only": {"multiple": 0.0},
+    "share 0.5 only, no flattest dropped": {"multiple": 0.0, "flat": 0.0},
+    "share 0.3 only": {"multiple": 0.0, "share": 0.3},
+    "neither rule": {"multiple": 0.0, "share": np.inf},
     "contrast 1.5 sd only": {"multiple": 1.5, "share": np.inf},
-    "contrast 1.5 sd, share 0.5": {"multiple": 1.5},
-    "contrast 1.5 sd, share 0.3": {"multiple": 1.5, "share": 0.3},
     "contrast 3 sd, share 0.5": {"multiple": 3.0},
 }
 
 
-def toned(plane: np.ndarray, tone: str) -> np.ndarray:
-    light = np.maximum(plane, 0)
-    return {"log": lambda: np.log(light + 0.01), "sqrt": lambda: np.sqrt(light)}.get(
-        tone, lambda: light
-    )()
+def steepest(rows: np.ndarray, flat: float) -> np.ndarray:
+    """Without the flattest share."""
+    return rows[np.argsort(-rows.std(axis=1))[: int(len(rows) * (1 - flat))]]
 
 
 def draw(planes, how: Preparation, noise_sd: float, count: int, size: int, seed: int) -> PatchSet:
@@ -84,9 +87,11 @@ def draw(planes, how: Preparation, noise_sd: float, count: int, size: int, seed:
         x = r.integers(0, plane.shape[1] - size + 1, each * 3)
         windows = np.lib.stride_tricks.sliding_window_view(values, (size, size))
         found = windows[y, x].reshape(len(y), -1)
-        rows.append(found[found.std(axis=1) > max(how.multiple * noise_sd, 1e-9)][:each])
+        found = found[found.std(axis=1) > max(how.multiple * noise_sd, 1e-9)][:each]
+        rows.append(steepest(found, how.flat) if how.by_picture else found)
     all_rows = np.concatenate(rows)
-    all_rows = all_rows[np.argsort(-all_rows.std(axis=1))[: int(len(all_rows) * (1 - how.flat))]]
+    if not how.by_picture:
+        all_rows = steepest(all_rows, how.flat)
     all_rows = all_rows[r.permutation(len(all_rows))]
     dc, contrast = all_rows.mean(axis=1), all_rows.std(axis=1)
     if not how.normalise:
@@ -167,11 +172,13 @@ def main() -> None:
     parser.add_argument("--size", type=int, default=12)
     parser.add_argument("--seeds", type=int, default=2)
     parser.add_argument("-o", "--out", type=Path)
+    parser.add_argument("--only", action="append", help="a variant's name; may be repeated")
     options = parser.parse_args()
     clean, base, table = pictures(options.photos), Preparation(), []
     reference = learned(clean, base, 0.0, options.patches, options.size, 0).atoms
     variants = AGAINST_NOISE if options.noise else VARIANTS
-    for name, change in variants.items():
+    for name in options.only or variants:
+        change = variants[name]
         began = time.process_time()
         how = replace(base, **change)
         found = [
