@@ -170,7 +170,8 @@ def unpack(data: Any, read: Callable[[str], bytes]) -> Any:
 
 def _safe(name: str) -> PurePosixPath:
     path = PurePosixPath(name)
-    if path.is_absolute() or ".." in path.parts or not path.parts or set("\\:\0") & set(name):
+    leads_out = path.is_absolute() or ".." in path.parts or not path.parts
+    if leads_out or set("\\:") & set(name) or not name.isprintable() or len(name) > 300:
         raise VerificationError(
             f"a file name {shown(name)!r} in the manifest leads out of the folder"
         )
