@@ -13,6 +13,7 @@ import dataclasses
 import hashlib
 import io
 import json
+import math
 import os
 import platform
 import shutil
@@ -32,6 +33,17 @@ LICENCE = (
     "The content of this folder is its maker's own. The parts that come from patchlab's "
     "templates are granted to everyone for any use, without conditions or attribution."
 )
+
+
+def shown(value: object, most: int = 60) -> str:
+    """A value from a file, fit for a sentence: short, in one line, printable.
+
+    >>> shown("two\\nlines"), shown("long " * 40, 12)
+    ('two?lines', 'long long lo...')
+    """
+    text = str(value)
+    clean = "".join(c if c.isprintable() else "?" for c in text[:most])
+    return clean if len(text) <= most else clean + "..."
 
 
 def sha256(data: bytes) -> str:
@@ -60,9 +72,23 @@ def npy_array(data: bytes, where: str) -> np.ndarray[Any, Any]:
     InputError : the bytes are no such file.
     """
     try:
+        _check_npy_size(data)
         return np.lib.format.read_array(io.BytesIO(data), allow_pickle=False)
     except Exception as error:  # numpy's reader raises many kinds over a damaged header
         raise InputError(f"is not an array ({type(error).__name__})", where=where) from None
+
+
+def _check_npy_size(data: bytes) -> None:
+    """Refuse a header that promises other than what follows, before memory is taken for it."""
+    file = io.BytesIO(data)
+    version = np.lib.format.read_magic(file)
+    read = {
+        (1, 0): np.lib.format.read_array_header_1_0,
+        (2, 0): np.lib.format.read_array_header_2_0,
+    }
+    shape, _, dtype = read[version](file)
+    if math.prod(shape) * dtype.itemsize != len(data) - file.tell():
+        raise ValueError("its header does not fit its size")
 
 
 def environment() -> dict[str, str]:
@@ -132,11 +158,11 @@ def unpack(data: Any, read: Callable[[str], bytes]) -> Any:
     if "is" not in data:
         return values
     if data["is"] not in _NOUNS:
-        raise InputError(f"unknown kind of content {data['is']!r}", remedy="update patchlab")
+        raise InputError(f"unknown kind of content {shown(data['is'])!r}", remedy="update patchlab")
     try:
         return _NOUNS[data["is"]](**values)
     except (TypeError, ValueError) as error:
-        raise InputError(f"damaged content: {error}") from None
+        raise InputError(f"damaged content: {shown(error, 200)}") from None
 
 
 # ---------------------------------------------------------------- folders
@@ -144,8 +170,11 @@ def unpack(data: Any, read: Callable[[str], bytes]) -> Any:
 
 def _safe(name: str) -> PurePosixPath:
     path = PurePosixPath(name)
-    if path.is_absolute() or ".." in path.parts or not path.parts or "\\" in name or ":" in name:
-        raise VerificationError(f"a file name {name!r} in the manifest leads out of the folder")
+    leads_out = path.is_absolute() or ".." in path.parts or not path.parts
+    if leads_out or set("\\:") & set(name) or not name.isprintable() or len(name) > 300:
+        raise VerificationError(
+            f"a file name {shown(name)!r} in the manifest leads out of the folder"
+        )
     return path
 
 
@@ -247,6 +276,11 @@ def write_file(path: Path, data: bytes) -> None:
         raise
 
 
+def _check_plain(path: Path) -> None:
+    if path.exists() and not path.is_file():  # a pipe or a device would never end
+        raise VerificationError("is not a plain file", where=str(path))
+
+
 def read_manifest(folder: Path, kind: str, *, manifest: str = "manifest.json") -> dict[str, Any]:
     """Read and check a manifest.
 
@@ -257,21 +291,23 @@ def read_manifest(folder: Path, kind: str, *, manifest: str = "manifest.json") -
     """
     path = Path(folder) / manifest
     try:
+        _check_plain(path)
         head = json.loads(path.read_bytes())
     except FileNotFoundError:
         raise InputError(f"there is no {kind} here", where=str(folder)) from None
-    except (OSError, ValueError) as error:
-        raise InputError(f"cannot read the manifest: {error}", where=str(path)) from None
+    except (OSError, ValueError, RecursionError) as error:
+        reason = shown(error, 200)
+        raise InputError(f"cannot read the manifest: {reason}", where=str(path)) from None
     if not isinstance(head, dict) or head.get("format") != FORMAT:
         raise InputError("this manifest is not patchlab's", where=str(path))
     if str(head.get("version", "")).split(".")[0] != VERSION.split(".")[0]:
         raise InputError(
-            f"format version {head.get('version')} is not known here (this is {VERSION})",
+            f"format version {shown(head.get('version'))} is not known here (this is {VERSION})",
             where=str(path),
             remedy="update patchlab",
         )
     if head.get("kind") != kind:
-        raise InputError(f"this is a {head.get('kind')}, not a {kind}", where=str(folder))
+        raise InputError(f"this is a {shown(head.get('kind'))}, not a {kind}", where=str(folder))
     if not isinstance(head.get("files"), dict):
         raise InputError("the manifest lists no files", where=str(path))
     for name in head["files"]:
@@ -290,6 +326,7 @@ def read_file(folder: Path, head: Mapping[str, Any], name: str) -> bytes:
     if name not in head["files"]:
         raise VerificationError("the manifest does not know this file", where=str(path))
     try:
+        _check_plain(path)
         data = path.read_bytes()
     except OSError as error:
         raise VerificationError(f"cannot be read ({error.strerror})", where=str(path)) from None
@@ -316,5 +353,11 @@ def save(folder: Path, kind: str, noun: Any, **about: Any) -> dict[str, Any]:
 def load(folder: Path, kind: str) -> tuple[Any, dict[str, Any]]:
     """Read a noun and its manifest; every file's hash is checked as it is read."""
     head = read_manifest(folder, kind)
-    content = json.loads(read_file(folder, head, "content.json"))
-    return unpack(content, lambda name: read_file(folder, head, name)), head
+    data = read_file(folder, head, "content.json")
+    try:
+        content = json.loads(data)
+        return unpack(content, lambda name: read_file(folder, head, name)), head
+    except (KeyError, TypeError, ValueError, AttributeError, RecursionError) as error:
+        raise InputError(
+            f"damaged content ({type(error).__name__})", where=str(folder / "content.json")
+        ) from None

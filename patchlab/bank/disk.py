@@ -27,6 +27,7 @@ from patchlab.store import (
     read_file,
     read_manifest,
     sha256,
+    shown,
     write_artefact,
 )
 from patchlab.types import (
@@ -248,11 +249,12 @@ def read_bank(folder: Path) -> tuple[Bank, Plan, dict[str, Any]]:
         plan = _plan(head, bank)
     except (KeyError, TypeError, ValueError, AttributeError, OverflowError) as error:
         raise InputError(
-            f"the manifest makes no sense ({type(error).__name__}: {error})",
+            f"the manifest makes no sense ({type(error).__name__}: {shown(error, 200)})",
             where=str(folder / MANIFEST),
         ) from None
     except UsageError as error:
-        raise InputError(error.what, where=str(folder / MANIFEST), remedy=error.remedy) from None
+        what = shown(error.what, 300)
+        raise InputError(what, where=str(folder / MANIFEST), remedy=error.remedy) from None
     return bank, plan, head
 
 
@@ -287,7 +289,7 @@ def _array(folder: Path, head: Mapping[str, Any], name: str) -> NDArray[Any]:
 
 def _one_of(value: Any, known: Any, what: str) -> Any:
     if value not in known:
-        raise InputError(f"unknown {what} {value!r}", remedy=f"known are {', '.join(known)}")
+        raise InputError(f"unknown {what} {shown(value)!r}", remedy=f"known are {', '.join(known)}")
     return value
 
 

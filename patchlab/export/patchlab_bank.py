@@ -125,11 +125,11 @@ class Bank:
         self.folder, self.manifest = folder, manifest
         try:
             self._fill()
-        except (KeyError, TypeError, ValueError, AttributeError, IndexError) as error:
+        except (LookupError, TypeError, ValueError, AttributeError, OverflowError) as error:
             if isinstance(error, BankError):
                 raise
             raise BankError(
-                f"{folder / MANIFEST}: makes no sense ({type(error).__name__}: {error})"
+                f"{folder / MANIFEST}: makes no sense ({type(error).__name__})"
             ) from None
 
     def _fill(self) -> None:
@@ -324,6 +324,10 @@ class Bank:
         edges, level = _cascade(planes, low, high, int(rules["dilation_px"]))
         return _joined(maps, [s["scale"] for s in rules["scales"]], edges, level, high)
 
+    def last_turn(self, scale: int) -> int:
+        """The largest number that names a direction of a scale."""
+        return max(turn for turn, _ in self._members[scale])
+
     def _high(self, rate: float | None, threshold: float | None) -> float:
         if threshold is None:
             return self.threshold(RATE if rate is None else rate)
@@ -336,10 +340,44 @@ class Bank:
     def _rules(self) -> dict[str, Any]:
         if "edges.json" not in self.manifest["files"]:
             raise BankError(f"bank {self.name} has no kernels that find edges")
-        rules = json.loads(_read(self.folder, self.manifest, "edges.json"))
-        if any(s["scale"] not in self.scales for s in rules["scales"]):
-            raise BankError(f"{self.folder}: edges.json does not fit the bank")
-        return dict(rules)
+        data = _read(self.folder, self.manifest, "edges.json")
+        try:
+            rules = _checked_rules(json.loads(data), self)
+        except (KeyError, TypeError, ValueError, OverflowError, RecursionError):
+            raise BankError(f"{self.folder / 'edges.json'}: makes no sense") from None
+        return rules
+
+
+def _checked_rules(given: Mapping[str, Any], bank: Bank) -> dict[str, Any]:
+    """How strengths become edges, every number within its range; anything else is an error."""
+
+    def number(value: Any, low: float, high: float) -> float:
+        if not low <= float(value) <= high:
+            raise ValueError("out of range")
+        return float(value)
+
+    scales = []
+    for entry in given["scales"]:
+        angles = [number(a, -7, 7) for a in entry["angles_rad"]]
+        if entry["scale"] not in bank.scales or len(angles) < 1 + bank.last_turn(entry["scale"]):
+            raise ValueError("does not fit the bank")
+        scales.append(
+            {
+                "scale": int(entry["scale"]),
+                "angles_rad": angles,
+                "sigma_px": number(entry["sigma_px"], 0, bank.size),
+                "reach_px": int(number(entry["reach_px"], 0, bank.radius)),
+            }
+        )
+    if not scales:
+        raise ValueError("no scales")
+    return {
+        "hysteresis": number(given["hysteresis"], 1e-3, 1),
+        "dilation_px": int(number(given["dilation_px"], 0, 64)),
+        "relative_floor": number(given["relative_floor"], 0, 1),
+        "window_sigmas": number(given["window_sigmas"], 0, 16),
+        "scales": scales,
+    }
 
 
 def _members(
@@ -350,7 +388,10 @@ def _members(
     for i, kernel in enumerate(kernels):
         if kernel["scale"] is not None and kernel["parity"] in PARITIES[strength]:
             sides = found.setdefault(int(kernel["scale"]), {})
-            sides.setdefault(kernel["parity"], []).append((kernel["orientation"] or 0, i))
+            turn = int(kernel["orientation"] or 0)
+            if not 0 <= turn <= 255:
+                raise ValueError("an orientation is numbered from 0 to 255")
+            sides.setdefault(kernel["parity"], []).append((turn, i))
     out = {}
     for scale, sides in found.items():
         if len(sides) == len(PARITIES[strength]):
@@ -593,7 +634,7 @@ def _open(data: bytes, name: str) -> ctypes.CDLL:
 def _manifest(folder: Path) -> dict[str, Any]:
     path = folder / MANIFEST
     try:
-        head = json.loads(path.read_bytes())
+        head = json.loads(_bytes(path))
     except FileNotFoundError:
         raise BankError(f"{folder}: there is no bank here") from None
     except (OSError, ValueError, RecursionError) as error:
@@ -601,7 +642,8 @@ def _manifest(folder: Path) -> dict[str, Any]:
     if not isinstance(head, dict) or head.get("format") != "patchlab" or head.get("kind") != "bank":
         raise BankError(f"{path}: this is not a bank's manifest")
     if str(head.get("version", "")).split(".")[0] != "1":
-        raise BankError(f"{path}: its format version {head.get('version')} is not known here")
+        version = str(head.get("version"))[:20]
+        raise BankError(f"{path}: its format version {version!r} is not known here")
     content = {k: v for k, v in head.items() if k != "id"}
     try:
         text = json.dumps(content, sort_keys=True, indent=1, ensure_ascii=False, allow_nan=False)
@@ -615,10 +657,16 @@ def _manifest(folder: Path) -> dict[str, Any]:
     return head
 
 
+def _bytes(path: Path) -> bytes:
+    if path.exists() and not path.is_file():  # a pipe or a device would never end
+        raise OSError(0, "it is not a plain file")
+    return path.read_bytes()
+
+
 def _read(folder: Path, head: Mapping[str, Any], name: str) -> bytes:
     """A file of the bank, by one of the names this module asks for, after its hash was checked."""
     try:
-        data = (folder / name).read_bytes()
+        data = _bytes(folder / name)
     except OSError as error:
         raise BankError(f"{folder / name}: cannot be read ({error.strerror})") from None
     if hashlib.sha256(data).hexdigest() != head["files"].get(name):
