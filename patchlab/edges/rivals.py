@@ -41,7 +41,7 @@ class Grid:
 
     def __init__(self, quick: bool = False) -> None:
         self.sigmas = (1.0, 2.0) if quick else (1.0, 1.5, 2.0, 2.8)
-        self.highs = tuple(float(f"{0.35 * 1.5**k:.3g}") for k in range(12))[:: 2 if quick else 1]
+        self.highs = tuple(float(f"{0.4 * 1.6**k:.3g}") for k in range(10))[:: 2 if quick else 1]
         self.ratios = (0.7,) if quick else (0.4, 0.7)
 
     def __iter__(self) -> Iterator[tuple[float, float, float]]:
