@@ -41,8 +41,8 @@ HYSTERESIS = 0.7
 """Elements join above this share of the threshold."""
 EXPOSURES = 5
 """Light levels that a bank has to serve with its one pair of sizes."""
-DIMMEST = 0.05
-"""The lowest of them, as a share of full light."""
+DIMMEST = 0.125
+"""The lowest of them, as a share of full light: three stops down."""
 ASPECT = 1.2
 """Along over across. Between 1 and 1.5 detection changes little, beyond 2 corners and curves
 lose more than straight edges gain."""
