@@ -519,6 +519,7 @@ class Bank:
     strength : "step", "line" or "energy", what NAME_edges computes
     purpose : "edges", "features", "learned" or "taps"
     thresholds, coverage : None when not known
+    line_thresholds : for lines, where the bank has even kernels beside its odd ones
     noise_autocovariance : of the working values, centre 1; None means white
     provenance : plain data for the manifest (settings, seed, inputs, parents)
     """
@@ -535,6 +536,7 @@ class Bank:
     noise_autocovariance: F64 | None = None
     provenance: Mapping[str, Any] = field(default_factory=dict)
     warnings: tuple[str, ...] = ()
+    line_thresholds: Thresholds | None = None
 
     def __post_init__(self) -> None:
         n, h, w = self.taps.shape
@@ -635,6 +637,7 @@ EDGEL = np.dtype(
         ("sd", "f4"),  # standard error of the position along the normal, pixels
         ("scale", "u1"),
         ("kind", "u1"),  # 0 step, 1 bright line, 2 dark line
+        ("width", "f4"),  # of a line, pixels, blur taken out; 0 for a step
     ]
 )  # fmt: skip
 """One edge element. Arrays of edgels are plain structured numpy arrays."""

@@ -182,8 +182,9 @@ def _for_edges(
         ]
         stuck = [not predict.inside(w) for w in across]
     else:
+        bright = predict.tone_contrasts(survey.table) if heights is None else heights
         given = predict.conditions(
-            predict.tone_contrasts(survey.table) if heights is None else heights,
+            np.multiply.outer(predict.dimming(survey.table), bright).ravel(),
             sd,
             survey.blur_sigma_px,
             settings.false_edges,
@@ -196,6 +197,7 @@ def _for_edges(
             "predicted_f": round(best.predicted, 4),
             "blur_px": given.blur_px,
             "contrasts_from": "uniform tones" if heights is None else "the patches",
+            "exposures": predict.EXPOSURES,
         }
     about["atoms_sigma_u_px"] = start
     said += [

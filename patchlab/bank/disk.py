@@ -104,6 +104,7 @@ def _body(bank: Bank, plan: Plan) -> dict[str, Any]:
         "kernels": [_kernel_entry(k) for k in bank.kernels],
         "input": _input_entry(bank.table),
         "thresholds": _thresholds_entry(bank.thresholds),
+        "line_thresholds": _thresholds_entry(bank.line_thresholds),
         "coverage": _coverage_entry(bank.coverage),
         "noise_autocovariance": None if bank.noise_autocovariance is None else NOISE,
         "plan": {
@@ -307,6 +308,7 @@ def _bank(folder: Path, head: Mapping[str, Any]) -> Bank:
         strength=_one_of(head["strength"], ("step", "line", "energy"), "strength"),
         purpose=str(head["purpose"]),
         thresholds=_thresholds(head["thresholds"]),
+        line_thresholds=_thresholds(head.get("line_thresholds")),
         coverage=_coverage(head["coverage"]),
         noise_autocovariance=None if noise is None else _autocovariance(folder, head),
         provenance=dict(head["provenance"]),

@@ -39,6 +39,10 @@ predicted F more than its order: on such scenes the widths chosen with it came w
 of the best among seven pairs of sizes, at four light levels and three blurs. No source."""
 HYSTERESIS = 0.7
 """Elements join above this share of the threshold."""
+EXPOSURES = 5
+"""Light levels that a bank has to serve with its one pair of sizes."""
+DIMMEST = 0.125
+"""The lowest of them, as a share of full light: three stops down."""
 ASPECT = 1.2
 """Along over across. Between 1 and 1.5 detection changes little, beyond 2 corners and curves
 lose more than straight edges gain."""
@@ -96,6 +100,30 @@ def tone_contrasts(table: InputTable) -> F64:
     )
     first, second = np.triu_indices(len(tones), 1)
     return np.sort(np.abs(tones[first] - tones[second]))
+
+
+def tone_span(table: InputTable, light: float) -> float:
+    """Working value of white above that of black, when light falls to a share of full light."""
+    c = table.contract
+    if c.format.integer:
+        codes = np.arange(c.format.full_scale + 1).astype(c.format.dtype)
+    else:
+        codes = np.linspace(c.black, c.white, 4096).astype(np.float32)
+    ends = np.interp([0.0, light], c.light(codes), table.apply(codes))
+    return float(ends[1] - ends[0])
+
+
+def dimming(table: InputTable) -> F64:
+    """Factors on step heights for exposures from full light down to :data:`DIMMEST` of it.
+
+    Light levels are evenly spread in their logarithm: one bank serves every exposure.
+
+    Returns
+    -------
+    ndarray (EXPOSURES,), falling from 1
+    """
+    lights = np.geomspace(1, DIMMEST, EXPOSURES)
+    return np.array([tone_span(table, float(x)) for x in lights]) / tone_span(table, 1.0)
 
 
 def conditions(

@@ -2,8 +2,9 @@
 
 from __future__ import annotations
 
-from collections.abc import Callable
-from typing import Any
+from collections.abc import Callable, Mapping
+from dataclasses import dataclass
+from typing import Any, Literal
 
 import numpy as np
 from numpy.typing import NDArray
@@ -17,6 +18,8 @@ from patchlab.types import F32, Bank, EdgeMap, Thresholds
 RATE = 10.0
 """Default promise, false edge elements per megapixel of flat picture."""
 
+What = Literal["step", "line", "both"]
+"""What a person asks for: steps, lines, or both, each with its own promise."""
 Respond = Callable[[NDArray[Any]], F32]
 
 
@@ -135,3 +138,126 @@ def detect_edgels(
     values = bank.table.apply(pixels)
     where = edgels(bank, values, found, responses, blur_px=blur_px, kind=kind, invalid=invalid)
     return found, where
+
+
+@dataclass(frozen=True, eq=False)
+class Found:
+    """Everything found in one picture.
+
+    Parameters
+    ----------
+    maps : EdgeMap of each kind that was looked for, "step" or "line"
+    edgels : structured array of :data:`patchlab.types.EDGEL`, in row order
+    """
+
+    maps: Mapping[str, EdgeMap]
+    edgels: NDArray[np.void]
+
+    @property
+    def shown(self) -> EdgeMap:
+        """One map for pictures: where both kinds were looked for, elements of either."""
+        maps = list(self.maps.values())
+        if len(maps) == 1:
+            return maps[0]
+        steps, lines = maps
+        louder = lines.strength > steps.strength
+        use = np.where(steps.edges == lines.edges, louder, lines.edges)
+        return EdgeMap(
+            np.where(use, lines.strength, steps.strength),
+            np.where(use, lines.orientation, steps.orientation),
+            np.where(use, lines.scale, steps.scale),
+            steps.edges | lines.edges,
+            steps.threshold,
+        )
+
+
+def kinds_of(bank: Bank, what: What | None) -> dict[thin.Kind, Thresholds | None]:
+    """The kinds of edges that a request means, each with its table of thresholds.
+
+    Parameters
+    ----------
+    bank : Bank
+    what : step, line or both; None means the bank's own kind
+
+    Raises
+    ------
+    UsageError : the bank has no kernels for that.
+    """
+    if what is None:
+        return {bank.strength: bank.thresholds}
+    own: dict[thin.Kind, Thresholds | None] = {
+        "step": bank.thresholds if bank.strength == "step" else None,
+        "line": bank.thresholds if bank.strength == "line" else bank.line_thresholds,
+    }
+    kinds: tuple[thin.Kind, ...] = ("step", "line") if what == "both" else (what,)
+    for kind in kinds:
+        thin.shapes_of(bank, kind)
+    return {kind: own[kind] for kind in kinds}
+
+
+def levels_of(
+    bank: Bank, what: What | None, rate: float | None, threshold: float | None
+) -> dict[thin.Kind, tuple[float, float]]:
+    """High threshold and hysteresis ratio for each kind of edge that a request means.
+
+    Raises
+    ------
+    UsageError : as :func:`threshold_of` and :func:`kinds_of`; no thresholds for that kind.
+    """
+    out = {}
+    for kind, table in kinds_of(bank, what).items():
+        if table is None and threshold is None and bank.thresholds is not None:
+            raise UsageError(
+                f"this bank has no thresholds for {kind} edges",
+                where=bank.name,
+                remedy="give a strength threshold, or export the bank again",
+            )
+        out[kind] = threshold_of(bank, rate=rate, threshold=threshold, thresholds=table)
+    return out
+
+
+def find(
+    bank: Bank,
+    pixels: NDArray[Any],
+    respond: Respond,
+    *,
+    what: What | None = None,
+    rate: float | None = None,
+    threshold: float | None = None,
+    invalid: NDArray[np.bool_] | None = None,
+    blur_px: float | None = None,
+) -> Found:
+    """Find steps, lines or both in one picture, each kind at its own promised rate.
+
+    Looking for both, a step stands only where no larger line response is near: the flanks of
+    a line are not told as steps. That can only lower the number of false steps.
+
+    Parameters
+    ----------
+    what : step, line or both; None means the bank's own kind
+    others : as :func:`detect_edgels`
+
+    Raises
+    ------
+    UsageError, InputError : as :func:`levels_of` and :func:`detect`.
+    """
+    levels = levels_of(bank, what, rate, threshold)
+    responses, values = _checked(bank, pixels, respond), bank.table.apply(pixels)
+    maps, parts = {}, []
+    for kind, (high, ratio) in levels.items():
+        maps[str(kind)] = found = thin.edge_map(
+            bank,
+            responses,
+            high,
+            hysteresis_ratio=ratio,
+            kind=kind,
+            invalid=invalid,
+            no_flanks=len(levels) > 1,
+        )
+        parts.append(
+            edgels(bank, values, found, responses, blur_px=blur_px, kind=kind, invalid=invalid)
+        )
+    both = np.concatenate(parts)
+    if len(parts) > 1:
+        both = both[np.lexsort((both["x"], np.rint(both["y"])))]
+    return Found(maps, both)

@@ -221,6 +221,7 @@ def edgels(
     Returns
     -------
     structured ndarray of :data:`patchlab.types.EDGEL`, in row order of the elements' pixels.
+    ``width`` is what a line's profile is wider than the blur, as an even bar's width.
     ``sd`` is the standard error along the normal; where the model does not explain the
     pixels (corners, other edges close by) it is enlarged by the misfit.
 
@@ -234,20 +235,31 @@ def edgels(
         raise UsageError(f"cannot fit edges of blur {blur_px} px in a disk of {radius} px")
     rows, cols, begin = start(bank, found, responses, kind)
     offset, theta, sd = begin.offset.copy(), begin.theta.copy(), begin.sd.copy()
+    spread = np.zeros(rows.size)
     if refine:
         picture = _Picture(bank, values, blur_px, invalid)
         for line in (False, True):
             at = np.flatnonzero((begin.kind != STEP) == line)
             if at.size:
                 part = _refine(picture, rows, cols, begin, at, line, radius)
-                offset[at], theta[at], sd[at] = part
+                offset[at], theta[at], sd[at] = part[:3]
+                spread[at] = part[3] if line else 0.0
     out = np.zeros(rows.size, EDGEL)
     out["x"], out["y"] = cols + offset * np.cos(theta), rows + offset * np.sin(theta)
     lines = begin.kind != STEP
     out["theta"] = np.where(lines, theta % math.pi, (theta + math.pi) % (2 * math.pi) - math.pi)
     out["strength"], out["sd"] = found.strength[rows, cols], sd
     out["scale"], out["kind"] = found.scale[rows, cols], begin.kind
+    out["width"] = _widths(spread, blur_px)
     return out
+
+
+def _widths(spread: F64, blur_px: float | None) -> F64:
+    """Widths of evenly bright lines whose blurred profiles have these standard deviations.
+
+    A bar of width w has variance w^2 / 12, and blur adds its own. 0 where nothing was fitted.
+    """
+    return np.asarray(np.sqrt(12 * np.maximum(spread**2 - (blur_px or 0.0) ** 2, 0.0)))
 
 
 @dataclass(frozen=True, eq=False)
@@ -261,8 +273,8 @@ class _Picture:
 
     def fit(
         self, rows: Index, cols: Index, begin: Start, at: Index, line: bool, radius: float
-    ) -> tuple[F64, F64, F64, F64]:
-        """Offset, direction, standard error (infinite where not to be trusted), misfit."""
+    ) -> tuple[F64, F64, F64, F64, F64]:
+        """Offset, direction, standard error (infinite where not to be trusted), misfit, blur."""
         bank, width = self.bank, self.blur_px or BLUR_PX
         fits = model.fit_edges(
             self.values,
@@ -287,47 +299,51 @@ class _Picture:
         # a misfit, or noise that is not measured, shows in the residual
         scatter = fits.chi2 if bank.table.noise_sd is None else np.maximum(fits.chi2, 1.0)
         sd = np.where(good, fits.sd[:, 0] * np.sqrt(scatter), np.inf)
-        return q[:, 0], q[:, 1], sd, fits.chi2
+        return q[:, 0], q[:, 1], sd, fits.chi2, np.exp(q[:, 5])
 
 
 def _refine(
     picture: _Picture, rows: Index, cols: Index, begin: Start, at: Index, line: bool, radius: float
-) -> tuple[F64, F64, F64]:
+) -> tuple[F64, F64, F64, F64]:
     """Best place of the elements ``at``: the wide disk's, or a narrow one's, or the parabola's.
 
     Other edges inside the wide disk pull at the fit; where its residual is too large, a
     narrow disk is tried and the smaller standard error (misfit included) wins.
     """
-    offset, theta, sd, misfit = picture.fit(rows, cols, begin, at, line, radius)
+    offset, theta, sd, misfit, spread = picture.fit(rows, cols, begin, at, line, radius)
     again = np.flatnonzero((misfit > MISFIT) | ~np.isfinite(sd))
     if again.size and radius > NARROW_PX:
         near = picture.fit(rows, cols, begin, at[again], line, NARROW_PX)
         better = near[2] < sd[again]
-        for whole, part in zip((offset, theta, sd), near, strict=False):
+        for whole, part in zip((offset, theta, sd), near[:3], strict=True):
             whole[again[better]] = part[better]
+        spread[again[better]] = near[4][better]
     lost = ~np.isfinite(sd)
     offset[lost], theta[lost] = begin.offset[at[lost]], begin.theta[at[lost]]
     sd[lost] = begin.sd[at[lost]]
-    return offset, theta, sd
+    spread[lost] = 0.0
+    return offset, theta, sd, spread
 
 
 # ---------------------------------------------------------------- as text
 
+CSV_COLUMNS = ("x_px", "y_px", "theta_deg", "strength", "sd_px", "scale", "kind", "width_px")
 KIND_NAMES = ("step", "bright line", "dark line")
 
 
 def edgels_csv(found: NDArray[np.void]) -> bytes:
-    """Edgels as CSV (UTF-8, LF): x_px, y_px, theta_deg, strength, sd_px, scale, kind.
+    """Edgels as CSV (UTF-8, LF): x_px, y_px, theta_deg, strength, sd_px, scale, kind, width_px.
 
     The numbers are the shortest that read back to the same float32; ``theta_deg`` is the
     normal towards the brighter side, from +x towards +y.
     """
     out = io.StringIO()
     writer = csv.writer(out, lineterminator="\n")
-    writer.writerow(["x_px", "y_px", "theta_deg", "strength", "sd_px", "scale", "kind"])
+    writer.writerow(CSV_COLUMNS)
     degrees = np.rad2deg(found["theta"])
     columns = (found["x"], found["y"], degrees, found["strength"], found["sd"])
     text = [[np.format_float_positional(v, trim="0") for v in column] for column in columns]
     names = [KIND_NAMES[k] for k in found["kind"]]
-    writer.writerows(zip(*text, found["scale"].tolist(), names, strict=True))
+    widths = [np.format_float_positional(v, trim="0") for v in found["width"]]
+    writer.writerows(zip(*text, found["scale"].tolist(), names, widths, strict=True))
     return out.getvalue().encode()

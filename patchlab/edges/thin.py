@@ -25,10 +25,17 @@ Mask = NDArray[np.bool_]
 
 DILATION_PX = 2
 """A coarser scale may only add elements farther than this from what finer ones found."""
-RELATIVE_FLOOR = 0.3
+RELATIVE_FLOOR = 0.35
 """Coarse elements below this share of the strongest response around are tails of another edge."""
 WINDOW_SIGMAS = 2.5
 """Half-width of "around", in widths of the kernel."""
+LINE_FLOOR = 0.6
+"""A line stands at least so high against the largest line response around it: its own side
+lobes reach 0.45 of its middle."""
+LINE_OVER_STEP = 0.8
+"""And so high against the largest step response: the lobes of a step reach 0.5 of the step, while
+the flanks of a bar reach 1 / 0.8 of its middle when it is about four kernel widths wide. Where
+both kinds are looked for, it is a line up to there and two steps beyond."""
 HYSTERESIS = 0.7
 """Low threshold over high threshold."""
 
@@ -56,11 +63,18 @@ class ScaleShape:
 
 @dataclass(frozen=True, eq=False)
 class ScaleMap:
-    """Strength of one scale: float32 (h, w), and uint8 (h, w) index of the winning direction."""
+    """Strength of one scale: float32 (h, w), and uint8 (h, w) index of the winning direction.
+
+    An element must have the share ``own`` of the largest strength around it, and the share
+    ``other`` of the largest response of the other parity, ``rival``, where that has a say.
+    """
 
     shape: ScaleShape
     strength: F32
     orientation: NDArray[np.uint8]
+    own: float = 0.0
+    rival: F32 | None = None
+    other: float = 0.0
 
 
 def _sigma(bank: Bank, index: int) -> float:
@@ -139,7 +153,16 @@ def _magnitudes(shape: ScaleShape, plane: Any, kind: Kind) -> Iterable[F32]:
             yield np.abs(plane(i))
 
 
-def strongest(shape: ScaleShape, plane: Any, kind: Kind) -> ScaleMap:
+def _largest(members: Sequence[int], plane: Any) -> F32 | None:
+    """Largest absolute response over some kernels; None for no kernels."""
+    best: F32 | None = None
+    for i in members:
+        response = np.abs(plane(i))
+        best = response if best is None else np.maximum(best, response, out=best)
+    return best
+
+
+def strongest(shape: ScaleShape, plane: Any, kind: Kind, *, no_flanks: bool = False) -> ScaleMap:
     """Largest response over the orientations of one scale; the first wins a tie.
 
     Parameters
@@ -147,6 +170,8 @@ def strongest(shape: ScaleShape, plane: Any, kind: Kind) -> ScaleMap:
     shape : ScaleShape
     plane : callable, kernel index -> float32 (h, w) response; called once for each kernel
     kind : step (\\|odd\\|), line (\\|even\\|) or energy (root of the sum of squares)
+    no_flanks : let steps stand only where no line response near is large enough to make a
+        line, so that the two flanks of a line are not told as steps beside it
     """
     best: F32 | None = None
     winner: NDArray[np.uint8] = np.empty(0, np.uint8)
@@ -158,7 +183,12 @@ def strongest(shape: ScaleShape, plane: Any, kind: Kind) -> ScaleMap:
         winner[better] = j
         np.maximum(best, response, out=best)
     assert best is not None  # shapes_of promises members
-    return ScaleMap(shape, best, winner)
+    own = RELATIVE_FLOOR if shape.scale > 0 else 0.0
+    if kind == "line":
+        return ScaleMap(shape, best, winner, LINE_FLOOR, _largest(shape.odd, plane), LINE_OVER_STEP)
+    if kind == "step" and no_flanks:
+        return ScaleMap(shape, best, winner, own, _largest(shape.even, plane), 1 / LINE_OVER_STEP)
+    return ScaleMap(shape, best, winner, own)
 
 
 # ---------------------------------------------------------------- thinning
@@ -221,6 +251,7 @@ def candidates(scale_map: ScaleMap, floor: float, *, margin: int | None = None) 
 
     On every scale but the finest, elements below :data:`RELATIVE_FLOOR` of the largest
     strength within :data:`WINDOW_SIGMAS` widths are dropped: they are tails of another edge.
+    Lines, and steps that must not be flanks of lines, are held against the other parity too.
 
     Parameters
     ----------
@@ -241,10 +272,11 @@ def candidates(scale_map: ScaleMap, floor: float, *, margin: int | None = None) 
         inner = np.zeros_like(keep)
         inner[edge:-edge, edge:-edge] = True
         keep &= inner
-    if shape.scale > 0:
-        window = 2 * math.ceil(WINDOW_SIGMAS * shape.sigma_px) + 1
-        around = ndimage.maximum_filter(strength, size=window, mode="nearest")
-        keep &= strength >= np.float32(RELATIVE_FLOOR) * around
+    window = 2 * math.ceil(WINDOW_SIGMAS * shape.sigma_px) + 1
+    for field, share in ((strength, scale_map.own), (scale_map.rival, scale_map.other)):
+        if field is not None and share:
+            around = ndimage.maximum_filter(field, size=window, mode="nearest")
+            keep &= strength >= np.float32(share) * around
     return np.where(keep, strength, np.float32(0))
 
 
@@ -321,6 +353,7 @@ def edge_map(
     hysteresis_ratio: float = HYSTERESIS,
     kind: Kind | None = None,
     invalid: Mask | None = None,
+    no_flanks: bool = False,
 ) -> EdgeMap:
     """The whole chain on one picture's responses.
 
@@ -332,6 +365,7 @@ def edge_map(
     hysteresis_ratio : low threshold over high threshold
     kind : step, line or energy; None means ``bank.strength``
     invalid : bool ndarray (h, w); elements whose kernel touches such a pixel are dropped
+    no_flanks : as for :func:`strongest`
 
     Returns
     -------
@@ -348,7 +382,10 @@ def edge_map(
         raise UsageError(f"the strength threshold must be positive, not {threshold:g}")
     wanted = kind or bank.strength
     low = hysteresis_ratio * threshold
-    maps = [strongest(s, responses.__getitem__, wanted) for s in shapes_of(bank, wanted)]
+    maps = [
+        strongest(s, responses.__getitem__, wanted, no_flanks=no_flanks)
+        for s in shapes_of(bank, wanted)
+    ]
     planes = [candidates(m, low) for m in maps]
     if invalid is not None and invalid.any():
         for m, plane in zip(maps, planes, strict=True):

@@ -62,6 +62,18 @@ def libraries(bank: Bank) -> Iterator[tuple[str, Run, str]]:
         yield "OpenCV filter2D", by_opencv, f"float32, {cv2.__version__}"
 
 
+def canny() -> Callable[[NDArray[Any], NDArray[Any], float, float], NDArray[np.bool_]] | None:
+    """OpenCV's Canny on 16-bit gradients (x, y) with two thresholds; None where not installed."""
+    if util.find_spec("cv2") is None:
+        return None
+    import cv2
+
+    def run(x: NDArray[Any], y: NDArray[Any], low: float, high: float) -> NDArray[np.bool_]:
+        return np.asarray(cv2.Canny(x, y, low, high, L2gradient=True) > 0)
+
+    return run
+
+
 def onnx_graph(model: bytes) -> tuple[str, Run, str] | None:
     """The exported graph in onnxruntime on one thread; None where it is not installed."""
     try:

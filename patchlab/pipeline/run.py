@@ -246,8 +246,12 @@ def calibrated(bank: Bank, desk: Desk) -> Bank:
     if bank.table.noise_sd is None or bank.purpose not in ("edges", "features"):
         return bank
     with desk.timed("thresholds"):
-        found = edges.calibrate(bank, seed=desk.settings.seed, progress=desk.progress)
-    return replace(bank, thresholds=found)
+        seed, progress = desk.settings.seed, desk.progress
+        found = edges.calibrate(bank, seed=seed, progress=progress)
+        lines = None
+        if bank.strength == "step" and any(bank.members(s, "even") for s in bank.scales):
+            lines = edges.calibrate(bank, kind="line", seed=seed, progress=progress)
+    return replace(bank, thresholds=found, line_thresholds=lines)
 
 
 # ---------------------------------------------------------------- commands

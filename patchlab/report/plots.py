@@ -48,6 +48,10 @@ def _plot(draw: Callable[[Axes], None], width: float = 5.2, height: float = 3.3)
     return _figure(lambda figure: draw(figure.add_subplot()), width, height)
 
 
+plot = _plot
+"""One pair of axes, drawn by the function given, as bytes of a PNG."""
+
+
 def noise_curve(survey: Survey) -> bytes:
     """Noise against level with the fitted law, and what the table makes of it."""
     noise, contract = survey.noise, survey.contract

@@ -73,7 +73,7 @@ def step_picture(shape, x, y, theta, height, blur):
     return (height * ndtr(d / blur)).astype(np.float32)
 
 
-@pytest.fixture
+@pytest.fixture(scope="session")
 def make_bank():
     return build_bank
 

@@ -318,7 +318,7 @@ def test_no_elements_no_edgels(fine):
     found = thin.edge_map(fine, responses, 5.0)
     got = locate.edgels(fine, flat, found, responses)
     assert got.shape == (0,)
-    assert locate.edgels_csv(got) == b"x_px,y_px,theta_deg,strength,sd_px,scale,kind\n"
+    assert locate.edgels_csv(got) == b"x_px,y_px,theta_deg,strength,sd_px,scale,kind,width_px\n"
 
 
 def test_planes_of_different_pictures_are_refused(fine, engine, step):

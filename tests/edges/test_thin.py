@@ -188,8 +188,9 @@ def test_the_coarse_scale_finds_what_the_fine_one_cannot(make_bank, engine, step
     g = np.random.default_rng(11)
     picture = step((128, 128), 64.0, 64.0, 0.3, 2.8, 2.0)
     picture += g.standard_normal(picture.shape, dtype=np.float32)
-    found = thin.edge_map(bank, engine(bank)(picture), 5.2)
-    first = thin.edge_map(make_bank(scales=((1.1, 1.6),)), engine(bank)(picture)[:8], 5.2)
+    responses, alone, ratio = engine(bank)(picture), make_bank(scales=((1.1, 1.6),)), 0.7
+    found = thin.edge_map(bank, responses, 5.2, hysteresis_ratio=ratio)
+    first = thin.edge_map(alone, responses[:8], 5.2, hysteresis_ratio=ratio)
     assert found.edges.sum() > 1.7 * first.edges.sum() > 0
     assert (found.scale[found.edges] == 1).sum() > 50
 
@@ -200,7 +201,7 @@ def test_weak_coarse_maxima_beside_a_strong_one_are_dropped(make_bank):
     strength[:, 20] = 30.0
     strength[:, 24] = 8.0
     strength[:, 36] = 8.0
-    flat = thin.ScaleMap(shape, strength, np.zeros((40, 40), np.uint8))
+    flat = thin.ScaleMap(shape, strength, np.zeros((40, 40), np.uint8), own=thin.RELATIVE_FLOOR)
     kept = thin.candidates(flat, 3.0, margin=0)
     assert kept[5:-5, 20].all()
     assert not kept[:, 24].any()
