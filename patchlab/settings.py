@@ -7,6 +7,7 @@ all made from this one list.
 from __future__ import annotations
 
 import dataclasses
+import json
 import tomllib
 from collections.abc import Mapping
 from dataclasses import dataclass, field
@@ -60,6 +61,16 @@ class Settings:
         "survey",
         "Input table; auto stabilises the noise when it can be measured, else linear.",
         choices=("auto", "identity", "linear", "log", "stabilised"),
+    )
+    # further frames of the camera
+    static: str | None = _setting(
+        None, "measure", "Folder with one folder for each static scene, two frames or more in each."
+    )
+    dark: str | None = _setting(
+        None, "measure", "Folder of frames taken in darkness at the photographs' exposure."
+    )
+    slanted_edge: str | None = _setting(
+        None, "measure", "Picture of one edge that leans 2 to 10 degrees, for the sharpness."
     )
     # sampling
     patch_size: int = _setting(12, "patches", "Patch side, pixels.", low=8, high=32)
@@ -179,6 +190,6 @@ def to_toml(settings: Settings) -> str:
         value = getattr(settings, f.name)
         text = {True: "true", False: "false"}.get(value) if isinstance(value, bool) else None
         if text is None:
-            text = f'"{value}"' if isinstance(value, str) else repr(value)
+            text = json.dumps(value, ensure_ascii=False) if isinstance(value, str) else repr(value)
         lines.append(f"# {f.name} =" if value is None else f"{f.name} = {text}")
     return "\n".join(lines).strip() + "\n"

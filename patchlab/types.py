@@ -221,6 +221,28 @@ class Mark:
 
 
 @dataclass(frozen=True, eq=False)
+class SlantedEdge:
+    """Modulation transfer across one edge.
+
+    Parameters
+    ----------
+    angle_deg : of the edge from the nearest axis
+    frequency_cpp, mtf : ndarray, cycles per pixel up to 1 and transfer, 1 at 0
+    mtf50_cpp : first frequency where the transfer is one half
+    sigma_px : of the Gaussian line spread with this MTF50 (pixel aperture included)
+    distance_px, spread : the edge spread function, distance from the edge and light
+    """
+
+    angle_deg: float
+    frequency_cpp: F64
+    mtf: F64
+    mtf50_cpp: float
+    sigma_px: float
+    distance_px: F64
+    spread: F64
+
+
+@dataclass(frozen=True, eq=False)
 class Survey:
     """What the camera itself does to pictures.
 
@@ -229,6 +251,8 @@ class Survey:
     linear light over the frame's mean; ``noise_power`` is the noise's share on that scale
     and ``noise_overtakes_cpp`` the frequency above which it is the larger part, or None.
     ``distrusted`` lists (path, reason) of frames better left out of learning.
+    ``slanted_edge`` is the chart's transfer when one was given, and then where the blur is from.
+    ``notes`` say what static, dark or chart frames changed, or why they could not serve.
     """
 
     contract: InputContract
@@ -247,6 +271,8 @@ class Survey:
     noise_overtakes_cpp: float | None = None
     distrusted: tuple[tuple[str, str], ...] = ()
     edge_widths_px: F64 = field(default_factory=lambda: np.empty(0))
+    slanted_edge: SlantedEdge | None = None
+    notes: tuple[str, ...] = ()
 
 
 # ---------------------------------------------------------------- learning

@@ -1,7 +1,7 @@
 """What the camera itself does to pictures: noise, blur, spectrum, marks; the input table."""
 
 from patchlab.camera.blur import measure_blur
-from patchlab.camera.chart import SlantedEdge, slanted_edge
+from patchlab.camera.chart import slanted_edge
 from patchlab.camera.marks import find_marks
 from patchlab.camera.noise import measure_noise
 from patchlab.camera.spectrum import Spectrum, measure_spectrum
@@ -10,7 +10,6 @@ from patchlab.camera.survey import survey
 from patchlab.camera.table import default_kind, make_table, noise_of_table
 
 __all__ = [
-    "SlantedEdge",
     "Spectrum",
     "default_kind",
     "find_marks",

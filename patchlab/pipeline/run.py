@@ -16,6 +16,7 @@ from patchlab.errors import InputError, UsageError
 from patchlab.pipeline import tell
 from patchlab.pipeline.bundle import write_bundle
 from patchlab.pipeline.desk import RECIPE, Desk, bank_name, may_write
+from patchlab.pipeline.measure import take_in_extras
 from patchlab.types import (
     Bank,
     Dictionary,
@@ -65,13 +66,26 @@ def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
         "inputs": intake.inputs,
         "body": {"recipe": RECIPE, "photos": tell.photos(intake)},
     }
+    extras = take_in_extras(intake, desk)
+    about["body"]["measured_on"] = extras.inputs
 
     def make() -> Survey:
-        frames = functools.partial(images.iterate, intake)
-        return camera.survey(frames, intake.contract, kind=kind, progress=desk.progress)
+        return camera.survey(
+            functools.partial(images.iterate, intake),
+            intake.contract,
+            kind=kind,
+            static=extras.static_frames(),
+            dark=extras.dark_frames(),
+            edge=extras.edge_frame(),
+            progress=desk.progress,
+        )
 
-    def example(_: Survey) -> dict[str, bytes]:
-        return {"example.npy": store.npy_bytes(_example(intake).pixels)}
+    def example(found: Survey) -> dict[str, bytes]:
+        plain = tell.survey(found, about["body"])
+        return {
+            "example.npy": store.npy_bytes(_example(intake).pixels),
+            "survey.json": store.canonical_json(plain),
+        }
 
     about["body"]["example"] = _example(intake).path
     return desk.stage("survey", about, make, example)
