@@ -80,6 +80,11 @@ class Settings:
         0.3, "patches", "Share of the flattest patches dropped.", low=0.0, high=0.95
     )
     normalise: bool = _setting(True, "patches", "Divide each patch by its contrast.")
+    all_frames: bool = _setting(
+        False,
+        "patches",
+        "Draw from every frame, also from near duplicates, blurred and clipped ones.",
+    )
     # learning
     method: str = _setting(
         "ica", "learn", "Learner: independent components or sparse code.", choices=("ica", "sparse")
@@ -99,6 +104,9 @@ class Settings:
     kernels: int = _setting(16, "bank", "Kernels in the bank.", low=4, high=64)
     purpose: str = _setting("edges", "bank", "What the bank is for.", choices=("edges", "features"))
     lines: bool = _setting(False, "bank", "Add even (line) partners to an edge bank.")
+    keep_marked: bool = _setting(
+        False, "bank", "Let components that describe a mark of the camera into the bank."
+    )
     as_learned: bool = _setting(False, "bank", "Export the learned filters themselves.")
     false_edges: float = _setting(
         10.0, "bank", "False edge elements per megapixel of flat area.", low=0.1, high=1000.0

@@ -31,6 +31,7 @@ MISSING_THRESHOLD = 0.05
 SHARP_THRESHOLD = -0.03
 DUPLICATE_THRESHOLD = 0.995
 BLURRED_THRESHOLD = 0.62
+MOSTLY_CLIPPED = 0.2
 
 
 @dataclass(frozen=True)
@@ -265,15 +266,26 @@ class MarkMeter:
         return Marks(tuple(marks), odd)
 
     def _odd_frames(self) -> tuple[tuple[tuple[str, str], ...], float, float]:
+        """Frames better left out, with the reason, and the shares of copies and soft frames.
+
+        The rules: a small copy that correlates above 0.995 with an earlier frame's; more than a
+        fifth of the pixels clipped, where that is not the rule in the folder; edges less than
+        0.62 as sharp as the folder's median (eight frames and more).
+        """
         facts = self._pool.facts
         copies = near_duplicates(np.stack([f.thumb for f in facts]))
         sharp = np.array([f.sharpness for f in facts])
         usual = float(np.nanmedian(sharp)) if np.isfinite(sharp).any() else 0.0
         soft = sharp < BLURRED_THRESHOLD * usual
+        burnt = np.array([f.clipped > MOSTLY_CLIPPED for f in facts])
+        burnt &= burnt.mean() < 0.5  # else it is how this folder was taken
+        reasons = {"near duplicate": copies, "clipped": burnt}
+        if len(facts) >= MIN_FRAMES:
+            reasons["blurred"] = soft
         odd = [
-            (f.path, "near duplicate" if copy else "blurred")
-            for f, copy, blur in zip(facts, copies, soft, strict=True)
-            if copy or blur
+            (f.path, next(reason for reason, hit in reasons.items() if hit[i]))
+            for i, f in enumerate(facts)
+            if any(hit[i] for hit in reasons.values())
         ]
         return tuple(odd), float(copies.mean()), float(soft.mean())
 

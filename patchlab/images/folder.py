@@ -10,8 +10,8 @@ from __future__ import annotations
 
 import os
 import stat
-from collections.abc import Callable, Iterator
-from dataclasses import dataclass
+from collections.abc import Callable, Iterable, Iterator
+from dataclasses import dataclass, replace
 from pathlib import Path
 from typing import NoReturn
 
@@ -214,6 +214,23 @@ class Intake:
         )
 
     @property
+    def names(self) -> frozenset[str]:
+        """The frames' paths."""
+        return frozenset(record.path for record in self.frames)
+
+    def without(self, paths: Iterable[str]) -> Intake:
+        """The same folder with some frames left out."""
+        left_out = frozenset(paths)
+        return replace(self, frames=tuple(r for r in self.frames if r.path not in left_out))
+
+    def thinned(self, count: int) -> Intake:
+        """The same folder with at most ``count`` frames, evenly spread."""
+        if len(self.frames) <= count:
+            return self
+        step = len(self.frames) / count
+        return replace(self, frames=tuple(self.frames[int(k * step)] for k in range(count)))
+
+    @property
     def largest(self) -> int:
         """Pixels of the largest frame."""
         return max(h * w for h, w in (record.shape for record in self.frames))
@@ -387,11 +404,12 @@ def iterate(
     ------
     Frame
     """
+    names = intake.names
     for result in map_ordered(reread, intake.tasks, jobs=jobs, stage=stage, progress=progress):
         if isinstance(result, Quarantined):
             missed(result)
         else:
-            yield from result
+            yield from (frame for frame in result if frame.path in names)
 
 
 def reread(task: Task) -> tuple[Frame, ...] | Quarantined:

@@ -304,14 +304,14 @@ def sample_folder(
     Every worker reads its own files, and only patches travel. The result has the same bytes
     whatever ``jobs``. ``missed`` is told of files that vanished or changed; they are passed over.
     """
-    budget = quota(settings, len(intake.frames))
+    budget, names = quota(settings, len(intake.frames)), intake.names
     tasks = [(task, table, settings, budget) for task in intake.tasks]
     parts: list[Part] = []
     for result in map_ordered(_sample_file, tasks, jobs=jobs, stage="sampling", progress=progress):
         if isinstance(result, Quarantined):
             missed(result)
         else:
-            parts.extend(result)
+            parts.extend(part for part in result if part.path in names)
     return assemble(parts, settings)
 
 

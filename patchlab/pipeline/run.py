@@ -31,6 +31,9 @@ Head = dict[str, Any]
 EXAMPLE = (960, 1280)
 """Largest height and width of the example frame that a run keeps for its page."""
 
+SAME = 0.9
+"""Cosine from which an atom of another start counts as the same as a flagged one."""
+
 # ---------------------------------------------------------------- one stage after another
 
 
@@ -71,7 +74,7 @@ def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
 
     def make() -> Survey:
         return camera.survey(
-            functools.partial(images.iterate, intake),
+            functools.partial(images.iterate, intake.thinned(camera.MAX_FRAMES)),
             intake.contract,
             kind=kind,
             static=extras.static_frames(),
@@ -103,9 +106,20 @@ def _example(intake: images.Intake) -> Frame:
     return replace(frame, pixels=frame.pixels[rows, cols].copy(), invalid=mask)
 
 
+def trusted(intake: images.Intake, found: Survey, desk: Desk) -> images.Intake:
+    """The frames to learn from: all but those that the survey distrusts, unless asked."""
+    if desk.settings.all_frames or not found.distrusted:
+        return intake
+    left_out = tell.left_out(found)
+    told = ", ".join(f"{count} {reason}" for reason, count in left_out.items())
+    desk.tell(f"  frames left out of learning: {told}")
+    return intake.without(path for path, _ in found.distrusted)
+
+
 def sample(intake: images.Intake, found: Survey, parent: Head, desk: Desk) -> tuple[PatchSet, Head]:
     """Draw patches, after saying what memory that and learning will take."""
     s = desk.settings
+    intake = trusted(intake, found, desk)
     settings = images.SampleSettings(
         size=s.patch_size,
         patches=s.patches,
@@ -204,6 +218,10 @@ def choose(
 ) -> Bank:
     """Choose the kernels and calibrate their thresholds on noise."""
     s = desk.settings
+    flagged = marked(dictionary, found, patches)
+    if flagged and not s.keep_marked:
+        dictionary, fits = _unmarked(dictionary, fits, flagged)
+        desk.tell(f"  {len(flagged)} components that describe a mark are kept out of the bank")
     with desk.timed("bank"):
         if s.as_learned:
             bank = banks.bank_as_learned(dictionary, found, name, s.border, fits[1])
@@ -221,7 +239,42 @@ def choose(
                 dictionary, fits[0], found, settings, patch_contrast=patches.contrast
             )
     known = {**bank.provenance, "blur_sigma_px": found.blur_sigma_px}
+    if flagged:
+        known["marked_components"] = [[i + 1, name, s.keep_marked] for i, name in flagged]
     return calibrated(replace(bank, provenance=known), desk)
+
+
+def marked(dictionary: Dictionary, found: Survey, patches: PatchSet) -> tuple[tuple[int, str], ...]:
+    """Components that describe a mark of the camera rather than the scene."""
+    return camera.flag_components(
+        dictionary.atoms, dictionary.filters, patches.patches, patches.origin, found.marks
+    )
+
+
+def _unmarked(
+    dictionary: Dictionary, fits: tuple[KernelFits, ...], flagged: tuple[tuple[int, str], ...]
+) -> tuple[Dictionary, tuple[KernelFits, ...]]:
+    """Dictionary and fits without the flagged components."""
+    kept = np.setdiff1d(np.arange(len(dictionary)), [i for i, _ in flagged])
+    if not len(kept):
+        raise InputError(
+            "every learned component describes a mark of the camera",
+            remedy="see the survey's remedies, or add --keep-marked",
+        )
+    own = np.array([dictionary.atoms[i].ravel() for i, _ in flagged])
+    own /= np.linalg.norm(own, axis=1, keepdims=True)
+    pooled = dictionary.pooled_atoms
+    alike = np.abs(pooled.reshape(len(pooled), -1) @ own.T).max(axis=1) > SAME
+    less = replace(
+        dictionary,
+        filters=dictionary.filters[kept],
+        atoms=dictionary.atoms[kept],
+        contribution=dictionary.contribution[kept],
+        kurtosis=dictionary.kurtosis[kept],
+        identified=dictionary.identified[kept],
+        pooled_atoms=pooled[~alike],
+    )
+    return less, tuple(replace(f, fits=tuple(f.fits[i] for i in kept)) for f in fits)
 
 
 def calibrated(bank: Bank, desk: Desk) -> Bank:

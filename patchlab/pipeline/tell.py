@@ -57,8 +57,20 @@ def survey(found: Survey, head: dict[str, Any]) -> dict[str, Any]:
             }
             for m in found.marks
         ],
+        "distrusted": [{"path": path, "reason": reason} for path, reason in found.distrusted],
         "notes": list(found.notes),
     }
+
+
+def left_out(found: Survey) -> dict[str, int]:
+    """How many frames the survey distrusts, by reason."""
+    return dict(sorted(Counter(reason for _, reason in found.distrusted).items()))
+
+
+def flagged(made: Bank) -> list[dict[str, Any]]:
+    """Components that describe a mark, numbered from 1 as on the page."""
+    known = made.provenance.get("marked_components", ())
+    return [{"component": n, "mark": name, "kept": kept} for n, name, kept in known]
 
 
 def _noise(found: Survey) -> dict[str, Any]:
@@ -171,7 +183,9 @@ def run(
 ) -> dict[str, Any]:
     """The whole job."""
     return {
-        "frames": {"used": len(intake.frames), "quarantined": len(intake.quarantined)},
+        "frames": {"used": len(patches.frames), "quarantined": len(intake.quarantined)},
+        "frames_left_out": {} if desk.settings.all_frames else left_out(found),
+        "marked_components": flagged(written.bank),
         "patches": len(patches),
         "patch_size": patches.size,
         "components": len(dictionary),

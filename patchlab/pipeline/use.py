@@ -268,6 +268,20 @@ class RunContent:
         return ", ".join(f"{n} {name.replace('_', '-')}" for name, n in counts.most_common())
 
     @property
+    def frames_left_out(self) -> Mapping[str, int]:
+        """Frames that were not learned from, by reason."""
+        used = set(self.patches.frames)
+        gone = [reason for path, reason in self.survey.distrusted if path not in used]
+        return dict(sorted(Counter(gone).items()))
+
+    @property
+    def marked(self) -> str:
+        """Components that describe a mark of the camera, in words."""
+        known = self.bank.provenance.get("marked_components", ())
+        names = Counter(name.replace("_", " ") for _, name, _ in known)
+        return ", ".join(f"{count} by the {name}" for name, count in names.most_common())
+
+    @property
     def warnings(self) -> tuple[str, ...]:
         """Everything that a person should know first."""
         return (*self.dictionary.warnings, *self.bank.warnings)
