@@ -48,6 +48,17 @@ class Settings:
     pixels: str | None = _setting(
         None, "photos", "Pixel format by its PFNC name.", choices=tuple(PIXEL_FORMATS)
     )
+    raw_format: str | None = _setting(
+        None, "photos", "PFNC name of the pixels in .raw files, where no sidecar tells it."
+    )
+    raw_width: int | None = _setting(None, "photos", "Width of .raw files, pixels.", low=1)
+    raw_height: int | None = _setting(None, "photos", "Height of .raw files, pixels.", low=1)
+    bayer: str = _setting(
+        "green",
+        "photos",
+        "What is taken of a Bayer sensor: its green lattice, luminance, or the mosaic.",
+        choices=("green", "luminance", "mosaic"),
+    )
     mixed_depths: bool = _setting(False, "photos", "Allow frames of several depths in one folder.")
     max_bad: float = _setting(
         0.1, "photos", "Share of files that may be unusable.", low=0.0, high=1.0

@@ -37,12 +37,16 @@ class InputContract:
     pixels : PFNC name (Mono8, Mono10, Mono12, Mono16) or float32
     black, white : codes of no light and of full scale
     transfer : "linear" or "srgb", how codes follow light
+    plane : "" for a monochrome picture; of a Bayer sensor its pattern and the plane that is taken:
+        "BayerRG green" (the green pixels of the red rows), "BayerRG luminance" (bilinear colours,
+        Rec. 709 weights) or "BayerRG mosaic" (all pixels; patches begin on even rows and columns)
     """
 
     pixels: str
     black: float
     white: float
     transfer: Literal["linear", "srgb"] = "linear"
+    plane: str = ""
 
     def __post_init__(self) -> None:
         _check(self.white > self.black, "white level must exceed black level")
@@ -52,6 +56,11 @@ class InputContract:
     def format(self) -> PixelFormat:
         """The pixel format, with its depth and types."""
         return pixel_format(self.pixels)
+
+    @property
+    def lattice(self) -> int:
+        """Rows and columns after which the pixels' meaning repeats: 2 for a mosaic, else 1."""
+        return 2 if self.plane.endswith(" mosaic") else 1
 
     def light(self, codes: NDArray[Any]) -> F64:
         """Linear light in [0, 1] of pixel codes: black to 0, white to 1."""

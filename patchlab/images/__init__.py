@@ -16,6 +16,7 @@ from patchlab.images.folder import (
     read_file,
     take_in,
 )
+from patchlab.images.pfnc import RawLayout
 from patchlab.images.sample import SampleSettings, memory_needed, sample, sample_folder
 
 __all__ = [
@@ -23,6 +24,7 @@ __all__ = [
     "FrameRecord",
     "Intake",
     "Listing",
+    "RawLayout",
     "ReadOptions",
     "SampleSettings",
     "decode",

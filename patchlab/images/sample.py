@@ -190,14 +190,15 @@ def _part(path: str, size: int, blocks: list[_Block], rejected: Mapping[str, int
 def _positions(frame: Frame, settings: SampleSettings, budget: int) -> Iterator[NDArray[np.int32]]:
     """A frame's sequence of top-left corners, (n, 2) at a time, none twice."""
     draw = rng(settings.seed, frame.path)
-    height, width = (side - settings.size + 1 for side in frame.pixels.shape)
+    step = frame.contract.lattice
+    height, width = ((side - settings.size) // step + 1 for side in frame.pixels.shape)
     seen = np.zeros(0, np.int64)
     for _ in range(max(4, math.ceil(_PATIENCE * budget / _BLOCK))):
         block = draw.integers(0, height * width, size=_BLOCK)
         first = np.sort(np.unique(block, return_index=True)[1])
         fresh = block[first][~np.isin(block[first], seen)]
         if len(fresh):
-            yield np.stack(np.divmod(fresh, width), axis=1).astype(np.int32)
+            yield step * np.stack(np.divmod(fresh, width), axis=1).astype(np.int32)
         seen = np.concatenate([seen, fresh])
         if len(seen) == height * width:
             return

@@ -46,6 +46,8 @@ def take_in(photos: Path, desk: Desk) -> images.Intake:
         transfer=s.transfer,  # type: ignore[arg-type]  # checked by the settings
         pixels=s.pixels,
         pixel_limit=s.pixel_limit,
+        raw=_raw_layout(desk),
+        bayer=s.bayer,  # type: ignore[arg-type]  # checked by the settings
     )
     with desk.timed("reading"):
         intake = images.take_in(
@@ -58,6 +60,17 @@ def take_in(photos: Path, desk: Desk) -> images.Intake:
         )
     desk.tell(f"  {len(intake.frames)} frames, {len(intake.quarantined)} quarantined")
     return intake
+
+
+def _raw_layout(desk: Desk) -> images.RawLayout | None:
+    """What ``.raw`` files hold by the settings; None where nothing was said."""
+    s = desk.settings
+    given = [v for v in (s.raw_format, s.raw_width, s.raw_height) if v is not None]
+    if not given:
+        return None
+    if s.raw_format is None or s.raw_width is None or s.raw_height is None:
+        raise UsageError("--raw-format, --raw-width and --raw-height go together")
+    return images.RawLayout(s.raw_format, s.raw_width, s.raw_height)
 
 
 def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
@@ -239,6 +252,12 @@ def choose(
                 dictionary, fits[0], found, settings, patch_contrast=patches.contrast
             )
     known = {**bank.provenance, "blur_sigma_px": found.blur_sigma_px}
+    if found.contract.lattice > 1:
+        told = (
+            "learned on a Bayer mosaic: a kernel sees the colours as it learned them only where "
+            "its patch begins on an even row and column"
+        )
+        bank = replace(bank, warnings=(*bank.warnings, told))
     if flagged:
         known["marked_components"] = [[i + 1, name, s.keep_marked] for i, name in flagged]
     return calibrated(replace(bank, provenance=known), desk)

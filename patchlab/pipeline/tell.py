@@ -23,6 +23,7 @@ def photos(intake: Intake) -> dict[str, Any]:
         "hidden": intake.listing.hidden,
         "other": intake.listing.other,
         "pixels": intake.contract.pixels,
+        "plane": intake.contract.plane,
         "transfer": intake.contract.transfer,
         "notes": dict(sorted(Counter(n for f in intake.frames for n in f.notes).items())),
     }
@@ -37,6 +38,7 @@ def survey(found: Survey, head: dict[str, Any]) -> dict[str, Any]:
     return {
         "frames": _frames(head["photos"]),
         "pixels": found.contract.pixels,
+        "plane": found.contract.plane,
         "noise": _noise(found),
         "blur": _blur(found),
         "spectrum": {

@@ -8,7 +8,7 @@ from __future__ import annotations
 import io
 from collections import Counter
 from collections.abc import Callable, Mapping
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
 from pathlib import Path
 from typing import Any
 
@@ -137,7 +137,9 @@ def detect(
 
 def _options(bank: Bank) -> images.ReadOptions:
     c = bank.contract
-    return images.ReadOptions(white=c.white, black=c.black, transfer=c.transfer, pixels=c.pixels)
+    known = images.ReadOptions(white=c.white, black=c.black, transfer=c.transfer, pixels=c.pixels)
+    plane = c.plane.rpartition(" ")[2]
+    return replace(known, bayer=plane) if plane else known  # type: ignore[arg-type]
 
 
 def _detect_one(
