@@ -3,6 +3,8 @@
     python filters/rebuild.py          # make them
     python filters/rebuild.py --check  # compare a fresh build with what stands here
 
+Making them also makes the pictures in ``tour/`` that the README shows.
+
 Each ``NAME.toml`` here becomes the bank ``NAME/``. Learning ends in the same bytes on one
 machine; between machines the last digits of a matrix product differ, so the check asks for
 kernels at |cos| >= 0.999, thresholds within 2 %, and targets that agree with their oracle.
@@ -18,6 +20,7 @@ from pathlib import Path
 import numpy as np
 
 from patchlab import bank as banks
+from patchlab import report
 from patchlab.pipeline import desk, run, use
 from patchlab.settings import Settings, from_toml
 
@@ -25,11 +28,23 @@ HERE = Path(__file__).resolve().parent
 PHOTOS = HERE.parent / "sample_images"
 
 
+TOUR = ("atoms", "bank", "edges")
+"""Pictures of the first bank's page that the README shows."""
+
+
 def build(config: Path, folder: Path) -> Path:
     """Run the main job by one configuration; gives the bank's folder."""
     settings = Settings(**from_toml(config.read_text(), config.name), name=config.stem)
     run.work(PHOTOS, desk.Desk(folder, settings))
     return folder / "bank"
+
+
+def keep_pictures(folder: Path) -> None:
+    """Write a run's page and keep the README's pictures of it."""
+    report.write(folder)
+    (HERE / "tour").mkdir(exist_ok=True)
+    for name in TOUR:
+        shutil.copyfile(folder / "report" / f"{name}.png", HERE / "tour" / f"{name}.png")
 
 
 def differences(standing: Path, fresh: Path) -> list[str]:
@@ -68,6 +83,8 @@ def main(check: bool) -> int:
             else:
                 shutil.rmtree(standing, ignore_errors=True)
                 shutil.copytree(fresh, standing)
+                if config.stem == "tessary_edges":
+                    keep_pictures(fresh.parent)
                 print(f"{config.stem}: made")
     return 1 if wrong else 0
 

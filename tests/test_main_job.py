@@ -63,7 +63,9 @@ def test_run_tells_what_it_made(first):
     assert result["patches"] == 6000
     assert result["components"] >= 30
     assert result["converged"] is True
-    assert result["fits"]["good"] > 0.6 * result["components"]
+    assert result["fits"]["median_r2"] > 0.85
+    assert result["fits"]["failed"] < 0.1 * result["components"]
+    assert result["fits"]["good"] > 0.3 * result["components"]
     bank = result["bank"]
     assert Path(bank["path"]) == out / "bank"
     assert bank["kernels"] == 16

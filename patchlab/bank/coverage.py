@@ -378,11 +378,14 @@ def rotated_basis(atoms: F64, seed: int, turns: int = 1) -> F64:
     return np.concatenate(out).reshape(turns * k, *atoms.shape[1:])
 
 
-def untrained_widths(sizes: int) -> Widths:
-    """Widths of a sensible bank that saw no photograph: 1.2 by 2.4 px, then 1.8 times that."""
-    return tuple(
-        (UNTRAINED[0] * UNTRAINED_RATIO**i, UNTRAINED[1] * UNTRAINED_RATIO**i) for i in range(sizes)
-    )
+def untrained_widths(sizes: int, side: int) -> Widths:
+    """Widths of a sensible bank that saw no photograph: 1.2 by 2.4 px, then 1.8 times that.
+
+    They keep to the bounds that a trained bank keeps to (:func:`size_bounds`).
+    """
+    _, across, along = size_bounds(side)
+    steps = [UNTRAINED_RATIO**i for i in range(sizes)]
+    return tuple((min(UNTRAINED[0] * s, across), min(UNTRAINED[1] * s, along)) for s in steps)
 
 
 def report_coverage(
@@ -416,7 +419,7 @@ def report_coverage(
     return Coverage(
         learned=table.bank(structure, widths),
         rotated=_refine(null, structure, ROUGH).coverage,
-        untrained=table.bank(structure, untrained_widths(len(structure))),
+        untrained=table.bank(structure, untrained_widths(len(structure), basis.shape[1])),
         budget=np.array([k for k, _ in budgets], dtype=np.int64),
         curve=np.array([_best_on_grid(table, s)[1] for _, s in budgets]),
     )

@@ -14,6 +14,7 @@ from patchlab.images.folder import (
     iterate,
     list_photos,
     read_file,
+    reread,
     take_in,
 )
 from patchlab.images.pfnc import RawLayout
@@ -34,6 +35,7 @@ __all__ = [
     "make_sample_images",
     "memory_needed",
     "read_file",
+    "reread",
     "sample",
     "sample_folder",
     "take_in",

@@ -23,6 +23,7 @@ from patchlab.types import (
     Frame,
     KernelFits,
     PatchSet,
+    Quarantined,
     Survey,
     TableKind,
 )
@@ -96,21 +97,24 @@ def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
             progress=desk.progress,
         )
 
-    def example(found: Survey) -> dict[str, bytes]:
-        plain = tell.survey(found, about["body"])
-        return {
-            "example.npy": store.npy_bytes(_example(intake).pixels),
-            "survey.json": store.canonical_json(plain),
-        }
+    example = _example(intake)
+    about["body"]["example"] = example.path
+    pixels = store.npy_bytes(example.pixels)
 
-    about["body"]["example"] = _example(intake).path
-    return desk.stage("survey", about, make, example)
+    def beside(found: Survey) -> dict[str, bytes]:
+        plain = store.canonical_json(tell.survey(found, about["body"]))
+        return {"example.npy": pixels, "survey.json": plain}
+
+    return desk.stage("survey", about, make, beside)
 
 
 def _example(intake: images.Intake) -> Frame:
     """The frame in the middle of the folder, its middle where it is large: for the page."""
-    middle = intake.frames[len(intake.frames) // 2].path
-    frame = next(f for f in images.iterate(intake) if f.path == middle)
+    middle = intake.frames[len(intake.frames) // 2]
+    pages = images.reread(next(task for task in intake.tasks if task[1] == middle.file))
+    if isinstance(pages, Quarantined):
+        raise InputError(pages.reason, where=pages.path)
+    frame = pages[middle.page]
     top, left = (
         max(0, (n - limit) // 2) for n, limit in zip(frame.pixels.shape, EXAMPLE, strict=True)
     )

@@ -33,6 +33,9 @@ from patchlab.types import (
     Survey,
 )
 
+SHOWN_WITHOUT_PROMISE = 0.98
+"""Quantile of the responses that serves the page's example where noise is not known."""
+
 Draw = Callable[[Frame, EdgeMap, int], Mapping[str, bytes]]
 
 
@@ -336,11 +339,12 @@ def _example(out: Path, survey: Survey, head: Mapping[str, Any]) -> Frame | None
 def _example_edges(
     folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any], frame: Frame, rate: float
 ) -> tuple[EdgeMap | None, str]:
-    if bank.thresholds is None:
-        return None, "this bank has no threshold in noise units"
     respond = responder(folder, bank, plan, head)
     try:
-        return edges.detect(bank, frame.pixels, respond, rate=rate), ""
+        if bank.thresholds is not None:
+            return edges.detect(bank, frame.pixels, respond, rate=rate), ""
+        level = float(np.quantile(np.abs(respond(frame.pixels)), SHOWN_WITHOUT_PROMISE))
+        return edges.detect(bank, frame.pixels, respond, threshold=max(level, 1e-6)), ""
     except PatchlabError as error:
         return None, str(error)
 

@@ -162,13 +162,17 @@ def test_budgets():
     assert set(one.frame.tolist()) == {0}
 
 
-def test_noise_sets_the_floor_of_the_contrast():
-    quiet = np.full((90, 110), 100, np.uint8)
-    quiet[::2, ::2] = 101
+def test_patches_below_the_noise_are_not_taken():
+    half = np.full((90, 110), 100, np.uint8)
+    half[::2, ::2] = 101  # contrast 0.43
+    half[:, 60::4] = 140  # contrast of 17
     noisy = dataclasses.replace(PLAIN, noise_sd=2.0)
-    got = sample([Frame("a", quiet, MONO8)], noisy, SampleSettings(patches=50), count_frames=1)
-    assert (got.contrast == 2.0).all()
-    assert got.patches.std() < 0.25
+    got = sample([Frame("a", half, MONO8)], noisy, SampleSettings(patches=50), count_frames=1)
+    assert (got.contrast >= 4.0).all()
+    assert (got.origin[:, 1] > 60 - got.size).all()
+    assert got.rejected["below the noise"] > 10
+    with pytest.raises(InputError, match="noise"):
+        sample([Frame("a", half[:, :55], MONO8)], noisy, SampleSettings(), count_frames=1)
 
 
 def test_sixteen_bit_copies_give_the_same_patches():
