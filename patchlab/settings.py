@@ -73,6 +73,9 @@ class Settings:
         "Input table; auto stabilises the noise when it can be measured, else linear.",
         choices=("auto", "identity", "linear", "log", "stabilised"),
     )
+    mixed_cameras: bool = _setting(
+        False, "survey", "Allow frames of several cameras, told by their sizes and noise."
+    )
     # further frames of the camera
     static: str | None = _setting(
         None, "measure", "Folder with one folder for each static scene, two frames or more in each."

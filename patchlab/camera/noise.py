@@ -139,6 +139,14 @@ class NoiseMeter:
             self._total_blocks += looked
             self._grid.add(region)
 
+    def join(self, other: NoiseMeter) -> None:
+        """Take over what another meter collected."""
+        self.contract = self.contract or other.contract
+        self._samples += other._samples
+        self._blocks += other._blocks
+        self._total_blocks += other._total_blocks
+        self._grid.join(other._grid)
+
     def result(self) -> NoiseModel:
         """The law, or why there is none."""
         if self.contract is None:

@@ -2,8 +2,9 @@
 
 from __future__ import annotations
 
-from collections.abc import Callable, Iterable, Sequence
+from collections.abc import Callable, Iterable, Mapping, Sequence
 from dataclasses import replace
+from itertools import combinations
 
 import numpy as np
 
@@ -15,8 +16,11 @@ from patchlab.camera.pixels import limited
 from patchlab.camera.spectrum import Spectrum, SpectrumMeter
 from patchlab.camera.static import measure_noise_dark, measure_noise_static
 from patchlab.camera.table import default_kind, make_table, sd_of
+from patchlab.errors import InputError
 from patchlab.progress import Progress, silent
 from patchlab.types import Frame, InputContract, NoiseModel, SlantedEdge, Survey, TableKind
+
+OTHER_NOISE = float(np.log(4 / 3))
 
 
 def survey(
@@ -27,6 +31,7 @@ def survey(
     static: Iterable[Sequence[Frame]] | None = None,
     dark: Iterable[Frame] | None = None,
     edge: Frame | None = None,
+    mixed: bool = False,
     progress: Progress = silent,
 ) -> Survey:
     """Measure noise, blur, spectrum and marks of a camera and make its input table.
@@ -40,6 +45,7 @@ def survey(
         linear (identity for float32)
     static : static scenes, which tell the noise better than photographs do
     dark : dark frames, which tell the read noise best
+    mixed : allow frames of several cameras, told by their sizes and noise
     edge : a crop with one slanted edge, which tells the blur best
     progress : told after every frame
 
@@ -49,17 +55,24 @@ def survey(
 
     Raises
     ------
-    InputError : no frame, mixed contracts, static or dark frames that do not belong together,
-        no slanted edge, or ``kind="stabilised"`` without a noise law.
+    InputError : no frame, mixed contracts, several cameras, static or dark frames that do not
+        belong together, no slanted edge, or ``kind="stabilised"`` without a noise law.
     """
     chart = None if edge is None else slanted_edge(edge)
-    noise_meter, spectrum_meter = NoiseMeter(), SpectrumMeter()
+    by_size: dict[tuple[int, ...], tuple[str, NoiseMeter]] = {}
+    spectrum_meter = SpectrumMeter()
     total = 0
     for frame in limited(frames_factory(), contract):
-        noise_meter.add(frame)
+        size = tuple(sorted(frame.pixels.shape))
+        by_size.setdefault(size, (frame.path, NoiseMeter()))[1].add(frame)
         spectrum_meter.add(frame)
         total += 1
         progress("survey", total, 0, "noise and spectrum")
+    if not mixed:
+        _one_camera(by_size)
+    noise_meter = NoiseMeter()
+    for _, meter in by_size.values():
+        noise_meter.join(meter)
     noise, notes = better_noise(noise_meter.result(), static, dark)
     spectrum = spectrum_meter.result()
 
@@ -84,6 +97,32 @@ def survey(
         notes=notes,
     )
     return found if spectrum is None else _with_spectrum(found, spectrum)
+
+
+def _one_camera(by_size: Mapping[tuple[int, ...], tuple[str, NoiseMeter]]) -> None:
+    """Refuse frames of several sizes whose noise differs as that of one camera never does.
+
+    Raises
+    ------
+    InputError : two sizes whose standard deviations differ by a third at every level.
+    """
+    laws = [(size, path, meter.result()) for size, (path, meter) in by_size.items()]
+    known = [law for law in laws if law[2].measurable] if len(laws) > 1 else []
+    for one, two in combinations(known, 2):
+        low = max(one[2].levels.min(), two[2].levels.min())
+        high = min(one[2].levels.max(), two[2].levels.max())
+        if high <= low:
+            continue
+        at = np.linspace(low, high, 16)
+        ratio = np.log(np.interp(at, one[2].levels, one[2].sd))
+        ratio = ratio - np.log(np.interp(at, two[2].levels, two[2].sd))
+        if np.abs(ratio).min() > OTHER_NOISE and abs(np.sign(ratio).sum()) == at.size:
+            sizes = ["{1} x {0} ({2})".format(*law[0], law[1]) for law in (one, two)]
+            raise InputError(
+                f"the frames of {sizes[0]} and those of {sizes[1]} are of different cameras: their "
+                f"noise differs by a factor of {float(np.exp(np.abs(np.median(ratio)))):.1f}",
+                remedy="survey each camera on its own, or allow it with --mixed-cameras",
+            )
 
 
 def _blur(meter: BlurMeter, chart: SlantedEdge | None) -> tuple[float | None, str]:

@@ -15,6 +15,7 @@ import struct
 import threading
 import warnings
 from collections.abc import Callable, Iterator
+from pathlib import PurePosixPath
 from typing import Any
 
 import numpy as np
@@ -24,7 +25,7 @@ from numpy.typing import NDArray
 from PIL import Image, ImageFile
 
 from patchlab.errors import InputError, PatchlabError
-from patchlab.images import formats, pfnc
+from patchlab.images import extras, formats, pfnc
 from patchlab.images.develop import Picture, ReadOptions, check_size, develop
 from patchlab.store import sha256
 from patchlab.types import Frame
@@ -46,6 +47,8 @@ SUFFIXES = frozenset(
         ".pnm",
         ".npy",
         pfnc.SUFFIX,
+        *extras.RAW_SUFFIXES,
+        *extras.VIDEO_SUFFIXES,
     )
 )
 """File name endings (lower case) that are taken for pictures."""
@@ -102,8 +105,13 @@ def _reader(data: bytes, path: str) -> Reader:
     """The reader for some bytes: by their first few, or by name where pixels stand alone."""
     if not data:
         raise InputError("the file is empty")
-    if path.lower().endswith(pfnc.SUFFIX):
+    suffix = PurePosixPath(path).suffix.lower()
+    if suffix == pfnc.SUFFIX:
         return _read_raw
+    if suffix in extras.RAW_SUFFIXES:
+        return extras.read_camera_raw
+    if suffix in extras.VIDEO_SUFFIXES:
+        return extras.read_video
     for magic, reader in _MAGIC:
         if magic.match(data):
             return reader

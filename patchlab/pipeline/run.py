@@ -94,6 +94,7 @@ def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
             static=extras.static_frames(),
             dark=extras.dark_frames(),
             edge=extras.edge_frame(),
+            mixed=desk.settings.mixed_cameras,
             progress=desk.progress,
         )
 
