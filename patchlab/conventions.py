@@ -102,7 +102,7 @@ def fold_theta(theta: float, phase: float = 0.0) -> tuple[float, float]:
     (theta, -phase) are one kernel. The phase comes back in (-pi, pi].
     """
     turns = math.floor(theta / math.pi)
-    folded = theta - turns * math.pi
+    folded = max(theta - turns * math.pi, 0.0)  # a theta just below 0 rounds to turn 0
     if folded >= math.pi:  # rounding just below a multiple of pi
         folded -= math.pi
         turns += 1

@@ -7,6 +7,7 @@ all made from this one list.
 from __future__ import annotations
 
 import dataclasses
+import json
 import tomllib
 from collections.abc import Mapping
 from dataclasses import dataclass, field
@@ -49,6 +50,17 @@ class Settings:
     pixels: str | None = _setting(
         None, "photos", "Pixel format by its PFNC name.", choices=tuple(PIXEL_FORMATS)
     )
+    raw_format: str | None = _setting(
+        None, "photos", "PFNC name of the pixels in .raw files, where no sidecar tells it."
+    )
+    raw_width: int | None = _setting(None, "photos", "Width of .raw files, pixels.", low=1)
+    raw_height: int | None = _setting(None, "photos", "Height of .raw files, pixels.", low=1)
+    bayer: str = _setting(
+        "green",
+        "photos",
+        "What is taken of a Bayer sensor: its green lattice, luminance, or the mosaic.",
+        choices=("green", "luminance", "mosaic"),
+    )
     mixed_depths: bool = _setting(False, "photos", "Allow frames of several depths in one folder.")
     max_bad: float = _setting(
         0.1, "photos", "Share of files that may be unusable.", low=0.0, high=1.0
@@ -63,6 +75,19 @@ class Settings:
         "Input table; auto stabilises the noise when it can be measured, else linear.",
         choices=("auto", "identity", "linear", "log", "stabilised"),
     )
+    mixed_cameras: bool = _setting(
+        False, "survey", "Allow frames of several cameras, told by their sizes and noise."
+    )
+    # further frames of the camera
+    static: str | None = _setting(
+        None, "measure", "Folder with one folder for each static scene, two frames or more in each."
+    )
+    dark: str | None = _setting(
+        None, "measure", "Folder of frames taken in darkness at the photographs' exposure."
+    )
+    slanted_edge: str | None = _setting(
+        None, "measure", "Picture of one edge that leans 2 to 10 degrees, for the sharpness."
+    )
     # sampling
     patch_size: int = _setting(12, "patches", "Patch side, pixels.", low=8, high=32)
     patches: int = _setting(60_000, "patches", "Patches in all.", low=500, high=10_000_000)
@@ -71,6 +96,11 @@ class Settings:
         0.3, "patches", "Share of the flattest patches dropped.", low=0.0, high=0.95
     )
     normalise: bool = _setting(True, "patches", "Divide each patch by its contrast.")
+    all_frames: bool = _setting(
+        False,
+        "patches",
+        "Draw from every frame, also from near duplicates, blurred and clipped ones.",
+    )
     # learning
     method: str = _setting(
         "ica", "learn", "Learner: independent components or sparse code.", choices=("ica", "sparse")
@@ -104,6 +134,9 @@ class Settings:
     kernels: int = _setting(16, "bank", "Kernels in the bank.", low=4, high=64)
     purpose: str = _setting("edges", "bank", "What the bank is for.", choices=("edges", "features"))
     lines: bool = _setting(False, "bank", "Add even (line) partners to an edge bank.")
+    keep_marked: bool = _setting(
+        False, "bank", "Let components that describe a mark of the camera into the bank."
+    )
     as_learned: bool = _setting(False, "bank", "Export the learned filters themselves.")
     false_edges: float = _setting(
         10.0, "bank", "False edge elements per megapixel of flat area.", low=0.1, high=1000.0
@@ -203,6 +236,6 @@ def to_toml(settings: Settings) -> str:
         value = getattr(settings, f.name)
         text = {True: "true", False: "false"}.get(value) if isinstance(value, bool) else None
         if text is None:
-            text = f'"{value}"' if isinstance(value, str) else repr(value)
+            text = json.dumps(value, ensure_ascii=False) if isinstance(value, str) else repr(value)
         lines.append(f"# {f.name} =" if value is None else f"{f.name} = {text}")
     return "\n".join(lines).strip() + "\n"

@@ -37,12 +37,16 @@ class InputContract:
     pixels : PFNC name (Mono8, Mono10, Mono12, Mono16) or float32
     black, white : codes of no light and of full scale
     transfer : "linear" or "srgb", how codes follow light
+    plane : "" for a monochrome picture; of a Bayer sensor its pattern and the plane that is taken:
+        "BayerRG green" (the green pixels of the red rows), "BayerRG luminance" (bilinear colours,
+        Rec. 709 weights) or "BayerRG mosaic" (all pixels; patches begin on even rows and columns)
     """
 
     pixels: str
     black: float
     white: float
     transfer: Literal["linear", "srgb"] = "linear"
+    plane: str = ""
 
     def __post_init__(self) -> None:
         _check(self.white > self.black, "white level must exceed black level")
@@ -52,6 +56,11 @@ class InputContract:
     def format(self) -> PixelFormat:
         """The pixel format, with its depth and types."""
         return pixel_format(self.pixels)
+
+    @property
+    def lattice(self) -> int:
+        """Rows and columns after which the pixels' meaning repeats: 2 for a mosaic, else 1."""
+        return 2 if self.plane.endswith(" mosaic") else 1
 
     def light(self, codes: NDArray[Any]) -> F64:
         """Linear light in [0, 1] of pixel codes: black to 0, white to 1."""
@@ -221,6 +230,28 @@ class Mark:
 
 
 @dataclass(frozen=True, eq=False)
+class SlantedEdge:
+    """Modulation transfer across one edge.
+
+    Parameters
+    ----------
+    angle_deg : of the edge from the nearest axis
+    frequency_cpp, mtf : ndarray, cycles per pixel up to 1 and transfer, 1 at 0
+    mtf50_cpp : first frequency where the transfer is one half
+    sigma_px : of the Gaussian line spread with this MTF50 (pixel aperture included)
+    distance_px, spread : the edge spread function, distance from the edge and light
+    """
+
+    angle_deg: float
+    frequency_cpp: F64
+    mtf: F64
+    mtf50_cpp: float
+    sigma_px: float
+    distance_px: F64
+    spread: F64
+
+
+@dataclass(frozen=True, eq=False)
 class Survey:
     """What the camera itself does to pictures.
 
@@ -229,6 +260,8 @@ class Survey:
     linear light over the frame's mean; ``noise_power`` is the noise's share on that scale
     and ``noise_overtakes_cpp`` the frequency above which it is the larger part, or None.
     ``distrusted`` lists (path, reason) of frames better left out of learning.
+    ``slanted_edge`` is the chart's transfer when one was given, and then where the blur is from.
+    ``notes`` say what static, dark or chart frames changed, or why they could not serve.
     """
 
     contract: InputContract
@@ -247,6 +280,8 @@ class Survey:
     noise_overtakes_cpp: float | None = None
     distrusted: tuple[tuple[str, str], ...] = ()
     edge_widths_px: F64 = field(default_factory=lambda: np.empty(0))
+    slanted_edge: SlantedEdge | None = None
+    notes: tuple[str, ...] = ()
 
 
 # ---------------------------------------------------------------- learning

@@ -142,6 +142,7 @@ def _input_entry(table: InputTable) -> dict[str, Any]:
         "black": float(about.black),
         "white": float(about.white),
         "transfer": about.transfer,
+        "plane": about.plane,
         "table": {
             "kind": table.kind,
             "file": None if table.values is None else TABLE,
@@ -339,6 +340,7 @@ def _table(folder: Path, head: Mapping[str, Any]) -> InputTable:
         float(entry["black"]),
         float(entry["white"]),
         _one_of(entry["transfer"], ("linear", "srgb"), "transfer"),
+        str(entry.get("plane", "")),
     )
     table = entry["table"]
     values = None

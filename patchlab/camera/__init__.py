@@ -1,19 +1,22 @@
 """What the camera itself does to pictures: noise, blur, spectrum, marks; the input table."""
 
 from patchlab.camera.blur import measure_blur
-from patchlab.camera.chart import SlantedEdge, slanted_edge
+from patchlab.camera.chart import slanted_edge
+from patchlab.camera.flags import flag_components
 from patchlab.camera.marks import find_marks
 from patchlab.camera.noise import measure_noise
+from patchlab.camera.pixels import MAX_FRAMES
 from patchlab.camera.spectrum import Spectrum, measure_spectrum
 from patchlab.camera.static import measure_noise_dark, measure_noise_static
 from patchlab.camera.survey import survey
 from patchlab.camera.table import default_kind, make_table, noise_of_table
 
 __all__ = [
-    "SlantedEdge",
+    "MAX_FRAMES",
     "Spectrum",
     "default_kind",
     "find_marks",
+    "flag_components",
     "make_table",
     "measure_blur",
     "measure_noise",

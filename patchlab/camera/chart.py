@@ -2,36 +2,12 @@
 
 from __future__ import annotations
 
-from dataclasses import dataclass
-
 import numpy as np
 
 from patchlab.errors import InputError
-from patchlab.types import F64, Frame
+from patchlab.types import F64, Frame, SlantedEdge
 
 OVERSAMPLING = 4
-
-
-@dataclass(frozen=True, eq=False)
-class SlantedEdge:
-    """Modulation transfer across one edge.
-
-    Parameters
-    ----------
-    angle_deg : of the edge from the nearest axis
-    frequency_cpp, mtf : ndarray, cycles per pixel up to 1 and transfer, 1 at 0
-    mtf50_cpp : first frequency where the transfer is one half
-    sigma_px : of the Gaussian line spread with this MTF50 (pixel aperture included)
-    distance_px, spread : the edge spread function, distance from the edge and light
-    """
-
-    angle_deg: float
-    frequency_cpp: F64
-    mtf: F64
-    mtf50_cpp: float
-    sigma_px: float
-    distance_px: F64
-    spread: F64
 
 
 def _upright(light: F64) -> F64:

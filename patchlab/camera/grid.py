@@ -41,6 +41,11 @@ class GridMeter:
         for total, plane in ((self._sum, size), (self._count, weight)):
             total += plane[:h, :w].reshape(h // 8, 8, w // 8, 8).sum(axis=(0, 2))
 
+    def join(self, other: GridMeter) -> None:
+        """Take over what another meter collected."""
+        self._sum += other._sum
+        self._count += other._count
+
     @property
     def phases(self) -> F64:
         """Mean size for each phase, (8, 8), by the (row, column) where a block begins."""

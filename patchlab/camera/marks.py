@@ -17,6 +17,15 @@ from patchlab.camera.flat import LAG, Blocks, flat_blocks, flat_law, join
 from patchlab.camera.grid import GRID_THRESHOLD, GridMeter
 from patchlab.camera.pixels import Region, clip_codes, diagonal_band, limited, regions
 from patchlab.camera.table import sd_of
+from patchlab.camera.wide import (
+    DEPTH_THRESHOLD,
+    SHADE_THRESHOLD,
+    SPOT_THRESHOLD,
+    SpotMeter,
+    falloff,
+    lost_bits,
+    shading,
+)
 from patchlab.errors import InputError
 from patchlab.types import F64, Frame, InputContract, Mark, NoiseModel
 
@@ -31,6 +40,7 @@ MISSING_THRESHOLD = 0.05
 SHARP_THRESHOLD = -0.03
 DUPLICATE_THRESHOLD = 0.995
 BLURRED_THRESHOLD = 0.62
+MOSTLY_CLIPPED = 0.2
 
 
 @dataclass(frozen=True)
@@ -68,6 +78,18 @@ _ABOUT = {
         "filters with overshoot at their edges, and noise that is not white",
         "turn sharpening off in the camera",
     ),
+    "posterised_depth": _About(
+        "false steps in smooth areas, and flat patches where there was shading",
+        "save the camera's full depth, and turn tone curves and colour tables off",
+    ),
+    "fixed_spots": _About(
+        "small centre-surround filters, and the same false edges in every frame",
+        "map the sensor's defective pixels in the camera, or clean the cover glass",
+    ),
+    "vignetting": _About(
+        "none on filters; noise and contrast change from the middle to the corners",
+        "correct the shading with a flat field before the depth is cut, or close the iris a stop",
+    ),
     "near_duplicates": _About(
         "one scene weighs more than the others",
         "all but the first of each group are left out",
@@ -87,6 +109,7 @@ class _FrameFacts:
     row: float
     column: float
     clipped: float
+    falloff: float
     sharpness: float
     thumb: F64
 
@@ -168,6 +191,7 @@ class _Pool:
     """Sums over all frames."""
 
     grid: GridMeter = field(default_factory=GridMeter)
+    spots: SpotMeter = field(default_factory=SpotMeter)
     blocks: list[Blocks] = field(default_factory=list)
     looked: int = 0
     parity: F64 = field(default_factory=lambda: np.zeros(2))
@@ -195,6 +219,7 @@ class MarkMeter:
             self._pool.looked += looked
             self._lattice(region)
         self._count_codes(frame)
+        self._pool.spots.add(frame, found)
         if found:
             self._pool.facts.append(self._facts(frame, found[len(found) // 2]))
 
@@ -215,6 +240,7 @@ class MarkMeter:
             _stripes(codes, region.usable),
             _stripes(codes.T, region.usable.T),
             clipped,
+            falloff(frame),
             _sharpness(codes, region.usable, variance),
             _thumb(frame.contract.light(frame.pixels)),
         )
@@ -257,23 +283,41 @@ class MarkMeter:
             ("interpolation_lattice", lattice, LATTICE_THRESHOLD),
             ("clipped_levels", float(np.mean([f.clipped for f in facts])), CLIPPED_THRESHOLD),
             ("missing_levels", missing_levels(self._pool.histogram), MISSING_THRESHOLD),
+            ("posterised_depth", lost_bits(self._pool.histogram), DEPTH_THRESHOLD),
             ("near_duplicates", doubles, 0.0),
             ("blurred_frames", blurred, 0.0),
         ]
         marks = [_mark(name, None if few else v > t, v, t) for name, v, t in measured]
         marks.insert(6, self._sharpening(few))
+        shade, shaded = shading(np.array([f.falloff for f in facts]))
+        spots, spotted = self._pool.spots.result(MIN_FRAMES)
+        marks[7:7] = [
+            _mark("fixed_spots", spotted, spots, SPOT_THRESHOLD),
+            _mark("vignetting", None if few else shaded, shade, SHADE_THRESHOLD),
+        ]
         return Marks(tuple(marks), odd)
 
     def _odd_frames(self) -> tuple[tuple[tuple[str, str], ...], float, float]:
+        """Frames better left out, with the reason, and the shares of copies and soft frames.
+
+        The rules: a small copy that correlates above 0.995 with an earlier frame's; more than a
+        fifth of the pixels clipped, where that is not the rule in the folder; edges less than
+        0.62 as sharp as the folder's median (eight frames and more).
+        """
         facts = self._pool.facts
         copies = near_duplicates(np.stack([f.thumb for f in facts]))
         sharp = np.array([f.sharpness for f in facts])
         usual = float(np.nanmedian(sharp)) if np.isfinite(sharp).any() else 0.0
         soft = sharp < BLURRED_THRESHOLD * usual
+        burnt = np.array([f.clipped > MOSTLY_CLIPPED for f in facts])
+        burnt &= burnt.mean() < 0.5  # else it is how this folder was taken
+        reasons = {"near duplicate": copies, "clipped": burnt}
+        if len(facts) >= MIN_FRAMES:
+            reasons["blurred"] = soft
         odd = [
-            (f.path, "near duplicate" if copy else "blurred")
-            for f, copy, blur in zip(facts, copies, soft, strict=True)
-            if copy or blur
+            (f.path, next(reason for reason, hit in reasons.items() if hit[i]))
+            for i, f in enumerate(facts)
+            if any(hit[i] for hit in reasons.values())
         ]
         return tuple(odd), float(copies.mean()), float(soft.mean())
 

@@ -48,7 +48,7 @@ AGREEING = 0.85
 ROUNDS = 25
 
 _COLOUR_NOTE = "the noise is not white, so its size does not tell the gain in electrons"
-_NO_ELECTRONS: dict[str, Any] = {
+NO_ELECTRONS: dict[str, Any] = {
     "gain": None,
     "gain_error": None,
     "read_noise": None,
@@ -127,7 +127,7 @@ class NoiseMeter:
     def add(self, frame: Frame) -> None:
         """Look at one frame."""
         self.contract = frame.contract
-        scale = _scale(frame.contract)
+        scale = unit_scale(frame.contract)
         found = list(regions(frame))
         for region in found:
             region = replace(region, codes=(region.codes - frame.contract.black) * scale)
@@ -138,6 +138,14 @@ class NoiseMeter:
             self._blocks.append(blocks)
             self._total_blocks += looked
             self._grid.add(region)
+
+    def join(self, other: NoiseMeter) -> None:
+        """Take over what another meter collected."""
+        self.contract = self.contract or other.contract
+        self._samples += other._samples
+        self._blocks += other._blocks
+        self._total_blocks += other._total_blocks
+        self._grid.join(other._grid)
 
     def result(self) -> NoiseModel:
         """The law, or why there is none."""
@@ -180,7 +188,7 @@ def measure_noise(frames: Iterable[Frame]) -> NoiseModel:
 # ---------------------------------------------------------------- the two-band law
 
 
-def _scale(contract: InputContract) -> float:
+def unit_scale(contract: InputContract) -> float:
     """Floats are measured as if they were 12-bit codes, so that one set of floors serves."""
     return 1.0 if contract.format.integer else 4095 / (contract.white - contract.black)
 
@@ -309,7 +317,7 @@ def _law(
         fit = _consistent(samples.scaled(_mask_gains(acov)), _limits(contract), bent)
         reason = _doubt(contract, fit, grid)
         if not reason:
-            return replace(model(contract, fit), autocovariance=acov, **_NO_ELECTRONS)
+            return replace(model(contract, fit), autocovariance=acov, **NO_ELECTRONS)
     else:
         reason = _doubt(contract, fit, grid)
         if not reason:
@@ -341,7 +349,7 @@ def refused(reason: str, kept: float) -> NoiseModel:
 def _limits(contract: InputContract) -> tuple[float, float]:
     """Clip codes above black, in the units of measurement."""
     low, high = clip_codes(contract)
-    scale = _scale(contract)
+    scale = unit_scale(contract)
     return (low - contract.black) * scale, (high - contract.black) * scale
 
 
@@ -383,7 +391,7 @@ def _line_levels(contract: InputContract) -> F64:
 
 def model(contract: InputContract, fit: Fit) -> NoiseModel:
     """A fit as the noun, in codes."""
-    scale = _scale(contract)
+    scale = unit_scale(contract)
     at = fit.levels / scale + contract.black
     points = np.stack([at, np.sqrt(fit.variance) / scale], axis=1)
     if fit.bent:
@@ -405,7 +413,7 @@ def model(contract: InputContract, fit: Fit) -> NoiseModel:
 
 def _coloured(contract: InputContract, flat: FlatLaw, grid: float) -> NoiseModel:
     """The law of smoothed noise, from the variance of the flattest blocks."""
-    scale = _scale(contract)
+    scale = unit_scale(contract)
     small = _too_small(contract, float(np.sqrt(np.median(flat.variance))), grid)
     if small:
         return refused(small, flat.agreeing)

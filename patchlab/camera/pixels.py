@@ -75,7 +75,7 @@ def limited(frames: Iterable[Frame], contract: InputContract | None = None) -> I
         raise InputError("there is no frame to measure", remedy="give a folder of photographs")
 
 
-def _windows(shape: tuple[int, ...]) -> Iterator[tuple[slice, slice]]:
+def windows(shape: tuple[int, ...]) -> Iterator[tuple[slice, slice]]:
     """The whole frame, or eight tiles spread over a large one."""
     height, width = shape
     if height * width <= MAX_PIXELS:
@@ -92,7 +92,7 @@ def _windows(shape: tuple[int, ...]) -> Iterator[tuple[slice, slice]]:
 def regions(frame: Frame) -> Iterator[Region]:
     """The frame's pixels that are measured, about two million at most."""
     low, high = clip_codes(frame.contract)
-    for rows, cols in _windows(frame.pixels.shape):
+    for rows, cols in windows(frame.pixels.shape):
         codes = frame.pixels[rows, cols].astype(np.float32)
         if min(codes.shape) < 32:
             continue

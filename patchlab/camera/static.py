@@ -2,27 +2,36 @@
 
 Temporal variance from differences of two frames, as EMVA 1288 (release 4.0 Linear,
 2021) does; the straight line is weighted, because an unweighted intercept is useless.
+Pixels are grouped by what their neighbours say: a group then is independent of its own
+pixels' noise, so texture and noise in the level bias neither gain nor read noise.
 """
 
 from __future__ import annotations
 
-from collections.abc import Iterable, Sequence
+from collections.abc import Iterable, Iterator, Sequence
 from dataclasses import replace
-from itertools import pairwise
 
 import numpy as np
 from scipy import ndimage
 
 from patchlab.camera.flat import BLOCK, LAG, lagged_products
-from patchlab.camera.noise import MIN_KEPT, Fit, Samples, bin_means, line, model, refused
-from patchlab.camera.pixels import MAX_SAMPLES, Region, diagonal_band, draw, limited, regions
+from patchlab.camera.noise import MIN_KEPT, NO_ELECTRONS, Fit, Samples, line, model, refused
+from patchlab.camera.noise import unit_scale as _scale
+from patchlab.camera.pixels import MAX_SAMPLES, clip_codes, diagonal_band, limited, windows
+from patchlab.conventions import rng
 from patchlab.errors import InputError
 from patchlab.types import F32, F64, Frame, InputContract, NoiseModel
 
 LEVEL_LIMIT = 0.8
+LOWEST = 4.0
+SPAN = 0.2
 WHITE = 0.02
 EMVA_FLOOR = 0.24
 PAIRS = 16
+BINS = 40
+CURVE_BINS = 24
+
+_NEIGHBOURS = np.array([[1, 1, 1], [1, 0, 1], [1, 1, 1]], np.float32) / 8
 
 
 def _same_size(first: Frame, second: Frame) -> None:
@@ -35,17 +44,40 @@ def _same_size(first: Frame, second: Frame) -> None:
         )
 
 
-def _pair(first: Region, second: Region, black: float) -> tuple[Samples, F32]:
-    """Half the squared difference against the level; and the difference itself."""
-    both = first.usable & second.usable
-    difference = (first.codes - second.codes) / np.float32(np.sqrt(2))
-    # the lamp may have flickered between the two
-    difference = difference - difference[both].mean() if both.any() else difference
-    level = ndimage.gaussian_filter((first.codes + second.codes) / 2, 1.0) - np.float32(black)
-    at = draw(first, both, MAX_SAMPLES)
-    power = np.asarray((difference**2).flat[at], np.float32)
-    samples = Samples(power, np.asarray(level.flat[at], np.float32), np.zeros_like(power))
-    return samples, np.asarray(difference, np.float32)
+def _pairs(frames: list[Frame]) -> Iterator[tuple[Frame, Frame]]:
+    """Disjoint pairs, so that every difference has noise of its own."""
+    for first, second in zip(frames[::2], frames[1::2], strict=False):
+        _same_size(first, second)
+        yield first, second
+
+
+def _pair(first: Frame, second: Frame) -> Iterator[tuple[Samples, F32]]:
+    """Half the squared difference, the mean level and the neighbours' level; the difference."""
+    contract = first.contract
+    scale = _scale(contract)
+    for rows, cols in windows(first.pixels.shape):
+        one, two = (
+            (f.pixels[rows, cols].astype(np.float32) - np.float32(contract.black)) * scale
+            for f in (first, second)
+        )
+        good = np.isfinite(one) & np.isfinite(two)
+        for frame in (first, second):
+            if frame.invalid is not None:
+                good &= ~frame.invalid[rows, cols]
+        if min(one.shape) < 3 or not good.any():
+            continue
+        level = np.asarray((one + two) / 2, np.float32)
+        good &= level < LEVEL_LIMIT * (contract.white - contract.black) * scale
+        difference = np.asarray((one - two) / np.float32(np.sqrt(2)), np.float32)
+        if good.any():  # the lamp may have flickered between the two
+            difference -= difference[good].mean(dtype=np.float64)
+        around = np.asarray(ndimage.correlate(level, _NEIGHBOURS), np.float32)
+        at = np.flatnonzero(good)
+        if at.size > MAX_SAMPLES:
+            chosen = rng(0, "survey", first.path).choice(at.size, MAX_SAMPLES, replace=False)
+            at = at[np.sort(chosen)]
+        power = difference.flat[at] ** 2
+        yield Samples(power, level.flat[at], around.flat[at]), difference / np.float32(scale)
 
 
 def _tiles(plane: F64) -> F64:
@@ -74,13 +106,14 @@ def measure_noise_static(scenes: Iterable[Sequence[Frame]]) -> NoiseModel:
     Parameters
     ----------
     scenes : for each scene two or more frames of one size, taken without moving anything;
-        frames of a scene are differenced in turn
+        the frames of a scene are differenced in pairs
 
     Returns
     -------
-    NoiseModel : gain (DN per electron), read noise (DN, quantisation taken out), standard
-        errors, autocovariance unless white; or ``measurable=False`` when the scenes do not
-        span levels enough. ``source`` is "static".
+    NoiseModel : for linear contracts gain (DN per electron), read noise (DN, quantisation taken
+        out) and standard errors; where the noise is not white or the codes are not linear the
+        curve ``levels``, ``sd`` alone; the autocovariance unless white; or ``measurable=False``
+        when the scenes do not span levels enough. ``source`` is "static".
 
     Raises
     ------
@@ -98,37 +131,70 @@ def measure_noise_static(scenes: Iterable[Sequence[Frame]]) -> NoiseModel:
                 remedy="take every scene at least twice",
             )
         contract = frames[0].contract
-        for first, second in pairwise(frames):
-            _same_size(first, second)
-            for a, b in zip(regions(first), regions(second), strict=True):
-                found, difference = _pair(a, b, contract.black)
+        for first, second in _pairs(frames):
+            for found, difference in _pair(first, second):
                 samples.append(found)
                 if len(differences) < PAIRS:
                     differences.append(difference)
     if contract is None:
         raise InputError("there is no static scene", remedy="give a folder for each scene")
+    empty = [Samples(*(np.empty(0, np.float32),) * 3)]
     joined = Samples(
         *(
-            np.concatenate([getattr(s, name) for s in samples])
+            np.concatenate([getattr(s, name) for s in samples or empty])
             for name in ("band", "level", "structure")
         )
     )
-    return _static_law(contract, joined, differences)
+    return replace(_static_law(contract, joined, differences), source="static")
+
+
+def _bins(samples: Samples, count: int) -> tuple[F64, F64, F64]:
+    """Mean level, mean power and count of groups of pixels with alike neighbours."""
+    order = np.argsort(samples.structure, kind="stable")
+    parts = [p for p in np.array_split(order, count) if p.size]
+    level, power = (
+        np.array([v[p].mean(dtype=np.float64) for p in parts])
+        for v in (samples.level, samples.band)
+    )
+    return level, power, np.array([float(p.size) for p in parts])
+
+
+def _unclipped(contract: InputContract, samples: Samples, fit: Fit) -> Samples:
+    """Pixels whose neighbours lie four standard deviations above the lowest code."""
+    lowest = (clip_codes(contract)[0] - contract.black) * _scale(contract)
+    around = samples.structure.astype(np.float64)
+    return samples.at(around - LOWEST * np.sqrt(fit.at(around)) >= lowest)
 
 
 def _static_law(contract: InputContract, samples: Samples, differences: list[F32]) -> NoiseModel:
-    span = contract.white - contract.black
-    samples = samples.at(samples.level < LEVEL_LIMIT * span)
     if len(samples) < MIN_KEPT:
-        return replace(refused("there are too few unclipped pixels", 0.0), source="static")
-    fit = Fit(np.zeros(1), np.zeros(1), 0.0, float(samples.band.mean()))
+        return refused("there are too few unclipped pixels", 0.0)
+    acov = _autocovariance(differences)
+    effective = 1.0 if acov is None else 1 / float((acov**2).sum())
+    fit, kept = Fit(np.zeros(1), np.zeros(1), 0.0, float(samples.band.mean())), samples
     for _ in range(5):
-        level, power, law, count = bin_means(samples, fit.at(samples.level), 40, clip=np.inf)
-        fit = line(level, power, count, law, effective=1.0)
+        level, power, count = _bins(kept, BINS)
+        fit = line(level, power, count, fit.at(level), effective=effective)
+        kept = _unclipped(contract, samples, fit)
+        if len(kept) < MIN_KEPT:
+            return refused("there are too few unclipped pixels", 0.0)
+    if contract.transfer != "linear":
+        return _static_curve(contract, kept, acov)
     if fit.slope_error > 0.05 * fit.slope:
-        return replace(refused("the scenes do not span enough grey levels", 1.0), source="static")
-    found = model(contract, replace(fit, share=1.0))
-    return replace(found, source="static", autocovariance=_autocovariance(differences))
+        return refused("the scenes do not span enough grey levels", 1.0)
+    found = replace(model(contract, replace(fit, share=1.0)), autocovariance=acov)
+    return found if acov is None else replace(found, **NO_ELECTRONS)
+
+
+def _static_curve(contract: InputContract, samples: Samples, acov: F64 | None) -> NoiseModel:
+    """Variance by level where codes do not follow light."""
+    level, power, _ = _bins(samples, CURVE_BINS)
+    order = np.argsort(level, kind="stable")
+    level, power = level[order], power[order]
+    if np.ptp(level) < SPAN * (contract.white - contract.black) * _scale(contract):
+        return refused("the scenes do not span enough grey levels", 1.0)
+    found = model(contract, Fit(level, np.maximum(power, 0.02), bent=True, share=1.0))
+    return replace(found, autocovariance=acov)
 
 
 def measure_noise_dark(frames: Iterable[Frame]) -> NoiseModel:

@@ -2,20 +2,25 @@
 
 from __future__ import annotations
 
-from collections.abc import Callable, Iterable, Sequence
+from collections.abc import Callable, Iterable, Mapping, Sequence
 from dataclasses import replace
+from itertools import combinations
 
 import numpy as np
 
 from patchlab.camera.blur import BlurMeter
+from patchlab.camera.chart import slanted_edge
 from patchlab.camera.marks import MarkMeter
 from patchlab.camera.noise import NoiseMeter
 from patchlab.camera.pixels import limited
 from patchlab.camera.spectrum import Spectrum, SpectrumMeter
 from patchlab.camera.static import measure_noise_dark, measure_noise_static
 from patchlab.camera.table import default_kind, make_table, sd_of
+from patchlab.errors import InputError
 from patchlab.progress import Progress, silent
-from patchlab.types import Frame, InputContract, NoiseModel, Survey, TableKind
+from patchlab.types import Frame, InputContract, NoiseModel, SlantedEdge, Survey, TableKind
+
+OTHER_NOISE = float(np.log(4 / 3))
 
 
 def survey(
@@ -25,6 +30,8 @@ def survey(
     kind: TableKind | None = None,
     static: Iterable[Sequence[Frame]] | None = None,
     dark: Iterable[Frame] | None = None,
+    edge: Frame | None = None,
+    mixed: bool = False,
     progress: Progress = silent,
 ) -> Survey:
     """Measure noise, blur, spectrum and marks of a camera and make its input table.
@@ -38,6 +45,8 @@ def survey(
         linear (identity for float32)
     static : static scenes, which tell the noise better than photographs do
     dark : dark frames, which tell the read noise best
+    mixed : allow frames of several cameras, told by their sizes and noise
+    edge : a crop with one slanted edge, which tells the blur best
     progress : told after every frame
 
     Returns
@@ -46,16 +55,25 @@ def survey(
 
     Raises
     ------
-    InputError : no frame, mixed contracts, or ``kind="stabilised"`` without a noise law.
+    InputError : no frame, mixed contracts, several cameras, static or dark frames that do not
+        belong together, no slanted edge, or ``kind="stabilised"`` without a noise law.
     """
-    noise_meter, spectrum_meter = NoiseMeter(), SpectrumMeter()
+    chart = None if edge is None else slanted_edge(edge)
+    by_size: dict[tuple[int, ...], tuple[str, NoiseMeter]] = {}
+    spectrum_meter = SpectrumMeter()
     total = 0
     for frame in limited(frames_factory(), contract):
-        noise_meter.add(frame)
+        size = tuple(sorted(frame.pixels.shape))
+        by_size.setdefault(size, (frame.path, NoiseMeter()))[1].add(frame)
         spectrum_meter.add(frame)
         total += 1
         progress("survey", total, 0, "noise and spectrum")
-    noise = better_noise(noise_meter.result(), static, dark)
+    if not mixed:
+        _one_camera(by_size)
+    noise_meter = NoiseMeter()
+    for _, meter in by_size.values():
+        noise_meter.join(meter)
+    noise, notes = better_noise(noise_meter.result(), static, dark)
     spectrum = spectrum_meter.result()
 
     blur_meter, mark_meter = BlurMeter(noise), MarkMeter(noise)
@@ -63,7 +81,7 @@ def survey(
         blur_meter.add(frame)
         mark_meter.add(frame)
         progress("survey", total + done, 2 * total, "blur and marks")
-    sigma, note = blur_meter.result()
+    sigma, note = _blur(blur_meter, chart)
     marks = mark_meter.result()
     found = Survey(
         contract,
@@ -75,34 +93,95 @@ def survey(
         frames=total,
         distrusted=marks.distrusted,
         edge_widths_px=blur_meter.all_widths,
+        slanted_edge=chart,
+        notes=notes,
     )
     return found if spectrum is None else _with_spectrum(found, spectrum)
+
+
+def _one_camera(by_size: Mapping[tuple[int, ...], tuple[str, NoiseMeter]]) -> None:
+    """Refuse frames of several sizes whose noise differs as that of one camera never does.
+
+    Raises
+    ------
+    InputError : two sizes whose standard deviations differ by a third at every level.
+    """
+    laws = [(size, path, meter.result()) for size, (path, meter) in by_size.items()]
+    known = [law for law in laws if law[2].measurable] if len(laws) > 1 else []
+    for one, two in combinations(known, 2):
+        low = max(one[2].levels.min(), two[2].levels.min())
+        high = min(one[2].levels.max(), two[2].levels.max())
+        if high <= low:
+            continue
+        at = np.linspace(low, high, 16)
+        ratio = np.log(np.interp(at, one[2].levels, one[2].sd))
+        ratio = ratio - np.log(np.interp(at, two[2].levels, two[2].sd))
+        if np.abs(ratio).min() > OTHER_NOISE and abs(np.sign(ratio).sum()) == at.size:
+            sizes = ["{1} x {0} ({2})".format(*law[0], law[1]) for law in (one, two)]
+            raise InputError(
+                f"the frames of {sizes[0]} and those of {sizes[1]} are of different cameras: their "
+                f"noise differs by a factor of {float(np.exp(np.abs(np.median(ratio)))):.1f}",
+                remedy="survey each camera on its own, or allow it with --mixed-cameras",
+            )
+
+
+def _blur(meter: BlurMeter, chart: SlantedEdge | None) -> tuple[float | None, str]:
+    """Blur from the chart where there is one, else from the photographs."""
+    sigma, note = meter.result()
+    if chart is None:
+        return sigma, note
+    told = f"from the photographs {sigma:.2f} px" if sigma is not None else note
+    if not np.isfinite(chart.sigma_px):
+        return sigma, f"{note}; the slanted edge's transfer stays above one half"
+    return chart.sigma_px, (
+        f"of the Gaussian line spread with the slanted edge's MTF50 of {chart.mtf50_cpp:.3f} "
+        f"cycles per pixel; {told}"
+    )
 
 
 def better_noise(
     photos: NoiseModel,
     static: Iterable[Sequence[Frame]] | None,
     dark: Iterable[Frame] | None,
-) -> NoiseModel:
-    """The best law at hand: static scenes over photographs, read noise from dark frames."""
-    noise = photos
+) -> tuple[NoiseModel, tuple[str, ...]]:
+    """The best law at hand, and what the further frames changed.
+
+    Static scenes go before photographs; the read noise of a straight law comes from dark
+    frames. Frames that cannot tell change nothing, and a note says why.
+
+    Raises
+    ------
+    InputError : frames that do not belong together.
+    """
+    noise, notes = photos, []
     if static is not None:
         from_static = measure_noise_static(static)
-        noise = from_static if from_static.measurable else photos
-    if dark is None:
-        return noise
-    at_rest = measure_noise_dark(dark)
-    if not at_rest.measurable or noise.gain is None:
-        return noise
-    assert at_rest.read_noise is not None
-    assert noise.read_noise is not None
+        if from_static.measurable:
+            noise = from_static
+            notes.append("the noise law comes from the static scenes")
+        else:
+            notes.append(f"the static scenes cannot tell the noise: {from_static.reason}")
+    if dark is not None:
+        noise, note = _with_dark(noise, measure_noise_dark(dark))
+        notes.append(note)
+    return noise, tuple(notes)
+
+
+def _with_dark(noise: NoiseModel, at_rest: NoiseModel) -> tuple[NoiseModel, str]:
+    """Put the dark frames' read noise into a straight law."""
+    if at_rest.read_noise is None:
+        return noise, f"the dark frames cannot tell the read noise: {at_rest.reason}"
+    told = f"read noise {at_rest.read_noise:.3g} DN at a mean dark level of {at_rest.levels[0]:.4g}"
+    if noise.gain is None or noise.read_noise is None:
+        return noise, f"the dark frames' {told} is not used: there is no straight law to put it in"
     change = at_rest.read_noise**2 - noise.read_noise**2
-    return replace(
+    better = replace(
         noise,
         read_noise=at_rest.read_noise,
         read_noise_error=at_rest.read_noise_error,
         sd=np.sqrt(np.maximum(noise.sd**2 + change, 1e-12)),
     )
+    return better, f"the read noise comes from the dark frames: {told}"
 
 
 def _with_spectrum(found: Survey, spectrum: Spectrum) -> Survey:

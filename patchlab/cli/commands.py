@@ -4,6 +4,7 @@ from __future__ import annotations
 
 import functools
 import json
+import tempfile
 from collections.abc import Callable
 from pathlib import Path
 from typing import Any
@@ -81,7 +82,8 @@ def _work(
     from patchlab.pipeline import desk, run
 
     out = options["out"]
-    terminal.resume_hint = f"; go on with: patchlab {until} {photos} -o {out} --resume"
+    if not options.get("passing"):
+        terminal.resume_hint = f"; go on with: patchlab {until} {photos} -o {out} --resume"
     desk.prepare(out, photos, resume=options["resume"], force=options["force"])
     with terminal.working():
         place = desk.Desk(out, settings, options["resume"], terminal, terminal.note)
@@ -93,7 +95,7 @@ def _work(
 @patchlab.command()
 @click.argument("photos", type=FOLDER)
 @_fills_a_run
-@settings_options("photos", "survey", "patches", "learn", "bank", "common")
+@settings_options("photos", "survey", "measure", "patches", "learn", "bank", "common")
 @_shared
 def run(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Do the whole job: PHOTOS to a compiled bank and a page."""
@@ -150,12 +152,26 @@ def _hold_to_quality(strict: bool, result: dict[str, Any]) -> None:
 
 @patchlab.command()
 @click.argument("photos", type=FOLDER)
-@_fills_a_run
-@settings_options("photos", "survey", "common")
+@click.option("-o", "--out", type=FOLDER, help="Keep the survey in this run's folder.")
+@click.option("--resume", is_flag=True, help="Go on with the run that stands there.")
+@click.option("--force", is_flag=True, help="Start anew where a run stands.")
+@click.option("--dry-run", is_flag=True, help="Say what would be done, write nothing.")
+@settings_options("photos", "survey", "measure", "common")
 @_shared
 def survey(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
-    """Say what the camera itself does to PHOTOS: noise, blur, spectrum, marks."""
-    result = _work(photos, "survey", terminal, options)
+    """Say what the camera itself does to PHOTOS: noise, blur, spectrum, marks.
+
+    Without -o the survey is only printed. Static scenes, dark frames and a slanted edge tell
+    more than photographs can.
+    """
+    if options["out"] is not None:
+        result = _work(photos, "survey", terminal, options)
+    else:
+        with tempfile.TemporaryDirectory(prefix="patchlab-") as folder:
+            passing = {**options, "out": Path(folder) / "run", "passing": True}
+            result = _work(photos, "survey", terminal, passing)
+        if result is not None:
+            result.pop("out", None)
     if result is not None:
         _print(result, as_json, _say_survey)
 
@@ -184,6 +200,7 @@ def _say_survey(result: dict[str, Any]) -> None:
             "blur": f"{blur['sigma_px']:.2f} px" if blur["sigma_px"] else blur["note"],
             "spectrum": result["spectrum"]["exponent"],
             "table": result["table"],
+            **{f"note {k}": text for k, text in enumerate(result["notes"], 1)},
         }
     )
     found = {True: "found", False: "no", None: "cannot tell"}
@@ -206,7 +223,7 @@ def _say_survey(result: dict[str, Any]) -> None:
 @patchlab.command()
 @click.argument("photos", type=FOLDER)
 @_fills_a_run
-@settings_options("photos", "survey", "patches", "learn", "common")
+@settings_options("photos", "survey", "measure", "patches", "learn", "common")
 @_shared
 def learn(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Survey PHOTOS, sample and whiten patches, and learn their basis."""

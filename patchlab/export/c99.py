@@ -123,7 +123,7 @@ def emit(bank: Bank, plan: Plan) -> dict[str, bytes]:
 
 def _about(bank: Bank, plan: Plan) -> dict[str, object]:
     """The plain facts that the templates mention."""
-    form = bank.contract.format
+    form, plane = bank.contract.format, bank.contract.plane
     line = -(-(CHUNK + 2 * bank.radius) // 16) * 16
     products = len(plan.detail["bases"])
     scales = len(plan.detail["strength"])
@@ -136,7 +136,7 @@ def _about(bank: Bank, plan: Plan) -> dict[str, object]:
         "COUNT": len(bank),
         "SIZE": bank.size,
         "RADIUS": bank.radius,
-        "PIXELS": form.name,
+        "PIXELS": f"{form.name} ({plane})" if plane else form.name,
         "PIXEL": form.ctype,
         "BORDER": bank.border,
         "BORDER_WORDS": _BORDER_WORDS[bank.border],

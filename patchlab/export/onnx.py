@@ -314,6 +314,7 @@ def _metadata(bank: Bank, about: Mapping[str, Any]) -> dict[str, str]:
             "black": contract.black,
             "white": contract.white,
             "transfer": contract.transfer,
+            "plane": contract.plane,
         },
         "input_table": bank.table.kind,
         "minimum_size": bank.size,

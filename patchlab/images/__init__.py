@@ -17,6 +17,7 @@ from patchlab.images.folder import (
     reread,
     take_in,
 )
+from patchlab.images.pfnc import RawLayout
 from patchlab.images.sample import SampleSettings, memory_needed, sample, sample_folder
 
 __all__ = [
@@ -24,6 +25,7 @@ __all__ = [
     "FrameRecord",
     "Intake",
     "Listing",
+    "RawLayout",
     "ReadOptions",
     "SampleSettings",
     "decode",

@@ -15,6 +15,7 @@ import struct
 import threading
 import warnings
 from collections.abc import Callable, Iterator
+from pathlib import PurePosixPath
 from typing import Any
 
 import numpy as np
@@ -24,7 +25,7 @@ from numpy.typing import NDArray
 from PIL import Image, ImageFile
 
 from patchlab.errors import InputError, PatchlabError
-from patchlab.images import formats
+from patchlab.images import extras, formats, pfnc
 from patchlab.images.develop import Picture, ReadOptions, check_size, develop
 from patchlab.store import sha256
 from patchlab.types import Frame
@@ -45,6 +46,9 @@ SUFFIXES = frozenset(
         ".ppm",
         ".pnm",
         ".npy",
+        pfnc.SUFFIX,
+        *extras.RAW_SUFFIXES,
+        *extras.VIDEO_SUFFIXES,
     )
 )
 """File name endings (lower case) that are taken for pictures."""
@@ -70,7 +74,7 @@ def decode(data: bytes, path: str, options: ReadOptions | None = None) -> tuple[
     """
     options = options or ReadOptions()
     try:
-        pictures = _read(data, options)
+        pictures = _read(data, path, options)
         names = [path] if len(pictures) == 1 else [f"{path}#{k}" for k in range(len(pictures))]
         digest = sha256(data)
         return tuple(
@@ -80,10 +84,10 @@ def decode(data: bytes, path: str, options: ReadOptions | None = None) -> tuple[
         raise InputError(error.what, where=path, remedy=error.remedy) from None
 
 
-def _read(data: bytes, options: ReadOptions) -> list[Picture]:
+def _read(data: bytes, path: str, options: ReadOptions) -> list[Picture]:
     try:
         with _quiet():
-            return _reader(data)(data, options)
+            return _reader(data, path)(data, options)
     except PatchlabError:
         raise
     except MemoryError:
@@ -97,10 +101,17 @@ def decoder_versions() -> dict[str, str]:
     return {"pillow": PIL.__version__, "tifffile": tifffile.__version__}
 
 
-def _reader(data: bytes) -> Reader:
-    """The reader for some bytes, told by their first few."""
+def _reader(data: bytes, path: str) -> Reader:
+    """The reader for some bytes: by their first few, or by name where pixels stand alone."""
     if not data:
         raise InputError("the file is empty")
+    suffix = PurePosixPath(path).suffix.lower()
+    if suffix == pfnc.SUFFIX:
+        return _read_raw
+    if suffix in extras.RAW_SUFFIXES:
+        return extras.read_camera_raw
+    if suffix in extras.VIDEO_SUFFIXES:
+        return extras.read_video
     for magic, reader in _MAGIC:
         if magic.match(data):
             return reader
@@ -241,6 +252,23 @@ def _noted(picture: Picture, image: Image.Image) -> Picture:
     return Picture(
         picture.samples, picture.top, picture.hidden, picture.orientation, picture.coded, notes
     )
+
+
+# ---------------------------------------------------------------- raw buffers
+
+
+def _read_raw(data: bytes, options: ReadOptions) -> list[Picture]:
+    layout = options.raw
+    if layout is None:
+        raise InputError(
+            "nothing says what this raw buffer holds",
+            remedy="give --raw-format, --raw-width and --raw-height, or put a sidecar beside it",
+        )
+    check_size(layout.width, layout.height, options)
+    form = pfnc.raw_format(layout.format)
+    note = f"raw buffer: {form.name}, {layout.width} x {layout.height}"
+    codes = pfnc.unpack(data, layout)
+    return [Picture(codes, (1 << form.bits) - 1, notes=(note,), mosaic=form.pattern)]
 
 
 # ---------------------------------------------------------------- TIFF

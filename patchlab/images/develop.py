@@ -9,7 +9,7 @@ what must not be used, turns the picture upright, and says what it did.
 from __future__ import annotations
 
 import math
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
 from typing import Any, Literal
 
 import numpy as np
@@ -24,6 +24,8 @@ from patchlab.conventions import (
     srgb_encode,
 )
 from patchlab.errors import InputError, UsageError
+from patchlab.images.bayer import PLANES, Plane, colours, green
+from patchlab.images.pfnc import RawLayout
 from patchlab.types import F64, Frame, InputContract
 
 _BAND = 1 << 20  # pixels converted at a time, so that colour needs no full float64 planes
@@ -41,6 +43,8 @@ class ReadOptions:
         else is linear
     pixels : PFNC name of the depth (Mono12 for twelve bits kept in a 16-bit file)
     pixel_limit : pictures of more pixels are refused before their pixels are decoded
+    raw : what ``.raw`` buffers hold; a sidecar goes before it
+    bayer : what is taken of a Bayer sensor: "green", "luminance" or "mosaic"
 
     Raises
     ------
@@ -52,6 +56,8 @@ class ReadOptions:
     transfer: Literal["auto", "linear", "srgb"] = "auto"
     pixels: str | None = None
     pixel_limit: float = 200e6
+    raw: RawLayout | None = None
+    bayer: Plane = "green"
 
     def __post_init__(self) -> None:
         if self.transfer not in ("auto", "linear", "srgb"):
@@ -63,6 +69,8 @@ class ReadOptions:
                 raise UsageError(f"the {name} level must be a number from 0 up, not {level}")
         if self.white is not None and self.white <= (self.black or 0.0):
             raise UsageError("the white level must exceed the black level")
+        if self.bayer not in PLANES:
+            raise UsageError(f"unknown plane {self.bayer!r}", remedy=f"one of {', '.join(PLANES)}")
         if not self.pixel_limit >= 1:
             raise UsageError("the pixel limit must be at least 1")
         if self.pixels is not None:
@@ -83,6 +91,8 @@ class Picture:
     orientation : the Exif orientation tag, 1 to 8
     coded : True when the file format says that codes follow sRGB
     notes : what the reader did
+    mosaic : Bayer pattern by its first two pixels ("RG"), or "" where pixels have no colours
+    black : code of no light that the file declares
     """
 
     samples: NDArray[Any]
@@ -91,6 +101,8 @@ class Picture:
     orientation: int = 1
     coded: bool = False
     notes: tuple[str, ...] = ()
+    mosaic: str = ""
+    black: float = 0.0
 
 
 def check_size(width: int, height: int, options: ReadOptions) -> None:
@@ -147,6 +159,8 @@ def develop(picture: Picture, path: str, digest: str, options: ReadOptions) -> F
     InputError : the file cannot hold the declared depth, or a code is beyond it.
     """
     contract = _contract(picture, options)
+    if picture.mosaic:
+        picture = _plane(picture, options.bayer)
     notes = list(picture.notes)
     samples = picture.samples
     bad = picture.hidden
@@ -180,6 +194,17 @@ def develop(picture: Picture, path: str, digest: str, options: ReadOptions) -> F
         sha256=digest,
         notes=tuple(notes),
     )
+
+
+def _plane(picture: Picture, wanted: Plane) -> Picture:
+    """The plane that is taken of a mosaic; colours are brought to luminance later."""
+    samples = picture.samples
+    if wanted == "green":
+        samples = green(samples, picture.mosaic)
+    elif wanted == "luminance":
+        samples = colours(samples, picture.mosaic)
+    note = f"Bayer{picture.mosaic}: {wanted}"
+    return replace(picture, samples=samples, notes=(*picture.notes, note))
 
 
 def conform(frame: Frame, contract: InputContract) -> Frame:
@@ -220,19 +245,21 @@ def _contract(picture: Picture, options: ReadOptions) -> InputContract:
     if transfer == "auto":
         eight_bit = picture.top is not None and picture.top <= 255
         coded = picture.coded or (picture.samples.ndim == 3 and eight_bit)
+        coded = coded and not picture.mosaic
         transfer = "srgb" if coded else "linear"
     if picture.top is None:
         form = _float_format(options)
         white = 1.0 if options.white is None else float(options.white)
     else:
         form, white = _integer_format(picture, picture.top, options)
-    black = 0.0 if options.black is None else float(options.black)
+    black = picture.black if options.black is None else float(options.black)
     if white <= black:
         raise InputError(
             f"black level {black:g} is not below its white level {white:g}",
             remedy="give --white as well",
         )
-    return InputContract(form.name, black, white, transfer)
+    plane = f"Bayer{picture.mosaic} {options.bayer}" if picture.mosaic else ""
+    return InputContract(form.name, black, white, transfer, plane)
 
 
 def _float_format(options: ReadOptions) -> PixelFormat:

@@ -10,12 +10,13 @@ from __future__ import annotations
 
 import os
 import stat
-from collections.abc import Callable, Iterator
-from dataclasses import dataclass
+from collections.abc import Callable, Iterable, Iterator
+from dataclasses import dataclass, replace
 from pathlib import Path
 from typing import NoReturn
 
 from patchlab.errors import InputError
+from patchlab.images import pfnc
 from patchlab.images.decode import SUFFIXES, decode
 from patchlab.images.develop import ReadOptions, conform
 from patchlab.progress import Progress, silent
@@ -214,6 +215,23 @@ class Intake:
         )
 
     @property
+    def names(self) -> frozenset[str]:
+        """The frames' paths."""
+        return frozenset(record.path for record in self.frames)
+
+    def without(self, paths: Iterable[str]) -> Intake:
+        """The same folder with some frames left out."""
+        left_out = frozenset(paths)
+        return replace(self, frames=tuple(r for r in self.frames if r.path not in left_out))
+
+    def thinned(self, count: int) -> Intake:
+        """The same folder with at most ``count`` frames, evenly spread."""
+        if len(self.frames) <= count:
+            return self
+        step = len(self.frames) / count
+        return replace(self, frames=tuple(self.frames[int(k * step)] for k in range(count)))
+
+    @property
     def largest(self) -> int:
         """Pixels of the largest frame."""
         return max(h * w for h, w in (record.shape for record in self.frames))
@@ -226,7 +244,15 @@ def read_file(root: Path, file: str, options: ReadOptions) -> tuple[Frame, ...]:
     ------
     InputError : it cannot be read or decoded.
     """
-    return decode(_bytes(root, file), file, options)
+    return decode(_bytes(root, file), file, _with_sidecar(root, file, options))
+
+
+def _with_sidecar(root: Path, file: str, options: ReadOptions) -> ReadOptions:
+    """The options for one file: a raw buffer's sidecar goes before what was given."""
+    if not file.lower().endswith(pfnc.SUFFIX):
+        return options
+    layout = pfnc.sidecar(root / file)
+    return options if layout is None else replace(options, raw=layout)
 
 
 def _bytes(root: Path, file: str) -> bytes:
@@ -295,6 +321,7 @@ def _inspect(task: tuple[Path, str, ReadOptions]) -> tuple[FrameRecord, ...] | Q
     try:
         data = _bytes(root, file)
         digest = sha256(data)
+        options = _with_sidecar(root, file, options)
         return tuple(_record(f, file, k) for k, f in enumerate(decode(data, file, options)))
     except InputError as error:
         reason = f"{error.what}; {error.remedy}" if error.remedy else error.what
@@ -346,9 +373,16 @@ def _common(records: tuple[FrameRecord, ...], mixed_depths: bool, root: Path) ->
     if len(groups) == 1:
         return records[0].contract
     lines = "".join(
-        f"\n  {len(paths)} of {c.pixels}, {c.black:g} to {c.white:g}, {c.transfer}: {paths[0]}"
+        f"\n  {len(paths)} of {c.pixels}{c.plane and ', ' + c.plane}, {c.black:g} to {c.white:g}, "
+        f"{c.transfer}: {paths[0]}"
         for c, paths in groups.items()
     )
+    if len({c.plane for c in groups}) > 1:
+        raise InputError(
+            f"the frames are of several colour patterns{lines}\n",
+            where=str(root),
+            remedy="split the folder",
+        )
     if len({c.transfer for c in groups}) > 1:
         raise InputError(
             f"some frames are linear and some sRGB-coded{lines}\n",
@@ -387,11 +421,12 @@ def iterate(
     ------
     Frame
     """
+    names = intake.names
     for result in map_ordered(reread, intake.tasks, jobs=jobs, stage=stage, progress=progress):
         if isinstance(result, Quarantined):
             missed(result)
         else:
-            yield from result
+            yield from (frame for frame in result if frame.path in names)
 
 
 def reread(task: Task) -> tuple[Frame, ...] | Quarantined:
@@ -404,6 +439,7 @@ def reread(task: Task) -> tuple[Frame, ...] | Quarantined:
         data = _bytes(root, file)
         if sha256(data) != digest:
             return Quarantined(file, "the file changed while it was in use", sha256(data))
+        options = _with_sidecar(root, file, options)
         return tuple(conform(frame, contract) for frame in decode(data, file, options))
     except InputError as error:
         return Quarantined(file, error.what)

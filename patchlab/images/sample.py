@@ -190,14 +190,15 @@ def _part(path: str, size: int, blocks: list[_Block], rejected: Mapping[str, int
 def _positions(frame: Frame, settings: SampleSettings, budget: int) -> Iterator[NDArray[np.int32]]:
     """A frame's sequence of top-left corners, (n, 2) at a time, none twice."""
     draw = rng(settings.seed, frame.path)
-    height, width = (side - settings.size + 1 for side in frame.pixels.shape)
+    step = frame.contract.lattice
+    height, width = ((side - settings.size) // step + 1 for side in frame.pixels.shape)
     seen = np.zeros(0, np.int64)
     for _ in range(max(4, math.ceil(_PATIENCE * budget / _BLOCK))):
         block = draw.integers(0, height * width, size=_BLOCK)
         first = np.sort(np.unique(block, return_index=True)[1])
         fresh = block[first][~np.isin(block[first], seen)]
         if len(fresh):
-            yield np.stack(np.divmod(fresh, width), axis=1).astype(np.int32)
+            yield step * np.stack(np.divmod(fresh, width), axis=1).astype(np.int32)
         seen = np.concatenate([seen, fresh])
         if len(seen) == height * width:
             return
@@ -304,14 +305,14 @@ def sample_folder(
     Every worker reads its own files, and only patches travel. The result has the same bytes
     whatever ``jobs``. ``missed`` is told of files that vanished or changed; they are passed over.
     """
-    budget = quota(settings, len(intake.frames))
+    budget, names = quota(settings, len(intake.frames)), intake.names
     tasks = [(task, table, settings, budget) for task in intake.tasks]
     parts: list[Part] = []
     for result in map_ordered(_sample_file, tasks, jobs=jobs, stage="sampling", progress=progress):
         if isinstance(result, Quarantined):
             missed(result)
         else:
-            parts.extend(result)
+            parts.extend(part for part in result if part.path in names)
     return assemble(parts, settings)
 
 

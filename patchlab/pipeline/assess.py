@@ -24,7 +24,8 @@ from patchlab.edges import assess, rivals, spaced
 from patchlab.errors import InputError
 from patchlab.images import scenes
 from patchlab.pipeline.desk import may_write
-from patchlab.pipeline.use import bank_folder, responder
+from patchlab.pipeline.loaded import bank_folder
+from patchlab.pipeline.use import responder
 from patchlab.progress import Progress, silent
 from patchlab.types import F64, Bank
 from patchlab.workers import map_ordered

@@ -18,6 +18,7 @@ from patchlab.pipeline import tell
 from patchlab.pipeline.bundle import add_libraries, write_bundle
 from patchlab.pipeline.desk import RECIPE, Desk, bank_name, may_write
 from patchlab.pipeline.keep import Keeper
+from patchlab.pipeline.measure import take_in_extras
 from patchlab.types import (
     Bank,
     Dictionary,
@@ -33,6 +34,9 @@ Head = dict[str, Any]
 EXAMPLE = (960, 1280)
 """Largest height and width of the example frame that a run keeps for its page."""
 
+SAME = 0.9
+"""Cosine from which an atom of another start counts as the same as a flagged one."""
+
 # ---------------------------------------------------------------- one stage after another
 
 
@@ -45,6 +49,8 @@ def take_in(photos: Path, desk: Desk) -> images.Intake:
         transfer=s.transfer,  # type: ignore[arg-type]  # checked by the settings
         pixels=s.pixels,
         pixel_limit=s.pixel_limit,
+        raw=_raw_layout(desk),
+        bayer=s.bayer,  # type: ignore[arg-type]  # checked by the settings
     )
     with desk.timed("reading"):
         intake = images.take_in(
@@ -59,6 +65,17 @@ def take_in(photos: Path, desk: Desk) -> images.Intake:
     return intake
 
 
+def _raw_layout(desk: Desk) -> images.RawLayout | None:
+    """What ``.raw`` files hold by the settings; None where nothing was said."""
+    s = desk.settings
+    given = [v for v in (s.raw_format, s.raw_width, s.raw_height) if v is not None]
+    if not given:
+        return None
+    if s.raw_format is None or s.raw_width is None or s.raw_height is None:
+        raise UsageError("--raw-format, --raw-width and --raw-height go together")
+    return images.RawLayout(s.raw_format, s.raw_width, s.raw_height)
+
+
 def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
     """Measure the camera on the frames and make the input table."""
     wanted = desk.settings.table
@@ -68,15 +85,30 @@ def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
         "inputs": intake.inputs,
         "body": {"recipe": RECIPE, "photos": tell.photos(intake)},
     }
+    extras = take_in_extras(intake, desk)
+    about["body"]["measured_on"] = extras.inputs
 
     def make() -> Survey:
-        frames = functools.partial(images.iterate, intake)
-        return camera.survey(frames, intake.contract, kind=kind, progress=desk.progress)
+        return camera.survey(
+            functools.partial(images.iterate, intake.thinned(camera.MAX_FRAMES)),
+            intake.contract,
+            kind=kind,
+            static=extras.static_frames(),
+            dark=extras.dark_frames(),
+            edge=extras.edge_frame(),
+            mixed=desk.settings.mixed_cameras,
+            progress=desk.progress,
+        )
 
     example = _example(intake)
     about["body"]["example"] = example.path
-    kept = {"example.npy": store.npy_bytes(example.pixels)}
-    return desk.stage("survey", about, make, lambda _: kept)
+    pixels = store.npy_bytes(example.pixels)
+
+    def beside(found: Survey) -> dict[str, bytes]:
+        plain = store.canonical_json(tell.survey(found, about["body"]))
+        return {"example.npy": pixels, "survey.json": plain}
+
+    return desk.stage("survey", about, make, beside)
 
 
 def _example(intake: images.Intake) -> Frame:
@@ -94,9 +126,20 @@ def _example(intake: images.Intake) -> Frame:
     return replace(frame, pixels=frame.pixels[rows, cols].copy(), invalid=mask)
 
 
+def trusted(intake: images.Intake, found: Survey, desk: Desk) -> images.Intake:
+    """The frames to learn from: all but those that the survey distrusts, unless asked."""
+    if desk.settings.all_frames or not found.distrusted:
+        return intake
+    left_out = tell.left_out(found)
+    told = ", ".join(f"{count} {reason}" for reason, count in left_out.items())
+    desk.tell(f"  frames left out of learning: {told}")
+    return intake.without(path for path, _ in found.distrusted)
+
+
 def sample(intake: images.Intake, found: Survey, parent: Head, desk: Desk) -> tuple[PatchSet, Head]:
     """Draw patches, after saying what memory that and learning will take."""
     s = desk.settings
+    intake = trusted(intake, found, desk)
     settings = images.SampleSettings(
         size=s.patch_size,
         patches=s.patches,
@@ -221,6 +264,10 @@ def choose(
 ) -> Bank:
     """Choose the kernels and calibrate their thresholds on noise."""
     s = desk.settings
+    flagged = marked(dictionary, found, patches)
+    if flagged and not s.keep_marked:
+        dictionary, fits = _unmarked(dictionary, fits, flagged)
+        desk.tell(f"  {len(flagged)} components that describe a mark are kept out of the bank")
     with desk.timed("bank"):
         if s.as_learned:
             bank = banks.bank_as_learned(dictionary, found, name, s.border, fits[1])
@@ -238,7 +285,48 @@ def choose(
                 dictionary, fits[0], found, settings, patch_contrast=patches.contrast
             )
     known = {**bank.provenance, "blur_sigma_px": found.blur_sigma_px}
+    if found.contract.lattice > 1:
+        told = (
+            "learned on a Bayer mosaic: a kernel sees the colours as it learned them only where "
+            "its patch begins on an even row and column"
+        )
+        bank = replace(bank, warnings=(*bank.warnings, told))
+    if flagged:
+        known["marked_components"] = [[i + 1, name, s.keep_marked] for i, name in flagged]
     return calibrated(replace(bank, provenance=known), desk)
+
+
+def marked(dictionary: Dictionary, found: Survey, patches: PatchSet) -> tuple[tuple[int, str], ...]:
+    """Components that describe a mark of the camera rather than the scene."""
+    return camera.flag_components(
+        dictionary.atoms, dictionary.filters, patches.patches, patches.origin, found.marks
+    )
+
+
+def _unmarked(
+    dictionary: Dictionary, fits: tuple[KernelFits, ...], flagged: tuple[tuple[int, str], ...]
+) -> tuple[Dictionary, tuple[KernelFits, ...]]:
+    """Dictionary and fits without the flagged components."""
+    kept = np.setdiff1d(np.arange(len(dictionary)), [i for i, _ in flagged])
+    if not len(kept):
+        raise InputError(
+            "every learned component describes a mark of the camera",
+            remedy="see the survey's remedies, or add --keep-marked",
+        )
+    own = np.array([dictionary.atoms[i].ravel() for i, _ in flagged])
+    own /= np.linalg.norm(own, axis=1, keepdims=True)
+    pooled = dictionary.pooled_atoms
+    alike = np.abs(pooled.reshape(len(pooled), -1) @ own.T).max(axis=1) > SAME
+    less = replace(
+        dictionary,
+        filters=dictionary.filters[kept],
+        atoms=dictionary.atoms[kept],
+        contribution=dictionary.contribution[kept],
+        kurtosis=dictionary.kurtosis[kept],
+        identified=dictionary.identified[kept],
+        pooled_atoms=pooled[~alike],
+    )
+    return less, tuple(replace(f, fits=tuple(f.fits[i] for i in kept)) for f in fits)
 
 
 def calibrated(bank: Bank, desk: Desk) -> Bank:

@@ -26,6 +26,7 @@ def photos(intake: Intake) -> dict[str, Any]:
         "hidden": intake.listing.hidden,
         "other": intake.listing.other,
         "pixels": intake.contract.pixels,
+        "plane": intake.contract.plane,
         "transfer": intake.contract.transfer,
         "notes": dict(sorted(Counter(n for f in intake.frames for n in f.notes).items())),
     }
@@ -37,24 +38,17 @@ def _rounded(value: float | None, digits: int = 5) -> float | None:
 
 def survey(found: Survey, head: dict[str, Any]) -> dict[str, Any]:
     """The camera's survey."""
-    noise = found.noise
     return {
         "frames": _frames(head["photos"]),
         "pixels": found.contract.pixels,
-        "noise": {
-            "measurable": noise.measurable,
-            "reason": noise.reason,
-            "gain_dn_per_electron": _rounded(noise.gain),
-            "gain_standard_error": _rounded(noise.gain_error),
-            "read_noise_dn": _rounded(noise.read_noise),
-            "read_noise_standard_error": _rounded(noise.read_noise_error),
-            "white": noise.autocovariance is None,
-            "kept_fraction": _rounded(noise.kept_fraction),
-        },
-        "blur": {"sigma_px": _rounded(found.blur_sigma_px), "note": found.blur_note},
+        "plane": found.contract.plane,
+        "noise": _noise(found),
+        "blur": _blur(found),
         "spectrum": {
             "exponent": _rounded(found.spectrum_exponent),
             "spread": _rounded(found.spectrum_spread),
+            "anisotropy": _rounded(found.spectrum_anisotropy),
+            "noise_overtakes_cpp": _rounded(found.noise_overtakes_cpp),
         },
         "table": found.table.kind,
         "marks": [
@@ -68,7 +62,57 @@ def survey(found: Survey, head: dict[str, Any]) -> dict[str, Any]:
             }
             for m in found.marks
         ],
+        "distrusted": [{"path": path, "reason": reason} for path, reason in found.distrusted],
+        "notes": list(found.notes),
     }
+
+
+def left_out(found: Survey) -> dict[str, int]:
+    """How many frames the survey distrusts, by reason."""
+    return dict(sorted(Counter(reason for _, reason in found.distrusted).items()))
+
+
+def flagged(made: Bank) -> list[dict[str, Any]]:
+    """Components that describe a mark, numbered from 1 as on the page."""
+    known = made.provenance.get("marked_components", ())
+    return [{"component": n, "mark": name, "kept": kept} for n, name, kept in known]
+
+
+def _noise(found: Survey) -> dict[str, Any]:
+    noise = found.noise
+    acov = noise.autocovariance
+    return {
+        "measurable": noise.measurable,
+        "reason": noise.reason,
+        "source": noise.source,
+        "gain_dn_per_electron": _rounded(noise.gain),
+        "gain_standard_error": _rounded(noise.gain_error),
+        "read_noise_dn": _rounded(noise.read_noise),
+        "read_noise_standard_error": _rounded(noise.read_noise_error),
+        "levels_dn": [_rounded(v) for v in noise.levels.tolist()],
+        "sd_dn": [_rounded(v) for v in noise.sd.tolist()],
+        "white": acov is None,
+        "autocovariance": None if acov is None else [[_rounded(v) for v in r] for r in acov],
+        "kept_fraction": _rounded(noise.kept_fraction),
+    }
+
+
+def _blur(found: Survey) -> dict[str, Any]:
+    told: dict[str, Any] = {"sigma_px": _rounded(found.blur_sigma_px), "note": found.blur_note}
+    edge = found.slanted_edge
+    if edge is not None:
+        told["slanted_edge"] = {
+            "angle_deg": _rounded(edge.angle_deg),
+            "mtf50_cpp": _finite(edge.mtf50_cpp),
+            "sigma_px": _finite(edge.sigma_px),
+            "frequency_cpp": [_rounded(v) for v in edge.frequency_cpp.tolist()],
+            "mtf": [_rounded(v) for v in edge.mtf.tolist()],
+        }
+    return told
+
+
+def _finite(value: float) -> float | None:
+    return _rounded(value) if value == value else None
 
 
 def _frames(photos: dict[str, Any]) -> dict[str, int]:
@@ -180,7 +224,9 @@ def run(
 ) -> dict[str, Any]:
     """The whole job."""
     return {
-        "frames": {"used": len(intake.frames), "quarantined": len(intake.quarantined)},
+        "frames": {"used": len(patches.frames), "quarantined": len(intake.quarantined)},
+        "frames_left_out": {} if desk.settings.all_frames else left_out(found),
+        "marked_components": flagged(written.bank),
         "patches": len(patches),
         "patch_size": patches.size,
         "components": len(dictionary),

@@ -8,7 +8,7 @@ from __future__ import annotations
 import io
 from collections import Counter
 from collections.abc import Callable, Mapping
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
 from pathlib import Path
 from typing import Any
 
@@ -133,7 +133,9 @@ def detect(
 
 def _options(bank: Bank) -> images.ReadOptions:
     c = bank.contract
-    return images.ReadOptions(white=c.white, black=c.black, transfer=c.transfer, pixels=c.pixels)
+    known = images.ReadOptions(white=c.white, black=c.black, transfer=c.transfer, pixels=c.pixels)
+    plane = c.plane.rpartition(" ")[2]
+    return replace(known, bayer=plane) if plane else known  # type: ignore[arg-type]
 
 
 def _detect_one(
@@ -222,6 +224,20 @@ class RunContent:
         """How many atoms each family describes, in words."""
         counts = Counter(f.family for f in self.atom_fits.fits)
         return ", ".join(f"{n} {name.replace('_', '-')}" for name, n in counts.most_common())
+
+    @property
+    def frames_left_out(self) -> Mapping[str, int]:
+        """Frames that were not learned from, by reason."""
+        used = set(self.patches.frames)
+        gone = [reason for path, reason in self.survey.distrusted if path not in used]
+        return dict(sorted(Counter(gone).items()))
+
+    @property
+    def marked(self) -> str:
+        """Components that describe a mark of the camera, in words."""
+        known = self.bank.provenance.get("marked_components", ())
+        names = Counter(name.replace("_", " ") for _, name, _ in known)
+        return ", ".join(f"{count} by the {name}" for name, count in names.most_common())
 
     @property
     def warnings(self) -> tuple[str, ...]:

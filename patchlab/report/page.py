@@ -14,7 +14,7 @@ import numpy as np
 from patchlab import store
 from patchlab.pipeline import use
 from patchlab.progress import Progress, silent
-from patchlab.report import mosaic, plots, sure
+from patchlab.report import camera, mosaic, plots, sure
 
 SHOWN = 96
 """Most components drawn in one mosaic; the page says how many there are."""
@@ -63,8 +63,16 @@ def _pictures(c: use.RunContent) -> Mapping[str, Callable[[], bytes]]:
     if choice is not None:
         makers["choice"] = lambda: sure.component_choice(choice)
     if c.survey.noise.measurable:
-        makers["noise"] = lambda: plots.noise_curve(c.survey)
+        makers["noise"] = lambda: camera.noise_curve(c.survey)
         makers["autocovariance"] = lambda: plots.autocovariance(c.survey)
+    if c.survey.spectrum_frequency.size:
+        makers["spectrum"] = lambda: camera.spectrum(c.survey)
+    if c.survey.edge_widths_px.size or c.survey.slanted_edge is not None:
+        makers["spread"] = lambda: camera.edge_spread(c.survey)
+    if c.frame is not None:
+        crops = camera.mark_crops(c.survey, c.frame)
+        if crops is not None:
+            makers["marks"] = lambda: crops
     if c.bank.coverage is not None:
         makers["coverage"] = lambda: plots.coverage_curve(c.bank)
     if c.bank.thresholds is not None:

@@ -52,24 +52,6 @@ plot = _plot
 """One pair of axes, drawn by the function given, as bytes of a PNG."""
 
 
-def noise_curve(survey: Survey) -> bytes:
-    """Noise against level with the fitted law, and what the table makes of it."""
-    noise, contract = survey.noise, survey.contract
-
-    def draw(axes: Axes) -> None:
-        axes.plot(noise.levels, noise.sd, ".", color=SLATE, label="measured, by level")
-        if noise.gain is not None and noise.levels.size:
-            level = np.linspace(contract.black, noise.levels.max(), 200)
-            extra = (noise.read_noise or 0.0) ** 2 + (1 / 12 if contract.format.integer else 0)
-            law = np.sqrt(np.maximum(noise.gain * (level - contract.black) + extra, 0))
-            axes.plot(level, law, color=TEAL, label="law: sd² = gain · level + read² + 1/12")
-        axes.set(xlabel="level, DN", ylabel="noise, DN (1 sd)", title="Noise against level")
-        axes.set_ylim(bottom=0)
-        axes.legend()
-
-    return _plot(draw)
-
-
 def table_curve(survey: Survey) -> bytes:
     """The input table, code to working value."""
     table = survey.table

@@ -9,7 +9,8 @@ from patchlab.camera.pixels import regions
 
 CLEAN = {
     "block_grid", "row_noise", "column_noise", "interpolation_lattice", "clipped_levels",
-    "missing_levels", "sharpening", "near_duplicates", "blurred_frames",
+    "missing_levels", "sharpening", "near_duplicates", "blurred_frames", "posterised_depth",
+    "fixed_spots", "vignetting",
 }  # fmt: skip
 
 

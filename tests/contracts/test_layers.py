@@ -23,6 +23,8 @@ DOORS = {
     "PIL": {"images/decode.py", "images/scenes.py", "report/mosaic.py"},
     "imageio": {"images/decode.py"},
     "tifffile": {"images/decode.py"},
+    "rawpy": {"images/extras.py"},
+    "av": {"images/extras.py"},
     "click": {"cli/"},
     "rich": {"cli/"},
     "matplotlib": {"report/"},
