@@ -218,12 +218,8 @@ def _grid(size: int) -> list[tuple[float, float]]:
     """Shapes that the search starts from: widths by steps of 15 %, five aspects, capped."""
     low, across, along = size_bounds(size)
     steps = int(np.floor(np.log(across / low) / np.log(GRID_STEP) + 1e-9)) + 1
-    return [
-        (low * GRID_STEP**i, low * GRID_STEP**i * a)
-        for i in range(steps)
-        for a in ASPECTS
-        if low * GRID_STEP**i * a <= along
-    ]
+    widths = sorted({*(low * GRID_STEP**i for i in range(steps)), across})
+    return sorted({(width, min(width * a, along)) for width in widths for a in ASPECTS})
 
 
 def _best_last(vectors: F32, others: Sequence[F32]) -> tuple[int, float]:

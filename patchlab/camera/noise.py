@@ -47,6 +47,8 @@ SMOOTH = 0.1
 AGREEING = 0.85
 ROUNDS = 25
 
+FAR = 0.03
+"""Largest mean autocovariance at the rim that is still taken for noise and not for texture."""
 _COLOUR_NOTE = "the noise is not white, so its size does not tell the gain in electrons"
 NO_ELECTRONS: dict[str, Any] = {
     "gain": None,
@@ -322,7 +324,8 @@ def _law(
         reason = _doubt(contract, fit, grid)
         if not reason:
             return model(contract, fit)
-        if acov is not None and _colour(acov) > SMOOTH and flat.agreeing >= AGREEING:
+        short = acov is not None and _reach(acov) < FAR  # structure reaches further than noise
+        if acov is not None and short and _colour(acov) > SMOOTH and flat.agreeing >= AGREEING:
             return _coloured(contract, flat, grid)
     return refused(reason, fit.share)
 
@@ -332,6 +335,13 @@ def _neighbours(acov: F64) -> float:
     c = acov.shape[0] // 2
     near = (acov[c, c - 1] + acov[c, c + 1] + acov[c - 1, c] + acov[c + 1, c]) / 4
     return float(near + acov[c - 1 : c + 2 : 2, c - 1 : c + 2 : 2].mean())
+
+
+def _reach(acov: F64) -> float:
+    """Mean autocovariance along the rim of the window, at lags of three pixels."""
+    rim = np.ones(acov.shape, dtype=bool)
+    rim[1:-1, 1:-1] = False
+    return float(acov[rim].mean())
 
 
 def _colour(acov: F64) -> float:

@@ -21,9 +21,9 @@ from patchlab.images.scenes import Camera, Rendered, expose, mixed, radii
 from patchlab.progress import Progress, silent
 from patchlab.store import write_file
 
-OMBREL_K2 = Camera(gain=0.1, full_well=2600.0, read_noise=6.0)
+OMBREL_K2 = Camera(gain=0.25, full_well=1040.0, read_noise=3.0)
 SHAPE = (360, 480)
-LIGHTS = (2400.0, 1900.0, 1400.0, 900.0)
+LIGHTS = (1000.0, 800.0, 600.0, 400.0)
 """Electrons that a white surface gives, one light level after another."""
 
 Draw = np.random.Generator
