@@ -71,6 +71,12 @@ AGAINST_NOISE: dict[str, dict[str, Any]] = {
 }
 
 
+def toned(plane: np.ndarray, tone: str) -> np.ndarray:
+    """Light by its tone curve."""
+    light = np.maximum(plane, 0)
+    return {"log": np.log(light + 0.01), "sqrt": np.sqrt(light), "linear": light}[tone]
+
+
 def steepest(rows: np.ndarray, flat: float) -> np.ndarray:
     """Without the flattest share."""
     return rows[np.argsort(-rows.std(axis=1))[: int(len(rows) * (1 - flat))]]
