@@ -72,10 +72,9 @@ AGAINST_NOISE: dict[str, dict[str, Any]] = {
 
 
 def toned(plane: np.ndarray, tone: str) -> np.ndarray:
-    """Light in [0, 1] through a tone: log (with a floor of 1 %), sqrt or linear."""
-    light = np.maximum(plane, 0.0)
-    tones = {"log": np.log(light + 0.01), "sqrt": np.sqrt(light), "linear": light}
-    return tones[tone].astype(np.float32)
+    """Light by its tone curve."""
+    light = np.maximum(plane, 0)
+    return {"log": np.log(light + 0.01), "sqrt": np.sqrt(light), "linear": light}[tone]
 
 
 def steepest(rows: np.ndarray, flat: float) -> np.ndarray:
