@@ -55,6 +55,7 @@ class NativeBank:
             )
         self.bank = bank
         self._library = _load(library, bank.name)
+        self._plan = plan
         self._declare()
         if self._call("abi", _INT)() != plan.detail["abi"]:
             raise VerificationError("the shared library belongs to another bank", where=bank.name)
@@ -78,6 +79,16 @@ class NativeBank:
         self._edges = self._call(
             "edges_rows", _INT, *_PICTURE, _INT, _POINTER, _STRIDE, _POINTER, _STRIDE, _POINTER
         )
+
+        fixed = self._fixed = self._plan.detail["fixed"]
+        if fixed is not None:
+            self._responses_q = self._call(
+                "responses_q_rows", _INT, *_PICTURE, _POINTER, _STRIDE, _STRIDE, _POINTER, _POINTER
+            )
+            self._edges_q = self._call(
+                "edges_q_rows", _INT, *_PICTURE, _INT, _POINTER, _STRIDE, _POINTER, _STRIDE,
+                _POINTER,
+            )  # fmt: skip
 
     def responses(
         self,
@@ -134,17 +145,79 @@ class NativeBank:
         InputError : the picture does not fit the bank. UsageError : no such scale or band.
         """
         pixels, (first, count) = self._picture(pixels, rows)
+        return self._strongest(self._edges, pixels, first, count, scale)
+
+    def responses_q(
+        self,
+        pixels: NDArray[Any],
+        *,
+        rows: tuple[int, int] | None = None,
+        out: NDArray[np.int16] | None = None,
+    ) -> tuple[NDArray[np.int16], int]:
+        """Responses of every kernel in 16-bit fixed point.
+
+        Parameters
+        ----------
+        pixels, rows : as in :meth:`responses`
+        out : int16 ndarray (n, count, w) to write to, unit stride along x; made when not given
+
+        Returns
+        -------
+        int16 ndarray (n, count, w) : counts; times ``plan.detail["fixed"].step`` they are responses
+        int : how many counts stand at the ends of the range
+
+        Raises
+        ------
+        InputError : the picture does not fit the bank.
+        UsageError : a wrong band or ``out``, or a bank without fixed point.
+        """
+        self._need_fixed()
+        pixels, (first, count) = self._picture(pixels, rows)
+        out = _output(out, (len(self.bank), count, pixels.shape[1]), np.int16)
+        scratch = self._memory(pixels)
+        ends = ctypes.c_uint64(0)
+        self._check(
+            self._responses_q(
+                *_address(pixels), first, count, out.ctypes.data, out.strides[1], out.strides[0],
+                ctypes.addressof(ends), scratch.ctypes.data,
+            )
+        )  # fmt: skip
+        return out, int(ends.value)
+
+    def edges_q(
+        self, pixels: NDArray[Any], scale: int, *, rows: tuple[int, int] | None = None
+    ) -> tuple[F32, NDArray[np.uint8]]:
+        """As :meth:`edges`, computed in 16-bit fixed point.
+
+        Raises
+        ------
+        InputError : the picture does not fit the bank.
+        UsageError : no such scale or band, or a bank without fixed point.
+        """
+        self._need_fixed()
+        pixels, (first, count) = self._picture(pixels, rows)
+        return self._strongest(self._edges_q, pixels, first, count, scale)
+
+    def _strongest(
+        self, call: Any, pixels: NDArray[Any], first: int, count: int, scale: int
+    ) -> tuple[F32, NDArray[np.uint8]]:
         strength = np.empty((count, pixels.shape[1]), dtype=np.float32)
         turn = np.empty(strength.shape, dtype=np.uint8)
         scratch = self._memory(pixels)
         self._check(
-            self._edges(
+            call(
                 *_address(pixels), first, count, scale,
                 strength.ctypes.data, strength.strides[0], turn.ctypes.data, turn.strides[0],
                 scratch.ctypes.data,
             )
         )  # fmt: skip
         return strength, turn
+
+    def _need_fixed(self) -> None:
+        if self._fixed is None:
+            raise UsageError(
+                "fixed point needs integer pixels of at most 12 bits", where=self.bank.name
+            )
 
     def _picture(
         self, pixels: NDArray[Any], rows: tuple[int, int] | None
@@ -168,7 +241,7 @@ def _address(pixels: NDArray[Any]) -> tuple[int, int, int, int]:
     return pixels.ctypes.data, pixels.strides[0], pixels.shape[1], pixels.shape[0]
 
 
-def _output(out: F32 | None, shape: tuple[int, ...], dtype: Any) -> F32:
+def _output(out: NDArray[Any] | None, shape: tuple[int, ...], dtype: Any) -> NDArray[Any]:
     if out is None:
         return np.empty(shape, dtype=dtype)
     if out.shape != shape or out.dtype != dtype or out.strides[-1] != out.itemsize:

@@ -28,6 +28,7 @@ from typing import Any
 
 import numpy as np
 
+from patchlab.bank.fixed import fixed_point
 from patchlab.bank.products import (
     Product,
     Sum,
@@ -162,7 +163,7 @@ def _additions(products: list[Product], groups: list[list[int]], sums: Mapping[i
 
 def _interface_number(bank: Bank) -> int:
     """A number that changes with anything a program built against the bank relies on."""
-    h = hashlib.sha256(b"patchlab C interface 1\0")
+    h = hashlib.sha256(b"patchlab C interface 2\0")
     table = bank.table
     names = "\0".join(k.name for k in bank.kernels)
     about = f"{bank.name}\0{table.contract.pixels}\0{bank.border}\0{bank.strength}\0{names}"
@@ -202,7 +203,8 @@ def make_plan(bank: Bank, kind: str = "auto") -> Plan:
     -------
     Plan : its ``detail`` holds ``bases`` (one a product), ``coefficients`` (float32 arrays, one a
         product), ``sums`` (one a kernel), ``product_groups``, ``strength`` (one entry a scale, as
-        :func:`strength_members`), ``abi`` (the interface's number) and ``asked`` (the kind)
+        :func:`strength_members`), ``fixed`` (the bank in 16-bit fixed point, or None), ``abi``
+        (the interface's number) and ``asked`` (the kind)
 
     Raises
     ------
@@ -228,6 +230,7 @@ def make_plan(bank: Bank, kind: str = "auto") -> Plan:
     mixed = {i: split[i] if i in chosen else {"all": exact[i]} for i in split}
     products, sums = share(mixed)
     groups = _group(products, sums, bank)
+    order = tuple(sums[i] for i in sorted(sums))
     return Plan(
         kind="parity" if any(p.basis != "all" for p in products) else "direct",
         groups=_lines(products, groups),
@@ -237,8 +240,15 @@ def make_plan(bank: Bank, kind: str = "auto") -> Plan:
         detail={
             "bases": tuple(p.basis for p in products),
             "coefficients": tuple(p.rounded for p in products),
-            "sums": tuple(sums[i] for i in sorted(sums)),
+            "sums": order,
             "product_groups": tuple(tuple(g) for g in groups),
+            "fixed": fixed_point(
+                bank,
+                [p.basis for p in products],
+                [p.rounded for p in products],
+                order,
+                tuple(tuple(g) for g in groups),
+            ),
             "strength": tuple(strength_members(bank, s) for s in range(len(bank.scales))),
             "abi": _interface_number(bank),
             "asked": kind,
@@ -272,4 +282,7 @@ def describe(plan: Plan) -> str:
     if shared:
         head += f"; {shared} parts are shared between kernels"
     worst = f"largest error bound {max(plan.error_bound):.3g} (working values)"
+    fixed = plan.detail["fixed"]
+    if fixed is not None:
+        worst += f"; in 16-bit fixed point {max(fixed.bound):.3g}, nothing can overflow"
     return "\n".join([head, *(f"  {line}" for line in plan.groups), worst])

@@ -11,7 +11,7 @@ import numpy as np
 
 from patchlab.conventions import BORDERS
 from patchlab.errors import UsageError
-from patchlab.export import c_code
+from patchlab.export import c_code, c_fixed
 from patchlab.export.c_text import (
     fill,
     float_literal,
@@ -42,8 +42,11 @@ CODES = (
     ("BAD_ROWS", "first_row and row_count do not lie inside the picture"),
     ("BAD_SCALE", "there is no such scale in this bank"),
     ("NO_OUTPUT", "out is NULL"),
-    ("OUTPUT_MISALIGNED", "out, out_row_bytes or out_plane_bytes is not a multiple of 4"),
-    ("BAD_OUTPUT_ROW_BYTES", "out_row_bytes is smaller than a row of floats"),
+    (
+        "OUTPUT_MISALIGNED",
+        "out, out_row_bytes or out_plane_bytes is not a multiple of a value's size",
+    ),
+    ("BAD_OUTPUT_ROW_BYTES", "out_row_bytes is smaller than a row of values"),
     ("BAD_OUTPUT_PLANE_BYTES", "out_plane_bytes makes the planes overlap"),
     ("NO_STRENGTH", "strength is NULL"),
     ("STRENGTH_MISALIGNED", "strength or strength_row_bytes is not a multiple of 4"),
@@ -103,7 +106,7 @@ def emit(bank: Bank, plan: Plan) -> dict[str, bytes]:
         identifier(kernel.name, "kernel name")
     if bank.border not in BORDERS:
         raise UsageError(f"unknown border {bank.border!r}")
-    about = _about(bank, plan) | _sections(bank, plan)
+    about = _about(bank, plan) | _sections(bank, plan) | c_fixed.sections(bank, plan, CHUNK)
     # texts with tokens of their own are filled before they are put in place
     about |= {k: fill(str(v), {"N": name}).decode() for k, v in about.items() if "@N@" in str(v)}
 

@@ -14,6 +14,7 @@ import pytest
 from scipy import ndimage
 
 from patchlab.bank import reference
+from patchlab.bank.fixed import fixed_point
 from patchlab.bank.native import NativeBank
 from patchlab.bank.plan import make_plan
 from patchlab.conventions import BORDERS
@@ -472,6 +473,61 @@ def test_the_library_shows_only_its_own_names(compiled, tmp_path):
         f"compiled_{word}"
         for word in (
             "abi", "kernel_count", "kernel_name", "scale_count", "message", "scratch_bytes",
-            "responses", "responses_rows", "edges", "edges_rows",
+            "responses", "responses_rows", "edges", "edges_rows", "q_step",
+            "responses_q", "responses_q_rows", "edges_q", "edges_q_rows",
         )
     }  # fmt: skip
+
+
+# ---------------------------------------------------------------- fixed point
+
+
+@pytest.mark.parametrize("lanes", [1, 4, 8, 16])
+def test_fixed_point_gives_the_same_bits_on_every_instruction_set(lanes):
+    bank = lattice_bank(
+        "fixed", families=("gd1", "gd2"), widths=((1.2, 2.0),), count=4, size=9,
+        pixels="Mono12", kind="stabilised", strength="energy", border="zero",
+    )  # fmt: skip
+    plan, compiled = native(bank, flags=("-O1", f"-Dfixed_MAX_LANES={lanes}"))
+    fixed = plan.detail["fixed"]
+    for shape in ((9, 9), (13, 201)):
+        pixels = picture(shape, "Mono12")
+        counts, ends = fixed.counts(pixels)
+        found, saturated = compiled.responses_q(pixels)
+        np.testing.assert_array_equal(found, counts)
+        assert saturated == ends == 0
+        strength, turn = compiled.edges_q(pixels, 0)
+        members = plan.detail["strength"][0]
+        squares = np.stack(
+            [counts[e].astype(int) ** 2 + counts[o].astype(int) ** 2 for _, e, o in members]
+        )
+        best = np.sqrt(squares.max(axis=0).astype(np.float32)) * np.float32(fixed.step[0])
+        np.testing.assert_array_equal(strength, best)
+        np.testing.assert_array_equal(turn, squares.argmax(axis=0))
+
+
+def test_fixed_point_of_the_worst_picture_and_of_saturation():
+    bank = random_bank(3, 5)
+    plan = make_plan(bank)
+    d = plan.detail
+    fine = fixed_point(bank, d["bases"], d["coefficients"], d["sums"], d["product_groups"], finer=3)
+    plan = replace(plan, detail={**d, "fixed": fine})
+    library = compile_library(c99.emit(bank, plan), bank.name, flags=("-O1",))
+    compiled = NativeBank(bank, plan, library, sha256(library))
+    for k in range(len(bank)):
+        extreme = np.where(fine.taps[k] > 0, 255, 0).astype(np.uint8)
+        for pixels in (extreme, 255 - extreme, np.tile(extreme, (3, 17))):
+            counts, ends = fine.counts(pixels)
+            found, saturated = compiled.responses_q(pixels)
+            np.testing.assert_array_equal(found, counts)
+            assert saturated == ends > 0
+
+
+def test_fixed_point_is_refused_where_it_is_not(compiled_float):
+    with pytest.raises(UsageError, match="12 bits"):
+        compiled_float.responses_q(picture((9, 9), "float32"))
+
+
+@pytest.fixture(scope="module")
+def compiled_float():
+    return native(random_bank(2, 3, pixels="float32"))[1]
