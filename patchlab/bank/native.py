@@ -11,7 +11,8 @@ import contextlib
 import ctypes
 import os
 import tempfile
-from collections.abc import Mapping
+from collections.abc import Callable, Mapping
+from concurrent.futures import ThreadPoolExecutor
 from pathlib import Path
 from typing import Any
 
@@ -24,6 +25,9 @@ from patchlab.store import read_file, sha256
 from patchlab.types import F32, Bank, Plan
 
 _POINTER, _STRIDE, _INT = ctypes.c_void_p, ctypes.c_ssize_t, ctypes.c_int
+Band = Callable[[int, int], int]
+"""Computes some rows, (first, count); returns a code."""
+
 _PICTURE = [_POINTER, _STRIDE, _INT, _INT, _INT, _INT]
 
 
@@ -96,6 +100,7 @@ class NativeBank:
         *,
         rows: tuple[int, int] | None = None,
         out: F32 | None = None,
+        threads: int = 1,
     ) -> F32:
         """Responses of every kernel.
 
@@ -104,6 +109,7 @@ class NativeBank:
         pixels : ndarray (h, w) of the contract's dtype; rows may have any stride
         rows : (first, count), a band to compute alone; the whole picture when not given
         out : float32 ndarray (n, count, w) to write to, unit stride along x; made when not given
+        threads : how many bands are computed side by side; the result is the same bits for any
 
         Returns
         -------
@@ -111,22 +117,32 @@ class NativeBank:
 
         Raises
         ------
-        InputError : the picture does not fit the bank. UsageError : a wrong band or ``out``.
+        InputError : the picture does not fit the bank.
+        UsageError : a wrong band, ``out`` or number of threads.
         """
         pixels, (first, count) = self._picture(pixels, rows)
-        shape = (len(self.bank), count, pixels.shape[1])
-        out = _output(out, shape, np.float32)
-        scratch = self._memory(pixels)  # a name of its own: it must outlive the call
-        self._check(
-            self._responses(
-                *_address(pixels), first, count,
-                out.ctypes.data, out.strides[1], out.strides[0], scratch.ctypes.data,
-            )
-        )  # fmt: skip
-        return out
+        planes = _output(out, (len(self.bank), count, pixels.shape[1]), np.float32)
+
+        def band(start: int, height: int) -> int:
+            part = planes[:, start - first :]
+            scratch = self._memory(pixels)  # a name of its own: it must outlive the call
+            return int(
+                self._responses(
+                    *_address(pixels), start, height,
+                    part.ctypes.data, planes.strides[1], planes.strides[0], scratch.ctypes.data,
+                )
+            )  # fmt: skip
+
+        self._in_bands(band, first, count, threads)
+        return planes
 
     def edges(
-        self, pixels: NDArray[Any], scale: int, *, rows: tuple[int, int] | None = None
+        self,
+        pixels: NDArray[Any],
+        scale: int,
+        *,
+        rows: tuple[int, int] | None = None,
+        threads: int = 1,
     ) -> tuple[F32, NDArray[np.uint8]]:
         """Strength of one scale and the index of the winning orientation.
 
@@ -135,6 +151,7 @@ class NativeBank:
         pixels : ndarray (h, w) of the contract's dtype; rows may have any stride
         scale : position among ``bank.scales``, 0 the finest
         rows : (first, count), a band to compute alone; the whole picture when not given
+        threads : how many bands are computed side by side; the result is the same bits for any
 
         Returns
         -------
@@ -145,7 +162,7 @@ class NativeBank:
         InputError : the picture does not fit the bank. UsageError : no such scale or band.
         """
         pixels, (first, count) = self._picture(pixels, rows)
-        return self._strongest(self._edges, pixels, first, count, scale)
+        return self._strongest(self._edges, pixels, first, count, scale, threads)
 
     def responses_q(
         self,
@@ -153,12 +170,13 @@ class NativeBank:
         *,
         rows: tuple[int, int] | None = None,
         out: NDArray[np.int16] | None = None,
+        threads: int = 1,
     ) -> tuple[NDArray[np.int16], int]:
         """Responses of every kernel in 16-bit fixed point.
 
         Parameters
         ----------
-        pixels, rows : as in :meth:`responses`
+        pixels, rows, threads : as in :meth:`responses`
         out : int16 ndarray (n, count, w) to write to, unit stride along x; made when not given
 
         Returns
@@ -173,19 +191,30 @@ class NativeBank:
         """
         self._need_fixed()
         pixels, (first, count) = self._picture(pixels, rows)
-        out = _output(out, (len(self.bank), count, pixels.shape[1]), np.int16)
-        scratch = self._memory(pixels)
-        ends = ctypes.c_uint64(0)
-        self._check(
-            self._responses_q(
-                *_address(pixels), first, count, out.ctypes.data, out.strides[1], out.strides[0],
-                ctypes.addressof(ends), scratch.ctypes.data,
-            )
-        )  # fmt: skip
-        return out, int(ends.value)
+        planes = _output(out, (len(self.bank), count, pixels.shape[1]), np.int16)
+        ends: list[int] = []
+
+        def band(start: int, height: int) -> int:
+            part = planes[:, start - first :]
+            scratch = self._memory(pixels)
+            found = ctypes.c_uint64(0)
+            code = self._responses_q(
+                *_address(pixels), start, height, part.ctypes.data, planes.strides[1],
+                planes.strides[0], ctypes.addressof(found), scratch.ctypes.data,
+            )  # fmt: skip
+            ends.append(int(found.value))
+            return int(code)
+
+        self._in_bands(band, first, count, threads)
+        return planes, sum(ends)
 
     def edges_q(
-        self, pixels: NDArray[Any], scale: int, *, rows: tuple[int, int] | None = None
+        self,
+        pixels: NDArray[Any],
+        scale: int,
+        *,
+        rows: tuple[int, int] | None = None,
+        threads: int = 1,
     ) -> tuple[F32, NDArray[np.uint8]]:
         """As :meth:`edges`, computed in 16-bit fixed point.
 
@@ -196,22 +225,43 @@ class NativeBank:
         """
         self._need_fixed()
         pixels, (first, count) = self._picture(pixels, rows)
-        return self._strongest(self._edges_q, pixels, first, count, scale)
+        return self._strongest(self._edges_q, pixels, first, count, scale, threads)
 
     def _strongest(
-        self, call: Any, pixels: NDArray[Any], first: int, count: int, scale: int
+        self, call: Any, pixels: NDArray[Any], first: int, count: int, scale: int, threads: int
     ) -> tuple[F32, NDArray[np.uint8]]:
         strength = np.empty((count, pixels.shape[1]), dtype=np.float32)
         turn = np.empty(strength.shape, dtype=np.uint8)
-        scratch = self._memory(pixels)
-        self._check(
-            call(
-                *_address(pixels), first, count, scale,
-                strength.ctypes.data, strength.strides[0], turn.ctypes.data, turn.strides[0],
-                scratch.ctypes.data,
-            )
-        )  # fmt: skip
+
+        def band(start: int, height: int) -> int:
+            to, who = strength[start - first :], turn[start - first :]
+            scratch = self._memory(pixels)
+            return int(
+                call(
+                    *_address(pixels), start, height, scale, to.ctypes.data, strength.strides[0],
+                    who.ctypes.data, turn.strides[0], scratch.ctypes.data,
+                )
+            )  # fmt: skip
+
+        self._in_bands(band, first, count, threads)
         return strength, turn
+
+    def _in_bands(self, band: Band, first: int, count: int, threads: int) -> None:
+        """Compute a band in one call, or its parts side by side."""
+        if threads < 1:
+            raise UsageError(f"{threads} threads: at least one is needed")
+        if not 1 <= threads <= count // self.bank.size or first < 0:
+            threads = 1  # too few rows to share, or a band that the code refuses itself
+        if threads == 1:
+            self._check(band(first, count))
+            return
+        # a few bands a thread, so that a thread that was held up does not hold up all;
+        # each costs the rows of its halo once more
+        parts = min(4 * threads, max(threads, count // (4 * self.bank.size)))
+        tops = [first + count * i // parts for i in range(parts + 1)]
+        with ThreadPoolExecutor(threads) as pool:
+            codes = list(pool.map(lambda i: band(tops[i], tops[i + 1] - tops[i]), range(parts)))
+        self._check(max(codes))
 
     def _need_fixed(self) -> None:
         if self._fixed is None:
