@@ -163,7 +163,7 @@ def make_cases(
     oracle : callable, float64 responses
     crop : a piece of a real picture in the bank's pixels, at least as large as the kernels;
         its middle is used
-    small : only the impulse and a little noise, for the C self-test
+    small : only the impulse and a little noise down to the kernels' size, for the C self-test
     limit_bytes : about how large all expected arrays may be; cases at the end of the list
         are left out beyond it (the first two never)
 
@@ -267,6 +267,7 @@ def _impulses(bank: Bank) -> Iterator[Picture]:
 def _small(bank: Bank) -> Iterator[Picture]:
     yield next(_impulses(bank))
     yield "noise", "uniform noise", _noise(bank, (bank.size + 1, bank.size + 2))
+    yield "smallest", "noise, as large as the kernels", _noise(bank, (bank.size, bank.size))
 
 
 def _noise(bank: Bank, shape: tuple[int, int]) -> Pixels:

@@ -622,3 +622,20 @@ def test_threads_report_what_one_would(compiled):
     pixels[59, 3] = 5000
     with pytest.raises(InputError, match="pixel code"):
         fast.responses(pixels, threads=3)
+
+
+def test_the_selftest_tries_every_code_and_every_output():
+    bank, kind = VARIANTS["step"]
+    _, files = files_of(bank, kind)
+    source = files["step_selftest.c"].decode()
+    for code, _ in c99.CODES:
+        assert f"step_{code}" in source, code
+    output = run_selftest(files, bank.name, flags=("-O1",)).output
+    for words in (
+        "responses equal the reference",
+        "bands and strides give the same bits",
+        "strength equals the reference",
+        "edges in bands and strides give the same bits",
+        "a wide picture of repetitions gives repetitions",
+    ):
+        assert len(re.findall(rf"^ok +\w+: {words}", output, re.MULTILINE)) >= 3, words
