@@ -115,10 +115,25 @@ def _body(bank: Bank, plan: Plan) -> dict[str, Any]:
             "adds_per_pixel": plan.adds,
             "error_bound": list(plan.error_bound),
         },
+        "fixed_point": _fixed_entry(plan.detail["fixed"]),
         "interface": plan.detail["abi"],
         "provenance": dict(bank.provenance),
         "warnings": list(bank.warnings),
     }
+
+
+def _fixed_entry(fixed: Any) -> dict[str, Any] | None:
+    return (
+        None
+        if fixed is None
+        else {
+            "operation": "count = floor((sum of whole products + 2^(shift-1)) / 2^shift)",
+            "shift": list(fixed.shift),
+            "value_of_a_count": list(fixed.step),
+            "error_bound": list(fixed.bound),
+            "can_saturate": list(fixed.clips),
+        }
+    )
 
 
 def _kernel_entry(kernel: Kernel) -> dict[str, Any]:

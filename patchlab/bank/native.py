@@ -11,7 +11,8 @@ import contextlib
 import ctypes
 import os
 import tempfile
-from collections.abc import Mapping
+from collections.abc import Callable, Mapping
+from concurrent.futures import ThreadPoolExecutor
 from pathlib import Path
 from typing import Any
 
@@ -24,6 +25,9 @@ from patchlab.store import read_file, sha256
 from patchlab.types import F32, Bank, Plan
 
 _POINTER, _STRIDE, _INT = ctypes.c_void_p, ctypes.c_ssize_t, ctypes.c_int
+Band = Callable[[int, int], int]
+"""Computes some rows, (first, count); returns a code."""
+
 _PICTURE = [_POINTER, _STRIDE, _INT, _INT, _INT, _INT]
 
 
@@ -55,6 +59,7 @@ class NativeBank:
             )
         self.bank = bank
         self._library = _load(library, bank.name)
+        self._plan = plan
         self._declare()
         if self._call("abi", _INT)() != plan.detail["abi"]:
             raise VerificationError("the shared library belongs to another bank", where=bank.name)
@@ -79,12 +84,23 @@ class NativeBank:
             "edges_rows", _INT, *_PICTURE, _INT, _POINTER, _STRIDE, _POINTER, _STRIDE, _POINTER
         )
 
+        fixed = self._fixed = self._plan.detail["fixed"]
+        if fixed is not None:
+            self._responses_q = self._call(
+                "responses_q_rows", _INT, *_PICTURE, _POINTER, _STRIDE, _STRIDE, _POINTER, _POINTER
+            )
+            self._edges_q = self._call(
+                "edges_q_rows", _INT, *_PICTURE, _INT, _POINTER, _STRIDE, _POINTER, _STRIDE,
+                _POINTER,
+            )  # fmt: skip
+
     def responses(
         self,
         pixels: NDArray[Any],
         *,
         rows: tuple[int, int] | None = None,
         out: F32 | None = None,
+        threads: int = 1,
     ) -> F32:
         """Responses of every kernel.
 
@@ -93,6 +109,7 @@ class NativeBank:
         pixels : ndarray (h, w) of the contract's dtype; rows may have any stride
         rows : (first, count), a band to compute alone; the whole picture when not given
         out : float32 ndarray (n, count, w) to write to, unit stride along x; made when not given
+        threads : how many bands are computed side by side; the result is the same bits for any
 
         Returns
         -------
@@ -100,22 +117,32 @@ class NativeBank:
 
         Raises
         ------
-        InputError : the picture does not fit the bank. UsageError : a wrong band or ``out``.
+        InputError : the picture does not fit the bank.
+        UsageError : a wrong band, ``out`` or number of threads.
         """
         pixels, (first, count) = self._picture(pixels, rows)
-        shape = (len(self.bank), count, pixels.shape[1])
-        out = _output(out, shape, np.float32)
-        scratch = self._memory(pixels)  # a name of its own: it must outlive the call
-        self._check(
-            self._responses(
-                *_address(pixels), first, count,
-                out.ctypes.data, out.strides[1], out.strides[0], scratch.ctypes.data,
-            )
-        )  # fmt: skip
-        return out
+        planes = _output(out, (len(self.bank), count, pixels.shape[1]), np.float32)
+
+        def band(start: int, height: int) -> int:
+            part = planes[:, start - first :]
+            scratch = self._memory(pixels)  # a name of its own: it must outlive the call
+            return int(
+                self._responses(
+                    *_address(pixels), start, height,
+                    part.ctypes.data, planes.strides[1], planes.strides[0], scratch.ctypes.data,
+                )
+            )  # fmt: skip
+
+        self._in_bands(band, first, count, threads)
+        return planes
 
     def edges(
-        self, pixels: NDArray[Any], scale: int, *, rows: tuple[int, int] | None = None
+        self,
+        pixels: NDArray[Any],
+        scale: int,
+        *,
+        rows: tuple[int, int] | None = None,
+        threads: int = 1,
     ) -> tuple[F32, NDArray[np.uint8]]:
         """Strength of one scale and the index of the winning orientation.
 
@@ -124,6 +151,7 @@ class NativeBank:
         pixels : ndarray (h, w) of the contract's dtype; rows may have any stride
         scale : position among ``bank.scales``, 0 the finest
         rows : (first, count), a band to compute alone; the whole picture when not given
+        threads : how many bands are computed side by side; the result is the same bits for any
 
         Returns
         -------
@@ -134,17 +162,112 @@ class NativeBank:
         InputError : the picture does not fit the bank. UsageError : no such scale or band.
         """
         pixels, (first, count) = self._picture(pixels, rows)
+        return self._strongest(self._edges, pixels, first, count, scale, threads)
+
+    def responses_q(
+        self,
+        pixels: NDArray[Any],
+        *,
+        rows: tuple[int, int] | None = None,
+        out: NDArray[np.int16] | None = None,
+        threads: int = 1,
+    ) -> tuple[NDArray[np.int16], int]:
+        """Responses of every kernel in 16-bit fixed point.
+
+        Parameters
+        ----------
+        pixels, rows, threads : as in :meth:`responses`
+        out : int16 ndarray (n, count, w) to write to, unit stride along x; made when not given
+
+        Returns
+        -------
+        int16 ndarray (n, count, w) : counts; times ``plan.detail["fixed"].step`` they are responses
+        int : how many counts stand at the ends of the range
+
+        Raises
+        ------
+        InputError : the picture does not fit the bank.
+        UsageError : a wrong band or ``out``, or a bank without fixed point.
+        """
+        self._need_fixed()
+        pixels, (first, count) = self._picture(pixels, rows)
+        planes = _output(out, (len(self.bank), count, pixels.shape[1]), np.int16)
+        ends: list[int] = []
+
+        def band(start: int, height: int) -> int:
+            part = planes[:, start - first :]
+            scratch = self._memory(pixels)
+            found = ctypes.c_uint64(0)
+            code = self._responses_q(
+                *_address(pixels), start, height, part.ctypes.data, planes.strides[1],
+                planes.strides[0], ctypes.addressof(found), scratch.ctypes.data,
+            )  # fmt: skip
+            ends.append(int(found.value))
+            return int(code)
+
+        self._in_bands(band, first, count, threads)
+        return planes, sum(ends)
+
+    def edges_q(
+        self,
+        pixels: NDArray[Any],
+        scale: int,
+        *,
+        rows: tuple[int, int] | None = None,
+        threads: int = 1,
+    ) -> tuple[F32, NDArray[np.uint8]]:
+        """As :meth:`edges`, computed in 16-bit fixed point.
+
+        Raises
+        ------
+        InputError : the picture does not fit the bank.
+        UsageError : no such scale or band, or a bank without fixed point.
+        """
+        self._need_fixed()
+        pixels, (first, count) = self._picture(pixels, rows)
+        return self._strongest(self._edges_q, pixels, first, count, scale, threads)
+
+    def _strongest(
+        self, call: Any, pixels: NDArray[Any], first: int, count: int, scale: int, threads: int
+    ) -> tuple[F32, NDArray[np.uint8]]:
         strength = np.empty((count, pixels.shape[1]), dtype=np.float32)
         turn = np.empty(strength.shape, dtype=np.uint8)
-        scratch = self._memory(pixels)
-        self._check(
-            self._edges(
-                *_address(pixels), first, count, scale,
-                strength.ctypes.data, strength.strides[0], turn.ctypes.data, turn.strides[0],
-                scratch.ctypes.data,
-            )
-        )  # fmt: skip
+
+        def band(start: int, height: int) -> int:
+            to, who = strength[start - first :], turn[start - first :]
+            scratch = self._memory(pixels)
+            return int(
+                call(
+                    *_address(pixels), start, height, scale, to.ctypes.data, strength.strides[0],
+                    who.ctypes.data, turn.strides[0], scratch.ctypes.data,
+                )
+            )  # fmt: skip
+
+        self._in_bands(band, first, count, threads)
         return strength, turn
+
+    def _in_bands(self, band: Band, first: int, count: int, threads: int) -> None:
+        """Compute a band in one call, or its parts side by side."""
+        if threads < 1:
+            raise UsageError(f"{threads} threads: at least one is needed")
+        if not 1 <= threads <= count // self.bank.size or first < 0:
+            threads = 1  # too few rows to share, or a band that the code refuses itself
+        if threads == 1:
+            self._check(band(first, count))
+            return
+        # a few bands a thread, so that a thread that was held up does not hold up all;
+        # each costs the rows of its halo once more
+        parts = min(4 * threads, max(threads, count // (4 * self.bank.size)))
+        tops = [first + count * i // parts for i in range(parts + 1)]
+        with ThreadPoolExecutor(threads) as pool:
+            codes = list(pool.map(lambda i: band(tops[i], tops[i + 1] - tops[i]), range(parts)))
+        self._check(max(codes))
+
+    def _need_fixed(self) -> None:
+        if self._fixed is None:
+            raise UsageError(
+                "fixed point needs integer pixels of at most 12 bits", where=self.bank.name
+            )
 
     def _picture(
         self, pixels: NDArray[Any], rows: tuple[int, int] | None
@@ -168,7 +291,7 @@ def _address(pixels: NDArray[Any]) -> tuple[int, int, int, int]:
     return pixels.ctypes.data, pixels.strides[0], pixels.shape[1], pixels.shape[0]
 
 
-def _output(out: F32 | None, shape: tuple[int, ...], dtype: Any) -> F32:
+def _output(out: NDArray[Any] | None, shape: tuple[int, ...], dtype: Any) -> NDArray[Any]:
     if out is None:
         return np.empty(shape, dtype=dtype)
     if out.shape != shape or out.dtype != dtype or out.strides[-1] != out.itemsize:

@@ -28,6 +28,7 @@ from typing import Any
 
 import numpy as np
 
+from patchlab.bank.fixed import fixed_point
 from patchlab.bank.products import (
     Product,
     Sum,
@@ -37,11 +38,17 @@ from patchlab.bank.products import (
     unfold,
     uses_of,
 )
+from patchlab.bank.tile_fft import LARGEST, LENGTH, TileFFT, tile_fft
+from patchlab.bank.tile_fft import bound as tile_bound
+from patchlab.bank.tile_fft import cost as tile_cost
+from patchlab.bank.tile_fft import work as tile_work
 from patchlab.conventions import gamma
 from patchlab.errors import UsageError
 from patchlab.types import F64, Bank, Plan
 
-KINDS = ("auto", "direct", "parity")
+KINDS = ("auto", "direct", "parity", "fft")
+CLEARLY = 1.5
+"""How many times fewer operations tile transforms must promise to be taken."""
 GROUP = 6
 """Products that are computed together: what the registers of a core hold."""
 
@@ -149,7 +156,8 @@ def _bounds(products: list[Product], sums: Mapping[int, Sum], span: float) -> tu
 
 def _additions(products: list[Product], groups: list[list[int]], sums: Mapping[int, Sum]) -> int:
     """Additions for each pixel: folding rows and columns, summing products, joining them."""
-    fold_rows = {(p.basis[0], p.exact.shape[0] - (p.basis[0] == "e")) for p in products}
+    used = [products[p] for group in groups for p in group]
+    fold_rows = {(p.basis[0], p.exact.shape[0] - (p.basis[0] == "e")) for p in used}
     total = sum(count for kind, count in fold_rows if kind != "a")
     for group in groups:
         first = products[group[0]]
@@ -162,7 +170,7 @@ def _additions(products: list[Product], groups: list[list[int]], sums: Mapping[i
 
 def _interface_number(bank: Bank) -> int:
     """A number that changes with anything a program built against the bank relies on."""
-    h = hashlib.sha256(b"patchlab C interface 1\0")
+    h = hashlib.sha256(b"patchlab C interface 2\0")
     table = bank.table
     names = "\0".join(k.name for k in bank.kernels)
     about = f"{bank.name}\0{table.contract.pixels}\0{bank.border}\0{bank.strength}\0{names}"
@@ -189,20 +197,75 @@ def _lines(products: list[Product], groups: list[list[int]]) -> tuple[str, ...]:
     )
 
 
+def _name(products: list[Product], sums: Mapping[int, Sum], tiles: TileFFT | None) -> str:
+    used = {products[p].basis for k in sums if tiles is None or k not in tiles.kernels
+            for p, _ in sums[k]}  # fmt: skip
+    rows = "parity" if used - {"all"} else "direct"
+    if tiles is None:
+        return rows
+    return f"{rows} and tile FFT" if used else "tile FFT"
+
+
+def _counted(
+    products: list[Product],
+    groups: list[list[int]],
+    sums: Mapping[int, Sum],
+    tiles: TileFFT | None,
+) -> tuple[tuple[str, ...], float, float]:
+    """What is computed, in words, and its multiplies and additions a pixel."""
+    if tiles is None:
+        multiplies = float(sum(p.exact.size for p in products))
+        return _lines(products, groups), multiplies, float(_additions(products, groups, sums))
+    rest = {k: terms for k, terms in sums.items() if k not in tiles.kernels}
+    used = {p for terms in rest.values() for p, _ in terms}
+    kept = [[p for p in group if p in used] for group in groups]
+    kept = [group for group in kept if group]
+    times, plus = tile_work(tiles.size, len(tiles.kernels))
+    line = (
+        f"{len(tiles.kernels)} kernels of {tiles.size} x {tiles.size} by tile FFT, blocks of "
+        f"{LENGTH} rows for {tiles.rows}"
+    )
+    multiplies = sum(products[p].exact.size for p in used) + times
+    adds = (_additions(products, kept, rest) if kept else 0) + plus
+    return (*_lines(products, kept), line), float(multiplies), float(adds)
+
+
+def _by_tiles(
+    bank: Bank, products: list[Product], sums: Mapping[int, Sum], kind: str
+) -> tuple[int, ...]:
+    """Kernels whose responses compiled code makes by tile transforms.
+
+    Kernels that make a strength stay with the products, which fused edges need. Of the others a
+    cluster goes when that saves operations.
+    """
+    fused = {k for s in range(len(bank.scales)) for _, *pair in strength_members(bank, s)
+             for k in pair if k is not None}  # fmt: skip
+    free = {k: terms for k, terms in sums.items() if k not in fused and terms}
+    each = tile_cost(bank.size, len(free)) / max(len(free), 1) if bank.size <= LARGEST else np.inf
+    chosen: list[int] = []
+    for cluster in clusters(free):
+        work = sum(products[p].exact.size for p in {p for k in cluster for p, _ in sums[k]})
+        if kind == "fft" or (kind == "auto" and CLEARLY * each * len(cluster) < work):
+            chosen += cluster
+    return tuple(sorted(chosen))
+
+
 def make_plan(bank: Bank, kind: str = "auto") -> Plan:
     """Plan a bank's computation.
 
     Parameters
     ----------
     bank : Bank
-    kind : "direct" (every tap), "parity" (every kernel by its parts) or "auto", which takes
-        for each set of kernels that share parts whichever needs fewer operations
+    kind : "direct" (every tap), "parity" (every kernel by its parts), "fft" (every kernel that
+        makes no strength by tile transforms, see :mod:`patchlab.bank.tile_fft`) or "auto", which
+        takes for each set of kernels that share parts whichever needs fewer operations
 
     Returns
     -------
     Plan : its ``detail`` holds ``bases`` (one a product), ``coefficients`` (float32 arrays, one a
         product), ``sums`` (one a kernel), ``product_groups``, ``strength`` (one entry a scale, as
-        :func:`strength_members`), ``abi`` (the interface's number) and ``asked`` (the kind)
+        :func:`strength_members`), ``fft`` (kernels by tile transforms, or None), ``fixed`` (the
+        bank in 16-bit fixed point, or None), ``abi`` (the interface's number), ``asked`` (the kind)
 
     Raises
     ------
@@ -216,7 +279,9 @@ def make_plan(bank: Bank, kind: str = "auto") -> Plan:
     many pixels a basis value is made of, and X the largest absolute working value of the input
     contract. It holds for every order of summation, with fused multiply-adds or without (Higham
     2002, section 3.1), barring underflow. For float32 pixels X is the contract's largest level:
-    the bound scales with the working values if larger ones are given.
+    the bound scales with the working values if larger ones are given. A kernel by tile transforms
+    has the larger of this bound and :func:`patchlab.bank.tile_fft.bound`; the products stand by
+    for engines that take them instead, and for fixed point.
     """
     if kind not in KINDS:
         raise UsageError(f"unknown plan {kind!r}", remedy=f"choose one of {', '.join(KINDS)}")
@@ -228,17 +293,34 @@ def make_plan(bank: Bank, kind: str = "auto") -> Plan:
     mixed = {i: split[i] if i in chosen else {"all": exact[i]} for i in split}
     products, sums = share(mixed)
     groups = _group(products, sums, bank)
+    tiles = tile_fft(bank.taps, _by_tiles(bank, products, sums, kind))
+    bounds = _bounds(products, sums, bank.table.span)
+    if tiles is not None:
+        bounds = tuple(
+            max(b, tile_bound(exact[k], bank.table.span)) if k in tiles.kernels else b
+            for k, b in enumerate(bounds)
+        )
+    order = tuple(sums[i] for i in sorted(sums))
+    lines, multiplies, adds = _counted(products, groups, sums, tiles)
     return Plan(
-        kind="parity" if any(p.basis != "all" for p in products) else "direct",
-        groups=_lines(products, groups),
-        multiplies=float(sum(p.exact.size for p in products)),
-        adds=float(_additions(products, groups, sums)),
-        error_bound=_bounds(products, sums, bank.table.span),
+        kind=_name(products, sums, tiles),
+        groups=lines,
+        multiplies=multiplies,
+        adds=adds,
+        error_bound=bounds,
         detail={
             "bases": tuple(p.basis for p in products),
             "coefficients": tuple(p.rounded for p in products),
-            "sums": tuple(sums[i] for i in sorted(sums)),
+            "sums": order,
+            "fft": tiles,
             "product_groups": tuple(tuple(g) for g in groups),
+            "fixed": fixed_point(
+                bank,
+                [p.basis for p in products],
+                [p.rounded for p in products],
+                order,
+                tuple(tuple(g) for g in groups),
+            ),
             "strength": tuple(strength_members(bank, s) for s in range(len(bank.scales))),
             "abi": _interface_number(bank),
             "asked": kind,
@@ -264,7 +346,9 @@ def rebuilt_taps(plan: Plan, size: int) -> Iterator[F64]:
 def describe(plan: Plan) -> str:
     """The plan as a few lines for a person."""
     kernels = len(plan.detail["sums"])
-    shared = sum(len(terms) for terms in plan.detail["sums"]) - len(plan.detail["bases"])
+    tiles = plan.detail["fft"]
+    rows = [s for k, s in enumerate(plan.detail["sums"]) if not tiles or k not in tiles.kernels]
+    shared = sum(len(terms) for terms in rows) - len({p for terms in rows for p, _ in terms})
     head = (
         f"{plan.kind} plan: {kernels} kernels, {plan.multiplies:.0f} multiplies and "
         f"{plan.adds:.0f} additions a pixel"
@@ -272,4 +356,7 @@ def describe(plan: Plan) -> str:
     if shared:
         head += f"; {shared} parts are shared between kernels"
     worst = f"largest error bound {max(plan.error_bound):.3g} (working values)"
+    fixed = plan.detail["fixed"]
+    if fixed is not None:
+        worst += f"; in 16-bit fixed point {max(fixed.bound):.3g}, nothing can overflow"
     return "\n".join([head, *(f"  {line}" for line in plan.groups), worst])

@@ -11,7 +11,7 @@ import numpy as np
 
 from patchlab.conventions import BORDERS
 from patchlab.errors import UsageError
-from patchlab.export import c_code
+from patchlab.export import c_code, c_fft, c_fixed
 from patchlab.export.c_text import (
     fill,
     float_literal,
@@ -32,6 +32,9 @@ CHUNK = 64
 RING_BYTES = 196_608
 """What the ring of rows may take: it should stay in the second cache."""
 
+ISAS = ("base", "avx2", "avx512")
+ROWS_CALL = "    code = @N@_walk(&p, &job, first_row, row_count, scratch);\n"
+
 CODES = (
     ("OK", "success"),
     ("NO_IMAGE", "image is NULL"),
@@ -42,8 +45,11 @@ CODES = (
     ("BAD_ROWS", "first_row and row_count do not lie inside the picture"),
     ("BAD_SCALE", "there is no such scale in this bank"),
     ("NO_OUTPUT", "out is NULL"),
-    ("OUTPUT_MISALIGNED", "out, out_row_bytes or out_plane_bytes is not a multiple of 4"),
-    ("BAD_OUTPUT_ROW_BYTES", "out_row_bytes is smaller than a row of floats"),
+    (
+        "OUTPUT_MISALIGNED",
+        "out, out_row_bytes or out_plane_bytes is not a multiple of a value's size",
+    ),
+    ("BAD_OUTPUT_ROW_BYTES", "out_row_bytes is smaller than a row of values"),
     ("BAD_OUTPUT_PLANE_BYTES", "out_plane_bytes makes the planes overlap"),
     ("NO_STRENGTH", "strength is NULL"),
     ("STRENGTH_MISALIGNED", "strength or strength_row_bytes is not a multiple of 4"),
@@ -103,7 +109,9 @@ def emit(bank: Bank, plan: Plan) -> dict[str, bytes]:
         identifier(kernel.name, "kernel name")
     if bank.border not in BORDERS:
         raise UsageError(f"unknown border {bank.border!r}")
-    about = _about(bank, plan) | _sections(bank, plan)
+    about = _about(bank, plan) | _sections(bank, plan) | c_fixed.sections(bank, plan, CHUNK)
+    about |= c_fft.sections(plan, bank.radius, CHUNK, _line(bank.radius))
+
     # texts with tokens of their own are filled before they are put in place
     about |= {k: fill(str(v), {"N": name}).decode() for k, v in about.items() if "@N@" in str(v)}
 
@@ -124,7 +132,7 @@ def emit(bank: Bank, plan: Plan) -> dict[str, bytes]:
 def _about(bank: Bank, plan: Plan) -> dict[str, object]:
     """The plain facts that the templates mention."""
     form, plane = bank.contract.format, bank.contract.plane
-    line = -(-(CHUNK + 2 * bank.radius) // 16) * 16
+    line = _line(bank.radius)
     products = len(plan.detail["bases"])
     scales = len(plan.detail["strength"])
     tile = max(256, RING_BYTES // (4 * bank.size) // CHUNK * CHUNK)
@@ -156,9 +164,15 @@ def _about(bank: Bank, plan: Plan) -> dict[str, object]:
     }
 
 
+def _line(radius: int) -> int:
+    """Floats of a chunk with its halo, in whole vectors."""
+    return -(-(CHUNK + 2 * radius) // 16) * 16
+
+
 def _sections(bank: Bank, plan: Plan) -> dict[str, object]:
     """The parts of the source that depend on the bank."""
     scales = range(len(plan.detail["strength"]))
+    fft = plan.detail.get("fft")
     return {
         "THRESHOLDS": _thresholds(bank),
         "CODES": ",\n".join(f"    @N@_{word} = {i}" for i, (word, _) in enumerate(CODES)),
@@ -167,21 +181,20 @@ def _sections(bank: Bank, plan: Plan) -> dict[str, object]:
         "NAMES": ",\n".join(f'    "{k.name}"' for k in bank.kernels),
         "TABLE": _table(bank.table),
         "VALUE": _value(bank.table),
-        "COEFFICIENTS": "\n".join(
-            c_code.coefficients(g, plan) for g in range(len(plan.detail["product_groups"]))
-        ),
+        "COEFFICIENTS": "\n".join(c_code.coefficients(g, plan) for g in c_code.used_groups(plan)),
         "FOLD": c_code.fold(plan),
         "GROUPS": "\n".join(
-            c_code.group_code(g, plan, bank.radius)
-            for g in range(len(plan.detail["product_groups"]))
+            c_code.group_code(g, plan, bank.radius) for g in c_code.used_groups(plan)
         ),
         "JOINS": c_code.joins(plan),
         "RESPONSES": c_code.responses(plan),
         "EDGES": "".join(c_code.edges(bank, plan, s) for s in scales),
+        **{f"FFT_{isa}": f"@N@_fft_block_{isa}" if fft else "NULL" for isa in ISAS},
+        "ROWS_CALL": ROWS_CALL if c_code.by_rows(plan) else "",
         **(c_code.TAKE if scales else dict.fromkeys(c_code.TAKE, "")),
         **{
             f"EDGES_{isa}": ", ".join(f"@N@_edges{s}_{isa}" for s in scales) or "NULL"
-            for isa in ("base", "avx2", "avx512")
+            for isa in ISAS
         },
     }
 

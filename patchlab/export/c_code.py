@@ -16,7 +16,7 @@ from patchlab.types import Bank, Plan
 
 def folds(plan: Plan) -> bool:
     """Does the plan read folded rows?"""
-    return any(basis != "all" for basis in plan.detail["bases"])
+    return any(plan.detail["bases"][p] != "all" for p in needed(plan))
 
 
 def coefficients(number: int, plan: Plan) -> str:
@@ -182,7 +182,7 @@ static @N@_TARGET void @N@_FN(zero)(float *to)
 
 def joins(plan: Plan) -> str:
     """The joining functions that this bank needs, and no others."""
-    used = {call.split("(")[0] for terms in plan.detail["sums"] for call in _join(terms)[1]}
+    used = {call.split("(")[0] for k in by_rows(plan) for call in _join(plan.detail["sums"][k])[1]}
     return (_ZERO_TEXT if "zero" in used else "") + "".join(
         f"static @N@_TARGET void @N@_FN({word})({arguments})\n{{\n    int x;\n"
         f"    for (x = 0; x < @N@_CHUNK; x += @N@_LANES) @N@_STORE(to + x, {value});\n}}\n\n"
@@ -191,20 +191,44 @@ def joins(plan: Plan) -> str:
     )
 
 
+def by_rows(plan: Plan) -> list[int]:
+    """Kernels that are computed row by row; the others go by tile transforms."""
+    tiles = plan.detail.get("fft")
+    others = tiles.kernels if tiles else ()
+    return [k for k in range(len(plan.detail["sums"])) if k not in others]
+
+
+def needed(plan: Plan) -> set[int]:
+    """Products that the code uses: those of strengths, and of responses computed row by row."""
+    members = {k for scale in plan.detail["strength"] for _, *pair in scale for k in pair}
+    kernels = members.union(by_rows(plan)) - {None}
+    return {p for k in kernels for p, _ in plan.detail["sums"][k]}
+
+
+def used_groups(plan: Plan) -> list[int]:
+    """Groups of products that the code uses."""
+    wanted = needed(plan)
+    return [g for g, group in enumerate(plan.detail["product_groups"]) if wanted & set(group)]
+
+
 def responses(plan: Plan) -> str:
     """Body of the C function that writes every plane of a chunk."""
-    wanted = {p for terms in plan.detail["sums"] for p, _ in terms}
+    kernels = by_rows(plan)
+    wanted = {p for k in kernels for p, _ in plan.detail["sums"][k]}
     body = ["float *const t = work + @N@_FOLDED; /* products */"]
-    if any(_join(terms)[0] == "r" for terms in plan.detail["sums"]):
+    if any(_join(plan.detail["sums"][k])[0] == "r" for k in kernels):
         body.append(f"float *const r = t + {len(plan.detail['bases'])} * @N@_CHUNK; /* a sum */")
     body += _calls(plan, wanted)
-    for k, terms in enumerate(plan.detail["sums"]):
+    for k in kernels:
+        terms = plan.detail["sums"][k]
         where, calls = _join(terms)
         body += [f"@N@_FN({call.replace('(', ')(', 1)};" for call in calls]
         target = f"(float *)(void *)(out + {k} * plane)"
         body.append(f"@N@_FN(put)({where}, {target}, n, stream);")
     if not wanted:
         body += ["(void)rows;", "(void)at;"]
+    if not kernels:
+        body += ["(void)t;", "(void)out;", "(void)plane;", "(void)stream;", "(void)n;"]
     return lines(body, 4)
 
 

@@ -44,6 +44,7 @@ class Target:
     bounds : largest error allowed for each kernel; None means the plan's
     slow : run it on small pictures only
     not_run : why it cannot be run here ("" when it can)
+    also : further ways that came with this one
     """
 
     name: str
@@ -52,6 +53,7 @@ class Target:
     bounds: tuple[float, ...] | None = None
     slow: bool = False
     not_run: str = ""
+    also: tuple[Target, ...] = ()
 
 
 @dataclass(frozen=True)

@@ -44,6 +44,7 @@ def emit_selftest(bank: Bank, plan: Plan, cases: Sequence[Case]) -> dict[str, by
     for case in cases:
         _check_case(bank, case)
     bad_code = _bad_code(bank)
+    fixed = plan.detail["fixed"]
     text = fill(
         template("selftest.c.in"),
         {
@@ -51,8 +52,13 @@ def emit_selftest(bank: Bank, plan: Plan, cases: Sequence[Case]) -> dict[str, by
             "LICENCE": licence(" * "),
             "COUNT": len(bank),
             "SIZE": bank.size,
-            "ARRAYS": "\n".join(_arrays(i, case, bank.name) for i, case in enumerate(cases)),
-            "CASES": ",\n".join(_entry(i, case) for i, case in enumerate(cases)),
+            "ARRAYS": "\n".join(
+                _arrays(i, case, bank.name) + _counts(i, case, fixed)
+                for i, case in enumerate(cases)
+            ),
+            "CASES": ",\n".join(_entry(i, case, fixed) for i, case in enumerate(cases)),
+            "FIXED": _fixed_text(bank, fixed),
+            "CHECK_FIXED": _CHECK_FIXED.replace("@N@", bank.name) if fixed is not None else "",
             "CASE_COUNT": len(cases),
             "MEMBERS": _members(plan),
             "MEMBER_COUNT": max(sum(len(s) for s in plan.detail["strength"]), 1),
@@ -96,12 +102,39 @@ def _arrays(number: int, case: Case, name: str) -> str:
         numbers(np.asarray(tolerance, dtype=np.float64)),
         "};",
     ]
-    return lines(rows)
+    return lines(rows) + "\n"
 
 
-def _entry(number: int, case: Case) -> str:
+_CHECK_FIXED = """\
+        check_fixed(c, scratch + 1);
+        for (scale = 0; scale < @N@_SCALE_COUNT; ++scale) {
+            check_edges(c, @N@_edges_q, fixed_tolerance, scale, scratch + 1);
+        }
+        if (i == 0) check_fixed_refusals(c, scratch + 1);
+"""
+
+
+def _fixed_text(bank: Bank, fixed: Any) -> str:
+    if fixed is None:
+        return ""
+    tolerance = numbers(np.array(fixed.bound, dtype=np.float64))
+    values = {"N": bank.name, "COUNT": len(bank), "Q_TOLERANCE": tolerance}
+    return fill(template("selftest_fixed.c.in"), values).decode()
+
+
+def _counts(number: int, case: Case, fixed: Any) -> str:
+    """The fixed-point counts of a case, exactly."""
+    if fixed is None:
+        return ""
+    counts, _ = fixed.counts(case[1])
+    return f"static const int16_t counts{number}[{counts.size}] = {{\n{numbers(counts)}\n}};\n"
+
+
+def _entry(number: int, case: Case, fixed: Any) -> str:
     h, w = case[1].shape
-    return f'    {{"{case[0]}", {w}, {h}, pixels{number}, expected{number}, tolerance{number}}}'
+    counts = "NULL, 0" if fixed is None else f"counts{number}, {fixed.counts(case[1])[1]}"
+    arrays = f"pixels{number}, expected{number}, tolerance{number}, {counts}"
+    return f'    {{"{case[0]}", {w}, {h}, {arrays}}}'
 
 
 def _members(plan: Plan) -> str:

@@ -132,6 +132,7 @@ class Case:
     strength : float64 (scales, h, w), or None for a bank without strength
     orientation : uint8 (scales, h, w), number of the winner (near ties may differ in float32)
     strength_tolerance : float64 (scales,)
+    counts : int16 (n, h, w), exact fixed-point counts, or None for a bank without
     """
 
     name: str
@@ -142,6 +143,7 @@ class Case:
     strength: F64 | None = None
     orientation: NDArray[np.uint8] | None = None
     strength_tolerance: F64 | None = None
+    counts: NDArray[np.int16] | None = None
 
 
 def make_cases(
@@ -161,7 +163,7 @@ def make_cases(
     oracle : callable, float64 responses
     crop : a piece of a real picture in the bank's pixels, at least as large as the kernels;
         its middle is used
-    small : only the impulse and a little noise, for the C self-test
+    small : only the impulse and a little noise down to the kernels' size, for the C self-test
     limit_bytes : about how large all expected arrays may be; cases at the end of the list
         are left out beyond it (the first two never)
 
@@ -197,6 +199,7 @@ def make_probes(bank: Bank, plan: Plan, oracle: Oracle) -> tuple[Case, ...]:
         ("probe_wide", "noise across the seam of column tiles", _noise(bank, (h + 1, wide))),
         ("probe_tall", "noise, many rows", _noise(bank, (4 * h + 61, h + 1))),
         ("probe_worst", "extremes, repeated", _worst(bank, plan, (4 * h + 1, 4 * h + 2))),
+        *_worst_fixed(bank, plan),
     )
     return tuple(_answered(bank, plan, oracle, *picture) for picture in pictures)
 
@@ -207,11 +210,13 @@ def _answered(bank: Bank, plan: Plan, oracle: Oracle, name: str, what: str, pixe
     if expected.shape != (len(bank), *pixels.shape):
         raise ValueError(f"the oracle gave {expected.shape} for a picture of {pixels.shape}")
     tolerance = np.array(plan.error_bound, dtype=np.float64)
+    fixed = plan.detail.get("fixed")
+    counts = None if fixed is None else fixed.counts(pixels)[0]
     if edges_lacking(bank):
-        return Case(name, what, pixels, expected, tolerance)
+        return Case(name, what, pixels, expected, tolerance, counts=counts)
     bounds = [strength_tolerance(bank, plan.error_bound, s) for s in bank.scales]
     winners = strongest(bank, expected)
-    return Case(name, what, pixels, expected, tolerance, *winners, np.array(bounds))
+    return Case(name, what, pixels, expected, tolerance, *winners, np.array(bounds), counts)
 
 
 # ---------------------------------------------------------------- pictures
@@ -262,6 +267,7 @@ def _impulses(bank: Bank) -> Iterator[Picture]:
 def _small(bank: Bank) -> Iterator[Picture]:
     yield next(_impulses(bank))
     yield "noise", "uniform noise", _noise(bank, (bank.size + 1, bank.size + 2))
+    yield "smallest", "noise, as large as the kernels", _noise(bank, (bank.size, bank.size))
 
 
 def _noise(bank: Bank, shape: tuple[int, int]) -> Pixels:
@@ -289,6 +295,16 @@ def _worst(bank: Bank, plan: Plan, shape: tuple[int, int]) -> Pixels:
     return _codes(bank, np.where(bright, draw.choice(high, shape), draw.choice(low, shape)))
 
 
+def _worst_fixed(bank: Bank, plan: Plan) -> Iterator[Picture]:
+    """The picture on which the rounded taps of fixed point do most harm, and its negative."""
+    fixed = plan.detail.get("fixed")
+    if fixed is not None and bank.table.values is not None:
+        k = int(np.argmax(fixed.bound))
+        for most in (True, False):
+            worst = fixed.worst(k, bank.table.values, most).astype(bank.contract.format.dtype)
+            yield f"probe_fixed_{int(most)}", "worst for fixed point", np.tile(worst, (2, 2))
+
+
 def _middle(pixels: Pixels, side: int) -> Pixels:
     rows, cols = (max(0, (n - side) // 2) for n in pixels.shape)
     return pixels[rows : rows + side, cols : cols + side]
@@ -297,7 +313,7 @@ def _middle(pixels: Pixels, side: int) -> Pixels:
 # ---------------------------------------------------------------- files
 
 _ARRAYS = {"pixels": "image", "expected": "responses", "strength": "strength",
-           "orientation": "orientation"}  # fmt: skip
+           "orientation": "orientation", "counts": "counts"}  # fmt: skip
 """Field of a case to the word in its file's name."""
 
 
@@ -370,6 +386,7 @@ def load_cases(read: Callable[[str], bytes]) -> tuple[Case, ...]:
 def _fitting(case: Case, kernels: int) -> None:
     h, w = case.pixels.shape
     fits = case.expected.shape == (kernels, h, w) and case.tolerance.shape == (kernels,)
+    fits = fits and (case.counts is None or case.counts.shape == (kernels, h, w))
     for array in (case.strength, case.orientation):
         scales = 0 if case.strength_tolerance is None else len(case.strength_tolerance)
         fits = fits and (array is None or array.shape == (scales, h, w))
@@ -396,6 +413,8 @@ order; any language can read them (a short text header, then the numbers).
 
 - `*.image.npy`: the picture, (rows, columns), in the bank's own pixels.
 - `*.responses.npy`: float64 (kernels, rows, columns), kernels in the order of `cases.json`.
+- `*.counts.npy`: int16 (kernels, rows, columns), where the bank has a fixed-point part. A
+  fixed-point port must give these very numbers.
 - `*.strength.npy`, `*.orientation.npy`: (scales, rows, columns), where the bank has them.
   Orientation is the number of the strongest orientation. Where two
   orientations are within twice the strength's tolerance of each other, either may win.

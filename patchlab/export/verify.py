@@ -78,6 +78,7 @@ def verify(
     checks = [files.check()]
     cases, stored = _stored(bank, files, oracle)
     checks.extend(stored)
+    checks.extend(_stored_counts(plan, cases))
     cases += make_probes(bank, plan, oracle)
     targets = [
         *(engines or {}).values(),
@@ -85,6 +86,7 @@ def verify(
         *_wasm(bank, files),
         *_onnx_targets(bank, files),
     ]
+    targets += [further for target in targets for further in target.also]
     for done, target in enumerate(targets):
         progress("verify", done, len(targets) + 1, target.name)
         checks.extend(run_target(bank, plan, target, cases))
@@ -150,6 +152,16 @@ def _stored(
     return cases, tuple(found)
 
 
+def _stored_counts(plan: Plan, cases: tuple[Case, ...]) -> Iterator[Check]:
+    """Are the stored fixed-point counts the ones that the plan's integers make?"""
+    fixed = plan.detail.get("fixed")
+    stored = [(c.pixels, c.counts) for c in cases if c.counts is not None]
+    if fixed is not None and stored:
+        wrong = sum(not np.array_equal(fixed.counts(p)[0], counts) for p, counts in stored)
+        note = f"{len(stored)} pictures, bit for bit"
+        yield judged("oracle, integers", "stored counts", float(wrong), 0.0, note)
+
+
 def _libraries(
     files: _Files, open_library: Callable[[Path], Target] | None, library: str | None
 ) -> Iterator[Target]:
@@ -176,7 +188,7 @@ def _opened(files: _Files, name: str, open_library: Callable[[Path], Target]) ->
         return Target(title, not_run=str(error))
     except (PatchlabError, OSError) as error:
         return broken_target(title, error)
-    return Target(title, opened.responses, opened.edges, opened.bounds)
+    return Target(title, opened.responses, opened.edges, opened.bounds, also=opened.also)
 
 
 def broken_target(title: str, error: Exception) -> Target:

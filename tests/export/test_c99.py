@@ -13,12 +13,13 @@ import numpy as np
 import pytest
 from scipy import ndimage
 
-from patchlab.bank import reference
+from patchlab.bank import reference, tile_fft
+from patchlab.bank.fixed import fixed_point
 from patchlab.bank.native import NativeBank
 from patchlab.bank.plan import make_plan
 from patchlab.conventions import BORDERS
 from patchlab.errors import InputError, UsageError, VerificationError
-from patchlab.export import c99
+from patchlab.export import c99, c_fft
 from patchlab.export.build import (
     FLAGS,
     STRICT,
@@ -472,6 +473,169 @@ def test_the_library_shows_only_its_own_names(compiled, tmp_path):
         f"compiled_{word}"
         for word in (
             "abi", "kernel_count", "kernel_name", "scale_count", "message", "scratch_bytes",
-            "responses", "responses_rows", "edges", "edges_rows",
+            "responses", "responses_rows", "edges", "edges_rows", "q_step",
+            "responses_q", "responses_q_rows", "edges_q", "edges_q_rows",
         )
     }  # fmt: skip
+
+
+# ---------------------------------------------------------------- fixed point
+
+
+@pytest.mark.parametrize("lanes", [1, 4, 8, 16])
+def test_fixed_point_gives_the_same_bits_on_every_instruction_set(lanes):
+    bank = lattice_bank(
+        "fixed", families=("gd1", "gd2"), widths=((1.2, 2.0),), count=4, size=9,
+        pixels="Mono12", kind="stabilised", strength="energy", border="zero",
+    )  # fmt: skip
+    plan, compiled = native(bank, flags=("-O1", f"-Dfixed_MAX_LANES={lanes}"))
+    fixed = plan.detail["fixed"]
+    for shape in ((9, 9), (13, 201)):
+        pixels = picture(shape, "Mono12")
+        counts, ends = fixed.counts(pixels)
+        found, saturated = compiled.responses_q(pixels)
+        np.testing.assert_array_equal(found, counts)
+        assert saturated == ends == 0
+        strength, turn = compiled.edges_q(pixels, 0)
+        members = plan.detail["strength"][0]
+        squares = np.stack(
+            [counts[e].astype(int) ** 2 + counts[o].astype(int) ** 2 for _, e, o in members]
+        )
+        best = np.sqrt(squares.max(axis=0).astype(np.float32)) * np.float32(fixed.step[0])
+        np.testing.assert_array_equal(strength, best)
+        np.testing.assert_array_equal(turn, squares.argmax(axis=0))
+
+
+def test_fixed_point_of_the_worst_picture_and_of_saturation():
+    bank = random_bank(3, 5)
+    plan = make_plan(bank)
+    d = plan.detail
+    fine = fixed_point(bank, d["bases"], d["coefficients"], d["sums"], d["product_groups"], finer=3)
+    plan = replace(plan, detail={**d, "fixed": fine})
+    library = compile_library(c99.emit(bank, plan), bank.name, flags=("-O1",))
+    compiled = NativeBank(bank, plan, library, sha256(library))
+    for k in range(len(bank)):
+        extreme = np.where(fine.taps[k] > 0, 255, 0).astype(np.uint8)
+        for pixels in (extreme, 255 - extreme, np.tile(extreme, (3, 17))):
+            counts, ends = fine.counts(pixels)
+            found, saturated = compiled.responses_q(pixels)
+            np.testing.assert_array_equal(found, counts)
+            assert saturated == ends > 0
+
+
+def test_fixed_point_is_refused_where_it_is_not(compiled_float):
+    with pytest.raises(UsageError, match="12 bits"):
+        compiled_float.responses_q(picture((9, 9), "float32"))
+
+
+@pytest.fixture(scope="module")
+def compiled_float():
+    return native(random_bank(2, 3, pixels="float32"))[1]
+
+
+# ---------------------------------------------------------------- tile transforms
+
+
+def mixed_bank(border="mirror101"):
+    mirrored = lattice_bank(widths=((1.5, 2.0),), count=4, size=11).taps
+    taps = np.concatenate([mirrored[:2], random_bank(3, 11).taps, mirrored[2:]])
+    return given_bank(taps, "mixed", pixels="Mono12", kind="stabilised", border=border)
+
+
+@pytest.mark.parametrize("lanes", [1, 8, 16])
+def test_tile_transforms_pass_the_selftest(lanes):
+    bank = mixed_bank("wrap" if lanes == 8 else "zero")
+    plan, files = files_of(bank)
+    assert plan.kind == "parity and tile FFT"
+    flags = (*(SANITIZE if lanes == 1 else ("-O1",)), *STRICT, f"-Dmixed_MAX_LANES={lanes}")
+    result = run_selftest(files, bank.name, flags=flags)
+    assert result.passed, result.output
+
+
+def test_tile_transforms_in_blocks_bands_and_strides():
+    bank = random_bank(3, 9, border="mirror")
+    plan, compiled = native(bank, "fft")
+    assert plan.kind == "tile FFT"
+    low, high = (np.uint8(v) for v in (0, 255))
+    worst = np.where(np.tile(bank.taps[0], (15, 9)) > 0, high, low)
+    for pixels in (worst, picture((57, 131)), picture((131, 9))):
+        found = compiled.responses(pixels)
+        error = np.abs(found - reference.responses(bank, pixels)).max(axis=(1, 2))
+        assert (error <= plan.error_bound).all()
+        h = len(pixels)
+        for first, count in ((0, 1), (h - 1, 1), (55, 2), (13, h - 20)):
+            band = compiled.responses(pixels, rows=(first, count))
+            np.testing.assert_array_equal(band, found[:, first : first + count])
+        out = np.empty((3, h, pixels.shape[1] + 7), dtype=np.float32)[:, :, 3:-4]
+        np.testing.assert_array_equal(compiled.responses(pixels[::-1], out=out), compiled.responses(
+            np.ascontiguousarray(pixels[::-1])))  # fmt: skip
+
+
+def test_counted_work_is_the_work_that_is_written():
+    code = c_fft._Code()
+    c_fft._forward(code, list(range(c_fft.LENGTH)))
+    turns = sum("(turn)" in row for row in code.rows)
+    sums = sum(re.search(r" = v\d+ [+-] v", row) is not None for row in code.rows)
+    multiplies, adds = tile_fft.work(1, 0)
+    assert 2 * turns == multiplies * 64
+    assert turns + sums == adds * 64
+
+
+def test_a_code_beyond_the_format_is_found_by_tile_transforms():
+    bank = random_bank(2, 9, pixels="Mono12")
+    _, compiled = native(bank, "fft")
+    pixels = picture((120, 70), "Mono12")
+    pixels[100, 33] = 4096
+    with pytest.raises(InputError, match="pixel code"):
+        compiled.responses(pixels)
+    compiled.responses(pixels, rows=(0, 96))
+    with pytest.raises(InputError, match="pixel code"):
+        compiled.responses(pixels, rows=(0, 97))
+
+
+# ---------------------------------------------------------------- threads
+
+
+@pytest.mark.parametrize("threads", [2, 3, 7])
+def test_any_number_of_threads_gives_the_same_bits(compiled, threads):
+    _, _, fast = compiled
+    pixels = picture((131, 77), "Mono12")
+    for rows in (None, (5, 120)):
+        one, many = (fast.responses(pixels, rows=rows, threads=t) for t in (1, threads))
+        np.testing.assert_array_equal(many, one)
+        for call in (fast.edges, fast.edges_q):
+            one, many = (call(pixels, 1, rows=rows, threads=t) for t in (1, threads))
+            np.testing.assert_array_equal(many[0], one[0])
+            np.testing.assert_array_equal(many[1], one[1])
+        one, many = (fast.responses_q(pixels, rows=rows, threads=t) for t in (1, threads))
+        np.testing.assert_array_equal(many[0], one[0])
+        assert many[1] == one[1]
+
+
+def test_threads_report_what_one_would(compiled):
+    _, _, fast = compiled
+    pixels = picture((60, 40), "Mono12")
+    with pytest.raises(UsageError, match="at least one"):
+        fast.responses(pixels, threads=0)
+    with pytest.raises(UsageError, match="row_count"):
+        fast.responses(pixels, rows=(30, 40), threads=2)
+    pixels[59, 3] = 5000
+    with pytest.raises(InputError, match="pixel code"):
+        fast.responses(pixels, threads=3)
+
+
+def test_the_selftest_tries_every_code_and_every_output():
+    bank, kind = VARIANTS["step"]
+    _, files = files_of(bank, kind)
+    source = files["step_selftest.c"].decode()
+    for code, _ in c99.CODES:
+        assert f"step_{code}" in source, code
+    output = run_selftest(files, bank.name, flags=("-O1",)).output
+    for words in (
+        "responses equal the reference",
+        "bands and strides give the same bits",
+        "strength equals the reference",
+        "edges in bands and strides give the same bits",
+        "a wide picture of repetitions gives repetitions",
+    ):
+        assert len(re.findall(rf"^ok +\w+: {words}", output, re.MULTILINE)) >= 3, words
