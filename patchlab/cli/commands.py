@@ -296,28 +296,41 @@ def _say_verify(result: dict[str, Any]) -> None:
 @click.option("-o", "--out", type=FOLDER, required=True, help="Folder for maps and edgels.")
 @click.option("--false-edges", type=float, help="False elements per megapixel of flat area.")
 @click.option("--threshold", type=float, help="A strength in noise units instead of a rate.")
+@click.option(
+    "--edges",
+    "what",
+    type=click.Choice(["step", "line", "both"]),
+    help="What is looked for, each kind at the rate; by default what the bank is made for.",
+)
+@click.option("--pictures/--no-pictures", "drawn", default=True, help="Draw maps and overlays.")
+@click.option("--jobs", type=click.IntRange(0, 1024), default=1, help="Worker processes; 0: all.")
 @click.option("--force", is_flag=True, help="Replace what stands there.")
+@click.option("--resume", is_flag=True, help="Go on with what stands there.")
 @click.option("--max-bad", type=float, default=0.1, help="Share of pictures that may be unusable.")
 @_shared
 def detect(bank: Path, pictures: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
-    """Find edges in PICTURES with a BANK: maps, edgels and overlays.
+    """Find edges in PICTURES with a BANK: one table of edgels, maps and overlays.
 
     Edges that steer a machine or gauge a safety part need the usual care: validate on your own
     parts and light, and follow the codes and qualified practice that apply.
     """
     from patchlab import report
-    from patchlab.pipeline import use
+    from patchlab.pipeline import detect as job
+    from patchlab.workers import usable_cores
 
+    out = options["out"]
+    terminal.resume_hint = f"; go on with the same command and --resume (-o {out})"
     with terminal.working():
-        result = use.detect(
+        result = job.detect(
             bank,
             pictures,
-            options["out"],
-            rate=options["false_edges"],
-            threshold=options["threshold"],
+            out,
+            job.Request(options["what"], options["false_edges"], options["threshold"]),
+            jobs=options["jobs"] or usable_cores(),
+            draw=report.edge_pictures if options["drawn"] else None,
             max_bad=options["max_bad"],
             force=options["force"],
-            draw=report.edge_pictures,
+            resume=options["resume"],
             progress=terminal,
         )
     for bad in result["quarantined"]:

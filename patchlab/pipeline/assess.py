@@ -139,6 +139,7 @@ class _Task:
     """One piece of the work, small enough to send to another process."""
 
     folder: str
+    bank_id: str
     what: str
     number: int
     value: float
@@ -148,7 +149,7 @@ class _Task:
 
 
 @functools.lru_cache(maxsize=2)
-def _opened(folder: str) -> tuple[Bank, Any, scenes.Camera]:
+def _opened(folder: str, bank_id: str) -> tuple[Bank, Any, scenes.Camera]:
     path = Path(folder)
     bank, plan, head = banks.read_bank(path)
     return bank, responder(path, bank, plan, head), camera_of(bank)
@@ -180,7 +181,7 @@ def made_scene(bank: Bank, camera: scenes.Camera, light: float, seed: int, side:
 
 
 def _scene(task: _Task) -> Any:
-    bank, respond, camera = _opened(task.folder)
+    bank, respond, camera = _opened(task.folder, task.bank_id)
     seed = task.seed * 1000 + task.number
     scene = made_scene(bank, camera, task.value, seed, task.effort.side)
     ours = assess.score_bank(bank, scene, respond, task.rates, camera.blur_sigma_px)
@@ -193,14 +194,14 @@ def _scene(task: _Task) -> Any:
 
 
 def _flat(task: _Task) -> assess.FlatCounts:
-    bank, respond, camera = _opened(task.folder)
+    bank, respond, camera = _opened(task.folder, task.bank_id)
     side, draw = task.effort.tile, _draw(task)
     electrons = np.full((side, side), task.value * camera.full_well)
     return assess.count_flat(bank, camera.capture(electrons, draw), respond, task.rates)
 
 
 def _step(task: _Task) -> assess.Located:
-    bank, respond, camera = _opened(task.folder)
+    bank, respond, camera = _opened(task.folder, task.bank_id)
 
     def shoot(light: F64, draw: np.random.Generator) -> NDArray[Any]:
         return camera.capture((light - camera.black) / camera.gain, draw)
@@ -259,7 +260,7 @@ def assess_bank(
         may_write(out, force)
     effort = QUICK if quick else FULL
     rates = tuple(sorted({rate, 10.0, 100.0, 1000.0}))
-    tasks = list(_tasks(str(folder), camera, rates, seed, effort))
+    tasks = list(_tasks(str(folder), head["id"], camera, rates, seed, effort))
     done = list(map_ordered(_work, tasks, jobs=jobs, stage="assess", progress=progress))
     found = {w: [(t, r) for t, r in zip(tasks, done, strict=True) if t.what == w] for w in _ORDER}
     result = {
@@ -284,15 +285,20 @@ _ORDER = ("scene", "flat", "step")
 
 
 def _tasks(
-    folder: str, camera: scenes.Camera, rates: tuple[float, ...], seed: int, effort: Effort
+    folder: str,
+    bank_id: str,
+    camera: scenes.Camera,
+    rates: tuple[float, ...],
+    seed: int,
+    effort: Effort,
 ) -> Iterator[_Task]:
     for light in light_levels(camera):
         for k in range(effort.scenes):
-            yield _Task(folder, "scene", k, light, rates, seed, effort)
+            yield _Task(folder, bank_id, "scene", k, light, rates, seed, effort)
     for grey in np.linspace(*GREYS, effort.greys):
-        yield _Task(folder, "flat", 0, float(grey), rates, seed, effort)
+        yield _Task(folder, bank_id, "flat", 0, float(grey), rates, seed, effort)
     for contrast in CONTRASTS:
-        yield _Task(folder, "step", 0, contrast, rates, seed, effort)
+        yield _Task(folder, bank_id, "step", 0, contrast, rates, seed, effort)
 
 
 def _round(value: float, digits: int = 4) -> float | None:

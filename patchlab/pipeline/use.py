@@ -7,7 +7,7 @@ from __future__ import annotations
 
 import io
 from collections import Counter
-from collections.abc import Callable, Mapping
+from collections.abc import Mapping
 from dataclasses import dataclass
 from pathlib import Path
 from typing import Any
@@ -17,9 +17,8 @@ import numpy as np
 from patchlab import bank as banks
 from patchlab import edges, export, images, store
 from patchlab.conventions import shift_cosine
-from patchlab.errors import InputError, PatchlabError, UsageError
+from patchlab.errors import PatchlabError, UsageError
 from patchlab.pipeline.bundle import open_native, prove
-from patchlab.pipeline.desk import may_write
 from patchlab.progress import Progress, silent
 from patchlab.types import (
     Bank,
@@ -29,11 +28,8 @@ from patchlab.types import (
     KernelFits,
     PatchSet,
     Plan,
-    Quarantined,
     Survey,
 )
-
-Draw = Callable[[Frame, EdgeMap, int], Mapping[str, bytes]]
 
 
 def bank_folder(path: Path) -> Path:
@@ -73,7 +69,7 @@ def verify(path: Path, progress: Progress = silent) -> dict[str, Any]:
     }
 
 
-# ---------------------------------------------------------------- detect
+# ---------------------------------------------------------------- running a bank
 
 
 def responder(folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any]) -> Any:
@@ -82,80 +78,6 @@ def responder(folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any]) -> 
     if native is not None:
         return native.responses
     return lambda pixels: banks.responses(bank, pixels, plan)
-
-
-def detect(
-    path: Path,
-    pictures: Path,
-    out: Path,
-    *,
-    rate: float | None,
-    threshold: float | None,
-    max_bad: float,
-    force: bool,
-    draw: Draw,
-    progress: Progress = silent,
-) -> dict[str, Any]:
-    """Edges of every picture: maps and edgels as files, counts as plain data.
-
-    Raises
-    ------
-    InputError : more than ``max_bad`` of the pictures cannot serve (exit 3).
-    UsageError : the output exists, or the bank has no promise to set a threshold from.
-    """
-    folder = bank_folder(path)
-    bank, plan, head = banks.read_bank(folder)
-    level, _ = edges.threshold_of(bank, rate=rate, threshold=threshold)
-    may_write(out, force)
-    listing = images.list_photos(pictures)
-    if not listing.files:
-        raise InputError("there are no pictures here", where=str(pictures))
-    respond = responder(folder, bank, plan, head)
-    found: list[dict[str, Any]] = []
-    bad: list[Quarantined] = []
-    for done, name in enumerate(listing.files, 1):
-        try:
-            for frame in images.read_file(listing.root, name, _options(bank)):
-                found.append(_detect_one(bank, frame, respond, level, out, draw))
-        except PatchlabError as error:
-            bad.append(Quarantined(name, str(error)))
-        progress("detect", done, len(listing.files), name)
-    if len(bad) > max_bad * len(listing.files):
-        raise InputError(
-            f"{len(bad)} of {len(listing.files)} pictures cannot serve",
-            where=str(pictures),
-            remedy=f"the first: {bad[0].path}: {bad[0].reason}",
-        )
-    result = {
-        "bank": head["id"],
-        "images": found,
-        "quarantined": [{"path": q.path, "reason": q.reason} for q in bad],
-    }
-    store.write_file(out / "detect.json", store.canonical_json(result))
-    return result
-
-
-def _options(bank: Bank) -> images.ReadOptions:
-    c = bank.contract
-    return images.ReadOptions(white=c.white, black=c.black, transfer=c.transfer, pixels=c.pixels)
-
-
-def _detect_one(
-    bank: Bank, frame: Frame, respond: Any, level: float, out: Path, draw: Draw
-) -> dict[str, Any]:
-    found, edgels = edges.detect_edgels(
-        bank,
-        frame.pixels,
-        respond,
-        threshold=level,
-        invalid=frame.invalid,
-        blur_px=bank.provenance.get("blur_sigma_px"),
-    )
-    stem = frame.path.replace("#", "_page")
-    store.write_file(out / "edgels" / f"{stem}.csv", edges.edgels_csv(edgels))
-    for name, data in draw(frame, found, orientation_count(bank)).items():
-        store.write_file(out / name / f"{stem}.png", data)
-    return {"path": frame.path, "edgels": len(edgels), "strength_threshold": float(level)}
 
 
 def orientation_count(bank: Bank) -> int:
