@@ -347,7 +347,9 @@ def _say_detect(result: dict[str, Any]) -> None:
 
 @patchlab.command()
 @click.argument("bank", type=FOLDER)
-@click.option("-o", "--out", type=FOLDER, help="Folder for the figures, plots and a page.")
+@click.option(
+    "-o", "--out", type=FOLDER, help="Folder for figures, plots and a page; of a run: RUN/assess."
+)
 @click.option("--false-edges", type=float, default=10.0, help="The one setting that is proved.")
 @click.option("--quick", is_flag=True, help="Small pictures and few settings: a look, no proof.")
 @click.option("--force", is_flag=True, help="Replace what stands there.")
@@ -359,16 +361,20 @@ def assess(bank: Path, terminal: Terminal, as_json: bool, **options: Any) -> Non
 
     False elements promised and found, edgels against the Cramer-Rao bound, and F on scenes
     with true edges at five light levels: one setting of the bank, the libraries at their best
-    fixed setting and tuned to each picture. About a minute on two cores.
+    fixed setting and tuned to each picture. About a minute on two cores. `patchlab report RUN`
+    then shows it on the run's page.
     """
     from patchlab.pipeline.assess import assess_bank
     from patchlab.report.assess import pictures
     from patchlab.workers import usable_cores
 
+    out = options["out"]
+    if out is None and (bank / "survey").is_dir():
+        out = bank / "assess"
     with terminal.working():
         result = assess_bank(
             bank,
-            options["out"],
+            out,
             rate=options["false_edges"],
             seed=options["seed"],
             jobs=options["jobs"] or usable_cores(),

@@ -35,7 +35,9 @@ DIMMEST = 8.0
 BRIGHTEST = 0.9
 """Share of the camera's range that the brightest surface fills at the highest."""
 CONTRASTS = (5.0, 10.0, 20.0, 50.0)
-"""Steps for location, noise units."""
+"""Steps for location, noise units; those that the camera can hold."""
+STEP_SPAN = (0.04, 0.8)
+"""Darkest and brightest side of such a step, share of the range."""
 GREYS = (0.01, 0.85)
 """Darkest and brightest flat picture, share of the range."""
 
@@ -131,6 +133,16 @@ def light_levels(camera: scenes.Camera) -> list[float]:
     return [float(f"{x:.4g}") for x in np.geomspace(top, min(DIMMEST, top / 4), LEVELS)]
 
 
+def step_contrasts(bank: Bank) -> list[float]:
+    """Heights of the steps for location: as listed, and the largest that stays off white."""
+    c, values = bank.contract, bank.table.values
+    assert values is not None  # camera_of has seen to it
+    dark, bright = (round(c.black + share * (c.white - c.black)) for share in STEP_SPAN)
+    most = float(values[bright] - values[dark]) / (bank.table.noise_sd or 1.0)
+    held = [x for x in CONTRASTS if x < most]
+    return held if len(held) == len(CONTRASTS) else [*held, float(math.floor(most))]
+
+
 # ---------------------------------------------------------------- tasks, each a picture or so
 
 
@@ -211,7 +223,7 @@ def _step(task: _Task) -> assess.Located:
         respond,
         shoot,
         task.value,
-        base=camera.black + 0.1 * (bank.contract.white - camera.black),
+        base=camera.black + STEP_SPAN[0] * (bank.contract.white - camera.black),
         blur_px=camera.blur_sigma_px,
         pictures=task.effort.steps,
         draw=_draw(task),
@@ -260,7 +272,7 @@ def assess_bank(
         may_write(out, force)
     effort = QUICK if quick else FULL
     rates = tuple(sorted({rate, 10.0, 100.0, 1000.0}))
-    tasks = list(_tasks(str(folder), head["id"], camera, rates, seed, effort))
+    tasks = list(_tasks(str(folder), head["id"], bank, camera, rates, seed, effort))
     done = list(map_ordered(_work, tasks, jobs=jobs, stage="assess", progress=progress))
     found = {w: [(t, r) for t, r in zip(tasks, done, strict=True) if t.what == w] for w in _ORDER}
     result = {
@@ -287,6 +299,7 @@ _ORDER = ("scene", "flat", "step")
 def _tasks(
     folder: str,
     bank_id: str,
+    bank: Bank,
     camera: scenes.Camera,
     rates: tuple[float, ...],
     seed: int,
@@ -297,7 +310,7 @@ def _tasks(
             yield _Task(folder, bank_id, "scene", k, light, rates, seed, effort)
     for grey in np.linspace(*GREYS, effort.greys):
         yield _Task(folder, bank_id, "flat", 0, float(grey), rates, seed, effort)
-    for contrast in CONTRASTS:
+    for contrast in step_contrasts(bank):
         yield _Task(folder, bank_id, "step", 0, contrast, rates, seed, effort)
 
 

@@ -6,6 +6,7 @@ Nothing here needs the learner: a bank runs where numba and scikit-learn are abs
 from __future__ import annotations
 
 import io
+import json
 from collections import Counter
 from collections.abc import Mapping
 from dataclasses import dataclass
@@ -156,6 +157,7 @@ class RunContent:
     found: EdgeMap | None
     rate: float
     no_edges: str = ""
+    assessed: Mapping[str, Any] | None = None
 
     @property
     def orientations(self) -> int:
@@ -228,7 +230,17 @@ def open_run(out: Path) -> RunContent:
         found=found,
         rate=rate,
         no_edges=reason,
+        assessed=_assessed(out, head["id"]),
     )
+
+
+def _assessed(out: Path, bank_id: str) -> dict[str, Any] | None:
+    """What an assessment of this very bank found, where one stands in the run's folder."""
+    if not (out / "assess" / "manifest.json").is_file():
+        return None
+    head = store.read_manifest(out / "assess", "assess")
+    found: dict[str, Any] = json.loads(store.read_file(out / "assess", head, "assess.json"))
+    return found if found["id"] == bank_id else None
 
 
 def _example(out: Path, survey: Survey, head: Mapping[str, Any]) -> Frame | None:
