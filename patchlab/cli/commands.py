@@ -397,10 +397,14 @@ def _say_assess(result: dict[str, Any]) -> None:
     click.echo()
     table(
         [
-            (f"{r['contrast']:g}", r["rms_px"], r["bound_px"], r["ratio"], r["bias_px"])
+            (
+                f"{r['contrast']:g}",
+                *(r[k] for k in ("rms_px", "bound_px", "ratio", "bias_px")),
+                *(r[k] for k in ("direction_rms_deg", "direction_bound_deg")),
+            )
             for r in result["location"]
         ],
-        ("contrast, noise sd", "rms px", "bound px", "ratio", "bias px"),
+        ("contrast, noise sd", "rms px", "bound px", "ratio", "bias px", "turn deg", "bound deg"),
     )
     click.echo()
     found = result["detection"]

@@ -364,6 +364,8 @@ def _located_told(found: assess.Located) -> dict[str, Any]:
         "bound_px": _round(found.bound_px),
         "ratio": _round(found.ratio),
         "error_over_told_sd": _round(found.sd_ratio),
+        "direction_rms_deg": _round(found.turn_deg),
+        "direction_bound_deg": _round(found.turn_bound_deg),
     }
 
 
