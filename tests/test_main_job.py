@@ -13,6 +13,7 @@ import numpy as np
 import pytest
 from PIL import Image
 
+from patchlab import store
 from patchlab.images import make_sample_images
 
 SMALL = ["--patches", "6000", "--restarts", "1", "--jobs", "1"]
@@ -319,3 +320,39 @@ def test_compare_says_equal_and_different(first, tmp_path):
     patchlab("export", "--taps", tmp_path / "k.npy", "-o", tmp_path / "k", check=0)
     other = json.loads(patchlab("compare", out / "bank", tmp_path / "k", "--json", check=0).stdout)
     assert other["verdict"] == "different"
+
+
+def test_the_page_shows_the_assessment_of_this_bank_only(first, tmp_path):
+    out, result = first
+    copy = tmp_path / "run"
+    shutil.copytree(out, copy)
+
+    def row(detector, picture, f):
+        return {"detector": detector, "picture": picture, "setting": "10 a Mpx", "f": [f, f],
+                "precision": [f, f], "recall": [f, f], "mean_f": f}  # fmt: skip
+
+    rivals = [row("Other", kind, 0.5) for kind in ("raw", "stretched", "tabled")]
+    step = {"contrast": 10.0, "rms_px": 0.05, "bound_px": 0.04, "ratio": 1.25}
+    flat = {"asked": 10.0, "found": 11.5, "groups": 2.0, "flat": True}
+    found = {
+        "id": result["bank"]["id"], "rate": 10.0, "quick": False, "rates": [flat],
+        "location": [step, {**step, "contrast": 20.0}],
+        "detection": {
+            "light_electrons": [400.0, 8.0],
+            "ours": [row("this bank", "tabled", 0.7)], "fixed": rivals, "tuned": rivals,
+            "lead": {"over_best_fixed_on_raw": 0.2, "over_best_fixed_on_stretched": 0.2,
+                     "over_best_fixed_on_tabled": 0.2, "over_best_tuned": 0.2},
+        },
+    }  # fmt: skip
+
+    def page(about):
+        files = {"assess.json": json.dumps(about).encode()}
+        store.write_artefact(copy / "assess", "assess", files, force=True)
+        patchlab("report", copy, check=0)
+        return (copy / "report" / "index.html").read_text(encoding="utf-8")
+
+    shown = page(found)
+    assert "Assessed on made pictures" in shown
+    assert '<td class="n">11.5</td>' in shown
+    assert (copy / "report" / "assess_light.png").is_file()
+    assert "Assessed on made pictures" not in page({**found, "id": "another"})

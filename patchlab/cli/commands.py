@@ -316,28 +316,41 @@ def _say_verify(result: dict[str, Any]) -> None:
 @click.option("-o", "--out", type=FOLDER, required=True, help="Folder for maps and edgels.")
 @click.option("--false-edges", type=float, help="False elements per megapixel of flat area.")
 @click.option("--threshold", type=float, help="A strength in noise units instead of a rate.")
+@click.option(
+    "--edges",
+    "what",
+    type=click.Choice(["step", "line", "both"]),
+    help="What is looked for, each kind at the rate; by default what the bank is made for.",
+)
+@click.option("--pictures/--no-pictures", "drawn", default=True, help="Draw maps and overlays.")
+@click.option("--jobs", type=click.IntRange(0, 1024), default=1, help="Worker processes; 0: all.")
 @click.option("--force", is_flag=True, help="Replace what stands there.")
+@click.option("--resume", is_flag=True, help="Go on with what stands there.")
 @click.option("--max-bad", type=float, default=0.1, help="Share of pictures that may be unusable.")
 @_shared
 def detect(bank: Path, pictures: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
-    """Find edges in PICTURES with a BANK: maps, edgels and overlays.
+    """Find edges in PICTURES with a BANK: one table of edgels, maps and overlays.
 
     Edges that steer a machine or gauge a safety part need the usual care: validate on your own
     parts and light, and follow the codes and qualified practice that apply.
     """
     from patchlab import report
-    from patchlab.pipeline import use
+    from patchlab.pipeline import detect as job
+    from patchlab.workers import usable_cores
 
+    out = options["out"]
+    terminal.resume_hint = f"; go on with the same command and --resume (-o {out})"
     with terminal.working():
-        result = use.detect(
+        result = job.detect(
             bank,
             pictures,
-            options["out"],
-            rate=options["false_edges"],
-            threshold=options["threshold"],
+            out,
+            job.Request(options["what"], options["false_edges"], options["threshold"]),
+            jobs=options["jobs"] or usable_cores(),
+            draw=report.edge_pictures if options["drawn"] else None,
             max_bad=options["max_bad"],
             force=options["force"],
-            draw=report.edge_pictures,
+            resume=options["resume"],
             progress=terminal,
         )
     for bad in result["quarantined"]:
@@ -354,7 +367,9 @@ def _say_detect(result: dict[str, Any]) -> None:
 
 @patchlab.command()
 @click.argument("bank", type=FOLDER)
-@click.option("-o", "--out", type=FOLDER, help="Folder for the figures, plots and a page.")
+@click.option(
+    "-o", "--out", type=FOLDER, help="Folder for figures, plots and a page; of a run: RUN/assess."
+)
 @click.option("--false-edges", type=float, default=10.0, help="The one setting that is proved.")
 @click.option("--quick", is_flag=True, help="Small pictures and few settings: a look, no proof.")
 @click.option("--force", is_flag=True, help="Replace what stands there.")
@@ -366,16 +381,20 @@ def assess(bank: Path, terminal: Terminal, as_json: bool, **options: Any) -> Non
 
     False elements promised and found, edgels against the Cramer-Rao bound, and F on scenes
     with true edges at five light levels: one setting of the bank, the libraries at their best
-    fixed setting and tuned to each picture. About a minute on two cores.
+    fixed setting and tuned to each picture. About a minute on two cores. `patchlab report RUN`
+    then shows it on the run's page.
     """
     from patchlab.pipeline.assess import assess_bank
     from patchlab.report.assess import pictures
     from patchlab.workers import usable_cores
 
+    out = options["out"]
+    if out is None and (bank / "survey").is_dir():
+        out = bank / "assess"
     with terminal.working():
         result = assess_bank(
             bank,
-            options["out"],
+            out,
             rate=options["false_edges"],
             seed=options["seed"],
             jobs=options["jobs"] or usable_cores(),
@@ -398,10 +417,14 @@ def _say_assess(result: dict[str, Any]) -> None:
     click.echo()
     table(
         [
-            (f"{r['contrast']:g}", r["rms_px"], r["bound_px"], r["ratio"], r["bias_px"])
+            (
+                f"{r['contrast']:g}",
+                *(r[k] for k in ("rms_px", "bound_px", "ratio", "bias_px")),
+                *(r[k] for k in ("direction_rms_deg", "direction_bound_deg")),
+            )
             for r in result["location"]
         ],
-        ("contrast, noise sd", "rms px", "bound px", "ratio", "bias px"),
+        ("contrast, noise sd", "rms px", "bound px", "ratio", "bias px", "turn deg", "bound deg"),
     )
     click.echo()
     found = result["detection"]

@@ -22,7 +22,7 @@ from patchlab.edges import model, thin
 from patchlab.edges.detect import Respond, detect_edgels
 from patchlab.edges.locate import RADIUS_PX as DISK_PX
 from patchlab.edges.locate import edgels
-from patchlab.edges.matching import count_pairs
+from patchlab.edges.matching import count_pairs, direction_error
 from patchlab.edges.rivals import Detector, Grid
 from patchlab.edges.threshold import strength_for
 from patchlab.types import F64, Bank, InputTable, Thresholds
@@ -232,10 +232,10 @@ def flatness(groups: NDArray[np.int64]) -> Flatness:
 # ---------------------------------------------------------------- location
 
 
-def location_bound(
+def step_bounds(
     table: InputTable, low: float, high: float, blur_px: float, theta: float, offset: float
-) -> float:
-    """Cramer-Rao bound on the place of a straight step, position, direction and levels unknown.
+) -> tuple[float, float]:
+    """Cramer-Rao bounds of a straight step: position, direction and both levels are unknown.
 
     From finite differences of the tabled edge over the disk that edgels are fitted in, for
     white noise.
@@ -250,7 +250,7 @@ def location_bound(
 
     Returns
     -------
-    float : standard deviation along the normal, pixels
+    standard deviation along the normal, pixels; of the direction, radians
 
     Notes
     -----
@@ -270,7 +270,8 @@ def location_bound(
         for s, d in zip(step, np.diag(step), strict=True)
     ]
     jacobian = np.column_stack(slopes) / (table.noise_sd or 1.0)
-    return math.sqrt(float(np.linalg.inv(jacobian.T @ jacobian)[0, 0]))
+    variance = np.diag(np.linalg.inv(jacobian.T @ jacobian))
+    return math.sqrt(float(variance[0])), math.sqrt(float(variance[1]))
 
 
 Shoot = Callable[[F64, np.random.Generator], NDArray[Any]]
@@ -282,7 +283,8 @@ class Located:
     """Errors of edgels along straight edges of one contrast.
 
     ``rms_px`` and ``bias_px`` along the normal, ``bound_px`` the Cramer-Rao bound, ``ratio``
-    the one over the other, ``sd_ratio`` the errors' scatter over the standard errors told.
+    the one over the other, ``sd_ratio`` the errors' scatter over the standard errors told;
+    ``turn_deg`` and ``turn_bound_deg`` the rms error of the direction and its bound.
     """
 
     contrast: float
@@ -291,6 +293,8 @@ class Located:
     bound_px: float
     sd_ratio: float
     edgels: int
+    turn_deg: float
+    turn_bound_deg: float
 
     @property
     def ratio(self) -> float:
@@ -326,7 +330,7 @@ def locate_steps(
     curve, sd = model.curve_of(bank.table), bank.table.noise_sd or 1.0
     top = float(curve.inverse(curve.at(np.array([base]))[0][0] + sd * contrast))
     y, x = np.mgrid[:side, :side] - side // 2
-    errors, told, bounds = [], [], []
+    errors, told, turns, bounds = [], [], [], []
     for _ in range(pictures):
         theta, p = draw.uniform(-math.pi, math.pi), draw.uniform(-0.5, 0.5)
         across = x * math.cos(theta) + y * math.sin(theta) - p
@@ -337,12 +341,17 @@ def locate_steps(
         near = (np.abs(off) < 1.5) & (np.hypot(dx, dy) < side // 2 - bank.radius - 2)
         errors.append(off[near])
         told.append(found["sd"][near])
-        bounds.append(location_bound(bank.table, base, top, blur_px, theta, p))
+        turns.append(direction_error(found["theta"][near], np.array(theta)))
+        bounds.append(step_bounds(bank.table, base, top, blur_px, theta, p))
     e, s = np.concatenate(errors).astype(np.float64), np.concatenate(told).astype(np.float64)
+    bound, turn_bound = np.sqrt(np.mean(np.square(bounds), axis=0)).tolist()
+    turn_bound = math.degrees(turn_bound)
     if not e.size:
-        return Located(contrast, math.nan, math.nan, float(np.mean(bounds)), math.nan, 0)
-    rms = float(np.sqrt((e**2).mean()))
-    bound = float(np.sqrt(np.mean(np.square(bounds))))
-    return Located(
-        contrast, rms, float(e.mean()), bound, float(np.sqrt(((e / s) ** 2).mean())), e.size
-    )
+        return Located(contrast, math.nan, math.nan, bound, math.nan, 0, math.nan, turn_bound)
+    turn = math.degrees(_rms(np.concatenate(turns)))
+    bias = float(e.mean())
+    return Located(contrast, _rms(e), bias, bound, _rms(e / s), e.size, turn, turn_bound)
+
+
+def _rms(values: F64) -> float:
+    return math.sqrt(float((values**2).mean()))

@@ -214,9 +214,25 @@ def _thresholds(bank: Bank) -> str:
             f"#define @N@_FALSE_EDGES_PER_MEGAPIXEL {{{rates}}}",
             f"#define @N@_STRENGTH_THRESHOLDS {{{strengths}}}",
             f"#define @N@_HYSTERESIS {float_literal(known.hysteresis)}",
+            *_more_thresholds(bank),
             "",
         ]
     )
+
+
+def _more_thresholds(bank: Bank) -> list[str]:
+    """How many connected groups the false elements come in, and the thresholds for lines."""
+    out, known, for_lines = [], bank.thresholds, bank.line_thresholds
+    if known is not None and known.groups.size:
+        groups = ", ".join(float_literal(v) for v in known.groups)
+        out = [f"#define @N@_FALSE_GROUPS_PER_MEGAPIXEL {{{groups}}}"]
+    if for_lines is not None:
+        strengths = ", ".join(float_literal(v) for v in for_lines.strength)
+        out += [
+            "/* The same promises for lines, on the even responses. */",
+            f"#define @N@_LINE_STRENGTH_THRESHOLDS {{{strengths}}}",
+        ]
+    return out
 
 
 # ---------------------------------------------------------------- the input table

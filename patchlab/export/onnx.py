@@ -324,8 +324,10 @@ def _metadata(bank: Bank, about: Mapping[str, Any]) -> dict[str, str]:
         "thresholds": limits and {
             "false_edges_per_megapixel": limits.rate.tolist(),
             "strength": limits.strength.tolist(),
+            "groups_per_megapixel": limits.groups.tolist(),
             "hysteresis": limits.hysteresis,
         },
+        "line_thresholds": bank.line_thresholds and bank.line_thresholds.strength.tolist(),
         "unit_roundoff": UNIT_ROUNDOFF,
         **about,
     }  # fmt: skip

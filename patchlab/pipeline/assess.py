@@ -36,7 +36,9 @@ DIMMEST = 8.0
 BRIGHTEST = 0.9
 """Share of the camera's range that the brightest surface fills at the highest."""
 CONTRASTS = (5.0, 10.0, 20.0, 50.0)
-"""Steps for location, noise units."""
+"""Steps for location, noise units; those that the camera can hold."""
+STEP_SPAN = (0.04, 0.8)
+"""Darkest and brightest side of such a step, share of the range."""
 GREYS = (0.01, 0.85)
 """Darkest and brightest flat picture, share of the range."""
 
@@ -132,6 +134,16 @@ def light_levels(camera: scenes.Camera) -> list[float]:
     return [float(f"{x:.4g}") for x in np.geomspace(top, min(DIMMEST, top / 4), LEVELS)]
 
 
+def step_contrasts(bank: Bank) -> list[float]:
+    """Heights of the steps for location: as listed, and the largest that stays off white."""
+    c, values = bank.contract, bank.table.values
+    assert values is not None  # camera_of has seen to it
+    dark, bright = (round(c.black + share * (c.white - c.black)) for share in STEP_SPAN)
+    most = float(values[bright] - values[dark]) / (bank.table.noise_sd or 1.0)
+    held = [x for x in CONTRASTS if x < most]
+    return held if len(held) == len(CONTRASTS) else [*held, float(math.floor(most))]
+
+
 # ---------------------------------------------------------------- tasks, each a picture or so
 
 
@@ -140,6 +152,7 @@ class _Task:
     """One piece of the work, small enough to send to another process."""
 
     folder: str
+    bank_id: str
     what: str
     number: int
     value: float
@@ -149,7 +162,7 @@ class _Task:
 
 
 @functools.lru_cache(maxsize=2)
-def _opened(folder: str) -> tuple[Bank, Any, scenes.Camera]:
+def _opened(folder: str, bank_id: str) -> tuple[Bank, Any, scenes.Camera]:
     path = Path(folder)
     bank, plan, head = banks.read_bank(path)
     return bank, responder(path, bank, plan, head), camera_of(bank)
@@ -181,7 +194,7 @@ def made_scene(bank: Bank, camera: scenes.Camera, light: float, seed: int, side:
 
 
 def _scene(task: _Task) -> Any:
-    bank, respond, camera = _opened(task.folder)
+    bank, respond, camera = _opened(task.folder, task.bank_id)
     seed = task.seed * 1000 + task.number
     scene = made_scene(bank, camera, task.value, seed, task.effort.side)
     ours = assess.score_bank(bank, scene, respond, task.rates, camera.blur_sigma_px)
@@ -194,14 +207,14 @@ def _scene(task: _Task) -> Any:
 
 
 def _flat(task: _Task) -> assess.FlatCounts:
-    bank, respond, camera = _opened(task.folder)
+    bank, respond, camera = _opened(task.folder, task.bank_id)
     side, draw = task.effort.tile, _draw(task)
     electrons = np.full((side, side), task.value * camera.full_well)
     return assess.count_flat(bank, camera.capture(electrons, draw), respond, task.rates)
 
 
 def _step(task: _Task) -> assess.Located:
-    bank, respond, camera = _opened(task.folder)
+    bank, respond, camera = _opened(task.folder, task.bank_id)
 
     def shoot(light: F64, draw: np.random.Generator) -> NDArray[Any]:
         return camera.capture((light - camera.black) / camera.gain, draw)
@@ -211,7 +224,7 @@ def _step(task: _Task) -> assess.Located:
         respond,
         shoot,
         task.value,
-        base=camera.black + 0.1 * (bank.contract.white - camera.black),
+        base=camera.black + STEP_SPAN[0] * (bank.contract.white - camera.black),
         blur_px=camera.blur_sigma_px,
         pictures=task.effort.steps,
         draw=_draw(task),
@@ -260,7 +273,7 @@ def assess_bank(
         may_write(out, force)
     effort = QUICK if quick else FULL
     rates = tuple(sorted({rate, 10.0, 100.0, 1000.0}))
-    tasks = list(_tasks(str(folder), camera, rates, seed, effort))
+    tasks = list(_tasks(str(folder), head["id"], bank, camera, rates, seed, effort))
     done = list(map_ordered(_work, tasks, jobs=jobs, stage="assess", progress=progress))
     found = {w: [(t, r) for t, r in zip(tasks, done, strict=True) if t.what == w] for w in _ORDER}
     result = {
@@ -285,15 +298,21 @@ _ORDER = ("scene", "flat", "step")
 
 
 def _tasks(
-    folder: str, camera: scenes.Camera, rates: tuple[float, ...], seed: int, effort: Effort
+    folder: str,
+    bank_id: str,
+    bank: Bank,
+    camera: scenes.Camera,
+    rates: tuple[float, ...],
+    seed: int,
+    effort: Effort,
 ) -> Iterator[_Task]:
     for light in light_levels(camera):
         for k in range(effort.scenes):
-            yield _Task(folder, "scene", k, light, rates, seed, effort)
+            yield _Task(folder, bank_id, "scene", k, light, rates, seed, effort)
     for grey in np.linspace(*GREYS, effort.greys):
-        yield _Task(folder, "flat", 0, float(grey), rates, seed, effort)
-    for contrast in CONTRASTS:
-        yield _Task(folder, "step", 0, contrast, rates, seed, effort)
+        yield _Task(folder, bank_id, "flat", 0, float(grey), rates, seed, effort)
+    for contrast in step_contrasts(bank):
+        yield _Task(folder, bank_id, "step", 0, contrast, rates, seed, effort)
 
 
 def _round(value: float, digits: int = 4) -> float | None:
@@ -346,6 +365,8 @@ def _located_told(found: assess.Located) -> dict[str, Any]:
         "bound_px": _round(found.bound_px),
         "ratio": _round(found.ratio),
         "error_over_told_sd": _round(found.sd_ratio),
+        "direction_rms_deg": _round(found.turn_deg),
+        "direction_bound_deg": _round(found.turn_bound_deg),
     }
 
 

@@ -25,7 +25,7 @@ from patchlab.progress import Progress, silent
 from patchlab.settings import Settings
 from patchlab.workers import usable_cores
 
-ROOMS = ("survey", "patches", "dictionary", "fits", "bank", "report")
+ROOMS = ("survey", "patches", "dictionary", "fits", "bank", "report", "assess")
 RECIPE = 2
 """Raised whenever a stage would give another result for the same settings."""
 

@@ -6,9 +6,10 @@ Nothing here needs the learner: a bank runs where numba and scikit-learn are abs
 from __future__ import annotations
 
 import io
+import json
 from collections import Counter
-from collections.abc import Callable, Mapping
-from dataclasses import dataclass, replace
+from collections.abc import Mapping
+from dataclasses import dataclass
 from pathlib import Path
 from typing import Any
 
@@ -16,9 +17,8 @@ import numpy as np
 
 from patchlab import bank as banks
 from patchlab import edges, export, images, store
-from patchlab.errors import InputError, PatchlabError, UsageError
+from patchlab.errors import PatchlabError, UsageError
 from patchlab.pipeline.bundle import open_native, prove
-from patchlab.pipeline.desk import may_write
 from patchlab.pipeline.loaded import bank_folder
 from patchlab.progress import Progress, silent
 from patchlab.types import (
@@ -29,15 +29,11 @@ from patchlab.types import (
     KernelFits,
     PatchSet,
     Plan,
-    Quarantined,
     Survey,
 )
 
 SHOWN_WITHOUT_PROMISE = 0.98
 """Quantile of the responses that serves the page's example where noise is not known."""
-
-Draw = Callable[[Frame, EdgeMap, int], Mapping[str, bytes]]
-
 
 # ---------------------------------------------------------------- verify
 
@@ -69,7 +65,7 @@ def verify(path: Path, progress: Progress = silent) -> dict[str, Any]:
     }
 
 
-# ---------------------------------------------------------------- detect
+# ---------------------------------------------------------------- running a bank
 
 
 def responder(folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any]) -> Any:
@@ -78,82 +74,6 @@ def responder(folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any]) -> 
     if native is not None:
         return native.responses
     return lambda pixels: banks.responses(bank, pixels, plan)
-
-
-def detect(
-    path: Path,
-    pictures: Path,
-    out: Path,
-    *,
-    rate: float | None,
-    threshold: float | None,
-    max_bad: float,
-    force: bool,
-    draw: Draw,
-    progress: Progress = silent,
-) -> dict[str, Any]:
-    """Edges of every picture: maps and edgels as files, counts as plain data.
-
-    Raises
-    ------
-    InputError : more than ``max_bad`` of the pictures cannot serve (exit 3).
-    UsageError : the output exists, or the bank has no promise to set a threshold from.
-    """
-    folder = bank_folder(path)
-    bank, plan, head = banks.read_bank(folder)
-    level, _ = edges.threshold_of(bank, rate=rate, threshold=threshold)
-    may_write(out, force)
-    listing = images.list_photos(pictures)
-    if not listing.files:
-        raise InputError("there are no pictures here", where=str(pictures))
-    respond = responder(folder, bank, plan, head)
-    found: list[dict[str, Any]] = []
-    bad: list[Quarantined] = []
-    for done, name in enumerate(listing.files, 1):
-        try:
-            for frame in images.read_file(listing.root, name, _options(bank)):
-                found.append(_detect_one(bank, frame, respond, level, out, draw))
-        except PatchlabError as error:
-            bad.append(Quarantined(name, str(error)))
-        progress("detect", done, len(listing.files), name)
-    if len(bad) > max_bad * len(listing.files):
-        raise InputError(
-            f"{len(bad)} of {len(listing.files)} pictures cannot serve",
-            where=str(pictures),
-            remedy=f"the first: {bad[0].path}: {bad[0].reason}",
-        )
-    result = {
-        "bank": head["id"],
-        "images": found,
-        "quarantined": [{"path": q.path, "reason": q.reason} for q in bad],
-    }
-    store.write_file(out / "detect.json", store.canonical_json(result))
-    return result
-
-
-def _options(bank: Bank) -> images.ReadOptions:
-    c = bank.contract
-    known = images.ReadOptions(white=c.white, black=c.black, transfer=c.transfer, pixels=c.pixels)
-    plane = c.plane.rpartition(" ")[2]
-    return replace(known, bayer=plane) if plane else known  # type: ignore[arg-type]
-
-
-def _detect_one(
-    bank: Bank, frame: Frame, respond: Any, level: float, out: Path, draw: Draw
-) -> dict[str, Any]:
-    found, edgels = edges.detect_edgels(
-        bank,
-        frame.pixels,
-        respond,
-        threshold=level,
-        invalid=frame.invalid,
-        blur_px=bank.provenance.get("blur_sigma_px"),
-    )
-    stem = frame.path.replace("#", "_page")
-    store.write_file(out / "edgels" / f"{stem}.csv", edges.edgels_csv(edgels))
-    for name, data in draw(frame, found, orientation_count(bank)).items():
-        store.write_file(out / name / f"{stem}.png", data)
-    return {"path": frame.path, "edgels": len(edgels), "strength_threshold": float(level)}
 
 
 def orientation_count(bank: Bank) -> int:
@@ -192,6 +112,7 @@ class RunContent:
     found: EdgeMap | None
     rate: float
     no_edges: str = ""
+    assessed: Mapping[str, Any] | None = None
 
     @property
     def orientations(self) -> int:
@@ -278,7 +199,17 @@ def open_run(out: Path) -> RunContent:
         found=found,
         rate=rate,
         no_edges=reason,
+        assessed=_assessed(out, head["id"]),
     )
+
+
+def _assessed(out: Path, bank_id: str) -> dict[str, Any] | None:
+    """What an assessment of this very bank found, where one stands in the run's folder."""
+    if not (out / "assess" / "manifest.json").is_file():
+        return None
+    head = store.read_manifest(out / "assess", "assess")
+    found: dict[str, Any] = json.loads(store.read_file(out / "assess", head, "assess.json"))
+    return found if found["id"] == bank_id else None
 
 
 def _example(out: Path, survey: Survey, head: Mapping[str, Any]) -> Frame | None:

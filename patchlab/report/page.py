@@ -14,7 +14,7 @@ import numpy as np
 from patchlab import store
 from patchlab.pipeline import use
 from patchlab.progress import Progress, silent
-from patchlab.report import camera, mosaic, plots, sure
+from patchlab.report import assess, camera, mosaic, plots, sure
 
 SHOWN = 96
 """Most components drawn in one mosaic; the page says how many there are."""
@@ -77,6 +77,10 @@ def _pictures(c: use.RunContent) -> Mapping[str, Callable[[], bytes]]:
         makers["coverage"] = lambda: plots.coverage_curve(c.bank)
     if c.bank.thresholds is not None:
         makers["thresholds"] = lambda: plots.thresholds(c.bank)
+    if c.assessed is not None:
+        drawn = c.assessed
+        makers["assess_light"] = lambda: assess.PLOTS["light"][0](drawn)
+        makers["assess_location"] = lambda: assess.PLOTS["location"][0](drawn)
     if c.frame is not None and c.found is not None:
         frame, found, count = c.frame, c.found, c.orientations
         makers["edges"] = lambda: mosaic.before_and_after(frame, found, count)

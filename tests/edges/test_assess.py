@@ -53,10 +53,15 @@ def test_counting_pairs_agrees_with_the_matching(seed):
 def test_location_bound_is_the_published_one_when_nothing_else_is_unknown():
     """Position alone: var = 2 sqrt(pi) blur / contrast^2 a row; unknown levels cost a factor."""
     table = InputTable("identity", InputContract("float32", 0.0, 100.0), None, 1.0)
-    bound = assess.location_bound(table, 0.0, 20.0, 1.0, 0.0, 0.0)
+    bound, turn = assess.step_bounds(table, 0.0, 20.0, 1.0, 0.0, 0.0)
     alone = math.sqrt(2 * math.sqrt(math.pi) / 20**2 / 9)  # the disk is nine rows high
     assert 1.0 < bound / alone < 2.2  # the factor for a window of 21 px is 4.26 in variance
-    assert assess.location_bound(table, 0.0, 40.0, 1.0, 0.0, 0.0) == pytest.approx(bound / 2)
+    stronger = assess.step_bounds(table, 0.0, 40.0, 1.0, 0.0, 0.0)
+    assert stronger == pytest.approx((bound / 2, turn / 2))
+    # a line through nine rows whose places scatter by ``rows`` each turns by its slope's sd
+    rows = alone * 3
+    slope = rows / math.sqrt(sum(j * j for j in range(-4, 5)))
+    assert 0.8 < turn / slope < 2.2
 
 
 def test_steps_are_located_at_the_bound_and_told_honestly(make_bank, engine):
@@ -76,6 +81,7 @@ def test_steps_are_located_at_the_bound_and_told_honestly(make_bank, engine):
     assert 0.8 < found.ratio < 1.25  # a dozen edges; the exact ratio is held in test_locate
     assert 0.75 < found.sd_ratio < 1.3
     assert abs(found.bias_px) < 0.02
+    assert 0.75 < found.turn_deg / found.turn_bound_deg < 1.3
 
 
 def test_counts_of_even_groups_pass_and_a_slope_over_grey_fails():

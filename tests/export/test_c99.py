@@ -379,6 +379,15 @@ def test_thresholds_stand_in_the_header():
     ]
     without = c99.emit(replace(bank, thresholds=None), make_plan(bank))["arbitrary.h"].decode()
     assert "THRESHOLD" not in without
+    assert "GROUPS" not in header
+    grouped = replace(known, groups=np.array([0.2, 1.4, 12.5]))
+    both = replace(bank, thresholds=grouped, line_thresholds=known)
+    header = c99.emit(both, make_plan(bank))["arbitrary.h"].decode()
+    assert (
+        "#define arbitrary_FALSE_GROUPS_PER_MEGAPIXEL {0.200000003f, 1.39999998f, 12.5f}" in header
+    )
+    words = re.search(r"_LINE_STRENGTH_THRESHOLDS \{(.*)\}", header).group(1)
+    assert len(words.split(",")) == 3
 
 
 # ---------------------------------------------------------------- programs

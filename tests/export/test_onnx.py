@@ -291,6 +291,10 @@ def test_metadata():
     assert json.loads(plain["patchlab.error_bound"]) == list(conv_bound(bank))
     assert json.loads(plain["patchlab.minimum_size"]) == 7
     assert json.loads(plain["patchlab.thresholds"])["strength"] == [5.1, 4.6]
+    assert (
+        json.loads(plain["patchlab.thresholds"])["groups_per_megapixel"] == limits.groups.tolist()
+    )
+    assert json.loads(plain["patchlab.line_thresholds"]) is None
     assert edges["patchlab.strength"] == "step"
     assert json.loads(edges["patchlab.scales"])[0]["kernels"] == ["k0", "k1", "k2"]
 

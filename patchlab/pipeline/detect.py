@@ -1,0 +1,293 @@
+"""Edges of a folder of pictures: in parallel, picture by picture, kept as they are done.
+
+Each picture's files are written by the worker that found them, and a line of the journal says
+that they stand; so an interrupted job goes on where it was, and memory does not grow with the
+number of pictures. At the end, or where it stopped, all edgels stand in one table too.
+"""
+
+from __future__ import annotations
+
+import csv
+import functools
+import io
+import json
+import os
+from collections.abc import Callable, Iterator, Mapping
+from dataclasses import dataclass, replace
+from pathlib import Path
+from typing import Any
+
+from patchlab import bank as banks
+from patchlab import edges, images, store
+from patchlab.errors import InputError, PatchlabError, UsageError
+from patchlab.pipeline.desk import may_write
+from patchlab.pipeline.loaded import bank_folder
+from patchlab.pipeline.use import orientation_count, responder
+from patchlab.progress import Progress, silent
+from patchlab.types import Bank, EdgeMap, Frame
+from patchlab.workers import map_ordered
+
+Draw = Callable[[Frame, EdgeMap, int], Mapping[str, bytes]]
+JOURNAL = "journal.jsonl"
+TABLE = "edgels.csv"
+
+
+@dataclass(frozen=True)
+class Request:
+    """What is looked for, the same for every picture.
+
+    Parameters
+    ----------
+    what : step, line, both; None means the bank's own kind
+    rate : false elements per megapixel of flat picture, for each kind
+    threshold : a strength instead
+    """
+
+    what: edges.What | None = None
+    rate: float | None = None
+    threshold: float | None = None
+
+
+@dataclass(frozen=True)
+class _Task:
+    bank: str
+    bank_id: str
+    root: str
+    file: str
+    out: str
+    request: Request
+    draw: Draw | None
+
+
+@functools.lru_cache(maxsize=2)
+def _opened(folder: str, bank_id: str) -> tuple[Bank, Any]:
+    path = Path(folder)
+    bank, plan, head = banks.read_bank(path)
+    return bank, responder(path, bank, plan, head)
+
+
+def _stamp(path: Path) -> list[int]:
+    """Size and time of a file: whether it is still the one that was read."""
+    try:
+        about = path.stat()
+    except OSError:
+        return [0, 0]
+    return [about.st_size, about.st_mtime_ns]
+
+
+def _work(task: _Task) -> dict[str, Any]:
+    """Find the edges of one file, write them, and give its line of the journal."""
+    bank, respond = _opened(task.bank, task.bank_id)
+    line: dict[str, Any] = {
+        "file": task.file,
+        "stamp": _stamp(Path(task.root) / task.file),
+        "frames": [],
+    }
+    try:
+        for frame in images.read_file(Path(task.root), task.file, _options(bank)):
+            line["frames"].append(_one(bank, frame, respond, task))
+    except PatchlabError as error:
+        line["reason"] = str(error)
+    return line
+
+
+def _options(bank: Bank) -> images.ReadOptions:
+    c = bank.contract
+    known = images.ReadOptions(white=c.white, black=c.black, transfer=c.transfer, pixels=c.pixels)
+    plane = c.plane.rpartition(" ")[2]
+    return replace(known, bayer=plane) if plane else known  # type: ignore[arg-type]
+
+
+def _stem(path: str) -> str:
+    return path.replace("#", "_page")
+
+
+def _one(bank: Bank, frame: Frame, respond: Any, task: _Task) -> dict[str, Any]:
+    asked, out = task.request, Path(task.out)
+    found = edges.find(
+        bank,
+        frame.pixels,
+        respond,
+        what=asked.what,
+        rate=asked.rate,
+        threshold=asked.threshold,
+        invalid=frame.invalid,
+        blur_px=bank.provenance.get("blur_sigma_px"),
+    )
+    stem = _stem(frame.path)
+    store.write_file(out / "edgels" / f"{stem}.csv", edges.edgels_csv(found.edgels))
+    if task.draw is not None:
+        for name, data in task.draw(frame, found.shown, orientation_count(bank)).items():
+            store.write_file(out / name / f"{stem}.png", data)
+    level = next(iter(found.maps.values())).threshold
+    return {"path": frame.path, "edgels": len(found.edgels), "strength_threshold": level}
+
+
+# ---------------------------------------------------------------- the journal
+
+
+class _Journal:
+    """Which files are done, one line each, and what was asked in the first line."""
+
+    def __init__(self, out: Path, asked: Mapping[str, Any]) -> None:
+        self.path, self.asked = out / JOURNAL, json.loads(json.dumps(asked))
+        self.lines: dict[str, dict[str, Any]] = {}
+
+    def begin(self) -> None:
+        """Start an empty journal."""
+        store.write_file(self.path, (json.dumps(self.asked) + "\n").encode())
+
+    def reopen(self) -> None:
+        """Take over what stands; a line that was cut off by a crash does not count.
+
+        Raises
+        ------
+        UsageError : there is no journal, or it belongs to another request.
+        """
+        try:
+            first, *rest = self.path.read_text(encoding="utf-8").splitlines()
+        except (OSError, ValueError):
+            raise UsageError(
+                "there is nothing here to go on with",
+                where=str(self.path.parent),
+                remedy="leave out --resume",
+            ) from None
+        if _parsed(first) != self.asked:
+            raise UsageError(
+                "what stands here was found with another bank or other settings",
+                where=str(self.path.parent),
+                remedy="--force starts anew",
+            )
+        known = [line for line in map(_parsed, rest) if line]
+        self.lines = {line["file"]: line for line in known}
+        whole = [self.asked, *self.lines.values()]
+        store.write_file(self.path, "".join(json.dumps(x) + "\n" for x in whole).encode())
+
+    def add(self, line: dict[str, Any]) -> None:
+        """Note a file as done."""
+        self.lines[line["file"]] = line
+        with self.path.open("a", encoding="utf-8") as out:
+            out.write(json.dumps(line) + "\n")
+
+
+def _parsed(text: str) -> dict[str, Any]:
+    try:
+        found = json.loads(text)
+    except ValueError:
+        return {}
+    return found if isinstance(found, dict) else {}
+
+
+# ---------------------------------------------------------------- one table
+
+
+def _rows(out: Path, lines: Mapping[str, dict[str, Any]], order: tuple[str, ...]) -> Iterator[str]:
+    """The table's text, a picture at a time, from the pictures' own files."""
+    yield ",".join(("picture", *edges.CSV_COLUMNS)) + "\n"
+    for name in order:
+        for frame in lines.get(name, {"frames": []})["frames"]:
+            cell = io.StringIO()
+            csv.writer(cell, lineterminator="").writerow([frame["path"]])
+            own = (out / "edgels" / f"{_stem(frame['path'])}.csv").read_text(encoding="utf-8")
+            yield "".join(f"{cell.getvalue()},{row}\n" for row in own.splitlines()[1:])
+
+
+def _write_table(out: Path, lines: Mapping[str, dict[str, Any]], order: tuple[str, ...]) -> None:
+    draft = out / f".{TABLE}.part"
+    with draft.open("w", encoding="utf-8", newline="\n") as table:
+        table.writelines(_rows(out, lines, order))
+    os.replace(draft, out / TABLE)
+
+
+# ---------------------------------------------------------------- the job
+
+
+def detect(
+    path: Path,
+    pictures: Path,
+    out: Path,
+    request: Request,
+    *,
+    jobs: int = 1,
+    draw: Draw | None = None,
+    max_bad: float = 0.1,
+    force: bool = False,
+    resume: bool = False,
+    progress: Progress = silent,
+) -> dict[str, Any]:
+    """Edges of every picture: edgels in one table and one file a picture, maps when asked for.
+
+    Parameters
+    ----------
+    path : a bank's folder, or a run's
+    pictures : a folder or one file
+    out : folder for ``edgels.csv``, ``edgels/``, ``detect.json`` and the pictures drawn
+    request : what is looked for
+    jobs : worker processes; the files are the same whatever their number
+    draw : makes the pictures of one frame (a top-level function); None draws none
+    max_bad : share of files that may be unusable; those are listed and left out
+    force, resume : replace what stands at ``out``, or go on with it
+    progress : told after each file; when it raises, finished files are kept
+
+    Raises
+    ------
+    InputError : there are no pictures, or more than ``max_bad`` of them cannot serve.
+    UsageError : the output exists, or the bank has no promise to set a threshold from.
+    """
+    folder = bank_folder(path)
+    bank, _, head = banks.read_bank(folder)
+    levels = edges.levels_of(bank, request.what, request.rate, request.threshold)
+    told = {str(kind): float(high) for kind, (high, _) in levels.items()}
+    listing = images.list_photos(pictures)
+    if not listing.files:
+        raise InputError("there are no pictures here", where=str(pictures))
+    journal = _Journal(out, {"bank": head["id"], "thresholds": told, "pictures": draw is not None})
+    if resume and out.exists():
+        journal.reopen()
+    else:
+        may_write(out, force)
+        journal.begin()
+    root = listing.root
+    left = [
+        name
+        for name in listing.files
+        if journal.lines.get(name, {}).get("stamp") != _stamp(root / name)
+    ]
+    tasks = [
+        _Task(str(folder), head["id"], str(root), name, str(out), request, draw) for name in left
+    ]
+    try:
+        for line in map_ordered(_work, tasks, jobs=jobs):
+            journal.add(line)
+            done = len(listing.files) - len(left) + len([n for n in left if n in journal.lines])
+            progress("detect", min(done, len(listing.files)), len(listing.files), line["file"])
+    finally:
+        _write_table(out, journal.lines, listing.files)
+    return _result(head["id"], told, journal, listing.files, out, max_bad)
+
+
+def _result(
+    bank_id: str,
+    told: Mapping[str, float],
+    journal: _Journal,
+    files: tuple[str, ...],
+    out: Path,
+    max_bad: float,
+) -> dict[str, Any]:
+    lines = [journal.lines[name] for name in files]
+    bad = [line for line in lines if "reason" in line]
+    if len(bad) > max_bad * len(files):
+        raise InputError(
+            f"{len(bad)} of {len(files)} pictures cannot serve",
+            where=str(out),
+            remedy=f"the first: {bad[0]['file']}: {bad[0]['reason']}",
+        )
+    result = {
+        "bank": bank_id,
+        "thresholds": dict(told),
+        "images": [frame for line in lines for frame in line["frames"]],
+        "quarantined": [{"path": line["file"], "reason": line["reason"]} for line in bad],
+        "table": TABLE,
+    }
+    store.write_file(out / "detect.json", store.canonical_json(result))
+    return result
