@@ -160,7 +160,7 @@ def better_noise(
             noise = from_static
             notes.append("the noise law comes from the static scenes")
         else:
-            notes.append(f"the static scenes cannot tell the noise: {from_static.reason}")
+            notes.append(f"static scenes: {from_static.reason}")
     if dark is not None:
         noise, note = _with_dark(noise, measure_noise_dark(dark))
         notes.append(note)
@@ -170,7 +170,7 @@ def better_noise(
 def _with_dark(noise: NoiseModel, at_rest: NoiseModel) -> tuple[NoiseModel, str]:
     """Put the dark frames' read noise into a straight law."""
     if at_rest.read_noise is None:
-        return noise, f"the dark frames cannot tell the read noise: {at_rest.reason}"
+        return noise, f"read noise from dark frames: {at_rest.reason}"
     told = f"read noise {at_rest.read_noise:.3g} DN at a mean dark level of {at_rest.levels[0]:.4g}"
     if noise.gain is None or noise.read_noise is None:
         return noise, f"the dark frames' {told} is not used: there is no straight law to put it in"

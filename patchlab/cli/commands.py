@@ -187,11 +187,7 @@ def _say_survey(result: dict[str, Any]) -> None:
             f"(se {noise['gain_standard_error']:.2g}), read noise {noise['read_noise_dn']:.3g} DN"
         )
     else:
-        law = (
-            "measured as a curve"
-            if noise["measurable"]
-            else f"not measurable here: {noise['reason']}"
-        )
+        law = "measured as a curve" if noise["measurable"] else noise["reason"]
     _rows(
         {
             "frames": _frames(result["frames"]),

@@ -47,7 +47,9 @@ def noise_curve(survey: Survey) -> bytes:
             light = level - contract.black
             low, high = (_law(noise, light, quantum, e) for e in (-2, 2))
             axes.fill_between(level, low, high, color=TEAL, alpha=0.2, lw=0, label="two se")
-            formula = r"sd = $\sqrt{K\,level + read^2" + (" + 1/12}$" if quantum else "}$")
+            above = "level" if contract.black == 0 else "(level - black)"
+            tail = " + 1/12}$" if quantum else "}$"
+            formula = rf"sd = $\sqrt{{K\,{above} + read^2{tail}"
             axes.plot(level, _law(noise, light, quantum), color=TEAL, label=formula)
             told = f"K = {noise.gain:.4g} ± {noise.gain_error or 0:.1g} DN/e⁻"
             told += f"\nread = {noise.read_noise:.3g} ± {noise.read_noise_error or 0:.1g} DN"
@@ -87,8 +89,9 @@ def spectrum(survey: Survey) -> bytes:
             axes.axhline(survey.noise_power, color=AMBER, label="noise floor (mean light)")
         over = survey.noise_overtakes_cpp
         if over is not None:
-            axes.axvline(over, color=RED, lw=1, ls=":")
-            axes.text(over, power[good].min(), f"{over:.2f} ", color=RED, ha="right", fontsize=8)
+            reach = (power[good].min() / 2, 30 * power[good].min())
+            label = f"noise takes over at {over:.2f}"
+            axes.plot([over, over], reach, color=RED, lw=1.4, ls=":", label=label)
         axes.set(xlabel="frequency, cycles/px", ylabel="power over mean² ", title="Spectrum")
         axes.set_xlim(right=0.55)
         axes.legend(loc="upper right", fontsize=8)

@@ -84,6 +84,29 @@ def test_a_survey_can_be_printed_only(camera, capsys):
     assert "block_grid" in out
 
 
+def test_float_frames_get_the_root_as_a_formula(bench, capsys, tmp_path):
+    # 500 electrons at full scale, read noise 1.2 electrons, in units of full scale
+    contract = bench.contract(12)
+    (tmp_path / "floats").mkdir()
+    for k, light in enumerate(bench.photos(10)):
+        codes = bench.expose(light, bench.contract(12, black=64), 8.0, 10.0, k)
+        np.save(tmp_path / "floats" / f"{k}.npy", ((codes - 64) / 4095).astype(np.float32))
+    words = ["survey", str(tmp_path / "floats"), "-o", str(tmp_path / "run"), "--jobs", "1"]
+    with pytest.raises(SystemExit) as stop:
+        main(words)
+    assert stop.value.code == 0, capsys.readouterr().err
+    found, _ = store.load(tmp_path / "run" / "survey", "survey")
+    assert found.contract.pixels == "float32"
+    assert found.noise.gain == pytest.approx(8 / contract.white, rel=0.05)
+    assert found.table.kind == "stabilised"
+    assert found.table.values is None
+    rng = np.random.default_rng(3)
+    for level in (0.02, 0.2, 0.8):
+        codes = 8 * rng.poisson(level * 4095 / 8, 100_000) + 10 * rng.standard_normal(100_000)
+        values = found.table.apply((codes / 4095).astype(np.float32))
+        assert values.std() == pytest.approx(1, abs=0.03)
+
+
 def drop_frame(home):
     (home / "static" / "scene 1" / "0.png").unlink()
 
