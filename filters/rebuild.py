@@ -21,7 +21,7 @@ import numpy as np
 
 from patchlab import bank as banks
 from patchlab import report
-from patchlab.pipeline import desk, run, use
+from patchlab.pipeline import compare, desk, run, use
 from patchlab.settings import Settings, from_toml
 
 HERE = Path(__file__).resolve().parent
@@ -54,7 +54,7 @@ def differences(standing: Path, fresh: Path) -> list[str]:
     found = []
     if not use.verify(standing)["passed"]:
         found.append("its targets differ from its oracle, or a file was changed")
-    match = use.compare(standing, fresh)
+    match = compare.compare(standing, fresh)
     if match["verdict"] == "different":
         found.append(f"a kernel moved: the worst match is at |cos| = {match['worst_cosine']}")
     old, new = (banks.read_bank(p)[0] for p in (standing, fresh))

@@ -258,7 +258,11 @@ class NativeBank:
         # a few bands a thread, so that a thread that was held up does not hold up all;
         # each costs the rows of its halo once more
         parts = min(4 * threads, max(threads, count // (4 * self.bank.size)))
-        tops = [first + count * i // parts for i in range(parts + 1)]
+        tiles = self._plan.detail["fft"]
+        unit = tiles.rows if tiles else 1  # no block is computed twice
+        inner = {(first + count * i // parts) // unit * unit for i in range(1, parts)}
+        tops = [first, *sorted(top for top in inner if top > first), first + count]
+        parts = len(tops) - 1
         with ThreadPoolExecutor(threads) as pool:
             codes = list(pool.map(lambda i: band(tops[i], tops[i + 1] - tops[i]), range(parts)))
         self._check(max(codes))
@@ -276,6 +280,10 @@ class NativeBank:
         if pixels.strides[1] != pixels.itemsize or abs(pixels.strides[0]) < pixels.shape[1]:
             pixels = np.ascontiguousarray(pixels)
         return pixels, rows or (0, pixels.shape[0])
+
+    def scratch_bytes(self, width: int, height: int) -> int:
+        """Bytes of working memory that a call on a picture of this size takes."""
+        return int(self._scratch(width, height))
 
     def _memory(self, pixels: NDArray[Any]) -> NDArray[np.uint8]:
         return np.empty(self._scratch(pixels.shape[1], pixels.shape[0]), dtype=np.uint8)

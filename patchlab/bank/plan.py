@@ -236,16 +236,18 @@ def _by_tiles(
     """Kernels whose responses compiled code makes by tile transforms.
 
     Kernels that make a strength stay with the products, which fused edges need. Of the others a
-    cluster goes when that saves operations.
+    cluster goes when that saves operations. With float pixels none goes unasked: a pixel that is
+    not a number, or far beyond the contract, would spoil its whole block.
     """
     fused = {k for s in range(len(bank.scales)) for _, *pair in strength_members(bank, s)
              for k in pair if k is not None}  # fmt: skip
     free = {k: terms for k, terms in sums.items() if k not in fused and terms}
     each = tile_cost(bank.size, len(free)) / max(len(free), 1) if bank.size <= LARGEST else np.inf
+    unasked = kind == "auto" and bank.contract.format.integer
     chosen: list[int] = []
     for cluster in clusters(free):
         work = sum(products[p].exact.size for p in {p for k in cluster for p, _ in sums[k]})
-        if kind == "fft" or (kind == "auto" and CLEARLY * each * len(cluster) < work):
+        if kind == "fft" or (unasked and CLEARLY * each * len(cluster) < work):
             chosen += cluster
     return tuple(sorted(chosen))
 

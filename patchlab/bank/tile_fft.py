@@ -40,7 +40,7 @@ LARGEST = 33
 """Largest kernel side: beyond, more than half of a block is overlap."""
 TRANSFORM = 20.0
 """About how many operations on vectors one transform, its loads and its stores cost for each row
-of output, in multiply-adds."""
+of output, in multiply-adds. Measured at 32 kernels of 15 x 15 on an x86-64 core with AVX-512."""
 
 
 @dataclass(frozen=True, eq=False)

@@ -432,13 +432,24 @@ def _say_assess(result: dict[str, Any]) -> None:
 
 
 @patchlab.command()
-@click.argument("bank", type=FOLDER)
+@click.argument("bank", type=FOLDER, required=False)
 @click.option("--size", default="1920x1080", help="Width x height of the picture.")
 @click.option("--repeats", default=7, type=click.IntRange(3, 100), help="Timed runs of each.")
+@click.option("--against-libraries", is_flag=True, help="Run the installed libraries too.")
+@click.option("--cases", is_flag=True, help="Time the fixed banks in place of a BANK.")
 @_shared
-def bench(bank: Path, size: str, repeats: int, terminal: Terminal, as_json: bool) -> None:
-    """Time a BANK's targets beside the libraries that are installed, as ratios of one run."""
-    from patchlab.pipeline import use
+def bench(
+    bank: Path | None,
+    size: str,
+    repeats: int,
+    against_libraries: bool,
+    cases: bool,
+    terminal: Terminal,
+    as_json: bool,
+) -> None:
+    """Time a BANK's plans and targets side by side, one thread and two, as ratios of one run."""
+    from patchlab.pipeline import bench as timed
+    from patchlab.pipeline.loaded import bank_folder
 
     try:
         width, height = (int(part) for part in size.lower().split("x"))
@@ -446,19 +457,59 @@ def bench(bank: Path, size: str, repeats: int, terminal: Terminal, as_json: bool
         raise UsageError(
             f"--size {size!r} is not WIDTHxHEIGHT", remedy="for example 1920x1080"
         ) from None
+    if cases == (bank is not None):
+        raise UsageError("name a BANK or give --cases, and not both")
     with terminal.working():
-        result = use.bench(bank, width, height, repeats, terminal)
+        if bank is None:
+            result = timed.cases(width, height, repeats, peers=against_libraries, progress=terminal)
+        else:
+            result = timed.bench(
+                bank_folder(bank), width, height, repeats,
+                peers=against_libraries, progress=terminal,
+            )  # fmt: skip
     _print(result, as_json, _say_bench)
 
 
 def _say_bench(result: dict[str, Any]) -> None:
-    table(
-        [
-            (r["target"], f"{r['median_ms']:.1f}", f"{r['ratio']:.2f}", r["note"])
-            for r in result["targets"]
-        ],
-        ("target", "median ms", "times the compiled bank", "note"),
-    )
+    for case in result.get("cases", [result]):
+        table(
+            [
+                (
+                    f"{case['bank']}: {p['kind']}{' (chosen)' if p['chosen'] else ''}",
+                    f"{p['multiplies_per_pixel']:.0f}",
+                    f"{p['adds_per_pixel']:.0f}",
+                    f"{p['scratch_bytes'] / 1024:.0f}",
+                    f"{p['error_bound']:.2g}",
+                    f"{p['compile_s']:.1f}",
+                    f"{p['median_ms']:.1f}",
+                )
+                for p in case["plans"]
+            ],
+            ("plan", "multiplies", "additions", "scratch kB", "bound", "compiled s", "median ms"),
+        )
+        table(
+            [
+                (
+                    r["target"],
+                    r["threads"],
+                    f"{r['median_ms']:.1f}",
+                    f"{r['cpu_ms']:.1f}",
+                    f"{r['ratio']:.2f}",
+                    "" if r["error_of_bound"] is None else f"{r['error_of_bound']:.2g}",
+                    r["note"],
+                )
+                for r in case["targets"]
+            ],
+            (
+                "target",
+                "threads",
+                "median ms",
+                "processor ms",
+                "times the first",
+                "error / bound",
+                "note",
+            ),
+        )
 
 
 @patchlab.command()

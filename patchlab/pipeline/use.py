@@ -1,4 +1,4 @@
-"""What is done with a bank or a run that stands: verify, detect, bench, reopen.
+"""What is done with a bank or a run that stands: verify, reopen.
 
 Nothing here needs the learner: a bank runs where numba and scikit-learn are absent.
 """
@@ -16,8 +16,8 @@ from typing import Any
 import numpy as np
 
 from patchlab import bank as banks
-from patchlab import edges, export, images, store
-from patchlab.errors import PatchlabError, UsageError
+from patchlab import edges, images, store
+from patchlab.errors import PatchlabError
 from patchlab.pipeline.bundle import open_native, prove
 from patchlab.pipeline.loaded import bank_folder
 from patchlab.progress import Progress, silent
@@ -231,45 +231,3 @@ def _example_edges(
         return edges.detect(bank, frame.pixels, respond, threshold=max(level, 1e-6)), ""
     except PatchlabError as error:
         return None, str(error)
-
-
-# ---------------------------------------------------------------- bench
-
-
-def bench(
-    path: Path, width: int, height: int, repeats: int, progress: Progress = silent
-) -> dict[str, Any]:
-    """Times of a bank's targets and of the libraries installed, on one thread."""
-    folder = bank_folder(path)
-    bank, plan, head = banks.read_bank(folder)
-    if min(width, height) < bank.size:
-        raise UsageError(f"--size must be at least {bank.size}x{bank.size}")
-    pixels = export.bench.picture(bank, width, height)
-    targets: dict[str, tuple[export.bench.Run, str]] = {}
-    native = open_native(folder, bank, plan, head)
-    if native is not None:
-        targets["compiled library"] = (native.responses, "float32 planes")
-    targets["numpy engine"] = (lambda p: banks.responses(bank, p, plan), "float32 planes")
-    model = f"{bank.name}.onnx"
-    graph = None
-    if model in head["files"]:
-        graph = export.bench.onnx_graph(store.read_file(folder, head, model))
-    peers = [*([graph] if graph else []), *export.bench.libraries(bank)]
-    targets |= {name: (run, note) for name, run, note in peers}
-    timings = export.bench.measure(targets, pixels, repeats, progress)
-    return {
-        "bank": bank.name,
-        "size": [width, height],
-        "kernels": len(bank),
-        "targets": [
-            {
-                "target": t.target,
-                "median_ms": round(t.median_ms, 3),
-                "low_ms": round(t.low_ms, 3),
-                "high_ms": round(t.high_ms, 3),
-                "ratio": round(t.ratio, 3),
-                "note": t.note,
-            }
-            for t in timings
-        ],
-    }

@@ -54,6 +54,13 @@ def test_arbitrary_kernels_from_nine_pixels_go_by_tiles():
     assert make_plan(random_bank(32, 15)).multiplies < 32 * 60
 
 
+def test_float_pixels_go_by_tiles_only_when_asked():
+    # one value that is not a number would spoil a whole block
+    bank = random_bank(16, 11, pixels="float32")
+    assert make_plan(bank).kind == "direct"
+    assert make_plan(bank, "fft").kind == "tile FFT"
+
+
 def test_a_bank_that_makes_a_strength_keeps_its_products():
     bank = lattice_bank(size=21, widths=((2.0, 3.0),))
     assert make_plan(bank, "fft").detail["fft"] is None
