@@ -149,18 +149,22 @@ class NoiseMeter:
         self._total_blocks += other._total_blocks
         self._grid.join(other._grid)
 
-    def result(self) -> NoiseModel:
-        """The law, or why there is none."""
-        if self.contract is None:
-            raise InputError("there is no frame to measure", remedy="give a folder of photographs")
-        samples = Samples(
+    @property
+    def samples(self) -> Samples:
+        """Every pixel that was looked at."""
+        return Samples(
             *(
                 np.concatenate([getattr(s, name) for s in self._samples] or [np.empty(0, "f4")])
                 for name in ("band", "level", "structure")
             )
         )
+
+    def result(self) -> NoiseModel:
+        """The law, or why there is none."""
+        if self.contract is None:
+            raise InputError("there is no frame to measure", remedy="give a folder of photographs")
         blocks = join(self._blocks)
-        return _law(self.contract, samples, blocks, self._total_blocks, self._grid.value)
+        return _law(self.contract, self.samples, blocks, self._total_blocks, self._grid.value)
 
 
 def measure_noise(frames: Iterable[Frame]) -> NoiseModel:

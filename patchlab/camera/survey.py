@@ -2,25 +2,22 @@
 
 from __future__ import annotations
 
-from collections.abc import Callable, Iterable, Mapping, Sequence
+from collections.abc import Callable, Iterable, Sequence
 from dataclasses import replace
-from itertools import combinations
 
 import numpy as np
 
 from patchlab.camera.blur import BlurMeter
 from patchlab.camera.chart import slanted_edge
 from patchlab.camera.marks import MarkMeter
+from patchlab.camera.mixed import joined, one_camera
 from patchlab.camera.noise import NoiseMeter
 from patchlab.camera.pixels import limited
 from patchlab.camera.spectrum import Spectrum, SpectrumMeter
 from patchlab.camera.static import measure_noise_dark, measure_noise_static
 from patchlab.camera.table import default_kind, make_table, sd_of
-from patchlab.errors import InputError
 from patchlab.progress import Progress, silent
 from patchlab.types import Frame, InputContract, NoiseModel, SlantedEdge, Survey, TableKind
-
-OTHER_NOISE = float(np.log(4 / 3))
 
 
 def survey(
@@ -59,21 +56,19 @@ def survey(
         belong together, no slanted edge, or ``kind="stabilised"`` without a noise law.
     """
     chart = None if edge is None else slanted_edge(edge)
-    by_size: dict[tuple[int, ...], tuple[str, NoiseMeter]] = {}
+    meters: list[tuple[tuple[int, ...], str, NoiseMeter]] = []
     spectrum_meter = SpectrumMeter()
     total = 0
     for frame in limited(frames_factory(), contract):
-        size = tuple(sorted(frame.pixels.shape))
-        by_size.setdefault(size, (frame.path, NoiseMeter()))[1].add(frame)
+        meters.append((tuple(sorted(frame.pixels.shape)), frame.path, NoiseMeter()))
+        meters[-1][2].add(frame)
         spectrum_meter.add(frame)
         total += 1
         progress("survey", total, 0, "noise and spectrum")
+    from_photos = joined(meters).result()
     if not mixed:
-        _one_camera(by_size)
-    noise_meter = NoiseMeter()
-    for _, meter in by_size.values():
-        noise_meter.join(meter)
-    noise, notes = better_noise(noise_meter.result(), static, dark)
+        one_camera(meters, from_photos)
+    noise, notes = better_noise(from_photos, static, dark)
     spectrum = spectrum_meter.result()
 
     blur_meter, mark_meter = BlurMeter(noise), MarkMeter(noise)
@@ -97,32 +92,6 @@ def survey(
         notes=notes,
     )
     return found if spectrum is None else _with_spectrum(found, spectrum)
-
-
-def _one_camera(by_size: Mapping[tuple[int, ...], tuple[str, NoiseMeter]]) -> None:
-    """Refuse frames of several sizes whose noise differs as that of one camera never does.
-
-    Raises
-    ------
-    InputError : two sizes whose standard deviations differ by a third at every level.
-    """
-    laws = [(size, path, meter.result()) for size, (path, meter) in by_size.items()]
-    known = [law for law in laws if law[2].measurable] if len(laws) > 1 else []
-    for one, two in combinations(known, 2):
-        low = max(one[2].levels.min(), two[2].levels.min())
-        high = min(one[2].levels.max(), two[2].levels.max())
-        if high <= low:
-            continue
-        at = np.linspace(low, high, 16)
-        ratio = np.log(np.interp(at, one[2].levels, one[2].sd))
-        ratio = ratio - np.log(np.interp(at, two[2].levels, two[2].sd))
-        if np.abs(ratio).min() > OTHER_NOISE and abs(np.sign(ratio).sum()) == at.size:
-            sizes = ["{1} x {0} ({2})".format(*law[0], law[1]) for law in (one, two)]
-            raise InputError(
-                f"the frames of {sizes[0]} and those of {sizes[1]} are of different cameras: their "
-                f"noise differs by a factor of {float(np.exp(np.abs(np.median(ratio)))):.1f}",
-                remedy="survey each camera on its own, or allow it with --mixed-cameras",
-            )
 
 
 def _blur(meter: BlurMeter, chart: SlantedEdge | None) -> tuple[float | None, str]:

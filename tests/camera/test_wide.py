@@ -102,3 +102,15 @@ def test_two_cameras_in_one_folder_are_told_by_size_and_noise(bench):
     assert survey(lambda: frames, contract, mixed=True).frames == 12
     same = bench.folder([x[:260, :300] for x in bench.photos(6)], contract, 0.5, 1.0, seed=2)
     assert survey(lambda: first + same, contract).noise.gain == pytest.approx(0.5, rel=0.05)
+
+
+def test_two_cameras_of_one_size_are_told_by_their_frames(bench):
+    contract = bench.contract(8, black=8)
+    light = [x[:280, :300] for x in bench.photos(10)]
+    frames = bench.folder(light[:5], contract, 0.5, 1.0)
+    other = bench.folder(light[5:], contract, 2.0, 2.0, seed=3)
+    other = [bench.frame(f.pixels, contract, f"b{f.path}") for f in other]
+    with pytest.raises(InputError, match=r"of different cameras or settings.*factor of [12]\."):
+        survey(lambda: frames + other, contract)
+    alone = bench.folder(light, contract, 0.5, 1.0, seed=3)
+    assert survey(lambda: alone, contract).noise.measurable
