@@ -318,11 +318,22 @@ class Bank:
         low = float(rules["hysteresis"]) * high
         maps = [self.strengths(image, s["scale"], threads) for s in rules["scales"]]
         planes = [
-            _candidates(strength, turn, about, rules, low)
+            _candidates(strength, turn, about, rules, low, self._rival(image, about, threads))
             for (strength, turn), about in zip(maps, rules["scales"], strict=True)
         ]
         edges, level = _cascade(planes, low, high, int(rules["dilation_px"]))
         return _joined(maps, [s["scale"] for s in rules["scales"]], edges, level, high)
+
+    def _rival(self, image: Array, about: Mapping[str, Any], threads: int) -> Array | None:
+        """The largest response of the kernels that a scale's elements are held against."""
+        kernels = about["rival_kernels"]
+        if not kernels:
+            return None
+        if self.compiled is not None:
+            planes = self.compiled.responses(image, threads)[kernels]
+        else:
+            planes = self._planes(image, kernels)
+        return np.abs(planes).max(axis=0)
 
     def last_turn(self, scale: int) -> int:
         """The largest number that names a direction of a scale."""
@@ -367,6 +378,11 @@ def _checked_rules(given: Mapping[str, Any], bank: Bank) -> dict[str, Any]:
                 "angles_rad": angles,
                 "sigma_px": number(entry["sigma_px"], 0, bank.size),
                 "reach_px": int(number(entry["reach_px"], 0, bank.radius)),
+                "floor": number(entry["floor"], 0, 1),
+                "rival_kernels": [
+                    int(number(k, 0, len(bank.kernels) - 1)) for k in entry["rival_kernels"]
+                ],
+                "rival_share": number(entry["rival_share"], 0, 4),
             }
         )
     if not scales:
@@ -374,7 +390,6 @@ def _checked_rules(given: Mapping[str, Any], bank: Bank) -> dict[str, Any]:
     return {
         "hysteresis": number(given["hysteresis"], 1e-3, 1),
         "dilation_px": int(number(given["dilation_px"], 0, 64)),
-        "relative_floor": number(given["relative_floor"], 0, 1),
         "window_sigmas": number(given["window_sigmas"], 0, 16),
         "scales": scales,
     }
@@ -440,7 +455,12 @@ def _thin(strength: Array, turn: Array, angles: Array, floor: float) -> Array:
 
 
 def _candidates(
-    strength: Array, turn: Array, about: Mapping[str, Any], rules: Mapping[str, Any], low: float
+    strength: Array,
+    turn: Array,
+    about: Mapping[str, Any],
+    rules: Mapping[str, Any],
+    low: float,
+    rival: Array | None,
 ) -> Array:
     """Strength of the thinned elements of one scale, 0 elsewhere."""
     keep = _thin(strength, turn, np.array(about["angles_rad"], dtype=np.float64), low)
@@ -449,10 +469,11 @@ def _candidates(
         inner = np.zeros_like(keep)
         inner[reach:-reach, reach:-reach] = True
         keep &= inner
-    if about["scale"] > 0:  # weak beside a strong one: a tail of another edge
-        half = math.ceil(float(rules["window_sigmas"]) * float(about["sigma_px"]))
-        around = _largest_around(strength, half)
-        keep &= strength >= np.float32(rules["relative_floor"]) * around
+    half = math.ceil(float(rules["window_sigmas"]) * float(about["sigma_px"]))
+    # weak beside a strong one: a tail of another edge
+    for field, share in ((strength, about["floor"]), (rival, about["rival_share"])):
+        if field is not None and share:
+            keep &= strength >= np.float32(share) * _largest_around(field, half)
     return np.where(keep, strength, np.float32(0))
 
 

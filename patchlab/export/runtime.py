@@ -24,8 +24,10 @@ def runtime_files(rules: Mapping[str, Any] | None) -> Bundle:
 
     Parameters
     ----------
-    rules : plain data: hysteresis, dilation_px, relative_floor, window_sigmas, and scales with
-        scale, angles_rad, sigma_px, reach_px each; None for a bank that finds no edges
+    rules : plain data: hysteresis, dilation_px, window_sigmas, and scales with scale,
+        angles_rad, sigma_px, reach_px, floor (share of the largest strength around), and
+        rival_kernels with rival_share (share of their largest response around) each; None for
+        a bank that finds no edges
     """
     source = resources.files("patchlab.export").joinpath(RUNTIME).read_bytes()
     files = {RUNTIME: source}

@@ -133,7 +133,6 @@ def edge_rules(bank: Bank) -> dict[str, Any] | None:
     return {
         "hysteresis": thin.HYSTERESIS if known is None else known.hysteresis,
         "dilation_px": thin.DILATION_PX,
-        "relative_floor": thin.RELATIVE_FLOOR,
         "window_sigmas": thin.WINDOW_SIGMAS,
         "scales": [
             {
@@ -141,6 +140,9 @@ def edge_rules(bank: Bank) -> dict[str, Any] | None:
                 "angles_rad": s.angles.tolist(),
                 "sigma_px": s.sigma_px,
                 "reach_px": s.reach_px,
+                "floor": thin.RELATIVE_FLOOR if s.scale > 0 else 0.0,
+                "rival_kernels": [],
+                "rival_share": 0.0,
             }
             for s in shapes
         ],

@@ -297,3 +297,18 @@ def test_verify_runs_the_runtime(folders, tmp_path, monkeypatch):
     assert [c.passed for c in targets(folder).values()] == [False]
     (folder / RUNTIME).write_bytes(b"")
     assert "was changed" in json.dumps([c.note for c in targets(folder).values()])
+
+
+@pytest.mark.parametrize("library", [False, True])
+def test_elements_are_held_against_a_rival_where_the_rules_say_so(folders, tmp_path, library):
+    folder = shutil.copytree(folders["energy"], tmp_path / "b")
+    rules = json.loads((folder / "edges.json").read_bytes())
+    pixels = scene(BANKS["energy"])
+    rules["scales"][0] |= {"rival_kernels": [0, 1, 2, 3], "rival_share": 1.02}
+    put(folder, "edges.json", json.dumps(rules).encode())
+    free = patchlab_bank.load(folders["energy"], library=library).edges(pixels, threshold=8.0)
+    held = patchlab_bank.load(folder, library=library).edges(pixels, threshold=8.0)
+    odd = np.abs(patchlab_bank.load(folder, library=library).responses(pixels)[:4]).max(axis=0)
+    assert 0 < held.edges.sum() < free.edges.sum()
+    assert (held.strength >= 1.02 * odd)[held.edges].all()
+    np.testing.assert_array_equal(held.strength, free.strength)
