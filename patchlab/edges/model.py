@@ -211,7 +211,10 @@ def _normal(
     matrix[:, diagonal, diagonal] += problem.prior
     both = active[:, :, None] & active[:, None, :]
     matrix = np.where(both, matrix, 0.0)
-    matrix[:, diagonal, diagonal] += np.where(active, 1e-12, 1.0)
+    # a ridge relative to the largest entry: parameters that the pixels cannot tell apart get
+    # no step and a huge standard error instead of a singular matrix
+    ridge = 1e-12 + 1e-10 * matrix[:, diagonal, diagonal].max(axis=1, keepdims=True)
+    matrix[:, diagonal, diagonal] += np.where(active, ridge, 1.0)
     return matrix, np.where(active, right, 0.0)
 
 

@@ -140,13 +140,20 @@ def edge_rules(bank: Bank) -> dict[str, Any] | None:
                 "angles_rad": s.angles.tolist(),
                 "sigma_px": s.sigma_px,
                 "reach_px": s.reach_px,
-                "floor": thin.RELATIVE_FLOOR if s.scale > 0 else 0.0,
-                "rival_kernels": [],
-                "rival_share": 0.0,
+                **_rivals(bank, s),
             }
             for s in shapes
         ],
     }
+
+
+def _rivals(bank: Bank, shape: thin.ScaleShape) -> dict[str, Any]:
+    """What an element of this scale is held against (see :func:`patchlab.edges.thin.strongest`)."""
+    if bank.strength == "line":
+        odd = [int(k) for k in shape.odd]
+        return {"floor": thin.LINE_FLOOR, "rival_kernels": odd, "rival_share": thin.LINE_OVER_STEP}
+    floor = thin.RELATIVE_FLOOR if shape.scale > 0 else 0.0
+    return {"floor": floor, "rival_kernels": [], "rival_share": 0.0}
 
 
 def build_library(
