@@ -356,3 +356,38 @@ def test_the_page_shows_the_assessment_of_this_bank_only(first, tmp_path):
     assert '<td class="n">11.5</td>' in shown
     assert (copy / "report" / "assess_light.png").is_file()
     assert "Assessed on made pictures" not in page({**found, "id": "another"})
+
+
+# ---------------------------------------------------------------- nothing is lost
+
+
+def test_force_removes_nothing_before_its_successor_stands(first, photos, tmp_path):
+    copy = tmp_path / "run"
+    shutil.copytree(first[0], copy)
+    bank = (copy / "bank" / "bank.json").read_bytes()
+    patchlab("run", tmp_path / "nowhere", "-o", copy, "--force", *SMALL, check=3)
+    patchlab("run", photos, "-o", copy, "--force", "--dry-run", *SMALL, check=0)
+    assert (copy / "bank" / "bank.json").read_bytes() == bank
+    patchlab("survey", photos, "-o", copy, "--force", check=0)
+    assert sorted(p.name for p in copy.iterdir()) == ["survey"]
+
+
+def test_folders_that_only_share_a_name_are_left_alone(photos, tmp_path):
+    mine = tmp_path / "mine" / "report"
+    mine.mkdir(parents=True)
+    (mine / "thesis.txt").write_text("years of work")
+    done = patchlab("run", photos, "-o", tmp_path / "mine", "--force", *SMALL, check=2)
+    assert "left alone" in one_sentence(done)
+    assert (mine / "thesis.txt").read_text() == "years of work"
+    patchlab("scenes", "-o", mine, "--count", "1", check=2)
+    assert [p.name for p in mine.iterdir()] == ["thesis.txt"]
+
+
+def test_options_without_effect_and_taps_beyond_reach_are_refused(first, tmp_path):
+    done = patchlab("export", first[0], "--pixels", "Mono12", "-o", tmp_path / "b", check=2)
+    assert "--pixels" in one_sentence(done)
+    np.save(tmp_path / "k.npy", np.full((1, 5, 5), 3e38))
+    taps = ("export", "--taps", tmp_path / "k.npy", "-o", tmp_path / "k")
+    assert "float32" in one_sentence(patchlab(*taps, check=3))
+    assert "65535" not in one_sentence(patchlab(*taps, "--white", "70000", check=2))
+    assert not (tmp_path / "k").exists()

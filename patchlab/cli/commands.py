@@ -84,7 +84,13 @@ def _work(
     out = options["out"]
     if not options.get("passing"):
         terminal.resume_hint = f"; go on with: patchlab {until} {photos} -o {out} --resume"
-    desk.prepare(out, photos, resume=options["resume"], force=options["force"])
+    desk.prepare(
+        out,
+        photos,
+        resume=options["resume"],
+        force=options["force"],
+        dry_run=options["dry_run"],
+    )
     with terminal.working():
         place = desk.Desk(out, settings, options["resume"], terminal, terminal.note)
         if options["dry_run"]:

@@ -95,7 +95,9 @@ def _says_the_same(head: Mapping[str, Any], about: Mapping[str, Any]) -> bool:
 # ---------------------------------------------------------------- the run's folder
 
 
-def prepare(out: Path, photos: Path | None, *, resume: bool, force: bool) -> None:
+def prepare(
+    out: Path, photos: Path | None, *, resume: bool, force: bool, dry_run: bool = False
+) -> None:
     """Check that a run may use its output folder, and sweep up after a killed run.
 
     Raises
@@ -116,10 +118,10 @@ def prepare(out: Path, photos: Path | None, *, resume: bool, force: bool) -> Non
     if not out.exists():
         return
     standing = [p for p in out.iterdir() if not p.name.startswith(".")]
-    strange = [p.name for p in standing if p.name not in (*ROOMS, "run.json")]
+    strange = sorted(p.name for p in standing if not _of_a_run(p))
     if strange:
         raise UsageError(
-            f"the folder holds something that is not a run's ({sorted(strange)[0]})",
+            f"the folder holds something that is not a run's ({strange[0]}), so it is left alone",
             where=str(out),
             remedy="choose another output folder",
         )
@@ -129,16 +131,34 @@ def prepare(out: Path, photos: Path | None, *, resume: bool, force: bool) -> Non
             where=str(out),
             remedy="--resume goes on with it, --force starts anew",
         )
+    if not dry_run:
+        _sweep(out)
+
+
+def _of_a_run(path: Path) -> bool:
+    """Whether something in a run's folder was put there by a run."""
+    if path.name not in ROOMS:
+        return path.name == "run.json" and path.is_file()
+    manifest = "bank.json" if path.name == "bank" else "manifest.json"
+    return path.is_dir() and ((path / manifest).is_file() or not any(path.iterdir()))
+
+
+def _sweep(out: Path) -> None:
+    """Remove what a killed run left half made."""
     for left in out.glob(".*.*"):
         if left.is_dir() and left.name.split(".")[1] in ROOMS:
             shutil.rmtree(left, ignore_errors=True)
     for half in out.glob(f".{keep.FILE}.*"):
         half.unlink(missing_ok=True)
-    if force and not resume:
-        for name in ROOMS:
+
+
+def clear_after(out: Path, stage: str) -> None:
+    """Remove the later stages of an earlier run, once ``stage`` of the new one stands."""
+    for name in ROOMS[ROOMS.index(stage) + 1 :]:
+        if (out / name).exists() and _of_a_run(out / name):
             shutil.rmtree(out / name, ignore_errors=True)
-        (out / "run.json").unlink(missing_ok=True)
-        (out / keep.FILE).unlink(missing_ok=True)
+    (out / "run.json").unlink(missing_ok=True)
+    (out / keep.FILE).unlink(missing_ok=True)
 
 
 def bank_name(out: Path, settings: Settings) -> str:

@@ -12,13 +12,15 @@ import numpy as np
 
 from patchlab import bank as banks
 from patchlab import camera, edges, images, learn, shapes, store
+from patchlab.conventions import pixel_format
 from patchlab.errors import InputError, UsageError
 from patchlab.export import parse_targets
 from patchlab.pipeline import tell
 from patchlab.pipeline.bundle import add_libraries, write_bundle
-from patchlab.pipeline.desk import RECIPE, Desk, bank_name, may_write
+from patchlab.pipeline.desk import RECIPE, Desk, bank_name, clear_after, may_write
 from patchlab.pipeline.keep import Keeper
 from patchlab.pipeline.measure import take_in_extras
+from patchlab.settings import Settings, option_name
 from patchlab.types import (
     Bank,
     Dictionary,
@@ -373,6 +375,8 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
         parse_targets(desk.settings.target)  # what cannot be built is said before the work
     intake = take_in(photos, desk)
     found, survey_head = survey(intake, desk)
+    if not desk.resume:
+        clear_after(desk.out, "survey")
     if until == "survey":
         return tell.survey(found, survey_head)
     patches, patches_head = sample(intake, found, survey_head, desk)
@@ -415,6 +419,12 @@ def export_run(desk: Desk, out: Path | None, *, force: bool) -> dict[str, Any]:
     """Choose and export a bank from a run's fits; to a bank's folder add the targets asked for."""
     if (desk.out / "bank.json").is_file():
         return tell.bank(add_libraries(desk.out, out or desk.out, desk, force=force))
+    for name, value in desk.settings.plain("photos").items():
+        if value != getattr(Settings(), name):
+            raise UsageError(
+                f"{option_name(name)} has no effect here: the run's own survey says it",
+                remedy="run the survey again with it, or export --taps",
+            )
     folder = out or desk.out / "bank"
     parse_targets(desk.settings.target)
     may_write(folder, force)
@@ -442,6 +452,8 @@ def export_taps(path: Path, desk: Desk, *, force: bool) -> dict[str, Any]:
         raise InputError(f"cannot be read: {error.strerror}", where=str(path)) from None
     except (ValueError, EOFError) as error:
         raise InputError(f"is no .npy file of numbers: {error}", where=str(path)) from None
+    _check_levels(s)
+    _check_reach(taps, path)
     bank = banks.bank_from_taps(
         taps,
         pixels=s.pixels or "Mono8",
@@ -453,3 +465,30 @@ def export_taps(path: Path, desk: Desk, *, force: bool) -> dict[str, Any]:
     )
     inputs = {path.name: store.sha256(data)}
     return tell.bank(write_bundle(desk.out, bank, desk, parents={}, inputs=inputs))
+
+
+def _check_levels(settings: Settings) -> None:
+    """Refuse black and white levels that the pixel format does not have."""
+    form = pixel_format(settings.pixels or "Mono8")
+    for name, level in (("--white", settings.white), ("--black", settings.black)):
+        if form.integer and level is not None and not 0 <= level <= form.full_scale:
+            raise UsageError(
+                f"{name} {level:g} is no code of {form.name}",
+                remedy=f"its codes run from 0 to {form.full_scale}",
+            )
+
+
+def _check_reach(taps: Any, path: Path) -> None:
+    """Refuse kernels whose sums float32 cannot hold."""
+    if not (isinstance(taps, np.ndarray) and taps.size and np.issubdtype(taps.dtype, np.number)):
+        return  # told by bank_from_taps
+    size = np.abs(np.asarray(taps, dtype=np.complex128))
+    if not np.isfinite(size).all():
+        return
+    total = float(size.sum()) if size.ndim < 3 else float(size.sum(axis=(1, 2)).max())
+    if total > 1e30 or 0 < float(size.max()) < 1e-25:
+        raise InputError(
+            f"taps that sum to {total:.3g} leave float32 no room for responses",
+            where=str(path),
+            remedy="scale the kernels, to a norm near 1 for example",
+        )

@@ -17,7 +17,7 @@ import numpy as np
 
 from patchlab import bank as banks
 from patchlab import edges, images, store
-from patchlab.errors import PatchlabError
+from patchlab.errors import PatchlabError, UsageError
 from patchlab.pipeline.bundle import open_native, prove
 from patchlab.pipeline.loaded import bank_folder
 from patchlab.progress import Progress, silent
@@ -85,8 +85,19 @@ def orientation_count(bank: Bank) -> int:
 
 
 def scenes(out: Path, count: int, progress: Progress = silent) -> dict[str, Any]:
-    """Render the frames of the invented camera."""
-    images.make_sample_images(out, count)
+    """Render the frames of the invented camera.
+
+    Raises
+    ------
+    UsageError : the folder holds something else, which would be mixed up or replaced.
+    """
+    ours = out / "NOTE.md"
+    known = ours.is_file() and ours.read_bytes().startswith(b"# Sample images")
+    if out.is_dir() and any(out.iterdir()) and not known:
+        raise UsageError(
+            "the folder holds something else", where=str(out), remedy="name a new folder"
+        )
+    images.make_sample_images(out, count, progress=progress)
     return {"folder": str(out), "frames": count}
 
 
@@ -174,8 +185,8 @@ def open_run(out: Path) -> RunContent:
     InputError : a stage is missing; VerificationError : a file was changed.
     """
     survey, survey_head = store.load(out / "survey", "survey")
-    patches, _ = store.load(out / "patches", "patches")
-    (dictionary, baseline), _ = store.load(out / "dictionary", "dictionary")
+    patches, patches_head = store.load(out / "patches", "patches")
+    (dictionary, baseline), dictionary_head = store.load(out / "dictionary", "dictionary")
     (atom_fits, filter_fits), _ = store.load(out / "fits", "fits")
     bank, plan, head = banks.read_bank(out / "bank")
     frame = _example(out, survey, survey_head)
@@ -194,7 +205,13 @@ def open_run(out: Path) -> RunContent:
         bank=bank,
         plan=plan,
         bank_head=head,
-        settings={**survey_head["settings"], **head["settings"], "seed": head["seed"]},
+        settings={
+            **survey_head["settings"],
+            **patches_head["settings"],
+            **dictionary_head["settings"],
+            **head["settings"],
+            "seed": head["seed"],
+        },
         frame=frame,
         found=found,
         rate=rate,

@@ -255,7 +255,7 @@ def thresholds(bank: Bank) -> bytes:
             found.strength, found.rate, "o-", color=TEAL, label="whole chain, Monte Carlo"
         )
         axes.semilogy(
-            found.rice, found.rate, ".--", color=SLATE, label="Rice sum, one scale, no linking"
+            found.strength, found.rice, ".--", color=SLATE, label="Rice sum, one scale, no linking"
         )
         axes.set(
             xlabel="strength threshold, noise sd",
