@@ -1,4 +1,4 @@
-/* tessary_edges: a convolution bank, 16 kernels of 9 x 9 taps.
+/* tessary_edges: a convolution bank, 16 kernels of 13 x 13 taps.
  *
  * The content of this folder is its maker's own. The parts that come from patchlab's
  * templates are granted to everyone for any use, without conditions or attribution.
@@ -6,7 +6,7 @@
  * What it computes
  *   Every pixel goes through the bank's input table (Mono8 codes to working
  *   values), then every kernel is correlated with the working values, without
- *   flipping: r(y, x) = sum k(j, i) p(y + j - 4, x + i - 4).
+ *   flipping: r(y, x) = sum k(j, i) p(y + j - 6, x + i - 6).
  *   Border: mirror101. Outside, the picture is mirrored about its outermost pixels.
  *   Strength: the largest absolute odd response over the orientations.
  *
@@ -43,10 +43,10 @@ extern "C" {
 #endif
 
 /* Compare with tessary_edges_abi(): they differ when library and header do not belong together. */
-#define tessary_edges_ABI 234801463
+#define tessary_edges_ABI 244636191
 
 #define tessary_edges_KERNEL_COUNT 16
-#define tessary_edges_KERNEL_SIZE 9
+#define tessary_edges_KERNEL_SIZE 13
 #define tessary_edges_SCALE_COUNT 2
 
 /* Pixels: Mono8. */
@@ -57,8 +57,9 @@ typedef uint8_t tessary_edges_pixel;
  * Use them as initialisers: static const float t[] = tessary_edges_STRENGTH_THRESHOLDS; */
 #define tessary_edges_THRESHOLD_COUNT 5
 #define tessary_edges_FALSE_EDGES_PER_MEGAPIXEL {0.100000001f, 1.0f, 10.0f, 100.0f, 1000.0f}
-#define tessary_edges_STRENGTH_THRESHOLDS {5.94275427f, 5.54610252f, 5.11792231f, 4.64897394f, 4.12424135f}
+#define tessary_edges_STRENGTH_THRESHOLDS {5.99136829f, 5.59479856f, 5.16683769f, 4.69833565f, 4.17446947f}
 #define tessary_edges_HYSTERESIS 0.699999988f
+#define tessary_edges_FALSE_GROUPS_PER_MEGAPIXEL {0.0294782147f, 0.274402916f, 2.53988171f, 23.3376808f, 212.304077f}
 
 /* What every function that returns int may return; tessary_edges_message() says it in words. */
 enum tessary_edges_code {
@@ -121,7 +122,7 @@ tessary_edges_API size_t tessary_edges_scratch_bytes(int width, int height);
 /* Responses of every kernel on the whole picture.
  *   image            first pixel of the first row
  *   row_bytes        from one row of the picture to the next
- *   width, height    pixels, each at least 9
+ *   width, height    pixels, each at least 13
  *   out              kernel k, row y, column x goes to
  *                    out + k * out_plane_bytes + y * out_row_bytes + 4 * x (in bytes)
  *   scratch          tessary_edges_scratch_bytes(width, height) bytes
@@ -148,6 +149,35 @@ tessary_edges_API int tessary_edges_edges(const tessary_edges_pixel *image, ptrd
 tessary_edges_API int tessary_edges_edges_rows(const tessary_edges_pixel *image, ptrdiff_t row_bytes, int width, int height,
     int first_row, int row_count, int scale,
     float *strength, ptrdiff_t strength_row_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, void *scratch);
+
+/* ---- fixed point
+ *
+ * The same bank in 16-bit integers: faster, and the same bits on every processor. A response
+ * is a count; count * tessary_edges_q_step(kernel) is its value. What is exact, what is rounded (halves
+ * upwards, once, at the end) and how far that is from the exact response is stated in the
+ * bank's manifest. No input can make a sum overflow. */
+
+/* Value of one count of a kernel; 0 when there is no such kernel. */
+tessary_edges_API float tessary_edges_q_step(int index);
+
+/* As tessary_edges_responses, in counts: kernel k, row y, column x goes to
+ * out + k * out_plane_bytes + y * out_row_bytes + 2 * x (in bytes). *saturated (unless
+ * NULL) becomes the number of counts at the ends of the range, -32767 or 32767;
+ * for this bank no input can reach them. */
+tessary_edges_API int tessary_edges_responses_q(const tessary_edges_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int16_t *out, ptrdiff_t out_row_bytes, ptrdiff_t out_plane_bytes, uint64_t *saturated,
+    void *scratch);
+tessary_edges_API int tessary_edges_responses_q_rows(const tessary_edges_pixel *image, ptrdiff_t row_bytes, int width,
+    int height, int first_row, int row_count, int16_t *out, ptrdiff_t out_row_bytes,
+    ptrdiff_t out_plane_bytes, uint64_t *saturated, void *scratch);
+
+/* As tessary_edges_edges, from counts; strength is in the units of tessary_edges_edges. */
+tessary_edges_API int tessary_edges_edges_q(const tessary_edges_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int scale, float *strength, ptrdiff_t strength_row_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, void *scratch);
+tessary_edges_API int tessary_edges_edges_q_rows(const tessary_edges_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int first_row, int row_count, int scale, float *strength, ptrdiff_t strength_row_bytes,
     unsigned char *orientation, ptrdiff_t orientation_row_bytes, void *scratch);
 
 #ifdef __cplusplus

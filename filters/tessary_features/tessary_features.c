@@ -7,7 +7,8 @@
  * working values of the last 25 rows. For every stretch of tessary_features_CHUNK output pixels
  * the rows of the ring are folded (added and subtracted about the middle row) and
  * dotted with the plan's coefficients; a kernel's response is a signed sum of such
- * products. The plan: parity, 2525 multiplies a pixel.
+ * products. Kernels by tile transforms, where the plan has any, take blocks of rows instead.
+ * The plan: parity, 2525 multiplies a pixel.
  *
  * This file includes itself once for every instruction set, with tessary_features_LANES set to the
  * floats in one vector. -Dtessary_features_MAX_LANES=1 leaves nothing but plain C.
@@ -113,7 +114,7 @@ static tessary_features_TARGET void tessary_features_FN(group0)(const float *s, 
         tessary_features_FN(vec) a3 = {0.0f}, b3 = {0.0f};
         tessary_features_FN(vec) a4 = {0.0f}, b4 = {0.0f};
         int j, i;
-        for (j = 0; j <= 12; ++j) {
+        for (j = 0; j < 13; ++j) {
             const float *const r = s + (ptrdiff_t)j * tessary_features_LINE + x + tessary_features_RADIUS;
             {
                 const tessary_features_FN(vec) p = tessary_features_LOAD(r);
@@ -130,7 +131,7 @@ static tessary_features_TARGET void tessary_features_FN(group0)(const float *s, 
                 tessary_features_MUL_ADD(b4, q, k[4]);
                 k += 5;
             }
-            for (i = 1; i <= 12; ++i) {
+            for (i = 1; i < 13; ++i) {
                 const tessary_features_FN(vec) p = tessary_features_LOAD(r + i) + tessary_features_LOAD(r - i);
                 const tessary_features_FN(vec) q = tessary_features_LOAD(r + tessary_features_LANES + i) + tessary_features_LOAD(r + tessary_features_LANES - i);
                 tessary_features_MUL_ADD(a0, p, k[0]);
@@ -169,9 +170,9 @@ static tessary_features_TARGET void tessary_features_FN(group1)(const float *s, 
         tessary_features_FN(vec) a1 = {0.0f}, b1 = {0.0f};
         tessary_features_FN(vec) a2 = {0.0f}, b2 = {0.0f};
         int j, i;
-        for (j = 13; j <= 24; ++j) {
+        for (j = 13; j < 25; ++j) {
             const float *const r = s + (ptrdiff_t)j * tessary_features_LINE + x + tessary_features_RADIUS;
-            for (i = 1; i <= 12; ++i) {
+            for (i = 1; i < 13; ++i) {
                 const tessary_features_FN(vec) p = tessary_features_LOAD(r + i) - tessary_features_LOAD(r - i);
                 const tessary_features_FN(vec) q = tessary_features_LOAD(r + tessary_features_LANES + i) - tessary_features_LOAD(r + tessary_features_LANES - i);
                 tessary_features_MUL_ADD(a0, p, k[0]);
@@ -203,9 +204,9 @@ static tessary_features_TARGET void tessary_features_FN(group2)(const float *s, 
         tessary_features_FN(vec) a2 = {0.0f}, b2 = {0.0f};
         tessary_features_FN(vec) a3 = {0.0f}, b3 = {0.0f};
         int j, i;
-        for (j = 0; j <= 12; ++j) {
+        for (j = 0; j < 13; ++j) {
             const float *const r = s + (ptrdiff_t)j * tessary_features_LINE + x + tessary_features_RADIUS;
-            for (i = 1; i <= 12; ++i) {
+            for (i = 1; i < 13; ++i) {
                 const tessary_features_FN(vec) p = tessary_features_LOAD(r + i) - tessary_features_LOAD(r - i);
                 const tessary_features_FN(vec) q = tessary_features_LOAD(r + tessary_features_LANES + i) - tessary_features_LOAD(r + tessary_features_LANES - i);
                 tessary_features_MUL_ADD(a0, p, k[0]);
@@ -241,7 +242,7 @@ static tessary_features_TARGET void tessary_features_FN(group3)(const float *s, 
         tessary_features_FN(vec) a2 = {0.0f}, b2 = {0.0f};
         tessary_features_FN(vec) a3 = {0.0f}, b3 = {0.0f};
         int j, i;
-        for (j = 13; j <= 24; ++j) {
+        for (j = 13; j < 25; ++j) {
             const float *const r = s + (ptrdiff_t)j * tessary_features_LINE + x + tessary_features_RADIUS;
             {
                 const tessary_features_FN(vec) p = tessary_features_LOAD(r);
@@ -256,7 +257,7 @@ static tessary_features_TARGET void tessary_features_FN(group3)(const float *s, 
                 tessary_features_MUL_ADD(b3, q, k[3]);
                 k += 4;
             }
-            for (i = 1; i <= 12; ++i) {
+            for (i = 1; i < 13; ++i) {
                 const tessary_features_FN(vec) p = tessary_features_LOAD(r + i) + tessary_features_LOAD(r - i);
                 const tessary_features_FN(vec) q = tessary_features_LOAD(r + tessary_features_LANES + i) + tessary_features_LOAD(r + tessary_features_LANES - i);
                 tessary_features_MUL_ADD(a0, p, k[0]);
@@ -404,6 +405,897 @@ static tessary_features_TARGET void tessary_features_FN(edges0)(const float *con
     for (x = 0; x < n; ++x) orientation[x] = (unsigned char)winner[x];
 }
 
+/* ---- fixed point: 16-bit codes and coefficients, exact sums in 32 bits */
+
+#if tessary_features_LANES == 16
+#define tessary_features_TARGET_Q \
+    __attribute__((target("avx512f,avx512vl,avx512bw,avx512dq,avx512vnni,avx2,fma")))
+#else
+#define tessary_features_TARGET_Q tessary_features_TARGET
+#endif
+#define tessary_features_QFN static inline tessary_features_TARGET_Q
+
+#if tessary_features_LANES == 16
+
+#define tessary_features_WIDE 32 /* codes in one vector */
+typedef __m512i tessary_features_FN(q16);
+typedef __m512i tessary_features_FN(q32);
+#define tessary_features_X86(name) _mm512_##name
+#define tessary_features_X86_STREAM(p, v) _mm512_stream_si512((__m512i *)(p), (v))
+
+#elif tessary_features_LANES == 8
+
+#define tessary_features_WIDE 16
+typedef __m256i tessary_features_FN(q16);
+typedef __m256i tessary_features_FN(q32);
+#define tessary_features_X86(name) _mm256_##name
+#define tessary_features_X86_STREAM(p, v) _mm256_stream_si256((__m256i *)(p), (v))
+
+#elif tessary_features_LANES == 4 && defined(__SSE2__)
+
+#define tessary_features_WIDE 8
+typedef __m128i tessary_features_FN(q16);
+typedef __m128i tessary_features_FN(q32);
+#define tessary_features_X86(name) _mm_##name
+#define tessary_features_X86_STREAM(p, v) _mm_stream_si128((__m128i *)(p), (v))
+
+#elif tessary_features_LANES == 4 && defined(__aarch64__)
+
+#define tessary_features_WIDE 8
+typedef int16x8_t tessary_features_FN(q16);
+typedef int32x4_t tessary_features_FN(q32);
+
+#else
+
+#define tessary_features_WIDE 8
+typedef struct { int16_t v[8]; } tessary_features_FN(q16);
+typedef struct { int32_t v[4]; } tessary_features_FN(q32);
+
+#endif
+
+#if defined(tessary_features_X86)
+
+/* On x86 a pair of vectors is two halves of interleaved codes, in the order that packing
+ * undoes; products stand in memory in that order too. */
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_load)(const int16_t *p)
+{
+    tessary_features_FN(q16) v;
+    memcpy(&v, p, sizeof v);
+    return v;
+}
+tessary_features_QFN void tessary_features_FN(q_store)(int16_t *p, tessary_features_FN(q16) v) { memcpy(p, &v, sizeof v); }
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_sum)(const int32_t *p)
+{
+    tessary_features_FN(q32) v;
+    memcpy(&v, p, sizeof v);
+    return v;
+}
+tessary_features_QFN void tessary_features_FN(q_keep)(int32_t *p, tessary_features_FN(q32) v) { memcpy(p, &v, sizeof v); }
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_add)(tessary_features_FN(q16) a, tessary_features_FN(q16) b) { return tessary_features_X86(add_epi16)(a, b); }
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_sub)(tessary_features_FN(q16) a, tessary_features_FN(q16) b) { return tessary_features_X86(sub_epi16)(a, b); }
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_plus)(tessary_features_FN(q32) a, tessary_features_FN(q32) b) { return tessary_features_X86(add_epi32)(a, b); }
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_minus)(tessary_features_FN(q32) a, tessary_features_FN(q32) b) { return tessary_features_X86(sub_epi32)(a, b); }
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_nought)(void) { return tessary_features_X86(set1_epi32)(0); }
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_low)(tessary_features_FN(q16) v, tessary_features_FN(q16) w) { return tessary_features_X86(unpacklo_epi16)(v, w); }
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_high)(tessary_features_FN(q16) v, tessary_features_FN(q16) w) { return tessary_features_X86(unpackhi_epi16)(v, w); }
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_mac)(tessary_features_FN(q32) sum, tessary_features_FN(q16) pairs, const int16_t *k)
+{
+    int32_t both;
+    memcpy(&both, k, sizeof both);
+#if tessary_features_LANES == 16
+    return _mm512_dpwssd_epi32(sum, pairs, _mm512_set1_epi32(both));
+#else
+    return tessary_features_FN(q_plus)(sum, tessary_features_X86(madd_epi16)(pairs, tessary_features_X86(set1_epi32)(both)));
+#endif
+}
+#define tessary_features_PAIR(v, w) const tessary_features_FN(q16) l = tessary_features_FN(q_low)(v, w), h = tessary_features_FN(q_high)(v, w)
+#define tessary_features_MAC(a, b, k) (a = tessary_features_FN(q_mac)(a, l, k), b = tessary_features_FN(q_mac)(b, h, k))
+typedef int32_t tessary_features_FN(q_signed) __attribute__((vector_size(2 * tessary_features_WIDE)));
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_down)(tessary_features_FN(q32) v, int bits)
+{
+    /* an arithmetic shift: every compiler with these vectors makes it one */
+    return (tessary_features_FN(q32))(((tessary_features_FN(q_signed))v + (1 << bits >> 1)) >> bits);
+}
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_round)(tessary_features_FN(q32) l, tessary_features_FN(q32) h, int bits)
+{
+    return tessary_features_X86(max_epi16)(tessary_features_X86(packs_epi32)(tessary_features_FN(q_down)(l, bits), tessary_features_FN(q_down)(h, bits)),
+        tessary_features_X86(set1_epi16)(-32767));
+}
+
+#elif tessary_features_LANES == 4 && defined(__aarch64__)
+
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_load)(const int16_t *p) { return vld1q_s16(p); }
+tessary_features_QFN void tessary_features_FN(q_store)(int16_t *p, tessary_features_FN(q16) v) { vst1q_s16(p, v); }
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_sum)(const int32_t *p) { return vld1q_s32(p); }
+tessary_features_QFN void tessary_features_FN(q_keep)(int32_t *p, tessary_features_FN(q32) v) { vst1q_s32(p, v); }
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_add)(tessary_features_FN(q16) a, tessary_features_FN(q16) b) { return vaddq_s16(a, b); }
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_sub)(tessary_features_FN(q16) a, tessary_features_FN(q16) b) { return vsubq_s16(a, b); }
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_plus)(tessary_features_FN(q32) a, tessary_features_FN(q32) b) { return vaddq_s32(a, b); }
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_minus)(tessary_features_FN(q32) a, tessary_features_FN(q32) b) { return vsubq_s32(a, b); }
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_nought)(void) { return vdupq_n_s32(0); }
+#define tessary_features_PAIR(v, w) const tessary_features_FN(q16) l = (v), h = (w)
+#define tessary_features_MAC(a, b, k)                                            \
+    (a = vmlal_n_s16(vmlal_n_s16(a, vget_low_s16(l), (k)[0]), vget_low_s16(h), (k)[1]), \
+     b = vmlal_n_s16(vmlal_n_s16(b, vget_high_s16(l), (k)[0]), vget_high_s16(h), (k)[1]))
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_round)(tessary_features_FN(q32) l, tessary_features_FN(q32) h, int bits)
+{
+    const int32x4_t half = vdupq_n_s32(1 << bits >> 1), down = vdupq_n_s32(-bits);
+    return vmaxq_s16(vcombine_s16(vqmovn_s32(vshlq_s32(vaddq_s32(l, half), down)),
+        vqmovn_s32(vshlq_s32(vaddq_s32(h, half), down))), vdupq_n_s16(-32767));
+}
+
+#else
+
+/* The portable twin: the same bits, in plain C. */
+#define tessary_features_EACH(n) for (i = 0; i < (n); ++i)
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_load)(const int16_t *p)
+{
+    tessary_features_FN(q16) v;
+    memcpy(&v, p, sizeof v);
+    return v;
+}
+tessary_features_QFN void tessary_features_FN(q_store)(int16_t *p, tessary_features_FN(q16) v) { memcpy(p, &v, sizeof v); }
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_sum)(const int32_t *p)
+{
+    tessary_features_FN(q32) v;
+    memcpy(&v, p, sizeof v);
+    return v;
+}
+tessary_features_QFN void tessary_features_FN(q_keep)(int32_t *p, tessary_features_FN(q32) v) { memcpy(p, &v, sizeof v); }
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_add)(tessary_features_FN(q16) a, tessary_features_FN(q16) b)
+{
+    int i;
+    tessary_features_EACH(8) a.v[i] = (int16_t)(a.v[i] + b.v[i]);
+    return a;
+}
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_sub)(tessary_features_FN(q16) a, tessary_features_FN(q16) b)
+{
+    int i;
+    tessary_features_EACH(8) a.v[i] = (int16_t)(a.v[i] - b.v[i]);
+    return a;
+}
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_plus)(tessary_features_FN(q32) a, tessary_features_FN(q32) b)
+{
+    int i;
+    tessary_features_EACH(4) a.v[i] += b.v[i];
+    return a;
+}
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_minus)(tessary_features_FN(q32) a, tessary_features_FN(q32) b)
+{
+    int i;
+    tessary_features_EACH(4) a.v[i] -= b.v[i];
+    return a;
+}
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_nought)(void)
+{
+    tessary_features_FN(q32) a;
+    memset(&a, 0, sizeof a);
+    return a;
+}
+tessary_features_QFN tessary_features_FN(q32) tessary_features_FN(q_mac)(tessary_features_FN(q32) sum, const int16_t *v, const int16_t *w,
+    const int16_t *k)
+{
+    int i;
+    tessary_features_EACH(4) sum.v[i] += (int32_t)v[i] * k[0] + (int32_t)w[i] * k[1];
+    return sum;
+}
+#define tessary_features_PAIR(v, w) const tessary_features_FN(q16) l = (v), h = (w)
+#define tessary_features_MAC(a, b, k) \
+    (a = tessary_features_FN(q_mac)(a, l.v, h.v, k), b = tessary_features_FN(q_mac)(b, l.v + 4, h.v + 4, k))
+tessary_features_QFN int16_t tessary_features_FN(q_one)(int32_t v, int bits)
+{
+    /* the floor of a division, without shifting a negative number */
+    v += 1 << bits >> 1;
+    v = v >= 0 ? v >> bits : -1 - ((-1 - v) >> bits);
+    return (int16_t)(v > 32767 ? 32767 : v < -32767 ? -32767 : v);
+}
+tessary_features_QFN tessary_features_FN(q16) tessary_features_FN(q_round)(tessary_features_FN(q32) l, tessary_features_FN(q32) h, int bits)
+{
+    tessary_features_FN(q16) r;
+    int i;
+    tessary_features_EACH(4) r.v[i] = tessary_features_FN(q_one)(l.v[i], bits);
+    tessary_features_EACH(4) r.v[i + 4] = tessary_features_FN(q_one)(h.v[i], bits);
+    return r;
+}
+#undef tessary_features_EACH
+
+#endif
+
+/* The middle row, then the sums and then the differences of the rows about it. */
+static tessary_features_TARGET_Q void tessary_features_FN(q_fold)(const int16_t *const *rows, ptrdiff_t at, int16_t *s)
+{
+    int j, x;
+    for (x = 0; x < tessary_features_LINE_Q; x += tessary_features_WIDE) {
+        tessary_features_FN(q_store)(s + x, tessary_features_FN(q_load)(rows[tessary_features_RADIUS] + at + x));
+    }
+    for (j = 1; j <= tessary_features_RADIUS; ++j) {
+        const int16_t *const below = rows[tessary_features_RADIUS + j] + at;
+        const int16_t *const above = rows[tessary_features_RADIUS - j] + at;
+        int16_t *const sum = s + (ptrdiff_t)j * tessary_features_LINE_Q;
+        int16_t *const difference = s + (ptrdiff_t)(tessary_features_RADIUS + j) * tessary_features_LINE_Q;
+        for (x = 0; x < tessary_features_LINE_Q; x += tessary_features_WIDE) {
+            const tessary_features_FN(q16) b = tessary_features_FN(q_load)(below + x), a = tessary_features_FN(q_load)(above + x);
+            tessary_features_FN(q_store)(sum + x, tessary_features_FN(q_add)(b, a));
+            tessary_features_FN(q_store)(difference + x, tessary_features_FN(q_sub)(b, a));
+        }
+    }
+}
+
+static tessary_features_TARGET_Q void tessary_features_FN(q_group0)(const int16_t *s, int32_t *t)
+{
+    int x;
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const int16_t *k = tessary_features_group0_counts;
+        tessary_features_FN(q32) a0 = tessary_features_FN(q_nought)(), b0 = a0;
+        tessary_features_FN(q32) a1 = tessary_features_FN(q_nought)(), b1 = a1;
+        tessary_features_FN(q32) a2 = tessary_features_FN(q_nought)(), b2 = a2;
+        tessary_features_FN(q32) a3 = tessary_features_FN(q_nought)(), b3 = a3;
+        tessary_features_FN(q32) a4 = tessary_features_FN(q_nought)(), b4 = a4;
+        int j;
+        for (j = 0; j < 13; j += 1) {
+            const int16_t *const r = s + (ptrdiff_t)(j) * tessary_features_LINE_Q + x + tessary_features_RADIUS;
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_load)(r);
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 1), tessary_features_FN(q_load)(r - 1));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                tessary_features_MAC(a4, b4, k + 8);
+                k += 10;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 2), tessary_features_FN(q_load)(r - 2));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 3), tessary_features_FN(q_load)(r - 3));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                tessary_features_MAC(a4, b4, k + 8);
+                k += 10;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 4), tessary_features_FN(q_load)(r - 4));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 5), tessary_features_FN(q_load)(r - 5));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                tessary_features_MAC(a4, b4, k + 8);
+                k += 10;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 6), tessary_features_FN(q_load)(r - 6));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 7), tessary_features_FN(q_load)(r - 7));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                tessary_features_MAC(a4, b4, k + 8);
+                k += 10;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 8), tessary_features_FN(q_load)(r - 8));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 9), tessary_features_FN(q_load)(r - 9));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                tessary_features_MAC(a4, b4, k + 8);
+                k += 10;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 10), tessary_features_FN(q_load)(r - 10));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 11), tessary_features_FN(q_load)(r - 11));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                tessary_features_MAC(a4, b4, k + 8);
+                k += 10;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 12), tessary_features_FN(q_load)(r - 12));
+                const tessary_features_FN(q16) w = v;
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                tessary_features_MAC(a4, b4, k + 8);
+                k += 10;
+            }
+        }
+        tessary_features_FN(q_keep)(t + 8 * tessary_features_CHUNK + x, a0);
+        tessary_features_FN(q_keep)(t + 8 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b0);
+        tessary_features_FN(q_keep)(t + 9 * tessary_features_CHUNK + x, a1);
+        tessary_features_FN(q_keep)(t + 9 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b1);
+        tessary_features_FN(q_keep)(t + 11 * tessary_features_CHUNK + x, a2);
+        tessary_features_FN(q_keep)(t + 11 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b2);
+        tessary_features_FN(q_keep)(t + 13 * tessary_features_CHUNK + x, a3);
+        tessary_features_FN(q_keep)(t + 13 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b3);
+        tessary_features_FN(q_keep)(t + 15 * tessary_features_CHUNK + x, a4);
+        tessary_features_FN(q_keep)(t + 15 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b4);
+    }
+}
+
+static tessary_features_TARGET_Q void tessary_features_FN(q_group1)(const int16_t *s, int32_t *t)
+{
+    int x;
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const int16_t *k = tessary_features_group1_counts;
+        tessary_features_FN(q32) a0 = tessary_features_FN(q_nought)(), b0 = a0;
+        tessary_features_FN(q32) a1 = tessary_features_FN(q_nought)(), b1 = a1;
+        tessary_features_FN(q32) a2 = tessary_features_FN(q_nought)(), b2 = a2;
+        int j;
+        for (j = 13; j < 25; j += 1) {
+            const int16_t *const r = s + (ptrdiff_t)(j) * tessary_features_LINE_Q + x + tessary_features_RADIUS;
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 1), tessary_features_FN(q_load)(r - 1));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 2), tessary_features_FN(q_load)(r - 2));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                k += 6;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 3), tessary_features_FN(q_load)(r - 3));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 4), tessary_features_FN(q_load)(r - 4));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                k += 6;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 5), tessary_features_FN(q_load)(r - 5));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 6), tessary_features_FN(q_load)(r - 6));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                k += 6;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 7), tessary_features_FN(q_load)(r - 7));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 8), tessary_features_FN(q_load)(r - 8));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                k += 6;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 9), tessary_features_FN(q_load)(r - 9));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 10), tessary_features_FN(q_load)(r - 10));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                k += 6;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 11), tessary_features_FN(q_load)(r - 11));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 12), tessary_features_FN(q_load)(r - 12));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                k += 6;
+            }
+        }
+        tessary_features_FN(q_keep)(t + 10 * tessary_features_CHUNK + x, a0);
+        tessary_features_FN(q_keep)(t + 10 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b0);
+        tessary_features_FN(q_keep)(t + 12 * tessary_features_CHUNK + x, a1);
+        tessary_features_FN(q_keep)(t + 12 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b1);
+        tessary_features_FN(q_keep)(t + 14 * tessary_features_CHUNK + x, a2);
+        tessary_features_FN(q_keep)(t + 14 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b2);
+    }
+}
+
+static tessary_features_TARGET_Q void tessary_features_FN(q_group2)(const int16_t *s, int32_t *t)
+{
+    int x;
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const int16_t *k = tessary_features_group2_counts;
+        tessary_features_FN(q32) a0 = tessary_features_FN(q_nought)(), b0 = a0;
+        tessary_features_FN(q32) a1 = tessary_features_FN(q_nought)(), b1 = a1;
+        tessary_features_FN(q32) a2 = tessary_features_FN(q_nought)(), b2 = a2;
+        tessary_features_FN(q32) a3 = tessary_features_FN(q_nought)(), b3 = a3;
+        int j;
+        for (j = 0; j < 13; j += 1) {
+            const int16_t *const r = s + (ptrdiff_t)(j) * tessary_features_LINE_Q + x + tessary_features_RADIUS;
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 1), tessary_features_FN(q_load)(r - 1));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 2), tessary_features_FN(q_load)(r - 2));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 3), tessary_features_FN(q_load)(r - 3));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 4), tessary_features_FN(q_load)(r - 4));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 5), tessary_features_FN(q_load)(r - 5));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 6), tessary_features_FN(q_load)(r - 6));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 7), tessary_features_FN(q_load)(r - 7));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 8), tessary_features_FN(q_load)(r - 8));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 9), tessary_features_FN(q_load)(r - 9));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 10), tessary_features_FN(q_load)(r - 10));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 11), tessary_features_FN(q_load)(r - 11));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_sub)(tessary_features_FN(q_load)(r + 12), tessary_features_FN(q_load)(r - 12));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+        }
+        tessary_features_FN(q_keep)(t + 0 * tessary_features_CHUNK + x, a0);
+        tessary_features_FN(q_keep)(t + 0 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b0);
+        tessary_features_FN(q_keep)(t + 1 * tessary_features_CHUNK + x, a1);
+        tessary_features_FN(q_keep)(t + 1 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b1);
+        tessary_features_FN(q_keep)(t + 3 * tessary_features_CHUNK + x, a2);
+        tessary_features_FN(q_keep)(t + 3 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b2);
+        tessary_features_FN(q_keep)(t + 5 * tessary_features_CHUNK + x, a3);
+        tessary_features_FN(q_keep)(t + 5 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b3);
+    }
+}
+
+static tessary_features_TARGET_Q void tessary_features_FN(q_group3)(const int16_t *s, int32_t *t)
+{
+    int x;
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const int16_t *k = tessary_features_group3_counts;
+        tessary_features_FN(q32) a0 = tessary_features_FN(q_nought)(), b0 = a0;
+        tessary_features_FN(q32) a1 = tessary_features_FN(q_nought)(), b1 = a1;
+        tessary_features_FN(q32) a2 = tessary_features_FN(q_nought)(), b2 = a2;
+        tessary_features_FN(q32) a3 = tessary_features_FN(q_nought)(), b3 = a3;
+        int j;
+        for (j = 13; j < 25; j += 2) {
+            const int16_t *const r = s + (ptrdiff_t)(j) * tessary_features_LINE_Q + x + tessary_features_RADIUS;
+            const int16_t *const r2 = s + (ptrdiff_t)(j + 1) * tessary_features_LINE_Q + x + tessary_features_RADIUS;
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_load)(r);
+                const tessary_features_FN(q16) w = tessary_features_FN(q_load)(r2);
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 1), tessary_features_FN(q_load)(r - 1));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r2 + 1), tessary_features_FN(q_load)(r2 - 1));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 2), tessary_features_FN(q_load)(r - 2));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r2 + 2), tessary_features_FN(q_load)(r2 - 2));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 3), tessary_features_FN(q_load)(r - 3));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r2 + 3), tessary_features_FN(q_load)(r2 - 3));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 4), tessary_features_FN(q_load)(r - 4));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r2 + 4), tessary_features_FN(q_load)(r2 - 4));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 5), tessary_features_FN(q_load)(r - 5));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r2 + 5), tessary_features_FN(q_load)(r2 - 5));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 6), tessary_features_FN(q_load)(r - 6));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r2 + 6), tessary_features_FN(q_load)(r2 - 6));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 7), tessary_features_FN(q_load)(r - 7));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r2 + 7), tessary_features_FN(q_load)(r2 - 7));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 8), tessary_features_FN(q_load)(r - 8));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r2 + 8), tessary_features_FN(q_load)(r2 - 8));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 9), tessary_features_FN(q_load)(r - 9));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r2 + 9), tessary_features_FN(q_load)(r2 - 9));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 10), tessary_features_FN(q_load)(r - 10));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r2 + 10), tessary_features_FN(q_load)(r2 - 10));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 11), tessary_features_FN(q_load)(r - 11));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r2 + 11), tessary_features_FN(q_load)(r2 - 11));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_features_FN(q16) v = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r + 12), tessary_features_FN(q_load)(r - 12));
+                const tessary_features_FN(q16) w = tessary_features_FN(q_add)(tessary_features_FN(q_load)(r2 + 12), tessary_features_FN(q_load)(r2 - 12));
+                tessary_features_PAIR(v, w);
+                tessary_features_MAC(a0, b0, k + 0);
+                tessary_features_MAC(a1, b1, k + 2);
+                tessary_features_MAC(a2, b2, k + 4);
+                tessary_features_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+        }
+        tessary_features_FN(q_keep)(t + 2 * tessary_features_CHUNK + x, a0);
+        tessary_features_FN(q_keep)(t + 2 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b0);
+        tessary_features_FN(q_keep)(t + 4 * tessary_features_CHUNK + x, a1);
+        tessary_features_FN(q_keep)(t + 4 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b1);
+        tessary_features_FN(q_keep)(t + 6 * tessary_features_CHUNK + x, a2);
+        tessary_features_FN(q_keep)(t + 6 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b2);
+        tessary_features_FN(q_keep)(t + 7 * tessary_features_CHUNK + x, a3);
+        tessary_features_FN(q_keep)(t + 7 * tessary_features_CHUNK + x + tessary_features_WIDE / 2, b3);
+    }
+}
+
+/* Counts go to the caller, past the cache where the planes are large. */
+static tessary_features_TARGET_Q void tessary_features_FN(q_put)(const int16_t *from, int16_t *to, int n, int stream)
+{
+    int x = 0;
+#if defined(tessary_features_X86)
+    if (stream) {
+        const int head = (int)(((64u - ((uintptr_t)to & 63u)) & 63u) / 2u);
+        for (; x < head && x < n; ++x) to[x] = from[x];
+        for (; x + tessary_features_WIDE <= n; x += tessary_features_WIDE)
+            tessary_features_X86_STREAM((void *)(to + x), tessary_features_FN(q_load)(from + x));
+    }
+#else
+    (void)stream;
+#endif
+    if (x < n) memcpy(to + x, from + x, (size_t)(n - x) * sizeof(int16_t));
+}
+
+static tessary_features_TARGET_Q uint64_t tessary_features_FN(q_responses)(const int16_t *const *rows, ptrdiff_t at, int n,
+    void *work, char *out, ptrdiff_t plane, int stream)
+{
+    int16_t *const s = (int16_t *)work; /* folded rows */
+    int32_t *const t = (int32_t *)(void *)(s + tessary_features_FOLDED_Q); /* products */
+    int16_t *const r = (int16_t *)(void *)(t + 16 * tessary_features_CHUNK); /* counts */
+    uint64_t ends = 0;
+    int x;
+    tessary_features_FN(q_fold)(rows, at, s);
+    tessary_features_FN(q_group0)(s, t);
+    tessary_features_FN(q_group1)(s, t);
+    tessary_features_FN(q_group2)(s, t);
+    tessary_features_FN(q_group3)(s, t);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_sum)(t + 0 * tessary_features_CHUNK + x);
+        const tessary_features_FN(q32) h = tessary_features_FN(q_sum)(t + 0 * tessary_features_CHUNK + x + tessary_features_WIDE / 2);
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 0 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 1 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 2 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 1 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 2 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 1 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 3 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 4 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 3 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 4 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 2 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 5 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 6 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 5 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 6 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 3 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_sum)(t + 7 * tessary_features_CHUNK + x);
+        const tessary_features_FN(q32) h = tessary_features_FN(q_sum)(t + 7 * tessary_features_CHUNK + x + tessary_features_WIDE / 2);
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 4 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_minus)(tessary_features_FN(q_nought)(), tessary_features_FN(q_sum)(t + 5 * tessary_features_CHUNK + x)), tessary_features_FN(q_sum)(t + 6 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_minus)(tessary_features_FN(q_nought)(), tessary_features_FN(q_sum)(t + 5 * tessary_features_CHUNK + x + tessary_features_WIDE / 2)), tessary_features_FN(q_sum)(t + 6 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 5 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_minus)(tessary_features_FN(q_nought)(), tessary_features_FN(q_sum)(t + 3 * tessary_features_CHUNK + x)), tessary_features_FN(q_sum)(t + 4 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_minus)(tessary_features_FN(q_nought)(), tessary_features_FN(q_sum)(t + 3 * tessary_features_CHUNK + x + tessary_features_WIDE / 2)), tessary_features_FN(q_sum)(t + 4 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 6 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_minus)(tessary_features_FN(q_nought)(), tessary_features_FN(q_sum)(t + 1 * tessary_features_CHUNK + x)), tessary_features_FN(q_sum)(t + 2 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_minus)(tessary_features_FN(q_nought)(), tessary_features_FN(q_sum)(t + 1 * tessary_features_CHUNK + x + tessary_features_WIDE / 2)), tessary_features_FN(q_sum)(t + 2 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 7 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_sum)(t + 8 * tessary_features_CHUNK + x);
+        const tessary_features_FN(q32) h = tessary_features_FN(q_sum)(t + 8 * tessary_features_CHUNK + x + tessary_features_WIDE / 2);
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 8 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 9 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 10 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 9 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 10 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 9 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 11 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 12 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 11 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 12 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 10 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 13 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 14 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 13 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 14 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 11 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_sum)(t + 15 * tessary_features_CHUNK + x);
+        const tessary_features_FN(q32) h = tessary_features_FN(q_sum)(t + 15 * tessary_features_CHUNK + x + tessary_features_WIDE / 2);
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 12 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_minus)(tessary_features_FN(q_sum)(t + 13 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 14 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_minus)(tessary_features_FN(q_sum)(t + 13 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 14 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 13 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_minus)(tessary_features_FN(q_sum)(t + 11 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 12 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_minus)(tessary_features_FN(q_sum)(t + 11 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 12 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 14 * plane), n, stream);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_minus)(tessary_features_FN(q_sum)(t + 9 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 10 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_minus)(tessary_features_FN(q_sum)(t + 9 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 10 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_put)(r, (int16_t *)(void *)(out + 15 * plane), n, stream);
+    return ends;
+}
+
+/* Keep the largest value so far and whose it is; among equals the first stays. */
+static tessary_features_TARGET_Q void tessary_features_FN(q_take)(const int16_t *e, const int16_t *o, int turn,
+    int32_t *best, int32_t *who)
+{
+    int x;
+    for (x = 0; x < tessary_features_CHUNK; ++x) {
+        const int32_t v = (int32_t)e[x] * e[x] + (int32_t)o[x] * o[x];
+        who[x] = v > best[x] ? turn : who[x];
+        best[x] = v > best[x] ? v : best[x];
+    }
+}
+
+/* Strength and winner of scale 0. */
+static tessary_features_TARGET_Q void tessary_features_FN(q_edges0)(const int16_t *const *rows,
+    ptrdiff_t at, int n, void *work, float *strength, unsigned char *orientation)
+{
+    int16_t *const s = (int16_t *)work; /* folded rows */
+    int32_t *const t = (int32_t *)(void *)(s + tessary_features_FOLDED_Q); /* products */
+    int32_t *const best = t + 16 * tessary_features_CHUNK;
+    int32_t *const who = best + tessary_features_CHUNK;
+    int16_t *const r = (int16_t *)(void *)(who + tessary_features_CHUNK);
+    int x;
+    tessary_features_FN(q_fold)(rows, at, s);
+    tessary_features_FN(q_group0)(s, t);
+    tessary_features_FN(q_group1)(s, t);
+    tessary_features_FN(q_group2)(s, t);
+    tessary_features_FN(q_group3)(s, t);
+    for (x = 0; x < tessary_features_CHUNK; ++x) best[x] = -1;
+    for (x = 0; x < tessary_features_CHUNK; ++x) who[x] = 0;
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_sum)(t + 8 * tessary_features_CHUNK + x);
+        const tessary_features_FN(q32) h = tessary_features_FN(q_sum)(t + 8 * tessary_features_CHUNK + x + tessary_features_WIDE / 2);
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_sum)(t + 0 * tessary_features_CHUNK + x);
+        const tessary_features_FN(q32) h = tessary_features_FN(q_sum)(t + 0 * tessary_features_CHUNK + x + tessary_features_WIDE / 2);
+        tessary_features_FN(q_store)(r + tessary_features_CHUNK + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_take)(r, r + tessary_features_CHUNK, 0, best, who);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 9 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 10 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 9 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 10 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 1 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 2 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 1 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 2 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + tessary_features_CHUNK + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_take)(r, r + tessary_features_CHUNK, 1, best, who);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 11 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 12 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 11 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 12 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 3 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 4 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 3 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 4 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + tessary_features_CHUNK + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_take)(r, r + tessary_features_CHUNK, 2, best, who);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 13 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 14 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 13 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 14 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 5 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 6 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_sum)(t + 5 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 6 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + tessary_features_CHUNK + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_take)(r, r + tessary_features_CHUNK, 3, best, who);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_sum)(t + 15 * tessary_features_CHUNK + x);
+        const tessary_features_FN(q32) h = tessary_features_FN(q_sum)(t + 15 * tessary_features_CHUNK + x + tessary_features_WIDE / 2);
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_sum)(t + 7 * tessary_features_CHUNK + x);
+        const tessary_features_FN(q32) h = tessary_features_FN(q_sum)(t + 7 * tessary_features_CHUNK + x + tessary_features_WIDE / 2);
+        tessary_features_FN(q_store)(r + tessary_features_CHUNK + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_take)(r, r + tessary_features_CHUNK, 4, best, who);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_minus)(tessary_features_FN(q_sum)(t + 13 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 14 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_minus)(tessary_features_FN(q_sum)(t + 13 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 14 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_minus)(tessary_features_FN(q_nought)(), tessary_features_FN(q_sum)(t + 5 * tessary_features_CHUNK + x)), tessary_features_FN(q_sum)(t + 6 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_minus)(tessary_features_FN(q_nought)(), tessary_features_FN(q_sum)(t + 5 * tessary_features_CHUNK + x + tessary_features_WIDE / 2)), tessary_features_FN(q_sum)(t + 6 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + tessary_features_CHUNK + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_take)(r, r + tessary_features_CHUNK, 5, best, who);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_minus)(tessary_features_FN(q_sum)(t + 11 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 12 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_minus)(tessary_features_FN(q_sum)(t + 11 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 12 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_minus)(tessary_features_FN(q_nought)(), tessary_features_FN(q_sum)(t + 3 * tessary_features_CHUNK + x)), tessary_features_FN(q_sum)(t + 4 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_minus)(tessary_features_FN(q_nought)(), tessary_features_FN(q_sum)(t + 3 * tessary_features_CHUNK + x + tessary_features_WIDE / 2)), tessary_features_FN(q_sum)(t + 4 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + tessary_features_CHUNK + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_take)(r, r + tessary_features_CHUNK, 6, best, who);
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_minus)(tessary_features_FN(q_sum)(t + 9 * tessary_features_CHUNK + x), tessary_features_FN(q_sum)(t + 10 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_minus)(tessary_features_FN(q_sum)(t + 9 * tessary_features_CHUNK + x + tessary_features_WIDE / 2), tessary_features_FN(q_sum)(t + 10 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    for (x = 0; x < tessary_features_CHUNK; x += tessary_features_WIDE) {
+        const tessary_features_FN(q32) l = tessary_features_FN(q_plus)(tessary_features_FN(q_minus)(tessary_features_FN(q_nought)(), tessary_features_FN(q_sum)(t + 1 * tessary_features_CHUNK + x)), tessary_features_FN(q_sum)(t + 2 * tessary_features_CHUNK + x));
+        const tessary_features_FN(q32) h = tessary_features_FN(q_plus)(tessary_features_FN(q_minus)(tessary_features_FN(q_nought)(), tessary_features_FN(q_sum)(t + 1 * tessary_features_CHUNK + x + tessary_features_WIDE / 2)), tessary_features_FN(q_sum)(t + 2 * tessary_features_CHUNK + x + tessary_features_WIDE / 2));
+        tessary_features_FN(q_store)(r + tessary_features_CHUNK + x, tessary_features_FN(q_round)(l, h, 15));
+    }
+    tessary_features_FN(q_take)(r, r + tessary_features_CHUNK, 7, best, who);
+    for (x = 0; x < n; ++x) strength[x] = 0.0133973919f * sqrtf((float)best[x]);
+    for (x = 0; x < n; ++x) orientation[x] = (unsigned char)who[x];
+}
+
+#undef tessary_features_TARGET_Q
+#undef tessary_features_QFN
+#undef tessary_features_WIDE
+#undef tessary_features_X86
+#undef tessary_features_X86_STREAM
+#undef tessary_features_PAIR
+#undef tessary_features_MAC
 #undef tessary_features_LOAD
 #undef tessary_features_STORE
 #undef tessary_features_MUL_ADD
@@ -422,6 +1314,7 @@ static tessary_features_TARGET void tessary_features_FN(edges0)(const float *con
 #include <string.h>
 
 #if defined(__GNUC__) && defined(__x86_64__)
+#include <cpuid.h>
 #include <immintrin.h>
 #elif defined(__GNUC__) && defined(__aarch64__)
 #include <arm_neon.h>
@@ -438,6 +1331,9 @@ static tessary_features_TARGET void tessary_features_FN(edges0)(const float *con
 #define tessary_features_FOLDED 2400 /* floats of the folded rows of a chunk */
 #define tessary_features_TILE 1920 /* widest part of the picture that the ring holds */
 #define tessary_features_SCRATCH 3552 /* floats of scratch memory beside the ring */
+#define tessary_features_LINE_Q 96 /* the same in 16-bit codes */
+#define tessary_features_FOLDED_Q 2400 /* codes of the folded rows of a chunk */
+#define tessary_features_SCRATCH_Q 9664 /* bytes of scratch memory beside the ring of codes */
 #define tessary_features_LONGEST 16777216 /* pixels of a side */
 #define tessary_features_STREAM_FROM 8388608.0 /* bytes of output from which stores pass the cache */
 
@@ -445,550 +1341,704 @@ static tessary_features_TARGET void tessary_features_FN(edges0)(const float *con
 
 /* The input table: working value of every Mono8 code. */
 static const float tessary_features_table[256] = {
-    0.0f, 1.95394826f, 3.57617021f, 5.02080631f, 6.30380869f, 7.46666384f, 8.5240984f,
-    9.48549366f, 10.4228106f, 11.3143845f, 12.1613817f, 12.9754457f, 13.7559805f, 14.5022154f,
-    15.2229071f, 15.9287977f, 16.6148014f, 17.279892f, 17.926157f, 18.5548935f, 19.1687126f,
-    19.7698898f, 20.3593884f, 20.9371624f, 21.5023251f, 22.0554657f, 22.5979843f, 23.131422f,
-    23.6565971f, 24.1739616f, 24.6831646f, 25.1828556f, 25.673336f, 26.1570625f, 26.6354694f,
-    27.1087055f, 27.5749741f, 28.0341206f, 28.4863358f, 28.9333191f, 29.3756847f, 29.8135395f,
-    30.2460899f, 30.6732235f, 31.0950603f, 31.512167f, 31.9253464f, 32.334713f, 32.7403107f,
-    33.14151f, 33.5383949f, 33.9310532f, 34.3199234f, 34.7055359f, 35.087944f, 35.4672089f,
-    35.843174f, 36.2157516f, 36.585022f, 36.9511795f, 37.3143425f, 37.6745949f, 38.0319824f,
-    38.3865547f, 38.738369f, 39.0875931f, 39.4342918f, 39.7785034f, 40.120266f, 40.4595642f,
-    40.7964325f, 41.1309395f, 41.4631844f, 41.7931976f, 42.1210022f, 42.4466324f, 42.7701111f,
-    43.0914726f, 43.4108391f, 43.7282448f, 44.0437202f, 44.3572807f, 44.6689529f, 44.9787598f,
-    45.2867546f, 45.5929909f, 45.8974838f, 46.2002525f, 46.5013199f, 46.8006973f, 47.098423f,
-    47.394558f, 47.6891174f, 47.9821129f, 48.273571f, 48.5634956f, 48.8519135f, 49.1388741f,
-    49.4244041f, 49.7085114f, 49.9912148f, 50.2725296f, 50.5524635f, 50.8310509f, 51.1083336f,
-    51.3843117f, 51.659008f, 51.9324303f, 52.204586f, 52.4754982f, 52.7452087f, 53.0137215f,
-    53.2810555f, 53.5472145f, 53.8122101f, 54.0760536f, 54.3387794f, 54.6004028f, 54.8609352f,
-    55.1203804f, 55.3787537f, 55.6360588f, 55.8923187f, 56.1475563f, 56.4017792f, 56.6549988f,
-    56.9072189f, 57.1584473f, 57.4086952f, 57.6579933f, 57.9063492f, 58.1537666f, 58.4002533f,
-    58.6458206f, 58.8904686f, 59.1342201f, 59.3770905f, 59.6190834f, 59.8602104f, 60.1004715f,
-    60.3398781f, 60.5784416f, 60.8161774f, 61.053093f, 61.289196f, 61.5244865f, 61.758976f,
-    61.9926643f, 62.2255707f, 62.4577065f, 62.6890717f, 62.9196739f, 63.1495209f, 63.3786125f,
-    63.6069641f, 63.8345947f, 64.0615082f, 64.2877045f, 64.5131912f, 64.7379761f, 64.962059f,
-    65.185463f, 65.4081879f, 65.6302338f, 65.8516006f, 66.0723114f, 66.2923508f, 66.511734f,
-    66.730484f, 66.9485855f, 67.1660538f, 67.3828812f, 67.5990829f, 67.8146591f, 68.0296249f,
-    68.2439804f, 68.4577255f, 68.6708755f, 68.8834229f, 69.0953751f, 69.3067474f, 69.5175552f,
-    69.7277832f, 69.9374466f, 70.1465378f, 70.355072f, 70.5630569f, 70.7704926f, 70.9773712f,
-    71.1837082f, 71.3894882f, 71.5947266f, 71.7994308f, 72.0036011f, 72.2072449f, 72.4103699f,
-    72.6129684f, 72.8150711f, 73.0166779f, 73.2178116f, 73.418457f, 73.6186371f, 73.8183365f,
-    74.0175705f, 74.2163315f, 74.4146347f, 74.612442f, 74.8097153f, 75.0064545f, 75.2026672f,
-    75.3983536f, 75.5935135f, 75.7881622f, 75.9822998f, 76.1759262f, 76.3690491f, 76.5618362f,
-    76.7543564f, 76.9466171f, 77.1386185f, 77.330368f, 77.5218582f, 77.7130966f, 77.9040833f,
-    78.0948181f, 78.2853088f, 78.4750748f, 78.6639099f, 78.8518219f, 79.0388184f, 79.2248993f,
-    79.41008f, 79.594368f, 79.7777634f, 79.9602737f, 80.1418991f, 80.323288f, 80.5055923f,
-    80.6888046f, 80.8729553f, 81.0580368f, 81.244072f, 81.4310455f, 81.6190872f, 81.8084793f,
-    81.9992447f, 82.191391f, 82.3839493f, 82.5764999f, 82.7690506f, 82.9616089f, 83.1541595f,
-    83.3467102f, 83.5392685f, 83.7318192f, 83.9243698f
+    0.0f, 1.80598032f, 2.54398108f, 3.5567894f, 4.39676523f, 5.15184975f, 5.86980581f,
+    6.54924822f, 7.18991995f, 7.79828596f, 8.37996101f, 8.93846035f, 9.47628403f, 9.99540901f,
+    10.4975758f, 10.9843588f, 11.4571056f, 11.9169836f, 12.3649902f, 12.8019981f, 13.2287769f,
+    13.6460114f, 14.0543137f, 14.4542322f, 14.8462648f, 15.2308588f, 15.6084232f, 15.9793291f,
+    16.3439178f, 16.7024994f, 17.0553646f, 17.4027748f, 17.744976f, 18.0821972f, 18.4146481f,
+    18.742527f, 19.0660172f, 19.3852882f, 19.7005043f, 20.0118122f, 20.3193588f, 20.6232719f,
+    20.9236794f, 21.2207012f, 21.5144482f, 21.8050251f, 22.092535f, 22.3770714f, 22.6587238f,
+    22.9375801f, 23.2137203f, 23.4872246f, 23.7581635f, 24.0266113f, 24.2926331f, 24.5562954f,
+    24.8176575f, 25.0767803f, 25.3337212f, 25.5885315f, 25.8412666f, 26.0919724f, 26.3407021f,
+    26.5874977f, 26.8324051f, 27.0754662f, 27.3167248f, 27.5562172f, 27.7939816f, 28.0300579f,
+    28.2644787f, 28.4972801f, 28.7284946f, 28.9581528f, 29.1862869f, 29.4129295f, 29.6381054f,
+    29.8618431f, 30.0841713f, 30.3051167f, 30.524704f, 30.7429581f, 30.9599037f, 31.1755619f,
+    31.3899574f, 31.6031094f, 31.8150444f, 32.0257759f, 32.2353325f, 32.4437256f, 32.6509819f,
+    32.8571129f, 33.0621414f, 33.2660828f, 33.468956f, 33.6707726f, 33.8715553f, 34.0713158f,
+    34.2700729f, 34.4678383f, 34.6646309f, 34.8604584f, 35.0553398f, 35.2492867f, 35.4423141f,
+    35.6344337f, 35.8256569f, 36.0159988f, 36.205471f, 36.3940849f, 36.581852f, 36.7687798f,
+    36.9548874f, 37.1401787f, 37.3246689f, 37.5083618f, 37.6912766f, 37.8734169f, 38.0547943f,
+    38.2354164f, 38.4152985f, 38.5944405f, 38.7728615f, 38.9505615f, 39.127552f, 39.3038445f,
+    39.4794426f, 39.6543579f, 39.828598f, 40.0021667f, 40.1750793f, 40.3473358f, 40.5189438f,
+    40.6899185f, 40.8602562f, 41.0299721f, 41.19907f, 41.3675575f, 41.5354385f, 41.7027245f,
+    41.8694153f, 42.0355225f, 42.2010498f, 42.3660049f, 42.5303917f, 42.6942177f, 42.8574829f,
+    43.0202026f, 43.1823769f, 43.3440132f, 43.5051117f, 43.6656837f, 43.8257332f, 43.9852638f,
+    44.1442795f, 44.3027878f, 44.4607925f, 44.6182976f, 44.7753067f, 44.9318275f, 45.0878639f,
+    45.2434196f, 45.3984985f, 45.5531044f, 45.7072449f, 45.86092f, 46.0141335f, 46.1668968f,
+    46.3192062f, 46.4710693f, 46.6224861f, 46.773468f, 46.924015f, 47.0741348f, 47.2238274f,
+    47.3731003f, 47.5219536f, 47.6703911f, 47.8184166f, 47.9660339f, 48.1132355f, 48.2600288f,
+    48.406414f, 48.5523987f, 48.6979828f, 48.8431702f, 48.9879646f, 49.13237f, 49.2763863f,
+    49.4200249f, 49.563282f, 49.7061615f, 49.848671f, 49.9908104f, 50.1325836f, 50.2739906f,
+    50.4150391f, 50.5557671f, 50.6962204f, 50.8364029f, 50.9763145f, 51.1159592f, 51.2553406f,
+    51.394455f, 51.5333138f, 51.6719093f, 51.8101921f, 51.9477882f, 52.0847092f, 52.2209625f,
+    52.3565445f, 52.4914665f, 52.6257324f, 52.759346f, 52.8923149f, 53.0246353f, 53.1569977f,
+    53.2900581f, 53.4238205f, 53.5582886f, 53.6934738f, 53.82938f, 53.9660072f, 54.1033669f,
+    54.2414665f, 54.3803062f, 54.5178566f, 54.6526299f, 54.784687f, 54.9140892f, 55.0408897f,
+    55.1651497f, 55.2869186f, 55.4062538f, 55.5232086f, 55.6378288f, 55.7519493f, 55.8693581f,
+    55.9901619f, 56.1144714f, 56.2424049f, 56.3740845f, 56.5096397f, 56.6492004f, 56.7929077f,
+    56.9408951f, 57.0933151f, 57.2465477f, 57.3994713f, 57.5520897f, 57.7044067f, 57.8564186f,
+    58.0081329f, 58.1595459f, 58.3106651f, 58.4614906f
 };
 
 /* 5 x 13 x 13 coefficients, even in y, even in x */
 static const float tessary_features_group0_taps[845] = {
-    0.155620158f, 0.153686345f, 0.151586056f, 0.15305239f, 0.1547333f, 0.103000611f,
-    0.108148217f, 0.122660965f, 0.140962094f, 0.149972528f, 0.0f, 0.0143844783f, 0.0554241836f,
-    0.109119684f, 0.136551529f, -0.0631530285f, -0.0520164073f, -0.00942113996f, 0.0684439242f,
-    0.116798729f, -0.0631826222f, -0.0625886619f, -0.04347229f, 0.0308493376f, 0.093850404f,
-    -0.0358966887f, -0.0412787497f, -0.0457189381f, 0.0041911006f, 0.0708419979f,
-    -0.0138302445f, -0.0187107027f, -0.0318819284f, -0.00965738297f, 0.0502344966f,
-    -0.00382968783f, -0.00623261929f, -0.0169071555f, -0.0134246051f, 0.0334633887f,
-    -0.000783056021f, -0.00157186389f, -0.00715360045f, -0.0115639567f, 0.02094087f,
-    -0.000120013952f, -0.00030502677f, -0.00247091055f, -0.00787657499f, 0.0123105049f,
-    -1.39176846e-05f, -4.59849834e-05f, -0.000705778599f, -0.00453680754f, 0.00679850578f,
-    -1.22189522e-06f, -5.42402267e-06f, -0.000168055296f, -0.00227370858f, 0.00352701545f,
-    -8.94069672e-08f, -5.06639481e-07f, -3.35276127e-05f, -0.00100642443f, 0.00171893835f,
-    0.150832057f, 0.141545206f, 0.122660965f, 0.107702672f, 0.102413654f, 0.0998316109f,
-    0.100335598f, 0.100700095f, 0.0999222547f, 0.0992627144f, 0.0f, 0.0148221403f,
-    0.0487861931f, 0.0792334974f, 0.0903797448f, -0.0612100065f, -0.0469987094f,
-    -0.00324465334f, 0.0522654057f, 0.0773058832f, -0.0612387061f, -0.0581901968f,
-    -0.0330207348f, 0.0264936686f, 0.0621170104f, -0.0347922742f, -0.0392866433f,
-    -0.0376912057f, 0.00721253455f, 0.0468883812f, -0.0134047568f, -0.0182680041f,
-    -0.0280109644f, -0.00383619964f, 0.0332488418f, -0.00371187925f, -0.0062622577f,
-    -0.0158321261f, -0.00791069865f, 0.0221485198f, -0.000758975744f, -0.00163076818f,
-    -0.00716426969f, -0.00766544044f, 0.0138601661f, -0.000116318464f, -0.000327825546f,
-    -0.00265732408f, -0.00563617051f, 0.00814798474f, -1.3500452e-05f, -5.13792038e-05f,
-    -0.000818267465f, -0.00346271694f, 0.00449973345f, -1.1920929e-06f, -6.31809235e-06f,
-    -0.000210791826f, -0.00184383988f, 0.00233444571f, -8.94069672e-08f, -6.10947609e-07f,
-    -4.56571579e-05f, -0.000866293907f, 0.00113770366f, 0.137334138f, 0.109571069f,
-    0.0554241836f, 0.0143252313f, 0.0f, 0.0908977091f, 0.0795612633f, 0.0487861931f,
-    0.0147610754f, 0.0f, 0.0f, 0.0155747533f, 0.0311177224f, 0.0155105889f, 0.0f,
-    -0.0557323396f, -0.0339636058f, 0.00889144838f, 0.0153734684f, 0.0f, -0.0557584763f,
-    -0.0464251488f, -0.00947396457f, 0.0134991258f, 0.0f, -0.0316787064f, -0.0337512344f,
-    -0.018314749f, 0.0100393146f, 0.0f, -0.0122051537f, -0.0169216245f, -0.0178395063f,
-    0.00599212945f, 0.0f, -0.00337970257f, -0.00627800822f, -0.0124929398f, 0.0025011301f, 0.0f,
-    -0.000691056252f, -0.00177517533f, -0.00682358444f, 0.000229805708f, 0.0f, -0.000105917454f,
-    -0.000388368964f, -0.00300329924f, -0.00080178678f, 0.0f, -1.22785568e-05f,
-    -6.63101673e-05f, -0.00108329952f, -0.000980734825f, 0.0f, -1.07288361e-06f,
-    -8.88109207e-06f, -0.00032350421f, -0.000764235854f, 0.0f, -5.96046448e-08f,
-    -9.38773155e-07f, -8.05258751e-05f, -0.000471323729f, 0.0f, 0.117468119f, 0.0687270463f,
-    -0.00942113996f, -0.0518021286f, -0.0627931356f, 0.0777489543f, 0.0524816066f,
-    -0.00324465334f, -0.0468050838f, -0.0608612001f, 0.0f, 0.0154370666f, 0.00889144838f,
-    -0.0338236988f, -0.0554147363f, -0.0476703942f, -0.0178272277f, 0.0152081698f,
-    -0.0177537948f, -0.047398746f, -0.0476927459f, -0.0309171379f, 0.0110742301f,
-    -0.00377805531f, -0.0380859673f, -0.0270962417f, -0.0258779526f, 0.00171853602f,
-    0.00496762991f, -0.0287487805f, -0.0104396343f, -0.0146827847f, -0.00533474982f,
-    0.00816576183f, -0.0203859508f, -0.00289079547f, -0.0061096251f, -0.00716131926f,
-    0.00749722123f, -0.0135799646f, -0.000591099262f, -0.00192332268f, -0.00547720492f,
-    0.00517581403f, -0.00849813223f, -9.05990601e-05f, -0.000465363264f, -0.00303941965f,
-    0.00284263492f, -0.0049957931f, -1.05202198e-05f, -8.73655081e-05f, -0.00131475925f,
-    0.00122612715f, -0.00275895f, -9.23871994e-07f, -1.28000975e-05f, -0.000457882881f,
-    0.000371053815f, -0.00143131614f, -5.96046448e-08f, -1.47521496e-06f, -0.000130668283f,
-    3.04728746e-05f, -0.00069758296f, 0.0943882763f, 0.0309769511f, -0.04347229f,
-    -0.0623308122f, -0.0628225803f, 0.0624730289f, 0.0266032666f, -0.0330207348f,
-    -0.0579504669f, -0.0608897209f, 0.0f, 0.0135549605f, -0.00947396457f, -0.0462338924f,
-    -0.0554407239f, -0.0383042395f, -0.00379368663f, 0.0110742301f, -0.0307897776f,
-    -0.0474209785f, -0.0383222103f, -0.0158704817f, 0.0181598514f, -0.0158050954f,
-    -0.0381038189f, -0.0217724442f, -0.0172989368f, 0.0132593364f, -0.00439892709f,
-    -0.0287622809f, -0.00838845968f, -0.0117223263f, 0.00460189581f, 0.00224544108f,
-    -0.0203955173f, -0.00232282281f, -0.00560484827f, -0.00130210817f, 0.00471664965f,
-    -0.0135863423f, -0.000474959612f, -0.00198188424f, -0.00306557119f, 0.00453537703f,
-    -0.00850209594f, -7.28070736e-05f, -0.000530809164f, -0.00243608654f, 0.00324830413f,
-    -0.00499814749f, -8.43405724e-06f, -0.000109225512f, -0.00131337345f, 0.0018940568f,
-    -0.00276023149f, -7.4505806e-07f, -1.74194574e-05f, -0.000541165471f, 0.000919729471f,
-    -0.00143200159f, -5.96046448e-08f, -2.16066837e-06f, -0.000178188086f, 0.000368714333f,
-    -0.000697880983f, 0.0712480247f, 0.00420844555f, -0.0457189381f, -0.0411086977f,
-    -0.0356921256f, 0.0471571088f, 0.00724236667f, -0.0376912057f, -0.0391247869f,
-    -0.0345939994f, 0.0f, 0.0100808442f, -0.018314749f, -0.0336121917f, -0.0314981937f,
-    -0.0289135575f, 0.00498817861f, 0.00171853602f, -0.0257713348f, -0.0269418359f,
-    -0.0289271176f, -0.00441712141f, 0.0132593364f, -0.0172276795f, -0.0216483772f,
-    -0.0164346993f, -0.00959165394f, 0.0142035186f, -0.00955213606f, -0.0163410604f,
-    -0.00633195043f, -0.00842617452f, 0.00885742903f, -0.00380843878f, -0.0115875304f,
-    -0.00175336003f, -0.00473298132f, 0.00295975804f, -0.000323995948f, -0.00771895051f,
-    -0.000358521938f, -0.00188846886f, -0.000420972705f, 0.0012255609f, -0.00483039021f,
-    -5.49554825e-05f, -0.000559329987f, -0.00131200254f, 0.00150710344f, -0.00283965468f,
-    -6.37769699e-06f, -0.000125855207f, -0.00100545585f, 0.00119103491f, -0.0015681982f,
-    -5.66244125e-07f, -2.18153e-05f, -0.000512570143f, 0.000743225217f, -0.000813573599f,
-    -2.98023224e-08f, -2.93552876e-06f, -0.000198826194f, 0.000386357307f, -0.000396490097f,
-    0.0505224168f, -0.00969731808f, -0.0318819284f, -0.018633604f, -0.0137514472f,
-    0.0334393978f, -0.00385206938f, -0.0280109644f, -0.0181927532f, -0.0133283436f, 0.0f,
-    0.00601691008f, -0.0178395063f, -0.0168519169f, -0.0121355951f, -0.0205027759f,
-    0.00819954276f, -0.00533474982f, -0.0146223009f, -0.0103801191f, -0.0205124021f,
-    0.0022547245f, 0.00460189581f, -0.0116740316f, -0.00834065676f, -0.0116539598f,
-    -0.00382418931f, 0.00885742903f, -0.00839146972f, -0.00629585981f, -0.00449001789f,
-    -0.00530068576f, 0.00782939792f, -0.00527884066f, -0.0044644475f, -0.00124332309f,
-    -0.0036123842f, 0.00440390408f, -0.00277084112f, -0.00297394395f, -0.00025421381f,
-    -0.00163814425f, 0.00137168169f, -0.00107714534f, -0.00186106563f, -3.89516354e-05f,
-    -0.000537350774f, -0.00016258657f, -0.000153005123f, -0.00109404325f, -4.529953e-06f,
-    -0.000132247806f, -0.000511392951f, 0.000211820006f, -0.000604182482f, -3.87430191e-07f,
-    -2.48998404e-05f, -0.000369518995f, 0.000264331698f, -0.000313460827f, -2.98023224e-08f,
-    -3.62098217e-06f, -0.0001770854f, 0.000195741653f, -0.000152766705f, 0.0336551964f,
-    -0.0134801567f, -0.0169071555f, -0.00620692968f, -0.00380787253f, 0.0222754478f,
-    -0.0079434216f, -0.0158321261f, -0.00623647869f, -0.0036907196f, 0.0f, 0.00251147151f,
-    -0.0124929398f, -0.00625212491f, -0.00336042047f, -0.0136578083f, 0.00752823055f,
-    -0.00716131926f, -0.00608444214f, -0.00287434459f, -0.013664186f, 0.00473617017f,
-    -0.00130210817f, -0.00558176637f, -0.00230959058f, -0.00776320696f, -0.000325337052f,
-    0.00295975804f, -0.0047134757f, -0.00174337626f, -0.00299099088f, -0.00278230011f,
-    0.00440390408f, -0.00359749794f, -0.00123623013f, -0.000828236341f, -0.00245176256f,
-    0.00353635848f, -0.00244165957f, -0.000823497772f, -0.000169336796f, -0.00128133595f,
-    0.0018504411f, -0.00144506991f, -0.000515341759f, -2.59578228e-05f, -0.000467762351f,
-    0.000540047884f, -0.000721782446f, -0.000302940607f, -3.01003456e-06f, -0.000126197934f,
-    -5.93215227e-05f, -0.000282168388f, -0.000167310238f, -2.68220901e-07f, -2.58386135e-05f,
-    -0.000176668167f, -6.4522028e-05f, -8.67843628e-05f, -2.98023224e-08f, -4.08291817e-06f,
-    -0.000119954348f, 1.59144402e-05f, -4.22894955e-05f, 0.021060884f, -0.0116117895f,
-    -0.00715360045f, -0.00156539679f, -0.000778615475f, 0.0139396191f, -0.00769715011f,
-    -0.00716426969f, -0.00162403286f, -0.000754654408f, 0.0f, 0.000230744481f, -0.00682358444f,
-    -0.00176784396f, -0.000687122345f, -0.00854682922f, 0.0051972121f, -0.00547720492f,
-    -0.00191541016f, -0.0005877316f, -0.00855085254f, 0.00455412269f, -0.00306557119f,
-    -0.0019737184f, -0.000472247601f, -0.00485807657f, 0.0012306273f, -0.000420972705f,
-    -0.00188069046f, -0.000356465578f, -0.00187173486f, -0.00108160079f, 0.00137168169f,
-    -0.00163140893f, -0.000252783298f, -0.000518292189f, -0.00145104527f, 0.0018504411f,
-    -0.00127606094f, -0.000168383121f, -0.000105977058f, -0.000896796584f, 0.00138792396f,
-    -0.000893086195f, -0.000105381012f, -1.62422657e-05f, -0.000367477536f, 0.00068128109f,
-    -0.000554352999f, -6.19590282e-05f, -1.87754631e-06f, -0.000109121203f, 0.000186726451f,
-    -0.000301226974f, -3.42130661e-05f, -1.78813934e-07f, -2.43633986e-05f, -1.92523003e-05f,
-    -0.000140011311f, -1.77621841e-05f, 0.0f, -4.17232513e-06f, -5.38825989e-05f,
-    -5.29587269e-05f, -8.64267349e-06f, 0.012381047f, -0.00790917873f, -0.00247091055f,
-    -0.000303775072f, -0.000119328499f, 0.00819468498f, -0.00565949082f, -0.00265732408f,
-    -0.000326469541f, -0.000115662813f, 0.0f, -0.000805109739f, -0.00300329924f,
-    -0.000386759639f, -0.000105321407f, -0.00502443314f, 0.00285439193f, -0.00303941965f,
-    -0.000463455915f, -9.00924206e-05f, -0.00502678752f, 0.00326174498f, -0.00243608654f,
-    -0.000528618693f, -7.23898411e-05f, -0.00285592675f, 0.00151333213f, -0.00131200254f,
-    -0.000557020307f, -5.46276569e-05f, -0.00110033154f, -0.000153645873f, -0.00016258657f,
-    -0.000535145402f, -3.87430191e-05f, -0.000304698944f, -0.000724777579f, 0.000540047884f,
-    -0.000465840101f, -2.58088112e-05f, -6.22868538e-05f, -0.000556647778f, 0.00068128109f,
-    -0.000365972519f, -1.61528587e-05f, -9.53674316e-06f, -0.000259593129f, 0.000479742885f,
-    -0.000258520246f, -9.50694084e-06f, -1.10268593e-06f, -8.53389502e-05f, 0.000221192837f,
-    -0.000163465738f, -5.24520874e-06f, -8.94069672e-08f, -2.08318233e-05f, 5.69522381e-05f,
-    -9.19103622e-05f, -2.71201134e-06f, 0.0f, -3.87430191e-06f, -5.51342964e-06f,
-    -4.54932451e-05f, -1.31130219e-06f, 0.00683745742f, -0.004555583f, -0.000705778599f,
-    -4.58061695e-05f, -1.38282776e-05f, 0.00452554226f, -0.00347703695f, -0.000818267465f,
-    -5.11556864e-05f, -1.34110451e-05f, 0.0f, -0.00098477304f, -0.00108329952f,
-    -6.60419464e-05f, -1.22189522e-05f, -0.00277474523f, 0.00123119354f, -0.00131475925f,
-    -8.70078802e-05f, -1.04606152e-05f, -0.00277605653f, 0.00190189481f, -0.00131337345f,
-    -0.000108778477f, -8.40425491e-06f, -0.00157719851f, 0.0011959523f, -0.00100545585f,
-    -0.000125333667f, -6.34789467e-06f, -0.000607669353f, 0.000212699175f, -0.000511392951f,
-    -0.000131696463f, -4.50015068e-06f, -0.000168263912f, -0.00028334558f, -5.93215227e-05f,
-    -0.000125676394f, -2.98023224e-06f, -3.439188e-05f, -0.000302478671f, 0.000186726451f,
-    -0.000108674169f, -1.87754631e-06f, -5.27501106e-06f, -0.000164136291f, 0.000221192837f,
-    -8.49813223e-05f, -1.10268593e-06f, -6.2584877e-07f, -6.02304935e-05f, 0.000146314502f,
-    -5.9992075e-05f, -5.96046448e-07f, -5.96046448e-08f, -1.61379576e-05f, 6.33746386e-05f,
-    -3.81171703e-05f, -3.27825546e-07f, 0.0f, -3.2633543e-06f, 1.53332949e-05f,
-    -2.17109919e-05f, -1.49011612e-07f, 0.00354722142f, -0.00228312612f, -0.000168055296f,
-    -5.39422035e-06f, -1.22189522e-06f, 0.00234782696f, -0.00185146928f, -0.000210791826f,
-    -6.28829002e-06f, -1.1920929e-06f, 0.0f, -0.0007673949f, -0.00032350421f, -8.85128975e-06f,
-    -1.07288361e-06f, -0.00143951178f, 0.000372588634f, -0.000457882881f, -1.2755394e-05f,
-    -9.23871994e-07f, -0.00144019723f, 0.000923514366f, -0.000541165471f, -1.73598528e-05f,
-    -7.4505806e-07f, -0.000818222761f, 0.000746294856f, -0.000512570143f, -2.1725893e-05f,
-    -5.66244125e-07f, -0.000315248966f, 0.000265419483f, -0.000369518995f, -2.47955322e-05f,
-    -3.87430191e-07f, -8.72910023e-05f, -6.47902489e-05f, -0.000176668167f, -2.57343054e-05f,
-    -2.68220901e-07f, -1.78515911e-05f, -0.000140592456f, -1.92523003e-05f, -2.42590904e-05f,
-    -1.78813934e-07f, -2.74181366e-06f, -9.22828913e-05f, 5.69522381e-05f, -2.07424164e-05f,
-    -8.94069672e-08f, -3.27825546e-07f, -3.82661819e-05f, 6.33746386e-05f, -1.60783529e-05f,
-    -5.96046448e-08f, -2.98023224e-08f, -1.13248825e-05f, 3.9383769e-05f, -1.1280179e-05f,
-    -2.98023224e-08f, 0.0f, -2.50339508e-06f, 1.60187483e-05f, -7.13765621e-06f, 0.0f,
-    0.00172877312f, -0.00101059675f, -3.35276127e-05f, -5.06639481e-07f, -8.94069672e-08f,
-    0.00114423037f, -0.000869899988f, -4.56571579e-05f, -6.10947609e-07f, -8.94069672e-08f,
-    0.0f, -0.00047326088f, -8.05258751e-05f, -9.23871994e-07f, -5.96046448e-08f,
-    -0.000701576471f, 3.06069851e-05f, -0.000130668283f, -1.4603138e-06f, -5.96046448e-08f,
-    -0.000701904297f, 0.000370234251f, -0.000178188086f, -2.16066837e-06f, -5.96046448e-08f,
-    -0.000398784876f, 0.000387951732f, -0.000198826194f, -2.92062759e-06f, -2.98023224e-08f,
-    -0.000153630972f, 0.000196561217f, -0.0001770854f, -3.60608101e-06f, -2.98023224e-08f,
-    -4.25577164e-05f, 1.59740448e-05f, -0.000119954348f, -4.05311584e-06f, -2.98023224e-08f,
-    -8.70227814e-06f, -5.31673431e-05f, -5.38825989e-05f, -4.14252281e-06f, 0.0f,
-    -1.34110451e-06f, -4.56869602e-05f, -5.51342964e-06f, -3.85940075e-06f, 0.0f,
-    -1.49011612e-07f, -2.18003988e-05f, 1.53332949e-05f, -3.24845314e-06f, 0.0f, 0.0f,
-    -7.16745853e-06f, 1.60187483e-05f, -2.48849392e-06f, 0.0f, 0.0f, -1.74343586e-06f,
-    9.35792923e-06f, -1.7285347e-06f, 0.0f
+    0.230330527f, 0.230295897f, 0.230292082f, 0.230295897f, 0.230330527f, 0.152449429f,
+    0.162057877f, 0.186349243f, 0.212102622f, 0.223243922f, 0.0f, 0.0215548575f, 0.0842016339f,
+    0.164190024f, 0.203265905f, -0.0934717059f, -0.0779455304f, -0.0143128037f, 0.102986097f,
+    0.173862547f, -0.0935155153f, -0.0937878489f, -0.0660440326f, 0.046418339f, 0.139702499f,
+    -0.0531300604f, -0.0618553758f, -0.069457233f, 0.00630626082f, 0.105452955f, -0.0204699337f,
+    -0.0280376077f, -0.0484357178f, -0.014531225f, 0.0747773647f, -0.00566825271f,
+    -0.00933945179f, -0.0256857276f, -0.0201997161f, 0.0498124659f, -0.00115901232f,
+    -0.00235542655f, -0.0108679235f, -0.0174000561f, 0.0311718285f, -0.000177651644f,
+    -0.000457078218f, -0.00375384092f, -0.011851728f, 0.0183249712f, -2.05934048e-05f,
+    -6.89327717e-05f, -0.00107219815f, -0.00682643056f, 0.0101200044f, -1.81794167e-06f,
+    -8.13603401e-06f, -0.000255316496f, -0.0034212172f, 0.00525018573f, -1.1920929e-07f,
+    -7.4505806e-07f, -5.09619713e-05f, -0.00151434541f, 0.00255873799f, 0.223243922f,
+    0.212102622f, 0.186349243f, 0.162057877f, 0.152449429f, 0.14775905f, 0.150350869f,
+    0.152985796f, 0.150350869f, 0.14775905f, 0.0f, 0.0222106725f, 0.0741170645f, 0.119220942f,
+    0.134536147f, -0.0905958712f, -0.0704266131f, -0.00492934883f, 0.0786426365f, 0.115074873f,
+    -0.0906383395f, -0.087196812f, -0.050165832f, 0.0398644358f, 0.0924652517f, -0.0514954329f,
+    -0.058870241f, -0.057261318f, 0.0108525455f, 0.069796443f, -0.0198401213f, -0.0273742378f,
+    -0.0425548702f, -0.00577223301f, 0.0494930744f, -0.00549387932f, -0.00938387215f,
+    -0.0240525007f, -0.0119030476f, 0.0329695046f, -0.00112333894f, -0.00244367123f,
+    -0.0108841211f, -0.0115340203f, 0.0206317902f, -0.000172168016f, -0.000491246581f,
+    -0.00403706729f, -0.00848063827f, 0.0121288002f, -1.9967556e-05f, -7.69793987e-05f,
+    -0.00124312937f, -0.00521028042f, 0.00669816136f, -1.75833702e-06f, -9.46223736e-06f,
+    -0.000320240855f, -0.0027744025f, 0.00347495079f, -1.1920929e-07f, -9.23871994e-07f,
+    -6.93649054e-05f, -0.00130350888f, 0.00169354677f, 0.203265905f, 0.164190024f,
+    0.0842016339f, 0.0215548575f, 0.0f, 0.134536147f, 0.119220942f, 0.0741170645f,
+    0.0222106725f, 0.0f, 0.0f, 0.0233384371f, 0.0472747386f, 0.0233384371f, 0.0f,
+    -0.0824884772f, -0.0508937985f, 0.0135080963f, 0.0231321305f, 0.0f, -0.0825271606f,
+    -0.0695671439f, -0.0143930614f, 0.0203118324f, 0.0f, -0.0468871295f, -0.0505755395f,
+    -0.0278241783f, 0.015105933f, 0.0f, -0.0180646479f, -0.0253566951f, -0.0271021724f,
+    0.0090162158f, 0.0f, -0.00500223041f, -0.00940744579f, -0.0189795494f, 0.00376339257f, 0.0f,
+    -0.0010228157f, -0.00266005099f, -0.0103665441f, 0.000345781446f, 0.0f, -0.000156760216f,
+    -0.000581949949f, -0.00456266105f, -0.00120642781f, 0.0f, -1.81794167e-05f,
+    -9.93609428e-05f, -0.00164577365f, -0.00147567689f, 0.0f, -1.60932541e-06f,
+    -1.33216381e-05f, -0.000491470098f, -0.00114993751f, 0.0f, -1.1920929e-07f,
+    -1.40070915e-06f, -0.000122338533f, -0.000709176064f, 0.0f, 0.173862547f, 0.102986097f,
+    -0.0143128037f, -0.0779455304f, -0.0934717059f, 0.115074873f, 0.0786426365f,
+    -0.00492934883f, -0.0704266131f, -0.0905958712f, 0.0f, 0.0231321305f, 0.0135080963f,
+    -0.0508937985f, -0.0824884772f, -0.070556134f, -0.0267137438f, 0.0231045932f,
+    -0.0267137438f, -0.070556134f, -0.0705892146f, -0.0463287085f, 0.0168242306f,
+    -0.00568474829f, -0.0566934347f, -0.0401046872f, -0.0387775898f, 0.00261081755f,
+    0.00747469068f, -0.042794466f, -0.0154515207f, -0.0220018625f, -0.00810468197f,
+    0.0122868568f, -0.0303458273f, -0.00427863002f, -0.00915513933f, -0.0108796358f,
+    0.0112809092f, -0.0202146769f, -0.000874876976f, -0.00288206339f, -0.00832109153f,
+    0.00778791308f, -0.012650013f, -0.000134080648f, -0.000697344542f, -0.00461757183f,
+    0.00427724421f, -0.00743657351f, -1.55568123e-05f, -0.000130921602f, -0.00199741125f,
+    0.00184491277f, -0.00410684943f, -1.37090683e-06f, -1.91777945e-05f, -0.000695616007f,
+    0.000558301806f, -0.00213059783f, -8.94069672e-08f, -2.20537186e-06f, -0.000198513269f,
+    4.5850873e-05f, -0.00103837252f, 0.139702499f, 0.046418339f, -0.0660440326f, -0.0937878489f,
+    -0.0935155153f, 0.0924652517f, 0.0398644358f, -0.050165832f, -0.087196812f, -0.0906383395f,
+    0.0f, 0.0203118324f, -0.0143930614f, -0.0695671439f, -0.0825271606f, -0.0566934347f,
+    -0.00568474829f, 0.0168242306f, -0.0463287085f, -0.0705892146f, -0.0567200184f,
+    -0.0237815827f, 0.0275888443f, -0.0237815827f, -0.0567200184f, -0.0322250128f,
+    -0.0259221047f, 0.0201438814f, -0.00661897659f, -0.042814523f, -0.0124156475f,
+    -0.0175656676f, 0.00699129701f, 0.00337867439f, -0.030360043f, -0.00343796611f,
+    -0.00839875638f, -0.00197817385f, 0.00709705055f, -0.020224154f, -0.00070297718f,
+    -0.00296981633f, -0.00465726852f, 0.00682428479f, -0.0126559436f, -0.000107735395f,
+    -0.000795409083f, -0.0037009418f, 0.00488765538f, -0.00744006038f, -1.24871731e-05f,
+    -0.000163674355f, -0.00199529529f, 0.00284993649f, -0.00410878658f, -1.10268593e-06f,
+    -2.61217356e-05f, -0.000822156668f, 0.00138388574f, -0.00213161111f, -5.96046448e-08f,
+    -3.2633543e-06f, -0.000270694494f, 0.000554770231f, -0.00103884935f, 0.105452955f,
+    0.00630626082f, -0.069457233f, -0.0618553758f, -0.0531300604f, 0.069796443f, 0.0108525455f,
+    -0.057261318f, -0.058870241f, -0.0514954329f, 0.0f, 0.015105933f, -0.0278241783f,
+    -0.0505755395f, -0.0468871295f, -0.042794466f, 0.00747469068f, 0.00261081755f,
+    -0.0387775898f, -0.0401046872f, -0.042814523f, -0.00661897659f, 0.0201438814f,
+    -0.0259221047f, -0.0322250128f, -0.0243247151f, -0.0143729001f, 0.021578297f,
+    -0.0143729001f, -0.0243247151f, -0.00937181711f, -0.0126264542f, 0.0134564042f,
+    -0.00573047996f, -0.0172488093f, -0.00259512663f, -0.00709226727f, 0.0044965297f,
+    -0.000487521291f, -0.011490196f, -0.00053063035f, -0.00282981992f, -0.000639542937f,
+    0.0018440932f, -0.00719037652f, -8.13305378e-05f, -0.000838145614f, -0.00199320912f,
+    0.00226770341f, -0.0042270124f, -9.41753387e-06f, -0.000188589096f, -0.00152751803f,
+    0.00179213285f, -0.00233438611f, -8.34465027e-07f, -3.26931477e-05f, -0.000778704882f,
+    0.00111828744f, -0.00121104717f, -5.96046448e-08f, -4.39584255e-06f, -0.000302061439f,
+    0.000581339002f, -0.000590234995f, 0.0747773647f, -0.014531225f, -0.0484357178f,
+    -0.0280376077f, -0.0204699337f, 0.0494930744f, -0.00577223301f, -0.0425548702f,
+    -0.0273742378f, -0.0198401213f, 0.0f, 0.0090162158f, -0.0271021724f, -0.0253566951f,
+    -0.0180646479f, -0.0303458273f, 0.0122868568f, -0.00810468197f, -0.0220018625f,
+    -0.0154515207f, -0.030360043f, 0.00337867439f, 0.00699129701f, -0.0175656676f,
+    -0.0124156475f, -0.0172488093f, -0.00573047996f, 0.0134564042f, -0.0126264542f,
+    -0.00937181711f, -0.00664561987f, -0.00794297457f, 0.0118946135f, -0.00794297457f,
+    -0.00664561987f, -0.001840204f, -0.00541308522f, 0.00669050217f, -0.00416922569f,
+    -0.00442692637f, -0.000376284122f, -0.00245474279f, 0.00208389759f, -0.0016207546f,
+    -0.00277030468f, -5.76674938e-05f, -0.000805214047f, -0.000247001648f, -0.00023022294f,
+    -0.00162857771f, -6.67572021e-06f, -0.000198170543f, -0.000776916742f, 0.000318720937f,
+    -0.000899374485f, -5.96046448e-07f, -3.73125076e-05f, -0.000561386347f, 0.000397726893f,
+    -0.000466585159f, -2.98023224e-08f, -5.43892384e-06f, -0.000269040465f, 0.000294536352f,
+    -0.00022739172f, 0.0498124659f, -0.0201997161f, -0.0256857276f, -0.00933945179f,
+    -0.00566825271f, 0.0329695046f, -0.0119030476f, -0.0240525007f, -0.00938387215f,
+    -0.00549387932f, 0.0f, 0.00376339257f, -0.0189795494f, -0.00940744579f, -0.00500223041f,
+    -0.0202146769f, 0.0112809092f, -0.0108796358f, -0.00915513933f, -0.00427863002f,
+    -0.020224154f, 0.00709705055f, -0.00197817385f, -0.00839875638f, -0.00343796611f,
+    -0.011490196f, -0.000487521291f, 0.0044965297f, -0.00709226727f, -0.00259512663f,
+    -0.00442692637f, -0.00416922569f, 0.00669050217f, -0.00541308522f, -0.001840204f,
+    -0.00122585893f, -0.00367391109f, 0.00537250936f, -0.00367391109f, -0.00122585893f,
+    -0.000250667334f, -0.00192007422f, 0.00281123817f, -0.00217436254f, -0.000767111778f,
+    -3.84151936e-05f, -0.000700950623f, 0.000820457935f, -0.00108607113f, -0.000450968742f,
+    -4.44054604e-06f, -0.000189095736f, -9.01371241e-05f, -0.000424578786f, -0.000249058008f,
+    -3.87430191e-07f, -3.87132168e-05f, -0.000268384814f, -9.70810652e-05f, -0.000129193068f,
+    -2.98023224e-08f, -6.10947609e-06f, -0.000182241201f, 2.39312649e-05f, -6.29723072e-05f,
+    0.0311718285f, -0.0174000561f, -0.0108679235f, -0.00235542655f, -0.00115901232f,
+    0.0206317902f, -0.0115340203f, -0.0108841211f, -0.00244367123f, -0.00112333894f, 0.0f,
+    0.000345781446f, -0.0103665441f, -0.00266005099f, -0.0010228157f, -0.012650013f,
+    0.00778791308f, -0.00832109153f, -0.00288206339f, -0.000874876976f, -0.0126559436f,
+    0.00682428479f, -0.00465726852f, -0.00296981633f, -0.00070297718f, -0.00719037652f,
+    0.0018440932f, -0.000639542937f, -0.00282981992f, -0.00053063035f, -0.00277030468f,
+    -0.0016207546f, 0.00208389759f, -0.00245474279f, -0.000376284122f, -0.000767111778f,
+    -0.00217436254f, 0.00281123817f, -0.00192007422f, -0.000250667334f, -0.000156849623f,
+    -0.00134381652f, 0.00210857391f, -0.00134381652f, -0.000156849623f, -2.40504742e-05f,
+    -0.000550672412f, 0.00103501976f, -0.000834137201f, -9.22083855e-05f, -2.8014183e-06f,
+    -0.000163510442f, 0.000283673406f, -0.000453263521f, -5.0932169e-05f, -2.38418579e-07f,
+    -3.64929438e-05f, -2.92509794e-05f, -0.000210672617f, -2.64048576e-05f, -2.98023224e-08f,
+    -6.24358654e-06f, -8.18520784e-05f, -7.96914101e-05f, -1.28746033e-05f, 0.0183249712f,
+    -0.011851728f, -0.00375384092f, -0.000457078218f, -0.000177651644f, 0.0121288002f,
+    -0.00848063827f, -0.00403706729f, -0.000491246581f, -0.000172168016f, 0.0f, -0.00120642781f,
+    -0.00456266105f, -0.000581949949f, -0.000156760216f, -0.00743657351f, 0.00427724421f,
+    -0.00461757183f, -0.000697344542f, -0.000134080648f, -0.00744006038f, 0.00488765538f,
+    -0.0037009418f, -0.000795409083f, -0.000107735395f, -0.0042270124f, 0.00226770341f,
+    -0.00199320912f, -0.000838145614f, -8.13305378e-05f, -0.00162857771f, -0.00023022294f,
+    -0.000247001648f, -0.000805214047f, -5.76674938e-05f, -0.000450968742f, -0.00108607113f,
+    0.000820457935f, -0.000700950623f, -3.84151936e-05f, -9.22083855e-05f, -0.000834137201f,
+    0.00103501976f, -0.000550672412f, -2.40504742e-05f, -1.41263008e-05f, -0.000388994813f,
+    0.000728845596f, -0.000388994813f, -1.41263008e-05f, -1.63912773e-06f, -0.000127866864f,
+    0.000336036086f, -0.000245943666f, -7.80820847e-06f, -1.49011612e-07f, -3.12179327e-05f,
+    8.65161419e-05f, -0.000138282776f, -4.05311584e-06f, 0.0f, -5.7965517e-06f,
+    -8.37445259e-06f, -6.84559345e-05f, -1.96695328e-06f, 0.0101200044f, -0.00682643056f,
+    -0.00107219815f, -6.89327717e-05f, -2.05934048e-05f, 0.00669816136f, -0.00521028042f,
+    -0.00124312937f, -7.69793987e-05f, -1.9967556e-05f, 0.0f, -0.00147567689f, -0.00164577365f,
+    -9.93609428e-05f, -1.81794167e-05f, -0.00410684943f, 0.00184491277f, -0.00199741125f,
+    -0.000130921602f, -1.55568123e-05f, -0.00410878658f, 0.00284993649f, -0.00199529529f,
+    -0.000163674355f, -1.24871731e-05f, -0.00233438611f, 0.00179213285f, -0.00152751803f,
+    -0.000188589096f, -9.41753387e-06f, -0.000899374485f, 0.000318720937f, -0.000776916742f,
+    -0.000198170543f, -6.67572021e-06f, -0.000249058008f, -0.000424578786f, -9.01371241e-05f,
+    -0.000189095736f, -4.44054604e-06f, -5.0932169e-05f, -0.000453263521f, 0.000283673406f,
+    -0.000163510442f, -2.8014183e-06f, -7.80820847e-06f, -0.000245943666f, 0.000336036086f,
+    -0.000127866864f, -1.63912773e-06f, -8.94069672e-07f, -9.02563334e-05f, 0.000222280622f,
+    -9.02563334e-05f, -8.94069672e-07f, -8.94069672e-08f, -2.41845846e-05f, 9.62764025e-05f,
+    -5.73396683e-05f, -4.76837158e-07f, 0.0f, -4.88758087e-06f, 2.32905149e-05f,
+    -3.26633453e-05f, -2.38418579e-07f, 0.00525018573f, -0.0034212172f, -0.000255316496f,
+    -8.13603401e-06f, -1.81794167e-06f, 0.00347495079f, -0.0027744025f, -0.000320240855f,
+    -9.46223736e-06f, -1.75833702e-06f, 0.0f, -0.00114993751f, -0.000491470098f,
+    -1.33216381e-05f, -1.60932541e-06f, -0.00213059783f, 0.000558301806f, -0.000695616007f,
+    -1.91777945e-05f, -1.37090683e-06f, -0.00213161111f, 0.00138388574f, -0.000822156668f,
+    -2.61217356e-05f, -1.10268593e-06f, -0.00121104717f, 0.00111828744f, -0.000778704882f,
+    -3.26931477e-05f, -8.34465027e-07f, -0.000466585159f, 0.000397726893f, -0.000561386347f,
+    -3.73125076e-05f, -5.96046448e-07f, -0.000129193068f, -9.70810652e-05f, -0.000268384814f,
+    -3.87132168e-05f, -3.87430191e-07f, -2.64048576e-05f, -0.000210672617f, -2.92509794e-05f,
+    -3.64929438e-05f, -2.38418579e-07f, -4.05311584e-06f, -0.000138282776f, 8.65161419e-05f,
+    -3.12179327e-05f, -1.49011612e-07f, -4.76837158e-07f, -5.73396683e-05f, 9.62764025e-05f,
+    -2.41845846e-05f, -8.94069672e-08f, -2.98023224e-08f, -1.69724226e-05f, 5.98281622e-05f,
+    -1.69724226e-05f, -2.98023224e-08f, 0.0f, -3.75509262e-06f, 2.43484974e-05f,
+    -1.07437372e-05f, -2.98023224e-08f, 0.00255873799f, -0.00151434541f, -5.09619713e-05f,
+    -7.4505806e-07f, -1.1920929e-07f, 0.00169354677f, -0.00130350888f, -6.93649054e-05f,
+    -9.23871994e-07f, -1.1920929e-07f, 0.0f, -0.000709176064f, -0.000122338533f,
+    -1.40070915e-06f, -1.1920929e-07f, -0.00103837252f, 4.5850873e-05f, -0.000198513269f,
+    -2.20537186e-06f, -8.94069672e-08f, -0.00103884935f, 0.000554770231f, -0.000270694494f,
+    -3.2633543e-06f, -5.96046448e-08f, -0.000590234995f, 0.000581339002f, -0.000302061439f,
+    -4.39584255e-06f, -5.96046448e-08f, -0.00022739172f, 0.000294536352f, -0.000269040465f,
+    -5.43892384e-06f, -2.98023224e-08f, -6.29723072e-05f, 2.39312649e-05f, -0.000182241201f,
+    -6.10947609e-06f, -2.98023224e-08f, -1.28746033e-05f, -7.96914101e-05f, -8.18520784e-05f,
+    -6.24358654e-06f, -2.98023224e-08f, -1.96695328e-06f, -6.84559345e-05f, -8.37445259e-06f,
+    -5.7965517e-06f, 0.0f, -2.38418579e-07f, -3.26633453e-05f, 2.32905149e-05f,
+    -4.88758087e-06f, 0.0f, -2.98023224e-08f, -1.07437372e-05f, 2.43484974e-05f,
+    -3.75509262e-06f, 0.0f, 0.0f, -2.60770321e-06f, 1.42157078e-05f, -2.60770321e-06f, 0.0f
 };
 
 /* 3 x 12 x 12 coefficients, odd in y, odd in x */
 static const float tessary_features_group1_taps[432] = {
-    -0.0298391283f, -0.0417013615f, -0.0297162086f, -0.0349637419f, -0.0594617426f,
-    -0.0505510867f, -0.0188539922f, -0.0491929203f, -0.0577836633f, -0.00184556842f,
-    -0.025683552f, -0.0524219871f, 0.00494155288f, -0.00588619709f, -0.0395730883f,
-    0.004277125f, 0.00341117382f, -0.0251919478f, 0.00201119483f, 0.00475239754f,
-    -0.0134327114f, 0.000645175576f, 0.00309044123f, -0.00579710305f, 0.000151187181f,
-    0.00141867995f, -0.00180612504f, 2.67028809e-05f, 0.000504299998f, -0.000186160207f,
-    3.60608101e-06f, 0.000144094229f, 0.000245541334f, 3.7252903e-07f, 3.37362289e-05f,
-    0.00023779273f, -0.0507602096f, -0.0594617426f, -0.0348197073f, -0.0602422059f,
-    -0.0869372338f, -0.0599940121f, -0.0334913582f, -0.0754121095f, -0.0700834692f,
-    -0.00422205031f, -0.043090418f, -0.0656160563f, 0.0081346184f, -0.0132719874f,
-    -0.0517081469f, 0.00747291744f, 0.00269533694f, -0.0348763317f, 0.00364935398f,
-    0.00656555593f, -0.0201491416f, 0.00121369958f, 0.00490511954f, -0.00982579589f,
-    0.000295296311f, 0.0024856627f, -0.00387020409f, 5.42700291e-05f, 0.000966235995f,
-    -0.00106450915f, 7.65919685e-06f, 0.000301241875f, -4.3168664e-05f, 8.49366188e-07f,
-    7.69495964e-05f, 0.000183224678f, -0.0580226928f, -0.0491929203f, -0.0187763274f,
-    -0.0703733861f, -0.0754121095f, -0.0333533883f, -0.0411289483f, -0.0711626858f,
-    -0.0409595221f, -0.00705617666f, -0.0468667001f, -0.0410718769f, 0.00868475437f,
-    -0.0199858993f, -0.0353032053f, 0.00890888274f, -0.00227616727f, -0.0264778584f,
-    0.00463452935f, 0.00453907251f, -0.0174140036f, 0.00163254142f, 0.00472407043f,
-    -0.0100110024f, 0.000420749187f, 0.00285813212f, -0.00497078896f, 8.200109e-05f,
-    0.00127804279f, -0.00207331777f, 1.2293458e-05f, 0.000451594591f, -0.000676557422f,
-    1.44541264e-06f, 0.000129774213f, -0.000130400062f, -0.0526388437f, -0.025683552f,
-    -0.00183796883f, -0.0658875108f, -0.043090418f, -0.00420466065f, -0.0412417948f,
-    -0.0468667001f, -0.0070271045f, -0.00960001349f, -0.0376053602f, -0.00956046581f,
-    0.00688621402f, -0.0218836218f, -0.0108894855f, 0.00852522254f, -0.00776490569f,
-    -0.0105516464f, 0.00485299528f, 0.000335052609f, -0.00879390538f, 0.00184488297f,
-    0.00281776488f, -0.00634679198f, 0.000511318445f, 0.00238265097f, -0.00397768617f,
-    0.000107049942f, 0.00130365789f, -0.00216051936f, 1.72406435e-05f, 0.000539675355f,
-    -0.00100812316f, 2.16066837e-06f, 0.000177979469f, -0.000395357609f, -0.0397367924f,
-    -0.00588619709f, 0.00492119789f, -0.0519220531f, -0.0132719874f, 0.00810110569f,
-    -0.0354492217f, -0.0199858993f, 0.00864897668f, -0.0109345317f, -0.0218836218f,
-    0.00685784221f, 0.003889516f, -0.0175705254f, 0.00387351215f, 0.00682024658f,
-    -0.00995323062f, 0.000992208719f, 0.00438468158f, -0.00325867534f, -0.00094242394f,
-    0.00182972848f, 0.000352367759f, -0.00174248219f, 0.000551581383f, 0.0012987107f,
-    -0.00169876218f, 0.000125050545f, 0.00100328028f, -0.00125564635f, 2.17556953e-05f,
-    0.00051227212f, -0.000763013959f, 2.93552876e-06f, 0.000198796391f, -0.000391870737f,
-    -0.0252961516f, 0.00341117382f, 0.00425951183f, -0.0350206196f, 0.00269533694f,
-    0.00744213164f, -0.0265873969f, -0.00227616727f, 0.00887218118f, -0.0105952919f,
-    -0.00776490569f, 0.0084901005f, 0.000996306539f, -0.00995323062f, 0.00679215789f,
-    0.00456823409f, -0.00814759731f, 0.00454942882f, 0.00346563756f, -0.00448162854f,
-    0.00246855617f, 0.00161522627f, -0.00138771534f, 0.000963240862f, 0.000534549356f,
-    0.000159785151f, 0.000113964081f, 0.000131979585f, 0.000510975718f, -0.000224009156f,
-    2.4870038e-05f, 0.000369459391f, -0.000267788768f, 3.62098217e-06f, 0.0001770854f,
-    -0.000196635723f, -0.0134882629f, 0.00475239754f, 0.00200290978f, -0.0202324688f,
-    0.00656555593f, 0.00363431871f, -0.0174860507f, 0.00453907251f, 0.00461542606f,
-    -0.00883029401f, 0.000335052609f, 0.00483301282f, -0.000946328044f, -0.00325867534f,
-    0.00436660647f, 0.00247876346f, -0.00448162854f, 0.00345134735f, 0.00239549577f,
-    -0.0035534054f, 0.0023856312f, 0.00127319992f, -0.00185360014f, 0.00142551959f,
-    0.000466838479f, -0.000540554523f, 0.000715583563f, 0.000126108527f, 5.92619181e-05f,
-    0.000280380249f, 2.58386135e-05f, 0.000176668167f, 6.40451908e-05f, 4.08291817e-06f,
-    0.000119954348f, -1.60336494e-05f, -0.00582109392f, 0.00309044123f, 0.00064252317f,
-    -0.00986643136f, 0.00490511954f, 0.00120869279f, -0.0100524276f, 0.00472407043f,
-    0.00162582099f, -0.00637304783f, 0.00281776488f, 0.00183728337f, -0.00174969435f,
-    0.000352367759f, 0.0018221885f, 0.000967219472f, -0.00138771534f, 0.00160858035f,
-    0.00143140554f, -0.00185360014f, 0.00126795471f, 0.000894144177f, -0.0013884604f,
-    0.000890463591f, 0.000367209315f, -0.000681370497f, 0.000553578138f, 0.000109091401f,
-    -0.000186726451f, 0.000301018357f, 2.43633986e-05f, 1.92523003e-05f, 0.000139951706f,
-    4.17232513e-06f, 5.38825989e-05f, 5.29587269e-05f, -0.00181359053f, 0.00141867995f,
-    0.000150576234f, -0.00388622284f, 0.0024856627f, 0.000294074416f, -0.00499133766f,
-    0.00285813212f, 0.000419020653f, -0.00399413705f, 0.00238265097f, 0.000509217381f,
-    -0.00170579553f, 0.0012987107f, 0.000549301505f, 0.000114426017f, 0.000159785151f,
-    0.000532343984f, 0.000718548894f, -0.000540554523f, 0.000464916229f, 0.000555872917f,
-    -0.000681370497f, 0.000365704298f, 0.000259503722f, -0.000479742885f, 0.000258430839f,
-    8.53389502e-05f, -0.000221192837f, 0.000163435936f, 2.08318233e-05f, -5.69522381e-05f,
-    9.19103622e-05f, 3.87430191e-06f, 5.51342964e-06f, 4.54932451e-05f, -0.000186920166f,
-    0.000504299998f, 2.65985727e-05f, -0.001068905f, 0.000966235995f, 5.40316105e-05f,
-    -0.00208190084f, 0.00127804279f, 8.16732645e-05f, -0.00216946006f, 0.00130365789f,
-    0.000106602907f, -0.00126083195f, 0.00100328028f, 0.000124529004f, -0.000224918127f,
-    0.000510975718f, 0.000131428242f, 0.000281527638f, 5.92619181e-05f, 0.000125586987f,
-    0.000302270055f, -0.000186726451f, 0.000108644366f, 0.000164106488f, -0.000221192837f,
-    8.49813223e-05f, 6.02304935e-05f, -0.000146314502f, 5.9992075e-05f, 1.61379576e-05f,
-    -6.33746386e-05f, 3.81171703e-05f, 3.2633543e-06f, -1.53332949e-05f, 2.17109919e-05f,
-    0.000246554613f, 0.000144094229f, 3.60608101e-06f, -4.33474779e-05f, 0.000301241875f,
-    7.62939453e-06f, -0.000679343939f, 0.000451594591f, 1.22487545e-05f, -0.00101229548f,
-    0.000539675355f, 1.71810389e-05f, -0.000766173005f, 0.00051227212f, 2.16662884e-05f,
-    -0.000268906355f, 0.000369459391f, 2.47657299e-05f, 6.43134117e-05f, 0.000176668167f,
-    2.57343054e-05f, 0.000140532851f, 1.92523003e-05f, 2.42590904e-05f, 9.22828913e-05f,
-    -5.69522381e-05f, 2.07424164e-05f, 3.82661819e-05f, -6.33746386e-05f, 1.60783529e-05f,
-    1.13248825e-05f, -3.9383769e-05f, 1.1280179e-05f, 2.50339508e-06f, -1.60187483e-05f,
-    7.13765621e-06f, 0.000238776207f, 3.37362289e-05f, 3.7252903e-07f, 0.000183969736f,
-    7.69495964e-05f, 8.34465027e-07f, -0.000130921602f, 0.000129774213f, 1.43051147e-06f,
-    -0.000396996737f, 0.000177979469f, 2.16066837e-06f, -0.000393494964f, 0.000198796391f,
-    2.92062759e-06f, -0.000197455287f, 0.0001770854f, 3.60608101e-06f, -1.60932541e-05f,
-    0.000119954348f, 4.05311584e-06f, 5.31673431e-05f, 5.38825989e-05f, 4.14252281e-06f,
-    4.56869602e-05f, 5.51342964e-06f, 3.85940075e-06f, 2.18003988e-05f, -1.53332949e-05f,
-    3.24845314e-06f, 7.16745853e-06f, -1.60187483e-05f, 2.48849392e-06f, 1.74343586e-06f,
-    -9.35792923e-06f, 1.7285347e-06f
+    -0.0447133183f, -0.063353613f, -0.0447133183f, -0.0523924679f, -0.0903355777f,
+    -0.0760631263f, -0.0282523334f, -0.0747349709f, -0.0869458318f, -0.00276555121f,
+    -0.0390190184f, -0.0788782388f, 0.00740481913f, -0.00894245505f, -0.0595447719f,
+    0.00640919805f, 0.00518234074f, -0.0379057825f, 0.00301374495f, 0.00721994042f,
+    -0.0202119052f, 0.000966787338f, 0.00469507277f, -0.00872279704f, 0.000226572156f,
+    0.00215528905f, -0.00271764398f, 3.99947166e-05f, 0.000766173005f, -0.000280112028f,
+    5.40912151e-06f, 0.000218912959f, 0.000369474292f, 5.66244125e-07f, 5.12450933e-05f,
+    0.000357791781f, -0.0760631263f, -0.0903355777f, -0.0523924679f, -0.0902717113f,
+    -0.132076949f, -0.0902717113f, -0.0501861125f, -0.114567742f, -0.105453089f,
+    -0.00632667542f, -0.0654639304f, -0.0987310708f, 0.0121895522f, -0.0201631039f,
+    -0.0778041482f, 0.0111980289f, 0.00409480929f, -0.0524776578f, 0.00546847284f,
+    0.00997453928f, -0.0303179473f, 0.00181870162f, 0.0074519664f, -0.014784649f,
+    0.000442504883f, 0.00377626717f, -0.0058234334f, 8.13007355e-05f, 0.00146794319f,
+    -0.00160174072f, 1.14738941e-05f, 0.000457644463f, -6.49541616e-05f, 1.25169754e-06f,
+    0.000116914511f, 0.000275701284f, -0.0869458318f, -0.0747349709f, -0.0282523334f,
+    -0.105453089f, -0.114567742f, -0.0501861125f, -0.0616308898f, -0.108111903f, -0.0616308898f,
+    -0.0105735213f, -0.0712009221f, -0.0617999882f, 0.0130139291f, -0.0303630084f,
+    -0.0531199574f, 0.0133498013f, -0.00345799327f, -0.0398406833f, 0.00694473088f,
+    0.00689586997f, -0.026202485f, 0.00244632363f, 0.00717692077f, -0.0150633454f,
+    0.00063046813f, 0.00434213877f, -0.00747941434f, 0.000122874975f, 0.0019416213f,
+    -0.00311967731f, 1.84327364e-05f, 0.000686079264f, -0.00101800263f, 2.14576721e-06f,
+    0.000197142363f, -0.000196203589f, -0.0788782388f, -0.0390190184f, -0.00276555121f,
+    -0.0987310708f, -0.0654639304f, -0.00632667542f, -0.0617999882f, -0.0712009221f,
+    -0.0105735213f, -0.0143854171f, -0.057130903f, -0.0143854171f, 0.0103188604f, -0.033246085f,
+    -0.0163851678f, 0.0127748847f, -0.0117966235f, -0.0158768445f, 0.00727210939f,
+    0.000509008765f, -0.0132320076f, 0.00276453793f, 0.00428080559f, -0.00954988599f,
+    0.000766202807f, 0.00361979008f, -0.0059851259f, 0.000160425901f, 0.00198054314f,
+    -0.00325089693f, 2.58237123e-05f, 0.000819891691f, -0.00151689351f, 3.23355198e-06f,
+    0.000270396471f, -0.000594884157f, -0.0595447719f, -0.00894245505f, 0.00740481913f,
+    -0.0778041482f, -0.0201631039f, 0.0121895522f, -0.0531199574f, -0.0303630084f,
+    0.0130139291f, -0.0163851678f, -0.033246085f, 0.0103188604f, 0.00582836568f, -0.0266935378f,
+    0.00582836568f, 0.0102200061f, -0.0151211917f, 0.00149294734f, 0.0065703392f,
+    -0.00495062768f, -0.0014180392f, 0.00274181366f, 0.000535324216f, -0.00262187421f,
+    0.000826522708f, 0.00197303295f, -0.00255610049f, 0.000187397003f, 0.00152420998f,
+    -0.00188931823f, 3.26037407e-05f, 0.000778257847f, -0.00114808977f, 4.39584255e-06f,
+    0.000302001834f, -0.00058965385f, -0.0379057825f, 0.00518234074f, 0.00640919805f,
+    -0.0524776578f, 0.00409480929f, 0.0111980289f, -0.0398406833f, -0.00345799327f,
+    0.0133498013f, -0.0158768445f, -0.0117966235f, 0.0127748847f, 0.00149294734f,
+    -0.0151211917f, 0.0102200061f, 0.00684541464f, -0.0123780072f, 0.00684541464f,
+    0.00519317389f, -0.00680857897f, 0.00371438265f, 0.00242038071f, -0.00210824609f,
+    0.00144936144f, 0.00080101192f, 0.000242769718f, 0.000171482563f, 0.00019775331f,
+    0.000776290894f, -0.000337049365f, 3.72827053e-05f, 0.00056129694f, -0.0004029423f,
+    5.43892384e-06f, 0.000269040465f, -0.000295877457f, -0.0202119052f, 0.00721994042f,
+    0.00301374495f, -0.0303179473f, 0.00997453928f, 0.00546847284f, -0.026202485f,
+    0.00689586997f, 0.00694473088f, -0.0132320076f, 0.000509008765f, 0.00727210939f,
+    -0.0014180392f, -0.00495062768f, 0.0065703392f, 0.00371438265f, -0.00680857897f,
+    0.00519317389f, 0.00358960032f, -0.00539840758f, 0.00358960032f, 0.00190785527f,
+    -0.00281603634f, 0.00214494765f, 0.000699549913f, -0.000821202993f, 0.0010767132f,
+    0.000188976526f, 9.00477171e-05f, 0.000421866775f, 3.87132168e-05f, 0.000268384814f,
+    9.63658094e-05f, 6.10947609e-06f, 0.000182241201f, -2.41100788e-05f, -0.00872279704f,
+    0.00469507277f, 0.000966787338f, -0.014784649f, 0.0074519664f, 0.00181870162f,
+    -0.0150633454f, 0.00717692077f, 0.00244632363f, -0.00954988599f, 0.00428080559f,
+    0.00276453793f, -0.00262187421f, 0.000535324216f, 0.00274181366f, 0.00144936144f,
+    -0.00210824609f, 0.00242038071f, 0.00214494765f, -0.00281603634f, 0.00190785527f,
+    0.00133985281f, -0.00210937858f, 0.00133985281f, 0.000550255179f, -0.00103513896f,
+    0.000832974911f, 0.000163480639f, -0.000283673406f, 0.000452935696f, 3.64929438e-05f,
+    2.92509794e-05f, 0.00021058321f, 6.24358654e-06f, 8.18520784e-05f, 7.96616077e-05f,
+    -0.00271764398f, 0.00215528905f, 0.000226572156f, -0.0058234334f, 0.00377626717f,
+    0.000442504883f, -0.00747941434f, 0.00434213877f, 0.00063046813f, -0.0059851259f,
+    0.00361979008f, 0.000766202807f, -0.00255610049f, 0.00197303295f, 0.000826522708f,
+    0.000171482563f, 0.000242769718f, 0.00080101192f, 0.0010767132f, -0.000821202993f,
+    0.000699549913f, 0.000832974911f, -0.00103513896f, 0.000550255179f, 0.000388875604f,
+    -0.000728845596f, 0.000388875604f, 0.000127866864f, -0.000336036086f, 0.000245913863f,
+    3.12179327e-05f, -8.65161419e-05f, 0.000138282776f, 5.7965517e-06f, 8.37445259e-06f,
+    6.84559345e-05f, -0.000280112028f, 0.000766173005f, 3.99947166e-05f, -0.00160174072f,
+    0.00146794319f, 8.13007355e-05f, -0.00311967731f, 0.0019416213f, 0.000122874975f,
+    -0.00325089693f, 0.00198054314f, 0.000160425901f, -0.00188931823f, 0.00152420998f,
+    0.000187397003f, -0.000337049365f, 0.000776290894f, 0.00019775331f, 0.000421866775f,
+    9.00477171e-05f, 0.000188976526f, 0.000452935696f, -0.000283673406f, 0.000163480639f,
+    0.000245913863f, -0.000336036086f, 0.000127866864f, 9.02563334e-05f, -0.000222280622f,
+    9.02563334e-05f, 2.41845846e-05f, -9.62764025e-05f, 5.73396683e-05f, 4.88758087e-06f,
+    -2.32905149e-05f, 3.26633453e-05f, 0.000369474292f, 0.000218912959f, 5.40912151e-06f,
+    -6.49541616e-05f, 0.000457644463f, 1.14738941e-05f, -0.00101800263f, 0.000686079264f,
+    1.84327364e-05f, -0.00151689351f, 0.000819891691f, 2.58237123e-05f, -0.00114808977f,
+    0.000778257847f, 3.26037407e-05f, -0.0004029423f, 0.00056129694f, 3.72827053e-05f,
+    9.63658094e-05f, 0.000268384814f, 3.87132168e-05f, 0.00021058321f, 2.92509794e-05f,
+    3.64929438e-05f, 0.000138282776f, -8.65161419e-05f, 3.12179327e-05f, 5.73396683e-05f,
+    -9.62764025e-05f, 2.41845846e-05f, 1.69724226e-05f, -5.98281622e-05f, 1.69724226e-05f,
+    3.75509262e-06f, -2.43484974e-05f, 1.07437372e-05f, 0.000357791781f, 5.12450933e-05f,
+    5.66244125e-07f, 0.000275701284f, 0.000116914511f, 1.25169754e-06f, -0.000196203589f,
+    0.000197142363f, 2.14576721e-06f, -0.000594884157f, 0.000270396471f, 3.23355198e-06f,
+    -0.00058965385f, 0.000302001834f, 4.39584255e-06f, -0.000295877457f, 0.000269040465f,
+    5.43892384e-06f, -2.41100788e-05f, 0.000182241201f, 6.10947609e-06f, 7.96616077e-05f,
+    8.18520784e-05f, 6.24358654e-06f, 6.84559345e-05f, 8.37445259e-06f, 5.7965517e-06f,
+    3.26633453e-05f, -2.32905149e-05f, 4.88758087e-06f, 1.07437372e-05f, -2.43484974e-05f,
+    3.75509262e-06f, 2.60770321e-06f, -1.42157078e-05f, 2.60770321e-06f
 };
 
 /* 4 x 13 x 12 coefficients, even in y, odd in x */
 static const float tessary_features_group2_taps[624] = {
-    0.0730115175f, 0.0680678189f, 0.0535636395f, 0.0300587118f, 0.100360066f, 0.0974987745f,
-    0.0847446471f, 0.0525287986f, 0.0805782974f, 0.0838434845f, 0.0860116482f, 0.0629241318f,
-    0.0447867066f, 0.0513024926f, 0.0663729608f, 0.0612372905f, 0.01817514f, 0.0235575736f,
-    0.041071251f, 0.0510642976f, 0.00551447272f, 0.00831276178f, 0.0208687931f, 0.0373612493f,
-    0.00126683712f, 0.00228284299f, 0.00881786644f, 0.0242897123f, 0.000222027302f,
-    0.000491589308f, 0.00312188268f, 0.0141383857f, 2.98321247e-05f, 8.34167004e-05f,
-    0.00093062222f, 0.00740405917f, 3.08454037e-06f, 1.11907721e-05f, 0.000234350562f,
-    0.00350005925f, 2.38418579e-07f, 1.1920929e-06f, 4.99784946e-05f, 0.00149708986f,
-    1.49011612e-08f, 1.04308128e-07f, 9.04500484e-06f, 0.000580430031f, 0.0707651824f,
-    0.0634288862f, 0.0451050997f, 0.0226453319f, 0.0972723067f, 0.091463998f, 0.0723668486f,
-    0.0398674384f, 0.0780991763f, 0.0795306414f, 0.0751584172f, 0.0483454838f, 0.0434087664f,
-    0.0494178906f, 0.0598612279f, 0.0478546843f, 0.017615959f, 0.0231401622f, 0.0385418683f,
-    0.0407733396f, 0.0053448081f, 0.00836008787f, 0.0205288753f, 0.0306142792f, 0.00122787058f,
-    0.00235956162f, 0.00915458053f, 0.0205098242f, 0.00021520257f, 0.000524103642f,
-    0.00344131887f, 0.0123497993f, 2.89082527e-05f, 9.20444727e-05f, 0.00109504908f,
-    0.00671456754f, 2.9951334e-06f, 1.28149986e-05f, 0.000295750797f, 0.00330644101f,
-    2.38418579e-07f, 1.41561031e-06f, 6.79045916e-05f, 0.00147774071f, 1.49011612e-08f,
-    1.2665987e-07f, 1.3269484e-05f, 0.00060030818f, 0.0644324273f, 0.0510966927f, 0.0250971019f,
-    0.00706406683f, 0.0885674357f, 0.0752739906f, 0.0426122844f, 0.0130485445f, 0.0711100996f,
-    0.0677542314f, 0.0482860059f, 0.0170542002f, 0.039524138f, 0.0440933108f, 0.0429035276f,
-    0.0185739994f, 0.0160395056f, 0.0218399391f, 0.031256333f, 0.0176625028f, 0.00486651063f,
-    0.00841371715f, 0.0189806968f, 0.0149289146f, 0.00111798942f, 0.00254803896f,
-    0.00967673957f, 0.0113053918f, 0.000195935369f, 0.00061006844f, 0.0041571185f,
-    0.00770165026f, 2.63303518e-05f, 0.000115856528f, 0.00150833279f, 0.00473115593f,
-    2.7269125e-06f, 1.74790621e-05f, 0.000462993979f, 0.00262520462f, 2.23517418e-07f,
-    2.10106373e-06f, 0.000120401382f, 0.00131746382f, 1.49011612e-08f, 2.01165676e-07f,
-    2.65538692e-05f, 0.000598654151f, 0.0551119745f, 0.0350132585f, 0.00490264595f,
-    -0.00474859774f, 0.0757557452f, 0.0537537634f, 0.0114722997f, -0.00768969953f,
-    0.0608236939f, 0.0515284017f, 0.0183129385f, -0.00795248896f, 0.0338067859f, 0.0362574309f,
-    0.0219845474f, -0.00593248755f, 0.0137193203f, 0.0195902139f, 0.0205792487f,
-    -0.00287502259f, 0.00416254997f, 0.00826495886f, 0.0153952017f, -9.41008329e-05f,
-    0.000956267118f, 0.00274257362f, 0.00936738402f, 0.00163400918f, 0.00016759336f,
-    0.000718444586f, 0.00469410419f, 0.00221477449f, 2.25156546e-05f, 0.000148907304f,
-    0.00195460767f, 0.00200009346f, 2.32458115e-06f, 2.44528055e-05f, 0.000680662692f,
-    0.0014468655f, 1.78813934e-07f, 3.1888485e-06f, 0.000199168921f, 0.000888414681f,
-    1.49011612e-08f, 3.27825546e-07f, 4.9136579e-05f, 0.000475361943f, 0.0442837179f,
-    0.019582808f, -0.0071247071f, -0.00788184255f, 0.0608714521f, 0.0324588344f,
-    -0.00849670172f, -0.0136235431f, 0.0488732159f, 0.0345490575f, -0.00331711769f,
-    -0.0159750506f, 0.0271645188f, 0.0272474289f, 0.0042430833f, -0.0149822757f, 0.0110237896f,
-    0.0164668858f, 0.00929721445f, -0.0117435977f, 0.00334469974f, 0.00771696121f,
-    0.00997969508f, -0.00774729997f, 0.000768378377f, 0.00282207131f, 0.00761708617f,
-    -0.00421135873f, 0.000134661794f, 0.000808939338f, 0.00452470034f, -0.00174368918f,
-    1.80900097e-05f, 0.000182405114f, 0.00217102468f, -0.000376388431f, 1.86264515e-06f,
-    3.24472785e-05f, 0.00085760653f, 0.000184431672f, 1.49011612e-07f, 4.55975533e-06f,
-    0.000282011926f, 0.000297605991f, 1.49011612e-08f, 5.06639481e-07f, 7.77393579e-05f,
-    0.000233843923f, 0.0334271044f, 0.00787835568f, -0.0100176185f, -0.00562037528f,
-    0.0459481776f, 0.0155189857f, -0.014782384f, -0.00999564677f, 0.0368914306f, 0.019912608f,
-    -0.0126072317f, -0.0123033449f, 0.0205048472f, 0.0184874758f, -0.00604902953f,
-    -0.0123828873f, 0.00832118094f, 0.0127868205f, 0.000559024513f, -0.0106993094f,
-    0.00252470374f, 0.00670777261f, 0.00427006185f, -0.00807569921f, 0.000579997897f,
-    0.00270421058f, 0.0047943294f, -0.0053441003f, 0.000101655722f, 0.000845976174f,
-    0.00353859365f, -0.00308102369f, 1.36643648e-05f, 0.000206820667f, 0.00199451298f,
-    -0.00151781738f, 1.41561031e-06f, 3.97264957e-05f, 0.000902503729f, -0.000608794391f,
-    1.1920929e-07f, 6.02006912e-06f, 0.00033544004f, -0.000170432031f, 0.0f, 7.22706318e-07f,
-    0.00010368973f, -5.00679016e-06f, 0.0237033665f, 0.000881142914f, -0.0076989457f,
-    -0.00264634192f, 0.032582134f, 0.00458259881f, -0.0123716742f, -0.00483576208f,
-    0.0261599422f, 0.00930080563f, -0.0125286952f, -0.00622097403f, 0.014540121f, 0.0111208484f,
-    -0.00892938673f, -0.00664956123f, 0.00590060651f, 0.00904999673f, -0.00394418836f,
-    -0.00619656593f, 0.00179028511f, 0.00535098463f, 4.28855419e-05f, -0.00512525439f,
-    0.00041128695f, 0.00237897784f, 0.00194966048f, -0.00378637761f, 7.20769167e-05f,
-    0.000811167061f, 0.00211142004f, -0.00249949098f, 9.68575478e-06f, 0.000214725733f,
-    0.0014718771f, -0.0014686957f, 9.983778e-07f, 4.44725156e-05f, 0.000780507922f,
-    -0.000761598349f, 7.4505806e-08f, 7.24196434e-06f, 0.000331938267f, -0.000342786312f, 0.0f,
-    9.31322575e-07f, 0.000115916133f, -0.00012935698f, 0.0157898515f, -0.0021385178f,
-    -0.00431931764f, -0.000904120505f, 0.0217043906f, -0.000910758972f, -0.00744430721f,
-    -0.00170111656f, 0.0174262822f, 0.00288494676f, -0.00849664956f, -0.00229165703f,
-    0.00968579948f, 0.00574707985f, -0.00732949376f, -0.00260134041f, 0.0039306581f,
-    0.00575982779f, -0.00471375883f, -0.00260388106f, 0.00119258463f, 0.00387904048f,
-    -0.00193048269f, -0.00233582407f, 0.00027397275f, 0.00190674514f, 1.93715096e-06f,
-    -0.00188861042f, 4.80115414e-05f, 0.000709101558f, 0.000809073448f, -0.00137806684f,
-    6.4522028e-06f, 0.000203296542f, 0.000826179981f, -0.000906437635f, 6.70552254e-07f,
-    4.54261899e-05f, 0.000541374087f, -0.000535935163f, 5.96046448e-08f, 7.96467066e-06f,
-    0.000269725919f, -0.000283464789f, 0.0f, 1.10268593e-06f, 0.000107757747f, -0.00013307482f,
-    0.00988103449f, -0.00266654044f, -0.001906991f, -0.000232718885f, 0.0135822594f,
-    -0.00267795473f, -0.00352007896f, -0.000452138484f, 0.010905087f, -0.000199206173f,
-    -0.00447012484f, -0.000639803708f, 0.00606122613f, 0.00237968564f, -0.00445789844f,
-    -0.000772550702f, 0.00245973468f, 0.00324331969f, -0.00352166593f, -0.000829912722f,
-    0.000746309757f, 0.00253527611f, -0.00210776925f, -0.000804044306f, 0.000171452761f,
-    0.00138581544f, -0.000808402896f, -0.000705689192f, 3.00556421e-05f, 0.000563502312f,
-    5.21540642e-08f, -0.000561654568f, 4.03821468e-06f, 0.000175207853f, 0.000297524035f,
-    -0.000405177474f, 4.17232513e-07f, 4.22671437e-05f, 0.000285498798f, -0.000264592469f,
-    2.98023224e-08f, 7.97957182e-06f, 0.000175751746f, -0.000156082213f, 0.0f, 1.18464231e-06f,
-    8.22618604e-05f, -8.29398632e-05f, 0.00580875576f, -0.0020929575f, -0.000683747232f,
-    -4.59998846e-05f, 0.00798459351f, -0.00252641737f, -0.00135440379f, -9.25734639e-05f,
-    0.00641077757f, -0.0011831075f, -0.00190573186f, -0.000138014555f, 0.00356321037f,
-    0.00061570853f, -0.00215785205f, -0.000177584589f, 0.00144600868f, 0.00157574564f,
-    -0.00199148804f, -0.0002046749f, 0.000438734889f, 0.00148186833f, -0.00147128105f,
-    -0.000213652849f, 0.000100791454f, 0.000909902155f, -0.000826075673f, -0.000202640891f,
-    1.7657876e-05f, 0.000406265259f, -0.000297509134f, -0.000174753368f, 2.36928463e-06f,
-    0.00013730675f, 0.0f, -0.000136978924f, 2.38418579e-07f, 3.58149409e-05f, 9.65893269e-05f,
-    -9.75206494e-05f, 1.49011612e-08f, 7.28666782e-06f, 8.70749354e-05f, -6.29946589e-05f, 0.0f,
-    1.16229057e-06f, 5.03510237e-05f, -3.68654728e-05f, 0.00320790708f, -0.00130598992f,
-    -0.000202380121f, -7.06315041e-06f, 0.00440950692f, -0.0017459318f, -0.000431448221f,
-    -1.47596002e-05f, 0.00354036689f, -0.00114603341f, -0.000671602786f, -2.3253262e-05f,
-    0.00196778774f, -0.000102855265f, -0.000855401158f, -3.19257379e-05f, 0.000798553228f,
-    0.000627614558f, -0.000902041793f, -3.9473176e-05f, 0.000242292881f, 0.000766262412f,
-    -0.000780433416f, -4.43309546e-05f, 5.56558371e-05f, 0.000537544489f, -0.000541359186f,
-    -4.53069806e-05f, 9.76026058e-06f, 0.000265240669f, -0.000285498798f, -4.21702862e-05f,
-    1.31130219e-06f, 9.77441669e-05f, -9.65893269e-05f, -3.57329845e-05f, 1.34110451e-07f,
-    2.76118517e-05f, 0.0f, -2.7552247e-05f, 1.49011612e-08f, 6.06477261e-06f, 2.76714563e-05f,
-    -1.93193555e-05f, 0.0f, 1.04308128e-06f, 2.3432076e-05f, -1.23083591e-05f, 0.00166423619f,
-    -0.000691533089f, -4.99337912e-05f, -8.49366188e-07f, 0.00228762627f, -0.000998646021f,
-    -0.000114902854f, -1.84774399e-06f, 0.00183671713f, -0.000787883997f, -0.000197738409f,
-    -3.07708979e-06f, 0.00102087855f, -0.000272579491f, -0.000281699002f, -4.52250242e-06f,
-    0.000414282084f, 0.000175908208f, -0.000335380435f, -5.9902668e-06f, 0.000125691295f,
-    0.000344358385f, -0.000331923366f, -7.22706318e-06f, 2.88784504e-05f, 0.000284209847f,
-    -0.000269725919f, -7.9497695e-06f, 5.06639481e-06f, 0.000156454742f, -0.000175751746f,
-    -7.96467066e-06f, 6.85453415e-07f, 6.313622e-05f, -8.70749354e-05f, -7.27176666e-06f,
-    7.4505806e-08f, 1.9364059e-05f, -2.76714563e-05f, -6.04987144e-06f, 0.0f, 4.58955765e-06f,
-    0.0f, -4.58210707e-06f, 0.0f, 8.49366188e-07f, 6.99609518e-06f, -3.15904617e-06f,
-    0.000811085105f, -0.000319488347f, -1.03339553e-05f, -8.19563866e-08f, 0.00111490488f,
-    -0.000493511558f, -2.57343054e-05f, -1.86264515e-07f, 0.000895142555f, -0.000444933772f,
-    -4.89428639e-05f, -3.27825546e-07f, 0.000497534871f, -0.000227026641f, -7.76946545e-05f,
-    -5.06639481e-07f, 0.000201910734f, 6.37024641e-06f, -0.00010368973f, -7.15255737e-07f,
-    6.12586737e-05f, 0.000129841268f, -0.000115916133f, -9.31322575e-07f, 1.40666962e-05f,
-    0.000133410096f, -0.000107757747f, -1.09523535e-06f, 2.47359276e-06f, 8.31261277e-05f,
-    -8.22618604e-05f, -1.18464231e-06f, 3.27825546e-07f, 3.69474292e-05f, -5.03510237e-05f,
-    -1.16229057e-06f, 2.98023224e-08f, 1.23381615e-05f, -2.3432076e-05f, -1.04308128e-06f, 0.0f,
-    3.16649675e-06f, -6.99609518e-06f, -8.49366188e-07f, 0.0f, 6.33299351e-07f, 0.0f,
-    -6.33299351e-07f
+    0.124474436f, 0.11658892f, 0.0922403336f, 0.051602602f, 0.171099901f, 0.16699928f,
+    0.145936221f, 0.0901775956f, 0.137374759f, 0.14361003f, 0.148118079f, 0.108023554f,
+    0.0763550997f, 0.087872684f, 0.11429888f, 0.105127692f, 0.0309861004f, 0.0403502285f,
+    0.0707275569f, 0.0876634419f, 0.00940141082f, 0.0142383873f, 0.0359375179f, 0.0641390383f,
+    0.0021597743f, 0.0039101541f, 0.0151849985f, 0.0416987836f, 0.000378519297f,
+    0.000842005014f, 0.00537610054f, 0.0242717564f, 5.08725643e-05f, 0.000142872334f,
+    0.00160259008f, 0.0127107203f, 5.24520874e-06f, 1.91628933e-05f, 0.00040358305f,
+    0.00600865483f, 4.17232513e-07f, 2.02655792e-06f, 8.60691071e-05f, 0.00257009268f,
+    2.98023224e-08f, 1.78813934e-07f, 1.55568123e-05f, 0.000996440649f, 0.120644778f,
+    0.108643189f, 0.0776741505f, 0.0388758332f, 0.165835708f, 0.156662688f, 0.124620795f,
+    0.0684414804f, 0.133148193f, 0.136222839f, 0.129428089f, 0.082995981f, 0.0740059018f,
+    0.0846446753f, 0.103085235f, 0.0821534246f, 0.0300327539f, 0.0396352559f, 0.0663718134f,
+    0.0699966699f, 0.00911214948f, 0.0143194497f, 0.0353521705f, 0.0525563359f, 0.00209334493f,
+    0.00404155254f, 0.0157648474f, 0.0352097601f, 0.000366896391f, 0.000897705555f,
+    0.00592619181f, 0.021201238f, 4.92930412e-05f, 0.000157654285f, 0.00188574195f,
+    0.0115270764f, 5.09619713e-06f, 2.19643116e-05f, 0.000509291887f, 0.00567625463f,
+    4.17232513e-07f, 2.42888927e-06f, 0.000116944313f, 0.00253687799f, 2.98023224e-08f,
+    2.23517418e-07f, 2.28583813e-05f, 0.00103056431f, 0.10984832f, 0.0875201821f, 0.0432189703f,
+    0.0121270865f, 0.150995135f, 0.128931895f, 0.0733813345f, 0.0224007815f, 0.121232808f,
+    0.116051793f, 0.0831519067f, 0.0292773992f, 0.0673831403f, 0.0755245388f, 0.0738828778f,
+    0.0318864882f, 0.0273451209f, 0.0374082029f, 0.0538256019f, 0.0303217024f, 0.00829672813f,
+    0.0144113004f, 0.0326860845f, 0.0256288648f, 0.00190600753f, 0.0043643564f, 0.0166640282f,
+    0.0194082558f, 0.000334054232f, 0.00104495883f, 0.00715884566f, 0.0132216215f,
+    4.48822975e-05f, 0.000198438764f, 0.00259746611f, 0.00812210143f, 4.64916229e-06f,
+    2.9951334e-05f, 0.000797301531f, 0.00450675189f, 3.57627869e-07f, 3.59117985e-06f,
+    0.000207319856f, 0.00226172805f, 2.98023224e-08f, 3.42726707e-07f, 4.57316637e-05f,
+    0.00102771819f, 0.0939582288f, 0.0599719286f, 0.00844269991f, -0.00815203786f, 0.129152983f,
+    0.0920713097f, 0.0197561085f, -0.0132011175f, 0.103695929f, 0.0882596225f, 0.0315361619f,
+    -0.0136522502f, 0.0576358438f, 0.0621029884f, 0.0378589481f, -0.0101844519f, 0.0233895183f,
+    0.0335548073f, 0.0354388952f, -0.00493563712f, 0.00709655881f, 0.0141565055f, 0.0265116245f,
+    -0.000161543489f, 0.00163030624f, 0.00469757617f, 0.0161312968f, 0.00280514359f,
+    0.000285744667f, 0.00123056769f, 0.00808358192f, 0.00380215049f, 3.83853912e-05f,
+    0.000255048275f, 0.0033659637f, 0.00343361497f, 3.96370888e-06f, 4.18871641e-05f,
+    0.00117214024f, 0.00248387456f, 3.27825546e-07f, 5.46872616e-06f, 0.000342965126f,
+    0.00152516365f, 2.98023224e-08f, 5.66244125e-07f, 8.46236944e-05f, 0.000816076994f,
+    0.0754975677f, 0.0335421115f, -0.0122692436f, -0.0135309696f, 0.103777349f, 0.0555966198f,
+    -0.014631927f, -0.0233879089f, 0.0833220184f, 0.0591768175f, -0.00571231544f,
+    -0.0274247974f, 0.0463117063f, 0.0466703326f, 0.0073068887f, -0.0257204622f, 0.0187940001f,
+    0.028205052f, 0.0160104483f, -0.0201605558f, 0.00570225716f, 0.0132178813f, 0.0171857327f,
+    -0.0132999867f, 0.00130999088f, 0.00483372808f, 0.0131171644f, -0.00722974539f,
+    0.000229597092f, 0.00138558447f, 0.00779186189f, -0.00299343467f, 3.08454037e-05f,
+    0.000312432647f, 0.00373865664f, -0.000646173954f, 3.1888485e-06f, 5.55813313e-05f,
+    0.00147686899f, 0.000316619873f, 2.68220901e-07f, 7.82310963e-06f, 0.000485643744f,
+    0.000510901213f, 2.98023224e-08f, 8.64267349e-07f, 0.000133857131f, 0.000401437283f,
+    0.0569885671f, 0.0134943277f, -0.0172510296f, -0.00964863598f, 0.0783352554f, 0.0265814513f,
+    -0.0254562944f, -0.0171597898f, 0.0628947616f, 0.0341069847f, -0.0217105448f, -0.021121487f,
+    0.0349579155f, 0.0316659808f, -0.0104168504f, -0.0212580413f, 0.0141864717f, 0.0219016969f,
+    0.000962674618f, -0.0183677971f, 0.00430428982f, 0.0114893019f, 0.00735335052f,
+    -0.0138637573f, 0.000988811255f, 0.00463186204f, 0.00825618207f, -0.00917436182f,
+    0.000173300505f, 0.00144901872f, 0.00609371066f, -0.00528927147f, 2.32756138e-05f,
+    0.000354260206f, 0.00343470275f, -0.00260567665f, 2.41398811e-06f, 6.8038702e-05f,
+    0.00155417621f, -0.00104513764f, 1.78813934e-07f, 1.03116035e-05f, 0.000577643514f,
+    -0.000292599201f, 0.0f, 1.23679638e-06f, 0.000178560615f, -8.59797001e-06f, 0.0404109359f,
+    0.00150924921f, -0.0132581294f, -0.00454303622f, 0.0555480123f, 0.00784921646f,
+    -0.0213048756f, -0.00830167532f, 0.0445990562f, 0.0159307271f, -0.021575287f,
+    -0.0106797069f, 0.0247888565f, 0.0190481693f, -0.0153770298f, -0.0114154667f, 0.0100597143f,
+    0.0155011564f, -0.00679217279f, -0.01063779f, 0.00305220485f, 0.00916534662f,
+    7.38501549e-05f, -0.00879865885f, 0.000701189041f, 0.00407479703f, 0.00335744023f,
+    -0.00650018454f, 0.000122904778f, 0.00138939917f, 0.00363601744f, -0.00429095328f,
+    1.65104866e-05f, 0.000367790461f, 0.00253467262f, -0.00252135098f, 1.69873238e-06f,
+    7.61896372e-05f, 0.00134409964f, -0.00130745769f, 1.49011612e-07f, 1.24126673e-05f,
+    0.000571623445f, -0.000588461757f, 0.0f, 1.59442425e-06f, 0.000199615955f, -0.000222072005f,
+    0.0269194841f, -0.00366292894f, -0.00743816793f, -0.00155213475f, 0.0370029509f,
+    -0.00155997276f, -0.012819618f, -0.00292034447f, 0.0297093689f, 0.00494143367f,
+    -0.0146318227f, -0.00393415987f, 0.0165129602f, 0.00984379649f, -0.0126219094f,
+    -0.0044657886f, 0.0067012012f, 0.00986562669f, -0.00811742246f, -0.00447015464f,
+    0.00203320384f, 0.00664415956f, -0.00332441926f, -0.00400997698f, 0.000467091799f,
+    0.0032659322f, 3.33786011e-06f, -0.00324223936f, 8.18669796e-05f, 0.00121457875f,
+    0.00139328837f, -0.00236576796f, 1.0997057e-05f, 0.000348210335f, 0.00142274797f,
+    -0.00155611336f, 1.13248825e-06f, 7.78138638e-05f, 0.000932276249f, -0.000920057297f,
+    8.94069672e-08f, 1.36345625e-05f, 0.000464484096f, -0.000486627221f, 0.0f, 1.89244747e-06f,
+    0.000185579062f, -0.000228464603f, 0.0168457925f, -0.00456734002f, -0.00328397751f,
+    -0.000399529934f, 0.0231558681f, -0.00458690524f, -0.00606182218f, -0.000776201487f,
+    0.0185916424f, -0.000341206789f, -0.00769788027f, -0.00109836459f, 0.0103335381f,
+    0.00407600403f, -0.00767682493f, -0.00132624805f, 0.00419351459f, 0.0055552572f,
+    -0.00606456399f, -0.00142472982f, 0.00127235055f, 0.0043425113f, -0.00362972915f,
+    -0.00138033926f, 0.000292301178f, 0.00237366557f, -0.00139212608f, -0.00121147931f,
+    5.12301922e-05f, 0.000965178013f, 8.94069672e-08f, -0.000964224339f, 6.88433647e-06f,
+    0.000300094485f, 0.000512361526f, -0.000695586205f, 7.15255737e-07f, 7.23898411e-05f,
+    0.000491648912f, -0.000454232097f, 5.96046448e-08f, 1.36643648e-05f, 0.000302657485f,
+    -0.000267952681f, 0.0f, 2.02655792e-06f, 0.000141665339f, -0.000142380595f, 0.00990313292f,
+    -0.00358487666f, -0.00117745996f, -7.89761543e-05f, 0.013612628f, -0.00432734191f,
+    -0.00233237445f, -0.000158920884f, 0.0109294653f, -0.00202646852f, -0.00328180194f,
+    -0.000236928463f, 0.00607478619f, 0.00105461478f, -0.00371597707f, -0.000304862857f,
+    0.00246524811f, 0.00269898772f, -0.00342948735f, -0.000351369381f, 0.000747978687f,
+    0.00253818929f, -0.00253365934f, -0.000366777182f, 0.000171840191f, 0.00155852735f,
+    -0.00142256916f, -0.000347882509f, 3.01301479e-05f, 0.000695854425f, -0.000512331724f,
+    -0.000300005078f, 4.05311584e-06f, 0.000235185027f, 0.0f, -0.000235155225f, 4.17232513e-07f,
+    6.13480806e-05f, 0.000166341662f, -0.000167414546f, 2.98023224e-08f, 1.24871731e-05f,
+    0.000149950385f, -0.000108137727f, 0.0f, 1.9967556e-06f, 8.6709857e-05f, -6.32852316e-05f,
+    0.00546902418f, -0.00223694742f, -0.000348508358f, -1.21295452e-05f, 0.00751760602f,
+    -0.00299046934f, -0.000742971897f, -2.5331974e-05f, 0.00603583455f, -0.00196295977f,
+    -0.00115655363f, -3.99202108e-05f, 0.00335481763f, -0.000176161528f, -0.00147305429f,
+    -5.48064709e-05f, 0.00136142969f, 0.00107499957f, -0.00155337155f, -6.77704811e-05f,
+    0.000413060188f, 0.00131246448f, -0.00134395063f, -7.61002302e-05f, 9.48905945e-05f,
+    0.000920712948f, -0.000932246447f, -7.77840614e-05f, 1.66296959e-05f, 0.000454291701f,
+    -0.000491648912f, -7.23898411e-05f, 2.23517418e-06f, 0.000167414546f, -0.000166341662f,
+    -6.13480806e-05f, 2.38418579e-07f, 4.72962856e-05f, 0.0f, -4.72962856e-05f, 2.98023224e-08f,
+    1.03861094e-05f, 4.76539135e-05f, -3.31699848e-05f, 0.0f, 1.78813934e-06f, 4.03523445e-05f,
+    -2.11298466e-05f, 0.0028373003f, -0.0011844784f, -8.59797001e-05f, -1.44541264e-06f,
+    0.00390008092f, -0.00171050429f, -0.000197872519f, -3.17394733e-06f, 0.00313135982f,
+    -0.00134950876f, -0.000340521336f, -5.28991222e-06f, 0.00174045563f, -0.000466883183f,
+    -0.000485107303f, -7.76350498e-06f, 0.000706315041f, 0.000301301479f, -0.000577554107f,
+    -1.02818012e-05f, 0.0002143085f, 0.000589832664f, -0.000571593642f, -1.24126673e-05f,
+    4.92334366e-05f, 0.000486806035f, -0.000464484096f, -1.36345625e-05f, 8.64267349e-06f,
+    0.000267982483f, -0.000302657485f, -1.36643648e-05f, 1.16229057e-06f, 0.000108137727f,
+    -0.000149950385f, -1.24871731e-05f, 1.1920929e-07f, 3.31699848e-05f, -4.76539135e-05f,
+    -1.03861094e-05f, 0.0f, 7.86781311e-06f, 0.0f, -7.86781311e-06f, 0.0f, 1.4603138e-06f,
+    1.20550394e-05f, -5.42402267e-06f, 0.00138279796f, -0.000547230244f, -1.77919865e-05f,
+    -1.34110451e-07f, 0.00190076232f, -0.000845298171f, -4.43309546e-05f, -3.12924385e-07f,
+    0.00152608752f, -0.000762104988f, -8.42958689e-05f, -5.66244125e-07f, 0.0008482337f,
+    -0.000388860703f, -0.000133797526f, -8.64267349e-07f, 0.000344216824f, 1.09225512e-05f,
+    -0.000178560615f, -1.23679638e-06f, 0.000104427338f, 0.000222399831f, -0.000199615955f,
+    -1.59442425e-06f, 2.39908695e-05f, 0.000228494406f, -0.000185579062f, -1.89244747e-06f,
+    4.20212746e-06f, 0.000142380595f, -0.000141665339f, -2.02655792e-06f, 5.66244125e-07f,
+    6.32852316e-05f, -8.6709857e-05f, -1.9967556e-06f, 5.96046448e-08f, 2.11298466e-05f,
+    -4.03523445e-05f, -1.78813934e-06f, 0.0f, 5.42402267e-06f, -1.20550394e-05f,
+    -1.4603138e-06f, 0.0f, 1.08778477e-06f, 0.0f, -1.08778477e-06f
 };
 
 /* 4 x 12 x 13 coefficients, odd in y, even in x */
 static const float tessary_features_group3_taps[624] = {
-    0.0301270187f, 0.0535636395f, 0.0679135025f, 0.0727800727f, 0.0226967856f, 0.0451050997f,
-    0.0632850751f, 0.0705408752f, 0.00708012283f, 0.0250971019f, 0.0509808436f, 0.064228192f,
-    -0.00475938618f, 0.00490264595f, 0.0349338725f, 0.0549372882f, -0.00789975375f,
-    -0.0071247071f, 0.01953841f, 0.0441433489f, -0.00563314557f, -0.0100176185f, 0.00786050409f,
-    0.0333211422f, -0.00265236199f, -0.0076989457f, 0.000879146159f, 0.0236282349f,
-    -0.000906176865f, -0.00431931764f, -0.00213366747f, 0.0157397985f, -0.000233247876f,
-    -0.001906991f, -0.00266049802f, 0.00984971225f, -4.61041927e-05f, -0.000683747232f,
-    -0.00208820403f, 0.00579035282f, -7.07805157e-06f, -0.000202380121f, -0.00130302459f,
-    0.00319772959f, -8.49366188e-07f, -4.99337912e-05f, -0.000689961016f, 0.00165896118f,
-    -8.19563866e-08f, -1.03339553e-05f, -0.00031876564f, 0.000808507204f, 0.0526481569f,
-    0.0847446471f, 0.0972777307f, 0.100041926f, 0.03995803f, 0.0723668486f, 0.091256626f,
-    0.0969639719f, 0.0130781978f, 0.0426122844f, 0.0751033276f, 0.0882866979f, -0.00770717114f,
-    0.0114722997f, 0.0536319017f, 0.075515613f, -0.0136545002f, -0.00849670172f, 0.032385245f,
-    0.060678497f, -0.0100183561f, -0.014782384f, 0.015483804f, 0.0458025336f, -0.00484675169f,
-    -0.0123716742f, 0.00457220525f, 0.0324788541f, -0.00170497596f, -0.00744430721f,
-    -0.000908687711f, 0.021635592f, -0.000453174114f, -0.00352007896f, -0.00267188251f,
-    0.01353921f, -9.27746296e-05f, -0.00135440379f, -0.00252068788f, 0.00795929134f,
-    -1.47968531e-05f, -0.000431448221f, -0.0017419681f, 0.00439552963f, -1.84774399e-06f,
-    -0.000114902854f, -0.000996373594f, 0.0022803694f, -1.86264515e-07f, -2.57343054e-05f,
-    -0.00049239397f, 0.0011113584f, 0.0630671233f, 0.0860116482f, 0.0836533904f, 0.0803228766f,
-    0.0484553427f, 0.0751584172f, 0.0793503374f, 0.0778516084f, 0.0170929581f, 0.0482860059f,
-    0.0676006228f, 0.0708846897f, -0.00797056407f, 0.0183129385f, 0.0514115766f, 0.0606308877f,
-    -0.0160113573f, -0.00331711769f, 0.0344707295f, 0.0487182885f, -0.0123313069f,
-    -0.0126072317f, 0.0198674574f, 0.0367745012f, -0.00623510778f, -0.0125286952f,
-    0.00927971303f, 0.0260770172f, -0.00229686499f, -0.00849664956f, 0.00287840515f,
-    0.0173710436f, -0.000641256571f, -0.00447012484f, -0.000198751688f, 0.0108705163f,
-    -0.000138327479f, -0.00190573186f, -0.00118042529f, 0.00639045238f, -2.33054161e-05f,
-    -0.000671602786f, -0.00114343315f, 0.00352914631f, -3.08454037e-06f, -0.000197738409f,
-    -0.000786088407f, 0.00183089077f, -3.27825546e-07f, -4.89428639e-05f, -0.000443920493f,
-    0.000892311335f, 0.0613764375f, 0.0663729608f, 0.0511861891f, 0.0446447432f, 0.0479634255f,
-    0.0598612279f, 0.0493058488f, 0.0432711691f, 0.0186162069f, 0.0429035276f, 0.0439933315f,
-    0.039398849f, -0.00594596565f, 0.0219845474f, 0.0361752287f, 0.0336996168f, -0.0150163174f,
-    0.0042430833f, 0.0271856561f, 0.027078405f, -0.0124110281f, -0.00604902953f, 0.0184455588f,
-    0.0204398483f, -0.006664671f, -0.00892938673f, 0.0110956356f, 0.0144940317f,
-    -0.00260725617f, -0.00732949376f, 0.00573404878f, 0.00965510309f, -0.000774309039f,
-    -0.00445789844f, 0.00237429142f, 0.00604200363f, -0.000177979469f, -0.00215785205f,
-    0.000614315271f, 0.00355191529f, -3.20002437e-05f, -0.000855401158f, -0.000102624297f,
-    0.00196155906f, -4.529953e-06f, -0.000281699002f, -0.000271961093f, 0.001017645f,
-    -5.06639481e-07f, -7.76946545e-05f, -0.000226512551f, 0.000495955348f, 0.0511803329f,
-    0.041071251f, 0.0235041678f, 0.0181175321f, 0.040865995f, 0.0385418683f, 0.0230876952f,
-    0.0175601095f, 0.0177026466f, 0.031256333f, 0.0217904225f, 0.0159886628f, -0.0028815642f,
-    0.0205792487f, 0.019545801f, 0.0136758387f, -0.0117702857f, 0.00929721445f, 0.0164295509f,
-    0.0109888464f, -0.0107236207f, 0.000559024513f, 0.0127578303f, 0.00829480588f,
-    -0.00621064007f, -0.00394418836f, 0.00902947783f, 0.00588190556f, -0.00260979682f,
-    -0.00471375883f, 0.00574677438f, 0.00391818583f, -0.000831790268f, -0.00352166593f,
-    0.00323596597f, 0.00245194137f, -0.000205136836f, -0.00199148804f, 0.00157217681f,
-    0.00144141912f, -3.9562583e-05f, -0.000902041793f, 0.000626184046f, 0.000796034932f,
-    -6.00516796e-06f, -0.000335380435f, 0.000175513327f, 0.000412970781f, -7.22706318e-07f,
-    -0.00010368973f, 6.36279583e-06f, 0.000201269984f, 0.0374461412f, 0.0208687931f,
-    0.00829391181f, 0.00549699366f, 0.0306838378f, 0.0205288753f, 0.00834113359f,
-    0.00532786548f, 0.0149628371f, 0.0189806968f, 0.00839463621f, 0.00485108793f,
-    -9.43168998e-05f, 0.0153952017f, 0.00824622065f, 0.00414934754f, -0.00776489824f,
-    0.00997969508f, 0.00769946724f, 0.00333409011f, -0.00809404254f, 0.00427006185f,
-    0.00669256598f, 0.00251670182f, -0.00513689965f, 4.28855419e-05f, 0.00533884764f,
-    0.00178460777f, -0.00234112889f, -0.00193048269f, 0.00387025625f, 0.00118881464f,
-    -0.000805877149f, -0.00210776925f, 0.00252953172f, 0.000743940473f, -0.000214144588f,
-    -0.00147128105f, 0.00147850066f, 0.00043733418f, -4.44278121e-05f, -0.000780433416f,
-    0.000764518976f, 0.000241518021f, -7.24196434e-06f, -0.000331923366f, 0.000343576074f,
-    0.000125303864f, -9.31322575e-07f, -0.000115916133f, 0.000129550695f, 6.10649586e-05f,
-    0.0243449062f, 0.00881786644f, 0.00227767229f, 0.00126282871f, 0.0205564275f,
-    0.00915458053f, 0.00235421211f, 0.00122396648f, 0.0113310814f, 0.00967673957f,
-    0.00254225731f, 0.00111444294f, 0.00163771957f, 0.00936738402f, 0.00273635238f,
-    0.000953227282f, -0.00422093272f, 0.00761708617f, 0.00281567872f, 0.000765949488f,
-    -0.00535624474f, 0.0047943294f, 0.0026980862f, 0.000578165054f, -0.00379498303f,
-    0.00194966048f, 0.00237358361f, 0.000409975648f, -0.00189290196f, 1.93715096e-06f,
-    0.0019024238f, 0.000273108482f, -0.000707298517f, -0.000808402896f, 0.0013826713f,
-    0.000170901418f, -0.000203102827f, -0.000826075673f, 0.000907838345f, 0.000100463629f,
-    -4.54112887e-05f, -0.000541359186f, 0.000536322594f, 5.54919243e-05f, -7.96467066e-06f,
-    -0.000269725919f, 0.000283569098f, 2.87890434e-05f, -1.10268593e-06f, -0.000107757747f,
-    0.000133104622f, 1.40219927e-05f, 0.0141705126f, 0.00312188268f, 0.000490471721f,
-    0.000221326947f, 0.0123778656f, 0.00344131887f, 0.000522918999f, 0.000214517117f,
-    0.00771915168f, 0.0041571185f, 0.000608690083f, 0.000195324421f, 0.00221980363f,
-    0.00469410419f, 0.000716812909f, 0.000167071819f, -0.00174765289f, 0.00452470034f,
-    0.000807106495f, 0.000134244561f, -0.00308801979f, 0.00353859365f, 0.000844053924f,
-    0.000101327896f, -0.00250517577f, 0.00211142004f, 0.000809334219f, 7.18533993e-05f,
-    -0.00138119608f, 0.000809073448f, 0.000707492232f, 4.78625298e-05f, -0.000562936068f,
-    5.21540642e-08f, 0.000562220812f, 2.9951334e-05f, -0.000175148249f, -0.000297509134f,
-    0.000405341387f, 1.76131725e-05f, -4.22671437e-05f, -0.000285498798f, 0.000264637172f,
-    9.73045826e-06f, -7.97957182e-06f, -0.000175751746f, 0.000156097114f, 5.05149364e-06f,
-    -1.18464231e-06f, -8.22618604e-05f, 8.29398632e-05f, 2.4586916e-06f, 0.00742088258f,
-    0.00093062222f, 8.32229853e-05f, 2.97427177e-05f, 0.00672982633f, 0.00109504908f,
-    9.18358564e-05f, 2.88188457e-05f, 0.00474190712f, 0.00150833279f, 0.000115595758f,
-    2.62409449e-05f, 0.00200463831f, 0.00195460767f, 0.000148564577f, 2.24411488e-05f,
-    -0.000377245247f, 0.00217102468f, 0.000181995332f, 1.8030405e-05f, -0.001521267f,
-    0.00199451298f, 0.000206358731f, 1.36196613e-05f, -0.00147203356f, 0.0014718771f,
-    0.000214233994f, 9.65595245e-06f, -0.000908501446f, 0.000826179981f, 0.000202834606f,
-    6.43730164e-06f, -0.000406101346f, 0.000297524035f, 0.000174812973f, 4.02331352e-06f,
-    -0.000137291849f, 0.0f, 0.000136993825f, 2.36928463e-06f, -3.58149409e-05f,
-    -9.65893269e-05f, 9.75206494e-05f, 1.31130219e-06f, -7.28666782e-06f, -8.70749354e-05f,
-    6.29946589e-05f, 6.70552254e-07f, -1.16229057e-06f, -5.03510237e-05f, 3.68654728e-05f,
-    3.27825546e-07f, 0.00350801647f, 0.000234350562f, 1.11609697e-05f, 3.06963921e-06f,
-    0.00331395119f, 0.000295750797f, 1.27851963e-05f, 2.98023224e-06f, 0.00263116509f,
-    0.000462993979f, 1.74418092e-05f, 2.71201134e-06f, 0.00145015121f, 0.000680662692f,
-    2.44006515e-05f, 2.32458115e-06f, 0.000184856355f, 0.00085760653f, 3.23727727e-05f,
-    1.86264515e-06f, -0.000610180199f, 0.000902503729f, 3.96370888e-05f, 1.40070915e-06f,
-    -0.000763326883f, 0.000780507922f, 4.4375658e-05f, 9.983778e-07f, -0.000537157059f,
-    0.000541374087f, 4.53218818e-05f, 6.70552254e-07f, -0.000265195966f, 0.000285498798f,
-    4.21702862e-05f, 4.17232513e-07f, -9.77441669e-05f, 9.65893269e-05f, 3.57329845e-05f,
-    2.38418579e-07f, -2.76118517e-05f, 0.0f, 2.7552247e-05f, 1.34110451e-07f, -6.06477261e-06f,
-    -2.76714563e-05f, 1.93193555e-05f, 7.4505806e-08f, -1.04308128e-06f, -2.3432076e-05f,
-    1.23083591e-05f, 2.98023224e-08f, 0.00150048733f, 4.99784946e-05f, 1.1920929e-06f,
-    2.38418579e-07f, 0.00148110092f, 6.79045916e-05f, 1.41561031e-06f, 2.38418579e-07f,
-    0.0013204515f, 0.000120401382f, 2.10106373e-06f, 2.23517418e-07f, 0.000890433788f,
-    0.000199168921f, 3.18139791e-06f, 1.78813934e-07f, 0.000298283994f, 0.000282011926f,
-    4.55230474e-06f, 1.49011612e-07f, -0.000170826912f, 0.00033544004f, 6.00516796e-06f,
-    1.1920929e-07f, -0.000343568623f, 0.000331938267f, 7.22706318e-06f, 7.4505806e-08f,
-    -0.000284105539f, 0.000269725919f, 7.9497695e-06f, 5.96046448e-08f, -0.000156439841f,
-    0.000175751746f, 7.96467066e-06f, 2.98023224e-08f, -6.313622e-05f, 8.70749354e-05f,
-    7.27176666e-06f, 1.49011612e-08f, -1.9364059e-05f, 2.76714563e-05f, 6.04987144e-06f,
-    1.49011612e-08f, -4.58955765e-06f, 0.0f, 4.58210707e-06f, 0.0f, -8.49366188e-07f,
-    -6.99609518e-06f, 3.15904617e-06f, 0.0f, 0.000581741333f, 9.04500484e-06f, 1.04308128e-07f,
-    1.49011612e-08f, 0.000601671636f, 1.3269484e-05f, 1.2665987e-07f, 1.49011612e-08f,
-    0.000600010157f, 2.65538692e-05f, 2.01165676e-07f, 1.49011612e-08f, 0.000476449728f,
-    4.9136579e-05f, 3.27825546e-07f, 1.49011612e-08f, 0.000234372914f, 7.77393579e-05f,
-    5.06639481e-07f, 1.49011612e-08f, -5.01424074e-06f, 0.00010368973f, 7.15255737e-07f, 0.0f,
-    -0.000129647553f, 0.000115916133f, 9.31322575e-07f, 0.0f, -0.000133380294f, 0.000107757747f,
-    1.09523535e-06f, 0.0f, -8.31261277e-05f, 8.22618604e-05f, 1.18464231e-06f, 0.0f,
-    -3.69474292e-05f, 5.03510237e-05f, 1.16229057e-06f, 0.0f, -1.23381615e-05f, 2.3432076e-05f,
-    1.04308128e-06f, 0.0f, -3.16649675e-06f, 6.99609518e-06f, 8.49366188e-07f, 0.0f,
-    -6.33299351e-07f, 0.0f, 6.33299351e-07f, 0.0f
+    0.051602602f, 0.0922403336f, 0.11658892f, 0.124474436f, 0.0388758332f, 0.0776741505f,
+    0.108643189f, 0.120644778f, 0.0121270865f, 0.0432189703f, 0.0875201821f, 0.10984832f,
+    -0.00815203786f, 0.00844269991f, 0.0599719286f, 0.0939582288f, -0.0135309696f,
+    -0.0122692436f, 0.0335421115f, 0.0754975677f, -0.00964863598f, -0.0172510296f,
+    0.0134943277f, 0.0569885671f, -0.00454303622f, -0.0132581294f, 0.00150924921f,
+    0.0404109359f, -0.00155213475f, -0.00743816793f, -0.00366292894f, 0.0269194841f,
+    -0.000399529934f, -0.00328397751f, -0.00456734002f, 0.0168457925f, -7.89761543e-05f,
+    -0.00117745996f, -0.00358487666f, 0.00990313292f, -1.21295452e-05f, -0.000348508358f,
+    -0.00223694742f, 0.00546902418f, -1.44541264e-06f, -8.59797001e-05f, -0.0011844784f,
+    0.0028373003f, -1.34110451e-07f, -1.77919865e-05f, -0.000547230244f, 0.00138279796f,
+    0.0901775956f, 0.145936221f, 0.16699928f, 0.171099901f, 0.0684414804f, 0.124620795f,
+    0.156662688f, 0.165835708f, 0.0224007815f, 0.0733813345f, 0.128931895f, 0.150995135f,
+    -0.0132011175f, 0.0197561085f, 0.0920713097f, 0.129152983f, -0.0233879089f, -0.014631927f,
+    0.0555966198f, 0.103777349f, -0.0171597898f, -0.0254562944f, 0.0265814513f, 0.0783352554f,
+    -0.00830167532f, -0.0213048756f, 0.00784921646f, 0.0555480123f, -0.00292034447f,
+    -0.012819618f, -0.00155997276f, 0.0370029509f, -0.000776201487f, -0.00606182218f,
+    -0.00458690524f, 0.0231558681f, -0.000158920884f, -0.00233237445f, -0.00432734191f,
+    0.013612628f, -2.5331974e-05f, -0.000742971897f, -0.00299046934f, 0.00751760602f,
+    -3.17394733e-06f, -0.000197872519f, -0.00171050429f, 0.00390008092f, -3.12924385e-07f,
+    -4.43309546e-05f, -0.000845298171f, 0.00190076232f, 0.108023554f, 0.148118079f, 0.14361003f,
+    0.137374759f, 0.082995981f, 0.129428089f, 0.136222839f, 0.133148193f, 0.0292773992f,
+    0.0831519067f, 0.116051793f, 0.121232808f, -0.0136522502f, 0.0315361619f, 0.0882596225f,
+    0.103695929f, -0.0274247974f, -0.00571231544f, 0.0591768175f, 0.0833220184f, -0.021121487f,
+    -0.0217105448f, 0.0341069847f, 0.0628947616f, -0.0106797069f, -0.021575287f, 0.0159307271f,
+    0.0445990562f, -0.00393415987f, -0.0146318227f, 0.00494143367f, 0.0297093689f,
+    -0.00109836459f, -0.00769788027f, -0.000341206789f, 0.0185916424f, -0.000236928463f,
+    -0.00328180194f, -0.00202646852f, 0.0109294653f, -3.99202108e-05f, -0.00115655363f,
+    -0.00196295977f, 0.00603583455f, -5.28991222e-06f, -0.000340521336f, -0.00134950876f,
+    0.00313135982f, -5.66244125e-07f, -8.42958689e-05f, -0.000762104988f, 0.00152608752f,
+    0.105127692f, 0.11429888f, 0.087872684f, 0.0763550997f, 0.0821534246f, 0.103085235f,
+    0.0846446753f, 0.0740059018f, 0.0318864882f, 0.0738828778f, 0.0755245388f, 0.0673831403f,
+    -0.0101844519f, 0.0378589481f, 0.0621029884f, 0.0576358438f, -0.0257204622f, 0.0073068887f,
+    0.0466703326f, 0.0463117063f, -0.0212580413f, -0.0104168504f, 0.0316659808f, 0.0349579155f,
+    -0.0114154667f, -0.0153770298f, 0.0190481693f, 0.0247888565f, -0.0044657886f,
+    -0.0126219094f, 0.00984379649f, 0.0165129602f, -0.00132624805f, -0.00767682493f,
+    0.00407600403f, 0.0103335381f, -0.000304862857f, -0.00371597707f, 0.00105461478f,
+    0.00607478619f, -5.48064709e-05f, -0.00147305429f, -0.000176161528f, 0.00335481763f,
+    -7.76350498e-06f, -0.000485107303f, -0.000466883183f, 0.00174045563f, -8.64267349e-07f,
+    -0.000133797526f, -0.000388860703f, 0.0008482337f, 0.0876634419f, 0.0707275569f,
+    0.0403502285f, 0.0309861004f, 0.0699966699f, 0.0663718134f, 0.0396352559f, 0.0300327539f,
+    0.0303217024f, 0.0538256019f, 0.0374082029f, 0.0273451209f, -0.00493563712f, 0.0354388952f,
+    0.0335548073f, 0.0233895183f, -0.0201605558f, 0.0160104483f, 0.028205052f, 0.0187940001f,
+    -0.0183677971f, 0.000962674618f, 0.0219016969f, 0.0141864717f, -0.01063779f,
+    -0.00679217279f, 0.0155011564f, 0.0100597143f, -0.00447015464f, -0.00811742246f,
+    0.00986562669f, 0.0067012012f, -0.00142472982f, -0.00606456399f, 0.0055552572f,
+    0.00419351459f, -0.000351369381f, -0.00342948735f, 0.00269898772f, 0.00246524811f,
+    -6.77704811e-05f, -0.00155337155f, 0.00107499957f, 0.00136142969f, -1.02818012e-05f,
+    -0.000577554107f, 0.000301301479f, 0.000706315041f, -1.23679638e-06f, -0.000178560615f,
+    1.09225512e-05f, 0.000344216824f, 0.0641390383f, 0.0359375179f, 0.0142383873f,
+    0.00940141082f, 0.0525563359f, 0.0353521705f, 0.0143194497f, 0.00911214948f, 0.0256288648f,
+    0.0326860845f, 0.0144113004f, 0.00829672813f, -0.000161543489f, 0.0265116245f,
+    0.0141565055f, 0.00709655881f, -0.0132999867f, 0.0171857327f, 0.0132178813f, 0.00570225716f,
+    -0.0138637573f, 0.00735335052f, 0.0114893019f, 0.00430428982f, -0.00879865885f,
+    7.38501549e-05f, 0.00916534662f, 0.00305220485f, -0.00400997698f, -0.00332441926f,
+    0.00664415956f, 0.00203320384f, -0.00138033926f, -0.00362972915f, 0.0043425113f,
+    0.00127235055f, -0.000366777182f, -0.00253365934f, 0.00253818929f, 0.000747978687f,
+    -7.61002302e-05f, -0.00134395063f, 0.00131246448f, 0.000413060188f, -1.24126673e-05f,
+    -0.000571593642f, 0.000589832664f, 0.0002143085f, -1.59442425e-06f, -0.000199615955f,
+    0.000222399831f, 0.000104427338f, 0.0416987836f, 0.0151849985f, 0.0039101541f,
+    0.0021597743f, 0.0352097601f, 0.0157648474f, 0.00404155254f, 0.00209334493f, 0.0194082558f,
+    0.0166640282f, 0.0043643564f, 0.00190600753f, 0.00280514359f, 0.0161312968f, 0.00469757617f,
+    0.00163030624f, -0.00722974539f, 0.0131171644f, 0.00483372808f, 0.00130999088f,
+    -0.00917436182f, 0.00825618207f, 0.00463186204f, 0.000988811255f, -0.00650018454f,
+    0.00335744023f, 0.00407479703f, 0.000701189041f, -0.00324223936f, 3.33786011e-06f,
+    0.0032659322f, 0.000467091799f, -0.00121147931f, -0.00139212608f, 0.00237366557f,
+    0.000292301178f, -0.000347882509f, -0.00142256916f, 0.00155852735f, 0.000171840191f,
+    -7.77840614e-05f, -0.000932246447f, 0.000920712948f, 9.48905945e-05f, -1.36345625e-05f,
+    -0.000464484096f, 0.000486806035f, 4.92334366e-05f, -1.89244747e-06f, -0.000185579062f,
+    0.000228494406f, 2.39908695e-05f, 0.0242717564f, 0.00537610054f, 0.000842005014f,
+    0.000378519297f, 0.021201238f, 0.00592619181f, 0.000897705555f, 0.000366896391f,
+    0.0132216215f, 0.00715884566f, 0.00104495883f, 0.000334054232f, 0.00380215049f,
+    0.00808358192f, 0.00123056769f, 0.000285744667f, -0.00299343467f, 0.00779186189f,
+    0.00138558447f, 0.000229597092f, -0.00528927147f, 0.00609371066f, 0.00144901872f,
+    0.000173300505f, -0.00429095328f, 0.00363601744f, 0.00138939917f, 0.000122904778f,
+    -0.00236576796f, 0.00139328837f, 0.00121457875f, 8.18669796e-05f, -0.000964224339f,
+    8.94069672e-08f, 0.000965178013f, 5.12301922e-05f, -0.000300005078f, -0.000512331724f,
+    0.000695854425f, 3.01301479e-05f, -7.23898411e-05f, -0.000491648912f, 0.000454291701f,
+    1.66296959e-05f, -1.36643648e-05f, -0.000302657485f, 0.000267982483f, 8.64267349e-06f,
+    -2.02655792e-06f, -0.000141665339f, 0.000142380595f, 4.20212746e-06f, 0.0127107203f,
+    0.00160259008f, 0.000142872334f, 5.08725643e-05f, 0.0115270764f, 0.00188574195f,
+    0.000157654285f, 4.92930412e-05f, 0.00812210143f, 0.00259746611f, 0.000198438764f,
+    4.48822975e-05f, 0.00343361497f, 0.0033659637f, 0.000255048275f, 3.83853912e-05f,
+    -0.000646173954f, 0.00373865664f, 0.000312432647f, 3.08454037e-05f, -0.00260567665f,
+    0.00343470275f, 0.000354260206f, 2.32756138e-05f, -0.00252135098f, 0.00253467262f,
+    0.000367790461f, 1.65104866e-05f, -0.00155611336f, 0.00142274797f, 0.000348210335f,
+    1.0997057e-05f, -0.000695586205f, 0.000512361526f, 0.000300094485f, 6.88433647e-06f,
+    -0.000235155225f, 0.0f, 0.000235185027f, 4.05311584e-06f, -6.13480806e-05f,
+    -0.000166341662f, 0.000167414546f, 2.23517418e-06f, -1.24871731e-05f, -0.000149950385f,
+    0.000108137727f, 1.16229057e-06f, -1.9967556e-06f, -8.6709857e-05f, 6.32852316e-05f,
+    5.66244125e-07f, 0.00600865483f, 0.00040358305f, 1.91628933e-05f, 5.24520874e-06f,
+    0.00567625463f, 0.000509291887f, 2.19643116e-05f, 5.09619713e-06f, 0.00450675189f,
+    0.000797301531f, 2.9951334e-05f, 4.64916229e-06f, 0.00248387456f, 0.00117214024f,
+    4.18871641e-05f, 3.96370888e-06f, 0.000316619873f, 0.00147686899f, 5.55813313e-05f,
+    3.1888485e-06f, -0.00104513764f, 0.00155417621f, 6.8038702e-05f, 2.41398811e-06f,
+    -0.00130745769f, 0.00134409964f, 7.61896372e-05f, 1.69873238e-06f, -0.000920057297f,
+    0.000932276249f, 7.78138638e-05f, 1.13248825e-06f, -0.000454232097f, 0.000491648912f,
+    7.23898411e-05f, 7.15255737e-07f, -0.000167414546f, 0.000166341662f, 6.13480806e-05f,
+    4.17232513e-07f, -4.72962856e-05f, 0.0f, 4.72962856e-05f, 2.38418579e-07f, -1.03861094e-05f,
+    -4.76539135e-05f, 3.31699848e-05f, 1.1920929e-07f, -1.78813934e-06f, -4.03523445e-05f,
+    2.11298466e-05f, 5.96046448e-08f, 0.00257009268f, 8.60691071e-05f, 2.02655792e-06f,
+    4.17232513e-07f, 0.00253687799f, 0.000116944313f, 2.42888927e-06f, 4.17232513e-07f,
+    0.00226172805f, 0.000207319856f, 3.59117985e-06f, 3.57627869e-07f, 0.00152516365f,
+    0.000342965126f, 5.46872616e-06f, 3.27825546e-07f, 0.000510901213f, 0.000485643744f,
+    7.82310963e-06f, 2.68220901e-07f, -0.000292599201f, 0.000577643514f, 1.03116035e-05f,
+    1.78813934e-07f, -0.000588461757f, 0.000571623445f, 1.24126673e-05f, 1.49011612e-07f,
+    -0.000486627221f, 0.000464484096f, 1.36345625e-05f, 8.94069672e-08f, -0.000267952681f,
+    0.000302657485f, 1.36643648e-05f, 5.96046448e-08f, -0.000108137727f, 0.000149950385f,
+    1.24871731e-05f, 2.98023224e-08f, -3.31699848e-05f, 4.76539135e-05f, 1.03861094e-05f,
+    2.98023224e-08f, -7.86781311e-06f, 0.0f, 7.86781311e-06f, 0.0f, -1.4603138e-06f,
+    -1.20550394e-05f, 5.42402267e-06f, 0.0f, 0.000996440649f, 1.55568123e-05f, 1.78813934e-07f,
+    2.98023224e-08f, 0.00103056431f, 2.28583813e-05f, 2.23517418e-07f, 2.98023224e-08f,
+    0.00102771819f, 4.57316637e-05f, 3.42726707e-07f, 2.98023224e-08f, 0.000816076994f,
+    8.46236944e-05f, 5.66244125e-07f, 2.98023224e-08f, 0.000401437283f, 0.000133857131f,
+    8.64267349e-07f, 2.98023224e-08f, -8.59797001e-06f, 0.000178560615f, 1.23679638e-06f, 0.0f,
+    -0.000222072005f, 0.000199615955f, 1.59442425e-06f, 0.0f, -0.000228464603f, 0.000185579062f,
+    1.89244747e-06f, 0.0f, -0.000142380595f, 0.000141665339f, 2.02655792e-06f, 0.0f,
+    -6.32852316e-05f, 8.6709857e-05f, 1.9967556e-06f, 0.0f, -2.11298466e-05f, 4.03523445e-05f,
+    1.78813934e-06f, 0.0f, -5.42402267e-06f, 1.20550394e-05f, 1.4603138e-06f, 0.0f,
+    -1.08778477e-06f, 0.0f, 1.08778477e-06f, 0.0f
+};
+
+static const int16_t tessary_features_group0_counts[910] = {
+    4020, 2661, 4020, 2829, 4020, 3253, 4020, 3703, 4020, 3897, 0, -1632, 376, -1361, 1470,
+    -250, 2866, 1798, 3548, 3035, -1633, -928, -1637, -1080, -1153, -1212, 810, 110, 2439, 1841,
+    -357, -99, -490, -163, -846, -448, -254, -353, 1305, 870, -20, -3, -41, -8, -190, -66, -304,
+    -207, 544, 320, 0, 0, -1, 0, -19, -4, -119, -60, 177, 92, 0, 0, 0, 0, -1, 0, -26, 0, 45, 0,
+    3897, 2579, 3703, 2625, 3253, 2671, 2829, 2625, 2661, 2579, 0, -1582, 388, -1229, 1294, -86,
+    2081, 1373, 2348, 2009, -1582, -899, -1522, -1028, -876, -1000, 696, 189, 1614, 1218, -346,
+    -96, -478, -164, -743, -420, -101, -208, 864, 575, -20, -3, -43, -9, -190, -70, -201, -148,
+    360, 212, 0, 0, -1, 0, -22, -6, -91, -48, 117, 61, 0, 0, 0, 0, -1, 0, -23, 0, 30, 0, 3548,
+    2348, 2866, 2081, 1470, 1294, 376, 388, 0, 0, 0, -1440, 407, -888, 825, 236, 407, 404, 0, 0,
+    -1441, -819, -1214, -883, -251, -486, 355, 264, 0, 0, -315, -87, -443, -164, -473, -331,
+    157, 66, 0, 0, -18, -3, -46, -10, -181, -80, 6, -21, 0, 0, 0, 0, -2, 0, -29, -9, -26, -20,
+    0, 0, 0, 0, 0, 0, -2, 0, -12, 0, 0, 0, 3035, 2009, 1798, 1373, -250, -86, -1361, -1229,
+    -1632, -1582, 0, -1232, 404, -466, 236, 403, -888, -466, -1440, -1232, -1232, -700, -809,
+    -677, 294, 46, -99, 130, -990, -747, -270, -75, -384, -160, -141, -190, 214, 197, -530,
+    -353, -15, -2, -50, -12, -145, -81, 136, 75, -221, -130, 0, 0, -2, 0, -35, -12, 32, 10, -72,
+    -37, 0, 0, 0, 0, -3, 0, 1, 0, -18, 0, 2439, 1614, 810, 696, -1153, -876, -1637, -1522,
+    -1633, -1582, 0, -990, 355, -99, -251, 294, -1214, -809, -1441, -1232, -990, -563, -415,
+    -453, 482, 352, -415, -116, -990, -747, -217, -60, -307, -147, 122, -35, 59, 124, -530,
+    -353, -12, -2, -52, -14, -81, -65, 119, 85, -221, -130, 0, 0, -3, 0, -35, -14, 50, 24, -72,
+    -37, 0, 0, 0, 0, -5, 0, 10, 0, -18, 0, 1841, 1218, 110, 189, -1212, -1000, -1080, -1028,
+    -928, -899, 0, -747, 264, 130, -486, 46, -883, -677, -819, -700, -747, -425, -116, -251,
+    352, 377, -453, -251, -563, -425, -164, -45, -220, -124, 235, 79, -100, -9, -301, -201, -9,
+    -1, -49, -15, -11, -35, 32, 40, -126, -74, 0, 0, -3, -1, -27, -14, 31, 20, -41, -21, 0, 0,
+    0, 0, -5, 0, 10, 0, -10, 0, 1305, 864, -254, -101, -846, -743, -490, -478, -357, -346, 0,
+    -530, 157, 214, -473, -141, -443, -384, -315, -270, -530, -301, 59, -100, 122, 235, -307,
+    -220, -217, -164, -116, -32, -139, -95, 208, 117, -139, -73, -116, -77, -7, -1, -43, -14,
+    36, -4, -28, -4, -48, -28, 0, 0, -3, -1, -14, -10, 6, 7, -16, -8, 0, 0, 0, 0, -5, 0, 5, 0,
+    -4, 0, 870, 575, -353, -208, -448, -420, -163, -164, -99, -96, 0, -353, 66, 197, -331, -190,
+    -164, -160, -87, -75, -353, -201, 124, -9, -35, 79, -147, -124, -60, -45, -77, -21, -73,
+    -64, 117, 94, -95, -64, -32, -21, -4, -1, -34, -12, 49, 14, -38, -19, -13, -8, 0, 0, -3, -1,
+    -2, -5, -7, -2, -4, -2, 0, 0, 0, 0, -3, 0, 0, 0, -1, 0, 544, 360, -304, -201, -190, -190,
+    -41, -43, -20, -20, 0, -221, 6, 136, -181, -145, -46, -50, -18, -15, -221, -126, 119, 32,
+    -81, -11, -52, -49, -12, -9, -48, -13, -28, -38, 36, 49, -43, -34, -7, -4, -3, 0, -23, -10,
+    37, 18, -23, -15, -3, -2, 0, 0, -3, -1, 5, 0, -8, -4, -1, -1, 0, 0, 0, 0, -1, 0, -1, 0, 0,
+    0, 320, 212, -207, -148, -66, -70, -8, -9, -3, -3, 0, -130, -21, 75, -80, -81, -10, -12, -3,
+    -2, -130, -74, 85, 40, -65, -35, -14, -15, -2, -1, -28, -8, -4, -19, -4, 14, -14, -12, -1,
+    -1, -2, 0, -15, -7, 18, 13, -10, -7, 0, 0, 0, 0, -2, -1, 6, 2, -4, -2, 0, 0, 0, 0, 0, 0, 0,
+    0, -1, 0, 0, 0, 177, 117, -119, -91, -19, -22, -1, -1, 0, 0, 0, -72, -26, 32, -29, -35, -2,
+    -2, 0, 0, -72, -41, 50, 31, -35, -27, -3, -3, 0, 0, -16, -4, 6, -7, -14, -2, -3, -3, 0, 0,
+    -1, 0, -8, -4, 5, 6, -3, -2, 0, 0, 0, 0, -2, 0, 4, 2, -2, -1, 0, 0, 0, 0, 0, 0, 0, 0, -1, 0,
+    0, 0, 92, 61, -60, -48, -4, -6, 0, 0, 0, 0, 0, -37, -20, 10, -9, -12, 0, 0, 0, 0, -37, -21,
+    24, 20, -14, -14, 0, -1, 0, 0, -8, -2, 7, -2, -10, -5, -1, -1, 0, 0, -1, 0, -4, -2, 0, 2,
+    -1, -1, 0, 0, 0, 0, -1, 0, 2, 1, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 45, 30, -26, -23,
+    -1, -1, 0, 0, 0, 0, 0, -18, -12, 1, -2, -3, 0, 0, 0, 0, -18, -10, 10, 10, -5, -5, 0, 0, 0,
+    0, -4, -1, 5, 0, -5, -3, 0, 0, 0, 0, 0, 0, -1, -1, -1, 0, 0, 0, 0, 0, 0, 0, -1, 0, 0, 0, 0,
+    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0
+};
+
+static const int16_t tessary_features_group1_counts[432] = {
+    -781, -915, -1106, -1577, -781, -1328, -493, -48, -1305, -681, -1518, -1377, 129, 112, -156,
+    90, -1039, -662, 53, 17, 126, 82, -353, -152, 4, 1, 38, 13, -47, -5, 0, 0, 4, 1, 6, 6,
+    -1328, -1576, -1577, -2306, -915, -1576, -876, -110, -2000, -1143, -1841, -1724, 213, 195,
+    -352, 71, -1358, -916, 95, 32, 174, 130, -529, -258, 8, 1, 66, 26, -102, -28, 0, 0, 8, 2,
+    -1, 5, -1518, -1841, -1305, -2000, -493, -876, -1076, -185, -1887, -1243, -1076, -1079, 227,
+    233, -530, -60, -927, -695, 121, 43, 120, 125, -457, -263, 11, 2, 76, 34, -131, -54, 0, 0,
+    12, 3, -18, -3, -1377, -1724, -681, -1143, -48, -110, -1079, -251, -1243, -997, -185, -251,
+    180, 223, -580, -206, -286, -277, 127, 48, 9, 75, -231, -167, 13, 3, 63, 35, -104, -57, 0,
+    0, 14, 5, -26, -10, -1039, -1358, -156, -352, 129, 213, -927, -286, -530, -580, 227, 180,
+    102, 178, -466, -264, 102, 26, 115, 48, -86, 9, -25, -46, 14, 3, 34, 27, -45, -33, 1, 0, 14,
+    5, -20, -10, -662, -916, 90, 71, 112, 195, -695, -277, -60, -206, 233, 223, 26, 119, -264,
+    -216, 178, 119, 91, 42, -119, -37, 65, 25, 14, 3, 4, 14, 3, -6, 1, 0, 10, 5, -7, -5, -353,
+    -529, 126, 174, 53, 95, -457, -231, 120, 9, 121, 127, -25, 65, -86, -119, 115, 91, 63, 33,
+    -94, -49, 63, 37, 12, 3, -14, 2, 19, 7, 1, 0, 5, 3, 2, 0, -152, -258, 82, 130, 17, 32, -263,
+    -167, 125, 75, 43, 48, -46, 25, 9, -37, 48, 42, 37, 23, -49, -37, 33, 23, 10, 3, -18, -5,
+    15, 8, 1, 0, 1, 1, 4, 1, -47, -102, 38, 66, 4, 8, -131, -104, 76, 63, 11, 13, -45, 3, 34, 4,
+    14, 14, 19, 15, -14, -18, 12, 10, 7, 2, -13, -6, 7, 4, 1, 0, -2, 0, 2, 1, -5, -28, 13, 26,
+    1, 1, -54, -57, 34, 35, 2, 3, -33, -6, 27, 14, 3, 3, 7, 8, 2, -5, 3, 3, 4, 2, -6, -4, 2, 2,
+    0, 0, -2, 0, 1, 1, 6, -1, 4, 8, 0, 0, -18, -26, 12, 14, 0, 0, -20, -7, 14, 10, 1, 1, 2, 4,
+    5, 1, 1, 1, 2, 1, -2, -2, 1, 0, 0, 0, -1, 0, 0, 0, 6, 5, 1, 2, 0, 0, -3, -10, 3, 5, 0, 0,
+    -10, -5, 5, 5, 0, 0, 0, 1, 3, 1, 0, 0, 1, 1, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0
+};
+
+static const int16_t tessary_features_group2_counts[624] = {
+    2173, 2987, 2035, 2915, 1610, 2548, 901, 1574, 2398, 1333, 2507, 1534, 2586, 1995, 1886,
+    1835, 541, 164, 704, 249, 1235, 627, 1530, 1120, 38, 7, 68, 15, 265, 94, 728, 424, 1, 0, 2,
+    0, 28, 7, 222, 105, 0, 0, 0, 0, 2, 0, 45, 17, 2106, 2895, 1897, 2735, 1356, 2175, 679, 1195,
+    2324, 1292, 2378, 1478, 2259, 1800, 1449, 1434, 524, 159, 692, 250, 1159, 617, 1222, 917,
+    37, 6, 71, 16, 275, 103, 615, 370, 1, 0, 3, 0, 33, 9, 201, 99, 0, 0, 0, 0, 2, 0, 44, 18,
+    1918, 2636, 1528, 2251, 754, 1281, 212, 391, 2116, 1176, 2026, 1318, 1452, 1290, 511, 557,
+    477, 145, 653, 252, 940, 571, 529, 447, 33, 6, 76, 18, 291, 125, 339, 231, 1, 0, 3, 1, 45,
+    14, 142, 79, 0, 0, 0, 0, 4, 1, 39, 18, 1640, 2255, 1047, 1607, 147, 345, -142, -230, 1810,
+    1006, 1541, 1084, 551, 661, -238, -178, 408, 124, 586, 247, 619, 463, -86, -3, 28, 5, 82,
+    21, 282, 141, 49, 66, 1, 0, 4, 1, 59, 20, 60, 43, 0, 0, 0, 0, 6, 1, 27, 14, 1318, 1812, 586,
+    971, -214, -255, -236, -408, 1455, 808, 1033, 815, -100, 128, -479, -449, 328, 100, 492,
+    231, 279, 300, -352, -232, 23, 4, 84, 24, 229, 136, -126, -52, 1, 0, 5, 1, 65, 26, -11, 6,
+    0, 0, 0, 0, 8, 2, 9, 7, 995, 1367, 236, 464, -301, -444, -168, -300, 1098, 610, 595, 553,
+    -379, -182, -369, -371, 248, 75, 382, 201, 17, 128, -321, -242, 17, 3, 81, 25, 144, 106,
+    -160, -92, 0, 0, 6, 1, 60, 27, -45, -18, 0, 0, 0, 0, 10, 3, -5, 0, 705, 970, 26, 137, -231,
+    -372, -79, -145, 779, 433, 278, 333, -377, -268, -186, -199, 176, 53, 271, 160, -119, 1,
+    -186, -154, 12, 2, 71, 24, 59, 63, -113, -75, 0, 0, 6, 1, 44, 23, -44, -23, 0, 0, 0, 0, 10,
+    3, -10, -4, 470, 646, -64, -27, -130, -224, -27, -51, 519, 288, 86, 172, -255, -220, -69,
+    -78, 117, 35, 172, 116, -142, -58, -78, -70, 8, 1, 57, 21, 0, 24, -57, -41, 0, 0, 6, 1, 25,
+    16, -27, -16, 0, 0, 0, 0, 8, 3, -8, -4, 294, 404, -80, -80, -57, -106, -7, -14, 325, 180,
+    -6, 71, -134, -134, -19, -23, 73, 22, 97, 76, -106, -63, -25, -24, 5, 1, 41, 17, -24, 0,
+    -21, -17, 0, 0, 5, 1, 9, 9, -12, -8, 0, 0, 0, 0, 5, 2, -5, -2, 173, 238, -63, -76, -21, -41,
+    -1, -3, 191, 106, -35, 18, -57, -65, -4, -5, 43, 13, 47, 44, -60, -44, -6, -6, 3, 1, 27, 12,
+    -25, -9, -6, -5, 0, 0, 4, 1, 0, 3, -4, -3, 0, 0, 0, 0, 3, 2, -2, -1, 95, 131, -39, -52, -6,
+    -13, 0, 0, 105, 59, -34, -3, -20, -26, -1, -1, 24, 7, 19, 23, -27, -23, -1, -1, 2, 0, 16, 8,
+    -16, -9, -1, -1, 0, 0, 3, 1, -3, 0, -1, -1, 0, 0, 0, 0, 1, 1, -1, 0, 50, 68, -21, -30, -2,
+    -3, 0, 0, 55, 30, -24, -8, -6, -8, 0, 0, 12, 4, 5, 10, -10, -10, 0, 0, 1, 0, 8, 5, -8, -5,
+    0, 0, 0, 0, 2, 1, -3, -1, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 24, 33, -10, -15, 0, -1, 0, 0, 27,
+    15, -13, -7, -1, -2, 0, 0, 6, 2, 0, 4, -3, -3, 0, 0, 0, 0, 4, 2, -3, -2, 0, 0, 0, 0, 1, 0,
+    -2, -1, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0
+};
+
+static const int16_t tessary_features_group3_counts[624] = {
+    901, 1574, 1610, 2548, 2035, 2915, 2173, 2987, 679, 1195, 1356, 2175, 1897, 2735, 2106,
+    2895, 212, 391, 754, 1281, 1528, 2251, 1918, 2636, -142, -230, 147, 345, 1047, 1607, 1640,
+    2255, -236, -408, -214, -255, 586, 971, 1318, 1812, -168, -300, -301, -444, 236, 464, 995,
+    1367, -79, -145, -231, -372, 26, 137, 705, 970, -27, -51, -130, -224, -64, -27, 470, 646,
+    -7, -14, -57, -106, -80, -80, 294, 404, -1, -3, -21, -41, -63, -76, 173, 238, 0, 0, -6, -13,
+    -39, -52, 95, 131, 0, 0, -2, -3, -21, -30, 50, 68, 0, 0, 0, -1, -10, -15, 24, 33, 1886,
+    1835, 2586, 1995, 2507, 1534, 2398, 1333, 1449, 1434, 2259, 1800, 2378, 1478, 2324, 1292,
+    511, 557, 1452, 1290, 2026, 1318, 2116, 1176, -238, -178, 551, 661, 1541, 1084, 1810, 1006,
+    -479, -449, -100, 128, 1033, 815, 1455, 808, -369, -371, -379, -182, 595, 553, 1098, 610,
+    -186, -199, -377, -268, 278, 333, 779, 433, -69, -78, -255, -220, 86, 172, 519, 288, -19,
+    -23, -134, -134, -6, 71, 325, 180, -4, -5, -57, -65, -35, 18, 191, 106, -1, -1, -20, -26,
+    -34, -3, 105, 59, 0, 0, -6, -8, -24, -8, 55, 30, 0, 0, -1, -2, -13, -7, 27, 15, 1530, 1120,
+    1235, 627, 704, 249, 541, 164, 1222, 917, 1159, 617, 692, 250, 524, 159, 529, 447, 940, 571,
+    653, 252, 477, 145, -86, -3, 619, 463, 586, 247, 408, 124, -352, -232, 279, 300, 492, 231,
+    328, 100, -321, -242, 17, 128, 382, 201, 248, 75, -186, -154, -119, 1, 271, 160, 176, 53,
+    -78, -70, -142, -58, 172, 116, 117, 35, -25, -24, -106, -63, 97, 76, 73, 22, -6, -6, -60,
+    -44, 47, 44, 43, 13, -1, -1, -27, -23, 19, 23, 24, 7, 0, 0, -10, -10, 5, 10, 12, 4, 0, 0,
+    -3, -3, 0, 4, 6, 2, 728, 424, 265, 94, 68, 15, 38, 7, 615, 370, 275, 103, 71, 16, 37, 6,
+    339, 231, 291, 125, 76, 18, 33, 6, 49, 66, 282, 141, 82, 21, 28, 5, -126, -52, 229, 136, 84,
+    24, 23, 4, -160, -92, 144, 106, 81, 25, 17, 3, -113, -75, 59, 63, 71, 24, 12, 2, -57, -41,
+    0, 24, 57, 21, 8, 1, -21, -17, -24, 0, 41, 17, 5, 1, -6, -5, -25, -9, 27, 12, 3, 1, -1, -1,
+    -16, -9, 16, 8, 2, 0, 0, 0, -8, -5, 8, 5, 1, 0, 0, 0, -3, -2, 4, 2, 0, 0, 222, 105, 28, 7,
+    2, 0, 1, 0, 201, 99, 33, 9, 3, 0, 1, 0, 142, 79, 45, 14, 3, 1, 1, 0, 60, 43, 59, 20, 4, 1,
+    1, 0, -11, 6, 65, 26, 5, 1, 1, 0, -45, -18, 60, 27, 6, 1, 0, 0, -44, -23, 44, 23, 6, 1, 0,
+    0, -27, -16, 25, 16, 6, 1, 0, 0, -12, -8, 9, 9, 5, 1, 0, 0, -4, -3, 0, 3, 4, 1, 0, 0, -1,
+    -1, -3, 0, 3, 1, 0, 0, 0, 0, -3, -1, 2, 1, 0, 0, 0, 0, -2, -1, 1, 0, 0, 0, 45, 17, 2, 0, 0,
+    0, 0, 0, 44, 18, 2, 0, 0, 0, 0, 0, 39, 18, 4, 1, 0, 0, 0, 0, 27, 14, 6, 1, 0, 0, 0, 0, 9, 7,
+    8, 2, 0, 0, 0, 0, -5, 0, 10, 3, 0, 0, 0, 0, -10, -4, 10, 3, 0, 0, 0, 0, -8, -4, 8, 3, 0, 0,
+    0, 0, -5, -2, 5, 2, 0, 0, 0, 0, -2, -1, 3, 2, 0, 0, 0, 0, -1, 0, 1, 1, 0, 0, 0, 0, 0, 0, 0,
+    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0
+};
+
+/* Code of every Mono8 value. */
+static const int16_t tessary_features_codes[256] = {
+    0, 253, 356, 498, 616, 722, 822, 918, 1007, 1093, 1174, 1252, 1328, 1400, 1471, 1539, 1605,
+    1670, 1732, 1794, 1853, 1912, 1969, 2025, 2080, 2134, 2187, 2239, 2290, 2340, 2390, 2438,
+    2486, 2533, 2580, 2626, 2671, 2716, 2760, 2804, 2847, 2890, 2932, 2973, 3014, 3055, 3095,
+    3135, 3175, 3214, 3252, 3291, 3329, 3366, 3404, 3441, 3477, 3513, 3549, 3585, 3621, 3656,
+    3691, 3725, 3759, 3794, 3827, 3861, 3894, 3927, 3960, 3993, 4025, 4057, 4089, 4121, 4153,
+    4184, 4215, 4246, 4277, 4307, 4338, 4368, 4398, 4428, 4458, 4487, 4516, 4546, 4575, 4604,
+    4632, 4661, 4689, 4718, 4746, 4774, 4802, 4829, 4857, 4884, 4912, 4939, 4966, 4993, 5020,
+    5046, 5073, 5099, 5125, 5152, 5178, 5204, 5230, 5255, 5281, 5306, 5332, 5357, 5382, 5407,
+    5432, 5457, 5482, 5507, 5531, 5556, 5580, 5605, 5629, 5653, 5677, 5701, 5725, 5749, 5772,
+    5796, 5820, 5843, 5866, 5890, 5913, 5936, 5959, 5982, 6005, 6028, 6050, 6073, 6095, 6118,
+    6140, 6163, 6185, 6207, 6229, 6251, 6273, 6295, 6317, 6339, 6361, 6382, 6404, 6426, 6447,
+    6468, 6490, 6511, 6532, 6553, 6574, 6596, 6616, 6637, 6658, 6679, 6700, 6720, 6741, 6762,
+    6782, 6803, 6823, 6843, 6864, 6884, 6904, 6924, 6944, 6964, 6984, 7004, 7024, 7044, 7064,
+    7083, 7103, 7123, 7142, 7162, 7181, 7201, 7220, 7240, 7259, 7278, 7298, 7317, 7336, 7355,
+    7373, 7392, 7411, 7429, 7448, 7466, 7485, 7504, 7523, 7542, 7561, 7580, 7600, 7619, 7638,
+    7657, 7676, 7694, 7712, 7729, 7746, 7763, 7779, 7795, 7811, 7828, 7845, 7862, 7880, 7899,
+    7918, 7937, 7957, 7978, 7999, 8021, 8042, 8064, 8085, 8106, 8127, 8149, 8170, 8191
 };
 
 static const char *const tessary_features_names[16] = {
@@ -1016,6 +2066,7 @@ struct tessary_features_code_of {
     void (*responses)(const float *const *, ptrdiff_t, int, float *, char *, ptrdiff_t, int);
     void (*edges[1])(const float *const *, ptrdiff_t, int, float *, float *,
         unsigned char *);
+    void (*fft)(const float *, int, int, int, float *, char *, ptrdiff_t, ptrdiff_t, int);
 };
 
 #if !defined(__GNUC__) || tessary_features_MAX_LANES < 4
@@ -1026,7 +2077,7 @@ struct tessary_features_code_of {
 #define tessary_features_FN(x) tessary_features_##x##_base
 #define tessary_features_TARGET
 #include "tessary_features.c"
-static const struct tessary_features_code_of tessary_features_base = {tessary_features_responses_base, {tessary_features_edges0_base}};
+static const struct tessary_features_code_of tessary_features_base = {tessary_features_responses_base, {tessary_features_edges0_base}, NULL};
 #undef tessary_features_LANES
 #undef tessary_features_FN
 #undef tessary_features_TARGET
@@ -1036,7 +2087,7 @@ static const struct tessary_features_code_of tessary_features_base = {tessary_fe
 #define tessary_features_FN(x) tessary_features_##x##_avx2
 #define tessary_features_TARGET __attribute__((target("avx2,fma")))
 #include "tessary_features.c"
-static const struct tessary_features_code_of tessary_features_avx2 = {tessary_features_responses_avx2, {tessary_features_edges0_avx2}};
+static const struct tessary_features_code_of tessary_features_avx2 = {tessary_features_responses_avx2, {tessary_features_edges0_avx2}, NULL};
 #undef tessary_features_LANES
 #undef tessary_features_FN
 #undef tessary_features_TARGET
@@ -1047,24 +2098,43 @@ static const struct tessary_features_code_of tessary_features_avx2 = {tessary_fe
 #define tessary_features_FN(x) tessary_features_##x##_avx512
 #define tessary_features_TARGET __attribute__((target("avx512f,avx512vl,avx512bw,avx512dq,avx2,fma")))
 #include "tessary_features.c"
-static const struct tessary_features_code_of tessary_features_avx512 = {tessary_features_responses_avx512, {tessary_features_edges0_avx512}};
+static const struct tessary_features_code_of tessary_features_avx512 = {tessary_features_responses_avx512, {tessary_features_edges0_avx512}, NULL};
 #undef tessary_features_LANES
 #undef tessary_features_FN
 #undef tessary_features_TARGET
 #endif
 
+#if defined(__GNUC__) && defined(__x86_64__) && tessary_features_MAX_LANES >= 8
+/* What the processor and the operating system hold: asked of the processor itself, as not every
+ * compiler's run-time library can tell. 1: AVX2 and FMA, 2: AVX-512 F, VL, BW, DQ, 3: VNNI too. */
+static int tessary_features_processor(void)
+{
+    unsigned a, b, c, d, low, high;
+    int known = 0;
+    __cpuid(0, a, b, c, d);
+    if (a < 7) return 0;
+    __cpuid(1, a, b, c, d);
+    if ((c & (1u << 27)) == 0) return 0; /* OSXSAVE */
+    __asm__ volatile("xgetbv" : "=a"(low), "=d"(high) : "c"(0));
+    (void)high;
+    if ((low & 0x6u) == 0x6u && (c & (1u << 12)) != 0) {
+        __cpuid_count(7, 0, a, b, c, d);
+        if ((b & (1u << 5)) != 0) known = 1;
+        if (known && (low & 0xe6u) == 0xe6u && (b & 0xc0030000u) == 0xc0030000u) known = 2;
+        if (known == 2 && (c & (1u << 11)) != 0) known = 3;
+    }
+    return known;
+}
+#endif
+
 static const struct tessary_features_code_of *tessary_features_choose(void)
 {
 #if defined(__GNUC__) && defined(__x86_64__) && tessary_features_MAX_LANES >= 8
-    __builtin_cpu_init(); /* does nothing where the compiler's start-up code has done it */
+    const int known = tessary_features_processor();
+#if tessary_features_MAX_LANES >= 16
+    if (known >= 2) return &tessary_features_avx512;
 #endif
-#if defined(__GNUC__) && defined(__x86_64__) && tessary_features_MAX_LANES >= 16
-    if (__builtin_cpu_supports("avx512f") && __builtin_cpu_supports("avx512vl") &&
-        __builtin_cpu_supports("avx512bw") && __builtin_cpu_supports("avx512dq"))
-        return &tessary_features_avx512;
-#endif
-#if defined(__GNUC__) && defined(__x86_64__) && tessary_features_MAX_LANES >= 8
-    if (__builtin_cpu_supports("avx2") && __builtin_cpu_supports("fma")) return &tessary_features_avx2;
+    if (known >= 1) return &tessary_features_avx2;
 #endif
     return &tessary_features_base;
 }
@@ -1219,6 +2289,242 @@ static int tessary_features_overlap(ptrdiff_t row, ptrdiff_t plane, ptrdiff_t by
     return (row - bytes) / plane < tessary_features_KERNEL_COUNT - 1;
 }
 
+/* Check the arguments of a call that writes planes of values of some bytes, and fill in the job. */
+static int tessary_features_check_planes(struct tessary_features_picture *p, struct tessary_features_job *job, const tessary_features_pixel *image,
+    ptrdiff_t row_bytes, int width, int height, int first, int count, char *out,
+    ptrdiff_t out_row_bytes, ptrdiff_t out_plane_bytes, int bytes, const void *scratch)
+{
+    int code;
+    p->pixels = (const unsigned char *)image;
+    p->row_bytes = row_bytes;
+    p->width = width;
+    p->height = height;
+    code = tessary_features_check_picture(p, first, count);
+    if (code != tessary_features_OK) return code;
+    if (out == NULL) return tessary_features_NO_OUTPUT;
+    if ((uintptr_t)out % (unsigned)bytes != 0 || out_row_bytes % bytes != 0 ||
+        out_plane_bytes % bytes != 0)
+        return tessary_features_OUTPUT_MISALIGNED;
+    if (tessary_features_reach(out_row_bytes) < (ptrdiff_t)width * bytes) return tessary_features_BAD_OUTPUT_ROW_BYTES;
+    if (tessary_features_overlap(out_row_bytes, out_plane_bytes, (ptrdiff_t)width * bytes, count))
+        return tessary_features_BAD_OUTPUT_PLANE_BYTES;
+    if (scratch == NULL) return tessary_features_NO_SCRATCH;
+    job->scale = -1;
+    job->out = out;
+    job->row_bytes = out_row_bytes;
+    job->plane_bytes = out_plane_bytes;
+    job->orientation = NULL;
+    job->orientation_row_bytes = 0;
+    /* judged by the whole picture: bands of one picture are usually made side by side */
+    job->stream = (double)bytes * tessary_features_KERNEL_COUNT * width * height >= tessary_features_STREAM_FROM;
+    return tessary_features_OK;
+}
+
+static int tessary_features_check_edges(struct tessary_features_picture *p, struct tessary_features_job *job, const tessary_features_pixel *image,
+    ptrdiff_t row_bytes, int width, int height, int first, int count, int scale,
+    float *strength, ptrdiff_t strength_row_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, const void *scratch)
+{
+    int code;
+    p->pixels = (const unsigned char *)image;
+    p->row_bytes = row_bytes;
+    p->width = width;
+    p->height = height;
+    code = tessary_features_check_picture(p, first, count);
+    if (code != tessary_features_OK) return code;
+    if (scale < 0 || scale >= tessary_features_SCALE_COUNT) return tessary_features_BAD_SCALE;
+    if (strength == NULL) return tessary_features_NO_STRENGTH;
+    if ((uintptr_t)strength % 4u != 0 || strength_row_bytes % 4 != 0)
+        return tessary_features_STRENGTH_MISALIGNED;
+    if (tessary_features_reach(strength_row_bytes) < (ptrdiff_t)width * 4) return tessary_features_BAD_STRENGTH_ROW_BYTES;
+    if (orientation == NULL) return tessary_features_NO_ORIENTATION;
+    if (tessary_features_reach(orientation_row_bytes) < width) return tessary_features_BAD_ORIENTATION_ROW_BYTES;
+    if (scratch == NULL) return tessary_features_NO_SCRATCH;
+    job->scale = scale;
+    job->out = (char *)strength;
+    job->row_bytes = strength_row_bytes;
+    job->plane_bytes = 0;
+    job->orientation = orientation;
+    job->orientation_row_bytes = orientation_row_bytes;
+    job->stream = 0;
+    return tessary_features_OK;
+}
+
+/* ---- fixed point */
+
+struct tessary_features_code_of_q {
+    uint64_t (*responses)(const int16_t *const *, ptrdiff_t, int, void *, char *, ptrdiff_t, int);
+    void (*edges[1])(const int16_t *const *, ptrdiff_t, int, void *, float *,
+        unsigned char *);
+};
+
+static const struct tessary_features_code_of_q tessary_features_q_base = {tessary_features_q_responses_base, {tessary_features_q_edges0_base}};
+#if defined(__GNUC__) && defined(__x86_64__) && tessary_features_MAX_LANES >= 8
+static const struct tessary_features_code_of_q tessary_features_q_avx2 = {tessary_features_q_responses_avx2, {tessary_features_q_edges0_avx2}};
+#endif
+#if defined(__GNUC__) && defined(__x86_64__) && tessary_features_MAX_LANES >= 16
+static const struct tessary_features_code_of_q tessary_features_q_avx512 = {tessary_features_q_responses_avx512, {tessary_features_q_edges0_avx512}};
+#endif
+
+static const struct tessary_features_code_of_q *tessary_features_choose_q(void)
+{
+#if defined(__GNUC__) && defined(__x86_64__) && tessary_features_MAX_LANES >= 8
+    const int known = tessary_features_processor();
+#if tessary_features_MAX_LANES >= 16
+    if (known >= 3) return &tessary_features_q_avx512;
+#endif
+    if (known >= 1) return &tessary_features_q_avx2;
+#endif
+    return &tessary_features_q_base;
+}
+
+static int16_t tessary_features_value_q(tessary_features_pixel p, int *bad)
+{
+    (void)bad;
+    return tessary_features_codes[p];
+}
+
+/* As tessary_features_fill, in codes. */
+static int tessary_features_fill_q(const struct tessary_features_picture *p, int y, int from, int count, int16_t *to)
+{
+    const int end = count + 2 * tessary_features_RADIUS;
+    const int inner = p->width - from + tessary_features_RADIUS;
+    const tessary_features_pixel *row;
+    int x = 0, bad = 0;
+    y = tessary_features_border(y, p->height);
+    memset(to + end, 0, (size_t)(tessary_features_LINE_Q - 2 * tessary_features_RADIUS) * sizeof(int16_t));
+    if (y < 0) {
+        memset(to, 0, (size_t)end * sizeof(int16_t));
+        return 0;
+    }
+    row = (const tessary_features_pixel *)(const void *)(p->pixels + (ptrdiff_t)y * p->row_bytes);
+    for (; x < tessary_features_RADIUS - from; ++x) {
+        const int i = tessary_features_border(x + from - tessary_features_RADIUS, p->width);
+        to[x] = (int16_t)(i < 0 ? 0 : tessary_features_value_q(row[i], &bad));
+    }
+    for (; x < end && x < inner; ++x) to[x] = tessary_features_value_q(row[x + from - tessary_features_RADIUS], &bad);
+    for (; x < end; ++x) {
+        const int i = tessary_features_border(x + from - tessary_features_RADIUS, p->width);
+        to[x] = (int16_t)(i < 0 ? 0 : tessary_features_value_q(row[i], &bad));
+    }
+    return bad;
+}
+
+static size_t tessary_features_ring_width_q(int width)
+{
+    const int tile = width < tessary_features_TILE ? width : tessary_features_TILE;
+    return (size_t)((tile + 31) / 32 * 32 + tessary_features_LINE_Q);
+}
+
+/* One row of outputs; returns how many counts stand at the ends of their range. */
+static uint64_t tessary_features_row_q(const struct tessary_features_code_of_q *code, const struct tessary_features_job *job,
+    const int16_t *const *rows, int from, int count, int y, void *work)
+{
+    const int bytes = job->scale < 0 ? 2 : 4;
+    char *const out = job->out + (ptrdiff_t)y * job->row_bytes + (ptrdiff_t)from * bytes;
+    int n = tessary_features_CHUNK - (int)(((uintptr_t)out & 63u) / (unsigned)bytes);
+    uint64_t ends = 0;
+    int x = 0;
+    while (x < count) {
+        char *const to = out + (ptrdiff_t)x * bytes;
+        if (n > count - x) n = count - x;
+        if (job->scale < 0) {
+            ends += code->responses(rows, x, n, work, to, job->plane_bytes, job->stream);
+        } else {
+            code->edges[job->scale](rows, x, n, work, (float *)(void *)to,
+                job->orientation + (ptrdiff_t)y * job->orientation_row_bytes + from + x);
+        }
+        x += n;
+        n = tessary_features_CHUNK;
+    }
+    return ends;
+}
+
+static int tessary_features_walk_q(const struct tessary_features_picture *p, const struct tessary_features_job *job, int first, int count,
+    uint64_t *saturated, void *scratch)
+{
+    const struct tessary_features_code_of_q *const code = tessary_features_choose_q();
+    const size_t width = tessary_features_ring_width_q(p->width);
+    int16_t *const ring = (int16_t *)(void *)((unsigned char *)scratch +
+        ((64u - ((uintptr_t)scratch & 63u)) & 63u));
+    void *const work = ring + tessary_features_SIZE * width;
+    uint64_t ends = 0;
+    int bad = 0, from;
+    for (from = 0; from < p->width; from += tessary_features_TILE) {
+        const int part = p->width - from < tessary_features_TILE ? p->width - from : tessary_features_TILE;
+        const int16_t *rows[tessary_features_SIZE];
+        int y, j;
+        for (j = 0; j < tessary_features_SIZE - 1; ++j) {
+            bad |= tessary_features_fill_q(p, first + j - tessary_features_RADIUS, from, part, ring + (size_t)j * width);
+        }
+        for (y = 0; y < count; ++y) {
+            const int last = (y + tessary_features_SIZE - 1) % tessary_features_SIZE;
+            bad |= tessary_features_fill_q(p, first + y + tessary_features_RADIUS, from, part, ring + (size_t)last * width);
+            for (j = 0; j < tessary_features_SIZE; ++j) {
+                rows[j] = ring + (size_t)((y + j) % tessary_features_SIZE) * width;
+            }
+            ends += tessary_features_row_q(code, job, rows, from, part, y, work);
+        }
+    }
+#if defined(__GNUC__) && defined(__SSE2__)
+    if (job->stream) _mm_sfence();
+#endif
+    if (saturated != NULL) *saturated = ends;
+    return bad ? tessary_features_BAD_PIXEL : tessary_features_OK;
+}
+
+float tessary_features_q_step(int index)
+{
+    static const float steps[16] = {
+        0.0133973919f, 0.0133973919f, 0.0133973919f, 0.0133973919f, 0.0133973919f,
+        0.0133973919f, 0.0133973919f, 0.0133973919f, 0.0133973919f, 0.0133973919f,
+        0.0133973919f, 0.0133973919f, 0.0133973919f, 0.0133973919f, 0.0133973919f, 0.0133973919f
+    };
+    return index < 0 || index >= tessary_features_KERNEL_COUNT ? 0.0f : steps[index];
+}
+
+int tessary_features_responses_q_rows(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int first_row, int row_count, int16_t *out, ptrdiff_t out_row_bytes,
+    ptrdiff_t out_plane_bytes, uint64_t *saturated, void *scratch)
+{
+    struct tessary_features_picture p;
+    struct tessary_features_job job;
+    const int code = tessary_features_check_planes(&p, &job, image, row_bytes, width, height, first_row,
+        row_count, (char *)out, out_row_bytes, out_plane_bytes, 2, scratch);
+    if (code != tessary_features_OK) return code;
+    return tessary_features_walk_q(&p, &job, first_row, row_count, saturated, scratch);
+}
+
+int tessary_features_responses_q(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int16_t *out, ptrdiff_t out_row_bytes, ptrdiff_t out_plane_bytes, uint64_t *saturated,
+    void *scratch)
+{
+    return tessary_features_responses_q_rows(image, row_bytes, width, height, 0, height,
+        out, out_row_bytes, out_plane_bytes, saturated, scratch);
+}
+
+int tessary_features_edges_q_rows(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int first_row, int row_count, int scale,
+    float *strength, ptrdiff_t strength_row_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, void *scratch)
+{
+    struct tessary_features_picture p;
+    struct tessary_features_job job;
+    const int code = tessary_features_check_edges(&p, &job, image, row_bytes, width, height, first_row,
+        row_count, scale, strength, strength_row_bytes, orientation, orientation_row_bytes,
+        scratch);
+    if (code != tessary_features_OK) return code;
+    return tessary_features_walk_q(&p, &job, first_row, row_count, NULL, scratch);
+}
+
+int tessary_features_edges_q(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height, int scale,
+    float *strength, ptrdiff_t strength_row_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, void *scratch)
+{
+    return tessary_features_edges_q_rows(image, row_bytes, width, height, 0, height, scale,
+        strength, strength_row_bytes, orientation, orientation_row_bytes, scratch);
+}
+
 /* ---- what a program calls */
 
 int tessary_features_abi(void) { return tessary_features_ABI; }
@@ -1244,8 +2550,8 @@ const char *tessary_features_message(int code)
     case tessary_features_BAD_ROWS: return "first_row and row_count do not lie inside the picture";
     case tessary_features_BAD_SCALE: return "there is no such scale in this bank";
     case tessary_features_NO_OUTPUT: return "out is NULL";
-    case tessary_features_OUTPUT_MISALIGNED: return "out, out_row_bytes or out_plane_bytes is not a multiple of 4";
-    case tessary_features_BAD_OUTPUT_ROW_BYTES: return "out_row_bytes is smaller than a row of floats";
+    case tessary_features_OUTPUT_MISALIGNED: return "out, out_row_bytes or out_plane_bytes is not a multiple of a value's size";
+    case tessary_features_BAD_OUTPUT_ROW_BYTES: return "out_row_bytes is smaller than a row of values";
     case tessary_features_BAD_OUTPUT_PLANE_BYTES: return "out_plane_bytes makes the planes overlap";
     case tessary_features_NO_STRENGTH: return "strength is NULL";
     case tessary_features_STRENGTH_MISALIGNED: return "strength or strength_row_bytes is not a multiple of 4";
@@ -1260,9 +2566,16 @@ const char *tessary_features_message(int code)
 
 size_t tessary_features_scratch_bytes(int width, int height)
 {
+    size_t bytes;
     if (width < tessary_features_SIZE || width > tessary_features_LONGEST) return 0;
     if (height < tessary_features_SIZE || height > tessary_features_LONGEST) return 0;
-    return (tessary_features_SIZE * tessary_features_ring_width(width) + tessary_features_SCRATCH) * sizeof(float) + 64;
+    bytes = (tessary_features_SIZE * tessary_features_ring_width(width) + tessary_features_SCRATCH) * sizeof(float) + 64;
+    {
+        const size_t codes = tessary_features_SIZE * tessary_features_ring_width_q(width) * sizeof(int16_t)
+            + tessary_features_SCRATCH_Q + 64;
+        if (codes > bytes) bytes = codes;
+    }
+    return bytes;
 }
 
 int tessary_features_responses_rows(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
@@ -1271,29 +2584,11 @@ int tessary_features_responses_rows(const tessary_features_pixel *image, ptrdiff
 {
     struct tessary_features_picture p;
     struct tessary_features_job job;
-    int code;
-    p.pixels = (const unsigned char *)image;
-    p.row_bytes = row_bytes;
-    p.width = width;
-    p.height = height;
-    code = tessary_features_check_picture(&p, first_row, row_count);
+    int code = tessary_features_check_planes(&p, &job, image, row_bytes, width, height, first_row,
+        row_count, (char *)out, out_row_bytes, out_plane_bytes, 4, scratch);
     if (code != tessary_features_OK) return code;
-    if (out == NULL) return tessary_features_NO_OUTPUT;
-    if ((uintptr_t)out % 4u != 0 || out_row_bytes % 4 != 0 || out_plane_bytes % 4 != 0)
-        return tessary_features_OUTPUT_MISALIGNED;
-    if (tessary_features_reach(out_row_bytes) < (ptrdiff_t)width * 4) return tessary_features_BAD_OUTPUT_ROW_BYTES;
-    if (tessary_features_overlap(out_row_bytes, out_plane_bytes, (ptrdiff_t)width * 4, row_count))
-        return tessary_features_BAD_OUTPUT_PLANE_BYTES;
-    if (scratch == NULL) return tessary_features_NO_SCRATCH;
-    job.scale = -1;
-    job.out = (char *)out;
-    job.row_bytes = out_row_bytes;
-    job.plane_bytes = out_plane_bytes;
-    job.orientation = NULL;
-    job.orientation_row_bytes = 0;
-    /* judged by the whole picture: bands of one picture are usually made side by side */
-    job.stream = 4.0 * tessary_features_KERNEL_COUNT * width * height >= tessary_features_STREAM_FROM;
-    return tessary_features_walk(&p, &job, first_row, row_count, scratch);
+    code = tessary_features_walk(&p, &job, first_row, row_count, scratch);
+    return code;
 }
 
 int tessary_features_responses(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
@@ -1310,28 +2605,10 @@ int tessary_features_edges_rows(const tessary_features_pixel *image, ptrdiff_t r
 {
     struct tessary_features_picture p;
     struct tessary_features_job job;
-    int code;
-    p.pixels = (const unsigned char *)image;
-    p.row_bytes = row_bytes;
-    p.width = width;
-    p.height = height;
-    code = tessary_features_check_picture(&p, first_row, row_count);
+    const int code = tessary_features_check_edges(&p, &job, image, row_bytes, width, height, first_row,
+        row_count, scale, strength, strength_row_bytes, orientation, orientation_row_bytes,
+        scratch);
     if (code != tessary_features_OK) return code;
-    if (scale < 0 || scale >= tessary_features_SCALE_COUNT) return tessary_features_BAD_SCALE;
-    if (strength == NULL) return tessary_features_NO_STRENGTH;
-    if ((uintptr_t)strength % 4u != 0 || strength_row_bytes % 4 != 0)
-        return tessary_features_STRENGTH_MISALIGNED;
-    if (tessary_features_reach(strength_row_bytes) < (ptrdiff_t)width * 4) return tessary_features_BAD_STRENGTH_ROW_BYTES;
-    if (orientation == NULL) return tessary_features_NO_ORIENTATION;
-    if (tessary_features_reach(orientation_row_bytes) < width) return tessary_features_BAD_ORIENTATION_ROW_BYTES;
-    if (scratch == NULL) return tessary_features_NO_SCRATCH;
-    job.scale = scale;
-    job.out = (char *)strength;
-    job.row_bytes = strength_row_bytes;
-    job.plane_bytes = 0;
-    job.orientation = orientation;
-    job.orientation_row_bytes = orientation_row_bytes;
-    job.stream = 0;
     return tessary_features_walk(&p, &job, first_row, row_count, scratch);
 }
 

@@ -43,7 +43,7 @@ extern "C" {
 #endif
 
 /* Compare with tessary_features_abi(): they differ when library and header do not belong together. */
-#define tessary_features_ABI 705661
+#define tessary_features_ABI 144357961
 
 #define tessary_features_KERNEL_COUNT 16
 #define tessary_features_KERNEL_SIZE 25
@@ -57,8 +57,9 @@ typedef uint8_t tessary_features_pixel;
  * Use them as initialisers: static const float t[] = tessary_features_STRENGTH_THRESHOLDS; */
 #define tessary_features_THRESHOLD_COUNT 5
 #define tessary_features_FALSE_EDGES_PER_MEGAPIXEL {0.100000001f, 1.0f, 10.0f, 100.0f, 1000.0f}
-#define tessary_features_STRENGTH_THRESHOLDS {6.18423128f, 5.78439808f, 5.35153341f, 4.87529564f, 4.33824301f}
+#define tessary_features_STRENGTH_THRESHOLDS {6.20793295f, 5.81003618f, 5.37952852f, 4.90630722f, 4.37342644f}
 #define tessary_features_HYSTERESIS 0.699999988f
+#define tessary_features_FALSE_GROUPS_PER_MEGAPIXEL {0.00898534991f, 0.0857046694f, 0.814312935f, 7.6979351f, 72.2568283f}
 
 /* What every function that returns int may return; tessary_features_message() says it in words. */
 enum tessary_features_code {
@@ -148,6 +149,35 @@ tessary_features_API int tessary_features_edges(const tessary_features_pixel *im
 tessary_features_API int tessary_features_edges_rows(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
     int first_row, int row_count, int scale,
     float *strength, ptrdiff_t strength_row_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, void *scratch);
+
+/* ---- fixed point
+ *
+ * The same bank in 16-bit integers: faster, and the same bits on every processor. A response
+ * is a count; count * tessary_features_q_step(kernel) is its value. What is exact, what is rounded (halves
+ * upwards, once, at the end) and how far that is from the exact response is stated in the
+ * bank's manifest. No input can make a sum overflow. */
+
+/* Value of one count of a kernel; 0 when there is no such kernel. */
+tessary_features_API float tessary_features_q_step(int index);
+
+/* As tessary_features_responses, in counts: kernel k, row y, column x goes to
+ * out + k * out_plane_bytes + y * out_row_bytes + 2 * x (in bytes). *saturated (unless
+ * NULL) becomes the number of counts at the ends of the range, -32767 or 32767;
+ * for this bank no input can reach them. */
+tessary_features_API int tessary_features_responses_q(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int16_t *out, ptrdiff_t out_row_bytes, ptrdiff_t out_plane_bytes, uint64_t *saturated,
+    void *scratch);
+tessary_features_API int tessary_features_responses_q_rows(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width,
+    int height, int first_row, int row_count, int16_t *out, ptrdiff_t out_row_bytes,
+    ptrdiff_t out_plane_bytes, uint64_t *saturated, void *scratch);
+
+/* As tessary_features_edges, from counts; strength is in the units of tessary_features_edges. */
+tessary_features_API int tessary_features_edges_q(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int scale, float *strength, ptrdiff_t strength_row_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, void *scratch);
+tessary_features_API int tessary_features_edges_q_rows(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int first_row, int row_count, int scale, float *strength, ptrdiff_t strength_row_bytes,
     unsigned char *orientation, ptrdiff_t orientation_row_bytes, void *scratch);
 
 #ifdef __cplusplus
