@@ -268,7 +268,7 @@ def export(run: Path | None, terminal: Terminal, as_json: bool, **options: Any) 
     if run is None and options["out"] is None:
         raise UsageError("export --taps needs an output folder", remedy="add -o BANK")
     from patchlab.pipeline.desk import Desk
-    from patchlab.pipeline.run import export_run, export_taps
+    from patchlab.pipeline.exports import export_run, export_taps
 
     with terminal.working():
         desk = Desk(run or options["out"], settings, True, terminal, terminal.note)
