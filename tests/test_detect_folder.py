@@ -11,12 +11,13 @@ from PIL import Image
 
 from patchlab import bank as banks
 from patchlab.bank import lattice
-from patchlab.cli import commands
+from patchlab.cli import commands, main
 from patchlab.errors import InputError, Interrupted, UsageError
 from patchlab.images.scenes import Camera, render_scene
 from patchlab.pipeline import detect as job
 from patchlab.progress import silent
-from patchlab.types import Bank, InputTable, Thresholds
+from patchlab.report import edge_pictures
+from patchlab.types import Bank, EdgeMap, InputTable, Thresholds
 
 CAMERA = Camera(bits=8, gain=0.5, full_well=600, read_noise=2.0, blur_sigma_px=0.8)
 RATES = np.array([1.0, 10.0, 1000.0])
@@ -145,8 +146,149 @@ def test_another_request_does_not_go_on(bank, folder, whole, tmp_path):
 def test_too_many_bad_pictures_are_a_failure(bank, tmp_path):
     (tmp_path / "p").mkdir()
     (tmp_path / "p" / "a.png").write_bytes(b"nothing")
-    with pytest.raises(InputError, match="1 of 1 pictures cannot serve"):
+    with pytest.raises(InputError, match="1 of 1 pictures cannot serve") as failed:
         run(bank, tmp_path / "p", tmp_path / "d")
+    assert failed.value.where == str(tmp_path / "p")
+    assert not (tmp_path / "d").exists()  # nothing was found, so nothing is left
+
+
+def test_a_failure_keeps_what_was_found_and_what_is_not_its_own(bank, folder, tmp_path):
+    pictures, out = tmp_path / "p", tmp_path / "d"
+    pictures.mkdir()
+    (pictures / "bad.png").write_bytes(b"nothing")
+    out.mkdir()
+    (out / "mine.txt").write_text("kept")
+    with pytest.raises(InputError):
+        run(bank, pictures, out, force=True)
+    assert [p.name for p in out.iterdir()] == ["mine.txt"]
+    (pictures / "a.png").write_bytes((folder / "a.png").read_bytes())
+    with pytest.raises(InputError, match="1 of 2"):
+        run(bank, pictures, out, force=True)
+    assert {"edgels.csv", "edgels", job.JOURNAL, "mine.txt"} == {p.name for p in out.iterdir()}
+
+
+def test_nothing_is_written_among_the_photographs(bank, folder, tmp_path):
+    before = contents(folder)
+    alone = folder / "a.png"
+    for pictures, out in (
+        (folder, folder),
+        (folder, folder / "new"),
+        (folder, folder / "deep" / ".." / "new"),
+        (alone, folder),
+    ):
+        with pytest.raises(UsageError, match="nothing is written under the photographs"):
+            run(bank, pictures, out, force=True)
+    copy = tmp_path / "d" / "overlay"  # a place that the output itself would fill and clear
+    copy.mkdir(parents=True)
+    (copy / "a.png").write_bytes(alone.read_bytes())
+    for pictures in (copy, copy / "a.png"):
+        with pytest.raises(UsageError, match="nothing is written under the photographs"):
+            run(bank, pictures, tmp_path / "d", force=True)
+    assert contents(folder) == before
+    link = tmp_path / "link"
+    link.symlink_to(folder)
+    with pytest.raises(UsageError, match="nothing is written under the photographs"):
+        run(bank, folder, link / "new")
+    run(bank, copy / "a.png", copy / "d")  # beside one picture a folder of its own may stand
+
+
+def test_an_output_that_is_a_file_is_refused(bank, folder, tmp_path):
+    (tmp_path / "file").write_text("kept")
+    for out in (tmp_path / "file", tmp_path / "file" / "d"):
+        for options in ({}, {"force": True}, {"resume": True}):
+            with pytest.raises(UsageError, match="the output is a file"):
+                run(bank, folder, out, **options)
+    assert (tmp_path / "file").read_text() == "kept"
+
+
+def test_no_two_pictures_share_a_file(bank, folder, tmp_path):
+    pictures, out = tmp_path / "p", tmp_path / "d"
+    pictures.mkdir()
+    for name, source in (("a#b.png", "a.png"), ("a_pageb.png", "e.png")):
+        (pictures / name).write_bytes((folder / source).read_bytes())
+    pages = [Image.open(folder / name) for name in ("f.png", "g.png")]
+    pages[0].save(pictures / "t.tif", save_all=True, append_images=pages[1:])
+    pages[0].save(pictures / "t.tif_page0.tif")
+    result = run(bank, pictures, out)
+    assert [i["path"] for i in result["images"]] == [
+        "a#b.png", "a_pageb.png", "t.tif#0", "t.tif#1", "t.tif_page0.tif"
+    ]  # fmt: skip
+    files = ("a#b.png", "a_pageb.png", "t.tif_page0", "t.tif_page1", "t.tif_page0.tif")
+    assert {p.name for p in (out / "edgels").iterdir()} == {f"{name}.csv" for name in files}
+    for name, image in zip(files, result["images"], strict=True):
+        rows = (out / "edgels" / f"{name}.csv").read_text().splitlines()[1:]
+        assert len(rows) == image["edgels"] > 0
+
+
+def test_force_leaves_nothing_of_the_job_before(bank, folder, tmp_path):
+    out, alone = tmp_path / "d", folder / "a.png"
+    draw = edge_pictures
+    run(bank, folder, out, draw=draw)
+    (out / "mine.txt").write_text("kept")
+    assert (out / "overlay" / "e.png.png").is_file()
+    run(bank, alone, out, force=True)
+    (out / "mine.txt").unlink()
+    run(bank, alone, tmp_path / "fresh")
+    assert contents(out) == contents(tmp_path / "fresh")
+    assert {p.name for p in out.iterdir()} == {p.name for p in (tmp_path / "fresh").iterdir()}
+
+
+def test_force_clears_only_what_a_detection_wrote(bank, folder, tmp_path):
+    own = tmp_path / "d" / "edges" / "notes.txt"
+    own.parent.mkdir(parents=True)
+    own.write_text("kept")
+    photo = own.parent / "photo.png"
+    photo.write_bytes((folder / "a.png").read_bytes())
+    kept = photo.read_bytes()
+    run(bank, folder / "a.png", tmp_path / "d", force=True, draw=edge_pictures)
+    half = own.parent / ".a.png.png.x1y2z3_k"  # the draft of a killed worker
+    half.write_bytes(b"half")
+    (own.parent / "t.tif_page0.png").write_bytes(b"of a page")
+    run(bank, folder / "e.png", tmp_path / "d", force=True)
+    assert {p.name for p in own.parent.iterdir()} == {"notes.txt", "photo.png"}
+    assert own.read_text() == "kept"
+    assert photo.read_bytes() == kept
+
+
+def test_every_folder_that_a_drawing_fills_is_known():
+    made = render_scene(0, (40, 40), CAMERA, light=300, smallest=10.0, largest=20.0)
+    flat = np.zeros((40, 40), np.float32)
+    none = np.zeros((40, 40), np.uint8)
+    drawn = edge_pictures(made.frame, EdgeMap(flat, none, none, flat > 0, 5.0), 4)
+    assert {"edgels", *drawn} == set(job.PLACES)
+
+
+@pytest.mark.parametrize(
+    ("words", "said"),
+    [
+        (("--threshold", "inf"), "must be positive and finite, not inf"),
+        (("--threshold", "nan"), "must be positive and finite, not nan"),
+        (("--false-edges", "inf"), "must be a finite number, not inf"),
+        (("--false-edges", "nan"), "must be a finite number, not nan"),
+        (("--max-bad", "nan"), "must be between 0 and 1, not nan"),
+        (("--max-bad", "-0.1"), "must be between 0 and 1, not -0.1"),
+        (("--max-bad", "1.5"), "must be between 0 and 1, not 1.5"),
+    ],
+)
+def test_numbers_that_mean_nothing_are_refused(bank, folder, tmp_path, capsys, words, said):
+    out = tmp_path / "d"
+    with pytest.raises(SystemExit) as ended:
+        main(["detect", str(bank), str(folder), "-o", str(out), *words])
+    assert ended.value.code == 2
+    told = capsys.readouterr().err.strip()
+    assert said in told
+    assert "\n" not in told
+    assert not out.exists()
+
+
+def test_a_bank_without_thresholds_claims_nothing_about_noise(bank, folder, tmp_path):
+    plain, _, _ = banks.read_bank(bank)
+    plain = replace(plain, thresholds=None, line_thresholds=None)
+    banks.write_bank(tmp_path / "b", plain, banks.make_plan(plain), {}, seed=0, settings={})
+    with pytest.raises(UsageError, match="this bank has no thresholds; give a strength"):
+        run(tmp_path / "b", folder, tmp_path / "d")
+    request = job.Request(threshold=5.2)
+    assert run(tmp_path / "b", folder / "a.png", tmp_path / "d", request=request)["images"]
 
 
 def test_kinds_and_pictures_from_the_command_line(bank, folder, tmp_path):

@@ -2,6 +2,7 @@
 
 from __future__ import annotations
 
+import math
 from collections.abc import Callable, Mapping
 from dataclasses import dataclass
 from typing import Any, Literal
@@ -48,12 +49,16 @@ def threshold_of(
     if threshold is not None:
         if rate is not None:
             raise UsageError("give a false-alarm rate or a strength threshold, not both")
-        if not threshold > 0:
-            raise UsageError(f"the strength threshold must be positive, not {threshold:g}")
+        if not 0 < threshold < math.inf:
+            raise UsageError(
+                f"the strength threshold must be positive and finite, not {threshold:g}"
+            )
         return float(threshold), ratio
+    if rate is not None and not math.isfinite(rate):
+        raise UsageError(f"the rate of false edges must be a finite number, not {rate:g}")
     if table is None:
         raise UsageError(
-            "this bank has no thresholds, because its camera's noise is not known",
+            "this bank has no thresholds",
             where=bank.name,
             remedy="give a strength threshold instead of a false-alarm rate",
         )

@@ -12,6 +12,7 @@ import functools
 import io
 import json
 import os
+import re
 from collections.abc import Callable, Iterator, Mapping
 from dataclasses import dataclass, replace
 from pathlib import Path
@@ -30,6 +31,9 @@ from patchlab.workers import map_ordered
 Draw = Callable[[Frame, EdgeMap, int], Mapping[str, bytes]]
 JOURNAL = "journal.jsonl"
 TABLE = "edgels.csv"
+RESULT = "detect.json"
+PLACES = ("edgels", "strength", "orientation", "edges", "overlay")
+"""Folders with files of single pictures: the edgels', and those that a drawing fills."""
 
 
 @dataclass(frozen=True)
@@ -98,8 +102,13 @@ def _options(bank: Bank) -> images.ReadOptions:
     return replace(known, bayer=plane) if plane else known  # type: ignore[arg-type]
 
 
-def _stem(path: str) -> str:
-    return path.replace("#", "_page")
+def _stem(file: str, path: str) -> str:
+    """The name of a picture's files: that of its own file, and the page's where it has several.
+
+    No two are equal: a file ends in a suffix of pictures, and a page never does.
+    """
+    page = path.removeprefix(f"{file}#")
+    return file if page == path else f"{file}_page{page}"
 
 
 def _one(bank: Bank, frame: Frame, respond: Any, task: _Task) -> dict[str, Any]:
@@ -114,7 +123,7 @@ def _one(bank: Bank, frame: Frame, respond: Any, task: _Task) -> dict[str, Any]:
         invalid=frame.invalid,
         blur_px=bank.provenance.get("blur_sigma_px"),
     )
-    stem = _stem(frame.path)
+    stem = _stem(task.file, frame.path)
     store.write_file(out / "edgels" / f"{stem}.csv", edges.edgels_csv(found.edgels))
     if task.draw is not None:
         for name, data in task.draw(frame, found.shown, orientation_count(bank)).items():
@@ -188,7 +197,8 @@ def _rows(out: Path, lines: Mapping[str, dict[str, Any]], order: tuple[str, ...]
         for frame in lines.get(name, {"frames": []})["frames"]:
             cell = io.StringIO()
             csv.writer(cell, lineterminator="").writerow([frame["path"]])
-            own = (out / "edgels" / f"{_stem(frame['path'])}.csv").read_text(encoding="utf-8")
+            path = out / "edgels" / f"{_stem(name, frame['path'])}.csv"
+            own = path.read_text(encoding="utf-8")
             yield "".join(f"{cell.getvalue()},{row}\n" for row in own.splitlines()[1:])
 
 
@@ -197,6 +207,63 @@ def _write_table(out: Path, lines: Mapping[str, dict[str, Any]], order: tuple[st
     with draft.open("w", encoding="utf-8", newline="\n") as table:
         table.writelines(_rows(out, lines, order))
     os.replace(draft, out / TABLE)
+
+
+# ---------------------------------------------------------------- the output's folder
+
+
+def _check_place(out: Path, pictures: Path) -> None:
+    """Refuse an output that is a file, or that would put files among the photographs."""
+    if any(path.exists() and not path.is_dir() for path in (out, *out.parents)):
+        raise UsageError("the output is a file", where=str(out), remedy="name a folder")
+    if not pictures.exists():
+        return
+    there, photos = out.resolve(), pictures.resolve()
+    above = (photos, *photos.parents)
+    among = photos in (there, *there.parents) if photos.is_dir() else there == photos.parent
+    if among or any(there / name in above for name in PLACES):
+        raise UsageError(
+            "nothing is written under the photographs",
+            where=str(out),
+            remedy="choose an output folder elsewhere",
+        )
+
+
+def _clear(out: Path) -> None:
+    """Remove what an earlier job wrote here, and nothing else."""
+    if not any((out / name).is_file() for name in (JOURNAL, RESULT)):
+        return
+    for name in PLACES:
+        if not (out / name).is_symlink():
+            _clear_place(out / name)
+    for name in (f".{TABLE}.part", TABLE, RESULT, JOURNAL):
+        (out / name).unlink(missing_ok=True)
+
+
+def _clear_place(place: Path) -> None:
+    for at, _, names in os.walk(place, topdown=False):
+        for name in filter(_is_ours, names):
+            (Path(at) / name).unlink()
+        if not os.listdir(at):
+            os.rmdir(at)
+
+
+def _is_ours(name: str) -> bool:
+    """Whether a file is named as a picture's files are, or as the draft of one.
+
+    A person's own ``a.png`` is not; ``a.png.png`` and ``a.tif_page0.csv`` are.
+    """
+    whole = name[1:].rpartition(".")[0] if name.startswith(".") else name
+    stem, _, kind = whole.rpartition(".")
+    picture = Path(re.sub(r"_page\d+$", "", stem))
+    return kind in ("csv", "png") and picture.suffix.lower() in images.SUFFIXES
+
+
+def _leave_nothing(out: Path, *, made: bool) -> None:
+    """Clear up after a job that found no edges in any picture."""
+    _clear(out)
+    if made and not any(out.iterdir()):
+        out.rmdir()
 
 
 # ---------------------------------------------------------------- the job
@@ -231,9 +298,14 @@ def detect(
 
     Raises
     ------
-    InputError : there are no pictures, or more than ``max_bad`` of them cannot serve.
-    UsageError : the output exists, or the bank has no promise to set a threshold from.
+    InputError : there are no pictures, or more than ``max_bad`` of them cannot serve; when
+        none could, nothing is left at ``out``.
+    UsageError : the output exists, is a file or lies among the pictures; ``max_bad`` is not a
+        share; or the bank has no promise to set a threshold from.
     """
+    if not 0 <= max_bad <= 1:
+        raise UsageError(f"the share of bad pictures must be between 0 and 1, not {max_bad:g}")
+    _check_place(out, pictures)
     folder = bank_folder(path)
     bank, _, head = banks.read_bank(folder)
     levels = edges.levels_of(bank, request.what, request.rate, request.threshold)
@@ -242,10 +314,12 @@ def detect(
     if not listing.files:
         raise InputError("there are no pictures here", where=str(pictures))
     journal = _Journal(out, {"bank": head["id"], "thresholds": told, "pictures": draw is not None})
-    if resume and out.exists():
+    made = not out.exists()
+    if resume and not made:
         journal.reopen()
     else:
         may_write(out, force)
+        _clear(out)
         journal.begin()
     root = listing.root
     left = [
@@ -263,25 +337,30 @@ def detect(
             progress("detect", min(done, len(listing.files)), len(listing.files), line["file"])
     finally:
         _write_table(out, journal.lines, listing.files)
-    return _result(head["id"], told, journal, listing.files, out, max_bad)
+    lines = [journal.lines[name] for name in listing.files]
+    try:
+        _check_bad(lines, pictures, max_bad)
+    except InputError:
+        if not any(line["frames"] for line in lines):
+            _leave_nothing(out, made=made)
+        raise
+    return _result(head["id"], told, lines, out)
+
+
+def _check_bad(lines: list[dict[str, Any]], pictures: Path, max_bad: float) -> None:
+    bad = [line for line in lines if "reason" in line]
+    if len(bad) > max_bad * len(lines):
+        raise InputError(
+            f"{len(bad)} of {len(lines)} pictures cannot serve",
+            where=str(pictures),
+            remedy=f"the first: {bad[0]['file']}: {bad[0]['reason']}",
+        )
 
 
 def _result(
-    bank_id: str,
-    told: Mapping[str, float],
-    journal: _Journal,
-    files: tuple[str, ...],
-    out: Path,
-    max_bad: float,
+    bank_id: str, told: Mapping[str, float], lines: list[dict[str, Any]], out: Path
 ) -> dict[str, Any]:
-    lines = [journal.lines[name] for name in files]
     bad = [line for line in lines if "reason" in line]
-    if len(bad) > max_bad * len(files):
-        raise InputError(
-            f"{len(bad)} of {len(files)} pictures cannot serve",
-            where=str(out),
-            remedy=f"the first: {bad[0]['file']}: {bad[0]['reason']}",
-        )
     result = {
         "bank": bank_id,
         "thresholds": dict(told),
@@ -289,5 +368,5 @@ def _result(
         "quarantined": [{"path": line["file"], "reason": line["reason"]} for line in bad],
         "table": TABLE,
     }
-    store.write_file(out / "detect.json", store.canonical_json(result))
+    store.write_file(out / RESULT, store.canonical_json(result))
     return result

@@ -51,8 +51,14 @@ def test_requests_that_cannot_be_met(camera):
         threshold_of(bank, rate=1e5)
     with pytest.raises(UsageError, match="must be positive"):
         threshold_of(bank, threshold=-1)
-    with pytest.raises(UsageError, match="noise is not known"):
+    with pytest.raises(UsageError, match="this bank has no thresholds") as refused:
         threshold_of(dataclasses.replace(bank, thresholds=None))
+    assert "noise" not in refused.value.what  # a bank as learned lacks them for another reason
+    for value in (np.inf, np.nan):
+        with pytest.raises(UsageError, match="must be positive and finite"):
+            threshold_of(bank, threshold=value)
+        with pytest.raises(UsageError, match="must be a finite number"):
+            threshold_of(bank, rate=value)
     with pytest.raises(InputError, match="too small"):
         detect(bank, np.zeros((5, 40), np.uint8), respond)
     with pytest.raises(InputError, match="takes Mono8"):
