@@ -28,9 +28,7 @@ Missed = Callable[[Quarantined], None]
 """Told of a file that could be read before and cannot any more."""
 
 
-TOLD = 10
-"""Unusable files that a refusal names; the others are counted."""
-
+TOLD = 10  # unusable files that a refusal names; the others are counted
 Task = tuple[Path, str, str, ReadOptions, InputContract]
 """A file to read again: root, relative path, SHA-256, options, the folder's contract."""
 
@@ -353,10 +351,8 @@ def _refuse(listing: Listing, bad: tuple[Quarantined, ...], total: int, max_bad:
     if len(bad) == total:
         what = "none of the pictures can be read; give a folder with pictures that can"
     else:
-        what = (
-            f"{len(bad)} of {total} files cannot be used, above the {max_bad:.0%} allowed; "
-            f"remove them, or raise --max-bad"
-        )
+        what = f"{len(bad)} of {total} files cannot be used, above the {max_bad:.0%} allowed; "
+        what += "remove them, or raise --max-bad"
     raise InputError(what + lines, where=str(listing.root))
 
 
