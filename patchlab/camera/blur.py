@@ -14,7 +14,7 @@ from numpy.typing import NDArray
 from scipy import ndimage
 from scipy.special import ndtr
 
-from patchlab.camera.pixels import Region, limited, regions
+from patchlab.camera.pixels import TOO_SMALL, Region, limited, regions
 from patchlab.camera.table import sd_of
 from patchlab.types import F64, Frame, InputContract, NoiseModel
 
@@ -174,11 +174,13 @@ class BlurMeter:
     def __init__(self, noise: NoiseModel | None) -> None:
         self.noise = noise
         self.widths: list[F64] = []
+        self._regions = 0
 
     def add(self, frame: Frame) -> None:
         """Look at one frame."""
         found = [edge_widths(r, frame.contract, self.noise) for r in regions(frame)]
         self.widths.append(np.concatenate([*found, np.empty((0, 2))]))
+        self._regions += len(found)
 
     @property
     def all_widths(self) -> F64:
@@ -188,6 +190,8 @@ class BlurMeter:
     def result(self) -> tuple[float | None, str]:
         """Sigma and a sentence about it."""
         widths = np.concatenate([*self.widths, np.empty((0, 2))])
+        if self.widths and not self._regions:
+            return None, f"not measurable here: {TOO_SMALL}"
         if len(widths) < MIN_EDGES:
             return None, (
                 f"not measurable here: {len(widths)} isolated straight edges were found, "

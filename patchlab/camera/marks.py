@@ -101,6 +101,23 @@ _ABOUT = {
 }
 
 
+_THRESHOLDS = {
+    "block_grid": GRID_THRESHOLD,
+    "row_noise": STRIPE_THRESHOLD,
+    "column_noise": STRIPE_THRESHOLD,
+    "interpolation_lattice": LATTICE_THRESHOLD,
+    "clipped_levels": CLIPPED_THRESHOLD,
+    "missing_levels": MISSING_THRESHOLD,
+    "sharpening": SHARP_THRESHOLD,
+    "fixed_spots": SPOT_THRESHOLD,
+    "vignetting": SHADE_THRESHOLD,
+    "posterised_depth": DEPTH_THRESHOLD,
+    "near_duplicates": 0.0,
+    "blurred_frames": 0.0,
+}
+"""Threshold of every mark, in the order in which they are told."""
+
+
 @dataclass(frozen=True, eq=False)
 class _FrameFacts:
     """What one frame says."""
@@ -268,8 +285,10 @@ class MarkMeter:
     def result(self) -> Marks:
         """All marks, in a fixed order."""
         facts = self._pool.facts
-        if not facts:
+        if self.contract is None:
             raise InputError("there is no frame to look at", remedy="give a folder of photographs")
+        if not facts:  # every frame is too small to be measured in
+            return Marks(tuple(_mark(name, None, 0.0, t) for name, t in _THRESHOLDS.items()))
         few = len(facts) < MIN_FRAMES
         odd, doubles, blurred = self._odd_frames()
         parity = self._pool.parity / np.maximum(self._pool.parity_count, 1)
@@ -277,25 +296,24 @@ class MarkMeter:
         columns = float(np.median([f.column for f in facts]))
         lattice = float(parity.max() / parity.min()) if parity.min() > 0 else 1.0
         measured = [
-            ("block_grid", self._pool.grid.value, GRID_THRESHOLD),
-            ("row_noise", rows, STRIPE_THRESHOLD),
-            ("column_noise", columns, STRIPE_THRESHOLD),
-            ("interpolation_lattice", lattice, LATTICE_THRESHOLD),
-            ("clipped_levels", float(np.mean([f.clipped for f in facts])), CLIPPED_THRESHOLD),
-            ("missing_levels", missing_levels(self._pool.histogram), MISSING_THRESHOLD),
-            ("posterised_depth", lost_bits(self._pool.histogram), DEPTH_THRESHOLD),
-            ("near_duplicates", doubles, 0.0),
-            ("blurred_frames", blurred, 0.0),
+            ("block_grid", self._pool.grid.value),
+            ("row_noise", rows),
+            ("column_noise", columns),
+            ("interpolation_lattice", lattice),
+            ("clipped_levels", float(np.mean([f.clipped for f in facts]))),
+            ("missing_levels", missing_levels(self._pool.histogram)),
+            ("posterised_depth", lost_bits(self._pool.histogram)),
+            ("near_duplicates", doubles),
+            ("blurred_frames", blurred),
         ]
-        marks = [_mark(name, None if few else v > t, v, t) for name, v, t in measured]
-        marks.insert(6, self._sharpening(few))
+        verdicts = {name: (None if few else v > _THRESHOLDS[name], v) for name, v in measured}
         shade, shaded = shading(np.array([f.falloff for f in facts]))
         spots, spotted = self._pool.spots.result(MIN_FRAMES)
-        marks[7:7] = [
-            _mark("fixed_spots", spotted, spots, SPOT_THRESHOLD),
-            _mark("vignetting", None if few else shaded, shade, SHADE_THRESHOLD),
-        ]
-        return Marks(tuple(marks), odd)
+        verdicts["fixed_spots"] = spotted, spots
+        verdicts["vignetting"] = None if few else shaded, shade
+        sharpening = self._sharpening(few)
+        verdicts["sharpening"] = sharpening.found, sharpening.value
+        return Marks(tuple(_mark(n, *verdicts[n], t) for n, t in _THRESHOLDS.items()), odd)
 
     def _odd_frames(self) -> tuple[tuple[tuple[str, str], ...], float, float]:
         """Frames better left out, with the reason, and the shares of copies and soft frames.

@@ -24,6 +24,7 @@ from patchlab.camera.flat import Blocks, FlatLaw, flat_blocks, flat_law, join
 from patchlab.camera.grid import GRID_THRESHOLD, GridMeter
 from patchlab.camera.pixels import (
     MAX_SAMPLES,
+    TOO_SMALL,
     Region,
     clip_codes,
     diagonal_band,
@@ -163,6 +164,8 @@ class NoiseMeter:
         """The law, or why there is none."""
         if self.contract is None:
             raise InputError("there is no frame to measure", remedy="give a folder of photographs")
+        if not self._samples:
+            return refused(TOO_SMALL, 0.0)
         blocks = join(self._blocks)
         return _law(self.contract, self.samples, blocks, self._total_blocks, self._grid.value)
 

@@ -19,6 +19,11 @@ MAX_SAMPLES = 100_000
 MAX_PIXELS = 1 << 21
 TILE = 512
 BORDER = 8
+FARTHEST = 16.0
+"""Ranges from black to white beyond which floats, all clipped there, are cut."""
+SMALLEST = 32
+"""Least height and width of a frame that noise, blur and marks can be measured in."""
+TOO_SMALL = f"every frame is smaller than {SMALLEST} x {SMALLEST} pixels"
 
 
 @dataclass(frozen=True, eq=False)
@@ -90,16 +95,19 @@ def windows(shape: tuple[int, ...]) -> Iterator[tuple[slice, slice]]:
 
 
 def regions(frame: Frame) -> Iterator[Region]:
-    """The frame's pixels that are measured, about two million at most."""
+    """The frame's pixels that are measured, about two million at most; none of a small frame."""
     low, high = clip_codes(frame.contract)
     for rows, cols in windows(frame.pixels.shape):
         codes = frame.pixels[rows, cols].astype(np.float32)
-        if min(codes.shape) < 32:
+        if min(codes.shape) < SMALLEST:
             continue
         bad = (codes <= low) | (codes >= high) | ~np.isfinite(codes)
         if frame.invalid is not None:
             bad |= frame.invalid[rows, cols]
         codes = np.nan_to_num(codes, copy=False, posinf=high, neginf=low)
+        if not frame.contract.format.integer:  # else the square of a wild value overflows
+            reach = FARTHEST * (high - low)
+            codes = np.clip(codes, np.float32(low - reach), np.float32(high + reach))
         usable = ~ndimage.maximum_filter(bad, 9)
         usable[:BORDER] = usable[-BORDER:] = False
         usable[:, :BORDER] = usable[:, -BORDER:] = False

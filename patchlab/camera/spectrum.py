@@ -19,6 +19,8 @@ LOWEST_CYCLES = 4.0
 HIGHEST_CPP = 0.35
 SIDE = 1024
 BINS = 64
+LEAST = 12
+"""Height and width below which 4 cycles a picture lie beyond the highest frequency fitted."""
 
 
 @dataclass(frozen=True, eq=False)
@@ -93,6 +95,8 @@ class SpectrumMeter:
 
     def add(self, frame: Frame) -> None:
         """Look at one frame; a flat or tiny one is passed over."""
+        if min(frame.pixels.shape) < LEAST:
+            return
         plane, light = _plane(frame)
         at, mean, exponent, lean = _radial(plane)
         if not np.isfinite(exponent):

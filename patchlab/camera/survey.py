@@ -58,11 +58,13 @@ def survey(
     chart = None if edge is None else slanted_edge(edge)
     meters: list[tuple[tuple[int, ...], str, NoiseMeter]] = []
     spectrum_meter = SpectrumMeter()
-    total = 0
+    total, largest = 0, 0
     for frame in limited(frames_factory(), contract):
         meters.append((tuple(sorted(frame.pixels.shape)), frame.path, NoiseMeter()))
         meters[-1][2].add(frame)
         spectrum_meter.add(frame)
+        if contract.format.integer:
+            largest = max(largest, int(frame.pixels.max(initial=0)))
         total += 1
         progress("survey", total, 0, "noise and spectrum")
     from_photos = joined(meters).result()
@@ -89,9 +91,25 @@ def survey(
         distrusted=marks.distrusted,
         edge_widths_px=blur_meter.all_widths,
         slanted_edge=chart,
-        notes=notes,
+        notes=(*notes, *_depth_note(contract, largest)),
     )
     return found if spectrum is None else _with_spectrum(found, spectrum)
+
+
+def _depth_note(contract: InputContract, largest: int) -> tuple[str, ...]:
+    """A request for the white level where 16-bit codes stay below 10 or 12 bits.
+
+    It changes nothing: dark photographs of a true 16-bit camera look the same.
+    """
+    if contract.pixels != "Mono16" or contract.white < 65535 or not largest:
+        return ()
+    bits = next((b for b in (10, 12) if largest < 1 << b), None)
+    if bits is None:
+        return ()
+    return (
+        f"the largest code of all frames is {largest} while the white level is taken to be "
+        f"{contract.white:g}: if the camera has {bits} bits, give --white {(1 << bits) - 1}",
+    )
 
 
 def _blur(meter: BlurMeter, chart: SlantedEdge | None) -> tuple[float | None, str]:

@@ -28,6 +28,7 @@ Missed = Callable[[Quarantined], None]
 """Told of a file that could be read before and cannot any more."""
 
 
+TOLD = 10  # unusable files that a refusal names; the others are counted
 Task = tuple[Path, str, str, ReadOptions, InputContract]
 """A file to read again: root, relative path, SHA-256, options, the folder's contract."""
 
@@ -292,7 +293,7 @@ def take_in(
 
     Raises
     ------
-    InputError : no picture, none readable, too many bad ones (the text lists them), or frames
+    InputError : no picture, none readable, too many bad ones (the text lists ten), or frames
         of several depths or transfers.
     """
     options = options or ReadOptions()
@@ -344,14 +345,15 @@ def _record(frame: Frame, file: str, page: int) -> FrameRecord:
 
 
 def _refuse(listing: Listing, bad: tuple[Quarantined, ...], total: int, max_bad: float) -> NoReturn:
-    lines = "".join(f"\n  {q.path}: {q.reason}" for q in bad)
+    lines = "".join(f"\n  {q.path}: {q.reason}" for q in bad[:TOLD])
+    if len(bad) > TOLD:
+        lines += f"\n  and {len(bad) - TOLD} more"
     if len(bad) == total:
-        what = "none of the pictures can be read"
+        what = "none of the pictures can be read; give a folder with pictures that can"
     else:
-        what = f"{len(bad)} of {total} files cannot be used, above the {max_bad:.0%} allowed"
-    raise InputError(
-        what + lines + "\n", where=str(listing.root), remedy="remove them, or raise --max-bad"
-    )
+        what = f"{len(bad)} of {total} files cannot be used, above the {max_bad:.0%} allowed; "
+        what += "remove them, or raise --max-bad"
+    raise InputError(what + lines, where=str(listing.root))
 
 
 def _copies(good: list[tuple[FrameRecord, ...]]) -> dict[str, str]:
@@ -385,9 +387,11 @@ def _common(records: tuple[FrameRecord, ...], mixed_depths: bool, root: Path) ->
         )
     if len({c.transfer for c in groups}) > 1:
         raise InputError(
-            f"some frames are linear and some sRGB-coded{lines}\n",
+            f"some frames are taken as sRGB-coded (colour or JPEG) and some as linear (grey)"
+            f"{lines}\n",
             where=str(root),
-            remedy="say which with --transfer linear or --transfer srgb",
+            remedy="say what they all are with --transfer srgb or --transfer linear, or split "
+            "the folder",
         )
     if not mixed_depths:
         raise InputError(

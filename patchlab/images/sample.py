@@ -374,9 +374,12 @@ def _nothing(counts: Mapping[str, int], settings: SampleSettings, frames: int) -
             remedy="give pictures of a scene",
         )
     told = ", ".join(f"{count} {reason}" for reason, count in counts.items() if count)
-    return InputError(
-        f"no patch can serve ({told})", remedy="check the exposure, and the white level"
-    )
+    remedies = []
+    if counts["invalid"]:
+        remedies.append("give pictures with fewer transparent or NaN pixels")
+    if counts["saturated"]:
+        remedies.append("check the exposure, and the white level")
+    return InputError(f"no patch can serve ({told})", remedy=", and ".join(remedies))
 
 
 def _pack(

@@ -3,9 +3,9 @@ import pytest
 from scipy import ndimage
 
 from patchlab import store
-from patchlab.camera import survey
+from patchlab.camera import measure_noise, survey
 from patchlab.errors import InputError, Interrupted
-from patchlab.types import Survey
+from patchlab.types import InputContract, Survey
 
 
 @pytest.fixture(scope="module")
@@ -90,3 +90,63 @@ def test_a_callback_may_stop_it(folder):
 
     with pytest.raises(Interrupted, match="survey 1"):
         survey(lambda: folder, folder[0].contract, progress=stop)
+
+
+@pytest.mark.parametrize("bits", [10, 12])
+def test_codes_far_below_the_white_level_ask_for_it(bench, bits):
+    wide = bench.contract(16)
+    frames = bench.folder(bench.photos(3), bench.contract(bits), 0.5, 1.0)
+    frames = [bench.frame(f.pixels, wide, f.path) for f in frames]
+    told = survey(lambda: frames, wide)
+    (note,) = told.notes
+    assert f"if the camera has {bits} bits, give --white {2**bits - 1}" in note
+    assert told.contract == wide  # told, not decided
+    frames[1].pixels[5, 5] = 2**12
+    assert survey(lambda: frames, wide).notes == ()
+
+
+@pytest.mark.parametrize("shape", [(20, 20), (12, 200), (2, 300), (31, 31)])
+def test_frames_too_small_to_measure_in_leave_a_survey_without_numbers(bench, shape):
+    contract = bench.contract(8)
+    rng = np.random.default_rng(3)
+    frames = [bench.frame(rng.integers(20, 200, shape), contract, f"{k:02d}.png") for k in range(9)]
+    told = survey(lambda: frames, contract)
+    assert told.noise.reason == "not measurable here: every frame is smaller than 32 x 32 pixels"
+    assert told.blur_sigma_px is None
+    assert told.blur_note == told.noise.reason
+    assert len(told.marks) == 12
+    assert {mark.found for mark in told.marks} == {None}
+    assert told.table.kind == "linear"
+    assert (told.frames, told.distrusted) == (9, ())
+
+
+def test_small_frames_among_larger_ones_are_passed_over(bench, folder, found):
+    tiny = bench.frame(np.full((20, 20), 90), folder[0].contract, "tiny.png")
+    told = survey(lambda: [*folder, tiny], folder[0].contract)
+    assert told.noise.gain == found.noise.gain
+    assert told.blur_sigma_px == found.blur_sigma_px
+    assert [m.name for m in told.marks] == [m.name for m in found.marks]
+
+
+@pytest.mark.parametrize("top", [1e30, 3e38])
+def test_enormous_floats_are_refused_without_a_warning(bench, top):
+    contract = InputContract("float32", 0.0, 1.0)
+    frames = [bench.frame(top * light, contract) for light in bench.photos(2)]
+    told = survey(lambda: frames, contract)
+    assert not told.noise.measurable
+    assert told.noise.reason.startswith("not measurable here")
+    assert told.table.kind == "identity"
+
+
+def test_one_enormous_value_does_not_hide_the_noise(bench):
+    contract = InputContract("float32", 0.0, 1.0)
+    eight = bench.contract(8)
+    frames = [
+        bench.frame(f.pixels / 255, contract, f.path)
+        for f in bench.folder(bench.photos(10), eight, 0.5, 1.0, blur=0.7)
+    ]
+    before = measure_noise(frames)
+    assert before.measurable
+    frames[0].pixels[100, 100] = 1e30
+    after = measure_noise(frames)
+    assert after.gain == pytest.approx(before.gain, rel=0.01)

@@ -1,5 +1,6 @@
 import os
 
+import imageio.v3 as iio
 import numpy as np
 import pytest
 
@@ -224,3 +225,28 @@ def test_an_unreadable_file_is_told(tmp_path, monkeypatch):
     monkeypatch.setattr(type(tmp_path), "read_bytes", refuse)
     with pytest.raises(InputError, match=r"a\.png: cannot be read \(Permission denied\)"):
         read_file(tmp_path, "a.png", ReadOptions())
+
+
+def test_too_many_bad_files_are_told_with_the_remedy_first(tmp_path):
+    fill(tmp_path, ["good.png"])
+    for k in range(13):
+        (tmp_path / f"{k:02d}.png").write_bytes(b"")
+    with pytest.raises(InputError) as caught:
+        take_in(list_photos(tmp_path))
+    first, *lines = str(caught.value).split("\n")
+    assert "13 of 14 files cannot be used" in first
+    assert "remove them, or raise --max-bad" in first
+    assert [line[2:8] for line in lines[:-1]] == [f"{k:02d}.png" for k in range(10)]
+    assert lines[-1].strip() == "and 3 more"
+
+
+def test_mixed_transfers_are_told_as_colour_and_grey(tmp_path):
+    fill(tmp_path, ["grey.png"])
+    iio.imwrite(tmp_path / "colour.png", np.stack([grey(k) for k in range(3)], axis=2))
+    with pytest.raises(InputError) as caught:
+        take_in(list_photos(tmp_path))
+    told = str(caught.value)
+    assert "taken as sRGB-coded (colour or JPEG) and some as linear (grey)" in told
+    assert "srgb: colour.png" in told
+    assert "linear: grey.png" in told
+    assert "--transfer srgb or --transfer linear" in told

@@ -256,3 +256,14 @@ def test_a_lost_file_leaves_the_others_as_they_were(folder):
     assert [q.path for q in missed] == ["写真 2.png"]
     kept = np.array([before.frames[f] in after.frames for f in before.frame])
     assert np.array_equal(before.patches[kept], after.patches)
+
+
+def test_invalid_pixels_everywhere_are_not_blamed_on_the_exposure():
+    hidden = np.ones((90, 110), bool)
+    with pytest.raises(InputError, match="transparent or NaN pixels") as caught:
+        draw([Frame("a.png", picture(0), MONO8, hidden)])
+    assert "exposure" not in str(caught.value)
+    white = np.full((90, 110), 255, np.uint8)
+    with pytest.raises(InputError, match="check the exposure") as caught:
+        draw([Frame("a.png", white, MONO8)])
+    assert "transparent" not in str(caught.value)
