@@ -56,24 +56,25 @@ def test_a_stop_while_modules_load_ends_in_one_sentence(tmp_path, module, number
 
 
 STUBBORN = """
-import time
-from patchlab.cli import main
-import patchlab.cli, sys
+import signal, sys, time
+import patchlab.cli
 def call(stop):
-    with_notice = {notice}
-    if with_notice:
+    if {notice}:
         stop.notice = lambda: print("asked", flush=True)
+    signal.pthread_sigmask(signal.SIG_BLOCK, [signal.SIGINT])
     print("here", flush=True)
     while True:
         try:
+            signal.pthread_sigmask(signal.SIG_UNBLOCK, [signal.SIGINT])
             time.sleep(60)
         except KeyboardInterrupt:
-            print("swallowed", flush=True)
             if not {swallow}:
                 raise
+            signal.pthread_sigmask(signal.SIG_BLOCK, [signal.SIGINT])
+            print("swallowed", flush=True)
 patchlab.cli._call = call
 sys.argv = ["patchlab"]
-main()
+patchlab.cli.main()
 """
 
 
