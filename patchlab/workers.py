@@ -9,8 +9,12 @@ from __future__ import annotations
 
 import multiprocessing
 import os
+import signal
+import threading
 from collections.abc import Callable, Iterable, Iterator
 from concurrent.futures import Future, ProcessPoolExecutor
+from contextlib import contextmanager
+from multiprocessing import connection
 from typing import TypeVar
 
 from patchlab.progress import Progress, silent
@@ -26,10 +30,37 @@ def usable_cores() -> int:
     return os.cpu_count() or 1
 
 
-def _one_thread() -> None:
+def _begin() -> None:
+    """What a worker does first: one thread a library, and its life bound to the parent's."""
+    signal.signal(signal.SIGINT, signal.SIG_IGN)  # Ctrl-C is the parent's business
+    _mask(signal.SIG_UNBLOCK)
+    threading.Thread(target=_end_with_parent, daemon=True).start()
     import threadpoolctl
 
     threadpoolctl.threadpool_limits(1)
+
+
+def _end_with_parent() -> None:
+    """Wait for the parent's death, however it dies, and follow it."""
+    parent = multiprocessing.parent_process()
+    if parent is not None:
+        connection.wait([parent.sentinel])
+        os._exit(1)
+
+
+def _mask(how: int) -> None:
+    if hasattr(signal, "pthread_sigmask"):
+        signal.pthread_sigmask(how, {signal.SIGINT})
+
+
+@contextmanager
+def _ctrl_c_waits() -> Iterator[None]:
+    """Hold Ctrl-C back: a worker started meanwhile is deaf to it until it is ready."""
+    _mask(signal.SIG_BLOCK)
+    try:
+        yield
+    finally:
+        _mask(signal.SIG_UNBLOCK)
 
 
 def map_ordered(
@@ -66,17 +97,21 @@ def map_ordered(
         return
     # spawn: safe with threads in the parent, and the same on every system
     context = multiprocessing.get_context("spawn")
-    with ProcessPoolExecutor(min(jobs, total), context, initializer=_one_thread) as pool:
+    with ProcessPoolExecutor(min(jobs, total), context, initializer=_begin) as pool:
         waiting: list[Future[B]] = []
         sent = done = 0
         try:
             while done < total:
                 while sent < total and len(waiting) < 2 * jobs:
-                    waiting.append(pool.submit(function, work[sent]))
+                    with _ctrl_c_waits():
+                        waiting.append(pool.submit(function, work[sent]))
                     sent += 1
                 yield waiting.pop(0).result()
                 done += 1
                 progress(stage, done, total)
+        except KeyboardInterrupt:  # at once: do not wait for what the workers hold
+            pool.shutdown(wait=False, cancel_futures=True)
+            raise
         finally:
             for future in waiting:
                 future.cancel()

@@ -13,6 +13,7 @@ import click
 
 from patchlab import __version__
 from patchlab.cli.options import print_config, resolve, settings_options
+from patchlab.cli.stopping import Stop
 from patchlab.cli.terminal import Terminal, table
 from patchlab.errors import InputError, QualityError, UsageError, VerificationError
 
@@ -28,7 +29,8 @@ def _shared(command: Command) -> Command:
     @click.option("-v", "--verbose", is_flag=True, help="Show where a fault arose.")
     @functools.wraps(command)
     def call(*args: Any, quiet: bool, verbose: bool, **kwargs: Any) -> Any:
-        return command(*args, terminal=Terminal(quiet), **kwargs)
+        stop = click.get_current_context().find_object(Stop)
+        return command(*args, terminal=Terminal(quiet, stop), **kwargs)
 
     return call
 
@@ -67,7 +69,7 @@ def patchlab() -> None:
     run's folder fills stage by stage.
 
     Exit codes: 0 done, 1 failure, 2 usage, 3 input unusable, 4 below the quality asked for
-    (--strict), 5 verification mismatch, 130 interrupted.
+    (--strict), 5 verification mismatch, 130 interrupted, 143 terminated.
     """
 
 
@@ -79,11 +81,13 @@ def _work(
     if options["print_config"]:
         print_config(settings)
         return None
+    if options.get("passing"):
+        terminal.stop.kept = "nothing is kept without -o"
+    else:
+        terminal.may_resume()
     from patchlab.pipeline import desk, run
 
     out = options["out"]
-    if not options.get("passing"):
-        terminal.resume_hint = f"; go on with: patchlab {until} {photos} -o {out} --resume"
     desk.prepare(
         out,
         photos,
@@ -95,7 +99,26 @@ def _work(
         place = desk.Desk(out, settings, options["resume"], terminal, terminal.note)
         if options["dry_run"]:
             return run.foresee(photos, place)
-        return run.work(photos, place, until)
+        result = run.work(photos, place, until)
+    _warn_of(result, out, terminal)
+    return result
+
+
+NAMED = 10
+"""Quarantined files that are named one by one; a folder may hold thousands."""
+
+
+def _warn_of(result: dict[str, Any], out: Path, terminal: Terminal) -> None:
+    """Tell the warnings of a run and the files that could not serve, even under -q."""
+    from patchlab import store
+
+    bad = store.read_manifest(out / "survey", "survey")["photos"]["quarantined"]
+    for file in bad[:NAMED]:
+        terminal.warn(f"{file['path']}: {file['reason']}")
+    if len(bad) > NAMED:
+        terminal.warn(f"and {len(bad) - NAMED} more files that could not serve")
+    for text in result.get("warnings", ()):
+        terminal.warn(text)
 
 
 @patchlab.command()
@@ -114,16 +137,18 @@ def run(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None
         with terminal.working():
             result["seconds"]["report"] = report.write(options["out"], terminal)
         result["page"] = str(options["out"] / "report" / "index.html")
-    _print(result, as_json, _say_run)
+    settings = resolve(options, options["config"])
+    by_detection = settings.purpose == "edges" and not settings.as_learned
+    _print(result, as_json, functools.partial(_say_run, by_detection=by_detection))
     if not options["dry_run"]:
-        _hold_to_quality(resolve(options, options["config"]).strict, result)
+        _hold_to_quality(settings.strict, result)
 
 
 def _frames(frames: dict[str, int]) -> str:
     return f"{frames['used']} used, {frames['quarantined']} quarantined"
 
 
-def _say_run(result: dict[str, Any]) -> None:
+def _say_run(result: dict[str, Any], by_detection: bool) -> None:
     if "bank" not in result:
         _rows(result)
         return
@@ -147,6 +172,10 @@ def _say_run(result: dict[str, Any]) -> None:
             f"the best of its size {bank['coverage_best']:.2f}, "
             f"the best on a rotated basis {bank['coverage_rotated']:.2f}"
         )
+        if by_detection:
+            lines["coverage"] += (
+                " (an edge bank's sizes are chosen by predicted detection, not by coverage)"
+            )
     _rows(lines)
 
 
@@ -336,12 +365,12 @@ def detect(bank: Path, pictures: Path, terminal: Terminal, as_json: bool, **opti
     Edges that steer a machine or gauge a safety part need the usual care: validate on your own
     parts and light, and follow the codes and qualified practice that apply.
     """
+    terminal.may_resume()
     from patchlab import report
     from patchlab.pipeline import detect as job
     from patchlab.workers import usable_cores
 
     out = options["out"]
-    terminal.resume_hint = f"; go on with the same command and --resume (-o {out})"
     with terminal.working():
         result = job.detect(
             bank,

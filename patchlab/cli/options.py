@@ -36,6 +36,11 @@ def _click_type(f: dataclasses.Field[Any]) -> Any:
     return {"int": int, "float": float}.get(str(f.type).replace(" | None", ""), str)
 
 
+def _plain(number: float) -> str:
+    """Every digit of a whole number, the shortest form of another."""
+    return str(int(number)) if number == int(number) else f"{number:g}"
+
+
 def _option(f: dataclasses.Field[Any]) -> Callable[[Command], Command]:
     default = "" if f.default is None else f"  [default: {f.default}]"
     if f.type == "bool":
@@ -44,7 +49,7 @@ def _option(f: dataclasses.Field[Any]) -> Callable[[Command], Command]:
         return click.option(names, f.name, default=None, help=f.metadata["help"] + default)
     span = ""
     if f.metadata["high"] is not None and f.metadata["low"] is not None:
-        span = f" ({f.metadata['low']:g} to {f.metadata['high']:g})"
+        span = f" ({_plain(f.metadata['low'])} to {_plain(f.metadata['high'])})"
     return click.option(
         option_name(f.name),
         f.name,

@@ -2,16 +2,14 @@
 
 from __future__ import annotations
 
-import signal
 import sys
-import threading
 from collections.abc import Iterator, Sequence
-from contextlib import contextmanager
-from types import FrameType
+from contextlib import contextmanager, suppress
 from typing import TYPE_CHECKING, Any
 
 import click
 
+from patchlab.cli.stopping import Stop
 from patchlab.errors import Interrupted
 
 if TYPE_CHECKING:
@@ -25,22 +23,28 @@ class Terminal:
     are kept), the second one stops at once.
     """
 
-    def __init__(self, quiet: bool = False) -> None:
+    def __init__(self, quiet: bool = False, stop: Stop | None = None) -> None:
         self.quiet = quiet
-        self.stopping = False
-        self.resume_hint = ""
+        self.stop = stop or Stop()
         self._bars: Progress | None = None
         self._tasks: dict[str, TaskID] = {}
 
     def __call__(self, stage: str, done: float, total: float, note: str = "") -> None:
         """Show progress; raise Interrupted when a stop was asked for."""
-        if self.stopping:
-            raise Interrupted(f"stopped during {stage}; finished stages are kept{self.resume_hint}")
+        self._heed(f"during {stage}")
         if self._bars is None:
             return
         if stage not in self._tasks:
             self._tasks[stage] = self._bars.add_task(stage, total=total, note="")
         self._bars.update(self._tasks[stage], completed=done, total=total, note=note)
+
+    def _heed(self, when: str) -> None:
+        if self.stop.asked:
+            raise Interrupted(f"stopped {when}; {self.stop.kept}")
+
+    def may_resume(self) -> None:
+        """Have a stop tell that the command as typed and ``--resume`` goes on with it."""
+        self.stop.kept = f"finished stages are kept; go on with: {self.stop.resume_words()}"
 
     def note(self, text: str) -> None:
         """Tell one thing, unless ``-q``."""
@@ -59,7 +63,7 @@ class Terminal:
 
     @contextmanager
     def working(self) -> Iterator[Terminal]:
-        """Draw bars and take over Ctrl-C while the work goes on."""
+        """Draw bars, and have a stop end the step in good order, while the work goes on."""
         with self._stoppable():
             if self.quiet or not sys.stderr.isatty():
                 yield self
@@ -83,21 +87,16 @@ class Terminal:
 
     @contextmanager
     def _stoppable(self) -> Iterator[None]:
-        if threading.current_thread() is not threading.main_thread():
-            yield
-            return
-
-        def stop(number: int, frame: FrameType | None) -> None:
-            if self.stopping:
-                raise KeyboardInterrupt
-            self.stopping = True
-            self._say("patchlab: ending this step (Ctrl-C again stops at once)")
-
-        before = signal.signal(signal.SIGINT, stop)
+        self._heed("before the work began")
+        self.stop.notice = self._notice
         try:
             yield
         finally:
-            signal.signal(signal.SIGINT, before)
+            self.stop.notice = None
+
+    def _notice(self) -> None:
+        with suppress(RuntimeError):  # the signal came in the middle of a line on stderr
+            self._say("patchlab: ending this step (Ctrl-C again stops at once)")
 
 
 def table(rows: Sequence[Sequence[Any]], head: Sequence[str]) -> None:
