@@ -55,8 +55,8 @@ def differences(standing: Path, fresh: Path) -> list[str]:
     if not use.verify(standing)["passed"]:
         found.append("its targets differ from its oracle, or a file was changed")
     match = compare.compare(standing, fresh)
-    if match["verdict"] == "different":
-        found.append(f"a kernel moved: the worst match is at |cos| = {match['worst_cosine']}")
+    if match.verdict == "different":
+        found.append(f"a kernel moved: the worst match is at |cos| = {match.cosine.min():.6f}")
     old, new = (banks.read_bank(p)[0] for p in (standing, fresh))
     if [k.name for k in old.kernels] != [k.name for k in new.kernels]:
         found.append("the kernels have other names")
