@@ -275,10 +275,7 @@ class Bank:
         """
         known = self.manifest["thresholds"]
         if known is None:
-            raise BankError(
-                f"bank {self.name} has no thresholds, because its camera's noise is not known; "
-                "give threshold= instead"
-            )
+            raise BankError(f"bank {self.name} has no thresholds; give threshold= instead")
         rates = np.array(known["false_edges_per_megapixel"], dtype=np.float64)
         strength = np.array(known["strength"], dtype=np.float64)
         if not rates[0] <= rate <= rates[-1]:
