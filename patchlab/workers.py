@@ -109,7 +109,7 @@ def map_ordered(
                 yield waiting.pop(0).result()
                 done += 1
                 progress(stage, done, total)
-        except KeyboardInterrupt:  # at once: do not wait for what the workers hold
+        except (KeyboardInterrupt, GeneratorExit):  # do not wait for what the workers hold
             pool.shutdown(wait=False, cancel_futures=True)
             raise
         finally:
