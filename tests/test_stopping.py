@@ -1,6 +1,5 @@
 """Stopping the command line: Ctrl-C and SIGTERM at any time, and what a run warns of."""
 
-import os
 import shlex
 import signal
 import subprocess
@@ -91,44 +90,6 @@ def test_ctrl_c_again_ends_it_whatever_it_does(notice, swallow, answers):
     _, said = process.communicate(timeout=30)
     assert process.returncode == 130
     assert said == "patchlab: stopped at once; finished stages are kept\n"
-
-
-WORKERS = """
-import sys, time
-sys.path.insert(0, {here!r})
-from foundations.test_workers import sleepy
-import patchlab.cli
-from patchlab.workers import map_ordered
-def call(stop):
-    stop.notice = lambda: print("asked", flush=True)
-    for _ in map_ordered(sleepy, [0.0, 60.0, 60.0, 60.0], jobs=2):
-        print("here", flush=True)
-if __name__ == "__main__":
-    patchlab.cli._call = call
-    sys.argv = ["patchlab"]
-    patchlab.cli.main()
-"""
-
-
-def test_ctrl_c_twice_at_a_terminal_ends_the_workers_too(tmp_path):
-    here = os.path.dirname(__file__)
-    script = tmp_path / "script.py"
-    script.write_text(WORKERS.format(here=here))
-    process = subprocess.Popen(
-        [sys.executable, script],
-        stdout=subprocess.PIPE,
-        stderr=subprocess.PIPE,
-        text=True,
-        start_new_session=True,
-    )
-    assert process.stdout.readline().strip() == "here"
-    os.killpg(process.pid, signal.SIGINT)
-    assert process.stdout.readline().strip() == "asked"
-    os.killpg(process.pid, signal.SIGINT)
-    _, said = process.communicate(timeout=30)
-    assert process.returncode == 130
-    assert said.startswith("patchlab: stopped at once; finished stages are kept\n")
-    assert "Traceback" not in said
 
 
 def test_sigterm_ends_a_run_in_good_order_and_tells_the_command_as_typed(tmp_path):
