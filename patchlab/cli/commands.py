@@ -173,9 +173,7 @@ def _say_run(result: dict[str, Any], by_detection: bool) -> None:
             f"the best on a rotated basis {bank['coverage_rotated']:.2f}"
         )
         if by_detection:
-            lines["coverage"] += (
-                " (an edge bank's sizes are chosen by predicted detection, not by coverage)"
-            )
+            lines["coverage"] += " (an edge bank is not chosen for its coverage)"
     _rows(lines)
 
 
