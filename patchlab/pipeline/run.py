@@ -283,7 +283,11 @@ def choose(
             bank = banks.choose_bank(
                 dictionary, fits[0], found, settings, patch_contrast=patches.contrast
             )
-    known = {**bank.provenance, "blur_sigma_px": found.blur_sigma_px}
+    known = {
+        **bank.provenance,
+        "blur_sigma_px": found.blur_sigma_px,
+        "marks": [m.name for m in found.marks if m.found],
+    }
     if found.contract.lattice > 1:
         told = (
             "learned on a Bayer mosaic: a kernel sees the colours as it learned them only where "
