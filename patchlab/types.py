@@ -395,6 +395,10 @@ class Dictionary:
         has in the other restarts, and in itself learned anew on halves of the patches; empty
         or NaN where that was not measured
     choice : how the number of components was chosen, where it was left to the data
+    held_out_curve : ndarray (m, 2), step of the last stage and log-likelihood of held-out
+        patches there, nats per patch; empty where that was not watched
+    stopped_at : the step that learning went back to, since beyond it held-out patches became
+        less likely; None where it was not stopped
     """
 
     method: Literal["ica", "sparse", "pca"]
@@ -414,6 +418,8 @@ class Dictionary:
     over_restarts: F64 = field(default_factory=lambda: np.empty(0))
     over_resamples: F64 = field(default_factory=lambda: np.empty(0))
     choice: ComponentChoice | None = None
+    held_out_curve: F64 = field(default_factory=lambda: np.empty((0, 2)))
+    stopped_at: int | None = None
 
     def __post_init__(self) -> None:
         k = self.atoms.shape[0]

@@ -21,6 +21,7 @@ import math
 import threading
 from collections.abc import Callable, Iterable, Iterator
 from dataclasses import dataclass
+from itertools import pairwise
 from typing import Any
 
 import numpy as np
@@ -212,6 +213,18 @@ class Likelihood:
         slope[light] = 1.0 - slope[light]
         return Evaluation(W, math.nan, score, slope, energy)
 
+    def values(self, W: F64, edges: list[int]) -> F64:
+        """The value at W over each of the groups of rows between ``edges``, nothing else."""
+        A, b = self.rows.project(W)
+        size = float(np.linalg.slogdet(W)[1])
+        out = []
+        for start, stop in pairwise(edges):
+            sums = np.zeros((3, W.shape[0]))
+            for _ in self._blocks(A, b, start, stop, sums):
+                pass
+            out.append(self._density(sums / (stop - start)) - size)
+        return np.array(out)
+
     def pairs(self, W: F64, start: int = 0, stop: int | None = None) -> tuple[F64, F64]:
         """Curvatures ``h_ij = E[psi_i'(y_i) y_j^2]`` (k, k) and ``E[psi_i y_i]`` (k,).
 
@@ -258,16 +271,20 @@ class Likelihood:
             yield y, t
 
     def _finish(self, W: F64, T: F64, sums: F64) -> Evaluation:
-        logcosh, square, energy = sums
+        _, square, energy = sums
         light = self.signs < 0
-        score, slope, density = T.copy(), 1.0 - square, logcosh + math.log(math.pi)
+        score, slope = T.copy(), 1.0 - square
         if light.any():
             # E[y_i y_j] of the light rows, from the moments that are at hand
             score[light] = (W @ self.second_moment() @ W.T)[light] - T[light]
             slope[light] = square[light]
-            density[light] = energy[light] / 2 - logcosh[light] + 0.5 * (1 + math.log(2 * math.pi))
-        value = float(density.sum()) - float(np.linalg.slogdet(W)[1])
+        value = self._density(sums) - float(np.linalg.slogdet(W)[1])
         return Evaluation(W, value, score, slope, energy)
+
+    def _density(self, sums: F64) -> float:
+        logcosh, _, energy = sums
+        light = energy / 2 - logcosh + 0.5 * (1 + math.log(2 * math.pi))
+        return float(np.where(self.signs < 0, light, logcosh + math.log(math.pi)).sum())
 
     def second_moment(self) -> F64:
         """``E[z z']`` over the rows, summed once."""

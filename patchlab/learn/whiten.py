@@ -17,6 +17,7 @@ import numpy as np
 from numpy.typing import NDArray
 
 from patchlab.errors import InputError, UsageError
+from patchlab.learn.trust import split
 from patchlab.types import F64, PatchSet, Whitening
 
 ROWS = 4096
@@ -135,6 +136,7 @@ def whiten(
     rank: int | None = None,
     form: Literal["pca", "zca"] = "pca",
     noise: F64 | None = None,
+    held_out: int | None = None,
 ) -> Whitening:
     """Whitening of a patch set: K (rank, d) and its inverse on the kept directions.
 
@@ -151,19 +153,29 @@ def whiten(
     form : "pca" (rows are scaled eigenvectors) or "zca" (the symmetric form)
     noise : ndarray (d, d), the noise's part of the covariance (:func:`noise_covariance`);
         directions in which it makes up half of the variance or more are cut too
+    held_out : the learner's seed: the patches that it holds out are left out here too, so that
+        they are new to all that was learned; None takes every patch
 
     Raises
     ------
     UsageError : a parameter out of its range.
     InputError : constant patches, not more patches than directions, or values not finite.
     """
-    if len(patch_set) <= patch_set.size**2:
+    patches, kept = patch_set.patches, len(patch_set)
+    if held_out is not None:
+        train = np.sort(split(kept, held_out)[0])
+        kept = train.size
+    if kept <= patch_set.size**2:
         raise InputError(
-            f"{len(patch_set)} patches cannot whiten {patch_set.size**2} pixels",
+            f"{kept} patches cannot whiten {patch_set.size**2} pixels",
             remedy=f"sample more than {patch_set.size**2} patches, or use a smaller patch",
         )
-    known = moments(patch_set.patches)
+    known = moments(patches if held_out is None else (patches[at] for at in _pieces(train)))
     return whitening(known, retain=retain, rank=rank, form=form, noise=noise)
+
+
+def _pieces(index: NDArray[np.int64]) -> Iterator[NDArray[np.int64]]:
+    return (index[at : at + ROWS] for at in range(0, index.size, ROWS))
 
 
 def noise_covariance(

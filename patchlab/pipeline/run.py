@@ -186,7 +186,7 @@ def learn_basis(
         if found.table.noise_sd is not None:
             coloured = found.noise.autocovariance
             noise = learn.noise_covariance(patches, found.table.noise_sd, coloured)
-        whitening = learn.whiten(patches, retain=s.retain, noise=noise)
+        whitening = learn.whiten(patches, retain=s.retain, noise=noise, held_out=s.seed)
         choice, components = None, None if s.components == "auto" else s.components
         if s.components == "auto" and not sparse:
             choice = learn.choose_components(
