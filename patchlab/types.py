@@ -436,6 +436,51 @@ class Dictionary:
         return int(self.atoms.shape[1])
 
 
+@dataclass(frozen=True, eq=False)
+class Parts:
+    """Components of aligned pictures of one kind of object.
+
+    Picture i is ``mean + light[i] + sum over j of codes[i, j] * images[j]``, on the directions
+    that were kept.
+
+    Parameters
+    ----------
+    method : "ica" or "pca"
+    samples : which side of the matrix was sampled, "pixels" or "pictures"
+    images : ndarray (k, h, w), unit energy
+    codes : ndarray (n, k)
+    mean : ndarray (h, w), the mean picture
+    light : ndarray (n,), each picture's own mean less that of all
+    contribution : ndarray (k,), energy of each component over the variance of the pictures
+    kurtosis : ndarray (k,), over the samples (3 for a normal law)
+    locality : ndarray (k,), 1 for a single pixel, 0 for energy spread evenly
+    spectrum : ndarray (m,), variance of the pictures along principal components, falling
+    converged, iterations : how the learner ended
+    warnings : sentences for people
+    """
+
+    method: Literal["ica", "pca"]
+    samples: Literal["pixels", "pictures"]
+    images: F64
+    codes: F64
+    mean: F64
+    light: F64
+    contribution: F64
+    kurtosis: F64
+    locality: F64
+    spectrum: F64
+    converged: bool
+    iterations: int
+    warnings: tuple[str, ...] = ()
+
+    def __post_init__(self) -> None:
+        k = self.images.shape[0]
+        _check(self.images.ndim == 3 and self.codes.shape[1] == k, "(k, h, w) and (n, k)")
+
+    def __len__(self) -> int:
+        return int(self.images.shape[0])
+
+
 FamilyName = Literal["gabor", "gd1", "gd2", "centre_surround"]
 
 

@@ -1,7 +1,8 @@
 """Where a run works: its folder, its settings, and which finished stages it takes over.
 
 A run is a folder that fills stage by stage: ``survey``, ``patches``, ``dictionary``,
-``fits``, ``bank`` (and ``report``, which the command line adds). Each is an artefact
+``fits``, ``bank`` (and ``report``, which the command line adds; ``parts`` and ``assess`` may
+stand there too). Each is an artefact
 whose manifest names its settings, inputs and parents; a resumed run takes over
 every artefact whose manifest says what it would say again.
 """
@@ -25,7 +26,7 @@ from patchlab.progress import Progress, silent
 from patchlab.settings import Settings
 from patchlab.workers import usable_cores
 
-ROOMS = ("survey", "patches", "dictionary", "fits", "bank", "report", "assess")
+ROOMS = ("parts", "survey", "patches", "dictionary", "fits", "bank", "report", "assess")
 RECIPE = 3
 """Raised whenever a stage would give another result for the same settings."""
 
