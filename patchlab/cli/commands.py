@@ -124,7 +124,7 @@ def _warn_of(result: dict[str, Any], out: Path, terminal: Terminal) -> None:
 @patchlab.command()
 @click.argument("photos", type=FOLDER)
 @_fills_a_run
-@settings_options("photos", "survey", "measure", "patches", "learn", "bank", "common")
+@settings_options("photos", "survey", "measure", "patches", "learn", "bank", "cluster", "common")
 @_shared
 def run(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Do the whole job: PHOTOS to a compiled bank and a page."""
@@ -189,7 +189,7 @@ def _hold_to_quality(strict: bool, result: dict[str, Any]) -> None:
 @click.option("--resume", is_flag=True, help="Go on with the run that stands there.")
 @click.option("--force", is_flag=True, help="Start anew where a run stands.")
 @click.option("--dry-run", is_flag=True, help="Say what would be done, write nothing.")
-@settings_options("photos", "survey", "measure", "common")
+@settings_options("photos", "survey", "measure", "cluster", "common")
 @_shared
 def survey(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Say what the camera itself does to PHOTOS: noise, blur, spectrum, marks.
@@ -252,7 +252,7 @@ def _say_survey(result: dict[str, Any]) -> None:
 @patchlab.command()
 @click.argument("photos", type=FOLDER)
 @_fills_a_run
-@settings_options("photos", "survey", "measure", "patches", "learn", "common")
+@settings_options("photos", "survey", "measure", "patches", "learn", "cluster", "common")
 @_shared
 def learn(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Survey PHOTOS, sample and whiten patches, and learn their basis."""

@@ -11,14 +11,17 @@ from collections.abc import Callable, Iterable, Iterator
 from concurrent.futures import ThreadPoolExecutor
 from contextlib import AbstractContextManager, contextmanager
 from dataclasses import dataclass, replace
+from itertools import chain
 from typing import Any, Literal
 
 import numpy as np
 from numpy.typing import NDArray
 
+from patchlab import cluster
 from patchlab.errors import InputError, UsageError
 from patchlab.learn.trust import split
 from patchlab.types import F64, PatchSet, Whitening
+from patchlab.workers import usable_cores
 
 ROWS = 4096
 """Rows that are summed together: part of the order of summation, so fixed."""
@@ -38,6 +41,8 @@ def one_thread() -> AbstractContextManager[Any]:
 @contextmanager
 def threads(jobs: int) -> Iterator[Callable[[Callable[[int], Any], Iterable[int]], Iterable[Any]]]:
     """``map`` for one job, a thread pool's for more: results in order either way."""
+    if cluster.current() is not None:
+        jobs = min(jobs, usable_cores())  # the rest of them is elsewhere
     if jobs == 1:
         yield map
         return
@@ -78,31 +83,39 @@ def moments(patches: NDArray[Any] | Iterable[NDArray[Any]], *, block: int = 6553
     """
     if block < 1:
         raise UsageError("a block has at least one row", where="block")
-    count, shift, first, second = 0, None, None, None
-    with one_thread():
-        for group in _groups(patches, block):
-            if shift is None:  # sums about the first group's mean do not cancel
-                shift = group.mean(axis=0)
-                first, second = np.zeros_like(shift), np.zeros((shift.size, shift.size))
-            centred = group - shift
-            first += centred.sum(axis=0)
-            second += centred.T @ centred
-            count += len(group)
-    if shift is None or first is None or second is None:
+    groups = _groups(patches, block)
+    head = next(groups, None)
+    if head is None:
         raise InputError("there are no patches to learn from")
+    shift = head.mean(axis=0, dtype=np.float64)  # sums about the first group's mean do not cancel
+    count, first, second = 0, np.zeros_like(shift), np.zeros((shift.size, shift.size))
+    tasks = ((group, shift) for group in chain([head], groups))
+    farm = cluster.current()
+    with one_thread():
+        for n, own, square in (map if farm is None else farm.map_ordered)(_group_sums, tasks):
+            count += n
+            first += own
+            second += square
     offset = first / count
     covariance = second / count - np.outer(offset, offset)
     return Moments(count, shift + offset, (covariance + covariance.T) / 2)
 
 
-def _groups(patches: NDArray[Any] | Iterable[NDArray[Any]], block: int) -> Iterator[F64]:
-    """Recut rows into groups of ROWS in float64, checked to be finite."""
-    waiting: list[F64] = []
+def _group_sums(task: tuple[NDArray[Any], F64]) -> tuple[int, F64, F64]:
+    """Number, sum and sum of products of a group's rows about a shift."""
+    group, shift = task
+    centred = group.astype(np.float64) - shift
+    return len(group), centred.sum(axis=0), centred.T @ centred
+
+
+def _groups(patches: NDArray[Any] | Iterable[NDArray[Any]], block: int) -> Iterator[NDArray[Any]]:
+    """Recut rows into groups of ROWS, checked to be finite."""
+    waiting: list[NDArray[Any]] = []
     held = 0
     for rows in _chunks(patches, block):
         at = 0
         while at < len(rows):
-            piece = rows[at : at + ROWS - held].astype(np.float64)
+            piece = rows[at : at + ROWS - held]
             if piece.ndim != 2 or (waiting and piece.shape[1] != waiting[0].shape[1]):
                 raise InputError("patches must be rows of one length")
             if not np.isfinite(piece).all():

@@ -19,7 +19,7 @@ from dataclasses import dataclass, field
 from pathlib import Path
 from typing import Any
 
-from patchlab import store
+from patchlab import cluster, store
 from patchlab.errors import UsageError
 from patchlab.pipeline import keep
 from patchlab.progress import Progress, silent
@@ -47,7 +47,10 @@ class Desk:
 
     @property
     def jobs(self) -> int:
-        """Worker processes."""
+        """Worker processes, on this machine or on the cluster."""
+        farm = cluster.current()
+        if farm is not None:
+            return max(farm.workers, 2)  # even one of it is elsewhere
         return self.settings.jobs or usable_cores()
 
     @contextmanager
