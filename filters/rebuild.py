@@ -20,8 +20,8 @@ from pathlib import Path
 import numpy as np
 
 from patchlab import bank as banks
-from patchlab import report
-from patchlab.pipeline import compare, desk, run, use
+from patchlab import images, report
+from patchlab.pipeline import compare, desk, parts, run, use
 from patchlab.settings import Settings, from_toml
 
 HERE = Path(__file__).resolve().parent
@@ -45,6 +45,13 @@ def keep_pictures(folder: Path) -> None:
     (HERE / "tour").mkdir(exist_ok=True)
     for name in TOUR:
         shutil.copyfile(folder / "report" / f"{name}.png", HERE / "tour" / f"{name}.png")
+
+
+def draw_parts(work: Path) -> None:
+    """The README's picture of parts: made brackets, their components side by side."""
+    images.make_brackets(work / "brackets")
+    pair = parts.find_parts(work / "brackets", work / "parts")
+    (HERE / "tour" / "parts.png").write_bytes(report.parts_pages(*pair)["parts.png"])
 
 
 def differences(standing: Path, fresh: Path) -> list[str]:
@@ -85,6 +92,7 @@ def main(check: bool) -> int:
                 shutil.copytree(fresh, standing)
                 if config.stem == "tessary_edges":
                     keep_pictures(fresh.parent)
+                    draw_parts(Path(work))
                 print(f"{config.stem}: made")
     return 1 if wrong else 0
 

@@ -155,6 +155,12 @@ class Settings:
     # all
     seed: int = _setting(0, "common", "Seed of every draw.", low=0, high=2**31 - 1)
     jobs: int = _setting(0, "common", "Worker processes; 0 takes every core.", low=0, high=1024)
+    cluster: str | None = _setting(
+        None,
+        "cluster",
+        "Share reading, sampling, moments and passes of learning with a dask cluster: local, or "
+        "its scheduler's address.",
+    )
     max_memory: float = _setting(4.0, "common", "Memory to stay below, GiB.", low=0.25)
     strict: bool = _setting(False, "common", "Exit 4 when the result is below what was asked for.")
 

@@ -395,6 +395,10 @@ class Dictionary:
         has in the other restarts, and in itself learned anew on halves of the patches; empty
         or NaN where that was not measured
     choice : how the number of components was chosen, where it was left to the data
+    held_out_curve : ndarray (m, 2), step of the last stage and log-likelihood of held-out
+        patches there, nats per patch; empty where that was not watched
+    stopped_at : the step that learning went back to, since beyond it held-out patches became
+        less likely; None where it was not stopped
     """
 
     method: Literal["ica", "sparse", "pca"]
@@ -414,6 +418,8 @@ class Dictionary:
     over_restarts: F64 = field(default_factory=lambda: np.empty(0))
     over_resamples: F64 = field(default_factory=lambda: np.empty(0))
     choice: ComponentChoice | None = None
+    held_out_curve: F64 = field(default_factory=lambda: np.empty((0, 2)))
+    stopped_at: int | None = None
 
     def __post_init__(self) -> None:
         k = self.atoms.shape[0]
@@ -428,6 +434,51 @@ class Dictionary:
     def size(self) -> int:
         """Patch side, pixels."""
         return int(self.atoms.shape[1])
+
+
+@dataclass(frozen=True, eq=False)
+class Parts:
+    """Components of aligned pictures of one kind of object.
+
+    Picture i is ``mean + light[i] + sum over j of codes[i, j] * images[j]``, on the directions
+    that were kept.
+
+    Parameters
+    ----------
+    method : "ica" or "pca"
+    samples : which side of the matrix was sampled, "pixels" or "pictures"
+    images : ndarray (k, h, w), unit energy
+    codes : ndarray (n, k)
+    mean : ndarray (h, w), the mean picture
+    light : ndarray (n,), each picture's own mean less that of all
+    contribution : ndarray (k,), energy of each component over the variance of the pictures
+    kurtosis : ndarray (k,), over the samples (3 for a normal law)
+    locality : ndarray (k,), 1 for a single pixel, 0 for energy spread evenly
+    spectrum : ndarray (m,), variance of the pictures along principal components, falling
+    converged, iterations : how the learner ended
+    warnings : sentences for people
+    """
+
+    method: Literal["ica", "pca"]
+    samples: Literal["pixels", "pictures"]
+    images: F64
+    codes: F64
+    mean: F64
+    light: F64
+    contribution: F64
+    kurtosis: F64
+    locality: F64
+    spectrum: F64
+    converged: bool
+    iterations: int
+    warnings: tuple[str, ...] = ()
+
+    def __post_init__(self) -> None:
+        k = self.images.shape[0]
+        _check(self.images.ndim == 3 and self.codes.shape[1] == k, "(k, h, w) and (n, k)")
+
+    def __len__(self) -> int:
+        return int(self.images.shape[0])
 
 
 FamilyName = Literal["gabor", "gd1", "gd2", "centre_surround"]

@@ -17,6 +17,7 @@ from contextlib import contextmanager
 from multiprocessing import connection
 from typing import TypeVar
 
+from patchlab import cluster
 from patchlab.progress import Progress, silent
 
 A = TypeVar("A")
@@ -80,7 +81,8 @@ def map_ordered(
     items : iterable
         What it is called with; at most ``2 * jobs`` are in flight at once.
     jobs : int
-        Worker processes; 1 (the default) runs here.
+        Worker processes; 1 (the default) runs here. More run on the cluster in place of this
+        machine, inside of :func:`patchlab.cluster.using`.
     stage, progress
         Told after every item.
 
@@ -93,6 +95,12 @@ def map_ordered(
     if jobs <= 1 or total <= 1:
         for done, item in enumerate(work, 1):
             yield function(item)
+            progress(stage, done, total)
+        return
+    farm = cluster.current()
+    if farm is not None:
+        for done, result in enumerate(farm.map_ordered(function, work), 1):
+            yield result
             progress(stage, done, total)
         return
     # spawn: safe with threads in the parent, and the same on every system

@@ -124,7 +124,7 @@ def _warn_of(result: dict[str, Any], out: Path, terminal: Terminal) -> None:
 @patchlab.command()
 @click.argument("photos", type=FOLDER)
 @_fills_a_run
-@settings_options("photos", "survey", "measure", "patches", "learn", "bank", "common")
+@settings_options("photos", "survey", "measure", "patches", "learn", "bank", "cluster", "common")
 @_shared
 def run(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Do the whole job: PHOTOS to a compiled bank and a page."""
@@ -189,7 +189,7 @@ def _hold_to_quality(strict: bool, result: dict[str, Any]) -> None:
 @click.option("--resume", is_flag=True, help="Go on with the run that stands there.")
 @click.option("--force", is_flag=True, help="Start anew where a run stands.")
 @click.option("--dry-run", is_flag=True, help="Say what would be done, write nothing.")
-@settings_options("photos", "survey", "measure", "common")
+@settings_options("photos", "survey", "measure", "cluster", "common")
 @_shared
 def survey(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Say what the camera itself does to PHOTOS: noise, blur, spectrum, marks.
@@ -252,7 +252,7 @@ def _say_survey(result: dict[str, Any]) -> None:
 @patchlab.command()
 @click.argument("photos", type=FOLDER)
 @_fills_a_run
-@settings_options("photos", "survey", "measure", "patches", "learn", "common")
+@settings_options("photos", "survey", "measure", "patches", "learn", "cluster", "common")
 @_shared
 def learn(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Survey PHOTOS, sample and whiten patches, and learn their basis."""
@@ -648,13 +648,19 @@ def compare(first: Path, second: Path, terminal: Terminal, as_json: bool, **opti
 @patchlab.command()
 @click.option("-o", "--out", type=FOLDER, required=True, help="Folder for the frames.")
 @click.option("--count", default=24, type=click.IntRange(1, 1000), help="Frames to render.")
+@click.option(
+    "--kind",
+    default="views",
+    type=click.Choice(["views", "brackets"]),
+    help="Views of a tile works, or aligned pictures of stamped brackets.",
+)
 @_shared
-def scenes(out: Path, count: int, terminal: Terminal, as_json: bool) -> None:
+def scenes(out: Path, count: int, kind: str, terminal: Terminal, as_json: bool) -> None:
     """Render frames of an invented camera at an invented place, with noise and blur known."""
     from patchlab.pipeline import use
 
     if out.exists() and not out.is_dir():
         raise InputError("the output is a file", where=str(out))
     with terminal.working():
-        result = use.scenes(out, count, terminal)
+        result = use.scenes(out, count, terminal, kind=kind)
     _print(result, as_json, _rows)

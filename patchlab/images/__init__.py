@@ -17,6 +17,7 @@ from patchlab.images.folder import (
     reread,
     take_in,
 )
+from patchlab.images.parts import make_brackets
 from patchlab.images.pfnc import RawLayout
 from patchlab.images.sample import SampleSettings, memory_needed, sample, sample_folder
 
@@ -32,6 +33,7 @@ __all__ = [
     "decoder_versions",
     "iterate",
     "list_photos",
+    "make_brackets",
     "make_sample_images",
     "memory_needed",
     "read_file",

@@ -9,6 +9,7 @@ from patchlab.learn.coding import lasso
 from patchlab.learn.components import choose_components
 from patchlab.learn.ica import learn_ica
 from patchlab.learn.order import amari_index, match
+from patchlab.learn.parts import learn_parts, locality
 from patchlab.learn.pca import learn_pca
 from patchlab.learn.sparse import SparseState, encode, learn_sparse, penalty_from_noise
 from patchlab.learn.sure import crowd_distance, shape_numbers, shape_spread
@@ -24,8 +25,10 @@ __all__ = [
     "encode",
     "lasso",
     "learn_ica",
+    "learn_parts",
     "learn_pca",
     "learn_sparse",
+    "locality",
     "match",
     "moments",
     "noise_covariance",

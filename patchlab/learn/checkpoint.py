@@ -11,6 +11,7 @@ from numpy.typing import NDArray
 
 from patchlab.errors import InputError
 from patchlab.learn.solver import State
+from patchlab.learn.watch import Watch
 from patchlab.types import F64
 
 
@@ -24,7 +25,8 @@ class Run:
     signs : ndarray (k,), +1 heavy tails, -1 light
     iterations : accepted steps over all stages
     curve : objective of the last stage, nats per patch, one entry a step
-    outcome : "converged", "stalled" or "limit"
+    outcome : "converged", "overfitting", "stalled" or "limit"
+    held : ndarray (m, 2), step and held-out log-likelihood of the last stage
     """
 
     W: F64
@@ -32,6 +34,7 @@ class Run:
     iterations: int
     curve: tuple[float, ...]
     outcome: str
+    held: F64
 
 
 @dataclass(frozen=True, eq=False)
@@ -45,6 +48,7 @@ class Checkpoint:
     state : the solver's
     signs : ndarray (k,), density of each component
     finished : the restarts before this one
+    watch : what was seen of held-out patches, where there are any
     """
 
     restart: int
@@ -54,6 +58,7 @@ class Checkpoint:
     state: State
     signs: F64
     finished: tuple[Run, ...] = ()
+    watch: Watch | None = None
 
     def arrays(self) -> dict[str, NDArray[Any]]:
         """Everything as named arrays, for ``numpy.savez``."""
@@ -69,6 +74,8 @@ class Checkpoint:
             "outcome": np.array(s.outcome),
             "runs": np.array(len(self.finished)),
         }
+        if self.watch is not None:
+            out |= self.watch.arrays("watch.")
         for i, run in enumerate(self.finished):
             out |= {
                 f"run{i}.W": run.W,
@@ -76,6 +83,7 @@ class Checkpoint:
                 f"run{i}.iterations": np.array(run.iterations),
                 f"run{i}.curve": np.array(run.curve),
                 f"run{i}.outcome": np.array(run.outcome),
+                f"run{i}.held": run.held,
             }
         return out
 
@@ -99,7 +107,8 @@ class Checkpoint:
                 outcome=str(data["outcome"]),
             )
             finished = tuple(_run(data, f"run{i}.") for i in range(int(data["runs"])))
-            return Checkpoint(restart, stage, turn, spent, state, data["signs"], finished)
+            watch = Watch.from_arrays(data, "watch.")
+            return Checkpoint(restart, stage, turn, spent, state, data["signs"], finished, watch)
         except (KeyError, ValueError, TypeError) as error:
             raise InputError(
                 f"damaged checkpoint ({error})", remedy="start again without resuming"
@@ -113,4 +122,5 @@ def _run(data: Mapping[str, NDArray[Any]], at: str) -> Run:
         int(data[at + "iterations"]),
         tuple(float(v) for v in data[at + "curve"]),
         str(data[at + "outcome"]),
+        data[at + "held"],
     )

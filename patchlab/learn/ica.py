@@ -25,6 +25,7 @@ from patchlab.learn.order import canonical, dictionary
 from patchlab.learn.solver import Free, Orthogonal, Solver, State
 from patchlab.learn.sure import found_again, relearned
 from patchlab.learn.trust import identified, kurtosis, split, warnings_for
+from patchlab.learn.watch import Watch, Watcher
 from patchlab.learn.whiten import leading, one_thread, threads
 from patchlab.progress import Progress, silent
 from patchlab.types import F64, Dictionary, PatchSet, Whitening
@@ -62,9 +63,12 @@ def learn_ica(
 
     The densities and their free scales are those of :mod:`patchlab.learn.likelihood`.
     A restart ends when the Newton decrement, half of g' H^-1 g, falls below ``tolerance``
-    nats per patch and component. The restart with the best objective is returned; the
-    atoms of all are pooled. A keyed tenth of the patches is held out of learning and
-    gives ``log_likelihood``: nats per patch, in whitened coordinates, log|det W| included.
+    nats per patch and component, or when held-out patches say that it overfits (the rule of
+    :mod:`patchlab.learn.watch`): it then goes back to the step that they like best. The
+    restart with the best objective is returned (where one was stopped, the best on held-out
+    patches); the atoms of all are pooled. A keyed tenth of the patches is held out of learning
+    (:func:`~patchlab.learn.trust.split`) and gives ``held_out_curve`` and ``log_likelihood``:
+    nats per patch, in whitened coordinates, log|det W| included.
 
     Coefficients are ``filter . (patch - whitening.mean)``; atoms rebuild the patch on the
     directions the whitening kept. The sums do not depend on ``jobs``.
@@ -198,6 +202,7 @@ class _Learner:
     def run(self, resume: Checkpoint | None) -> tuple[Run, ...]:
         """Every restart, from the beginning or from a checkpoint."""
         self.stages = self._stages()
+        self.fresh = self.rows.whitened(np.sort(self.held))
         where = resume or self._start(0, ())
         while True:
             run = self._restart(where)
@@ -232,6 +237,9 @@ class _Learner:
 
     def _restart(self, where: Checkpoint) -> Run:
         """All stages of one restart, from where it stands."""
+        if self.held.size and where.watch is None:
+            begun = Watcher.begin(self._held(where.signs), where.state.W)
+            where = replace(where, watch=begun)
         while True:
             where = self._solve(where)
             following = self._next(where)
@@ -243,6 +251,7 @@ class _Learner:
                     where.spent + state.iterations,
                     state.curve,
                     state.outcome,
+                    np.empty((0, 2)) if where.watch is None else where.watch.curve(),
                 )
             where = following
             self.checkpoint(where)
@@ -255,12 +264,19 @@ class _Learner:
         if self.adaptive and len(self.stages) == 1 and where.round < len(FIRST_ROUNDS):
             limit = min(limit, FIRST_ROUNDS[where.round])
         first: list[float] = []
+        watcher = None
+        if where.watch is not None:
+            watcher = Watcher(self._held(where.signs), where.watch)
+            watcher.judge(where.state)  # the first look is at no step at all
+
+        def seen() -> Watch | None:
+            return None if watcher is None else watcher.watch
 
         def after(state: State) -> None:
             first.append(state.decrement)
             self._tell(where.restart, first[0], state)
             if state.iterations % EVERY == 0 and not state.outcome:
-                self.checkpoint(replace(where, state=state))
+                self.checkpoint(replace(where, state=state, watch=seen()))
 
         solver = Solver(
             Likelihood(self.stages[-1], where.signs, self.mapper),
@@ -269,7 +285,10 @@ class _Learner:
             limit,
             after,
         )
-        return replace(where, state=solver.run(where.state))
+        if watcher is not None:
+            solver.judge = watcher.judge
+        state = solver.run(where.state)
+        return replace(where, state=state, watch=seen())
 
     def _walk(self, where: Checkpoint) -> Checkpoint:
         """Steps over batches, up to the next choice of the densities."""
@@ -297,20 +316,32 @@ class _Learner:
         """The next round (other densities) or stage; None when the restart is finished."""
         spent, state = where.spent + where.state.iterations, where.state
         last = where.stage == len(self.stages) - 1
+        if state.outcome == "overfitting":
+            return None
         if last and spent >= self.limit and state.outcome != "converged":
             return None
+        watch = where.watch and where.watch.anew()
         early = ROUNDS if not last else FIRST_ROUNDS if len(self.stages) == 1 else ()
         if self.adaptive and where.round < len(early) + 3 * last:
             signs = self._signs(self.stages[where.stage], state.W)
             if where.round < len(early) or not np.array_equal(signs, where.signs):
-                fresh = State(state.W)
-                return replace(where, round=where.round + 1, spent=spent, state=fresh, signs=signs)
+                where = replace(where, state=State(state.W), signs=signs, watch=watch)
+                return replace(where, round=where.round + 1, spent=spent)
         if last:
             return None
-        return replace(where, stage=where.stage + 1, round=0, spent=spent, state=State(state.W))
+        where = replace(where, state=State(state.W), watch=watch)
+        return replace(where, stage=where.stage + 1, round=0, spent=spent)
+
+    def _held(self, signs: F64) -> Likelihood:
+        return Likelihood(self.fresh, signs, self.mapper)
 
     def relearned(self, run: Run, count: int) -> list[F64]:
-        """A restart's W, learned anew on halves of the patches."""
+        """A restart's W, learned anew on halves of the patches; none where it was stopped early.
+
+        Half of too few patches would only say that they are too few.
+        """
+        if run.outcome == "overfitting":
+            return []
         return relearned(
             self.stages[-1],
             run.W,
@@ -352,7 +383,7 @@ def _result(
         components_of(r.W, learner.whitening)[1] for i, r in enumerate(runs) if i != best
     )
     whole = Likelihood(learner.rows, run.signs, learner.mapper)
-    held = Likelihood(learner.rows.whitened(np.sort(learner.held)), run.signs, learner.mapper)
+    held = Likelihood(learner.fresh, run.signs, learner.mapper)
     seen = identified(whole, held, run.W)
     unit = run.W / np.linalg.norm(run.W, axis=1, keepdims=True)
     found = dictionary(
@@ -376,12 +407,17 @@ def _result(
     anew = [components_of(W, learner.whitening)[1] for W in learner.relearned(run, resamples)]
     return replace(
         found,
+        held_out_curve=run.held,
+        stopped_at=run.iterations if run.outcome == "overfitting" else None,
         over_restarts=found_again(found.atoms, sets[1:]),
         over_resamples=found_again(found.atoms, [a.reshape(found.atoms.shape) for a in anew]),
     )
 
 
 def _best(runs: tuple[Run, ...]) -> int:
+    """The restart with the best objective; once one overfitted, the best on held-out patches."""
+    if any(run.outcome == "overfitting" for run in runs):
+        return max(range(len(runs)), key=lambda i: (float(runs[i].held[:, 1].max()), -i))
     return min(range(len(runs)), key=lambda i: (runs[i].curve[-1], i))
 
 

@@ -21,11 +21,13 @@ import math
 import threading
 from collections.abc import Callable, Iterable, Iterator
 from dataclasses import dataclass
+from itertools import chain, islice, pairwise
 from typing import Any
 
 import numpy as np
 from numpy.typing import NDArray
 
+from patchlab import cluster
 from patchlab._jit import jit
 from patchlab.types import F32, F64, Whitening
 
@@ -33,6 +35,9 @@ BLOCK = 1024
 """Rows that go through the cache at once."""
 TASK = 8 * BLOCK
 """Rows that one thread sums before it hands over: part of the order of summation."""
+GROUP = 32
+"""Tasks that are summed together before they join the rest: part of it too, so that a block of
+this size can be summed elsewhere."""
 
 Mapper = Callable[[Callable[[int], Any], Iterable[int]], Iterable[Any]]
 """``map`` or a thread pool's ``map``: results in the order of the input."""
@@ -123,6 +128,10 @@ class Rows:
             return self.data[start:stop]
         return self.data[self.index[start:stop]]
 
+    def cut(self, start: int, stop: int) -> Rows:
+        """Some of the rows, alone, to be sent elsewhere."""
+        return Rows(np.ascontiguousarray(self.read(start, stop)), None, self.basis, self.offset)
+
     def project(self, W: F64) -> tuple[F32, F32]:
         """Matrix and offset that take a stored row to ``W z``."""
         if self.basis is None or self.offset is None:
@@ -185,12 +194,14 @@ class Likelihood:
         k = W.shape[0]
         stop = len(self.rows) if stop is None else stop
         A, b = self.rows.project(W)
-        T, sums = np.zeros((k, k)), np.zeros((3, k))
-        tasks = range(start, stop, TASK)
-        for part, partial in self.mapper(lambda at: self._task(A, b, at, stop), tasks):
-            T += part
-            sums += partial
         n = stop - start
+        farm = cluster.current()
+        if farm is not None and n == len(self.rows) > TASK:
+            T, sums = _far_sums(farm, self.rows, A, b)
+        else:
+            tasks = range(start, stop, TASK)
+            parts = self.mapper(lambda at: self._task(A, b, at, stop), tasks)
+            T, sums = _added(parts, k, GROUP)
         return self._finish(W, T / n, sums / n)
 
     def batch(self, W: F64, start: int, stop: int) -> Evaluation:
@@ -211,6 +222,18 @@ class Likelihood:
         score[light] = (W[light] @ W.T) - score[light]
         slope[light] = 1.0 - slope[light]
         return Evaluation(W, math.nan, score, slope, energy)
+
+    def values(self, W: F64, edges: list[int]) -> F64:
+        """The value at W over each of the groups of rows between ``edges``, nothing else."""
+        A, b = self.rows.project(W)
+        size = float(np.linalg.slogdet(W)[1])
+        out = []
+        for start, stop in pairwise(edges):
+            sums = np.zeros((3, W.shape[0]))
+            for _ in self._blocks(A, b, start, stop, sums):
+                pass
+            out.append(self._density(sums / (stop - start)) - size)
+        return np.array(out)
 
     def pairs(self, W: F64, start: int = 0, stop: int | None = None) -> tuple[F64, F64]:
         """Curvatures ``h_ij = E[psi_i'(y_i) y_j^2]`` (k, k) and ``E[psi_i y_i]`` (k,).
@@ -258,16 +281,20 @@ class Likelihood:
             yield y, t
 
     def _finish(self, W: F64, T: F64, sums: F64) -> Evaluation:
-        logcosh, square, energy = sums
+        _, square, energy = sums
         light = self.signs < 0
-        score, slope, density = T.copy(), 1.0 - square, logcosh + math.log(math.pi)
+        score, slope = T.copy(), 1.0 - square
         if light.any():
             # E[y_i y_j] of the light rows, from the moments that are at hand
             score[light] = (W @ self.second_moment() @ W.T)[light] - T[light]
             slope[light] = square[light]
-            density[light] = energy[light] / 2 - logcosh[light] + 0.5 * (1 + math.log(2 * math.pi))
-        value = float(density.sum()) - float(np.linalg.slogdet(W)[1])
+        value = self._density(sums) - float(np.linalg.slogdet(W)[1])
         return Evaluation(W, value, score, slope, energy)
+
+    def _density(self, sums: F64) -> float:
+        logcosh, _, energy = sums
+        light = energy / 2 - logcosh + 0.5 * (1 + math.log(2 * math.pi))
+        return float(np.where(self.signs < 0, light, logcosh + math.log(math.pi)).sum())
 
     def second_moment(self) -> F64:
         """``E[z z']`` over the rows, summed once."""
@@ -282,3 +309,42 @@ class Likelihood:
             known /= len(self.rows)
             self._second = known
         return known
+
+
+def _added(parts: Iterable[tuple[F64, F64]], k: int, group: int) -> tuple[F64, F64]:
+    """The sums of tasks, in order, ``group`` of them first among themselves."""
+    T, sums = np.zeros((k, k)), np.zeros((3, k))
+    for some in _grouped(parts, group):
+        together, beside = np.zeros((k, k)), np.zeros((3, k))
+        for part, partial in some:
+            together += part
+            beside += partial
+        T += together
+        sums += beside
+    return T, sums
+
+
+def _grouped(parts: Iterable[Any], size: int) -> Iterator[Iterable[Any]]:
+    parts = iter(parts)
+    for first in parts:
+        yield chain([first], islice(parts, size - 1))
+
+
+def _block_sums(rows: Rows, A: F32, b: F32, whole: bool) -> list[tuple[F64, F64]]:
+    """Runs where the rows are: the sums of each task, or of all together."""
+    at = Likelihood(rows, np.empty(0))
+    parts = [at._task(A, b, start, len(rows)) for start in range(0, len(rows), TASK)]
+    return [_added(parts, A.shape[1], GROUP)] if whole else parts
+
+
+def _far_sums(farm: cluster.Cluster, rows: Rows, A: F32, b: F32) -> tuple[F64, F64]:
+    """The sums over all rows, block by block on a cluster that holds them."""
+    units = cluster.blocks_of(len(rows), TASK, farm.workers, GROUP)
+    size = units * TASK
+    held = farm.hold(
+        rows, lambda rows, i: rows.cut(i * size, min((i + 1) * size, len(rows))),
+        -(-len(rows) // size),
+    )  # fmt: skip
+    whole = units == GROUP
+    parts = chain.from_iterable(farm.over(held, _block_sums, A, b, whole))
+    return _added(parts, A.shape[1], 1 if whole else GROUP)

@@ -140,7 +140,8 @@ class State:
     iterations : accepted steps so far
     curve : objective after each accepted step, first entry before any
     decrement : the last Newton decrement
-    outcome : "" while it goes on; "converged", "stalled" or "limit"
+    outcome : "" while it goes on; "converged", "stalled" or "limit"; a judge may end it
+        with a word of its own
     """
 
     W: F64
@@ -163,6 +164,7 @@ class Solver:
     tolerance : stop when the Newton decrement, half of g' H^-1 g in nats per patch, is below
     limit : accepted steps at most
     after : told the state after every accepted step
+    judge : sees it first, and may end learning with another one
     """
 
     objective: Callable[[F64], Evaluation]
@@ -170,6 +172,7 @@ class Solver:
     tolerance: float
     limit: int
     after: Callable[[State], None] = field(default=lambda state: None)
+    judge: Callable[[State], State] = field(default=lambda state: state)
 
     def run(self, state: State) -> State:
         """Go on from ``state`` until the rule, the limit or a stall ends it."""
@@ -178,6 +181,7 @@ class Solver:
             state = replace(state, curve=(at.value,))
         while not state.outcome:
             state, at = self._step(state, at)
+            state = self.judge(state)
             self.after(state)
         return state
 

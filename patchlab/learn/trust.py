@@ -17,10 +17,14 @@ from patchlab.types import F64
 
 HELD_OUT = 0.1
 """Share of the patches that no learner sees."""
+LEAST_HELD, MOST_HELD = 500, 0.25
+"""Fewer than this many are not held out, as long as they are no more than this share."""
 GROUPS = 32
 """Groups of patches whose spread tells the error of a curvature."""
 SURE = 3.0
 """Standard errors that a curvature must stand above zero."""
+LATE = ("stalled", "limit")
+"""Outcomes that leave something to be learned."""
 NOISE_KURTOSIS = 3.15
 """Median held-out kurtosis below which components look like Gaussian noise."""
 
@@ -28,7 +32,8 @@ NOISE_KURTOSIS = 3.15
 def split(n: int, seed: int) -> tuple[NDArray[np.int64], NDArray[np.int64]]:
     """Patches to learn from and patches held out, both in a keyed random order.
 
-    The last tenth of a random permutation keyed by (seed, "held-out") is held out.
+    The last tenth of a random permutation keyed by (seed, "held-out") is held out; of fewer
+    than 5,000 patches 500, but never more than a quarter: a handful would tell nothing.
 
     Raises
     ------
@@ -37,7 +42,7 @@ def split(n: int, seed: int) -> tuple[NDArray[np.int64], NDArray[np.int64]]:
     if n < 10:
         raise InputError(f"{n} patches are too few to learn from")
     order = rng(seed, "held-out").permutation(n).astype(np.int64)
-    kept = n - int(n * HELD_OUT)
+    kept = n - max(int(n * HELD_OUT), min(LEAST_HELD, int(n * MOST_HELD)))
     return order[:kept], order[kept:]
 
 
@@ -109,12 +114,17 @@ def warnings_for(
             f"not converged after {runs[best].iterations} iterations; raise max_iterations "
             "or resume"
         )
+    if outcome == "overfitting":
+        out.append(
+            f"stopped at step {runs[best].iterations}, before overfitting: beyond it held-out "
+            "patches became less likely; use more patches or fewer components"
+        )
     if outcome == "stalled":
         out.append(
             "not converged: the line search could not lower the objective further; "
             "loosen the tolerance or use more patches"
         )
-    late = sum(run.outcome != "converged" for i, run in enumerate(runs) if i != best)
+    late = sum(run.outcome in LATE for i, run in enumerate(runs) if i != best)
     if late:
         out.append(f"{late} of {len(runs)} restarts did not converge")
     if float(np.median(tails)) < NOISE_KURTOSIS:

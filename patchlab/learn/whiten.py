@@ -11,13 +11,17 @@ from collections.abc import Callable, Iterable, Iterator
 from concurrent.futures import ThreadPoolExecutor
 from contextlib import AbstractContextManager, contextmanager
 from dataclasses import dataclass, replace
+from itertools import chain
 from typing import Any, Literal
 
 import numpy as np
 from numpy.typing import NDArray
 
+from patchlab import cluster
 from patchlab.errors import InputError, UsageError
+from patchlab.learn.trust import split
 from patchlab.types import F64, PatchSet, Whitening
+from patchlab.workers import usable_cores
 
 ROWS = 4096
 """Rows that are summed together: part of the order of summation, so fixed."""
@@ -37,6 +41,8 @@ def one_thread() -> AbstractContextManager[Any]:
 @contextmanager
 def threads(jobs: int) -> Iterator[Callable[[Callable[[int], Any], Iterable[int]], Iterable[Any]]]:
     """``map`` for one job, a thread pool's for more: results in order either way."""
+    if cluster.current() is not None:
+        jobs = min(jobs, usable_cores())  # the rest of them is elsewhere
     if jobs == 1:
         yield map
         return
@@ -77,31 +83,39 @@ def moments(patches: NDArray[Any] | Iterable[NDArray[Any]], *, block: int = 6553
     """
     if block < 1:
         raise UsageError("a block has at least one row", where="block")
-    count, shift, first, second = 0, None, None, None
-    with one_thread():
-        for group in _groups(patches, block):
-            if shift is None:  # sums about the first group's mean do not cancel
-                shift = group.mean(axis=0)
-                first, second = np.zeros_like(shift), np.zeros((shift.size, shift.size))
-            centred = group - shift
-            first += centred.sum(axis=0)
-            second += centred.T @ centred
-            count += len(group)
-    if shift is None or first is None or second is None:
+    groups = _groups(patches, block)
+    head = next(groups, None)
+    if head is None:
         raise InputError("there are no patches to learn from")
+    shift = head.mean(axis=0, dtype=np.float64)  # sums about the first group's mean do not cancel
+    count, first, second = 0, np.zeros_like(shift), np.zeros((shift.size, shift.size))
+    tasks = ((group, shift) for group in chain([head], groups))
+    farm = cluster.current()
+    with one_thread():
+        for n, own, square in (map if farm is None else farm.map_ordered)(_group_sums, tasks):
+            count += n
+            first += own
+            second += square
     offset = first / count
     covariance = second / count - np.outer(offset, offset)
     return Moments(count, shift + offset, (covariance + covariance.T) / 2)
 
 
-def _groups(patches: NDArray[Any] | Iterable[NDArray[Any]], block: int) -> Iterator[F64]:
-    """Recut rows into groups of ROWS in float64, checked to be finite."""
-    waiting: list[F64] = []
+def _group_sums(task: tuple[NDArray[Any], F64]) -> tuple[int, F64, F64]:
+    """Number, sum and sum of products of a group's rows about a shift."""
+    group, shift = task
+    centred = group.astype(np.float64) - shift
+    return len(group), centred.sum(axis=0), centred.T @ centred
+
+
+def _groups(patches: NDArray[Any] | Iterable[NDArray[Any]], block: int) -> Iterator[NDArray[Any]]:
+    """Recut rows into groups of ROWS, checked to be finite."""
+    waiting: list[NDArray[Any]] = []
     held = 0
     for rows in _chunks(patches, block):
         at = 0
         while at < len(rows):
-            piece = rows[at : at + ROWS - held].astype(np.float64)
+            piece = rows[at : at + ROWS - held]
             if piece.ndim != 2 or (waiting and piece.shape[1] != waiting[0].shape[1]):
                 raise InputError("patches must be rows of one length")
             if not np.isfinite(piece).all():
@@ -135,6 +149,7 @@ def whiten(
     rank: int | None = None,
     form: Literal["pca", "zca"] = "pca",
     noise: F64 | None = None,
+    held_out: int | None = None,
 ) -> Whitening:
     """Whitening of a patch set: K (rank, d) and its inverse on the kept directions.
 
@@ -151,19 +166,29 @@ def whiten(
     form : "pca" (rows are scaled eigenvectors) or "zca" (the symmetric form)
     noise : ndarray (d, d), the noise's part of the covariance (:func:`noise_covariance`);
         directions in which it makes up half of the variance or more are cut too
+    held_out : the learner's seed: the patches that it holds out are left out here too, so that
+        they are new to all that was learned; None takes every patch
 
     Raises
     ------
     UsageError : a parameter out of its range.
     InputError : constant patches, not more patches than directions, or values not finite.
     """
-    if len(patch_set) <= patch_set.size**2:
+    patches, kept = patch_set.patches, len(patch_set)
+    if held_out is not None:
+        train = np.sort(split(kept, held_out)[0])
+        kept = train.size
+    if kept <= patch_set.size**2:
         raise InputError(
-            f"{len(patch_set)} patches cannot whiten {patch_set.size**2} pixels",
+            f"{kept} patches cannot whiten {patch_set.size**2} pixels",
             remedy=f"sample more than {patch_set.size**2} patches, or use a smaller patch",
         )
-    known = moments(patch_set.patches)
+    known = moments(patches if held_out is None else (patches[at] for at in _pieces(train)))
     return whitening(known, retain=retain, rank=rank, form=form, noise=noise)
+
+
+def _pieces(index: NDArray[np.int64]) -> Iterator[NDArray[np.int64]]:
+    return (index[at : at + ROWS] for at in range(0, index.size, ROWS))
 
 
 def noise_covariance(

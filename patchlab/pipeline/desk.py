@@ -1,7 +1,8 @@
 """Where a run works: its folder, its settings, and which finished stages it takes over.
 
 A run is a folder that fills stage by stage: ``survey``, ``patches``, ``dictionary``,
-``fits``, ``bank`` (and ``report``, which the command line adds). Each is an artefact
+``fits``, ``bank`` (and ``report``, which the command line adds; ``parts`` and ``assess`` may
+stand there too). Each is an artefact
 whose manifest names its settings, inputs and parents; a resumed run takes over
 every artefact whose manifest says what it would say again.
 """
@@ -18,15 +19,15 @@ from dataclasses import dataclass, field
 from pathlib import Path
 from typing import Any
 
-from patchlab import store
+from patchlab import cluster, store
 from patchlab.errors import UsageError
 from patchlab.pipeline import keep
 from patchlab.progress import Progress, silent
 from patchlab.settings import Settings
 from patchlab.workers import usable_cores
 
-ROOMS = ("survey", "patches", "dictionary", "fits", "bank", "report", "assess")
-RECIPE = 2
+ROOMS = ("parts", "survey", "patches", "dictionary", "fits", "bank", "report", "assess")
+RECIPE = 3
 """Raised whenever a stage would give another result for the same settings."""
 
 
@@ -46,7 +47,10 @@ class Desk:
 
     @property
     def jobs(self) -> int:
-        """Worker processes."""
+        """Worker processes, on this machine or on the cluster."""
+        farm = cluster.current()
+        if farm is not None:
+            return max(farm.workers, 2)  # even one of it is elsewhere
         return self.settings.jobs or usable_cores()
 
     @contextmanager

@@ -10,7 +10,7 @@ from typing import Any
 import numpy as np
 
 from patchlab import bank as banks
-from patchlab import camera, edges, images, learn, shapes, store
+from patchlab import camera, cluster, edges, images, learn, shapes, store
 from patchlab.errors import InputError, UsageError
 from patchlab.export import parse_targets
 from patchlab.pipeline import tell
@@ -186,7 +186,7 @@ def learn_basis(
         if found.table.noise_sd is not None:
             coloured = found.noise.autocovariance
             noise = learn.noise_covariance(patches, found.table.noise_sd, coloured)
-        whitening = learn.whiten(patches, retain=s.retain, noise=noise)
+        whitening = learn.whiten(patches, retain=s.retain, noise=noise, held_out=s.seed)
         choice, components = None, None if s.components == "auto" else s.components
         if s.components == "auto" and not sparse:
             choice = learn.choose_components(
@@ -374,6 +374,11 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
     """
     if until == "run":
         parse_targets(desk.settings.target)  # what cannot be built is said before the work
+    with cluster.using(desk.settings.cluster, desk.jobs):
+        return _work(photos, desk, until)
+
+
+def _work(photos: Path, desk: Desk, until: str) -> dict[str, Any]:
     intake = take_in(photos, desk)
     found, survey_head = survey(intake, desk)
     if not desk.resume:

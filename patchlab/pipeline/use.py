@@ -27,6 +27,7 @@ from patchlab.types import (
     EdgeMap,
     Frame,
     KernelFits,
+    Parts,
     PatchSet,
     Plan,
     Survey,
@@ -84,20 +85,27 @@ def orientation_count(bank: Bank) -> int:
 # ---------------------------------------------------------------- scenes
 
 
-def scenes(out: Path, count: int, progress: Progress = silent) -> dict[str, Any]:
-    """Render the frames of the invented camera.
+NOTES = {"views": b"# Sample images", "brackets": b"# Pictures for inspection"}
+"""How the note begins that lies with rendered pictures."""
+
+
+def scenes(
+    out: Path, count: int, progress: Progress = silent, *, kind: str = "views"
+) -> dict[str, Any]:
+    """Render the frames of the invented camera: views of a tile works, or stamped brackets.
 
     Raises
     ------
     UsageError : the folder holds something else, which would be mixed up or replaced.
     """
     ours = out / "NOTE.md"
-    known = ours.is_file() and ours.read_bytes().startswith(b"# Sample images")
+    known = ours.is_file() and ours.read_bytes().startswith(NOTES[kind])
     if out.is_dir() and any(out.iterdir()) and not known:
         raise UsageError(
             "the folder holds something else", where=str(out), remedy="name a new folder"
         )
-    images.make_sample_images(out, count, progress=progress)
+    make = images.make_sample_images if kind == "views" else images.make_brackets
+    make(out, count, progress=progress)
     return {"folder": str(out), "frames": count}
 
 
@@ -124,6 +132,7 @@ class RunContent:
     rate: float
     no_edges: str = ""
     assessed: Mapping[str, Any] | None = None
+    parts: tuple[Parts, Parts] | None = None
 
     @property
     def orientations(self) -> int:
@@ -217,7 +226,16 @@ def open_run(out: Path) -> RunContent:
         rate=rate,
         no_edges=reason,
         assessed=_assessed(out, head["id"]),
+        parts=_parts(out),
     )
+
+
+def _parts(out: Path) -> tuple[Parts, Parts] | None:
+    """Independent and principal components of aligned pictures, where they stand in the folder."""
+    if not (out / "parts" / "manifest.json").is_file():
+        return None
+    independent, principal = store.load(out / "parts", "parts")[0]
+    return independent, principal
 
 
 def _assessed(out: Path, bank_id: str) -> dict[str, Any] | None:

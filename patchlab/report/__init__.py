@@ -3,5 +3,6 @@
 from patchlab.report.compare import comparison_pictures
 from patchlab.report.mosaic import edge_pictures
 from patchlab.report.page import write
+from patchlab.report.parts import parts_pages
 
-__all__ = ["comparison_pictures", "edge_pictures", "write"]
+__all__ = ["comparison_pictures", "edge_pictures", "parts_pages", "write"]

@@ -14,7 +14,7 @@ import numpy as np
 from patchlab import store
 from patchlab.pipeline import use
 from patchlab.progress import Progress, silent
-from patchlab.report import assess, camera, mosaic, plots, sure
+from patchlab.report import assess, camera, mosaic, parts, plots, sure
 
 SHOWN = 96
 """Most components drawn in one mosaic; the page says how many there are."""
@@ -81,6 +81,9 @@ def _pictures(c: use.RunContent) -> Mapping[str, Callable[[], bytes]]:
         drawn = c.assessed
         makers["assess_light"] = lambda: assess.PLOTS["light"][0](drawn)
         makers["assess_location"] = lambda: assess.PLOTS["location"][0](drawn)
+    if c.parts is not None:
+        pair = c.parts
+        makers["parts"] = lambda: parts.side_by_side(*pair)
     if c.frame is not None and c.found is not None:
         frame, found, count = c.frame, c.found, c.orientations
         makers["edges"] = lambda: mosaic.before_and_after(frame, found, count)
@@ -124,5 +127,9 @@ def _render(c: use.RunContent, pictures: Mapping[str, bytes]) -> str:
         for name, data in pictures.items()
     }
     return environment.get_template("page.html").render(
-        c=c, pictures=embedded, shown=SHOWN, how_sure=sure.in_words(c.dictionary)
+        c=c,
+        pictures=embedded,
+        shown=SHOWN,
+        how_sure=sure.in_words(c.dictionary),
+        about_parts=parts.in_words(*c.parts) if c.parts else "",
     )

@@ -128,13 +128,25 @@ def whitening_spectrum(whitening: Whitening) -> bytes:
 
 
 def convergence(dictionary: Dictionary) -> bytes:
-    """The learner's curve, iteration by iteration, with its tolerance."""
+    """The learner's curve, iteration by iteration, and what held-out patches say to it."""
 
     def draw(axes: Axes) -> None:
         curve = np.asarray(dictionary.curve, dtype=np.float64)
         left = np.maximum(curve - curve.min(), 0)[:-1]
-        axes.semilogy(np.arange(1, left.size + 1), np.maximum(left, 1e-12), color=TEAL)
+        label = "what was still to be gained"
+        axes.semilogy(np.arange(1, left.size + 1), np.maximum(left, 1e-12), color=TEAL, label=label)
         state = "converged" if dictionary.converged else "NOT converged"
+        steps, held = dictionary.held_out_curve.T
+        if held.size:
+            lost = np.maximum(held.max() - held, 1e-12)
+            some = steps != steps[held.argmax()]
+            axes.semilogy(
+                steps[some], lost[some], ".-", color=AMBER, lw=1, label="held out, below its best"
+            )
+            axes.legend(fontsize=8)
+        if dictionary.stopped_at is not None:
+            state = "stopped before overfitting,"
+            axes.axvline(dictionary.stopped_at, color=AMBER, ls="--", lw=1)
         axes.set(
             xlabel="iteration of the last stage",
             ylabel="objective above its end",
