@@ -10,6 +10,7 @@ from patchlab.export.build import (
     target_name,
 )
 from patchlab.export.c99 import emit
+from patchlab.export.c_edge_model import EdgelRules, EdgelScale
 from patchlab.export.compare import Check, Target, Verification
 from patchlab.export.onnx import emit as emit_onnx
 from patchlab.export.runtime import RUNTIME, open_runtime, runtime_files
@@ -32,6 +33,8 @@ __all__ = [
     "RUNTIME",
     "TARGETS",
     "Check",
+    "EdgelRules",
+    "EdgelScale",
     "SelftestCase",
     "Target",
     "Verification",

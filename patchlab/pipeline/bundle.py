@@ -14,6 +14,7 @@ from patchlab import edges, export, store
 from patchlab.edges import thin
 from patchlab.errors import PatchlabError, UsageError, VerificationError
 from patchlab.pipeline.desk import Desk, may_write
+from patchlab.pipeline.edgel_rules import edgel_rules
 from patchlab.progress import Progress, silent
 from patchlab.settings import Settings
 from patchlab.types import Bank, Plan
@@ -62,7 +63,7 @@ def write_bundle(
     VerificationError : a target differs from the oracle; the folder stays for inspection.
     """
     plan = banks.make_plan(bank)
-    files = dict(export.emit(bank, plan))
+    files = dict(export.emit(bank, plan, edgel_rules(bank)))
     files |= export.emit_selftest(bank, plan, _selftest_cases(bank, plan))
     desk.progress("export", 1, 4, "C source")
     library, said = build_libraries(files, bank, plan, desk.settings)
