@@ -1,9 +1,9 @@
 """The edgels of a bank's C source: elements found by the calibrated chain, placed by least squares.
 
 The chain and the fit are those of :mod:`patchlab.edges`; every number of theirs comes in as
-:class:`patchlab.export.c_edge_model.EdgelRules`. Elements are found on the compiled float32 responses with comparisons
-and roundings that no compiler may change, so the set is the one that Python finds on the
-same responses; places are computed in float64.
+:class:`~patchlab.export.c_edge_model.EdgelRules`. Elements are found on the compiled float32
+responses with comparisons and roundings that no compiler may change, so the set is the one
+that Python finds on the same responses; places are computed in float64.
 """
 
 from __future__ import annotations

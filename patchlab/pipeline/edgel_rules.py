@@ -3,14 +3,17 @@
 from __future__ import annotations
 
 import math
+from typing import Any
 
 import numpy as np
+from numpy.typing import NDArray
 
-from patchlab import export
+from patchlab import bank as banks
+from patchlab import edges, export
 from patchlab.edges import locate, model, thin
 from patchlab.edges.noise import spectral_moments
 from patchlab.errors import UsageError
-from patchlab.types import F64, Bank
+from patchlab.types import F32, F64, Bank, Plan, Thresholds
 
 
 def edgel_rules(bank: Bank) -> export.EdgelRules | None:
@@ -43,6 +46,48 @@ def edgel_rules(bank: Bank) -> export.EdgelRules | None:
         largest_step=model.LARGEST_STEP,
         prior=model.PRIOR,
     )
+
+
+def edgel_finder(bank: Bank) -> export.EdgelFinder:
+    """Python's own edgels on responses that stand: what compiled ones are compared with."""
+    ratios = {
+        kind: thin.HYSTERESIS if table is None else table.hysteresis
+        for kind, table in ((bank.strength, bank.thresholds), ("line", bank.line_thresholds))
+        if kind == bank.strength or bank.strength == "step"
+    }
+
+    def find(
+        pixels: NDArray[Any], responses: F32, threshold: float, line_threshold: float
+    ) -> NDArray[np.void]:
+        asked: dict[thin.Kind, float] = {bank.strength: threshold, "line": line_threshold}
+        if bank.strength == "line":
+            asked = {"line": threshold}
+        levels = {kind: (high, ratios[kind]) for kind, high in asked.items() if high}
+        blur = bank.provenance.get("blur_sigma_px")
+        return edges.find_on(bank, pixels, responses, levels, blur_px=blur).edgels
+
+    return find
+
+
+def edgel_cases(bank: Bank, plan: Plan, crop: Any = None) -> tuple[export.EdgelCase, ...]:
+    """Pictures with the edgels that the bank finds; none for a bank that finds no edges."""
+    rules = edgel_rules(bank)
+    if rules is None:
+        return ()
+    return export.make_edgel_cases(
+        bank,
+        plan,
+        banks.exact_responses,
+        edgel_finder(bank),
+        threshold=_middle(bank.thresholds),
+        line_threshold=_middle(bank.line_thresholds) if rules.lines else 0.0,
+        crop=crop,
+    )
+
+
+def _middle(table: Thresholds | None) -> float | None:
+    """The threshold in the middle of a table."""
+    return None if table is None else float(table.strength[len(table.strength) // 2])
 
 
 def _lines(bank: Bank) -> tuple[thin.ScaleShape, ...]:
