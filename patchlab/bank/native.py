@@ -22,12 +22,22 @@ from numpy.typing import NDArray
 from patchlab.bank.reference import check_picture
 from patchlab.errors import InputError, UsageError, VerificationError
 from patchlab.store import read_file, sha256
-from patchlab.types import F32, Bank, Plan
+from patchlab.types import EDGEL, F32, Bank, Plan
 
 _POINTER, _STRIDE, _INT = ctypes.c_void_p, ctypes.c_ssize_t, ctypes.c_int
+_SIZE, _REAL = ctypes.c_size_t, ctypes.c_double
 Band = Callable[[int, int], int]
 """Computes some rows, (first, count); returns a code."""
 
+_EDGEL = np.dtype(
+    {
+        "names": ["x", "y", "theta", "strength", "sd", "width", "scale", "kind"],
+        "formats": ["f4"] * 6 + ["u1"] * 2,
+        "offsets": [0, 4, 8, 12, 16, 20, 24, 25],
+        "itemsize": 28,
+    }
+)
+"""An edgel as the C interface lays it out."""
 _PICTURE = [_POINTER, _STRIDE, _INT, _INT, _INT, _INT]
 
 
@@ -84,6 +94,14 @@ class NativeBank:
             "edges_rows", _INT, *_PICTURE, _INT, _POINTER, _STRIDE, _POINTER, _STRIDE, _POINTER
         )
 
+        # a library of an earlier version has no edgels
+        name = f"{self.bank.name}_edgels"
+        self.has_edgels = hasattr(self._library, name)
+        if self.has_edgels:
+            self._edgels_scratch = self._call("edgels_scratch_bytes", _SIZE, _INT, _INT)
+            self._edgels = self._call(
+                "edgels", _INT, *_PICTURE[:4], _REAL, _REAL, _POINTER, _SIZE, _POINTER, _POINTER
+            )
         fixed = self._fixed = self._plan.detail["fixed"]
         if fixed is not None:
             self._responses_q = self._call(
@@ -267,6 +285,46 @@ class NativeBank:
             codes = list(pool.map(lambda i: band(tops[i], tops[i + 1] - tops[i]), range(parts)))
         self._check(max(codes))
 
+    def edgels(
+        self, pixels: NDArray[Any], threshold: float, line_threshold: float = 0.0
+    ) -> NDArray[np.void]:
+        """Edge elements of one picture, placed below the pixel.
+
+        Parameters
+        ----------
+        pixels : ndarray (h, w) of the contract's dtype; rows may have any stride
+        threshold : strength for the bank's own kind of edges; 0 looks for none
+        line_threshold : the same for lines beside steps
+
+        Returns
+        -------
+        structured ndarray of :data:`patchlab.types.EDGEL`: what Python finds on this library's
+        responses, positions within 1e-6 px and one rounding to float32
+
+        Raises
+        ------
+        InputError : the picture does not fit the bank.
+        UsageError : the library has no edgels, or the thresholds cannot serve.
+        """
+        if not self.has_edgels:
+            raise UsageError("this library finds no edgels", where=self.bank.name)
+        pixels, _ = self._picture(pixels, None)
+        h, w = pixels.shape
+        scratch = np.empty(self._edgels_scratch(w, h), dtype=np.uint8)
+        count = ctypes.c_size_t(0)
+        capacity = pixels.size // 2  # pages that are not written take no memory
+        while True:
+            out = np.empty(capacity, _EDGEL)
+            code = self._edgels(
+                *_address(pixels), threshold, line_threshold, out.ctypes.data, capacity,
+                ctypes.addressof(count), scratch.ctypes.data,
+            )  # fmt: skip
+            if count.value <= capacity:
+                break
+            capacity = count.value
+        self._check(code)
+        return as_edgels(out[: count.value])
+
     def _need_fixed(self) -> None:
         if self._fixed is None:
             raise UsageError(
@@ -293,6 +351,14 @@ class NativeBank:
             message = self._message(code).decode("ascii", "replace")
             kind = InputError if "pixel code" in message else UsageError
             raise kind(message, where=self.bank.name)
+
+
+def as_edgels(found: NDArray[np.void]) -> NDArray[np.void]:
+    """Records of the C interface as :data:`patchlab.types.EDGEL`."""
+    out = np.empty(found.shape, EDGEL)
+    for name in EDGEL.names or ():
+        out[name] = found[name]
+    return out
 
 
 def _address(pixels: NDArray[Any]) -> tuple[int, int, int, int]:

@@ -6,6 +6,7 @@ from patchlab.edges.detect import (
     detect,
     detect_edgels,
     find,
+    find_on,
     levels_of,
     threshold_of,
 )
@@ -27,6 +28,7 @@ __all__ = [
     "edgels",
     "edgels_csv",
     "find",
+    "find_on",
     "levels_of",
     "match",
     "pratt_merit",

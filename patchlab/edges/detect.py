@@ -247,7 +247,28 @@ def find(
     UsageError, InputError : as :func:`levels_of` and :func:`detect`.
     """
     levels = levels_of(bank, what, rate, threshold)
-    responses, values = _checked(bank, pixels, respond), bank.table.apply(pixels)
+    responses = _checked(bank, pixels, respond)
+    return find_on(bank, pixels, responses, levels, invalid=invalid, blur_px=blur_px)
+
+
+def find_on(
+    bank: Bank,
+    pixels: NDArray[Any],
+    responses: F32,
+    levels: Mapping[thin.Kind, tuple[float, float]],
+    *,
+    invalid: NDArray[np.bool_] | None = None,
+    blur_px: float | None = None,
+) -> Found:
+    """As :func:`find`, from responses that stand and thresholds that are known.
+
+    Parameters
+    ----------
+    responses : float32 ndarray (n, h, w)
+    levels : as :func:`levels_of` gives them
+    others : as :func:`detect_edgels`
+    """
+    values = bank.table.apply(pixels)
     maps, parts = {}, []
     for kind, (high, ratio) in levels.items():
         maps[str(kind)] = found = thin.edge_map(

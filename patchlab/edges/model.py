@@ -33,6 +33,10 @@ CURVATURE_PRIOR = 0.25
 """Standard deviation of the curvature before looking, 1 / pixels."""
 BLUR_PRIOR = 0.7
 """The same of log blur about the blur given."""
+PRIOR = np.array([0, 0, 0, 0, CURVATURE_PRIOR**-2, BLUR_PRIOR**-2])
+"""One over the variance of each parameter before looking."""
+LARGEST_STEP = np.array([0.5, 0.3, np.inf, np.inf, 0.1, 0.4])
+"""What a round may change of each parameter."""
 CHUNK = 2048
 
 
@@ -160,7 +164,7 @@ class _Problem:
     ) -> None:
         self.data, self.weight, self.curve, self.profile = data, weight, curve, profile
         self.x, self.y = window.x[None].astype(float), window.y[None].astype(float)
-        self.prior = np.array([0, 0, 0, 0, CURVATURE_PRIOR**-2, BLUR_PRIOR**-2])
+        self.prior = PRIOR
         self.centre = np.array([0, 0, 0, 0, 0, math.log(blur)])
 
     def take(self, index: NDArray[Any]) -> _Problem:
@@ -218,9 +222,6 @@ def _normal(
     return matrix, np.where(active, right, 0.0)
 
 
-_STEP = np.array([0.5, 0.3, np.inf, np.inf, 0.1, 0.4])
-
-
 def _descend(problem: _Problem, q: F64, active: NDArray[np.bool_]) -> tuple[F64, NDArray[np.bool_]]:
     """Damped Gauss-Newton for every window; windows that settled are left out of later rounds."""
     q = q.copy()
@@ -236,7 +237,7 @@ def _descend(problem: _Problem, q: F64, active: NDArray[np.bool_]) -> tuple[F64,
         i = np.arange(6)
         matrix[:, i, i] *= 1 + damping[live, None]
         step = np.linalg.solve(matrix, right[:, :, None])[:, :, 0]
-        step *= np.minimum(1, (_STEP / np.maximum(np.abs(step), 1e-30)).min(axis=1))[:, None]
+        step *= np.minimum(1, (LARGEST_STEP / np.maximum(np.abs(step), 1e-30)).min(axis=1))[:, None]
         trial = start + step
         before = part.cost(start, left, on)
         after = part.cost(trial, part.residual(trial, jacobian=False)[0], on)

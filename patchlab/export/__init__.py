@@ -10,7 +10,15 @@ from patchlab.export.build import (
     target_name,
 )
 from patchlab.export.c99 import emit
+from patchlab.export.c_edge_model import EdgelRules, EdgelScale
 from patchlab.export.compare import Check, Target, Verification
+from patchlab.export.edgel_vectors import (
+    TOLERANCE_PX,
+    EdgelCase,
+    EdgelFinder,
+    edgel_files,
+    make_edgel_cases,
+)
 from patchlab.export.onnx import emit as emit_onnx
 from patchlab.export.runtime import RUNTIME, open_runtime, runtime_files
 from patchlab.export.selftest import Case as SelftestCase
@@ -31,7 +39,12 @@ __all__ = [
     "NO_COMPILER",
     "RUNTIME",
     "TARGETS",
+    "TOLERANCE_PX",
     "Check",
+    "EdgelCase",
+    "EdgelFinder",
+    "EdgelRules",
+    "EdgelScale",
     "SelftestCase",
     "Target",
     "Verification",
@@ -39,6 +52,7 @@ __all__ = [
     "broken_target",
     "compile_library",
     "cross_compile",
+    "edgel_files",
     "emit",
     "emit_onnx",
     "emit_selftest",
@@ -47,6 +61,7 @@ __all__ = [
     "library_name",
     "library_path",
     "make_cases",
+    "make_edgel_cases",
     "open_runtime",
     "parse_targets",
     "run_selftest",

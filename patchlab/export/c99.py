@@ -11,7 +11,8 @@ import numpy as np
 
 from patchlab.conventions import BORDERS
 from patchlab.errors import UsageError
-from patchlab.export import c_code, c_fft, c_fixed
+from patchlab.export import c_code, c_edgels, c_fft, c_fixed
+from patchlab.export.c_edge_model import EdgelRules
 from patchlab.export.c_text import (
     fill,
     float_literal,
@@ -33,6 +34,7 @@ RING_BYTES = 196_608
 """What the ring of rows may take: it should stay in the second cache."""
 
 ISAS = ("base", "avx2", "avx512")
+MATHEMATICS = {"INCLUDES": "#include <math.h>\n", "LIBM": "-lm"}
 ROWS_CALL = "    code = @N@_walk(&p, &job, first_row, row_count, scratch);\n"
 
 CODES = (
@@ -58,6 +60,12 @@ CODES = (
     ("BAD_ORIENTATION_ROW_BYTES", "orientation_row_bytes is smaller than a row"),
     ("NO_SCRATCH", "scratch is NULL"),
     ("BAD_PIXEL", "a pixel code is beyond the pixel format; the output is not to be used"),
+    ("NO_COUNT", "count is NULL"),
+    ("BAD_THRESHOLD", "a threshold is not between 1e-20 and 1e30, or no kernels find such edges"),
+    ("NO_EDGELS", "out is NULL and capacity is not 0"),
+    ("EDGELS_MISALIGNED", "out is not a multiple of 4"),
+    ("TOO_MANY", "there are more edgels than capacity; those that had room were written"),
+    ("TOO_LARGE", "the picture has too many pixels for the edgels' scratch memory"),
 )
 """Names and messages of the return codes, by value."""
 
@@ -82,13 +90,14 @@ _STRENGTH_WORDS = {
 }
 
 
-def emit(bank: Bank, plan: Plan) -> dict[str, bytes]:
+def emit(bank: Bank, plan: Plan, edgels: EdgelRules | None = None) -> dict[str, bytes]:
     """The C source of a bank.
 
     Parameters
     ----------
     bank : Bank
     plan : Plan made from it
+    edgels : how responses become edgels; None leaves ``NAME_edgels`` out
 
     Returns
     -------
@@ -111,6 +120,9 @@ def emit(bank: Bank, plan: Plan) -> dict[str, bytes]:
         raise UsageError(f"unknown border {bank.border!r}")
     about = _about(bank, plan) | _sections(bank, plan) | c_fixed.sections(bank, plan, CHUNK)
     about |= c_fft.sections(plan, bank.radius, CHUNK, _line(bank.radius))
+    about |= c_edgels.sections(bank, plan, edgels)
+    if edgels is not None:
+        about |= MATHEMATICS
 
     # texts with tokens of their own are filled before they are put in place
     about |= {k: fill(str(v), {"N": name}).decode() for k, v in about.items() if "@N@" in str(v)}
@@ -158,8 +170,7 @@ def _about(bank: Bank, plan: Plan) -> dict[str, object]:
         "FOLDED": folded,
         "WORK": folded + (products + 2) * CHUNK,
         "PLAN": f"{plan.kind}, {plan.multiplies:.0f} multiplies a pixel.",
-        "INCLUDES": "#include <math.h>\n" if roots else "",
-        "LIBM": "-lm" if roots else "",
+        **(MATHEMATICS if roots else dict.fromkeys(MATHEMATICS, "")),
         "VERSION": VERSION,
     }
 

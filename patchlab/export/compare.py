@@ -32,6 +32,9 @@ Responses = Callable[[Pixels], F32]
 Edges = Callable[[Pixels, int], tuple[F32, NDArray[np.uint8]]]
 """(h, w) pixels and a place in ``bank.scales`` to float32 strength and uint8 orientation."""
 
+Edgels = Callable[[Pixels, float, float], NDArray[np.void]]
+"""(h, w) pixels, threshold, threshold for lines (0: none) to edgels."""
+
 
 @dataclass(frozen=True)
 class Target:
@@ -42,6 +45,7 @@ class Target:
     name : for people
     responses, edges : callables, or None where it has none
     bounds : largest error allowed for each kernel; None means the plan's
+    edgels : callable, edge elements, or None where it has none
     slow : run it on small pictures only
     not_run : why it cannot be run here ("" when it can)
     also : further ways that came with this one
@@ -54,6 +58,7 @@ class Target:
     slow: bool = False
     not_run: str = ""
     also: tuple[Target, ...] = ()
+    edgels: Edgels | None = None
 
 
 @dataclass(frozen=True)

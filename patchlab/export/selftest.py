@@ -14,14 +14,25 @@ import numpy as np
 from numpy.typing import NDArray
 
 from patchlab.errors import UsageError
-from patchlab.export.c_text import fill, identifier, licence, lines, numbers, template
+from patchlab.export.c_text import (
+    double_literal,
+    fill,
+    identifier,
+    licence,
+    lines,
+    numbers,
+    template,
+)
+from patchlab.export.edgel_vectors import COLUMNS, TOLERANCE_PX, EdgelCase
 from patchlab.types import Bank, Plan
 
 Case = tuple[str, NDArray[Any], NDArray[np.float64], NDArray[np.float64]]
 """A name, pixels (h, w), expected responses (n, h, w), tolerance of each kernel (n,)."""
 
 
-def emit_selftest(bank: Bank, plan: Plan, cases: Sequence[Case]) -> dict[str, bytes]:
+def emit_selftest(
+    bank: Bank, plan: Plan, cases: Sequence[Case], edgels: EdgelCase | None = None
+) -> dict[str, bytes]:
     """The self-test program of a bank.
 
     Parameters
@@ -30,6 +41,7 @@ def emit_selftest(bank: Bank, plan: Plan, cases: Sequence[Case]) -> dict[str, by
     plan : Plan made from it
     cases : pictures with their float64 responses and the tolerance of each kernel; names are
         C identifiers
+    edgels : a picture with its edgels; None leaves ``NAME_edgels`` untried
 
     Returns
     -------
@@ -43,7 +55,6 @@ def emit_selftest(bank: Bank, plan: Plan, cases: Sequence[Case]) -> dict[str, by
         raise UsageError("a self-test needs at least one case")
     for case in cases:
         _check_case(bank, case)
-    bad_code = _bad_code(bank)
     fixed = plan.detail["fixed"]
     text = fill(
         template("selftest.c.in"),
@@ -59,11 +70,12 @@ def emit_selftest(bank: Bank, plan: Plan, cases: Sequence[Case]) -> dict[str, by
             "CASES": ",\n".join(_entry(i, case, fixed) for i, case in enumerate(cases)),
             "FIXED": _fixed_text(bank, fixed),
             "CHECK_FIXED": _CHECK_FIXED.replace("@N@", bank.name) if fixed is not None else "",
+            "EDGELS": _edgels_text(bank, edgels),
+            "CHECK_EDGELS": "    check_all_edgels();\n" if edgels is not None else "",
             "CASE_COUNT": len(cases),
             "MEMBERS": _members(plan),
             "MEMBER_COUNT": max(sum(len(s) for s in plan.detail["strength"]), 1),
-            "BAD_CODE": f"{bad_code}u" if bad_code else "0",
-            "HAS_BAD_CODE": int(bad_code is not None),
+            **_bad_code_texts(bank),
         },
     )
     return {f"{bank.name}_selftest.c": text}
@@ -89,6 +101,33 @@ def _bad_code(bank: Bank) -> int | None:
     if not form.integer or form.full_scale == np.iinfo(form.dtype).max:
         return None
     return form.full_scale + 1
+
+
+def _bad_code_texts(bank: Bank) -> dict[str, object]:
+    bad = _bad_code(bank)
+    return {"BAD_CODE": f"{bad}u" if bad else "0", "HAS_BAD_CODE": int(bad is not None)}
+
+
+def _edgels_text(bank: Bank, case: EdgelCase | None) -> str:
+    """The part of the program that tries the edgels."""
+    if case is None:
+        return ""
+    h, w = case.pixels.shape
+    columns = np.stack([case.expected[c].astype(np.float64) for c in COLUMNS], axis=1)
+    rows = ",\n".join(f"    {{{', '.join(double_literal(v) for v in row)}}}" for row in columns)
+    text = [
+        f"static const {bank.name}_pixel edgel_pixels[{case.pixels.size}] = {{",
+        numbers(case.pixels),
+        "};",
+        f"static const double edgels_expected[{len(columns)}][8] = {{\n{rows}\n}};",
+        f"static const struct edgel_case edgel_picture = {{{w}, {h}, edgel_pixels, "
+        f"{double_literal(case.threshold)}, {double_literal(case.line_threshold)},",
+        f"    {len(columns)}, edgels_expected}};",
+    ]
+    values = {"N": bank.name, "SIZE": bank.size, "EDGEL_ARRAYS": lines(text),
+              "TOLERANCE": double_literal(TOLERANCE_PX), "LINES": int(case.line_threshold > 0),
+              **_bad_code_texts(bank)}  # fmt: skip
+    return fill(template("selftest_edgels.c.in"), values).decode()
 
 
 def _arrays(number: int, case: Case, name: str) -> str:

@@ -11,7 +11,7 @@ from __future__ import annotations
 import io
 import json
 import math
-from collections.abc import Callable, Iterator
+from collections.abc import Callable, Iterator, Mapping
 from dataclasses import dataclass
 from typing import Any
 
@@ -175,7 +175,7 @@ def make_cases(
     """
     pictures = list(_small(bank) if small else _pictures(bank, plan))
     if crop is not None and not small and min(crop.shape) >= bank.size:
-        pictures.append(("crop", "a piece of a picture", _middle(crop, max(bank.size, 40))))
+        pictures.append(("crop", "a piece of a picture", middle(crop, max(bank.size, 40))))
     cases: list[Case] = []
     left = limit_bytes / 8 / (len(bank) + len(bank.scales))
     for name, what, pixels in pictures:
@@ -305,7 +305,8 @@ def _worst_fixed(bank: Bank, plan: Plan) -> Iterator[Picture]:
             yield f"probe_fixed_{int(most)}", "worst for fixed point", np.tile(worst, (2, 2))
 
 
-def _middle(pixels: Pixels, side: int) -> Pixels:
+def middle(pixels: Pixels, side: int) -> Pixels:
+    """The middle of a picture, at most ``side`` pixels high and wide."""
     rows, cols = (max(0, (n - side) // 2) for n in pixels.shape)
     return pixels[rows : rows + side, cols : cols + side]
 
@@ -317,10 +318,12 @@ _ARRAYS = {"pixels": "image", "expected": "responses", "strength": "strength",
 """Field of a case to the word in its file's name."""
 
 
-def vector_files(bank: Bank, cases: tuple[Case, ...]) -> Bundle:
+def vector_files(
+    bank: Bank, cases: tuple[Case, ...], edgels: Mapping[str, Any] | None = None
+) -> Bundle:
     """Cases as files under ``vectors/``: ``.npy`` arrays, ``cases.json``, ``README.md``.
 
-    The same cases give the same bytes.
+    ``edgels`` is a further entry for ``cases.json``. The same cases give the same bytes.
     """
     files: dict[str, bytes] = {}
     listed = []
@@ -343,6 +346,8 @@ def vector_files(bank: Bank, cases: tuple[Case, ...]) -> Bundle:
     if cases[0].strength_tolerance is not None:
         head["strength"] = bank.strength
         head["strength_tolerance"] = cases[0].strength_tolerance.tolist()
+    if edgels:
+        head["edgels"] = dict(edgels)
     files["vectors/cases.json"] = canonical_json(head)
     files["vectors/README.md"] = _README.format(border=bank.border, name=bank.name).encode()
     return files
@@ -369,7 +374,7 @@ def load_cases(read: Callable[[str], bytes]) -> tuple[Case, ...]:
                 tolerance=np.array(head["tolerance"], dtype=np.float64),
                 strength_tolerance=strength_tolerance and np.array(strength_tolerance),
                 **{
-                    field: _array(read(f"vectors/{entry[word]}"))
+                    field: array_in(read(f"vectors/{entry[word]}"))
                     for field, word in _ARRAYS.items()
                     if word in entry
                 },
@@ -394,7 +399,8 @@ def _fitting(case: Case, kernels: int) -> None:
         raise ValueError(f"the arrays of case {case.name} do not belong together")
 
 
-def _array(data: bytes) -> NDArray[Any]:
+def array_in(data: bytes) -> NDArray[Any]:
+    """The plain array in a ``.npy`` file; ValueError for anything else."""
     try:
         return np.asarray(np.lib.format.read_array(io.BytesIO(data), allow_pickle=False))
     except Exception as error:  # a damaged header ends in errors of many kinds
@@ -418,6 +424,9 @@ order; any language can read them (a short text header, then the numbers).
 - `*.strength.npy`, `*.orientation.npy`: (scales, rows, columns), where the bank has them.
   Orientation is the number of the strongest orientation. Where two
   orientations are within twice the strength's tolerance of each other, either may win.
+- `edgels_*.npy`, where the bank finds edges: a picture, and float64 rows x, y, theta, strength,
+  sd, scale, kind, width of the edge elements that `cases.json` lists with their thresholds. A
+  port finds the same elements, in the same order, within the tolerance that stands there.
 
 How to compute them:
 

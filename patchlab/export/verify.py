@@ -9,7 +9,7 @@ never counts as passed.
 from __future__ import annotations
 
 from collections.abc import Callable, Iterator, Mapping
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
 from pathlib import Path
 from typing import Any
 
@@ -31,8 +31,22 @@ from patchlab.export.compare import (
     not_run,
     run_target,
 )
+from patchlab.export.edgel_vectors import (
+    EdgelCase,
+    EdgelFinder,
+    edgel_checks,
+    load_edgel_cases,
+)
 from patchlab.export.onnx import Runner, conv_bound, reference_runner
-from patchlab.export.vectors import Case, Oracle, Pixels, load_cases, make_probes, strongest
+from patchlab.export.vectors import (
+    Case,
+    Oracle,
+    Pixels,
+    array_in,
+    load_cases,
+    make_probes,
+    strongest,
+)
 from patchlab.export.wasm import wasm_target
 from patchlab.progress import Progress, silent
 from patchlab.types import F32, Bank, Plan
@@ -53,6 +67,7 @@ def verify(
     open_library: Callable[[Path], Target] | None = None,
     run_selftest: SelfTestRunner | None = None,
     library: str | None = None,
+    find_edgels: EdgelFinder | None = None,
     progress: Progress = silent,
 ) -> Verification:
     """Run every target of a bank against the oracle.
@@ -68,6 +83,7 @@ def verify(
     run_selftest : callable, compiles and runs the C self-test of a folder: (passed, note).
         May raise UsageError where there is no compiler: then it is not run
     library : path of this machine's library in the folder; None looks for it under ``lib/``
+    find_edgels : callable, Python's own edgels, which those of targets are compared with
 
     Returns
     -------
@@ -79,6 +95,8 @@ def verify(
     cases, stored = _stored(bank, files, oracle)
     checks.extend(stored)
     checks.extend(_stored_counts(plan, cases))
+    edgels, broken = _stored_edgels(files)
+    checks.extend(broken)
     cases += make_probes(bank, plan, oracle)
     targets = [
         *(engines or {}).values(),
@@ -90,6 +108,7 @@ def verify(
     for done, target in enumerate(targets):
         progress("verify", done, len(targets) + 1, target.name)
         checks.extend(run_target(bank, plan, target, cases))
+        checks.extend(edgel_checks(target, edgels, find_edgels))
     progress("verify", len(targets), len(targets) + 1, "C self-test")
     checks.append(_selftest(bank, files, run_selftest))
     progress("verify", len(targets) + 1, len(targets) + 1)
@@ -162,6 +181,16 @@ def _stored_counts(plan: Plan, cases: tuple[Case, ...]) -> Iterator[Check]:
         yield judged("oracle, integers", "stored counts", float(wrong), 0.0, note)
 
 
+def _stored_edgels(files: _Files) -> tuple[tuple[EdgelCase, ...], tuple[Check, ...]]:
+    """The stored pictures with edgels."""
+    if "vectors/cases.json" not in files.head["files"]:
+        return (), ()
+    try:
+        return load_edgel_cases(files.read, array_in), ()
+    except PatchlabError as error:
+        return (), (failed("oracle, float64", "stored edgels", str(error)),)
+
+
 def _libraries(
     files: _Files, open_library: Callable[[Path], Target] | None, library: str | None
 ) -> Iterator[Target]:
@@ -188,7 +217,7 @@ def _opened(files: _Files, name: str, open_library: Callable[[Path], Target]) ->
         return Target(title, not_run=str(error))
     except (PatchlabError, OSError) as error:
         return broken_target(title, error)
-    return Target(title, opened.responses, opened.edges, opened.bounds, also=opened.also)
+    return replace(opened, name=title)
 
 
 def broken_target(title: str, error: Exception) -> Target:

@@ -14,6 +14,7 @@ from patchlab import edges, export, store
 from patchlab.edges import thin
 from patchlab.errors import PatchlabError, UsageError, VerificationError
 from patchlab.pipeline.desk import Desk, may_write
+from patchlab.pipeline.edgel_rules import edgel_cases, edgel_finder, edgel_rules
 from patchlab.progress import Progress, silent
 from patchlab.settings import Settings
 from patchlab.types import Bank, Plan
@@ -62,14 +63,17 @@ def write_bundle(
     VerificationError : a target differs from the oracle; the folder stays for inspection.
     """
     plan = banks.make_plan(bank)
-    files = dict(export.emit(bank, plan))
-    files |= export.emit_selftest(bank, plan, _selftest_cases(bank, plan))
+    files = dict(export.emit(bank, plan, edgel_rules(bank)))
+    edgels = edgel_cases(bank, plan, crop)
+    files |= export.emit_selftest(
+        bank, plan, _selftest_cases(bank, plan), edgels[0] if edgels else None
+    )
     desk.progress("export", 1, 4, "C source")
     library, said = build_libraries(files, bank, plan, desk.settings)
     desk.progress("export", 2, 4, "library")
     graph = export.emit_onnx(bank)
     cases = export.make_cases(bank, plan, banks.exact_responses, crop=crop)
-    files |= {**library, **graph.files, **export.vector_files(bank, cases)}
+    files |= {**library, **graph.files, **_vector_files(bank, cases, edgels)}
     files |= export.runtime_files(edge_rules(bank))
     desk.progress("export", 3, 4, "ONNX and vectors")
     head = banks.write_bank(
@@ -90,6 +94,14 @@ def write_bundle(
         raise error
     onnx = "; ".join(graph.notes) or "written"
     return Written(folder, bank, plan, head, proof, said, onnx)
+
+
+def _vector_files(bank: Bank, cases: Any, edgels: tuple[export.EdgelCase, ...]) -> dict[str, bytes]:
+    if not edgels:
+        return dict(export.vector_files(bank, cases))
+    files, entries = export.edgel_files(edgels)
+    about = {"tolerance_px": export.TOLERANCE_PX, "cases": entries}
+    return {**files, **export.vector_files(bank, cases, about)}
 
 
 def _selftest_cases(bank: Bank, plan: Plan) -> list[export.SelftestCase]:
@@ -224,10 +236,14 @@ def prove(
     folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any], progress: Progress = silent
 ) -> export.Verification:
     """Run every target of a bank's folder against the oracle."""
+    find = edgel_finder(bank)
     engine = export.Target(
         "in-process engine",
         lambda pixels: banks.responses(bank, pixels, plan),
         lambda pixels, scale: banks.strength(bank, pixels, scale, plan),
+        edgels=lambda pixels, high, lines: find(
+            pixels, banks.responses(bank, pixels, plan), high, lines
+        ),
     )
 
     engines = {"engine": engine, **_runtimes(folder, bank, head)}
@@ -236,7 +252,8 @@ def prove(
         relative = path.relative_to(folder).as_posix()
         native = banks.load_native(folder, bank, plan, head, relative)
         also = (_fixed_target(relative, native, plan),) if plan.detail["fixed"] else ()
-        return export.Target(path.name, native.responses, native.edges, also=also)
+        edgels = native.edgels if native.has_edgels else None
+        return export.Target(path.name, native.responses, native.edges, also=also, edgels=edgels)
 
     def selftest(where: Path) -> tuple[bool, str]:
         sources = [n for n in head["files"] if "/" not in n and n.endswith((".c", ".h"))]
@@ -256,6 +273,7 @@ def prove(
         engines=engines,
         open_library=open_library,
         run_selftest=selftest,
+        find_edgels=find,
         progress=progress,
     )
 

@@ -12,6 +12,7 @@ from patchlab import export
 from patchlab.bank.disk import write_bank
 from patchlab.bank.plan import make_plan
 from patchlab.pipeline import bundle
+from patchlab.pipeline.edgel_rules import edgel_rules
 from patchlab.store import canonical_json, sha256
 from patchlab.types import Bank, Thresholds
 from tests.bank.banks import lattice_bank, random_bank
@@ -38,7 +39,7 @@ BANKS = {
 def write(folder: Path, bank: Bank, *, library: bool = True) -> Path:
     """A bank's folder with its C source, library and runtime."""
     plan = make_plan(bank)
-    files = dict(export.emit(bank, plan))
+    files = dict(export.emit(bank, plan, edgel_rules(bank)))
     files |= export.runtime_files(bundle.edge_rules(bank))
     if library:
         data = export.compile_library(files, bank.name, flags=("-O1",))

@@ -29,6 +29,7 @@ from patchlab.export.build import (
     run_selftest,
 )
 from patchlab.export.c_text import double_literal, float_literal
+from patchlab.pipeline.edgel_rules import edgel_cases, edgel_rules
 from patchlab.store import LICENCE, sha256
 from patchlab.types import Thresholds
 from tests.bank.banks import given_bank, lattice_bank, picture, random_bank
@@ -51,7 +52,10 @@ def files_of(bank, kind="auto"):
         "wide": (bank.size + 2, 131),
     }
     cases = [case(bank, plan, name, shape) for name, shape in shapes.items()]
-    return plan, c99.emit(bank, plan) | c99.emit_selftest(bank, plan, cases)
+    rules, pictures = edgel_rules(bank), edgel_cases(bank, plan)
+    assert bool(pictures) == (rules is not None)
+    edgels = pictures[0] if pictures else None
+    return plan, c99.emit(bank, plan, rules) | c99.emit_selftest(bank, plan, cases, edgels)
 
 
 def native(bank, kind="auto", flags=("-O1",)):

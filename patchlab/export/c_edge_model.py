@@ -1,0 +1,267 @@
+"""The rules of edgels, and their edge model in C: its tables, and the curve from light to values.
+
+A stage does not import another, so the rules of :mod:`patchlab.edges` come in as plain numbers.
+"""
+
+from __future__ import annotations
+
+import math
+from dataclasses import dataclass
+from typing import Any
+
+import numpy as np
+from numpy.typing import NDArray
+from scipy.special import ndtr
+
+from patchlab.export.c_text import double_literal, lines, numbers
+from patchlab.types import F64, Bank
+
+
+@dataclass(frozen=True, eq=False)
+class EdgelScale:
+    """One scale of one kind of edges.
+
+    Parameters
+    ----------
+    scale : index in the bank
+    odd, even : kernels whose largest response is the strength; both for energy
+    angles : normal directions, radians
+    reach_px : pixels at the border left out
+    around_px : half side of the square that ``own`` and ``other`` look at
+    own, other : share of the largest strength around, and of the rival's, that an element needs
+    rival : kernels of the other parity; empty where they have no say
+    rival_of_lines : the rival has a say only where lines are looked for beside steps
+    slope_odd, slope_even : root mean square slope of each kernel's noise along its normal
+    """
+
+    scale: int
+    odd: tuple[int, ...]
+    even: tuple[int, ...]
+    angles: F64
+    reach_px: int
+    around_px: int
+    own: float
+    other: float
+    rival: tuple[int, ...]
+    rival_of_lines: bool
+    slope_odd: F64
+    slope_even: F64
+
+
+@dataclass(frozen=True, eq=False)
+class EdgelRules:
+    """How a bank's responses become edgels.
+
+    Parameters
+    ----------
+    own, lines : scales of the bank's own kind, and of lines beside steps, finest first
+    hysteresis, line_hysteresis : low threshold over high threshold
+    dilation_px : a coarser scale adds only farther than this from finer elements
+    light, value, clipped : the curve from light to working values, piecewise linear
+    noise_sd : of the working values; None when not known
+    autocovariance : of the noise; None when white
+    blur_px : of the camera; None when not known
+    start_blur_px : where to start then
+    radii : of the two disks that an edge is fitted in, pixels
+    misfit : above it the narrow disk is tried
+    leash_px : a fit that moves farther is not trusted
+    iterations, asks, largest_step, prior : of the least squares
+    """
+
+    own: tuple[EdgelScale, ...]
+    lines: tuple[EdgelScale, ...]
+    hysteresis: float
+    line_hysteresis: float
+    dilation_px: int
+    light: F64
+    value: F64
+    clipped: bool
+    noise_sd: float | None
+    autocovariance: F64 | None
+    blur_px: float | None
+    start_blur_px: float
+    radii: tuple[float, float]
+    misfit: float
+    leash_px: float
+    iterations: int
+    asks: float
+    largest_step: F64
+    prior: F64
+
+
+def put(text: str, parts: dict[str, Any]) -> str:
+    """Fill in this module's tokens and leave all others."""
+    for token, value in parts.items():
+        text = text.replace(f"@{token}@", str(value))
+    return text
+
+
+def inside(values: Any) -> str:
+    """Float64 numbers on one line, as they stand inside an initialiser."""
+    return ", ".join(double_literal(v) for v in np.asarray(values, np.float64))
+
+
+def tail() -> F64:
+    """Taylor coefficients (137, 8) of the normal distribution's upper tail at every 1/16.
+
+    Within 1/32 of these places the eighth power is left out: less than 2e-15.
+    """
+    at = np.arange(8.5 * 16 + 1) / 16
+    bell = np.exp(-at * at / 2) / math.sqrt(2 * math.pi)
+    hermite = [np.ones_like(at), at]
+    for n in range(1, 7):
+        hermite.append(at * hermite[n] - n * hermite[n - 1])
+    columns = [ndtr(-at)]
+    for n in range(1, 8):
+        columns.append((-1) ** n * bell * hermite[n - 1] / math.factorial(n))
+    return np.stack(columns, axis=1)
+
+
+def disk(radius: float) -> tuple[NDArray[np.int64], NDArray[np.int64]]:
+    """Columns and rows of the pixels at most ``radius`` from the middle, in row order."""
+    r = math.floor(radius)
+    y, x = np.mgrid[-r : r + 1, -r : r + 1]
+    keep = x * x + y * y <= radius * radius
+    return x[keep], y[keep]
+
+
+def disk_text(x: NDArray[np.int64], y: NDArray[np.int64], window: int) -> str:
+    """A disk as an initialiser, its offsets padded with zeros."""
+    padded = [np.pad(v, (0, window - len(v))) for v in (x, y)]
+    rows = ",\n".join(f"{{\n{numbers(v.astype(np.float64), indent=8)}}}" for v in padded)
+    return f"    {{{len(x)}, {-(-len(x) // 8) * 8}, {rows}}}"
+
+
+def _table_first(bank: Bank, rules: EdgelRules) -> int | None:
+    """The code at which the curve's values begin in the input table; None when they do not."""
+    table = bank.table.values
+    if table is None:
+        return None
+    first = math.ceil(bank.contract.black) if bank.contract.transfer == "srgb" else 0
+    part = table[first : first + rules.value.size]
+    return first if np.array_equal(part, rules.value) else None
+
+
+def curve_tables(bank: Bank, rules: EdgelRules) -> str:
+    """Light and value of the curve's knots; the input table serves where it holds them."""
+    text, light, value = "", rules.light, rules.value
+    if _pitch(light):
+        begin, pitch = double_literal(light[0]), double_literal(_pitch(light))
+        names = {"LIGHT": f"({begin} + {pitch} * (double)(i))"}
+    else:
+        text += _array("light", light)
+        names = {"LIGHT": "@N@_light[i]"}
+    first = _table_first(bank, rules)
+    if first is None:
+        text += _array("curve", value)
+        names["KNOT"] = "@N@_curve[i]"
+    elif np.array_equal(value, first + np.arange(value.size)):
+        names["KNOT"] = f"((double)(i) + {double_literal(first)})"
+    else:
+        names["KNOT"] = f"((double)@N@_table[(i) + {first}])"
+    rising = np.maximum.accumulate(value)
+    if np.array_equal(rising, value):
+        names["RISING"] = "@N@_KNOT(i)"
+    else:
+        text += _array("rising", rising)
+        names["RISING"] = "@N@_rising[i]"
+    return text + lines([f"#define @N@_{word}(i) {what}" for word, what in names.items()] + [""])
+
+
+def _array(name: str, values: F64) -> str:
+    return f"static const double @N@_{name}[{values.size}] = {{\n{numbers(values)}\n}};\n"
+
+
+def _pitch(light: F64) -> float:
+    """Distance of the knots when they are evenly spread, else 0."""
+    steps = np.diff(light)
+    return float(steps[0]) if np.ptp(steps) <= 1e-9 * steps[0] else 0.0
+
+
+def curve(rules: EdgelRules) -> str:
+    """Body of the C function from light to working value and slope."""
+    last, pitch = rules.light.size - 2, _pitch(rules.light)
+    if rules.clipped:
+        inside = f"light < @N@_LIGHT(0) ? @N@_LIGHT(0) : light > @N@_LIGHT({last + 1}) "
+        inside += f"? @N@_LIGHT({last + 1}) : light"
+    else:
+        inside = "light"
+    body = [f"const double inside = {inside};"]
+    if pitch:
+        scaled = "inside - @N@_LIGHT(0)" if pitch == 1 else f"(inside - @N@_LIGHT(0)) / {pitch!r}"
+        body += [
+            f"const double place = {scaled};",
+            f"const int i = place > 0.0 ? place < {last}.0 ? (int)place : {last} : 0;",
+        ]
+    else:
+        body += [
+            f"int i = 0, end = {last + 1};",
+            "double rise;",
+            "while (end - i > 1) {",
+            "    const int middle = i + (end - i) / 2;",
+            "    if (@N@_LIGHT(middle) <= inside) i = middle;",
+            "    else end = middle;",
+            "}",
+        ]
+    rise = "@N@_KNOT(i + 1) - @N@_KNOT(i)"
+    if pitch != 1:
+        rise = f"({rise}) / (@N@_LIGHT(i + 1) - @N@_LIGHT(i))"
+    body += [
+        f"{'const double rise' if pitch else 'rise'} = {rise};",
+        f"*slope = {'inside == light ? rise : 0.0' if rules.clipped else 'rise'};",
+        "return @N@_KNOT(i) + rise * (inside - @N@_LIGHT(i));",
+    ]
+    return lines(body, 4)
+
+
+_WHITE = """\
+/* Variance of the position for white noise; x is its row of the inverse normal matrix. */
+static double @N@_variance(const struct @N@_problem *p, double by[6][@N@_WINDOW],
+    const double *x)
+{
+    (void)p;
+    (void)by;
+    return x[0] > 0.0 ? x[0] : 0.0;
+}
+"""
+_COLOURED = """\
+/* Autocovariance of the noise. */
+static const double @N@_noise[@SIDE@][@SIDE@] = {
+@NOISE@
+};
+
+/* Variance of the position under noise that is not white; x is its row of the inverse normal
+ * matrix. */
+static double @N@_variance(const struct @N@_problem *p, double by[6][@N@_WINDOW],
+    const double *x)
+{
+    double pull[@N@_WINDOW], sum = 0.0;
+    const int n = p->disk->count;
+    int i, j;
+    for (i = 0; i < n; ++i) {
+        pull[i] = x[0] * by[0][i] + x[1] * by[1][i] + x[2] * by[2][i] + x[3] * by[3][i]
+            + x[4] * by[4][i] + x[5] * by[5][i];
+    }
+    for (i = 0; i < n; ++i) {
+        double row = 0.0;
+        for (j = 0; j < n; ++j) {
+            const int dx = (int)(p->disk->x[i] - p->disk->x[j]);
+            const int dy = (int)(p->disk->y[i] - p->disk->y[j]);
+            if (dx >= -@LAGS@ && dx <= @LAGS@ && dy >= -@LAGS@ && dy <= @LAGS@)
+                row += @N@_noise[dy + @LAGS@][dx + @LAGS@] * pull[j];
+        }
+        sum += pull[i] * row;
+    }
+    return sum > 0.0 ? sum : 0.0;
+}
+"""
+
+
+def correlation(rules: EdgelRules) -> str:
+    """C function for the variance of a fitted position, under the noise's autocovariance."""
+    noise = rules.autocovariance
+    if noise is None:
+        return _WHITE
+    side = noise.shape[0]
+    rows = ",\n".join(f"    {{{inside(row)}}}" for row in noise)
+    return put(_COLOURED, {"SIDE": side, "LAGS": side // 2, "NOISE": rows})

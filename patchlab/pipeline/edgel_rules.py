@@ -1,0 +1,136 @@
+"""What the compiled code must know to find and place edgels as :mod:`patchlab.edges` does."""
+
+from __future__ import annotations
+
+import math
+from typing import Any
+
+import numpy as np
+from numpy.typing import NDArray
+
+from patchlab import bank as banks
+from patchlab import edges, export
+from patchlab.edges import locate, model, thin
+from patchlab.edges.noise import spectral_moments
+from patchlab.errors import UsageError
+from patchlab.types import F32, F64, Bank, Plan, Thresholds
+
+
+def edgel_rules(bank: Bank) -> export.EdgelRules | None:
+    """The rules of a bank's edgels; None for a bank that finds no edges."""
+    try:
+        own = thin.shapes_of(bank)
+    except UsageError:
+        return None
+    lines = _lines(bank)
+    curve = model.curve_of(bank.table)
+    known, of_lines = bank.thresholds, bank.line_thresholds
+    return export.EdgelRules(
+        own=tuple(_scale(bank, s, bank.strength) for s in own),
+        lines=tuple(_scale(bank, s, "line") for s in lines),
+        hysteresis=thin.HYSTERESIS if known is None else known.hysteresis,
+        line_hysteresis=thin.HYSTERESIS if of_lines is None else of_lines.hysteresis,
+        dilation_px=thin.DILATION_PX,
+        light=curve.light,
+        value=curve.value,
+        clipped=curve.clipped,
+        noise_sd=bank.table.noise_sd,
+        autocovariance=bank.noise_autocovariance,
+        blur_px=bank.provenance.get("blur_sigma_px"),
+        start_blur_px=locate.BLUR_PX,
+        radii=(locate.RADIUS_PX, locate.NARROW_PX),
+        misfit=locate.MISFIT,
+        leash_px=locate.LEASH_PX,
+        iterations=model.ITERATIONS,
+        asks=model.ASKS,
+        largest_step=model.LARGEST_STEP,
+        prior=model.PRIOR,
+    )
+
+
+def edgel_finder(bank: Bank) -> export.EdgelFinder:
+    """Python's own edgels on responses that stand: what compiled ones are compared with."""
+    ratios = {
+        kind: thin.HYSTERESIS if table is None else table.hysteresis
+        for kind, table in ((bank.strength, bank.thresholds), ("line", bank.line_thresholds))
+        if kind == bank.strength or bank.strength == "step"
+    }
+
+    def find(
+        pixels: NDArray[Any], responses: F32, threshold: float, line_threshold: float
+    ) -> NDArray[np.void]:
+        asked: dict[thin.Kind, float] = {bank.strength: threshold, "line": line_threshold}
+        if bank.strength == "line":
+            asked = {"line": threshold}
+        levels = {kind: (high, ratios[kind]) for kind, high in asked.items() if high}
+        blur = bank.provenance.get("blur_sigma_px")
+        return edges.find_on(bank, pixels, responses, levels, blur_px=blur).edgels
+
+    return find
+
+
+def edgel_cases(bank: Bank, plan: Plan, crop: Any = None) -> tuple[export.EdgelCase, ...]:
+    """Pictures with the edgels that the bank finds; none for a bank that finds no edges."""
+    rules = edgel_rules(bank)
+    if rules is None:
+        return ()
+    return export.make_edgel_cases(
+        bank,
+        plan,
+        banks.exact_responses,
+        edgel_finder(bank),
+        threshold=_middle(bank.thresholds),
+        line_threshold=_middle(bank.line_thresholds) if rules.lines else 0.0,
+        crop=crop,
+    )
+
+
+def _middle(table: Thresholds | None) -> float | None:
+    """The threshold in the middle of a table."""
+    return None if table is None else float(table.strength[len(table.strength) // 2])
+
+
+def _lines(bank: Bank) -> tuple[thin.ScaleShape, ...]:
+    """The scales that find lines beside the bank's own steps."""
+    if bank.strength != "step":
+        return ()
+    try:
+        return thin.shapes_of(bank, "line")
+    except UsageError:
+        return ()
+
+
+def _scale(bank: Bank, shape: thin.ScaleShape, kind: thin.Kind) -> export.EdgelScale:
+    odd = shape.odd if kind != "line" else ()
+    even = shape.even if kind != "step" else ()
+    own = thin.RELATIVE_FLOOR if shape.scale > 0 else 0.0
+    rival: tuple[int, ...] = ()
+    other = 0.0
+    if kind == "line":
+        own, rival, other = thin.LINE_FLOOR, shape.odd, thin.LINE_OVER_STEP
+    elif kind == "step":
+        rival, other = shape.even, 1 / thin.LINE_OVER_STEP
+    return export.EdgelScale(
+        scale=shape.scale,
+        odd=odd,
+        even=even,
+        angles=shape.angles,
+        reach_px=shape.reach_px,
+        around_px=math.ceil(thin.WINDOW_SIGMAS * shape.sigma_px),
+        own=own,
+        other=other,
+        rival=rival,
+        rival_of_lines=kind == "step",
+        slope_odd=_slopes(bank, odd, shape.angles),
+        slope_even=_slopes(bank, even, shape.angles),
+    )
+
+
+def _slopes(bank: Bank, members: tuple[int, ...], angles: F64) -> F64:
+    """Root mean square slope along the normal of each kernel's response to noise."""
+    return np.array(
+        [
+            math.sqrt(spectral_moments(bank.taps[i], float(a), bank.noise_autocovariance)[1])
+            for i, a in zip(members, angles[: len(members)], strict=True)
+        ]
+    )
