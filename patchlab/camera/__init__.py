@@ -6,6 +6,7 @@ from patchlab.camera.flags import flag_components
 from patchlab.camera.marks import find_marks
 from patchlab.camera.noise import measure_noise
 from patchlab.camera.pixels import MAX_FRAMES
+from patchlab.camera.samples import sample_noise
 from patchlab.camera.spectrum import Spectrum, measure_spectrum
 from patchlab.camera.static import measure_noise_dark, measure_noise_static
 from patchlab.camera.survey import survey
@@ -24,6 +25,7 @@ __all__ = [
     "measure_noise_static",
     "measure_spectrum",
     "noise_of_table",
+    "sample_noise",
     "slanted_edge",
     "survey",
 ]

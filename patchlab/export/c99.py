@@ -11,7 +11,7 @@ import numpy as np
 
 from patchlab.conventions import BORDERS
 from patchlab.errors import UsageError
-from patchlab.export import c_code, c_fft, c_fixed
+from patchlab.export import c_code, c_colour, c_fft, c_fixed
 from patchlab.export.c_text import (
     fill,
     float_literal,
@@ -111,6 +111,7 @@ def emit(bank: Bank, plan: Plan) -> dict[str, bytes]:
         raise UsageError(f"unknown border {bank.border!r}")
     about = _about(bank, plan) | _sections(bank, plan) | c_fixed.sections(bank, plan, CHUNK)
     about |= c_fft.sections(plan, bank.radius, CHUNK, _line(bank.radius))
+    about |= {k: _told(v, about) for k, v in c_colour.sections(bank).items()}
 
     # texts with tokens of their own are filled before they are put in place
     about |= {k: fill(str(v), {"N": name}).decode() for k, v in about.items() if "@N@" in str(v)}
@@ -126,6 +127,11 @@ def emit(bank: Bank, plan: Plan) -> dict[str, bytes]:
     }
 
 
+def _told(text: object, about: dict[str, object]) -> str:
+    """A text with the tokens of the bank's plain facts filled in; the name's comes later."""
+    return fill(str(text), {**about, "N": "@N@"}).decode()
+
+
 # ---------------------------------------------------------------- facts
 
 
@@ -135,7 +141,7 @@ def _about(bank: Bank, plan: Plan) -> dict[str, object]:
     line = _line(bank.radius)
     products = len(plan.detail["bases"])
     scales = len(plan.detail["strength"])
-    tile = max(256, RING_BYTES // (4 * bank.size) // CHUNK * CHUNK)
+    tile = max(256, RING_BYTES // (4 * bank.size * bank.planes) // CHUNK * CHUNK)
     folded = (2 * bank.radius + 1) * line if c_code.folds(plan) else 0
     roots = bank.strength == "energy" or (bank.table.kind == "stabilised" and not form.integer)
     return {

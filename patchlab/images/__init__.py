@@ -18,6 +18,7 @@ from patchlab.images.folder import (
     take_in,
 )
 from patchlab.images.pfnc import RawLayout
+from patchlab.images.planes import one_plane
 from patchlab.images.sample import SampleSettings, memory_needed, sample, sample_folder
 
 __all__ = [
@@ -34,6 +35,7 @@ __all__ = [
     "list_photos",
     "make_sample_images",
     "memory_needed",
+    "one_plane",
     "read_file",
     "reread",
     "sample",
