@@ -241,7 +241,8 @@ class NativeBank:
             return int(
                 call(
                     *self._address(pixels), start, height, scale,
-                    to.ctypes.data, strength.strides[0], who.ctypes.data, turn.strides[0], scratch.ctypes.data,
+                    to.ctypes.data, strength.strides[0], who.ctypes.data, turn.strides[0],
+                    scratch.ctypes.data,
                 )
             )  # fmt: skip
 

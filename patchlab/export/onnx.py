@@ -98,8 +98,8 @@ def conv_bound(bank: Bank) -> tuple[float, ...]:
     fused multiply-add or without (Higham 2002, section 3.1), so it holds for any ONNX
     runtime that multiplies and adds in float32. Float pixels under the root formula add
     :data:`ROOT_ROUNDINGS`, because not every runtime rounds a square root correctly
-    (onnxruntime 1.18 does not), and mixing working planes of C samples adds C. A runtime that fuses the formula's product and sum keeps
-    the bound where ``offset`` is not negative.
+    (onnxruntime 1.18 does not); mixing working planes of C samples adds C. A runtime that
+    fuses the formula's product and sum keeps the bound where ``offset`` is not negative.
     """
     count = np.count_nonzero(bank.taps.reshape(len(bank), -1), axis=1)
     root = bank.table.values is None and bank.table.kind == "stabilised"

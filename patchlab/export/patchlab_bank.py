@@ -116,9 +116,10 @@ class Bank:
     """A loaded bank; :func:`load` makes it.
 
     Attributes: ``name``; ``kernels`` (names, in the order of the planes); ``taps`` float32
-    (n, h, h), of colour pixels (n, h, h, planes); ``size`` (side of a kernel); ``pixels`` (format by its GenICam name) and ``dtype``;
-    ``border``; ``error_bound`` (one a kernel); ``scales`` and ``angles`` (radians, one a direction,
-    by scale); ``manifest``; ``compiled`` (the library in use, or None).
+    (n, h, h), of colour pixels (n, h, h, planes); ``size`` (side of a kernel); ``pixels`` (format
+    by its GenICam name) and ``dtype``; ``border``; ``error_bound`` (one a kernel); ``scales`` and
+    ``angles`` (radians, one a direction, by scale); ``manifest``; ``compiled`` (the library in
+    use, or None).
     """
 
     compiled: _Library | None = None

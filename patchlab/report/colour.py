@@ -20,7 +20,7 @@ def in_rgb(tiles: NDArray[Any], colours: str) -> NDArray[Any]:
 
 
 def drawn_fits(profiles: F64, fits: KernelFits) -> F64:
-    """Rendered profiles (k, size, size) with the direction of each fit, (k, size, size, samples)."""
+    """Rendered profiles (k, size, size) with each fit's direction, (k, size, size, samples)."""
     directions = np.array([f.direction for f in fits.fits[: len(profiles)]])
     return np.asarray(profiles[..., None] * directions[:, None, None, :])
 
