@@ -11,7 +11,7 @@ from __future__ import annotations
 
 import math
 from dataclasses import dataclass
-from typing import Literal
+from typing import Any, Literal
 
 import numpy as np
 from numpy.typing import NDArray
@@ -153,20 +153,75 @@ def srgb_encode(linear: Array) -> Array:
 
 @dataclass(frozen=True)
 class PixelFormat:
-    """A monochrome pixel format under its GenICam PFNC name.
+    """A pixel format under its GenICam PFNC name.
 
     ``float32`` is not a PFNC name; it stands for a plane of floats.
+
+    Parameters
+    ----------
+    name, bits, dtype, ctype : PFNC name, depth of a sample, its types in numpy and C
+    colours : a letter for each sample of a pixel, "" for monochrome. A Bayer sensor is read as
+        pixels too: each is a cell of 2 x 2 samples, row by row ("RGGB"), so that what is
+        learned or run knows the phase of the mosaic and nothing is interpolated
+    cell : rows and columns of samples in one pixel, 2 for a Bayer cell
     """
 
     name: str
     bits: int
     dtype: str
     ctype: str
+    colours: str = ""
+    cell: int = 1
 
     @property
     def integer(self) -> bool:
         """True when pixels are codes that index an input table."""
         return self.name != "float32"
+
+    @property
+    def planes(self) -> int:
+        """Samples of a pixel."""
+        return len(self.colours) or 1
+
+    @property
+    def row_samples(self) -> int:
+        """Samples of a pixel that stand side by side in one row of memory."""
+        return self.planes // self.cell
+
+    @property
+    def interleaved(self) -> bool:
+        """True when a picture is an array (h, w, samples) and not one plane."""
+        return self.planes > 1 and self.cell == 1
+
+    def size_of(self, picture: NDArray[Any]) -> tuple[int, int]:
+        """Height and width of a picture, in pixels (of a Bayer sensor, in cells)."""
+        return picture.shape[0] // self.cell, picture.shape[1] // self.cell
+
+    def stored(self, shape: tuple[int, int]) -> tuple[int, ...]:
+        """Shape of the array that holds a picture of (height, width) pixels."""
+        rows = (shape[0] * self.cell, shape[1] * self.cell)
+        return (*rows, self.planes) if self.interleaved else rows
+
+    def split(self, picture: NDArray[Any]) -> NDArray[Any]:
+        """A picture as (h, w, samples); one plane gets a last axis of length 1.
+
+        >>> bayer = pixel_format("BayerRG8")
+        >>> bayer.split(np.array([[1, 2, 5, 6], [3, 4, 7, 8]], np.uint8)).tolist()
+        [[[1, 2, 3, 4], [5, 6, 7, 8]]]
+        """
+        if self.interleaved:
+            return picture
+        h, w = self.size_of(picture)
+        c = self.cell
+        cells = picture[: h * c, : w * c].reshape(h, c, w, c).swapaxes(1, 2)
+        return cells.reshape(h, w, self.planes)
+
+    def joined(self, samples: NDArray[Any]) -> NDArray[Any]:
+        """The picture of which :meth:`split` gives these samples (h, w, samples)."""
+        if self.interleaved:
+            return samples
+        h, w, c = *samples.shape[:2], self.cell
+        return np.ascontiguousarray(samples.reshape(h, w, c, c).swapaxes(1, 2)).reshape(h * c, -1)
 
     @property
     def full_scale(self) -> int:
@@ -181,16 +236,64 @@ PIXEL_FORMATS: dict[str, PixelFormat] = {
     "Mono16": PixelFormat("Mono16", 16, "uint16", "uint16_t"),
     "float32": PixelFormat("float32", 32, "float32", "float"),
 }
+"""Monochrome formats, by name."""
+
+COLOUR_FORMATS: dict[str, PixelFormat] = {
+    f"{kind}{mono.bits}": PixelFormat(
+        f"{kind}{mono.bits}", mono.bits, mono.dtype, mono.ctype, colours, cell
+    )
+    for kind, colours, cell in (
+        ("RGB", "RGB", 1),
+        ("BGR", "BGR", 1),
+        ("BayerRG", "RGGB", 2),
+        ("BayerGR", "GRBG", 2),
+        ("BayerGB", "GBRG", 2),
+        ("BayerBG", "BGGR", 2),
+    )
+    for mono in PIXEL_FORMATS.values()
+    if mono.integer
+}
+"""Formats whose pixels have colours: interleaved, or cells of a Bayer mosaic."""
 
 
 def pixel_format(name: str) -> PixelFormat:
     """Look up a pixel format; an unknown name is refused with the known ones."""
-    try:
-        return PIXEL_FORMATS[name]
-    except KeyError:
+    found = PIXEL_FORMATS.get(name) or COLOUR_FORMATS.get(name)
+    if found is None:
+        known = (*PIXEL_FORMATS, *COLOUR_FORMATS)
         raise UsageError(
-            f"unknown pixel format {name!r}", remedy=f"choose one of {', '.join(PIXEL_FORMATS)}"
-        ) from None
+            f"unknown pixel format {name!r}", remedy=f"choose one of {', '.join(known)}"
+        )
+    return found
+
+
+# ---------------------------------------------------------------- colour
+
+LUMINANCE_AXIS = (1 / math.sqrt(3),) * 3
+"""Direction of grey in the space of (R, G, B) working values."""
+
+
+def tile_shape(size: int, length: int) -> tuple[int, ...]:
+    """Shape of the patch that a row of ``length`` values holds.
+
+    One plane: (size, size). Colour: (size, size, samples), as in an interleaved picture, so the
+    samples of a pixel stand side by side in a row of a patch set, of a filter and of an atom.
+
+    >>> tile_shape(8, 64), tile_shape(8, 192)
+    ((8, 8), (8, 8, 3))
+    """
+    planes = length // size**2
+    return (size, size) if planes == 1 else (size, size, planes)
+
+
+def rgb_weights(colours: str) -> Array:
+    """Matrix (3, samples) that takes a pixel's samples to (R, G, B): equal ones are averaged.
+
+    >>> rgb_weights("RGGB").tolist()
+    [[1.0, 0.0, 0.0, 0.0], [0.0, 0.5, 0.5, 0.0], [0.0, 0.0, 0.0, 1.0]]
+    """
+    found = np.array([[float(c == letter) for c in colours] for letter in "RGB"])
+    return np.asarray(found / found.sum(axis=1, keepdims=True))
 
 
 # ---------------------------------------------------------------- precision

@@ -100,7 +100,7 @@ def noise_gain(kernel: Array, autocovariance: Array | None = None) -> float:
 
     Parameters
     ----------
-    kernel : ndarray (h, h)
+    kernel : ndarray (h, h), or (h, h, planes) with independent noise in each plane
     autocovariance : ndarray (2m + 1, 2m + 1) of the noise, centre 1; None means white
 
     Returns
@@ -109,6 +109,9 @@ def noise_gain(kernel: Array, autocovariance: Array | None = None) -> float:
     """
     if autocovariance is None:
         return float(np.linalg.norm(kernel))
+    if kernel.ndim == 3:
+        planes = np.moveaxis(kernel, -1, 0)
+        return math.hypot(*(noise_gain(plane, autocovariance) for plane in planes))
     from scipy.signal import correlate2d
 
     own = correlate2d(kernel, kernel, mode="full")

@@ -13,7 +13,7 @@ from collections.abc import Mapping
 from dataclasses import dataclass, field
 from typing import Any
 
-from patchlab.conventions import BORDERS, DEFAULT_BORDER, PIXEL_FORMATS
+from patchlab.conventions import BORDERS, COLOUR_FORMATS, DEFAULT_BORDER, PIXEL_FORMATS
 from patchlab.errors import UsageError
 
 
@@ -48,7 +48,10 @@ class Settings:
         "auto", "photos", "How codes follow light.", choices=("auto", "linear", "srgb")
     )
     pixels: str | None = _setting(
-        None, "photos", "Pixel format by its PFNC name.", choices=tuple(PIXEL_FORMATS)
+        None,
+        "photos",
+        "Pixel format by its PFNC name.",
+        choices=(*PIXEL_FORMATS, *COLOUR_FORMATS),
     )
     raw_format: str | None = _setting(
         None, "photos", "PFNC name of the pixels in .raw files, where no sidecar tells it."
@@ -60,6 +63,12 @@ class Settings:
         "photos",
         "What is taken of a Bayer sensor: its green lattice, luminance, or the mosaic.",
         choices=("green", "luminance", "mosaic"),
+    )
+    planes: str = _setting(
+        "luminance",
+        "photos",
+        "What is learned on: luminance, or the colours of the pixels together.",
+        choices=("luminance", "colour"),
     )
     mixed_depths: bool = _setting(False, "photos", "Allow frames of several depths in one folder.")
     max_bad: float = _setting(
@@ -169,6 +178,11 @@ class Settings:
             _validate(f, getattr(self, f.name))
         if self.name is not None and not (self.name.isascii() and self.name.isidentifier()):
             raise UsageError(f"--name {self.name!r} is not a C identifier")
+        if self.planes == "colour" and self.bayer != "green":
+            raise UsageError(
+                "--planes colour keeps all of a Bayer sensor's pixels",
+                remedy="leave out --bayer",
+            )
         if self.white is not None and self.white <= (self.black or 0):
             raise UsageError("--white must exceed --black")
 

@@ -34,7 +34,7 @@ class InputContract:
 
     Parameters
     ----------
-    pixels : PFNC name (Mono8, Mono10, Mono12, Mono16) or float32
+    pixels : PFNC name (Mono8 to Mono16; RGB8, BGR8 and BayerRG8 to 16 for colour) or float32
     black, white : codes of no light and of full scale
     transfer : "linear" or "srgb", how codes follow light
     plane : "" for a monochrome picture; of a Bayer sensor its pattern and the plane that is taken:
@@ -71,12 +71,13 @@ class InputContract:
 
 @dataclass(frozen=True, eq=False)
 class Frame:
-    """One monochrome picture as its camera's codes.
+    """One picture as its camera's codes.
 
     Parameters
     ----------
     path : relative path with forward slashes ("#k" appended for page k of several)
-    pixels : ndarray (h, w) of the contract's dtype
+    pixels : ndarray (h, w) of the contract's dtype; (h, w, 3) for interleaved colour, and
+        (2 h, 2 w) for a Bayer sensor whose pixels are its cells
     contract : InputContract
     invalid : bool ndarray (h, w), True where a pixel must not be used, or None
     sha256 : of the file's bytes
@@ -91,13 +92,20 @@ class Frame:
     notes: tuple[str, ...] = ()
 
     def __post_init__(self) -> None:
-        _check(self.pixels.ndim == 2, "a frame is one plane")
+        form = self.contract.format
+        _check(self.pixels.ndim == (3 if form.interleaved else 2), "a frame is one picture")
+        _check(self.pixels.shape == form.stored(self.shape), "a frame holds whole pixels")
         _check(
             self.pixels.dtype == np.dtype(self.contract.format.dtype),
             f"{self.contract.pixels} pixels must be {self.contract.format.dtype}",
         )
         if self.invalid is not None:
-            _check(self.invalid.shape == self.pixels.shape, "mask and pixels differ in shape")
+            _check(self.invalid.shape == self.shape, "mask and pixels differ in shape")
+
+    @property
+    def shape(self) -> tuple[int, int]:
+        """Height and width, pixels."""
+        return self.contract.format.size_of(self.pixels)
 
 
 @dataclass(frozen=True)
@@ -262,6 +270,8 @@ class Survey:
     ``distrusted`` lists (path, reason) of frames better left out of learning.
     ``slanted_edge`` is the chart's transfer when one was given, and then where the blur is from.
     ``notes`` say what static, dark or chart frames changed, or why they could not serve.
+    Of colour frames one plane was surveyed (green), and ``sample_noise`` (samples,) holds the
+    standard deviation of the noise in the working values of each sample; empty where unknown.
     """
 
     contract: InputContract
@@ -282,6 +292,7 @@ class Survey:
     edge_widths_px: F64 = field(default_factory=lambda: np.empty(0))
     slanted_edge: SlantedEdge | None = None
     notes: tuple[str, ...] = ()
+    sample_noise: F64 = field(default_factory=lambda: np.empty(0))
 
 
 # ---------------------------------------------------------------- learning
@@ -295,11 +306,13 @@ class PatchSet:
 
     Parameters
     ----------
-    patches : float32 ndarray (n, size * size), row-major pixels
+    patches : float32 ndarray (n, size * size), row-major pixels; of colour pixels
+        (n, size * size * samples), see :func:`patchlab.conventions.tile_shape`
     size : patch side, pixels
     frame : int32 ndarray (n,), index into ``frames``
     origin : int32 ndarray (n, 2), top-left (row, column)
-    dc, contrast : float32 ndarray (n,), mean and what the patch was divided by
+    dc : float32 ndarray (n,), mean; of colour pixels (n, samples), the mean of each plane
+    contrast : float32 ndarray (n,), what the patch was divided by
     frames : relative paths
     rejected : count by reason
     """
@@ -315,9 +328,16 @@ class PatchSet:
 
     def __post_init__(self) -> None:
         n = self.patches.shape[0]
-        _check(self.patches.shape == (n, self.size**2), "patches must be (n, size * size)")
+        planes = 1 if self.dc.ndim == 1 else self.dc.shape[1]
+        wide = planes * self.size**2
+        _check(self.patches.shape == (n, wide), "patches must be (n, size * size * samples)")
         _check(self.origin.shape == (n, 2) and self.frame.shape == (n,), "one origin a patch")
-        _check(self.dc.shape == (n,) and self.contrast.shape == (n,), "one mean a patch")
+        _check(len(self.dc) == n and self.contrast.shape == (n,), "one mean a patch")
+
+    @property
+    def planes(self) -> int:
+        """Samples of a pixel: 1, or more for colour."""
+        return int(self.patches.shape[1]) // self.size**2
 
     def __len__(self) -> int:
         return int(self.patches.shape[0])
@@ -337,6 +357,7 @@ class Whitening:
         on the kept directions)
     removed : what was cut and why, one line each
     samples : patches the moments were summed over
+    planes : samples of a pixel; the mean of each plane of a patch was projected out
     """
 
     K: F64
@@ -347,6 +368,7 @@ class Whitening:
     form: Literal["pca", "zca"]
     removed: tuple[str, ...]
     samples: int
+    planes: int = 1
 
 
 @dataclass(frozen=True, eq=False)
@@ -382,14 +404,14 @@ class Dictionary:
     Parameters
     ----------
     method : "ica", "sparse" or "pca"
-    filters, atoms : ndarray (k, size, size)
+    filters, atoms : ndarray (k, size, size), of colour patches (k, size, size, samples)
     contribution : ndarray (k,), share of the patches' variance that each component carries
     kurtosis : ndarray (k,), of the coefficients (3 for a Gaussian)
     identified : bool ndarray (k,), False where the data cannot tell a component from its neighbours
     converged, iterations, tolerance, curve : how the learner ended; ``curve`` falls with iterations
     log_likelihood : held-out nats per patch, or None
     whitening : Whitening it was learned through
-    pooled_atoms : ndarray (m, size, size), unit norm, atoms of every restart (this one's first)
+    pooled_atoms : ndarray (m, *one atom's), unit norm, atoms of every restart (this one's first)
     warnings : sentences for people
     over_restarts, over_resamples : ndarray (k,), mean |cos| with the partner that a component
         has in the other restarts, and in itself learned anew on halves of the patches; empty
@@ -423,7 +445,7 @@ class Dictionary:
 
     def __post_init__(self) -> None:
         k = self.atoms.shape[0]
-        _check(self.atoms.ndim == 3 and self.filters.shape == self.atoms.shape, "(k, size, size)")
+        _check(self.atoms.ndim in (3, 4) and self.filters.shape == self.atoms.shape, "tiles")
         for name in ("contribution", "kurtosis", "identified"):
             _check(getattr(self, name).shape == (k,), f"{name} needs one entry a component")
 
@@ -434,6 +456,11 @@ class Dictionary:
     def size(self) -> int:
         """Patch side, pixels."""
         return int(self.atoms.shape[1])
+
+    @property
+    def planes(self) -> int:
+        """Samples of a pixel: 1, or more for colour."""
+        return int(self.atoms.shape[3]) if self.atoms.ndim == 4 else 1
 
 
 @dataclass(frozen=True, eq=False)
@@ -495,6 +522,11 @@ class KernelFit:
 
     ``octaves`` and ``orientation_rad`` are half-amplitude bandwidths measured on the
     spectrum; ``octaves`` is None where the low-pass side is open.
+
+    Of a colour component ``parameters`` describe its spatial profile, ``direction`` is the unit
+    vector over a pixel's samples that goes with it, ``colour_share`` the share of the component's
+    energy that this product of a direction and a profile holds, and ``r2`` is that of the whole
+    component.
     """
 
     index: int
@@ -506,16 +538,22 @@ class KernelFit:
     verdict: Literal["good", "poor", "failed"]
     octaves: float | None
     orientation_rad: float | None
+    direction: tuple[float, ...] | None = None
+    colour_share: float | None = None
 
 
 @dataclass(frozen=True)
 class KernelFits:
-    """Fits of all components, in the dictionary's order; ``of`` says atoms or filters."""
+    """Fits of all components, in the dictionary's order; ``of`` says atoms or filters.
+
+    ``colours`` has a letter for each sample of a pixel, "" for one plane.
+    """
 
     of: Literal["atoms", "filters"]
     size: int
     fits: tuple[KernelFit, ...]
     effective_samples: float
+    colours: str = ""
 
     def __len__(self) -> int:
         return len(self.fits)
@@ -599,7 +637,8 @@ class Bank:
     ----------
     name : C identifier, prefix of every exported symbol
     kernels : tuple of Kernel
-    taps : float32 ndarray (n, h, h), h odd, anchored at the centre; used by every target
+    taps : float32 ndarray (n, h, h), h odd, anchored at the centre; used by every target. Of
+        colour pixels (n, h, h, planes), over the working planes: a response is the sum over them
     table : InputTable, the first step; holds the input contract
     border : one of the five names
     strength : "step", "line" or "energy", what NAME_edges computes
@@ -608,6 +647,8 @@ class Bank:
     line_thresholds : for lines, where the bank has even kernels beside its odd ones
     noise_autocovariance : of the working values, centre 1; None means white
     provenance : plain data for the manifest (settings, seed, inputs, parents)
+    mix : float32 ndarray (planes, samples), the working planes as weighted sums of a pixel's
+        tabled samples; None: the working planes are the samples
     """
 
     name: str
@@ -623,9 +664,18 @@ class Bank:
     provenance: Mapping[str, Any] = field(default_factory=dict)
     warnings: tuple[str, ...] = ()
     line_thresholds: Thresholds | None = None
+    mix: F32 | None = None
 
     def __post_init__(self) -> None:
-        n, h, w = self.taps.shape
+        n, h, w = self.taps.shape[:3]
+        samples = self.contract.format.planes
+        _check(self.taps.ndim == 3 + (samples > 1), "colour kernels have a tap for each plane")
+        if self.mix is not None:
+            _check(self.mix.dtype == np.float32 and samples > 1, "a mix is float32, of colours")
+            _check(bool(np.isfinite(self.mix).all()), "a mix is finite")
+            _check(self.mix.shape == (self.planes, samples), "a mix is (planes, samples)")
+        else:
+            _check(self.planes == samples, "one tap for each sample")
         _check(n == len(self.kernels) and n > 0, "one kernel for each plane of taps")
         _check(h == w and h % 2 == 1, "kernels are square and odd")
         _check(self.taps.dtype == np.float32, "taps are float32")
@@ -645,6 +695,24 @@ class Bank:
     def size(self) -> int:
         """Kernel side, pixels."""
         return int(self.taps.shape[1])
+
+    @property
+    def planes(self) -> int:
+        """Working planes: 1, or more for colour."""
+        return int(self.taps.shape[3]) if self.taps.ndim == 4 else 1
+
+    @property
+    def plane_reach(self) -> F64:
+        """Largest value of every working plane where all tabled samples stay within 1."""
+        if self.mix is None:
+            return np.ones(self.planes)
+        return np.asarray(np.abs(self.mix.astype(np.float64)).sum(axis=1))
+
+    @property
+    def reach(self) -> F64:
+        """Largest response of every kernel where all tabled samples stay within 1, (n,)."""
+        sums = np.abs(self.taps.astype(np.float64)).sum(axis=(1, 2))
+        return np.asarray(sums if self.planes == 1 else sums @ self.plane_reach)
 
     @property
     def radius(self) -> int:

@@ -2,6 +2,7 @@
 
 from patchlab.bank.apply import responses, strength
 from patchlab.bank.choose import BankSettings, choose_bank, compare_banks
+from patchlab.bank.colour import colour_bank, colour_bank_as_learned
 from patchlab.bank.disk import bank_files, read_bank, write_bank
 from patchlab.bank.given import bank_as_learned, bank_from_taps
 from patchlab.bank.native import NativeBank, load_native
@@ -16,6 +17,8 @@ __all__ = [
     "bank_files",
     "bank_from_taps",
     "choose_bank",
+    "colour_bank",
+    "colour_bank_as_learned",
     "compare_banks",
     "describe",
     "exact_responses",

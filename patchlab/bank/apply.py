@@ -15,6 +15,7 @@ import numpy as np
 from numpy.typing import NDArray
 
 from patchlab.bank.plan import make_plan
+from patchlab.bank.planes import mixed
 from patchlab.bank.reference import check_picture
 from patchlab.conventions import border_index
 from patchlab.errors import UsageError
@@ -44,7 +45,8 @@ def responses(bank: Bank, pixels: NDArray[Any], plan: Plan | None = None) -> F32
     """
     check_picture(bank, pixels)
     plan = plan or make_plan(bank)
-    out = np.empty((len(bank), *pixels.shape), dtype=np.float32)
+    size = bank.contract.format.size_of(pixels)
+    out = np.empty((len(bank), *size), dtype=np.float32)
     every = range(len(bank))
     for rows, planes in _bands(bank, plan, pixels, every):
         for index in every:
@@ -80,8 +82,8 @@ def strength(
     if not 0 <= scale < len(scales):
         raise UsageError(f"scale {scale} is not in this bank, which has {len(scales)}")
     members = scales[scale]
-    out = np.empty(pixels.shape, dtype=np.float32)
-    turns = np.empty(pixels.shape, dtype=np.uint8)
+    out = np.empty(bank.contract.format.size_of(pixels), dtype=np.float32)
+    turns = np.empty(out.shape, dtype=np.uint8)
     needed = [i for _, even, odd in members for i in (even, odd) if i is not None]
     for rows, planes in _bands(bank, plan, pixels, needed):
         best, winner = out[rows], turns[rows]
@@ -107,19 +109,20 @@ def _bands(
     bank: Bank, plan: Plan, pixels: NDArray[Any], needed: Any
 ) -> Iterator[tuple[slice, Callable[[int], F32]]]:
     """Bands of rows, each with a function from kernel index to its (rows, w) response."""
-    h, w = pixels.shape
+    samples = bank.contract.format.split(pixels)
+    h, w = samples.shape[:2]
     wanted = {p for index in needed for p, _ in plan.detail["sums"][index]}
     groups = [g for g in plan.detail["product_groups"] if wanted.intersection(g)]
     step = max(1, BAND_PIXELS // w)
     for top in range(0, h, step):
         count = min(step, h - top)
-        padded = _working_rows(bank, pixels, top, count)
+        padded = _working_rows(bank, samples, top, count)
         products: dict[int, F32] = {}
-        folds: dict[tuple[str, int], F32] = {}
+        folds: list[dict[tuple[str, int], F32]] = [{} for _ in padded]
         for group in groups:
-            basis = plan.detail["bases"][group[0]]
+            basis, plane = plan.detail["bases"][group[0]], plan.detail["planes"][group[0]]
             taps = np.stack([plan.detail["coefficients"][p] for p in group])
-            sums = _products(padded, basis, taps, bank.radius, folds)
+            sums = _products(padded[plane], basis, taps, bank.radius, folds[plane])
             products.update(zip(group, sums, strict=True))
         joined = partial(_joined, plan, products, (count, w))
         yield slice(top, top + count), joined
@@ -137,13 +140,20 @@ def _joined(plan: Plan, products: dict[int, F32], shape: tuple[int, int], kernel
     return total
 
 
-def _working_rows(bank: Bank, pixels: NDArray[Any], top: int, count: int) -> F32:
-    """Working values of some rows with their halo, (count + 2c, w + 2c)."""
-    h, w = pixels.shape
-    c = bank.radius
-    rows = border_index(bank.border, np.arange(top - c, top + count + c), h)
-    out = np.empty((count + 2 * c, w + 2 * c), dtype=np.float32)
-    out[:, c : c + w] = bank.table.apply(pixels[np.maximum(rows, 0)])
+def _working_rows(bank: Bank, samples: NDArray[Any], top: int, count: int) -> list[F32]:
+    """Working values of some rows (h, w, samples) with their halo, (count + 2c, w + 2c) each."""
+    rows = border_index(
+        bank.border, np.arange(top - bank.radius, top + count + bank.radius), samples.shape[0]
+    )
+    tabled = bank.table.apply(samples[np.maximum(rows, 0)])
+    return [_haloed(bank, plane, rows) for plane in mixed(bank, tabled)]
+
+
+def _haloed(bank: Bank, plane: F32, rows: NDArray[np.int64]) -> F32:
+    """Rows of one working plane with their columns outside the picture."""
+    c, w = bank.radius, plane.shape[1]
+    out = np.empty((len(rows), w + 2 * c), dtype=np.float32)
+    out[:, c : c + w] = plane
     out[rows < 0] = 0
     rim = np.concatenate([np.arange(-c, 0), np.arange(w, w + c)])
     source = border_index(bank.border, rim, w)

@@ -44,7 +44,13 @@ from patchlab.types import (
 
 MANIFEST = "bank.json"
 TAPS, TABLE, NOISE = "kernels.npy", "input_table.npy", "autocovariance.npy"
+MIX = "mix.npy"
 OPERATION = "correlation: r(y, x) = sum k(j, i) p(y + j - c, x + i - c), p the working values"
+
+COLOUR_OPERATION = (
+    "correlation: r(y, x) = sum k(j, i, m) p_m(y + j - c, x + i - c), p_m the working planes: "
+    "sum over samples of mix(m, s) table(s), or the tabled samples where there is no mix"
+)
 
 
 def check_names(bank: Bank) -> None:
@@ -86,8 +92,10 @@ def bank_files(
         files[TABLE] = npy_bytes(bank.table.values)
     if bank.noise_autocovariance is not None:
         files[NOISE] = npy_bytes(bank.noise_autocovariance)
+    if bank.mix is not None:
+        files[MIX] = npy_bytes(bank.mix)
     for name, data in (extra or {}).items():
-        if name in (MANIFEST, TAPS, TABLE, NOISE):
+        if name in (MANIFEST, TAPS, TABLE, NOISE, MIX):
             raise UsageError(f"{name} is the bank's own file", where=bank.name)
         files[name] = data
     return files, _body(bank, plan)
@@ -99,7 +107,7 @@ def _body(bank: Bank, plan: Plan) -> dict[str, Any]:
         "purpose": bank.purpose,
         "strength": bank.strength,
         "border": bank.border,
-        "operation": OPERATION,
+        "operation": OPERATION if bank.planes == 1 else COLOUR_OPERATION,
         "kernel_size": bank.size,
         "kernels": [_kernel_entry(k) for k in bank.kernels],
         "input": _input_entry(bank.table),
@@ -107,6 +115,7 @@ def _body(bank: Bank, plan: Plan) -> dict[str, Any]:
         "line_thresholds": _thresholds_entry(bank.line_thresholds),
         "coverage": _coverage_entry(bank.coverage),
         "noise_autocovariance": None if bank.noise_autocovariance is None else NOISE,
+        **({} if bank.mix is None else {"mix": MIX}),
         "plan": {
             "kind": plan.kind,
             "asked": plan.detail["asked"],
@@ -168,6 +177,11 @@ def _input_entry(table: InputTable) -> dict[str, Any]:
             # JSON has no infinity: null is "no limit"
             "valid_codes": [float(v) if math.isfinite(v) else None for v in table.valid_codes],
         },
+        **(
+            {"samples": about.format.colours, "cell": about.format.cell}
+            if about.format.planes > 1
+            else {}
+        ),
     }
 
 
@@ -312,8 +326,10 @@ def _one_of(value: Any, known: Any, what: str) -> Any:
 
 def _bank(folder: Path, head: Mapping[str, Any]) -> Bank:
     taps = _array(folder, head, TAPS)
-    if taps.ndim != 3 or taps.dtype != np.float32:
-        raise InputError("kernels must be float32 (n, h, h)", where=str(folder / TAPS))
+    if taps.ndim not in (3, 4) or taps.dtype != np.float32:
+        raise InputError(
+            "kernels must be float32 (n, h, h), or (n, h, h, planes)", where=str(folder / TAPS)
+        )
     noise = head["noise_autocovariance"]
     return Bank(
         name=str(head["name"]),
@@ -329,6 +345,7 @@ def _bank(folder: Path, head: Mapping[str, Any]) -> Bank:
         noise_autocovariance=None if noise is None else _autocovariance(folder, head),
         provenance=dict(head["provenance"]),
         warnings=tuple(str(w) for w in head["warnings"]),
+        mix=_array(folder, head, MIX) if head.get("mix") else None,
     )
 
 

@@ -152,21 +152,22 @@ def _check_border(border: str) -> None:
         raise UsageError(f"unknown border {border!r}", remedy=f"choose one of {', '.join(BORDERS)}")
 
 
-def _check_shape(taps: np.ndarray[Any, Any], where: str) -> None:
+def _check_shape(taps: np.ndarray[Any, Any], where: str, planes: int) -> None:
     """Refuse what cannot be a stack of kernels."""
     if taps.dtype.kind not in "buif":
         raise InputError(
             f"taps of type {taps.dtype} are not real numbers", where=where,
             remedy="give an array of integers or floats",
         )  # fmt: skip
-    if taps.ndim != 3:
+    if taps.ndim != (3 if planes == 1 else 4) or (planes > 1 and taps.shape[3] != planes):
+        last = "" if planes == 1 else f", {planes}"
         raise InputError(
             f"taps of shape {taps.shape} are not kernels", where=where,
-            remedy="give one kernel (h, h) or several (n, h, h)",
+            remedy=f"give one kernel (h, h{last}) or several (n, h, h{last})",
         )  # fmt: skip
     if taps.size == 0:
         raise InputError("there are no taps in it", where=where)
-    n, h, w = taps.shape
+    n, h, w = taps.shape[:3]
     if h != w:
         raise InputError(
             f"kernels of {h} x {w} are not square", where=where,
@@ -191,7 +192,7 @@ def _as_float32(taps: np.ndarray[Any, Any], where: str) -> F32:
         out = np.asarray(taps, dtype=np.float32)
     if not bool(np.isfinite(out).all()):
         raise InputError("a tap is too large for float32", where=where)
-    empty = np.flatnonzero(~out.any(axis=(1, 2)))
+    empty = np.flatnonzero(~out.reshape(len(out), -1).any(axis=1))
     if len(empty):
         raise InputError(f"kernel {int(empty[0])} is zero everywhere", where=where)
     return np.ascontiguousarray(out)
@@ -222,8 +223,10 @@ def bank_from_taps(
 
     Parameters
     ----------
-    taps : array (n, h, h) or (h, h) of integers or floats, h odd, at most 63
-    pixels : Mono8, Mono10, Mono12, Mono16 or float32
+    taps : array (n, h, h) or (h, h) of integers or floats, h odd, at most 63; for colour pixels
+        (n, h, h, samples) or (h, h, samples), in the order of the samples
+    pixels : Mono8, Mono10, Mono12, Mono16 or float32; RGB8, BGR8 to 16, or BayerRG8 to 16, whose
+        four samples are those of a 2 x 2 cell, row by row
     name : C identifier
     border : one of the five names
     black, white : codes of no light and of full scale, for the contract; full scale by default
@@ -256,8 +259,8 @@ def bank_from_taps(
         array = np.asarray(taps)
     except ValueError:
         raise InputError("kernels of one bank must have one size", where=where) from None
-    array = array[None] if array.ndim == 2 else array
-    _check_shape(array, where)
+    array = array[None] if array.ndim == 2 + (form.planes > 1) else array
+    _check_shape(array, where, form.planes)
     planes = _as_float32(array, where)
     nothing: list[Mapping[str, float]] = [{} for _ in planes]
     return Bank(

@@ -139,14 +139,15 @@ class NativeBank:
         UsageError : a wrong band, ``out`` or number of threads.
         """
         pixels, (first, count) = self._picture(pixels, rows)
-        planes = _output(out, (len(self.bank), count, pixels.shape[1]), np.float32)
+        width = self.bank.contract.format.size_of(pixels)[1]
+        planes = _output(out, (len(self.bank), count, width), np.float32)
 
         def band(start: int, height: int) -> int:
             part = planes[:, start - first :]
             scratch = self._memory(pixels)  # a name of its own: it must outlive the call
             return int(
                 self._responses(
-                    *_address(pixels), start, height,
+                    *self._address(pixels), start, height,
                     part.ctypes.data, planes.strides[1], planes.strides[0], scratch.ctypes.data,
                 )
             )  # fmt: skip
@@ -217,7 +218,7 @@ class NativeBank:
             scratch = self._memory(pixels)
             found = ctypes.c_uint64(0)
             code = self._responses_q(
-                *_address(pixels), start, height, part.ctypes.data, planes.strides[1],
+                *self._address(pixels), start, height, part.ctypes.data, planes.strides[1],
                 planes.strides[0], ctypes.addressof(found), scratch.ctypes.data,
             )  # fmt: skip
             ends.append(int(found.value))
@@ -248,7 +249,8 @@ class NativeBank:
     def _strongest(
         self, call: Any, pixels: NDArray[Any], first: int, count: int, scale: int, threads: int
     ) -> tuple[F32, NDArray[np.uint8]]:
-        strength = np.empty((count, pixels.shape[1]), dtype=np.float32)
+        width = self.bank.contract.format.size_of(pixels)[1]
+        strength = np.empty((count, width), dtype=np.float32)
         turn = np.empty(strength.shape, dtype=np.uint8)
 
         def band(start: int, height: int) -> int:
@@ -256,8 +258,9 @@ class NativeBank:
             scratch = self._memory(pixels)
             return int(
                 call(
-                    *_address(pixels), start, height, scale, to.ctypes.data, strength.strides[0],
-                    who.ctypes.data, turn.strides[0], scratch.ctypes.data,
+                    *self._address(pixels), start, height, scale,
+                    to.ctypes.data, strength.strides[0], who.ctypes.data, turn.strides[0],
+                    scratch.ctypes.data,
                 )
             )  # fmt: skip
 
@@ -316,7 +319,7 @@ class NativeBank:
         while True:
             out = np.empty(capacity, _EDGEL)
             code = self._edgels(
-                *_address(pixels), threshold, line_threshold, out.ctypes.data, capacity,
+                *self._address(pixels), threshold, line_threshold, out.ctypes.data, capacity,
                 ctypes.addressof(count), scratch.ctypes.data,
             )  # fmt: skip
             if count.value <= capacity:
@@ -328,23 +331,30 @@ class NativeBank:
     def _need_fixed(self) -> None:
         if self._fixed is None:
             raise UsageError(
-                "fixed point needs integer pixels of at most 12 bits", where=self.bank.name
+                "fixed point needs integer pixels of one plane and at most 12 bits",
+                where=self.bank.name,
             )
 
     def _picture(
         self, pixels: NDArray[Any], rows: tuple[int, int] | None
     ) -> tuple[NDArray[Any], tuple[int, int]]:
         check_picture(self.bank, pixels)
-        if pixels.strides[1] != pixels.itemsize or abs(pixels.strides[0]) < pixels.shape[1]:
+        inside = pixels[0].nbytes
+        if not pixels[0].flags.c_contiguous or abs(pixels.strides[0]) < inside:
             pixels = np.ascontiguousarray(pixels)
-        return pixels, rows or (0, pixels.shape[0])
+        return pixels, rows or (0, self.bank.contract.format.size_of(pixels)[0])
 
     def scratch_bytes(self, width: int, height: int) -> int:
         """Bytes of working memory that a call on a picture of this size takes."""
         return int(self._scratch(width, height))
 
     def _memory(self, pixels: NDArray[Any]) -> NDArray[np.uint8]:
-        return np.empty(self._scratch(pixels.shape[1], pixels.shape[0]), dtype=np.uint8)
+        height, width = self.bank.contract.format.size_of(pixels)
+        return np.empty(self._scratch(width, height), dtype=np.uint8)
+
+    def _address(self, pixels: NDArray[Any]) -> tuple[int, int, int, int]:
+        height, width = self.bank.contract.format.size_of(pixels)
+        return pixels.ctypes.data, pixels.strides[0], width, height
 
     def _check(self, code: int) -> None:
         if code:
@@ -359,10 +369,6 @@ def as_edgels(found: NDArray[np.void]) -> NDArray[np.void]:
     for name in EDGEL.names or ():
         out[name] = found[name]
     return out
-
-
-def _address(pixels: NDArray[Any]) -> tuple[int, int, int, int]:
-    return pixels.ctypes.data, pixels.strides[0], pixels.shape[1], pixels.shape[0]
 
 
 def _output(out: NDArray[Any] | None, shape: tuple[int, ...], dtype: Any) -> NDArray[Any]:

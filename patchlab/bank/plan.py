@@ -30,6 +30,7 @@ import numpy as np
 
 from patchlab.bank.fixed import fixed_point
 from patchlab.bank.products import (
+    Part,
     Product,
     Sum,
     clusters,
@@ -106,7 +107,21 @@ def strength_members(bank: Bank, scale: int) -> tuple[tuple[int, int | None, int
 # ---------------------------------------------------------------- planning
 
 
-def _worth_splitting(split: Mapping[int, Mapping[str, F64]], exact: F64) -> set[int]:
+def _split(exact: F64) -> tuple[dict[int, dict[Part, F64]], dict[int, dict[Part, F64]]]:
+    """Every kernel (h, h) or (h, h, planes) by its parity parts, and as it is, plane by plane."""
+    parity: dict[int, dict[Part, F64]] = {}
+    direct: dict[int, dict[Part, F64]] = {}
+    for index, kernel in enumerate(exact):
+        planes = [kernel] if kernel.ndim == 2 else list(np.moveaxis(kernel, -1, 0))
+        own = [(m, part) for m, taps in enumerate(planes) for part in parity_parts(taps).items()]
+        parity[index] = {(m, basis): part for m, (basis, part) in own}
+        direct[index] = {(m, "all"): taps for m, taps in enumerate(planes)}
+    return parity, direct
+
+
+def _worth_splitting(
+    split: Mapping[int, Mapping[Part, F64]], whole: Mapping[int, Mapping[Part, F64]]
+) -> set[int]:
     """Kernels for which the parity split saves more than its additions cost."""
     products, sums = share(split)
     chosen: set[int] = set()
@@ -115,21 +130,21 @@ def _worth_splitting(split: Mapping[int, Mapping[str, F64]], exact: F64) -> set[
         coefficients = sum(products[p].exact.size for p in used)
         # a basis value takes one addition for every group of products that reads it
         parity = 2 * coefficients + coefficients // GROUP + sum(len(sums[i]) for i in cluster)
-        direct, _ = share({index: {"all": exact[index]} for index in cluster})
+        direct, _ = share({index: whole[index] for index in cluster})
         if parity < sum(2 * p.exact.size for p in direct):
             chosen.update(cluster)
     return chosen
 
 
 def _group(products: list[Product], sums: Mapping[int, Sum], bank: Bank) -> list[list[int]]:
-    """Products of one basis, shape and use (scale and parity), at most GROUP together."""
+    """Products of one plane, basis, shape and use (scale and parity), at most GROUP together."""
     use: dict[int, tuple[Any, ...]] = {}
     for index, terms in sums.items():
         kernel = bank.kernels[index]
         scale = -1 if kernel.scale is None else kernel.scale
         for product, _ in terms:
             p = products[product]
-            use.setdefault(product, (scale, kernel.parity, p.basis, p.exact.shape))
+            use.setdefault(product, (scale, kernel.parity, p.plane, p.basis, p.exact.shape))
     groups: list[list[int]] = []
     for key in sorted(set(use.values())):
         same = [p for p in sorted(use) if use[p] == key]
@@ -138,27 +153,30 @@ def _group(products: list[Product], sums: Mapping[int, Sum], bank: Bank) -> list
     return groups
 
 
-def _bounds(products: list[Product], sums: Mapping[int, Sum], span: float) -> tuple[float, ...]:
+def _bounds(
+    products: list[Product], sums: Mapping[int, Sum], spans: tuple[float, ...], mixing: int
+) -> tuple[float, ...]:
     """Largest |float32 response - exact response| for every kernel; see :func:`make_plan`."""
     bounds = []
     for index in sorted(sums):
-        total = 0.0
+        totals = [0.0] * len(spans)
         for number, _ in sums[index]:
             p = products[number]
             uses = uses_of(p.basis, (p.exact.shape[0], p.exact.shape[1]))
             folds = 0 if p.basis == "all" else 2
-            roundings = p.exact.size + folds + len(sums[index]) - 1
-            total += gamma(roundings) * float((np.abs(p.rounded).astype(np.float64) * uses).sum())
-            total += float((np.abs(p.rounded - p.exact) * uses).sum())
-        bounds.append(total * span)
+            roundings = p.exact.size + folds + len(sums[index]) - 1 + mixing
+            size = float((np.abs(p.rounded).astype(np.float64) * uses).sum())
+            totals[p.plane] += gamma(roundings) * size
+            totals[p.plane] += float((np.abs(p.rounded - p.exact) * uses).sum())
+        bounds.append(sum(total * span for total, span in zip(totals, spans, strict=True)))
     return tuple(bounds)
 
 
 def _additions(products: list[Product], groups: list[list[int]], sums: Mapping[int, Sum]) -> int:
     """Additions for each pixel: folding rows and columns, summing products, joining them."""
     used = [products[p] for group in groups for p in group]
-    fold_rows = {(p.basis[0], p.exact.shape[0] - (p.basis[0] == "e")) for p in used}
-    total = sum(count for kind, count in fold_rows if kind != "a")
+    fold_rows = {(p.plane, p.basis[0], p.exact.shape[0] - (p.basis[0] == "e")) for p in used}
+    total = sum(count for _, kind, count in fold_rows if kind != "a")
     for group in groups:
         first = products[group[0]]
         rows, cols = first.exact.shape
@@ -177,12 +195,16 @@ def _interface_number(bank: Bank) -> int:
     about += f"\0{table.kind}\0{table.slope!r}\0{table.offset!r}\0{table.scale!r}"
     h.update(about.encode())
     h.update(np.ascontiguousarray(bank.taps, "<f4").tobytes())
+    if bank.mix is not None:
+        h.update(np.ascontiguousarray(bank.mix, "<f4").tobytes())
     if table.values is not None:
         h.update(np.ascontiguousarray(table.values, "<f4").tobytes())
     return int(h.hexdigest()[:7], 16)
 
 
-def _lines(products: list[Product], groups: list[list[int]]) -> tuple[str, ...]:
+def _lines(
+    products: list[Product], groups: list[list[int]], coloured: bool = False
+) -> tuple[str, ...]:
     words = {
         "all": "taps as they are",
         "ee": "even in y, even in x",
@@ -193,6 +215,8 @@ def _lines(products: list[Product], groups: list[list[int]]) -> tuple[str, ...]:
     return tuple(
         f"{len(group)} x {products[group[0]].exact.shape[0]} x "
         f"{products[group[0]].exact.shape[1]} coefficients, {words[products[group[0]].basis]}"
+        + f", working plane {products[group[0]].plane + 1}"
+        * coloured
         for group in groups
     )
 
@@ -206,7 +230,16 @@ def _name(products: list[Product], sums: Mapping[int, Sum], tiles: TileFFT | Non
     return f"{rows} and tile FFT" if used else "tile FFT"
 
 
+def _mixing(bank: Bank) -> tuple[int, int]:
+    """Multiplies and additions a pixel that make the working planes."""
+    if bank.mix is None:
+        return 0, 0
+    planes, samples = bank.mix.shape
+    return planes * samples, planes * (samples - 1)
+
+
 def _counted(
+    bank: Bank,
     products: list[Product],
     groups: list[list[int]],
     sums: Mapping[int, Sum],
@@ -214,8 +247,10 @@ def _counted(
 ) -> tuple[tuple[str, ...], float, float]:
     """What is computed, in words, and its multiplies and additions a pixel."""
     if tiles is None:
-        multiplies = float(sum(p.exact.size for p in products))
-        return _lines(products, groups), multiplies, float(_additions(products, groups, sums))
+        mixing = _mixing(bank)
+        work = float(sum(p.exact.size for p in products) + mixing[0])
+        summed = float(_additions(products, groups, sums) + mixing[1])
+        return _lines(products, groups, bank.planes > 1), work, summed
     rest = {k: terms for k, terms in sums.items() if k not in tiles.kernels}
     used = {p for terms in rest.values() for p, _ in terms}
     kept = [[p for p in group if p in used] for group in groups]
@@ -239,6 +274,8 @@ def _by_tiles(
     cluster goes when that saves operations. With float pixels none goes unasked: a pixel that is
     not a number, or far beyond the contract, would spoil its whole block.
     """
+    if bank.planes > 1:
+        return ()
     fused = {k for s in range(len(bank.scales)) for _, *pair in strength_members(bank, s)
              for k in pair if k is not None}  # fmt: skip
     free = {k: terms for k, terms in sums.items() if k not in fused and terms}
@@ -264,14 +301,16 @@ def make_plan(bank: Bank, kind: str = "auto") -> Plan:
 
     Returns
     -------
-    Plan : its ``detail`` holds ``bases`` (one a product), ``coefficients`` (float32 arrays, one a
-        product), ``sums`` (one a kernel), ``product_groups``, ``strength`` (one entry a scale, as
-        :func:`strength_members`), ``fft`` (kernels by tile transforms, or None), ``fixed`` (the
-        bank in 16-bit fixed point, or None), ``abi`` (the interface's number), ``asked`` (the kind)
+    Plan : its ``detail`` holds ``bases`` and ``planes`` (one a product; the working plane),
+        ``coefficients`` (float32 arrays, one a product), ``sums`` (one a kernel),
+        ``product_groups``, ``strength`` (one entry a scale, as :func:`strength_members`), ``fft``
+        (kernels by tile transforms, or None), ``fixed`` (the bank in 16-bit fixed point, or
+        None), ``abi`` (the interface's number), ``asked`` (the kind)
 
     Raises
     ------
-    UsageError : an unknown kind, or a scale that lacks the kernels its strength is made of.
+    UsageError : an unknown kind, tile transforms of colours, or a scale that lacks the kernels its
+        strength is made of.
 
     Notes
     -----
@@ -281,29 +320,34 @@ def make_plan(bank: Bank, kind: str = "auto") -> Plan:
     many pixels a basis value is made of, and X the largest absolute working value of the input
     contract. It holds for every order of summation, with fused multiply-adds or without (Higham
     2002, section 3.1), barring underflow. For float32 pixels X is the contract's largest level:
-    the bound scales with the working values if larger ones are given. A kernel by tile transforms
-    has the larger of this bound and :func:`patchlab.bank.tile_fft.bound`; the products stand by
-    for engines that take them instead, and for fixed point.
+    the bound scales with the working values if larger ones are given. Of a colour bank X is that
+    of the product's working plane, whose mixing from C samples counts C roundings more. A kernel by
+    tile transforms has the larger of this bound and :func:`patchlab.bank.tile_fft.bound`; the
+    products stand by for engines that take them instead, and for fixed point.
     """
     if kind not in KINDS:
         raise UsageError(f"unknown plan {kind!r}", remedy=f"choose one of {', '.join(KINDS)}")
+    if kind == "fft" and bank.planes > 1:
+        raise UsageError("tile transforms take one plane", remedy="choose auto, direct or parity")
     exact = bank.taps.astype(np.float64)
-    split = {i: parity_parts(k) for i, k in enumerate(exact)}
+    split, whole = _split(exact)
     chosen = set(split) if kind == "parity" else set()
     if kind == "auto":
-        chosen = _worth_splitting(split, exact)
-    mixed = {i: split[i] if i in chosen else {"all": exact[i]} for i in split}
+        chosen = _worth_splitting(split, whole)
+    mixed = {i: split[i] if i in chosen else whole[i] for i in split}
     products, sums = share(mixed)
     groups = _group(products, sums, bank)
     tiles = tile_fft(bank.taps, _by_tiles(bank, products, sums, kind))
-    bounds = _bounds(products, sums, bank.table.span)
+    mixing = 0 if bank.mix is None else bank.mix.shape[1]
+    spans = tuple(float(reach) * bank.table.span for reach in bank.plane_reach)
+    bounds = _bounds(products, sums, spans, mixing)
     if tiles is not None:
         bounds = tuple(
             max(b, tile_bound(exact[k], bank.table.span)) if k in tiles.kernels else b
             for k, b in enumerate(bounds)
         )
     order = tuple(sums[i] for i in sorted(sums))
-    lines, multiplies, adds = _counted(products, groups, sums, tiles)
+    lines, multiplies, adds = _counted(bank, products, groups, sums, tiles)
     return Plan(
         kind=_name(products, sums, tiles),
         groups=lines,
@@ -312,11 +356,14 @@ def make_plan(bank: Bank, kind: str = "auto") -> Plan:
         error_bound=bounds,
         detail={
             "bases": tuple(p.basis for p in products),
+            "planes": tuple(p.plane for p in products),
             "coefficients": tuple(p.rounded for p in products),
             "sums": order,
             "fft": tiles,
             "product_groups": tuple(tuple(g) for g in groups),
-            "fixed": fixed_point(
+            "fixed": None
+            if bank.planes > 1
+            else fixed_point(
                 bank,
                 [p.basis for p in products],
                 [p.rounded for p in products],
@@ -331,7 +378,7 @@ def make_plan(bank: Bank, kind: str = "auto") -> Plan:
 
 
 def rebuilt_taps(plan: Plan, size: int) -> Iterator[F64]:
-    """The kernels a plan really computes, unfolded again; float64 (size, size) each.
+    """The kernels a plan of one plane really computes, unfolded again; float64 (size, size) each.
 
     They differ from the bank's taps by the rounding of the parts and nothing else.
     """

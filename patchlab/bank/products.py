@@ -17,11 +17,19 @@ Sum = tuple[tuple[int, int], ...]
 
 @dataclass(frozen=True, eq=False)
 class Product:
-    """Coefficients and the basis they are dotted with, exact and as float32."""
+    """Coefficients and the basis they are dotted with, exact and as float32.
+
+    ``plane`` is the working plane that the basis is of.
+    """
 
     basis: str
     exact: F64
     rounded: F32
+    plane: int = 0
+
+
+Part = tuple[int, str]
+"""A working plane and a basis of it."""
 
 
 # ---------------------------------------------------------------- parity parts
@@ -86,22 +94,23 @@ def uses_of(basis: str, shape: tuple[int, int]) -> F64:
 # ---------------------------------------------------------------- sharing
 
 
-def share(parts: Mapping[int, Mapping[str, F64]]) -> tuple[list[Product], dict[int, Sum]]:
+def share(parts: Mapping[int, Mapping[Part, F64]]) -> tuple[list[Product], dict[int, Sum]]:
     """Equal parts become one product; a negated part shares it with a minus sign."""
     products: list[Product] = []
-    known: dict[tuple[str, tuple[int, ...], bytes], tuple[int, int]] = {}
+    known: dict[tuple[Part, tuple[int, ...], bytes], tuple[int, int]] = {}
     sums: dict[int, Sum] = {}
     for index, split in parts.items():
         terms = []
-        for basis, part in split.items():
+        for where, part in split.items():
             if not part.any():
                 continue
+            plane, basis = where
             exact = trimmed(basis, part)
-            key = (basis, exact.shape, (exact + 0.0).tobytes())  # + 0.0: minus zero is zero
+            key = (where, exact.shape, (exact + 0.0).tobytes())  # + 0.0: minus zero is zero
             if key not in known:
                 place = len(products)
-                products.append(Product(basis, exact, exact.astype(np.float32)))
-                known[(basis, exact.shape, (0.0 - exact).tobytes())] = (place, -1)
+                products.append(Product(basis, exact, exact.astype(np.float32), plane))
+                known[(where, exact.shape, (0.0 - exact).tobytes())] = (place, -1)
                 known[key] = (place, 1)
             terms.append(known[key])
         sums[index] = tuple(terms)

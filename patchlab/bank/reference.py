@@ -13,32 +13,11 @@ import numpy as np
 from numpy.typing import NDArray
 
 from patchlab.bank.plan import strength_members
+from patchlab.bank.planes import check_picture, exact_planes
 from patchlab.conventions import pad
-from patchlab.errors import InputError
 from patchlab.types import F64, Bank
 
-
-def check_picture(bank: Bank, pixels: NDArray[Any]) -> None:
-    """Refuse a picture that this bank cannot take.
-
-    Raises
-    ------
-    InputError : not one plane, another dtype, or a side shorter than the kernels'.
-    """
-    form = bank.contract.format
-    if pixels.ndim != 2:
-        raise InputError(f"a picture is one plane (h, w), not an array of shape {pixels.shape}")
-    if pixels.dtype != np.dtype(form.dtype):
-        raise InputError(
-            f"bank {bank.name} takes {form.name} pixels ({form.dtype}), not {pixels.dtype}",
-            remedy="convert the picture, or make a bank for this camera's format",
-        )
-    if min(pixels.shape) < bank.size:
-        raise InputError(
-            f"a picture of {pixels.shape[1]} x {pixels.shape[0]} pixels is smaller than the "
-            f"bank's {bank.size} x {bank.size} kernels",
-            remedy="both sides must be at least as long as a kernel's",
-        )
+__all__ = ["check_picture", "responses", "strength"]
 
 
 def responses(bank: Bank, pixels: NDArray[Any]) -> F64:
@@ -47,24 +26,29 @@ def responses(bank: Bank, pixels: NDArray[Any]) -> F64:
     Parameters
     ----------
     bank : Bank
-    pixels : ndarray (h, w) of the contract's dtype, both sides at least ``bank.size``
+    pixels : ndarray (h, w) of the contract's dtype, both sides at least ``bank.size``; (h, w, 3)
+        for interleaved colour, (2 h, 2 w) for the cells of a Bayer sensor
 
     Returns
     -------
-    float64 ndarray (n, h, w): correlations of the float32 taps with the float32 working values
+    float64 ndarray (n, h, w): correlations of the float32 taps with the working values, which
+    are float32 after the table, and mixed in float64
 
     Raises
     ------
     InputError : the picture does not fit the bank.
     """
     check_picture(bank, pixels)
-    padded = pad(bank.table.apply(pixels), bank.radius, bank.border).astype(np.float64)
-    h, w = pixels.shape
+    working = exact_planes(bank, pixels)
+    h, w, count = working.shape
+    taps = bank.taps.astype(np.float64).reshape(len(bank), bank.size, bank.size, count)
     out = np.zeros((len(bank), h, w))
-    for plane, kernel in zip(out, bank.taps.astype(np.float64), strict=True):
-        for j in range(bank.size):
-            for i in range(bank.size):
-                plane += kernel[j, i] * padded[j : j + h, i : i + w]
+    for m in range(count):
+        padded = pad(working[..., m], bank.radius, bank.border)
+        for plane, kernel in zip(out, taps[..., m], strict=True):
+            for j in range(bank.size):
+                for i in range(bank.size):
+                    plane += kernel[j, i] * padded[j : j + h, i : i + w]
     return out
 
 
@@ -92,7 +76,7 @@ def strength(bank: Bank, pixels: NDArray[Any], scale: int) -> tuple[F64, NDArray
     members = strength_members(bank, scale)
     planes = responses(bank, pixels)
     squares = [
-        sum((planes[i] ** 2 for i in (even, odd) if i is not None), np.zeros(pixels.shape))
+        sum((planes[i] ** 2 for i in (even, odd) if i is not None), np.zeros(planes.shape[1:]))
         for _, even, odd in members
     ]
     winner = np.argmax(squares, axis=0)

@@ -14,6 +14,7 @@ from patchlab.camera.flags import flag_components
 from patchlab.camera.marks import find_marks
 from patchlab.camera.noise import measure_noise
 from patchlab.camera.pixels import MAX_FRAMES
+from patchlab.camera.samples import sample_noise
 from patchlab.camera.spectrum import Spectrum, measure_spectrum
 from patchlab.camera.static import measure_noise_dark, measure_noise_static
 from patchlab.camera.survey import survey
@@ -37,6 +38,7 @@ __all__ = [
     "measure_spectrum",
     "new_marks",
     "noise_of_table",
+    "sample_noise",
     "slanted_edge",
     "survey",
     "verdict_of",

@@ -66,13 +66,17 @@ def threshold_of(
 
 
 def _checked(bank: Bank, pixels: NDArray[Any], respond: Respond) -> F32:
-    if pixels.ndim != 2 or min(pixels.shape) < bank.size:
+    form = bank.contract.format
+    fits = pixels.ndim == (3 if form.interleaved else 2)
+    if not fits or min(form.size_of(pixels)) < bank.size:
         raise InputError(
             f"a picture of shape {pixels.shape} is too small for kernels of {bank.size} px",
-            remedy=f"give one plane of at least {bank.size} x {bank.size} pixels",
+            remedy=f"give one plane of at least {bank.size} x {bank.size} pixels"
+            if bank.planes == 1
+            else f"give {form.name} pixels, at least {bank.size} x {bank.size} of them",
         )
     responses = respond(pixels)
-    if responses.shape != (len(bank), *pixels.shape):
+    if responses.shape != (len(bank), *form.size_of(pixels)):
         raise UsageError(f"the engine answered {responses.shape} for {len(bank)} kernels")
     return responses
 
@@ -140,9 +144,15 @@ def detect_edgels(
     high, ratio = threshold_of(bank, rate=rate, threshold=threshold, thresholds=thresholds)
     responses = _checked(bank, pixels, respond)
     found = thin.edge_map(bank, responses, high, hysteresis_ratio=ratio, kind=kind, invalid=invalid)
-    values = bank.table.apply(pixels)
-    where = edgels(bank, values, found, responses, blur_px=blur_px, kind=kind, invalid=invalid)
+    values = _values(bank, pixels, responses)
+    where = edgels(bank, values, found, responses, blur_px=blur_px, kind=kind, invalid=invalid,
+                   refine=bank.planes == 1)  # fmt: skip
     return found, where
+
+
+def _values(bank: Bank, pixels: NDArray[Any], responses: F32) -> F32:
+    """The plane that edgels are refined on; of colour they are not, so any of its size."""
+    return bank.table.apply(pixels) if bank.planes == 1 else responses[0]
 
 
 @dataclass(frozen=True, eq=False)
@@ -268,7 +278,7 @@ def find_on(
     levels : as :func:`levels_of` gives them
     others : as :func:`detect_edgels`
     """
-    values = bank.table.apply(pixels)
+    values = _values(bank, pixels, responses)
     maps, parts = {}, []
     for kind, (high, ratio) in levels.items():
         maps[str(kind)] = found = thin.edge_map(
@@ -281,7 +291,16 @@ def find_on(
             no_flanks=len(levels) > 1,
         )
         parts.append(
-            edgels(bank, values, found, responses, blur_px=blur_px, kind=kind, invalid=invalid)
+            edgels(
+                bank,
+                values,
+                found,
+                responses,
+                blur_px=blur_px,
+                kind=kind,
+                invalid=invalid,
+                refine=bank.planes == 1,
+            )
         )
     both = np.concatenate(parts)
     if len(parts) > 1:

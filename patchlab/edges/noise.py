@@ -3,9 +3,10 @@
 from __future__ import annotations
 
 import math
-from collections.abc import Callable, Iterator
+from collections.abc import Callable, Iterator, Sequence
 
 import numpy as np
+from numpy.typing import NDArray
 from scipy import fft
 
 from patchlab.conventions import rng
@@ -63,15 +64,27 @@ class Torus:
             raise UsageError(f"kernels of {bank.size} px do not fit in noise tiles of {size} px")
         self.size = size
         self.kernels = []
-        for taps in bank.taps:
-            plane = np.zeros((size, size), np.float32)
-            plane[: bank.size, : bank.size] = taps
-            self.kernels.append(fft.rfft2(np.roll(plane, (-bank.radius,) * 2, (0, 1))).conj())
+        for taps in bank.taps.reshape(len(bank), bank.size, bank.size, bank.planes):
+            self.kernels.append([self._transformed(taps[..., m]) for m in range(bank.planes)])
 
-    def responses(self, tile: F32) -> Callable[[int], F32]:
-        """Kernel index to its response plane."""
-        spectrum = fft.rfft2(tile)
-        return lambda i: np.asarray(fft.irfft2(spectrum * self.kernels[i], s=tile.shape))
+    def _transformed(self, taps: F32) -> NDArray[np.complex64] | None:
+        """A kernel's part in one plane; None where it reads nothing of it."""
+        if not taps.any():
+            return None
+        plane = np.zeros((self.size, self.size), np.float32)
+        plane[: taps.shape[0], : taps.shape[0]] = taps
+        return np.asarray(fft.rfft2(np.roll(plane, (-(taps.shape[0] // 2),) * 2, (0, 1))).conj())
+
+    def responses(self, tiles: Sequence[F32]) -> Callable[[int], F32]:
+        """Kernel index to its response plane, from a tile of each working plane."""
+        spectra = [fft.rfft2(tile) for tile in tiles]
+
+        def response(i: int) -> F32:
+            pairs = zip(spectra, self.kernels[i], strict=True)
+            parts = [s * k for s, k in pairs if k is not None]
+            return np.asarray(fft.irfft2(sum(parts[1:], parts[0]), s=tiles[0].shape))
+
+        return response
 
 
 def spectral_moments(
@@ -81,7 +94,7 @@ def spectral_moments(
 
     Parameters
     ----------
-    kernel : ndarray (h, h)
+    kernel : ndarray (h, h), or (h, h, planes) with the same noise in each plane, independent
     theta : direction, radians
     autocovariance : of the noise, centre 1; None means white
 
@@ -92,7 +105,8 @@ def spectral_moments(
     size = max(64, 2 * kernel.shape[0])
     f = fft.fftfreq(size)
     fy, fx = np.meshgrid(f, f, indexing="ij")
-    power = np.abs(fft.fft2(np.asarray(kernel, np.float64), (size, size))) ** 2
+    planes = np.asarray(kernel, np.float64).reshape(*kernel.shape[:2], -1)
+    power = np.sum(np.abs(fft.fft2(planes, (size, size), axes=(0, 1))) ** 2, axis=2)
     noise = noise_spectrum(autocovariance, size)
     power = power if noise is None else power * noise
     along = 2 * np.pi * np.abs(fx * math.cos(theta) + fy * math.sin(theta))

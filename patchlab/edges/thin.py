@@ -82,13 +82,19 @@ def _sigma(bank: Bank, index: int) -> float:
     if known is not None:
         return float(known)
     # the mean square radius of a Gaussian derivative's energy is twice its variance
-    energy = np.asarray(bank.taps[index], dtype=np.float64) ** 2
+    energy = _energy(bank, [index])
     y, x = np.mgrid[: bank.size, : bank.size] - bank.radius
     return math.sqrt(float((energy * (x * x + y * y)).sum() / energy.sum()) / 2)
 
 
+def _energy(bank: Bank, members: Sequence[int]) -> F64:
+    """Squared taps (h, h) of some kernels together, over all planes."""
+    found = (np.asarray(bank.taps[list(members)], dtype=np.float64) ** 2).sum(axis=0)
+    return np.asarray(found if bank.planes == 1 else found.sum(axis=-1))
+
+
 def _reach(bank: Bank, members: Sequence[int]) -> int:
-    energy = (np.asarray(bank.taps[list(members)], dtype=np.float64) ** 2).sum(axis=0)
+    energy = _energy(bank, members)
     c = bank.radius
     for r in range(c):
         if energy[c - r : c + r + 1, c - r : c + r + 1].sum() >= 0.999 * energy.sum():

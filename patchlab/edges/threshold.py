@@ -99,7 +99,7 @@ def count_on_noise(
     seed, key : what the noise is drawn from
     megapixels : how much noise, rounded up to whole tiles
     correlate : float32 working values (h, w) -> float32 responses (n, h, w), to run another
-        engine; None means transforms on periodic tiles, which have no border
+        engine of one plane; None means transforms on periodic tiles, which have no border
     progress : told after each tile
 
     Returns
@@ -115,16 +115,20 @@ def count_on_noise(
     torus = Torus(bank, TILE) if correlate is None else None
     cut = 0 if correlate is None else bank.radius  # a border rule changes the noise near it
     total = np.zeros((3, levels.size), np.int64)
-    noise = noise_tiles(bank.noise_autocovariance, tiles, seed=seed, key=key)
+    keys = [key, *(f"{key}, plane {m}" for m in range(1, bank.planes))]
+    noise = zip(
+        *(noise_tiles(bank.noise_autocovariance, tiles, seed=seed, key=k) for k in keys),
+        strict=True,
+    )
     sd = np.float32(bank.table.noise_sd or 1.0)
-    for done, unit in enumerate(noise, 1):
-        tile = sd * unit
+    for done, units in enumerate(noise, 1):
+        own = [sd * unit for unit in units]
         plane: Any
         if torus is not None:
-            plane = torus.responses(tile)
+            plane = torus.responses(own)
         else:
             assert correlate is not None
-            plane = correlate(tile)[:, cut : TILE - cut, cut : TILE - cut].__getitem__
+            plane = correlate(own[0])[:, cut : TILE - cut, cut : TILE - cut].__getitem__
         maps = [thin.strongest(s, plane, wanted) for s in shapes]
         floor = hysteresis * float(levels.min())
         total += _count([thin.candidates(m, floor, margin=0) for m in maps], levels, hysteresis)

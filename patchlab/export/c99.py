@@ -11,7 +11,7 @@ import numpy as np
 
 from patchlab.conventions import BORDERS
 from patchlab.errors import UsageError
-from patchlab.export import c_code, c_edgels, c_fft, c_fixed
+from patchlab.export import c_code, c_colour, c_edgels, c_fft, c_fixed
 from patchlab.export.c_edge_model import EdgelRules
 from patchlab.export.c_text import (
     fill,
@@ -123,6 +123,7 @@ def emit(bank: Bank, plan: Plan, edgels: EdgelRules | None = None) -> dict[str, 
     about |= c_edgels.sections(bank, plan, edgels)
     if edgels is not None:
         about |= MATHEMATICS
+    about |= {k: _told(v, about) for k, v in c_colour.sections(bank).items()}
 
     # texts with tokens of their own are filled before they are put in place
     about |= {k: fill(str(v), {"N": name}).decode() for k, v in about.items() if "@N@" in str(v)}
@@ -138,6 +139,11 @@ def emit(bank: Bank, plan: Plan, edgels: EdgelRules | None = None) -> dict[str, 
     }
 
 
+def _told(text: object, about: dict[str, object]) -> str:
+    """A text with the tokens of the bank's plain facts filled in; the name's comes later."""
+    return fill(str(text), {**about, "N": "@N@"}).decode()
+
+
 # ---------------------------------------------------------------- facts
 
 
@@ -147,7 +153,7 @@ def _about(bank: Bank, plan: Plan) -> dict[str, object]:
     line = _line(bank.radius)
     products = len(plan.detail["bases"])
     scales = len(plan.detail["strength"])
-    tile = max(256, RING_BYTES // (4 * bank.size) // CHUNK * CHUNK)
+    tile = max(256, RING_BYTES // (4 * bank.size * bank.planes) // CHUNK * CHUNK)
     folded = (2 * bank.radius + 1) * line if c_code.folds(plan) else 0
     roots = bank.strength == "energy" or (bank.table.kind == "stabilised" and not form.integer)
     return {

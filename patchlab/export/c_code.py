@@ -130,15 +130,21 @@ def _in(rows: list[str], by: int = 4) -> list[str]:
 def _calls(plan: Plan, wanted: set[int]) -> list[str]:
     """Calls that compute the groups in which some of these products are."""
     chosen = [
-        (g, plan.detail["bases"][group[0]] == "all")
+        (plan.detail["planes"][group[0]], g, plan.detail["bases"][group[0]] == "all")
         for g, group in enumerate(plan.detail["product_groups"])
         if wanted.intersection(group)
     ]
-    first = ["@N@_FN(fold)(rows, at, work);"] if any(not direct for _, direct in chosen) else []
-    return first + [
-        f"@N@_FN(group{g})(rows, at, t);" if direct else f"@N@_FN(group{g})(work, t);"
-        for g, direct in chosen
-    ]
+    calls = []
+    for plane in sorted({plane for plane, _, _ in chosen}):
+        rows = f"rows + {plane} * @N@_SIZE" if plane else "rows"
+        own = [(g, direct) for at, g, direct in chosen if at == plane]
+        if not all(direct for _, direct in own):
+            calls.append(f"@N@_FN(fold)({rows}, at, work);")
+        calls += [
+            f"@N@_FN(group{g})({rows}, at, t);" if direct else f"@N@_FN(group{g})(work, t);"
+            for g, direct in own
+        ]
+    return calls
 
 
 # ---------------------------------------------------------------- sums

@@ -190,7 +190,7 @@ def run_target(bank: Bank, plan: Plan, target: Target, cases: tuple[Case, ...]) 
 
 
 def _products(bank: Bank, case: Case) -> int:
-    return len(bank) * bank.size**2 * case.pixels.size
+    return int(bank.taps.size * case.expected[0].size)
 
 
 def _compare_responses(bank: Bank, plan: Plan, target: Target, case: Case, found: _Errors) -> None:
@@ -199,8 +199,8 @@ def _compare_responses(bank: Bank, plan: Plan, target: Target, case: Case, found
     _like(got, "responses", np.float32, case.expected.shape)
     bounds = np.array(target.bounds or plan.error_bound)
     error = np.abs(got.astype(np.float64) - case.expected)
-    inside = np.zeros(case.pixels.shape, dtype=bool)
-    r, (h, w) = bank.radius, case.pixels.shape
+    inside = np.zeros(case.expected.shape[1:], dtype=bool)
+    r, h, w = bank.radius, *case.expected.shape[1:]
     inside[r : h - r, r : w - r] = True
     for what, where in (("responses, interior", inside), ("responses, border", ~inside)):
         if where.any():
@@ -213,8 +213,8 @@ def _compare_edges(bank: Bank, plan: Plan, target: Target, case: Case, found: _E
     assert case.strength is not None
     for place, scale in enumerate(bank.scales):
         strength, orientation = target.edges(case.pixels, place)
-        _like(strength, "strength", np.float32, case.pixels.shape)
-        _like(orientation, "orientation", np.uint8, case.pixels.shape)
+        _like(strength, "strength", np.float32, case.expected.shape[1:])
+        _like(orientation, "orientation", np.uint8, case.expected.shape[1:])
         bound = strength_tolerance(bank, target.bounds or plan.error_bound, scale)
         error = np.abs(strength.astype(np.float64) - case.strength[place]).max()
         found.add(f"strength, scale {scale}", np.array([error]), np.array([bound]))

@@ -3,8 +3,9 @@
 Two files, both for any height and width and any number of pictures:
 
 ``NAME.onnx``
-    input ``image`` (N, 1, H, W) of the contract's pixels; output ``responses``
-    (N, kernels, H, W) float32.
+    input ``image`` (N, 1, H, W) of the contract's pixels, or (N, H, W, 3) of interleaved colour;
+    output ``responses`` (N, kernels, H, W) float32. Of a Bayer sensor the input is the mosaic
+    and H, W count its cells.
 ``NAME_edges.onnx``
     the same input; outputs ``strength`` (N, scales, H, W) float32 and ``orientation``
     (N, scales, H, W) uint8, the number of the winning orientation; ties to the first.
@@ -97,16 +98,15 @@ def conv_bound(bank: Bank) -> tuple[float, ...]:
     fused multiply-add or without (Higham 2002, section 3.1), so it holds for any ONNX
     runtime that multiplies and adds in float32. Float pixels under the root formula add
     :data:`ROOT_ROUNDINGS`, because not every runtime rounds a square root correctly
-    (onnxruntime 1.18 does not). A runtime that fuses the formula's product and sum keeps
-    the bound where ``offset`` is not negative.
+    (onnxruntime 1.18 does not); mixing working planes of C samples adds C. A runtime that
+    fuses the formula's product and sum keeps the bound where ``offset`` is not negative.
     """
-    taps = np.abs(bank.taps.astype(np.float64))
-    count = np.count_nonzero(taps, axis=(1, 2))
+    count = np.count_nonzero(bank.taps.reshape(len(bank), -1), axis=1)
     root = bank.table.values is None and bank.table.kind == "stabilised"
-    more = ROOT_ROUNDINGS if root else 0
+    more = ROOT_ROUNDINGS if root else 0 if bank.mix is None else bank.mix.shape[1]
     return tuple(
-        gamma(max(int(n), 1) + more) * float(total) * bank.table.span
-        for n, total in zip(count, taps.sum(axis=(1, 2)), strict=True)
+        gamma(max(int(n), 1) + more) * float(reach) * bank.table.span
+        for n, reach in zip(count, bank.reach, strict=True)
     )
 
 
@@ -196,9 +196,30 @@ def _extended(graph: _Graph, plane: str, border: str, radius: int, axis: int, si
     return graph.add("Concat", f"{side}_bordered", strips[0], plane, strips[1], axis=axis)
 
 
+def _with_planes(taps: F32) -> F32:
+    """Kernels (n, h, h, planes), with a last axis of length 1 for one plane."""
+    return taps[..., None] if taps.ndim == 3 else taps
+
+
+def _planes(graph: _Graph, bank: Bank, tabled: str) -> str:
+    """Working planes (N, planes, H, W) of the tabled samples; one plane is as it is."""
+    form = bank.contract.format
+    if form.planes == 1:
+        return tabled
+    if form.interleaved:
+        samples = graph.add("Transpose", "samples", tabled, perm=[0, 3, 1, 2])
+    else:  # a cell's samples in the order of its rows
+        samples = graph.add("SpaceToDepth", "samples", tabled, blocksize=form.cell)
+    if bank.mix is None:
+        return samples
+    mix = graph.constant("mix", bank.mix[:, :, None, None], "float32")
+    return graph.add("Conv", "planes", samples, mix, kernel_shape=[1, 1], pads=[0] * 4)
+
+
 def _correlated(graph: _Graph, bank: Bank, taps: F32, name: str) -> str:
-    plane = _bordered(graph, _working_values(graph, bank.table), bank.border, bank.radius)
-    kernels = graph.constant("kernels", taps[:, None], "float32")
+    planes = _planes(graph, bank, _working_values(graph, bank.table))
+    plane = _bordered(graph, planes, bank.border, bank.radius)
+    kernels = graph.constant("kernels", np.moveaxis(_with_planes(taps), -1, 1), "float32")
     return graph.add(
         "Conv", name, plane, kernels, kernel_shape=[bank.size] * 2, pads=[0] * 4, strides=[1, 1]
     )
@@ -282,10 +303,16 @@ def _finish(
         kind = helper.np_dtype_to_tensor_dtype(np.dtype(dtype))
         return helper.make_tensor_value_info(label, kind, ["N", channels, "H", "W"])
 
+    form = bank.contract.format
+    image = plane("image", form.dtype, 1)
+    if form.planes > 1:
+        shape = ["N", "H", "W", form.planes] if form.interleaved else ["N", 1, "rows", "columns"]
+        kind = helper.np_dtype_to_tensor_dtype(np.dtype(form.dtype))
+        image = helper.make_tensor_value_info("image", kind, shape)
     inside = helper.make_graph(
         graph.nodes,
         name,
-        [plane("image", bank.contract.format.dtype, 1)],
+        [image],
         [plane(label, *what) for label, what in outputs.items()],
         graph.constants,
         doc_string=doc,
@@ -340,6 +367,11 @@ def _metadata(bank: Bank, about: Mapping[str, Any]) -> dict[str, str]:
 # ---------------------------------------------------------------- reading back
 
 
+def fed(pixels: NDArray[Any]) -> NDArray[Any]:
+    """One picture as the graph's input: (1, 1, H, W), or (1, H, W, samples) where interleaved."""
+    return pixels[None, None] if pixels.ndim == 2 else pixels[None]
+
+
 def reference_runner(model: bytes) -> Runner:
     """Run a graph by the onnx package's own reference evaluator (plain numpy, slow).
 
@@ -355,6 +387,6 @@ def reference_runner(model: bytes) -> Runner:
     session = ReferenceEvaluator(onnx.load_model_from_string(model))
 
     def run(pixels: NDArray[Any]) -> tuple[NDArray[Any], ...]:
-        return tuple(np.asarray(out)[0] for out in session.run(None, {"image": pixels[None, None]}))
+        return tuple(np.asarray(out)[0] for out in session.run(None, {"image": fed(pixels)}))
 
     return run

@@ -50,6 +50,8 @@ FORMATS = {
     "Mono16": ("uint16", 16),
     "float32": ("float32", 32),
 }
+COLOURS = {"RGB": 1, "BGR": 1, "BayerRG": 2, "BayerGR": 2, "BayerGB": 2, "BayerBG": 2}
+"""Kinds of colour pixels, with the rows and columns of samples in one: 2 for a mosaic's cell."""
 PARITIES = {"step": ("odd",), "line": ("even",), "energy": ("even", "odd")}
 PAD_MODES = {
     "zero": "constant",
@@ -114,9 +116,10 @@ class Bank:
     """A loaded bank; :func:`load` makes it.
 
     Attributes: ``name``; ``kernels`` (names, in the order of the planes); ``taps`` float32
-    (n, h, h); ``size`` (side of a kernel); ``pixels`` (format by its GenICam name) and ``dtype``;
-    ``border``; ``error_bound`` (one a kernel); ``scales`` and ``angles`` (radians, one a direction,
-    by scale); ``manifest``; ``compiled`` (the library in use, or None).
+    (n, h, h), of colour pixels (n, h, h, planes); ``size`` (side of a kernel); ``pixels`` (format
+    by its GenICam name) and ``dtype``; ``border``; ``error_bound`` (one a kernel); ``scales`` and
+    ``angles`` (radians, one a direction, by scale); ``manifest``; ``compiled`` (the library in
+    use, or None).
     """
 
     compiled: _Library | None = None
@@ -138,10 +141,15 @@ class Bank:
         self.kernels = tuple(_identifier(k["name"]) for k in head["kernels"])
         self.border = _known(head["border"], PAD_MODES, "border")
         self.strength = _known(head["strength"], PARITIES, "strength")
-        self.pixels = _known(head["input"]["pixels"], FORMATS, "pixel format")
-        self.dtype, self.bits = np.dtype(FORMATS[self.pixels][0]), FORMATS[self.pixels][1]
+        self._fill_pixels(str(head["input"]["pixels"]))
         self.taps = self._array("kernels.npy")
-        n, h, w = self.taps.shape
+        self._mix = self._array("mix.npy") if head.get("mix") else None
+        planes = self.samples if self._mix is None else self._mix.shape[0]
+        if self.taps.shape[3:] != (() if self.samples == 1 else (planes,)):
+            raise BankError(f"{self.folder}: the kernels do not fit the pixel format")
+        if self._mix is not None and self._mix.shape[1:] != (self.samples,):
+            raise BankError(f"{self.folder}: the mix does not fit the pixel format")
+        n, h, w = self.taps.shape[:3]
         if n != len(self.kernels) or h != w or h % 2 == 0 or n == 0:
             raise BankError(f"{self.folder}: the kernels do not fit the manifest")
         self.size, self.radius = h, h // 2
@@ -152,6 +160,20 @@ class Bank:
         self._members = _members(head["kernels"], self.strength)
         self.scales = tuple(sorted(self._members))
         self.angles = {s: _angles(head["kernels"], self._members[s]) for s in self.scales}
+
+    def _fill_pixels(self, pixels: str) -> None:
+        """What a pixel is: its samples, their depth, and the rows they stand in."""
+        kind = pixels.rstrip("0123456789")
+        self.cell = COLOURS.get(kind, 1)
+        self.samples = (3 if self.cell == 1 else 4) if kind in COLOURS else 1
+        mono = f"Mono{pixels[len(kind) :]}" if kind in COLOURS else pixels
+        self.pixels = pixels
+        self.dtype = np.dtype(FORMATS[_known(mono, FORMATS, "pixel format")][0])
+        self.bits = FORMATS[mono][1]
+
+    def size_of(self, image: Array) -> tuple[int, int]:
+        """Height and width of a picture, in pixels (of a mosaic, in cells)."""
+        return image.shape[0] // self.cell, image.shape[1] // self.cell
 
     def _array(self, name: str) -> Array:
         data = _read(self.folder, self.manifest, name)
@@ -174,7 +196,8 @@ class Bank:
 
         Parameters
         ----------
-        image : (h, w) of the bank's dtype, both sides at least ``size``
+        image : (h, w) of the bank's dtype, both sides at least ``size``; (h, w, 3) where pixels
+            are RGB or BGR; of a Bayer bank the mosaic (2 h, 2 w), and h, w count its cells
         threads : bands of rows computed side by side by the compiled library
 
         Returns
@@ -191,19 +214,40 @@ class Bank:
         return self._planes(image, range(len(self.kernels)))
 
     def _checked(self, image: Array) -> Array:
-        if not isinstance(image, np.ndarray) or image.ndim != 2:
+        flat = self.samples == 1 or self.cell > 1
+        tail = () if flat else (self.samples,)
+        if not isinstance(image, np.ndarray) or image.ndim < 2 or image.shape[2:] != tail:
             shape = getattr(image, "shape", type(image).__name__)
-            raise BankError(f"a picture is one plane (height, width), not {shape}")
+            what = "one plane (height, width)" if flat else f"(height, width, {self.samples})"
+            raise BankError(f"a picture is {what}, not {shape}")
         if image.dtype != self.dtype:
             raise BankError(
                 f"bank {self.name} takes {self.pixels} pixels ({self.dtype}), not {image.dtype}"
             )
-        if min(image.shape) < self.size:
+        height, width = self.size_of(image)
+        if (height * self.cell, width * self.cell) != image.shape[:2]:
             raise BankError(
-                f"a picture of {image.shape[1]} x {image.shape[0]} pixels is smaller than the "
+                f"a mosaic of cells of {self.cell} x {self.cell} has cells that are cut"
+            )
+        if min(height, width) < self.size:
+            raise BankError(
+                f"a picture of {width} x {height} pixels is smaller than the "
                 f"bank's {self.size} x {self.size} kernels"
             )
         return image
+
+    def _working_planes(self, image: Array) -> Array:
+        """Working planes in float64, (planes, h, w)."""
+        tabled = self._working(image).astype(np.float64)
+        if self.samples == 1:
+            return tabled[None]
+        if self.cell > 1:
+            (h, w), c = self.size_of(image), self.cell
+            cells = tabled.reshape(h, c, w, c).swapaxes(1, 2)
+            tabled = cells.reshape(h, w, self.samples)
+        if self._mix is not None:
+            tabled = tabled @ self._mix.astype(np.float64).T
+        return np.moveaxis(tabled, -1, 0)
 
     def _working(self, image: Array) -> Array:
         """Working values: the input table, or its formula for float pixels."""
@@ -219,17 +263,20 @@ class Bank:
 
     def _planes(self, image: Array, kernels: Sequence[int]) -> Array:
         """Some kernels' responses by numpy: float64 sums, rounded once."""
-        h, w = image.shape
+        h, w = self.size_of(image)
         mode: Any = PAD_MODES[self.border]
-        padded = np.pad(self._working(image).astype(np.float64), self.radius, mode=mode)
+        planes = self._working_planes(image)
+        padded = [np.pad(plane, self.radius, mode=mode) for plane in planes]
         area = self.size**2
-        taps = self.taps[list(kernels)].reshape(-1, area).astype(np.float64)
+        taps = self.taps[list(kernels)].reshape(-1, area, len(planes)).astype(np.float64)
         out = np.empty((len(taps), h, w), np.float32)
         step = max(1, BAND_VALUES // (w * area))
         for top in range(0, h, step):
-            rows = padded[top : min(top + step, h) + 2 * self.radius]
-            view = np.lib.stride_tricks.sliding_window_view(rows, (self.size, self.size))
-            sums = taps @ view.reshape(-1, area).T
+            sums: Array = 0.0
+            for m, plane in enumerate(padded):
+                rows = plane[top : min(top + step, h) + 2 * self.radius]
+                view = np.lib.stride_tricks.sliding_window_view(rows, (self.size, self.size))
+                sums = sums + taps[..., m] @ view.reshape(-1, area).T
             out[:, top : top + step] = sums.reshape(len(taps), -1, w)
         return out
 
@@ -257,8 +304,8 @@ class Bank:
             raise BankError(f"bank {self.name} has no scale {scale}")
         if self.compiled is not None:
             return self.compiled.edges(image, self.scales.index(scale), threads)
-        best = np.full(image.shape, -1, np.float32)
-        winner = np.zeros(image.shape, np.uint8)
+        best = np.full(self.size_of(image), -1, np.float32)
+        winner = np.zeros(best.shape, np.uint8)
         for turn, members in self._members[scale]:
             planes = self._planes(image, members)
             size = np.abs(planes[0]) if len(planes) == 1 else planes[0] ** 2 + planes[1] ** 2
@@ -553,7 +600,7 @@ class _Library:
     """The compiled code, loaded from bytes whose hash was checked."""
 
     def __init__(self, bank: Bank, data: bytes) -> None:
-        self.kernels, self.name = len(bank.kernels), bank.name
+        self.kernels, self.name, self.size_of = len(bank.kernels), bank.name, bank.size_of
         self._code = _open(data, bank.name)
         pointer, stride, number = ctypes.c_void_p, ctypes.c_ssize_t, ctypes.c_int
         picture = [pointer, stride, number, number, number, number]
@@ -577,7 +624,7 @@ class _Library:
         return function
 
     def responses(self, image: Array, threads: int) -> Array:
-        out = np.empty((self.kernels, *image.shape), np.float32)
+        out = np.empty((self.kernels, *self.size_of(image)), np.float32)
 
         def band(place: tuple[Any, ...], first: int, count: int, scratch: Array) -> int:
             to = out.ctypes.data + first * out.strides[1]
@@ -589,7 +636,8 @@ class _Library:
         return out
 
     def edges(self, image: Array, place_of_scale: int, threads: int) -> tuple[Array, Array]:
-        strength, turn = np.empty(image.shape, np.float32), np.empty(image.shape, np.uint8)
+        size = self.size_of(image)
+        strength, turn = np.empty(size, np.float32), np.empty(size, np.uint8)
 
         def band(place: tuple[Any, ...], first: int, count: int, scratch: Array) -> int:
             code = self._edges(
@@ -603,9 +651,9 @@ class _Library:
         return strength, turn
 
     def _run(self, image: Array, threads: int, band: Any) -> None:
-        if image.strides[1] != image.itemsize or abs(image.strides[0]) < image.shape[1]:
+        if not image[0].flags.c_contiguous or abs(image.strides[0]) < image[0].nbytes:
             image = np.ascontiguousarray(image)
-        h, w = image.shape
+        h, w = self.size_of(image)
         place = (image.ctypes.data, image.strides[0], w, h)
 
         def one(rows: tuple[int, int]) -> int:

@@ -14,6 +14,7 @@ import numpy as np
 from numpy.typing import NDArray
 
 from patchlab.errors import UsageError
+from patchlab.export.c_colour import steps
 from patchlab.export.c_text import (
     double_literal,
     fill,
@@ -68,6 +69,7 @@ def emit_selftest(
                 for i, case in enumerate(cases)
             ),
             "CASES": ",\n".join(_entry(i, case, fixed) for i, case in enumerate(cases)),
+            **steps(bank),
             "FIXED": _fixed_text(bank, fixed),
             "CHECK_FIXED": _CHECK_FIXED.replace("@N@", bank.name) if fixed is not None else "",
             "EDGELS": _edgels_text(bank, edgels),
@@ -84,11 +86,13 @@ def emit_selftest(
 def _check_case(bank: Bank, case: Case) -> None:
     name, pixels, expected, tolerance = case
     identifier(name, "case name")
+    form = bank.contract.format
+    size = form.size_of(pixels)
     fits = (
-        pixels.ndim == 2
-        and pixels.dtype == np.dtype(bank.contract.format.dtype)
-        and min(pixels.shape) >= bank.size
-        and expected.shape == (len(bank), *pixels.shape)
+        pixels.ndim == (3 if form.interleaved else 2)
+        and pixels.dtype == np.dtype(form.dtype)
+        and min(size) >= bank.size
+        and expected.shape == (len(bank), *size)
         and tolerance.shape == (len(bank),)
     )
     if not fits:
@@ -170,7 +174,7 @@ def _counts(number: int, case: Case, fixed: Any) -> str:
 
 
 def _entry(number: int, case: Case, fixed: Any) -> str:
-    h, w = case[1].shape
+    h, w = case[2].shape[1:]
     counts = "NULL, 0" if fixed is None else f"counts{number}, {fixed.counts(case[1])[1]}"
     arrays = f"pixels{number}, expected{number}, tolerance{number}, {counts}"
     return f'    {{"{case[0]}", {w}, {h}, {arrays}}}'

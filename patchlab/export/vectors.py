@@ -18,8 +18,8 @@ from typing import Any
 import numpy as np
 from numpy.typing import NDArray
 
-from patchlab.conventions import UNIT_ROUNDOFF, rng
-from patchlab.errors import InputError
+from patchlab.conventions import UNIT_ROUNDOFF, PixelFormat, pixel_format, rng
+from patchlab.errors import InputError, UsageError
 from patchlab.store import canonical_json, npy_bytes
 from patchlab.types import F64, Bank, Bundle, Plan
 
@@ -110,8 +110,8 @@ def strength_tolerance(bank: Bank, bounds: tuple[float, ...], scale: int) -> flo
     for members in zip(*(bank.members(scale, p) for p in PARITIES[bank.strength]), strict=True):
         error = math.hypot(*(bounds[i] for i in members))
         if len(members) > 1:
-            reach = [float(np.abs(bank.taps[i].astype(np.float64)).sum()) for i in members]
-            error += 4 * UNIT_ROUNDOFF * (math.hypot(*reach) * bank.table.span + error)
+            reach = math.hypot(*(float(bank.reach[i]) for i in members))
+            error += 4 * UNIT_ROUNDOFF * (reach * bank.table.span + error)
         worst = max(worst, error)
     return worst
 
@@ -126,7 +126,7 @@ class Case:
     Parameters
     ----------
     name, what : for files and for people
-    pixels : (h, w) of the contract's dtype
+    pixels : (h, w) of the contract's dtype; of colours as a picture of them is stored
     expected : float64 (n, h, w), exact responses
     tolerance : float64 (n,), largest allowed |float32 response - expected|
     strength : float64 (scales, h, w), or None for a bank without strength
@@ -174,12 +174,14 @@ def make_cases(
         flat full scale, wide noise, crop. Sizes: the kernel's exactly, one more, odd, wide.
     """
     pictures = list(_small(bank) if small else _pictures(bank, plan))
-    if crop is not None and not small and min(crop.shape) >= bank.size:
-        pictures.append(("crop", "a piece of a picture", middle(crop, max(bank.size, 40))))
+    form = bank.contract.format
+    if crop is not None and not small and min(form.size_of(crop)) >= bank.size:
+        piece = middle(form.split(crop), max(bank.size, 40))
+        pictures.append(("crop", "a piece of a picture", form.joined(piece)))
     cases: list[Case] = []
     left = limit_bytes / 8 / (len(bank) + len(bank.scales))
     for name, what, pixels in pictures:
-        left -= pixels.size
+        left -= math.prod(form.size_of(pixels))
         if left >= 0 or len(cases) < 2:
             cases.append(_answered(bank, plan, oracle, name, what, pixels))
     return tuple(cases)
@@ -207,7 +209,7 @@ def make_probes(bank: Bank, plan: Plan, oracle: Oracle) -> tuple[Case, ...]:
 def _answered(bank: Bank, plan: Plan, oracle: Oracle, name: str, what: str, pixels: Pixels) -> Case:
     pixels = np.ascontiguousarray(pixels)
     expected = np.asarray(oracle(bank, pixels), dtype=np.float64)
-    if expected.shape != (len(bank), *pixels.shape):
+    if expected.shape != (len(bank), *bank.contract.format.size_of(pixels)):
         raise ValueError(f"the oracle gave {expected.shape} for a picture of {pixels.shape}")
     tolerance = np.array(plan.error_bound, dtype=np.float64)
     fixed = plan.detail.get("fixed")
@@ -227,8 +229,20 @@ Picture = tuple[str, str, Pixels]
 def _codes(bank: Bank, light: NDArray[Any]) -> Pixels:
     """Unit values to pixels: 0 to the lowest code, 1 to the highest the contract allows.
 
-    Integer pixels use every code of their depth, float32 ones the range black to white.
+    Integer pixels use every code of their depth, float32 ones the range black to white. One
+    plane (h, w) of light serves every sample of colour pixels, moved by a column from sample to
+    sample so that no two see the same.
     """
+    form = bank.contract.format
+    if form.planes > 1:
+        if light.ndim == 2:
+            light = np.stack([np.roll(light, c, axis=1) for c in range(form.planes)], axis=2)
+        light = form.joined(light)
+    return _levels(bank, light)
+
+
+def _levels(bank: Bank, light: NDArray[Any]) -> Pixels:
+    """Unit values to codes of one sample, any shape."""
     form, contract = bank.contract.format, bank.contract
     if form.integer:
         return np.asarray(np.rint(light * form.full_scale).astype(form.dtype))
@@ -271,7 +285,9 @@ def _small(bank: Bank) -> Iterator[Picture]:
 
 
 def _noise(bank: Bank, shape: tuple[int, int]) -> Pixels:
-    return _codes(bank, rng(0, "vectors", f"noise {shape}").random(shape))
+    planes = bank.contract.format.planes
+    wide = shape if planes == 1 else (*shape, planes)
+    return _codes(bank, rng(0, "vectors", f"noise {shape}").random(wide))
 
 
 def _worst(bank: Bank, plan: Plan, shape: tuple[int, int]) -> Pixels:
@@ -283,16 +299,19 @@ def _worst(bank: Bank, plan: Plan, shape: tuple[int, int]) -> Pixels:
     1/32 of their range, for products that do not fit 24 bits.
     """
     kernel = bank.taps[int(np.argmax(plan.error_bound))]
+    if bank.mix is not None:
+        kernel = kernel @ bank.mix
     light = np.linspace(0, 1, 4097)
-    values = bank.table.apply(_codes(bank, light)).astype(np.float64)
+    values = bank.table.apply(_levels(bank, light)).astype(np.float64)
     slack = (values.max() - values.min()) / 32
     high = light[values >= values.max() - slack]
     low = light[values <= values.min() + slack]
     y, x = np.indices(shape)
-    bright = kernel[y % bank.size, x % bank.size] > 0
+    bright = kernel[y % bank.size, x % bank.size] > 0  # (h, w), or (h, w, samples)
     bright[:, shape[1] // 2 :] = abs(values.max()) >= abs(values.min())
     draw = rng(0, "vectors", f"worst {shape}")
-    return _codes(bank, np.where(bright, draw.choice(high, shape), draw.choice(low, shape)))
+    wide = bright.shape
+    return _codes(bank, np.where(bright, draw.choice(high, wide), draw.choice(low, wide)))
 
 
 def _worst_fixed(bank: Bank, plan: Plan) -> Iterator[Picture]:
@@ -307,7 +326,7 @@ def _worst_fixed(bank: Bank, plan: Plan) -> Iterator[Picture]:
 
 def middle(pixels: Pixels, side: int) -> Pixels:
     """The middle of a picture, at most ``side`` pixels high and wide."""
-    rows, cols = (max(0, (n - side) // 2) for n in pixels.shape)
+    rows, cols = (max(0, (n - side) // 2) for n in pixels.shape[:2])
     return pixels[rows : rows + side, cols : cols + side]
 
 
@@ -349,7 +368,8 @@ def vector_files(
     if edgels:
         head["edgels"] = dict(edgels)
     files["vectors/cases.json"] = canonical_json(head)
-    files["vectors/README.md"] = _README.format(border=bank.border, name=bank.name).encode()
+    said = {"border": bank.border, "name": bank.name, "colours": _colours(bank)}
+    files["vectors/README.md"] = _README.format(**said).encode()
     return files
 
 
@@ -382,14 +402,14 @@ def load_cases(read: Callable[[str], bytes]) -> tuple[Case, ...]:
             for entry in head["cases"]
         )
         for case in cases:
-            _fitting(case, len(head["kernels"]))
-    except (KeyError, TypeError, ValueError, AttributeError) as error:
+            _fitting(case, len(head["kernels"]), pixel_format(str(head["pixels"])))
+    except (KeyError, TypeError, ValueError, AttributeError, UsageError) as error:
         raise InputError(f"damaged test vectors: {error}", where="vectors/cases.json") from None
     return cases
 
 
-def _fitting(case: Case, kernels: int) -> None:
-    h, w = case.pixels.shape
+def _fitting(case: Case, kernels: int, form: PixelFormat) -> None:
+    h, w = form.size_of(case.pixels)
     fits = case.expected.shape == (kernels, h, w) and case.tolerance.shape == (kernels,)
     fits = fits and (case.counts is None or case.counts.shape == (kernels, h, w))
     for array in (case.strength, case.orientation):
@@ -407,6 +427,22 @@ def array_in(data: bytes) -> NDArray[Any]:
         raise ValueError(f"not a plain array ({error})") from None
 
 
+def _colours(bank: Bank) -> str:
+    """What a port of a colour bank has to know; nothing for one plane."""
+    form = bank.contract.format
+    if form.planes == 1:
+        return ""
+    how = f"(rows, columns, {form.planes})" if form.interleaved else "a mosaic of 2 x 2 cells"
+    mix = "" if bank.mix is None else (
+        " (`mix.npy` (planes, samples): a working plane is the weighted sum of a pixel's samples "
+        "after the table)"
+    )  # fmt: skip
+    return (
+        f" Here pixels have the samples {form.colours}: a picture is {how}, and a response is the "
+        f"sum over the working planes{mix}."
+    )
+
+
 _README = """\
 # Test vectors of the bank {name}
 
@@ -417,7 +453,7 @@ A port is right when, for every case of `cases.json`,
 at every pixel, the rim included. All arrays are little-endian `.npy` files in row-major
 order; any language can read them (a short text header, then the numbers).
 
-- `*.image.npy`: the picture, (rows, columns), in the bank's own pixels.
+- `*.image.npy`: the picture, (rows, columns), in the bank's own pixels.{colours}
 - `*.responses.npy`: float64 (kernels, rows, columns), kernels in the order of `cases.json`.
 - `*.counts.npy`: int16 (kernels, rows, columns), where the bank has a fixed-point part. A
   fixed-point port must give these very numbers.

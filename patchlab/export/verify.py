@@ -37,7 +37,7 @@ from patchlab.export.edgel_vectors import (
     edgel_checks,
     load_edgel_cases,
 )
-from patchlab.export.onnx import Runner, conv_bound, reference_runner
+from patchlab.export.onnx import Runner, conv_bound, fed, reference_runner
 from patchlab.export.vectors import (
     Case,
     Oracle,
@@ -152,8 +152,9 @@ def _stored(
     target, what = "oracle, float64", "stored vectors"
     if "vectors/cases.json" not in files.head["files"]:
         return (), (not_run(target, what, "the bank holds no test vectors"),)
-    reach = np.abs(bank.taps.astype(np.float64)).sum(axis=(1, 2)) * bank.table.span
-    bounds = reach * (bank.size**2 + 1) * np.finfo(np.float64).eps  # two float64 sums, any order
+    terms = bank.size**2 * bank.planes + (0 if bank.mix is None else bank.mix.shape[1])
+    reach = bank.reach * bank.table.span
+    bounds = reach * (terms + 1) * np.finfo(np.float64).eps  # two float64 sums, any order
     try:
         cases = load_cases(files.read)
         errors = [largest(np.asarray(oracle(bank, c.pixels)), c.expected) for c in cases]
@@ -296,7 +297,7 @@ def _runtime_runner(model: bytes) -> Runner:
     session = onnxruntime.InferenceSession(model, options, providers=["CPUExecutionProvider"])
 
     def run(pixels: Pixels) -> tuple[NDArray[Any], ...]:
-        return tuple(out[0] for out in session.run(None, {"image": pixels[None, None]}))
+        return tuple(out[0] for out in session.run(None, {"image": fed(pixels)}))
 
     return run
 

@@ -19,6 +19,7 @@ from patchlab.images.folder import (
 )
 from patchlab.images.parts import make_brackets
 from patchlab.images.pfnc import RawLayout
+from patchlab.images.planes import one_plane
 from patchlab.images.sample import SampleSettings, memory_needed, sample, sample_folder
 
 __all__ = [
@@ -36,6 +37,7 @@ __all__ = [
     "make_brackets",
     "make_sample_images",
     "memory_needed",
+    "one_plane",
     "read_file",
     "reread",
     "sample",

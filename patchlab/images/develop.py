@@ -26,6 +26,8 @@ from patchlab.conventions import (
 from patchlab.errors import InputError, UsageError
 from patchlab.images.bayer import PLANES, Plane, colours, green
 from patchlab.images.pfnc import RawLayout
+from patchlab.images.planes import PLANES as KEPT
+from patchlab.images.planes import Planes, colour_format, of_pixels, stored
 from patchlab.types import F64, Frame, InputContract
 
 _BAND = 1 << 20  # pixels converted at a time, so that colour needs no full float64 planes
@@ -45,6 +47,8 @@ class ReadOptions:
     pixel_limit : pictures of more pixels are refused before their pixels are decoded
     raw : what ``.raw`` buffers hold; a sidecar goes before it
     bayer : what is taken of a Bayer sensor: "green", "luminance" or "mosaic"
+    planes : "luminance" makes one plane of every picture; "colour" keeps its colours (then a
+        Bayer sensor's pixels are its cells, and ``bayer`` has no say)
 
     Raises
     ------
@@ -58,6 +62,7 @@ class ReadOptions:
     pixel_limit: float = 200e6
     raw: RawLayout | None = None
     bayer: Plane = "green"
+    planes: Planes = "luminance"
 
     def __post_init__(self) -> None:
         if self.transfer not in ("auto", "linear", "srgb"):
@@ -71,10 +76,14 @@ class ReadOptions:
             raise UsageError("the white level must exceed the black level")
         if self.bayer not in PLANES:
             raise UsageError(f"unknown plane {self.bayer!r}", remedy=f"one of {', '.join(PLANES)}")
+        if self.planes not in KEPT:
+            raise UsageError(f"unknown planes {self.planes!r}", remedy=f"one of {', '.join(KEPT)}")
         if not self.pixel_limit >= 1:
             raise UsageError("the pixel limit must be at least 1")
         if self.pixels is not None:
             form = pixel_format(self.pixels)
+            if form.planes > 1 and self.planes == "luminance":
+                raise UsageError(f"{form.name} pixels have colours", remedy="add --planes colour")
             if form.integer and max(self.white or 0, self.black or 0) > form.full_scale:
                 raise UsageError(f"a level is beyond the {form.bits} bits of {form.name}")
 
@@ -122,19 +131,20 @@ def check_size(width: int, height: int, options: ReadOptions) -> None:
 
 
 def upright(plane: NDArray[Any], orientation: int) -> NDArray[Any]:
-    """Turn a (h, w) plane so that it stands as it was seen.
+    """Turn a (h, w) plane, or a picture (h, w, 3), so that it stands as it was seen.
 
     ``orientation`` is the tag of the Exif standard (JEITA CP-3451, tag 274): what the file's
     first row and first column show. Values outside 2 to 8 change nothing.
     """
+    across = plane.swapaxes(0, 1)
     turned: dict[int, NDArray[Any]] = {
         2: plane[:, ::-1],
         3: plane[::-1, ::-1],
         4: plane[::-1],
-        5: plane.T,
-        6: plane.T[:, ::-1],
-        7: plane[::-1, ::-1].T,
-        8: plane.T[::-1],
+        5: across,
+        6: across[:, ::-1],
+        7: across[::-1, ::-1],
+        8: across[::-1],
     }
     return np.ascontiguousarray(turned.get(orientation, plane))
 
@@ -151,15 +161,17 @@ def develop(picture: Picture, path: str, digest: str, options: ReadOptions) -> F
 
     Returns
     -------
-    Frame : upright codes of one depth. Colour becomes luminance with the Rec. 709 weights in
-        linear light, coded again by the same transfer and rounded to the same depth.
+    Frame : upright codes of one depth. Unless its planes are kept, colour becomes luminance with
+        the Rec. 709 weights in linear light, coded again by the same transfer and rounded to the
+        same depth.
 
     Raises
     ------
     InputError : the file cannot hold the declared depth, or a code is beyond it.
     """
     contract = _contract(picture, options)
-    if picture.mosaic:
+    kept = contract.format.planes > 1
+    if picture.mosaic and not kept:
         picture = _plane(picture, options.bayer)
     notes = list(picture.notes)
     samples = picture.samples
@@ -174,7 +186,10 @@ def develop(picture: Picture, path: str, digest: str, options: ReadOptions) -> F
             if clipped.any():
                 bad = clipped if bad is None else bad | clipped
                 notes.append(f"a colour channel is clipped on {clipped.mean():.2%} of the pixels")
-    if samples.ndim == 3:
+    if kept:
+        plane = stored(samples, contract.format)
+        bad = None if bad is None else of_pixels(bad, contract.format)
+    elif samples.ndim == 3:
         notes.append("colour to luminance")
         plane = _luminance(samples, contract)
     else:
@@ -258,6 +273,10 @@ def _contract(picture: Picture, options: ReadOptions) -> InputContract:
             f"black level {black:g} is not below its white level {white:g}",
             remedy="give --white as well",
         )
+    if options.planes == "colour":
+        shape, asked = picture.samples.shape, options.pixels or ""
+        name = colour_format(form, shape, picture.mosaic, asked)
+        return InputContract(name, black, white, transfer)
     plane = f"Bayer{picture.mosaic} {options.bayer}" if picture.mosaic else ""
     return InputContract(form.name, black, white, transfer, plane)
 

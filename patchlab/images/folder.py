@@ -330,14 +330,13 @@ def _inspect(task: tuple[Path, str, ReadOptions]) -> tuple[FrameRecord, ...] | Q
 
 
 def _record(frame: Frame, file: str, page: int) -> FrameRecord:
-    height, width = frame.pixels.shape
     return FrameRecord(
         frame.path,
         file,
         page,
         frame.sha256,
         sha256(frame.pixels.tobytes()),
-        (height, width),
+        frame.shape,
         frame.contract,
         0.0 if frame.invalid is None else float(frame.invalid.mean()),
         frame.notes,
@@ -379,7 +378,7 @@ def _common(records: tuple[FrameRecord, ...], mixed_depths: bool, root: Path) ->
         f"{c.transfer}: {paths[0]}"
         for c, paths in groups.items()
     )
-    if len({c.plane for c in groups}) > 1:
+    if len({(c.plane, c.format.colours) for c in groups}) > 1:
         raise InputError(
             f"the frames are of several colour patterns{lines}\n",
             where=str(root),

@@ -10,10 +10,12 @@ The stated rules, in order:
 1. *invalid*: a pixel of the patch must not be used (transparent, not a number, ...).
 2. *saturated*: a code outside the input table's trusted range; for integer formats also
    code 0, and codes at or above the white level.
-3. *flat*: all pixels are equal.
+3. *flat*: all pixels are equal (in every plane by itself, where pixels have colours).
 4. *below the noise*: where the camera's noise is known, a standard deviation under twice the
    noise's: such a patch would teach the learner the noise.
-5. The DC (mean of the working values, float64) is subtracted.
+5. The DC (mean of the working values, float64) is subtracted, of each plane its own. A plane's
+   mean follows the light and its colour; without it a filter is blind to a flat field of any
+   colour, which is what a promise of false edges on flat fields needs.
 6. *flattest*: of all frames' candidates together, the stated share of lowest standard
    deviation is dropped (ties: by path, then by place in the frame's sequence).
 7. The rest is divided by its contrast, the patch's standard deviation.
@@ -24,6 +26,7 @@ from __future__ import annotations
 import math
 from collections.abc import Iterable, Iterator, Mapping
 from dataclasses import dataclass
+from typing import Any
 
 import numpy as np
 from numpy.lib.stride_tricks import sliding_window_view
@@ -88,8 +91,9 @@ class Part:
     ----------
     path : the frame's
     origin : int32 ndarray (n, 2)
-    patches : float32 ndarray (n, size * size), DC removed and, if asked, normalised
-    dc, sd, contrast : float32 ndarray (n,), mean, standard deviation, divisor
+    patches : float32 ndarray (n, d), DC removed and, if asked, normalised
+    dc : float32 ndarray (n,), mean; of colour pixels (n, samples)
+    sd, contrast : float32 ndarray (n,), standard deviation, divisor
     rejected : count by reason
     """
 
@@ -111,7 +115,12 @@ def quota(settings: SampleSettings, frames: int) -> int:
 
 
 def memory_needed(
-    settings: SampleSettings, *, pixels: int = 12_000_000, frames: int = 1, jobs: int = 1
+    settings: SampleSettings,
+    *,
+    pixels: int = 12_000_000,
+    frames: int = 1,
+    jobs: int = 1,
+    planes: int = 1,
 ) -> int:
     """Upper estimate of the memory that sampling takes, in bytes.
 
@@ -121,18 +130,19 @@ def memory_needed(
     pixels : of the largest frame (``Intake.largest``)
     frames : how many there are
     jobs : workers
+    planes : samples of a pixel
 
     Returns
     -------
     int : kept patches and candidates as if side by side, the candidates in flight, the frames
         being decoded (24 bytes a pixel: file, decoded colour, codes and mask).
     """
-    row = 4 * settings.size**2 + 24
+    row = 4 * planes * settings.size**2 + 20 + 4 * planes
     drawn = quota(settings, frames)
     kept = min(settings.patches, frames * (settings.per_frame or settings.patches))
     held = (kept + drawn * frames) * row
     flight = (2 * jobs if jobs > 1 else 1) * drawn * row
-    return held + flight + max(jobs, 1) * 24 * pixels
+    return held + flight + max(jobs, 1) * (16 + 8 * planes) * pixels
 
 
 # ---------------------------------------------------------------- one frame
@@ -156,13 +166,15 @@ def sample_frame(frame: Frame, table: InputTable, settings: SampleSettings, budg
     ------
     InputError : the frame's pixels are not those of the table.
     """
-    if min(frame.pixels.shape) < settings.size:
-        return _part(frame.path, settings.size, [], {SMALL: 1})
+    form = frame.contract.format
+    if min(frame.shape) < settings.size:
+        return _part(frame.path, settings.size, form.planes, [], {SMALL: 1})
+    samples = form.split(frame.pixels)
     taken: list[_Block] = []
     rejected = dict.fromkeys(REASONS, 0)
     missing = budget
     for origin in _positions(frame, settings, budget):
-        codes = _gather(frame.pixels, origin, settings.size)
+        codes = _gather(samples, origin, settings.size)
         reason = _judge(frame, codes, origin, table)
         good = np.flatnonzero(reason == 0)[:missing]
         end = len(reason) if len(good) < missing else int(good[-1]) + 1
@@ -172,15 +184,19 @@ def sample_frame(frame: Frame, table: InputTable, settings: SampleSettings, budg
         missing -= len(good)
         if not missing:
             break
-    return _part(frame.path, settings.size, taken, rejected)
+    return _part(frame.path, settings.size, form.planes, taken, rejected)
 
 
 _Block = tuple[NDArray[np.int32], F32, F32, F32, F32]
 
 
-def _part(path: str, size: int, blocks: list[_Block], rejected: Mapping[str, int]) -> Part:
+def _part(
+    path: str, size: int, planes: int, blocks: list[_Block], rejected: Mapping[str, int]
+) -> Part:
     one = np.zeros(0, np.float32)
-    empty: _Block = (np.zeros((0, 2), np.int32), np.zeros((0, size**2), np.float32), one, one, one)
+    dc = one if planes == 1 else np.zeros((0, planes), np.float32)
+    rows = np.zeros((0, planes * size**2), np.float32)
+    empty: _Block = (np.zeros((0, 2), np.int32), rows, dc, one, one)
     origin, patches, dc, sd, contrast = (
         np.concatenate(column) for column in zip(empty, *blocks, strict=True)
     )
@@ -191,7 +207,7 @@ def _positions(frame: Frame, settings: SampleSettings, budget: int) -> Iterator[
     """A frame's sequence of top-left corners, (n, 2) at a time, none twice."""
     draw = rng(settings.seed, frame.path)
     step = frame.contract.lattice
-    height, width = ((side - settings.size) // step + 1 for side in frame.pixels.shape)
+    height, width = ((side - settings.size) // step + 1 for side in frame.shape)
     seen = np.zeros(0, np.int64)
     for _ in range(max(4, math.ceil(_PATIENCE * budget / _BLOCK))):
         block = draw.integers(0, height * width, size=_BLOCK)
@@ -205,11 +221,17 @@ def _positions(frame: Frame, settings: SampleSettings, budget: int) -> Iterator[
 
 
 def _gather(
-    plane: NDArray[np.generic], origin: NDArray[np.int32], size: int
+    samples: NDArray[np.generic], origin: NDArray[np.int32], size: int
 ) -> NDArray[np.generic]:
-    """Patches (n, size * size) at top-left corners (n, 2)."""
-    windows = sliding_window_view(plane, (size, size))
-    return windows[origin[:, 0], origin[:, 1]].reshape(len(origin), size * size)
+    """Patches (n, size * size * samples) of (h, w, samples) at top-left corners (n, 2)."""
+    windows = sliding_window_view(samples, (size, size), axis=(0, 1))
+    tiles = windows[origin[:, 0], origin[:, 1]]  # (n, samples, size, size)
+    return np.moveaxis(tiles, 1, -1).reshape(len(origin), -1)
+
+
+def _by_plane(rows: NDArray[Any], planes: int) -> NDArray[Any]:
+    """Patches (n, d) as (n, pixels, samples); one plane stays as it is."""
+    return rows if planes == 1 else rows.reshape(len(rows), -1, planes)
 
 
 def _judge(
@@ -217,16 +239,25 @@ def _judge(
 ) -> NDArray[np.uint8]:
     """0 for a patch that can serve, else 1 + its place in :data:`REASONS`."""
     low, high = trusted_codes(table)
+    planes = frame.contract.format.planes
     darkest, brightest = codes.min(axis=1), codes.max(axis=1)
-    reason = np.where(darkest == brightest, 3, 0).astype(np.uint8)
+    reason = np.where(_flat(codes, planes), 3, 0).astype(np.uint8)
     if table.noise_sd is not None:
-        sd = table.apply(codes).std(axis=1, dtype=np.float64)
+        sd = _by_plane(table.apply(codes), planes).std(axis=1, dtype=np.float64)
+        sd = sd if planes == 1 else np.sqrt((sd**2).mean(axis=1))
         reason[(reason == 0) & (sd < NOISE_MULTIPLE * table.noise_sd)] = 4
     reason[(darkest < low) | (brightest > high)] = 2
     if frame.invalid is not None:
-        size = math.isqrt(codes.shape[1])
-        reason[_gather(frame.invalid, origin, size).any(axis=1)] = 1
+        size = math.isqrt(codes.shape[1] // planes)
+        reason[_gather(frame.invalid[..., None], origin, size).any(axis=1)] = 1
     return reason
+
+
+def _flat(codes: NDArray[np.generic], planes: int) -> NDArray[np.bool_]:
+    """Patches whose pixels are all equal, in every plane by itself."""
+    own = _by_plane(codes, planes)
+    equal = own.min(axis=1) == own.max(axis=1)
+    return np.asarray(equal if planes == 1 else equal.all(axis=1))
 
 
 def trusted_codes(table: InputTable) -> tuple[float, float]:
@@ -242,8 +273,9 @@ def _prepare(
 ) -> _Block:
     """Working values with the DC out, and divided by the contrast."""
     values: F64 = table.apply(codes).astype(np.float64)
-    dc = values.mean(axis=1)
-    values -= dc[:, None]
+    own = _by_plane(values, table.contract.format.planes)  # a view
+    dc = own.mean(axis=1)
+    own -= dc[:, None]
     sd = np.sqrt(np.einsum("ij,ij->i", values, values) / values.shape[1])
     contrast = sd if normalise else np.ones_like(sd)
     values /= contrast[:, None]
@@ -386,9 +418,10 @@ def _pack(
     parts: list[Part], keep: NDArray[np.bool_], size: int, counts: Mapping[str, int]
 ) -> PatchSet:
     total = int(keep.sum())
-    patches = np.empty((total, size * size), dtype=np.float32)
+    wide, planes = parts[0].patches.shape[1], parts[0].dc.shape[1:]
+    patches = np.empty((total, wide), dtype=np.float32)
     small = [np.empty(total, np.int32), np.empty((total, 2), np.int32)]
-    told = [np.empty(total, np.float32), np.empty(total, np.float32)]
+    told = [np.empty((total, *planes), np.float32), np.empty(total, np.float32)]
     paths = tuple(part.path for part in parts)
     at = seen = 0
     parts.reverse()

@@ -99,7 +99,7 @@ def learn_ica(
     Sources: Ablin, Cardoso & Gramfort 2018, IEEE Trans. Signal Process. 66:4040 and ICASSP
     2018; the choice of densities, Lee, Girolami & Sejnowski 1999, Neural Comput. 11:417.
     """
-    if whitening.mean.size != patch_set.size**2:
+    if whitening.mean.size != patch_set.patches.shape[1]:
         raise UsageError("the whitening belongs to another patch size", where="whitening")
     _check_options(restarts, tolerance, max_iterations, density, jobs)
     if resamples < 0:
@@ -402,8 +402,7 @@ def _result(
         pooled=others,
         warnings=warnings_for(runs, best, seen, kurtosis(held.rows, unit)),
     )
-    k = len(found)
-    sets = list(found.pooled_atoms.reshape(-1, k, found.size, found.size))
+    sets = list(found.pooled_atoms.reshape(-1, *found.atoms.shape))
     anew = [components_of(W, learner.whitening)[1] for W in learner.relearned(run, resamples)]
     return replace(
         found,

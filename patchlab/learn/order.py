@@ -7,6 +7,7 @@ from typing import Literal
 import numpy as np
 from numpy.typing import NDArray
 
+from patchlab.conventions import tile_shape
 from patchlab.errors import UsageError
 from patchlab.types import F64, Dictionary, Whitening
 
@@ -67,13 +68,14 @@ def dictionary(
 
     ``pooled`` holds the atoms (k, d) of further restarts.
     """
-    size = round(atoms.shape[1] ** 0.5)
+    d = atoms.shape[1]
+    tile = tile_shape(round((d / whitening.planes) ** 0.5), d)
     pool = np.concatenate([atoms, *pooled])
     pool = pool / np.maximum(np.linalg.norm(pool, axis=1, keepdims=True), 1e-300)
     return Dictionary(
         method=method,
-        filters=np.ascontiguousarray(filters.reshape(-1, size, size)),
-        atoms=np.ascontiguousarray(atoms.reshape(-1, size, size)),
+        filters=np.ascontiguousarray(filters.reshape(-1, *tile)),
+        atoms=np.ascontiguousarray(atoms.reshape(-1, *tile)),
         contribution=np.sum(atoms**2, axis=1) / whitening.spectrum.sum(),
         kurtosis=kurtosis[order],
         identified=identified[order],
@@ -83,7 +85,7 @@ def dictionary(
         curve=curve,
         log_likelihood=log_likelihood,
         whitening=whitening,
-        pooled_atoms=np.ascontiguousarray(pool.reshape(-1, size, size)),
+        pooled_atoms=np.ascontiguousarray(pool.reshape(-1, *tile)),
         warnings=warnings,
     )
 

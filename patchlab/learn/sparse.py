@@ -89,7 +89,7 @@ def learn_sparse(
     """
     used = leading(whitening, None)
     penalty = PENALTY if penalty is None else penalty
-    if used.mean.size != patch_set.size**2:
+    if used.mean.size != patch_set.patches.shape[1]:
         raise UsageError("the whitening belongs to another patch size", where="whitening")
     check_options(used, atoms, penalty, tolerance, max_iterations, jobs)
     with one_thread(), threads(jobs) as mapper:

@@ -73,6 +73,8 @@ def found_again(atoms: F64, others: list[F64]) -> F64:
 def shape_numbers(atoms: F64) -> dict[str, F64]:
     """Orientation, frequency and size of atoms (k, size, size), from their moments.
 
+    Of colour atoms (k, size, size, samples) the moments of all planes are added.
+
     Returns
     -------
     dict of ndarray (k,): ``orientation`` of the wave vector in [0, pi), ``frequency`` in
@@ -82,11 +84,13 @@ def shape_numbers(atoms: F64) -> dict[str, F64]:
     k, size = len(atoms), atoms.shape[1]
     padded = 4 * size
     f = np.fft.fftfreq(padded)
-    power = np.abs(np.fft.fft2(atoms, (padded, padded))) ** 2
+    planes = np.moveaxis(atoms if atoms.ndim == 4 else atoms[..., None], -1, 0)
+    power = np.sum([np.abs(np.fft.fft2(p, (padded, padded))) ** 2 for p in planes], axis=0)
     power /= np.maximum(power.sum(axis=(1, 2), keepdims=True), 1e-300)
     wave = f[None, :] + 1j * f[:, None]
     turn = np.sum(power * wave**2, axis=(1, 2))
-    energy = atoms**2 / np.maximum(np.sum(atoms**2, axis=(1, 2), keepdims=True), 1e-300)
+    energy = np.sum(planes**2, axis=0)
+    energy = energy / np.maximum(np.sum(energy, axis=(1, 2), keepdims=True), 1e-300)
     place = (np.arange(size)[None, :] + 1j * np.arange(size)[:, None])[None]
     middle = np.sum(energy * place, axis=(1, 2)).reshape(k, 1, 1)
     spread = np.sum(energy * np.abs(place - middle) ** 2, axis=(1, 2))
@@ -106,8 +110,7 @@ def shape_spread(known: Dictionary) -> dict[str, dict[str, float]]:
     exceed once in twenty (asymptotic, Stephens 1970, J. R. Stat. Soc. B 32:115). Empty with
     one restart.
     """
-    k = len(known)
-    sets = known.pooled_atoms.reshape(-1, k, known.size, known.size)
+    sets = known.pooled_atoms.reshape(-1, *known.atoms.shape)
     if len(sets) < 2:
         return {}
     numbers = [shape_numbers(s) for s in sets]

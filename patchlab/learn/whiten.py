@@ -174,17 +174,18 @@ def whiten(
     UsageError : a parameter out of its range.
     InputError : constant patches, not more patches than directions, or values not finite.
     """
-    patches, kept = patch_set.patches, len(patch_set)
+    patches, kept, values = patch_set.patches, len(patch_set), patch_set.patches.shape[1]
     if held_out is not None:
         train = np.sort(split(kept, held_out)[0])
         kept = train.size
-    if kept <= patch_set.size**2:
+    if kept <= values:
         raise InputError(
-            f"{kept} patches cannot whiten {patch_set.size**2} pixels",
-            remedy=f"sample more than {patch_set.size**2} patches, or use a smaller patch",
+            f"{kept} patches cannot whiten {values} pixels",
+            remedy=f"sample more than {values} patches, or use a smaller patch",
         )
     known = moments(patches if held_out is None else (patches[at] for at in _pieces(train)))
-    return whitening(known, retain=retain, rank=rank, form=form, noise=noise)
+    planes = patch_set.planes
+    return whitening(known, retain=retain, rank=rank, form=form, noise=noise, planes=planes)
 
 
 def _pieces(index: NDArray[np.int64]) -> Iterator[NDArray[np.int64]]:
@@ -192,7 +193,10 @@ def _pieces(index: NDArray[np.int64]) -> Iterator[NDArray[np.int64]]:
 
 
 def noise_covariance(
-    patch_set: PatchSet, noise_sd: float, autocovariance: F64 | None = None
+    patch_set: PatchSet,
+    noise_sd: float,
+    autocovariance: F64 | None = None,
+    sample_noise: F64 | None = None,
 ) -> F64:
     """What the camera's noise adds to the covariance of normalised patches.
 
@@ -201,11 +205,23 @@ def noise_covariance(
     patch_set : PatchSet; each patch was divided by its own contrast, and its noise with it
     noise_sd : standard deviation of the noise in working values
     autocovariance : ndarray (2m + 1, 2m + 1) of the noise, centre 1; None means white
+    sample_noise : ndarray (samples,), of colour pixels the standard deviation of the noise in
+        each plane, independent from plane to plane; None or empty means ``noise_sd`` for all
 
     Returns
     -------
     ndarray (d, d)
     """
+    if patch_set.planes > 1:
+        sds = np.full(patch_set.planes, noise_sd)
+        if sample_noise is not None and sample_noise.size:
+            sds = sample_noise
+        return np.asarray(np.kron(_plane_noise(patch_set, 1.0, autocovariance), np.diag(sds**2)))
+    return _plane_noise(patch_set, noise_sd, autocovariance)
+
+
+def _plane_noise(patch_set: PatchSet, noise_sd: float, autocovariance: F64 | None) -> F64:
+    """Covariance (size * size, size * size) of the noise in one plane."""
     d = patch_set.size**2
     power = noise_sd**2 * float(np.mean(1 / patch_set.contrast.astype(np.float64) ** 2))
     if autocovariance is None:
@@ -226,16 +242,18 @@ def whitening(
     form: Literal["pca", "zca"] = "pca",
     noise: F64 | None = None,
     keep_dc: bool = False,
+    planes: int = 1,
 ) -> Whitening:
     """Whitening from moments; the parameters and errors of :func:`whiten`.
 
     ``K D`` is the identity (pca) or the projector on the kept directions (zca). With
-    ``keep_dc`` the constant direction stays: for rows that are not patches.
+    ``keep_dc`` the constant direction stays: for rows that are not patches. Of colour patches
+    the constant of each of the ``planes`` goes: a row holds a pixel's samples side by side.
     """
-    d = known.mean.size
-    _check_options(d, retain, rank, form, keep_dc)
+    d, constants = known.mean.size, 0 if keep_dc else planes
+    _check_options(d, retain, rank, form, constants)
     with one_thread():
-        spectrum, U = _eigen(known.covariance, keep_dc)
+        spectrum, U = _eigen(known.covariance, constants)
     numeric = _numeric_rank(known, spectrum)
     if rank is None:
         rank, notes = cut(spectrum[:numeric], retain, known.samples)
@@ -252,8 +270,11 @@ def whitening(
     if form == "zca":
         K, D = U @ K, D @ U.T
         K, D = (K + K.T) / 2, (D + D.T) / 2
-    mean = known.mean if keep_dc else known.mean - known.mean.mean()
-    removed = _removed(spectrum, rank, numeric, notes)[keep_dc:]
+    mean = known.mean
+    if not keep_dc:
+        own = mean.reshape(-1, planes)
+        mean = (own - own.mean(axis=0)).ravel() if planes > 1 else mean - mean.mean()
+    removed = _removed(spectrum, rank, numeric, notes, planes)[keep_dc:]
     return Whitening(
         np.ascontiguousarray(K),
         np.ascontiguousarray(D),
@@ -263,36 +284,38 @@ def whitening(
         form,
         removed,
         known.samples,
+        planes,
     )
 
 
-def _check_options(d: int, retain: float, rank: int | None, form: str, keep_dc: bool) -> None:
+def _check_options(d: int, retain: float, rank: int | None, form: str, constants: int) -> None:
     if not 0 < retain <= 1:
         raise UsageError(f"retain {retain} is not in (0, 1]", where="retain")
-    if rank is not None and not 1 <= rank < d + keep_dc:
+    most = d - constants
+    if rank is not None and not 1 <= rank <= most:
         raise UsageError(
-            f"rank {rank} is not in 1 to {d - 1 + keep_dc}",
+            f"rank {rank} is not in 1 to {most}",
             where="rank",
-            remedy="" if keep_dc else f"{d} pixels less the patch mean leave {d - 1} directions",
+            remedy=f"{d} pixels less the patch mean leave {most} directions" if constants else "",
         )
     if form not in ("pca", "zca"):
         raise UsageError(f"unknown form {form!r}", where="form", remedy="choose pca or zca")
 
 
-def _eigen(covariance: F64, keep_dc: bool) -> tuple[F64, F64]:
-    """Eigenvalues (d,), falling, and (d, d - 1) eigenvectors, all orthogonal to the constant.
+def _eigen(covariance: F64, constants: int) -> tuple[F64, F64]:
+    """Eigenvalues (d,), falling, and (d, d - constants) eigenvectors, orthogonal to the constants.
 
-    With ``keep_dc``, all d eigenvectors.
+    There is a constant for each plane, or none: then all d eigenvectors.
 
     The problem is solved in an orthonormal basis of the zero-mean patches, so the DC is
-    gone by construction; its eigenvalue is listed last, as zero. Each vector's largest
+    gone by construction; its eigenvalues are listed last, as zeros. Each vector's largest
     absolute entry is positive.
     """
     d = len(covariance)
     basis = np.eye(d)
-    if not keep_dc:
-        ones = np.ones((d, 1)) / np.sqrt(d)
-        basis = np.linalg.qr(np.hstack([ones, basis[:, 1:]]))[0][:, 1:]
+    if constants:
+        each = np.tile(np.eye(constants), (d // constants, 1)) / np.sqrt(d // constants)
+        basis = np.linalg.qr(np.hstack([each, basis[:, constants:]]))[0][:, constants:]
     values, vectors = np.linalg.eigh(basis.T @ covariance @ basis)
     U = basis @ vectors[:, ::-1]
     U *= np.sign(U[np.argmax(np.abs(U), axis=0), np.arange(U.shape[1])])
@@ -374,17 +397,20 @@ def _above_noise(
     return clear, [*notes, note]
 
 
-def _removed(spectrum: F64, rank: int, numeric: int, notes: list[str]) -> tuple[str, ...]:
-    lines = ["the patch mean (DC): projected out exactly", *notes]
+def _removed(
+    spectrum: F64, rank: int, numeric: int, notes: list[str], planes: int
+) -> tuple[str, ...]:
+    what = "the patch mean (DC)" if planes == 1 else "the mean of each plane of a patch (DC)"
+    lines = [f"{what}: projected out exactly", *notes]
     if rank < numeric:
         lost = spectrum[rank:numeric].sum() / spectrum.sum()
         lines.append(
             f"directions {rank + 1} to {numeric}: {100 * lost:.3g} % of the variance, "
             "beyond the cut"
         )
-    if numeric < spectrum.size - 1:
+    if numeric < spectrum.size - planes:
         lines.append(
-            f"directions {numeric + 1} to {spectrum.size - 1}: no variance beyond rounding"
+            f"directions {numeric + 1} to {spectrum.size - planes}: no variance beyond rounding"
         )
     return tuple(lines)
 

@@ -98,7 +98,13 @@ def _work(task: _Task) -> dict[str, Any]:
 def read_options(bank: Bank) -> images.ReadOptions:
     """How pictures for a bank are read: as its input contract says."""
     c = bank.contract
-    known = images.ReadOptions(white=c.white, black=c.black, transfer=c.transfer, pixels=c.pixels)
+    known = images.ReadOptions(
+        white=c.white,
+        black=c.black,
+        transfer=c.transfer,
+        pixels=c.pixels,
+        planes="colour" if c.format.planes > 1 else "luminance",
+    )
     plane = c.plane.rpartition(" ")[2]
     return replace(known, bayer=plane) if plane else known  # type: ignore[arg-type]
 

@@ -66,7 +66,9 @@ def take_in_extras(photos: images.Intake, desk: Desk) -> Extras:
         _same_size(dark, photos)
     edge = None
     if s.slanted_edge is not None:
-        edge = _folder(Path(s.slanted_edge), replace(photos.options, pixels=None), desk)
+        edge = _folder(
+            Path(s.slanted_edge), replace(photos.options, pixels=None, planes="luminance"), desk
+        )
         if len(edge.frames) > 1:
             raise InputError(
                 f"the slanted edge is one picture, not {len(edge.frames)}",

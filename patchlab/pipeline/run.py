@@ -13,7 +13,7 @@ from patchlab import bank as banks
 from patchlab import camera, cluster, edges, images, learn, shapes, store
 from patchlab.errors import InputError, UsageError
 from patchlab.export import parse_targets
-from patchlab.pipeline import tell
+from patchlab.pipeline import colour, tell
 from patchlab.pipeline.bundle import write_bundle
 from patchlab.pipeline.desk import RECIPE, Desk, bank_name, clear_after
 from patchlab.pipeline.keep import Keeper
@@ -50,6 +50,7 @@ def take_in(photos: Path, desk: Desk) -> images.Intake:
         pixel_limit=s.pixel_limit,
         raw=_raw_layout(desk),
         bayer=s.bayer,  # type: ignore[arg-type]  # checked by the settings
+        planes=s.planes,  # type: ignore[arg-type]  # checked by the settings
     )
     with desk.timed("reading"):
         intake = images.take_in(
@@ -88,13 +89,11 @@ def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
     about["body"]["measured_on"] = extras.inputs
 
     def make() -> Survey:
-        return camera.survey(
+        return colour.survey(
             functools.partial(images.iterate, intake.thinned(camera.MAX_FRAMES)),
             intake.contract,
+            extras,
             kind=kind,
-            static=extras.static_frames(),
-            dark=extras.dark_frames(),
-            edge=extras.edge_frame(),
             mixed=desk.settings.mixed_cameras,
             progress=desk.progress,
         )
@@ -117,12 +116,12 @@ def _example(intake: images.Intake) -> Frame:
     if isinstance(pages, Quarantined):
         raise InputError(pages.reason, where=pages.path)
     frame = pages[middle.page]
-    top, left = (
-        max(0, (n - limit) // 2) for n, limit in zip(frame.pixels.shape, EXAMPLE, strict=True)
-    )
+    top, left = (max(0, (n - limit) // 2) for n, limit in zip(frame.shape, EXAMPLE, strict=True))
     rows, cols = slice(top, top + EXAMPLE[0]), slice(left, left + EXAMPLE[1])
     mask = None if frame.invalid is None else frame.invalid[rows, cols]
-    return replace(frame, pixels=frame.pixels[rows, cols].copy(), invalid=mask)
+    form = frame.contract.format
+    part = form.joined(form.split(frame.pixels)[rows, cols])
+    return replace(frame, pixels=part.copy(), invalid=mask)
 
 
 def trusted(intake: images.Intake, found: Survey, desk: Desk) -> images.Intake:
@@ -148,7 +147,11 @@ def sample(intake: images.Intake, found: Survey, parent: Head, desk: Desk) -> tu
         normalise=s.normalise,
     )
     taken = images.memory_needed(
-        settings, pixels=intake.largest, frames=len(intake.frames), jobs=desk.jobs
+        settings,
+        pixels=intake.largest,
+        frames=len(intake.frames),
+        jobs=desk.jobs,
+        planes=intake.contract.format.planes,
     )
     need = taken / 2**30 + 0.3  # the libraries themselves
     desk.tell(f"  at most {need:.1f} GiB of memory will be used")
@@ -185,7 +188,9 @@ def learn_basis(
         noise = None
         if found.table.noise_sd is not None:
             coloured = found.noise.autocovariance
-            noise = learn.noise_covariance(patches, found.table.noise_sd, coloured)
+            noise = learn.noise_covariance(
+                patches, found.table.noise_sd, coloured, found.sample_noise
+            )
         whitening = learn.whiten(patches, retain=s.retain, noise=noise, held_out=s.seed)
         choice, components = None, None if s.components == "auto" else s.components
         if s.components == "auto" and not sparse:
@@ -236,15 +241,14 @@ def learn_basis(
     return (learned, baseline), head
 
 
-def fit(dictionary: Dictionary, parent: Head, desk: Desk) -> tuple[tuple[KernelFits, ...], Head]:
+def fit(
+    dictionary: Dictionary, parent: Head, desk: Desk, colours: str = ""
+) -> tuple[tuple[KernelFits, ...], Head]:
     """Describe atoms and filters by parametric kernels."""
     about = {"settings": {}, "parents": {"dictionary": parent["id"]}}
 
     def make() -> tuple[KernelFits, ...]:
-        return (
-            shapes.fit_kernels(dictionary.atoms, "atoms", progress=desk.progress),
-            shapes.fit_kernels(dictionary.filters, "filters", progress=desk.progress),
-        )
+        return colour.fit(dictionary, colours, desk.progress)
 
     def tables(fits: tuple[KernelFits, ...]) -> dict[str, bytes]:
         made = {f"fits_{f.of}.csv": shapes.fits_csv(f) for f in fits}
@@ -269,7 +273,10 @@ def choose(
         desk.tell(f"  {len(flagged)} components that describe a mark are kept out of the bank")
     with desk.timed("bank"):
         if s.as_learned:
-            bank = banks.bank_as_learned(dictionary, found, name, s.border, fits[1])
+            as_learned = banks.bank_as_learned
+            if dictionary.planes > 1:
+                as_learned = banks.colour_bank_as_learned
+            bank = as_learned(dictionary, found, name, s.border, fits[1])
         else:
             settings = banks.BankSettings(
                 kernels=s.kernels,
@@ -280,9 +287,16 @@ def choose(
                 name=name,
                 seed=s.seed,
             )
+            plain = colour.one_plane(found)
             bank = banks.choose_bank(
-                dictionary, fits[0], found, settings, patch_contrast=patches.contrast
+                colour.profiles(dictionary),
+                fits[0],
+                plain,
+                settings,
+                patch_contrast=patches.contrast,
             )
+            if dictionary.planes > 1:
+                bank = banks.colour_bank(bank, found)
     known = {
         **bank.provenance,
         "blur_sigma_px": found.blur_sigma_px,
@@ -302,7 +316,11 @@ def choose(
 def marked(dictionary: Dictionary, found: Survey, patches: PatchSet) -> tuple[tuple[int, str], ...]:
     """Components that describe a mark of the camera rather than the scene."""
     return camera.flag_components(
-        dictionary.atoms, dictionary.filters, patches.patches, patches.origin, found.marks
+        colour.profiles(dictionary).atoms,
+        dictionary.filters,
+        patches.patches,
+        patches.origin,
+        found.marks,
     )
 
 
@@ -389,7 +407,7 @@ def _work(photos: Path, desk: Desk, until: str) -> dict[str, Any]:
     (dictionary, _), dictionary_head = learn_basis(patches, found, patches_head, desk)
     if until == "learn":
         return tell.learned(dictionary, patches, desk)
-    fits, fits_head = fit(dictionary, dictionary_head, desk)
+    fits, fits_head = fit(dictionary, dictionary_head, desk, found.contract.format.colours)
     name = bank_name(desk.out, desk.settings)
     bank = choose(dictionary, fits, found, patches, name, desk)
     with desk.timed("export"):
@@ -418,5 +436,6 @@ def standing_dictionary(desk: Desk) -> tuple[Dictionary, dict[str, Any]]:
 def fit_run(desk: Desk) -> dict[str, Any]:
     """Fit the components of a run's dictionary."""
     dictionary, head = standing_dictionary(desk)
-    (atom_fits, filter_fits), _ = fit(dictionary, head, desk)
+    found, _ = store.load(desk.out / "survey", "survey")
+    (atom_fits, filter_fits), _ = fit(dictionary, head, desk, found.contract.format.colours)
     return {"atoms": tell.fits(atom_fits), "filters": tell.fits(filter_fits)}

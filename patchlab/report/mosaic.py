@@ -1,7 +1,8 @@
 """Mosaics of kernels and pictures of edges: arrays to PNG, no axes, nothing resampled.
 
 Tiles of one mosaic share a grey scale that is symmetric about zero: mid-grey is
-zero, and every tile is scaled to unit norm first, so shapes can be compared.
+zero, and every tile is scaled to unit norm first, so shapes can be compared. Colour
+tiles share one scale for red, green and blue, so what is grey in them has no colour.
 """
 
 from __future__ import annotations
@@ -14,6 +15,7 @@ import numpy as np
 from numpy.typing import NDArray
 from PIL import Image, ImageDraw, ImageFont
 
+from patchlab.conventions import rgb_weights
 from patchlab.types import Bank, EdgeMap, Frame
 
 Bytes = NDArray[np.uint8]
@@ -30,13 +32,16 @@ def png(image: Image.Image) -> bytes:
 
 
 def grey(tile: NDArray[Any], limit: float, zoom: int) -> Bytes:
-    """A kernel as grey values: -limit black, 0 mid-grey, limit white; pixels repeated."""
+    """A kernel as grey values: -limit black, 0 mid-grey, limit white; pixels repeated.
+
+    A colour kernel (h, w, 3) as red, green and blue on the same scale.
+    """
     scaled = np.clip(tile / (limit or 1.0), -1, 1) * 127.5 + 127.5
     return np.repeat(np.repeat(np.rint(scaled).astype(np.uint8), zoom, 0), zoom, 1)
 
 
 def _unit(tiles: NDArray[Any]) -> NDArray[Any]:
-    norms = np.sqrt((tiles**2).sum(axis=(1, 2), keepdims=True))
+    norms = np.sqrt((tiles**2).sum(axis=tuple(range(1, tiles.ndim)), keepdims=True))
     return np.asarray(tiles / np.where(norms > 0, norms, 1.0))
 
 
@@ -58,7 +63,7 @@ def mosaic(
 
     Parameters
     ----------
-    columns : arrays (k, h, w); cell i shows tile i of each, left to right
+    columns : arrays (k, h, w) or (k, h, w, 3); cell i shows tile i of each, left to right
     labels : k short texts above the cells
     verdicts : k of good, poor, failed: the colour of the line under each cell
     across : cells in a row
@@ -72,7 +77,7 @@ def mosaic(
     scaled = [np.asarray(tiles, dtype=np.float64) for tiles in columns]
     scaled = scaled if as_is else [_unit(tiles) for tiles in scaled]
     limit = max(limit_of(tiles) for tiles in scaled)
-    k, h, w = scaled[0].shape
+    k, h, w = scaled[0].shape[:3]
     cell_w, cell_h = len(scaled) * (w * zoom + 2) - 2, h * zoom
     across = min(across, k)
     rows = -(-k // across)
@@ -95,9 +100,12 @@ def mosaic(
     return png(sheet)
 
 
-def bank_sheet(bank: Bank, zoom: int = 5) -> bytes:
-    """Each kernel of a bank above the magnitude of its spectrum, one row a scale and parity."""
-    taps = bank.taps.astype(np.float64)
+def bank_sheet(bank: Bank, zoom: int = 5, taps: NDArray[Any] | None = None) -> bytes:
+    """Each kernel of a bank above the magnitude of its spectrum, one row a scale and parity.
+
+    ``taps`` are (n, h, h, 3) in red, green and blue, to show a colour bank's kernels.
+    """
+    taps = bank.taps.astype(np.float64) if taps is None else taps
     groups: dict[tuple[Any, str], list[int]] = {}
     for i, kernel in enumerate(bank.kernels):
         groups.setdefault((kernel.scale, kernel.parity), []).append(i)
@@ -117,21 +125,32 @@ def bank_sheet(bank: Bank, zoom: int = 5) -> bytes:
         limit = float(np.abs(taps[members]).max())
         for column, i in enumerate(members):
             x, y = GAP + column * (side + GAP), row * height + GAP
-            draw.text((x, y - 2), bank.kernels[i].name, FAINT, font=font)
+            name = bank.kernels[i].name  # the tile itself shows which plane it is of
+            label = name[-10:].lstrip("_") if bank.planes > 1 else name
+            draw.text((x, y - 2), label, FAINT, font=font)
             sheet.paste(Image.fromarray(grey(taps[i], limit, zoom)), (x, y + LABEL))
             sheet.paste(_spectrum(taps[i], side), (x, y + LABEL + side + 3))
     return png(sheet)
 
 
 def _spectrum(kernel: NDArray[Any], side: int) -> Image.Image:
-    magnitude = np.abs(np.fft.fftshift(np.fft.fft2(kernel, (side, side))))
+    planes = kernel.reshape(*kernel.shape[:2], -1)
+    whole = np.linalg.norm(np.fft.fft2(planes, (side, side), axes=(0, 1)), axis=2)
+    magnitude = np.fft.fftshift(whole)
     shown = np.rint(255 * magnitude / (magnitude.max() or 1.0)).astype(np.uint8)
     return Image.fromarray(255 - shown)
 
 
 def preview(frame: Frame) -> Bytes:
-    """A frame's codes as an 8-bit picture for the eye: square-root tone, 99.8 % stretch."""
-    light = np.sqrt(frame.contract.light(frame.pixels))
+    """A frame's codes as an 8-bit picture for the eye: square-root tone, 99.8 % stretch.
+
+    (h, w), or (h, w, 3) of colours.
+    """
+    form = frame.contract.format
+    codes = frame.pixels
+    if form.planes > 1:
+        codes = form.split(codes).astype(np.float64) @ rgb_weights(form.colours).T
+    light = np.sqrt(frame.contract.light(codes))
     low, high = np.quantile(light, (0.002, 0.998))
     span = high - low or 1.0
     return np.asarray(np.rint(255 * np.clip((light - low) / span, 0, 1)), dtype=np.uint8)
@@ -147,7 +166,7 @@ def wheel(count: int) -> NDArray[np.uint8]:
 def overlay(frame: Frame, found: EdgeMap, orientations: int) -> Image.Image:
     """The picture, dimmed, with its edge elements coloured by the direction of their normal."""
     base = (0.35 * preview(frame) + 20).astype(np.uint8)
-    colour = np.stack([base] * 3, axis=-1)
+    colour = np.stack([base] * 3, axis=-1) if base.ndim == 2 else base
     colour[found.edges] = wheel(orientations)[found.orientation[found.edges] % orientations]
     return Image.fromarray(colour)
 

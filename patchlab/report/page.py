@@ -12,9 +12,10 @@ import jinja2
 import numpy as np
 
 from patchlab import store
+from patchlab.images.planes import one_plane
 from patchlab.pipeline import use
 from patchlab.progress import Progress, silent
-from patchlab.report import assess, camera, mosaic, parts, plots, sure
+from patchlab.report import assess, camera, colour, mosaic, parts, plots, sure
 
 SHOWN = 96
 """Most components drawn in one mosaic; the page says how many there are."""
@@ -55,8 +56,10 @@ def _pictures(c: use.RunContent) -> Mapping[str, Callable[[], bytes]]:
         "quality": lambda: plots.fit_quality(c.atom_fits, c.filter_fits),
         "directions": lambda: plots.orientation_and_frequency(c.atom_fits),
         "sizes": lambda: plots.sizes(c.atom_fits, c.bank),
-        "bank": lambda: mosaic.bank_sheet(c.bank),
+        "bank": lambda: mosaic.bank_sheet(c.bank, taps=colour.bank_taps(c.bank)),
     }
+    if c.atom_fits.colours:
+        makers["colours"] = lambda: colour.directions(c.atom_fits, c.filter_fits)
     if sure.measured(c.dictionary):
         makers["sure"] = lambda: sure.how_sure(c.dictionary)
     choice = c.dictionary.choice
@@ -70,7 +73,7 @@ def _pictures(c: use.RunContent) -> Mapping[str, Callable[[], bytes]]:
     if c.survey.edge_widths_px.size or c.survey.slanted_edge is not None:
         makers["spread"] = lambda: camera.edge_spread(c.survey)
     if c.frame is not None:
-        crops = camera.mark_crops(c.survey, c.frame)
+        crops = camera.mark_crops(c.survey, one_plane(c.frame))
         if crops is not None:
             makers["marks"] = lambda: crops
     if c.bank.coverage is not None:
@@ -96,8 +99,10 @@ def _beside_fits(kernels: Any, fits: Any) -> bytes:
 
     shown = kernels[:SHOWN]
     drawn = np.stack([render(f.family, f.parameters, fits.size) for f in fits.fits[:SHOWN]])
+    if fits.colours:
+        drawn = colour.drawn_fits(drawn, fits)
     return mosaic.mosaic(
-        [shown, drawn],
+        [colour.in_rgb(tiles, fits.colours) for tiles in (shown, drawn)],
         [
             f"{f.index + 1}  {f.family}  {f.r2:.2f}".replace("centre_surround", "c-s")
             for f in fits.fits[:SHOWN]
@@ -109,7 +114,7 @@ def _beside_fits(kernels: Any, fits: Any) -> bytes:
 
 
 def _baseline(c: use.RunContent) -> bytes:
-    atoms = c.baseline.atoms[:32]
+    atoms = colour.in_rgb(c.baseline.atoms[:32], c.atom_fits.colours)
     labels = [str(i + 1) for i in range(len(atoms))]
     return mosaic.mosaic([atoms], labels, across=16, zoom=max(1, 48 // c.baseline.size))
 
@@ -132,4 +137,5 @@ def _render(c: use.RunContent, pictures: Mapping[str, bytes]) -> str:
         shown=SHOWN,
         how_sure=sure.in_words(c.dictionary),
         about_parts=parts.in_words(*c.parts) if c.parts else "",
+        colours=colour.in_words(c.atom_fits),
     )

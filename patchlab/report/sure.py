@@ -32,7 +32,7 @@ def how_sure(known: Dictionary) -> bytes:
             xlabel="% of the components", ylabel="mean |cos|", title="Components", ylim=(0, 1.02)
         )
         left.legend()
-        sets = known.pooled_atoms.reshape(-1, len(known), known.size, known.size)
+        sets = known.pooled_atoms.reshape(-1, *known.atoms.shape)
         for i, atoms in enumerate(sets):
             at = np.sort(learn.shape_numbers(atoms)["frequency"])
             colour = TEAL if i == 0 else SLATE

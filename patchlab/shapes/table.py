@@ -12,6 +12,7 @@ import math
 from typing import Any
 
 from patchlab.families import PARAMETERS
+from patchlab.shapes.colour import colour_axis
 from patchlab.types import KernelFit, KernelFits
 
 PARAMETER_COLUMNS = tuple(dict.fromkeys(name for names in PARAMETERS.values() for name in names))
@@ -37,15 +38,17 @@ def fits_csv(fits: KernelFits) -> bytes:
     """The fits as comma-separated values, UTF-8, one line a kernel under one line of names.
 
     Columns are :data:`COLUMNS`. An error that is not determined is written ``inf``; an open
-    bandwidth is an empty cell.
+    bandwidth is an empty cell. Colour kernels have :func:`colour_columns` besides.
     """
     out = io.StringIO(newline="")
-    writer = csv.DictWriter(out, COLUMNS, restval="", lineterminator="\n")
+    columns = (*COLUMNS, *colour_columns(fits.colours))
+    writer = csv.DictWriter(out, columns, restval="", lineterminator="\n")
     writer.writeheader()
     for fit in fits.fits:
         row = _head(fit)
         row |= {"of": fits.of, "size_px": fits.size, **fit.parameters}
         row |= {f"{name}_error": value for name, value in fit.errors.items()}
+        row |= _colour(fit, fits.colours)
         writer.writerow({k: _cell(v) for k, v in row.items()})
     return out.getvalue().encode()
 
@@ -69,6 +72,7 @@ def fits_json(fits: KernelFits) -> dict[str, Any]:
         **{name: fits.count(name) for name in ("good", "poor", "failed")},
         "fits": [
             _head(fit)
+            | _colour(fit, fits.colours)
             | {
                 "parameters": {k: _number(v) for k, v in fit.parameters.items()},
                 "errors": {k: _number(v) for k, v in fit.errors.items()},
@@ -76,6 +80,26 @@ def fits_json(fits: KernelFits) -> dict[str, Any]:
             for fit in fits.fits
         ],
     }
+
+
+def colour_columns(colours: str) -> tuple[str, ...]:
+    """Columns that fits of colour kernels have besides; none for one plane.
+
+    ``colour_share``: of the energy, held by the profile times its direction; ``colour_axis``:
+    grey, blue-yellow or red-green; ``grey_deg``: angle to grey, degrees; then the direction.
+    """
+    if not colours:
+        return ()
+    samples = (f"direction_{i}_{letter}" for i, letter in enumerate(colours))
+    return ("colour_share", "colour_axis", "grey_deg", *samples)
+
+
+def _colour(fit: KernelFit, colours: str) -> dict[str, Any]:
+    if fit.direction is None:
+        return {}
+    name, angle = colour_axis(fit.direction, colours)
+    values = (fit.colour_share, name, angle, *fit.direction)
+    return dict(zip(colour_columns(colours), values, strict=True))
 
 
 def _head(fit: KernelFit) -> dict[str, Any]:
