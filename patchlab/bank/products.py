@@ -2,8 +2,9 @@
 
 from __future__ import annotations
 
-from collections.abc import Mapping
+from collections.abc import Iterable, Mapping, Sequence
 from dataclasses import dataclass
+from typing import Any
 
 import numpy as np
 
@@ -13,15 +14,31 @@ PARITY_BASES = ("ee", "eo", "oe", "oo")
 
 Sum = tuple[tuple[int, int], ...]
 """A kernel as ((product, +1 or -1), ...)."""
+GROUP = 6
+"""Products that are computed together: what the registers of a core hold."""
 
 
 @dataclass(frozen=True, eq=False)
 class Product:
-    """Coefficients and the basis they are dotted with, exact and as float32."""
+    """Coefficients and the basis they are dotted with.
+
+    Parameters
+    ----------
+    basis : all, ee, eo, oe or oo
+    exact : what the product stands for
+    rounded : what is computed: float32 coefficients, or the float64 product of the factors
+    factors : float32 column and row, where the product is separable
+    """
 
     basis: str
     exact: F64
-    rounded: F32
+    rounded: F32 | F64
+    factors: tuple[F32, F32] | None = None
+
+    @property
+    def multiplies(self) -> float:
+        """Multiplies a pixel, a separable product's columns counted once."""
+        return float(self.exact.size if self.factors is None else sum(self.exact.shape))
 
 
 # ---------------------------------------------------------------- parity parts
@@ -139,3 +156,31 @@ def unfold(values: F64, basis: str, c: int) -> F64:
     quarter[top : top + rows, left : left + cols] = values
     half = np.concatenate([(1 if basis[1] == "e" else -1) * quarter[:, :0:-1], quarter], axis=1)
     return np.concatenate([(1 if basis[0] == "e" else -1) * half[:0:-1], half])
+
+
+def in_groups(keys: Mapping[int, tuple[Any, ...]]) -> list[list[int]]:
+    """Products with one key, at most GROUP together, in the order of the keys."""
+    groups: list[list[int]] = []
+    for key in sorted(set(keys.values())):
+        same = [p for p in sorted(keys) if keys[p] == key]
+        count = -(-len(same) // GROUP)
+        groups += [list(map(int, part)) for part in np.array_split(same, count)]
+    return groups
+
+
+def described(products: Sequence[Product], groups: Iterable[Sequence[int]]) -> tuple[str, ...]:
+    """Groups of products, a line each, for a person."""
+    words = {
+        "all": "taps as they are",
+        "ee": "even in y, even in x",
+        "eo": "even in y, odd in x",
+        "oe": "odd in y, even in x",
+        "oo": "odd in y, odd in x",
+    }
+    said = []
+    for group in groups:
+        first = products[group[0]]
+        rows, cols = first.exact.shape
+        how = "coefficients" if first.factors is None else "coefficients as column times row"
+        said.append(f"{len(group)} x {rows} x {cols} {how}, {words[first.basis]}")
+    return tuple(said)
