@@ -1,8 +1,8 @@
 """The ways a bank can be computed: each counted, priced and bounded, the cheapest taken.
 
-Kernels that share parity parts are one cluster and are planned together. A cluster is computed by its
-taps or by its parts, whole products or separable ones; or, where it makes no strength, by tile transforms
-or at half resolution. One plan may hold all of them.
+Kernels that share parity parts are one cluster and are planned together. A cluster is computed by
+its taps or by its parts, whole products or separable ones; or, where it makes no strength, by tile
+transforms or at half resolution. One plan may hold all of them.
 """
 
 from __future__ import annotations
@@ -31,6 +31,9 @@ from patchlab.bank.tile_fft import bound as tile_bound
 from patchlab.conventions import gamma
 from patchlab.types import F64, Bank
 
+CLEARLY = 1.5
+"""How many times cheaper tile transforms must be to be taken unasked: their bound is larger, and
+what they cost differs most between processors."""
 KINDS = ("auto", "direct", "parity", "separable", "halved", "fft")
 
 
@@ -121,8 +124,8 @@ class Planner:
     def _time(self, parts: Parts) -> float:
         """Price of some products, without the folded rows, which others may read too."""
         radius = self.bank.radius
-        some = of_products(parts.products, parts.groups, parts.sums.values(), radius, folds=False)
-        return self.costs.time(some)
+        some = of_products(parts.products, parts.groups, parts.sums.values(), radius, among=True)
+        return self.costs.beyond_fill(some)
 
     def _parts(self, products: list[Product], sums: dict[int, Sum]) -> Parts:
         """Products of one basis, shape and use (scale and parity) go together."""
@@ -163,15 +166,19 @@ class Planner:
         weight = float((np.abs(product.exact) * uses).sum())
         span = max(self.bank.table.span, 1e-300)
         # at most four parts make a kernel; half of what is allowed is left to the rounding
-        allowed = max(gamma(self.bank.size**2) * weight / 2, self.tolerance / (8 * span))
+        share = self.tolerance / (2 if product.basis == "all" else 8)
+        allowed = max(gamma(self.bank.size**2) * weight / 2, share / span)
         terms = separable_terms(product, allowed)
         if not terms or self.kind == "separable":
             return terms or (product,)
-        radius, n = self.bank.radius, len(terms)
-        sixth = 1 / 6  # whole products share their loads with five others, as a rule
-        dense = of_products((product,) * 6, [range(6)], [], radius, folds=False).times(sixth)
-        lowered = of_products(terms, [range(n)], [[(i, 1) for i in range(n)]], radius, folds=False)  # type: ignore[list-item]
-        return terms if self.costs.time(lowered) < self.costs.time(dense) else (product,)
+        one = [((0, 1),)]
+        some = [tuple((i, 1) for i in range(len(terms)))]
+        whole, lowered = (
+            of_products(ways, [range(len(ways))], sums, self.bank.radius, among=True)
+            for ways, sums in (((product,), one), (terms, some))
+        )
+        cheaper = self.costs.beyond_fill(lowered) < self.costs.beyond_fill(whole)
+        return terms if cheaper else (product,)
 
     # ------------------------------------------------------------ other means
 
@@ -197,13 +204,16 @@ class Planner:
         values = self.bank.table.values
         span = self.bank.table.span
         ends = np.array([-span, span]) if values is None else values.astype(np.float64)
-        allowed = {k: max(self.direct[k], self.tolerance) for k in free}
-        if self.kind == "halved":
-            for k in free:
-                weight = float(np.abs(self.exact[k]).sum())
-                allowed[k] = max(allowed[k], half.FORCED * weight * span)
+        reach = half.extent(ends, self.bank.border)
         some = {k: self.split[k] for k in free}
-        return half.halve(some, allowed, half.extent(ends, self.bank.border), self.bank.radius)
+        allowed = {k: max(self.direct[k], self.tolerance) for k in free}
+        found = half.halve(some, allowed, reach, self.bank.radius)
+        if self.kind == "auto" or (found is not None and len(found.kernels) == len(free)):
+            return found
+        for k in free:
+            weight = float(np.abs(self.exact[k]).sum())
+            allowed[k] = max(allowed[k], half.FORCED * weight * span)
+        return half.halve(some, allowed, reach, self.bank.radius, closest=True)
 
     def _cheapest(
         self, parts: Parts, free: list[int], halved: Halved | None
@@ -211,8 +221,10 @@ class Planner:
         """For every cluster the cheapest of products, transforms and half resolution."""
         tiles = tile_fft(self.bank.taps, tuple(free)) if self.bank.size <= LARGEST else None
         prices = {
-            "tiles": self.costs.time(of_tiles(tiles)) / len(free) if tiles else np.inf,
-            "halved": self.costs.time(of_halved(halved)) / len(halved.kernels)
+            "tiles": CLEARLY * self.costs.beyond_fill(of_tiles(tiles)) / len(free)
+            if tiles
+            else np.inf,
+            "halved": self.costs.beyond_fill(of_halved(halved)) / len(halved.kernels)
             if halved
             else np.inf,
         }
@@ -233,7 +245,7 @@ class Planner:
         )
 
     def _written(self, kernels: int) -> float:
-        return self.costs.time(of_planes(kernels)) - self.costs.time(Work())
+        return self.costs.beyond_fill(of_planes(kernels))
 
     def _only(self, parts: Parts, kernels: list[int]) -> tuple[list[Product], dict[int, Sum]]:
         used = sorted({number for k in kernels for number, _ in parts.sums[k]})

@@ -3,16 +3,18 @@
 Work is counted for each pixel of the picture, whole bank:
 
 - multiplies, adds: as they stand in the sums; most additions ride on a fused multiply-add;
-- loads: values read for the sums (basis values once for each group of products that shares them, what
+- loads: values read for the sums (basis values once for each group of products that shares them,
+  what
   was kept in between, products at the joins); coefficients are not counted, a vector of pixels
   shares them;
 - stores: values kept in between and planes written.
 
-The model is a price for each: multiplies (with the addition that rides on it), additions that ride on none,
-loads, stores of planes, and operations of transforms, which the compiler keeps in registers less well.
-The standing prices were fitted on an x86-64 core with AVX-512 by ``patchlab bench --calibrate``, which
-fits them anew on any machine: non-negative least squares on relative errors (Lawson & Hanson 1974) over
-banks that strain each of them. A plan records the prices that chose it.
+The model is a price for each: multiplies (with the addition that rides on it), additions that ride
+on none, loads, stores of planes, and operations of transforms, which the compiler keeps in
+registers less well. The standing prices were fitted on an x86-64 core with AVX-512 by ``patchlab
+bench --calibrate``, which fits them anew on any machine: non-negative least squares on relative
+errors (Lawson & Hanson 1974) over banks that strain each of them. A plan records the prices that
+chose it.
 """
 
 from __future__ import annotations
@@ -25,7 +27,7 @@ from typing import Any
 import numpy as np
 
 from patchlab.bank.halved import BLOCK, Halved
-from patchlab.bank.products import Product, Sum
+from patchlab.bank.products import GROUP, Product, Sum
 from patchlab.bank.tile_fft import LENGTH, TileFFT
 from patchlab.bank.tile_fft import work as tile_work
 from patchlab.errors import InputError
@@ -71,7 +73,11 @@ class Costs:
     def time(self, work: Work) -> float:
         """Nanoseconds a pixel."""
         prices = (getattr(self, f.name) for f in fields(self))
-        return sum(p * n for p, n in zip(prices, work.priced(), strict=True))
+        return float(sum(p * n for p, n in zip(prices, work.priced(), strict=True)))
+
+    def beyond_fill(self, work: Work) -> float:
+        """Nanoseconds a pixel of this work alone, where others fill in the working values."""
+        return self.time(work) - self.fill
 
     def plain(self) -> dict[str, float]:
         """As plain data for the manifest and for a file."""
@@ -101,7 +107,7 @@ def read_costs(found: Any, where: str) -> Costs:
     return Costs(**prices)
 
 
-STANDING = Costs(0.011, 0.008, 0.010, 0.25, 0.015, 1.0)
+STANDING = Costs(0.0065, 0.001, 0.014, 0.003, 0.008, 0.8)
 """Prices when none are given."""
 
 
@@ -135,20 +141,25 @@ def of_products(
     sums: Iterable[Sum],
     radius: int,
     *,
-    folds: bool = True,
+    among: bool = False,
 ) -> Work:
-    """Products in their groups, the folded rows they read (if asked), the joins of the sums."""
+    """Products in their groups, the folded rows they read, and the joins of the sums.
+
+    ``among`` others of their kind, in a larger bank, they share folded rows and full groups.
+    """
     groups = [list(g) for g in groups]
     wide = _line(radius) / CHUNK
     total = Work()
     rows_read = set()
     for group in groups:
         first = products[group[0]]
-        rows, cols = first.exact.shape
+        rows = first.exact.shape[0]
         if first.basis != "all":
             rows_read.add((first.basis[0], rows - (first.basis[0] == "e")))
-        total += _separable(group, first, wide) if first.factors else _dense(group, first)
-    rows_added = sum(count for _, count in rows_read) * wide * folds
+        shared = len(group) / GROUP if among else 1.0
+        make = _separable if first.factors else _dense
+        total += make(len(group), first, wide, shared)
+    rows_added = sum(count for _, count in rows_read) * wide * (not among)
     total += Work(adds=rows_added, loads=2 * rows_added, stores=rows_added)
     for terms in sums:
         join = max(len(terms) - 1, 0)
@@ -156,18 +167,18 @@ def of_products(
     return total
 
 
-def _dense(group: Sequence[int], first: Product) -> Work:
-    n, (rows, cols) = len(group), first.exact.shape
+def _dense(n: int, first: Product, wide: float, shared: float) -> Work:
+    rows, cols = first.exact.shape
     lone = 0 if first.basis == "all" else rows * (cols - (first.basis[1] == "e"))
     size = rows * cols
-    return Work(n * size, n * (size - 1) + lone, size + lone, n)
+    return Work(n * size, n * (size - 1) + shared * lone, shared * (size + lone), n)
 
 
-def _separable(group: Sequence[int], first: Product, wide: float) -> Work:
+def _separable(n: int, first: Product, wide: float, shared: float) -> Work:
     """Columns over the chunk and its halo, then rows."""
-    n, (rows, cols) = len(group), first.exact.shape
+    rows, cols = first.exact.shape
     lone = 0 if first.basis == "all" else cols - (first.basis[1] == "e")
-    down = Work(n * rows, n * (rows - 1), rows, n).times(wide)
+    down = Work(n * rows, n * (rows - 1), shared * rows, n).times(wide)
     return down + Work(n * cols, n * (cols - 1 + lone), n * (cols + lone), n)
 
 

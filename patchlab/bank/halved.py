@@ -2,22 +2,23 @@
 
 The working picture is smoothed and halved, ``s(m) = sum_a d(a) p(2m + a)`` along both axes; a small
 kernel g is correlated with s; the result is interpolated, ``r(2m) = q(m)`` and
-``r(2m + 1) = sum_t u(t) q(m + t)``. Smoothing and interpolating use one maximally flat half-band filter of
-2 P taps (Deslauriers & Dubuc 1989; its d is Daubechies' product filter): u its odd taps, d half of it.
-The filters' coefficients are dyadic, so float32 holds them exactly.
+``r(2m + 1) = sum_t u(t) q(m + t)``. Smoothing and interpolating use one maximally flat half-band
+filter of 2 P taps (Deslauriers & Dubuc 1989; its d is Daubechies' product filter): u its odd taps,
+d half of it. The filters' coefficients are dyadic, so float32 holds them exactly.
 
 The whole is linear. At an output of row phase a and column phase b (0 even, 1 odd) it computes a
-correlation with ``K_ab = W_a g W_b'``, where ``W_a(s, j)`` sums the ways from the kernel's tap j to the
-picture's offset s. Everything that is wrong with it, aliasing of the halved picture and error of
-the interpolation alike, is ``E_ab = K_ab - K``. For working values in [lo, hi], the largest
-error that any picture can give at that phase is
+correlation with ``K_ab = W_a g W_b'``, where ``W_a(s, j)`` sums the ways from the kernel's tap j
+to the picture's offset s. Everything that is wrong with it, aliasing of the halved picture and
+error of the interpolation alike, is ``E_ab = K_ab - K``. For working values in [lo, hi], the
+largest error that any picture can give at that phase is
 
     max(|hi sum E+ + lo sum E-|, |lo sum E+ + hi sum E-|),
 
-E+ and E- the positive and negative taps: it is reached by the picture that shows hi where E is positive
-and lo where it is negative (:func:`worst`). The bound is its largest over the four phases, plus
-the float32 sums: with ``n = 2 (2P + 1) + 4P + n_g`` roundings on the longest path,
-``gamma_n |u|^2 |g| |d|^2 X`` with the filters' and the kernel's sums of absolute values (Higham 2002).
+E+ and E- the positive and negative taps: it is reached by the picture that shows hi where E is
+positive and lo where it is negative (:func:`worst`). The bound is its largest over the four
+phases, plus the float32 sums: with ``n = 2 (2P + 1) + 4P + n_g`` roundings on the longest path,
+``gamma_n |u|^2 |g| |d|^2 X`` with the filters' and the kernel's sums of absolute values (Higham
+2002).
 
 g is the least-squares fit over all phases, ``A g A = S' K S`` with ``A = sum W_a' W_a`` and
 ``S = sum W_a``, done for every parity part alone: the fit commutes with mirroring, so parts
@@ -54,6 +55,7 @@ class Halved:
     kernels : their indices
     flatness : P of the half-band filter
     radius : of the small kernels
+    taps : float64 (2 P,), the interpolator's
     products, sums : of the small kernels; one sum a kernel
     bound : largest error of every kernel
     phases : float64 (kernels, 2, 2, n, n), ``K_ab``, what is really computed
@@ -62,6 +64,7 @@ class Halved:
     kernels: tuple[int, ...]
     flatness: int
     radius: int
+    taps: F64
     products: tuple[Product, ...]
     sums: tuple[Sum, ...]
     bound: tuple[float, ...]
@@ -71,6 +74,11 @@ class Halved:
     def groups(self) -> list[list[int]]:
         """Products that are computed together."""
         return in_groups({i: (p.basis, p.exact.shape) for i, p in enumerate(self.products)})
+
+    @property
+    def rows(self) -> int:
+        """Rows of output of a block."""
+        return BLOCK
 
     @property
     def reach(self) -> int:
@@ -213,6 +221,8 @@ def halve(
     allowed: Mapping[int, float],
     span: tuple[float, float],
     c: int,
+    *,
+    closest: bool = False,
 ) -> Halved | None:
     """The kernels whose proven error at half resolution is allowed.
 
@@ -222,16 +232,20 @@ def halve(
     allowed : largest error of each, working values
     span : least and largest working value, a border of zeros included
     c : radius of the kernels
+    closest : of filters that equally many kernels fit, the most exact and not the shortest
 
     Returns
     -------
-    Halved or None : with the filter that most kernels fit, the shortest of such
+    Halved or None : with the filter that most kernels fit
     """
     best: Halved | None = None
+    rank: tuple[float, float] = (0.0, 0.0)
     for p, radius in settings(c):
         found = _halved(split, allowed, span, c, p, radius)
-        if found is not None and (best is None or len(found.kernels) > len(best.kernels)):
-            best = found
+        if found is not None:
+            mine = float(len(found.kernels)), -max(found.bound) if closest else 0.0
+            if best is None or mine > rank:
+                best, rank = found, mine
     return best
 
 
@@ -266,6 +280,7 @@ def _halved(
         kernels=tuple(kept),
         flatness=flatness,
         radius=radius,
+        taps=interpolator(flatness),
         products=tuple(products),
         sums=tuple(sums[k] for k in kept),
         bound=tuple(bounds),

@@ -128,12 +128,14 @@ def make_plan(
 
     Returns
     -------
-    Plan : its ``detail`` holds ``bases``, ``coefficients`` (float32 arrays) and ``factors`` (float32
+    Plan : its ``detail`` holds ``bases``, ``coefficients`` (float32 arrays) and ``factors``
+        (float32
         column and row of a separable one, or None), one a product; ``sums`` (one a kernel),
-        ``product_groups``, ``strength`` (one entry a scale, as :func:`strength_members`), ``fft`` and
-        ``halved`` (kernels by tile transforms and at half resolution, or None), ``fixed`` (the bank in
-        16-bit fixed point, or None), ``abi`` (the interface's number), ``asked`` (the kind),
-        ``tolerance``, ``costs``, ``work`` (counted) and ``expected_ns`` (of a pixel, by those prices)
+        ``product_groups``, ``strength`` (one entry a scale, as :func:`strength_members`), ``fft``
+        and ``halved`` (kernels by tile transforms and at half resolution, or None), ``fixed`` (the
+        bank in 16-bit fixed point, or None), ``abi`` (the interface's number), ``asked`` (the
+        kind), ``tolerance``, ``costs``, ``work`` (counted) and ``expected_ns`` (of a pixel, by
+        those prices)
 
     Raises
     ------

@@ -6,10 +6,11 @@ such product, an oriented Gabor with a round envelope is two, and so is each x/y
 alone. Other oriented kernels have a rank near their size, and gain nothing.
 
 The terms come from the singular value decomposition (Eckart & Young 1936), one after the other,
-each from what the rounded ones before it left over: the rounding of a term is made good by the next,
-and only the last one's is left. What stays is ``E = P - sum v_r h_r'``, for the float32 ``v_r``, ``h_r``;
-a response errs by it at most ``sum |E| uses X``, which is added to the bound of the rounding of the sums:
-the longest path through a term has ``len(v) + len(h)`` roundings, its folds, and the joins.
+each from what the rounded ones before it left over: the rounding of a term is made good by the
+next, and only the last one's is left. What stays is ``E = P - sum v_r h_r'``, for the float32
+``v_r``, ``h_r``; a response errs by it at most ``sum |E| uses X``, which is added to the bound of
+the rounding of the sums: the longest path through a term has ``len(v) + len(h)`` roundings, its
+folds, and the joins.
 """
 
 from __future__ import annotations

@@ -305,7 +305,7 @@ typedef int @N@_FN(bits) __attribute__((vector_size(4 * @N@_LANES)));
 """Keeping the winner, by instruction set; left out of a bank without a strength."""
 
 
-def _expression(terms: Any) -> str:
+def expression(terms: Any) -> str:
     """A kernel's response at x."""
     text = "".join(
         f"{' + ' if s > 0 else ' - '}@N@_LOAD(t + {p} * @N@_CHUNK + x)" for p, s in terms
@@ -318,11 +318,11 @@ def _magnitude(plan: Plan, member: Any) -> list[str]:
     _, even, odd = member
     sums = plan.detail["sums"]
     if even is None or odd is None:
-        only = _expression(sums[odd if even is None else even])
+        only = expression(sums[odd if even is None else even])
         return [f"v = {only};", "v = @N@_ABS(v);"]
     return [
-        f"e = {_expression(sums[even])};",
-        f"o = {_expression(sums[odd])};",
+        f"e = {expression(sums[even])};",
+        f"o = {expression(sums[odd])};",
         "v = e * e + o * o;",
     ]
 

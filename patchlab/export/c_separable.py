@@ -99,4 +99,6 @@ def _along(basis: str, width: int) -> list[str]:
             "    }",
             "}",
         ]
-    return body + [f"@N@_STORE(t + places[n] * @N@_CHUNK + x + {n} * @N@_LANES, a{n});" for n in every]
+    return body + [
+        f"@N@_STORE(t + places[n] * @N@_CHUNK + x + {n} * @N@_LANES, a{n});" for n in every
+    ]

@@ -13,6 +13,7 @@ from patchlab import bank as banks
 from patchlab import edges, export, store
 from patchlab.edges import thin
 from patchlab.errors import PatchlabError, UsageError, VerificationError
+from patchlab.pipeline.calibrate import chosen_costs, refuse_planning
 from patchlab.pipeline.desk import Desk, may_write
 from patchlab.progress import Progress, silent
 from patchlab.settings import Settings
@@ -61,7 +62,8 @@ def write_bundle(
     ------
     VerificationError : a target differs from the oracle; the folder stays for inspection.
     """
-    plan = banks.make_plan(bank)
+    s = desk.settings
+    plan = banks.make_plan(bank, s.plan, tolerance=s.tolerance, costs=chosen_costs(s))
     files = dict(export.emit(bank, plan))
     files |= export.emit_selftest(bank, plan, _selftest_cases(bank, plan))
     desk.progress("export", 1, 4, "C source")
@@ -106,6 +108,7 @@ def add_libraries(folder: Path, out: Path, desk: Desk, *, force: bool) -> Writte
     VerificationError : a file was changed since it was written, or a target differs.
     """
     export.parse_targets(desk.settings.target)
+    refuse_planning(desk.settings)
     if out != folder:
         may_write(out, force)
     bank, plan, head = banks.read_bank(folder)

@@ -15,6 +15,7 @@ from patchlab.errors import InputError, UsageError
 from patchlab.export import parse_targets
 from patchlab.pipeline import tell
 from patchlab.pipeline.bundle import write_bundle
+from patchlab.pipeline.calibrate import chosen_costs
 from patchlab.pipeline.desk import RECIPE, Desk, bank_name, clear_after
 from patchlab.pipeline.keep import Keeper
 from patchlab.pipeline.measure import take_in_extras
@@ -370,6 +371,7 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
     """
     if until == "run":
         parse_targets(desk.settings.target)  # what cannot be built is said before the work
+        chosen_costs(desk.settings)
     intake = take_in(photos, desk)
     found, survey_head = survey(intake, desk)
     if not desk.resume:
