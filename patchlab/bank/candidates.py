@@ -9,6 +9,7 @@ from __future__ import annotations
 
 from collections.abc import Mapping
 from dataclasses import dataclass, replace
+from itertools import combinations
 from typing import Any
 
 import numpy as np
@@ -21,6 +22,7 @@ from patchlab.bank.products import (
     Sum,
     clusters,
     in_groups,
+    padded,
     parity_parts,
     share,
     uses_of,
@@ -135,10 +137,47 @@ class Planner:
             scale = -1 if kernel.scale is None else kernel.scale
             for number, _ in terms:
                 p = products[number]
-                about = (scale, kernel.parity, p.basis, p.exact.shape, p.factors is not None)
+                about = (scale, kernel.parity, p.basis, p.factors is not None)
                 use.setdefault(number, about)
-        groups = tuple(tuple(g) for g in in_groups(use))
-        return Parts(tuple(products), sums, groups)
+        products = list(products)
+        for about in sorted(set(use.values())):
+            mine = [number for number in sorted(use) if use[number] == about]
+            for number, shape in self._shapes([products[n] for n in mine], mine).items():
+                products[number] = padded(products[number], shape)
+        keys = {n: (*about, products[n].exact.shape) for n, about in use.items()}
+        return Parts(tuple(products), sums, tuple(tuple(g) for g in in_groups(keys)))
+
+    def _shapes(self, products: list[Product], numbers: list[int]) -> dict[int, tuple[int, int]]:
+        """Shapes with which products go together best: zeros at the rim may fill up a group."""
+        classes: list[tuple[tuple[int, int], list[int]]] = []
+        for p, number in zip(products, numbers, strict=True):
+            shape = (p.exact.shape[0], p.exact.shape[1])
+            same = next((c for c in classes if c[0] == shape), None)
+            if same is None:
+                classes.append((shape, [number]))
+            else:
+                same[1].append(number)
+        first = products[0]
+        while len(classes) > 1 and first.factors is None:
+            pairs = [(self._saved(first.basis, a, b), a, b) for a, b in combinations(classes, 2)]
+            saved, a, b = max(pairs, key=lambda pair: pair[0])
+            if saved <= 0:
+                break
+            classes = [c for c in classes if c is not a and c is not b]
+            classes.append((_around(a[0], b[0]), a[1] + b[1]))
+        return {number: shape for shape, some in classes for number in some}
+
+    def _saved(self, basis: str, a: Any, b: Any) -> float:
+        """Price that is saved when two classes of products take one shape."""
+
+        def price(shape: tuple[int, int], count: int) -> float:
+            blank = Product(basis, np.empty(shape), np.empty(shape))
+            groups = in_groups(dict.fromkeys(range(count), ()))
+            work = of_products((blank,) * count, groups, [], self.bank.radius)
+            return self.costs.beyond_fill(work)
+
+        apart = price(a[0], len(a[1])) + price(b[0], len(b[1]))
+        return apart - price(_around(a[0], b[0]), len(a[1]) + len(b[1]))
 
     def _lowered(self, parts: Parts) -> Parts:
         """The same with separable products where they are allowed and cheaper, or asked for."""
@@ -277,6 +316,11 @@ class Planner:
         work += of_planes(len(rest))
         work += of_tiles(plan.tiles) if plan.tiles else Work()
         return work + (of_halved(plan.halved) if plan.halved else Work())
+
+
+def _around(a: tuple[int, int], b: tuple[int, int]) -> tuple[int, int]:
+    """The least shape that holds two others."""
+    return max(a[0], b[0]), max(a[1], b[1])
 
 
 def _bound(products: tuple[Product, ...], terms: Sum) -> float:

@@ -83,6 +83,10 @@ class NativeBank:
         self._edges = self._call(
             "edges_rows", _INT, *_PICTURE, _INT, _POINTER, _STRIDE, _POINTER, _STRIDE, _POINTER
         )
+        self._edges_above = self._call(
+            "edges_above_rows", _INT, *_PICTURE, _INT, ctypes.c_float, _POINTER, _STRIDE, _POINTER,
+            _STRIDE, _POINTER, _POINTER,
+        )  # fmt: skip
 
         fixed = self._fixed = self._plan.detail["fixed"]
         if fixed is not None:
@@ -163,6 +167,50 @@ class NativeBank:
         """
         pixels, (first, count) = self._picture(pixels, rows)
         return self._strongest(self._edges, pixels, first, count, scale, threads)
+
+    def edges_above(
+        self,
+        pixels: NDArray[Any],
+        scale: int,
+        threshold: float,
+        *,
+        rows: tuple[int, int] | None = None,
+        threads: int = 1,
+    ) -> tuple[F32, NDArray[np.uint8], int]:
+        """As :meth:`edges`, without the stretches that are provably too flat for a threshold.
+
+        Parameters
+        ----------
+        pixels, scale, rows, threads : as in :meth:`edges`
+        threshold : a strength; what reaches it, and its eight neighbours, are as by :meth:`edges`
+
+        Returns
+        -------
+        float32 ndarray (count, w), uint8 ndarray (count, w) : 0 where pixels were skipped
+        int : how many pixels were skipped
+
+        Raises
+        ------
+        InputError : the picture does not fit the bank. UsageError : no such scale or band.
+        """
+        pixels, (first, count) = self._picture(pixels, rows)
+        found: list[int] = []
+        limit = float(np.float32(threshold))
+        limit = (
+            float(np.nextafter(np.float32(limit), np.float32(0))) if limit > threshold else limit
+        )
+
+        def call(*given: Any) -> int:
+            *before, to, row, who, turn_row, scratch = given
+            skipped = ctypes.c_uint64(0)
+            code = self._edges_above(
+                *before, limit, to, row, who, turn_row, ctypes.addressof(skipped), scratch
+            )
+            found.append(int(skipped.value))
+            return int(code)
+
+        strength, turn = self._strongest(call, pixels, first, count, scale, threads)
+        return strength, turn, sum(found)
 
     def responses_q(
         self,

@@ -33,6 +33,7 @@ import numpy as np
 from patchlab.bank.candidates import KINDS, Candidate, Planner
 from patchlab.bank.costs import STANDING, Costs
 from patchlab.bank.fixed import fixed_point
+from patchlab.bank.flat import flat_bound
 from patchlab.bank.products import Product, Sum, described, parity_parts, unfold
 from patchlab.bank.tile_fft import LENGTH
 from patchlab.errors import UsageError
@@ -131,7 +132,8 @@ def make_plan(
     Plan : its ``detail`` holds ``bases``, ``coefficients`` (float32 arrays) and ``factors``
         (float32
         column and row of a separable one, or None), one a product; ``sums`` (one a kernel),
-        ``product_groups``, ``strength`` (one entry a scale, as :func:`strength_members`), ``fft``
+        ``product_groups``, ``strength`` (one entry a scale, as :func:`strength_members`), ``flat``
+        (one a scale, see :mod:`patchlab.bank.flat`), ``fft``
         and ``halved`` (kernels by tile transforms and at half resolution, or None), ``fixed`` (the
         bank in 16-bit fixed point, or None), ``abi`` (the interface's number), ``asked`` (the
         kind), ``tolerance``, ``costs``, ``work`` (counted) and ``expected_ns`` (of a pixel, by
@@ -185,6 +187,7 @@ def make_plan(
                 whole.groups,
             ),
             "strength": strength,
+            "flat": tuple(flat_bound(bank, members, found.bounds) for members in strength),
             "abi": _interface_number(bank),
             "asked": kind,
             "tolerance": float(tolerance),

@@ -3,7 +3,7 @@
 from __future__ import annotations
 
 from collections.abc import Iterable, Mapping, Sequence
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
 from typing import Any
 
 import numpy as np
@@ -88,6 +88,19 @@ def trimmed(basis: str, part: F64) -> F64:
         a, b = (int(np.abs(at - c).max(initial=0)) for at in (rows, cols))
         return part[c - a : c + a + 1, c - b : c + b + 1]
     return part[: rows.max(initial=0) + 1, : cols.max(initial=0) + 1]
+
+
+def padded(product: Product, shape: tuple[int, int]) -> Product:
+    """A product with zeros at its rim; taps stay centred."""
+    down, right = (n - m for n, m in zip(shape, product.exact.shape, strict=True))
+    if not (down or right):
+        return product
+    room = ((0, down), (0, right))
+    if product.basis == "all":
+        room = ((down // 2, down // 2), (right // 2, right // 2))
+    return replace(
+        product, exact=np.pad(product.exact, room), rounded=np.pad(product.rounded, room)
+    )
 
 
 def uses_of(basis: str, shape: tuple[int, int]) -> F64:

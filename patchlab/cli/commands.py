@@ -575,6 +575,9 @@ def _say_bench(result: dict[str, Any]) -> None:
                 "note",
             ),
         )
+        if case["skipped"] is not None:
+            shares = ", ".join(f"{100 * share:.1f} %" for share in case["skipped"]["share"])
+            click.echo(f"skipped as provably flat, by scale: {shares}")
 
 
 @patchlab.command()

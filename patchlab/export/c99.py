@@ -11,7 +11,7 @@ import numpy as np
 
 from patchlab.conventions import BORDERS
 from patchlab.errors import UsageError
-from patchlab.export import c_code, c_fft, c_fixed, c_halved
+from patchlab.export import c_code, c_fft, c_fixed, c_flat, c_halved
 from patchlab.export.c_text import (
     fill,
     float_literal,
@@ -111,6 +111,7 @@ def emit(bank: Bank, plan: Plan) -> dict[str, bytes]:
         raise UsageError(f"unknown border {bank.border!r}")
     about = _about(bank, plan) | _sections(bank, plan) | c_fixed.sections(bank, plan, CHUNK)
     about |= c_fft.sections(plan, bank.radius, CHUNK, _line(bank.radius))
+    about |= c_flat.sections(bank, plan, CHUNK)
     about |= c_halved.sections(plan, CHUNK, _line(bank.radius))
 
     # texts with tokens of their own are filled before they are put in place

@@ -83,6 +83,7 @@ def _bench(
         progress=progress,
     )
     alone = {t.target: t for t in timings if t.threads == 1}
+    flat = skipped(first[0], export.bench.picture(bank, *size)) if first else None
     for _, about in built:
         name = f"plan {about['asked']}"
         about["expected_ms"] = round(about["plan"].detail["expected_ns"] * math.prod(size) / 1e6, 3)
@@ -96,6 +97,7 @@ def _bench(
         "kernel_size": bank.size,
         "plans": [about for _, about in built],
         "targets": [_row(t, alone) for t in timings],
+        "skipped": flat,
     }
 
 
@@ -178,6 +180,7 @@ def _compiled(native: banks.NativeBank, plan: Plan) -> Iterator[Entrant]:
             "compiled library, edges", "all scales, float32",
             lambda p, n: [native.edges(p, s, threads=n) for s in scales],
         )  # fmt: skip
+    yield from _above(native)
     if fixed is None:
         return
     room: dict[tuple[int, ...], Any] = {}
@@ -195,6 +198,30 @@ def _compiled(native: banks.NativeBank, plan: Plan) -> Iterator[Entrant]:
             "compiled library, fixed-point edges", "all scales, 16 bits",
             lambda p, n: [native.edges_q(p, s, threads=n) for s in scales],
         )  # fmt: skip
+
+
+def _above(native: banks.NativeBank) -> Iterator[Entrant]:
+    """Edges above the bank's own threshold; its note tells the share that was skipped."""
+    known = native.bank.thresholds
+    if known is None:
+        return
+    low = known.hysteresis * float(np.interp(10.0, known.rate, known.strength))
+    scales = range(len(native.bank.scales))
+
+    def run(pixels: Any, threads: int) -> Any:
+        return [native.edges_above(pixels, s, low, threads=threads) for s in scales]
+
+    yield Entrant(
+        "compiled library, edges above a threshold", f"all scales, strength {low:.3g}", run
+    )
+
+
+def skipped(native: banks.NativeBank, pixels: Any) -> dict[str, Any] | None:
+    """The share of a picture that is provably too flat, by scale; None without thresholds."""
+    for entrant in _above(native):
+        found = entrant.run(pixels, 1)
+        return {"note": entrant.note, "share": [round(n / pixels.size, 4) for *_, n in found]}
+    return None
 
 
 # ---------------------------------------------------------------- fixed cases

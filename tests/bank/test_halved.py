@@ -37,7 +37,7 @@ def test_the_filters_are_the_published_ones():
         for degree in range(2 * p):
             assert taps @ (at.astype(float) ** degree) == pytest.approx(0.5**degree, abs=1e-9)
         # half band: the response at pi - w is one less that at w
-        w, response = signal.freqz(halved.smoother(p), worN=64, include_nyquist=True)
+        _, response = signal.freqz(halved.smoother(p), worN=64, include_nyquist=True)
         size = np.abs(response)
         np.testing.assert_allclose(size + size[::-1], 1, atol=1e-12)
 
