@@ -1,21 +1,22 @@
 """Where a picture is too flat for an edge, and the proof.
 
-Let lo and hi be the least and the largest working value of the window that a response depends on, P and
-M the sums of a kernel's positive and of its negative taps (both as positive numbers). Then
+Let lo and hi be the least and the largest working value of the window that a response depends on,
+P and M the sums of a kernel's positive and of its negative taps (both as positive numbers). Then
 
     r = sum k p <= P hi - M lo = P (hi - lo) + (P - M) lo,   -r <= M (hi - lo) + (M - P) lo,
 
-so ``|r| <= W (hi - lo) + D |lo|`` with ``W = max(P, M)`` and ``D = |P - M|``, and what is computed is at
-most E more, E the plan's error bound. For a strength that is one response, the largest W, D and E over
-its kernels bound it. Energy is ``sqrt(e^2 + o^2)``, the 2-norm of two such bounds, and a norm of sums is
-at most the sum of the norms (Minkowski): ``sqrt(We^2 + Wo^2) (hi - lo) + ...``. The float32 sum of squares
-and its root err by at most four roundings, the evaluation of the bound itself by four more; both are
-met by a factor of ``1 + 2^-20``, and the three numbers are rounded upwards.
+so ``|r| <= W (hi - lo) + D |lo|`` with ``W = max(P, M)`` and ``D = |P - M|``, and what is computed
+is at most E more, E the plan's error bound. For a strength that is one response, the largest W, D
+and E over its kernels bound it. Energy is ``sqrt(e^2 + o^2)``, the 2-norm of two such bounds, and
+a norm of sums is at most the sum of the norms (Minkowski): ``sqrt(We^2 + Wo^2) (hi - lo) + ...``.
+The float32 sum of squares and its root err by at most four roundings, the evaluation of the bound
+itself by four more; both are met by a factor of ``1 + 2^-20``, and the three numbers are rounded
+upwards.
 
 Where the bound, over the window of a stretch of pixels and of their neighbours, stays below a
-threshold, none of these pixels reaches it and none touches one that does: their strength need not be
-computed. Thinning compares an element with its neighbours only, so edges come out the same, bit for bit.
-Not a number is not bounded: float pixels are never skipped.
+threshold, none of these pixels reaches it and none touches one that does: their strength need not
+be computed. Thinning compares an element with its neighbours only, so edges come out the same, bit
+for bit. Not a number is not bounded: float pixels are never skipped.
 """
 
 from __future__ import annotations

@@ -98,9 +98,9 @@ def padded(product: Product, shape: tuple[int, int]) -> Product:
     room = ((0, down), (0, right))
     if product.basis == "all":
         room = ((down // 2, down // 2), (right // 2, right // 2))
-    return replace(
-        product, exact=np.pad(product.exact, room), rounded=np.pad(product.rounded, room)
-    )
+    exact: F64 = np.pad(product.exact, room)
+    rounded: F32 = np.pad(product.rounded, room)
+    return replace(product, exact=exact, rounded=rounded)
 
 
 def uses_of(basis: str, shape: tuple[int, int]) -> F64:

@@ -24,6 +24,15 @@ _PLAIN = """\
 """
 
 
+_SCRATCH = """\
+    {
+        const size_t flat = (@N@_FLAT_ROWS * (@N@_flat_pitch(width)
+            + 32 * @N@_flat_stretches(width)) + @N@_SCRATCH) * sizeof(float) + 64;
+        if (flat > bytes) bytes = flat;
+    }
+"""
+
+
 def sections(bank: Bank, plan: Plan, chunk: int) -> dict[str, str]:
     """The texts for the templates.
 
@@ -53,11 +62,11 @@ def sections(bank: Bank, plan: Plan, chunk: int) -> dict[str, str]:
     return shared | {
         "FLAT_VECTOR": template("flat_vector.c.in"),
         "FLAT": text,
-        "FLAT_DATA": f"#define @N@_FLAT_ROWS {bank.size + 2} /* a kernel's, one above, one below */\n"
-        f"#define @N@_FLAT_SPAN {span} /* stretches that a chunk depends on */\n",
-        "FLAT_SCRATCH": "    {\n        const size_t flat = (@N@_FLAT_ROWS * (@N@_flat_pitch(width)\n"
-        "            + 32 * @N@_flat_stretches(width)) + @N@_SCRATCH) * sizeof(float) + 64;\n"
-        "        if (flat > bytes) bytes = flat;\n    }\n",
+        "FLAT_DATA": (
+            f"#define @N@_FLAT_ROWS {bank.size + 2} /* a kernel's, one above, one below */\n"
+            f"#define @N@_FLAT_SPAN {span} /* stretches that a chunk depends on */\n"
+        ),
+        "FLAT_SCRATCH": _SCRATCH,
     }  # fmt: skip
 
 
