@@ -45,6 +45,7 @@ from patchlab.types import (
 
 MANIFEST = "bank.json"
 TAPS, TABLE, NOISE = "kernels.npy", "input_table.npy", "autocovariance.npy"
+FIXED_TAPS, FIXED_CODES = "fixed_kernels.npy", "fixed_codes.npy"
 OPERATION = "correlation: r(y, x) = sum k(j, i) p(y + j - c, x + i - c), p the working values"
 
 
@@ -87,8 +88,12 @@ def bank_files(
         files[TABLE] = npy_bytes(bank.table.values)
     if bank.noise_autocovariance is not None:
         files[NOISE] = npy_bytes(bank.noise_autocovariance)
+    fixed = plan.detail["fixed"]
+    if fixed is not None:
+        files[FIXED_TAPS] = npy_bytes(fixed.taps.astype(np.int32))
+        files[FIXED_CODES] = npy_bytes(fixed.codes)
     for name, data in (extra or {}).items():
-        if name in (MANIFEST, TAPS, TABLE, NOISE):
+        if name in (MANIFEST, TAPS, TABLE, NOISE, FIXED_TAPS, FIXED_CODES):
             raise UsageError(f"{name} is the bank's own file", where=bank.name)
         files[name] = data
     return files, _body(bank, plan)

@@ -529,6 +529,7 @@ def _say_costs(result: dict[str, Any]) -> None:
 
 def _say_bench(result: dict[str, Any]) -> None:
     for case in result.get("cases", [result]):
+        click.echo(f"{case['bank']}: {case['plan']}")
         table(
             [
                 (

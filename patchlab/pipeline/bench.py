@@ -95,6 +95,7 @@ def _bench(
         "size": list(size),
         "kernels": len(bank),
         "kernel_size": bank.size,
+        "plan": banks.describe(plan),
         "plans": [about for _, about in built],
         "targets": [_row(t, alone) for t in timings],
         "skipped": flat,
