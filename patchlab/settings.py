@@ -154,6 +154,22 @@ class Settings:
         DEFAULT_BORDER, "bank", "What lies beyond the picture's rim.", choices=tuple(BORDERS)
     )
     library: bool = _setting(True, "bank", "Build the shared library of this machine.")
+    plan: str = _setting(
+        "auto",
+        "bank",
+        "How responses are computed; auto takes the cheapest.",
+        choices=("auto", "direct", "parity", "separable", "halved", "fft"),
+    )
+    tolerance: float = _setting(
+        0.0,
+        "bank",
+        "Error of a response, in working values, that a plan may spend on speed.",
+        low=0.0,
+        high=1e6,
+    )
+    costs: str | None = _setting(
+        None, "bank", "Prices that choose the plan, a file of patchlab bench --calibrate."
+    )
     target: str = _setting(
         "host",
         "bank",

@@ -740,9 +740,9 @@ class Plan:
 
     Parameters
     ----------
-    kind : "direct" or "parity"
+    kind : its means in a few words, "parity" or "direct and tile FFT" for example
     groups : for people, one line a group of kernels that share work
-    multiplies, adds : per pixel, whole bank
+    multiplies, adds, loads : per pixel, whole bank
     error_bound : for each kernel, the largest |float32 response - exact response of the taps|
         over every input the contract allows
     detail : plain data the generator needs
@@ -754,6 +754,7 @@ class Plan:
     adds: float
     error_bound: tuple[float, ...]
     detail: Mapping[str, Any] = field(default_factory=dict)
+    loads: float = 0.0
 
 
 Bundle = Mapping[str, bytes]

@@ -121,8 +121,12 @@ def _bands(
         folds: list[dict[tuple[str, int], F32]] = [{} for _ in padded]
         for group in groups:
             basis, plane = plan.detail["bases"][group[0]], plan.detail["planes"][group[0]]
-            taps = np.stack([plan.detail["coefficients"][p] for p in group])
-            sums = _products(padded[plane], basis, taps, bank.radius, folds[plane])
+            factors = [plan.detail["factors"][p] for p in group]
+            if factors[0] is None:
+                taps = np.stack([plan.detail["coefficients"][p] for p in group])
+                sums = _products(padded[plane], basis, taps, bank.radius, folds[plane])
+            else:
+                sums = _separable(padded[plane], basis, factors, bank.radius, folds[plane])
             products.update(zip(group, sums, strict=True))
         joined = partial(_joined, plan, products, (count, w))
         yield slice(top, top + count), joined
@@ -175,6 +179,23 @@ def _products(padded: F32, basis: str, taps: F32, c: int, folds: dict[tuple[str,
         for i, factor in enumerate(row, left):
             np.multiply(factor, _fold_columns(lines, basis, i, c, value), out=scaled)
             np.add(total, scaled, out=total)
+    return total
+
+
+def _separable(
+    padded: F32, basis: str, factors: Any, c: int, folds: dict[tuple[str, int], F32]
+) -> F32:
+    """A group of separable products: columns first, then along the rows; (products, rows, w)."""
+    shape = padded.shape[0] - 2 * c, padded.shape[1] - 2 * c
+    total = np.zeros((len(factors), *shape), dtype=np.float32)
+    value = np.empty(shape, dtype=np.float32)
+    for out, (column, row) in zip(total, factors, strict=True):
+        top, left = ((c - n.size // 2) * (basis == "all") for n in (column, row))
+        lines = np.zeros((shape[0], padded.shape[1]), dtype=np.float32)
+        for j, factor in enumerate(column, top):
+            lines += factor * _fold_rows(padded, basis, j, c, shape[0], folds)
+        for i, factor in enumerate(row, left):
+            out += factor * _fold_columns(lines, basis, i, c, value)
     return total
 
 

@@ -16,6 +16,7 @@ from typing import Any
 import numpy as np
 from numpy.typing import NDArray
 
+from patchlab.bank.costs import read_costs
 from patchlab.bank.lattice import check_name
 from patchlab.bank.plan import KINDS, make_plan
 from patchlab.conventions import BORDERS
@@ -45,6 +46,7 @@ from patchlab.types import (
 MANIFEST = "bank.json"
 TAPS, TABLE, NOISE = "kernels.npy", "input_table.npy", "autocovariance.npy"
 MIX = "mix.npy"
+FIXED_TAPS, FIXED_CODES = "fixed_kernels.npy", "fixed_codes.npy"
 OPERATION = "correlation: r(y, x) = sum k(j, i) p(y + j - c, x + i - c), p the working values"
 
 COLOUR_OPERATION = (
@@ -94,8 +96,12 @@ def bank_files(
         files[NOISE] = npy_bytes(bank.noise_autocovariance)
     if bank.mix is not None:
         files[MIX] = npy_bytes(bank.mix)
+    fixed = plan.detail["fixed"]
+    if fixed is not None:
+        files[FIXED_TAPS] = npy_bytes(fixed.taps.astype(np.int32))
+        files[FIXED_CODES] = npy_bytes(fixed.codes)
     for name, data in (extra or {}).items():
-        if name in (MANIFEST, TAPS, TABLE, NOISE, MIX):
+        if name in (MANIFEST, TAPS, TABLE, NOISE, MIX, FIXED_TAPS, FIXED_CODES):
             raise UsageError(f"{name} is the bank's own file", where=bank.name)
         files[name] = data
     return files, _body(bank, plan)
@@ -122,6 +128,9 @@ def _body(bank: Bank, plan: Plan) -> dict[str, Any]:
             "groups": list(plan.groups),
             "multiplies_per_pixel": plan.multiplies,
             "adds_per_pixel": plan.adds,
+            "loads_per_pixel": plan.loads,
+            "tolerance": plan.detail["tolerance"],
+            "prices_ns": plan.detail["costs"].plain(),
             "error_bound": list(plan.error_bound),
         },
         "fixed_point": _fixed_entry(plan.detail["fixed"]),
@@ -277,7 +286,7 @@ def read_bank(folder: Path) -> tuple[Bank, Plan, dict[str, Any]]:
     try:
         bank = _bank(folder, head)
         check_names(bank)
-        plan = _plan(head, bank)
+        plan = _plan(folder, head, bank)
     except (KeyError, TypeError, ValueError, AttributeError, OverflowError) as error:
         raise InputError(
             f"the manifest makes no sense ({type(error).__name__}: {shown(error, 200)})",
@@ -432,10 +441,15 @@ def _coverage(entry: Mapping[str, Any] | None) -> Coverage | None:
     )
 
 
-def _plan(head: Mapping[str, Any], bank: Bank) -> Plan:
+def _plan(folder: Path, head: Mapping[str, Any], bank: Bank) -> Plan:
     """The plan made again from the kernels; it must be the one the exports were made from."""
     entry = head["plan"]
-    plan = make_plan(bank, _one_of(entry["asked"], KINDS, "plan"))
+    plan = make_plan(
+        bank,
+        _one_of(entry["asked"], KINDS, "plan"),
+        tolerance=float(entry["tolerance"]),
+        costs=read_costs(entry["prices_ns"], str(folder / MANIFEST)),
+    )
     stored = np.array(entry["error_bound"], dtype=np.float64)
     same = stored.shape == (len(bank),) and np.allclose(stored, plan.error_bound, 1e-9, 0)
     if not same or head["interface"] != plan.detail["abi"]:

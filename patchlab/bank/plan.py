@@ -17,41 +17,35 @@ Every kernel is the sum of its four x/y-parity parts, so the last four reach any
 kernel. A point-symmetric or antisymmetric kernel has only two parts, and a kernel
 and its mirror image have the same parts up to sign: equal parts are computed
 once. That is exact algebra; sharing needs the symmetry to hold bit for bit in
-the float32 taps.
+the float32 taps. A product whose coefficients are a column times a row is computed so
+where that is cheaper; some kernels' responses are made by other means altogether.
+:mod:`patchlab.bank.candidates` finds the ways, :mod:`patchlab.bank.costs` counts and prices them.
 """
 
 from __future__ import annotations
 
 import hashlib
+import math
 from collections.abc import Iterator, Mapping
-from typing import Any
 
 import numpy as np
 
+from patchlab.bank.candidates import KINDS, Candidate, Parts, Planner
+from patchlab.bank.costs import STANDING, Costs, Work, of_planes, of_products
 from patchlab.bank.fixed import fixed_point
-from patchlab.bank.products import (
-    Part,
-    Product,
-    Sum,
-    clusters,
-    parity_parts,
-    share,
-    unfold,
-    uses_of,
-)
-from patchlab.bank.tile_fft import LARGEST, LENGTH, TileFFT, tile_fft
-from patchlab.bank.tile_fft import bound as tile_bound
-from patchlab.bank.tile_fft import cost as tile_cost
-from patchlab.bank.tile_fft import work as tile_work
-from patchlab.conventions import gamma
+from patchlab.bank.flat import flat_bound
+from patchlab.bank.products import Product, Sum, described, parity_parts, unfold
+from patchlab.bank.tile_fft import LENGTH
 from patchlab.errors import UsageError
 from patchlab.types import F64, Bank, Plan
 
-KINDS = ("auto", "direct", "parity", "fft")
-CLEARLY = 1.5
-"""How many times fewer operations tile transforms must promise to be taken."""
-GROUP = 6
-"""Products that are computed together: what the registers of a core hold."""
+COLOUR_KINDS = ("auto", "direct", "parity")
+
+FIXED_SHARE = 0.55
+"""Time of 16-bit products over that of the same float32 ones: measured from 0.5 to 0.6 with AVX-512,
+for banks from 9 x 9 to 19 x 19."""
+
+__all__ = ["KINDS", "describe", "make_plan", "parity_parts", "rebuilt_taps", "strength_members"]
 
 
 # ---------------------------------------------------------------- strength
@@ -107,85 +101,6 @@ def strength_members(bank: Bank, scale: int) -> tuple[tuple[int, int | None, int
 # ---------------------------------------------------------------- planning
 
 
-def _split(exact: F64) -> tuple[dict[int, dict[Part, F64]], dict[int, dict[Part, F64]]]:
-    """Every kernel (h, h) or (h, h, planes) by its parity parts, and as it is, plane by plane."""
-    parity: dict[int, dict[Part, F64]] = {}
-    direct: dict[int, dict[Part, F64]] = {}
-    for index, kernel in enumerate(exact):
-        planes = [kernel] if kernel.ndim == 2 else list(np.moveaxis(kernel, -1, 0))
-        own = [(m, part) for m, taps in enumerate(planes) for part in parity_parts(taps).items()]
-        parity[index] = {(m, basis): part for m, (basis, part) in own}
-        direct[index] = {(m, "all"): taps for m, taps in enumerate(planes)}
-    return parity, direct
-
-
-def _worth_splitting(
-    split: Mapping[int, Mapping[Part, F64]], whole: Mapping[int, Mapping[Part, F64]]
-) -> set[int]:
-    """Kernels for which the parity split saves more than its additions cost."""
-    products, sums = share(split)
-    chosen: set[int] = set()
-    for cluster in clusters(sums):
-        used = {product for index in cluster for product, _ in sums[index]}
-        coefficients = sum(products[p].exact.size for p in used)
-        # a basis value takes one addition for every group of products that reads it
-        parity = 2 * coefficients + coefficients // GROUP + sum(len(sums[i]) for i in cluster)
-        direct, _ = share({index: whole[index] for index in cluster})
-        if parity < sum(2 * p.exact.size for p in direct):
-            chosen.update(cluster)
-    return chosen
-
-
-def _group(products: list[Product], sums: Mapping[int, Sum], bank: Bank) -> list[list[int]]:
-    """Products of one plane, basis, shape and use (scale and parity), at most GROUP together."""
-    use: dict[int, tuple[Any, ...]] = {}
-    for index, terms in sums.items():
-        kernel = bank.kernels[index]
-        scale = -1 if kernel.scale is None else kernel.scale
-        for product, _ in terms:
-            p = products[product]
-            use.setdefault(product, (scale, kernel.parity, p.plane, p.basis, p.exact.shape))
-    groups: list[list[int]] = []
-    for key in sorted(set(use.values())):
-        same = [p for p in sorted(use) if use[p] == key]
-        count = -(-len(same) // GROUP)
-        groups += [list(map(int, part)) for part in np.array_split(same, count)]
-    return groups
-
-
-def _bounds(
-    products: list[Product], sums: Mapping[int, Sum], spans: tuple[float, ...], mixing: int
-) -> tuple[float, ...]:
-    """Largest |float32 response - exact response| for every kernel; see :func:`make_plan`."""
-    bounds = []
-    for index in sorted(sums):
-        totals = [0.0] * len(spans)
-        for number, _ in sums[index]:
-            p = products[number]
-            uses = uses_of(p.basis, (p.exact.shape[0], p.exact.shape[1]))
-            folds = 0 if p.basis == "all" else 2
-            roundings = p.exact.size + folds + len(sums[index]) - 1 + mixing
-            size = float((np.abs(p.rounded).astype(np.float64) * uses).sum())
-            totals[p.plane] += gamma(roundings) * size
-            totals[p.plane] += float((np.abs(p.rounded - p.exact) * uses).sum())
-        bounds.append(sum(total * span for total, span in zip(totals, spans, strict=True)))
-    return tuple(bounds)
-
-
-def _additions(products: list[Product], groups: list[list[int]], sums: Mapping[int, Sum]) -> int:
-    """Additions for each pixel: folding rows and columns, summing products, joining them."""
-    used = [products[p] for group in groups for p in group]
-    fold_rows = {(p.plane, p.basis[0], p.exact.shape[0] - (p.basis[0] == "e")) for p in used}
-    total = sum(count for _, kind, count in fold_rows if kind != "a")
-    for group in groups:
-        first = products[group[0]]
-        rows, cols = first.exact.shape
-        if first.basis != "all":
-            total += rows * (cols - (first.basis[1] == "e"))
-        total += len(group) * (first.exact.size - 1)
-    return int(total) + sum(max(len(terms) - 1, 0) for terms in sums.values())
-
-
 def _interface_number(bank: Bank) -> int:
     """A number that changes with anything a program built against the bank relies on."""
     h = hashlib.sha256(b"patchlab C interface 2\0")
@@ -202,115 +117,40 @@ def _interface_number(bank: Bank) -> int:
     return int(h.hexdigest()[:7], 16)
 
 
-def _lines(
-    products: list[Product], groups: list[list[int]], coloured: bool = False
-) -> tuple[str, ...]:
-    words = {
-        "all": "taps as they are",
-        "ee": "even in y, even in x",
-        "eo": "even in y, odd in x",
-        "oe": "odd in y, even in x",
-        "oo": "odd in y, odd in x",
-    }
-    return tuple(
-        f"{len(group)} x {products[group[0]].exact.shape[0]} x "
-        f"{products[group[0]].exact.shape[1]} coefficients, {words[products[group[0]].basis]}"
-        + f", working plane {products[group[0]].plane + 1}"
-        * coloured
-        for group in groups
-    )
-
-
-def _name(products: list[Product], sums: Mapping[int, Sum], tiles: TileFFT | None) -> str:
-    used = {products[p].basis for k in sums if tiles is None or k not in tiles.kernels
-            for p, _ in sums[k]}  # fmt: skip
-    rows = "parity" if used - {"all"} else "direct"
-    if tiles is None:
-        return rows
-    return f"{rows} and tile FFT" if used else "tile FFT"
-
-
-def _mixing(bank: Bank) -> tuple[int, int]:
-    """Multiplies and additions a pixel that make the working planes."""
-    if bank.mix is None:
-        return 0, 0
-    planes, samples = bank.mix.shape
-    return planes * samples, planes * (samples - 1)
-
-
-def _counted(
-    bank: Bank,
-    products: list[Product],
-    groups: list[list[int]],
-    sums: Mapping[int, Sum],
-    tiles: TileFFT | None,
-) -> tuple[tuple[str, ...], float, float]:
-    """What is computed, in words, and its multiplies and additions a pixel."""
-    if tiles is None:
-        mixing = _mixing(bank)
-        work = float(sum(p.exact.size for p in products) + mixing[0])
-        summed = float(_additions(products, groups, sums) + mixing[1])
-        return _lines(products, groups, bank.planes > 1), work, summed
-    rest = {k: terms for k, terms in sums.items() if k not in tiles.kernels}
-    used = {p for terms in rest.values() for p, _ in terms}
-    kept = [[p for p in group if p in used] for group in groups]
-    kept = [group for group in kept if group]
-    times, plus = tile_work(tiles.size, len(tiles.kernels))
-    line = (
-        f"{len(tiles.kernels)} kernels of {tiles.size} x {tiles.size} by tile FFT, blocks of "
-        f"{LENGTH} rows for {tiles.rows}"
-    )
-    multiplies = sum(products[p].exact.size for p in used) + times
-    adds = (_additions(products, kept, rest) if kept else 0) + plus
-    return (*_lines(products, kept), line), float(multiplies), float(adds)
-
-
-def _by_tiles(
-    bank: Bank, products: list[Product], sums: Mapping[int, Sum], kind: str
-) -> tuple[int, ...]:
-    """Kernels whose responses compiled code makes by tile transforms.
-
-    Kernels that make a strength stay with the products, which fused edges need. Of the others a
-    cluster goes when that saves operations. With float pixels none goes unasked: a pixel that is
-    not a number, or far beyond the contract, would spoil its whole block.
-    """
-    if bank.planes > 1:
-        return ()
-    fused = {k for s in range(len(bank.scales)) for _, *pair in strength_members(bank, s)
-             for k in pair if k is not None}  # fmt: skip
-    free = {k: terms for k, terms in sums.items() if k not in fused and terms}
-    each = tile_cost(bank.size, len(free)) / max(len(free), 1) if bank.size <= LARGEST else np.inf
-    unasked = kind == "auto" and bank.contract.format.integer
-    chosen: list[int] = []
-    for cluster in clusters(free):
-        work = sum(products[p].exact.size for p in {p for k in cluster for p, _ in sums[k]})
-        if kind == "fft" or (unasked and CLEARLY * each * len(cluster) < work):
-            chosen += cluster
-    return tuple(sorted(chosen))
-
-
-def make_plan(bank: Bank, kind: str = "auto") -> Plan:
+def make_plan(
+    bank: Bank, kind: str = "auto", *, tolerance: float = 0.0, costs: Costs = STANDING
+) -> Plan:
     """Plan a bank's computation.
 
     Parameters
     ----------
     bank : Bank
-    kind : "direct" (every tap), "parity" (every kernel by its parts), "fft" (every kernel that
-        makes no strength by tile transforms, see :mod:`patchlab.bank.tile_fft`) or "auto", which
-        takes for each set of kernels that share parts whichever needs fewer operations
+    kind : "direct" (every tap), "parity" (every kernel by its parts), "separable" (a column times a
+        row wherever the rank allows, see :mod:`patchlab.bank.separable`), "halved" and "fft" (every
+        kernel that makes no strength at half resolution, where that is within a hundredth of the
+        largest response, or by tile transforms, see :mod:`patchlab.bank.halved` and
+        :mod:`patchlab.bank.tile_fft`), or "auto", which takes for each set of kernels that share
+        parts whichever is cheapest
+    tolerance : error of a response, in working values, that is allowed beyond what rounding may do
+        to a direct sum; with 0, separable products and half resolution must be as exact as that
+    costs : prices that "auto" goes by, see :mod:`patchlab.bank.costs`
 
     Returns
     -------
-    Plan : its ``detail`` holds ``bases`` and ``planes`` (one a product; the working plane),
-        ``coefficients`` (float32 arrays, one a product), ``sums`` (one a kernel),
-        ``product_groups``, ``strength`` (one entry a scale, as :func:`strength_members`), ``fft``
-        (kernels by tile transforms, or None), ``fixed`` (the bank in 16-bit fixed point, or
-        None), ``abi`` (the interface's number), ``asked`` (the kind)
+    Plan : its ``detail`` holds ``bases``, ``planes`` (the working plane), ``coefficients``
+        (float32 arrays) and ``factors`` (float32 column and row of a separable one, or None), one
+        a product; ``sums`` (one a kernel),
+        ``product_groups``, ``strength`` (one entry a scale, as :func:`strength_members`), ``flat``
+        (one a scale, see :mod:`patchlab.bank.flat`), ``fft``
+        and ``halved`` (kernels by tile transforms and at half resolution, or None), ``fixed`` (the
+        bank in 16-bit fixed point, or None), ``abi`` (the interface's number), ``asked`` (the
+        kind), ``tolerance``, ``costs``, ``work`` (counted), ``fixed_ns`` and ``expected_ns`` (of a pixel, by
+        those prices)
 
     Raises
     ------
-    UsageError : an unknown kind, tile transforms of colours, or a scale that lacks the kernels its
-        strength is made of.
+    UsageError : an unknown kind, a kind of plan that colours do not have, a tolerance below zero,
+        or a scale that lacks the kernels its strength is made of.
 
     Notes
     -----
@@ -320,61 +160,112 @@ def make_plan(bank: Bank, kind: str = "auto") -> Plan:
     many pixels a basis value is made of, and X the largest absolute working value of the input
     contract. It holds for every order of summation, with fused multiply-adds or without (Higham
     2002, section 3.1), barring underflow. For float32 pixels X is the contract's largest level:
-    the bound scales with the working values if larger ones are given. Of a colour bank X is that
-    of the product's working plane, whose mixing from C samples counts C roundings more. A kernel by
-    tile transforms has the larger of this bound and :func:`patchlab.bank.tile_fft.bound`; the
-    products stand by for engines that take them instead, and for fixed point.
+    the bound scales with the working values if larger ones are given. A kernel by other means
+    has the larger of this bound and theirs; the products stand by for engines that take them
+    instead, and for fixed point. Of a colour bank X is that of the product's working plane, whose
+    mixing from C samples counts C roundings more; there are no plans but by taps and by parts.
     """
     if kind not in KINDS:
         raise UsageError(f"unknown plan {kind!r}", remedy=f"choose one of {', '.join(KINDS)}")
-    if kind == "fft" and bank.planes > 1:
-        raise UsageError("tile transforms take one plane", remedy="choose auto, direct or parity")
-    exact = bank.taps.astype(np.float64)
-    split, whole = _split(exact)
-    chosen = set(split) if kind == "parity" else set()
-    if kind == "auto":
-        chosen = _worth_splitting(split, whole)
-    mixed = {i: split[i] if i in chosen else whole[i] for i in split}
-    products, sums = share(mixed)
-    groups = _group(products, sums, bank)
-    tiles = tile_fft(bank.taps, _by_tiles(bank, products, sums, kind))
-    mixing = 0 if bank.mix is None else bank.mix.shape[1]
-    spans = tuple(float(reach) * bank.table.span for reach in bank.plane_reach)
-    bounds = _bounds(products, sums, spans, mixing)
-    if tiles is not None:
-        bounds = tuple(
-            max(b, tile_bound(exact[k], bank.table.span)) if k in tiles.kernels else b
-            for k, b in enumerate(bounds)
+    if bank.planes > 1 and kind not in COLOUR_KINDS:
+        raise UsageError(
+            f"a bank of colours has no {kind} plan",
+            remedy=f"choose one of {', '.join(COLOUR_KINDS)}",
         )
-    order = tuple(sums[i] for i in sorted(sums))
-    lines, multiplies, adds = _counted(bank, products, groups, sums, tiles)
+    if not 0 <= tolerance < math.inf:
+        raise UsageError(f"a tolerance is a number of working values from 0 up, not {tolerance}")
+    strength = tuple(strength_members(bank, s) for s in range(len(bank.scales)))
+    fused = frozenset(k for scale in strength for _, *pair in scale for k in pair if k is not None)
+    found = Planner(bank, kind, tolerance, costs, fused).plan()
+    whole = found.whole
     return Plan(
-        kind=_name(products, sums, tiles),
-        groups=lines,
-        multiplies=multiplies,
-        adds=adds,
-        error_bound=bounds,
+        kind=_name(found),
+        groups=_lines(found, bank.planes > 1),
+        multiplies=found.work.multiplies,
+        adds=found.work.adds,
+        error_bound=found.bounds,
+        loads=found.work.loads,
         detail={
-            "bases": tuple(p.basis for p in products),
-            "planes": tuple(p.plane for p in products),
-            "coefficients": tuple(p.rounded for p in products),
-            "sums": order,
-            "fft": tiles,
-            "product_groups": tuple(tuple(g) for g in groups),
+            "bases": tuple(p.basis for p in found.parts.products),
+            "planes": tuple(p.plane for p in found.parts.products),
+            "coefficients": tuple(p.rounded.astype(np.float32) for p in found.parts.products),
+            "factors": tuple(p.factors for p in found.parts.products),
+            "sums": _in_order(found.parts.sums),
+            "fft": found.tiles,
+            "halved": found.halved,
+            "product_groups": found.parts.groups,
             "fixed": None
             if bank.planes > 1
             else fixed_point(
                 bank,
-                [p.basis for p in products],
-                [p.rounded for p in products],
-                order,
-                tuple(tuple(g) for g in groups),
+                [p.basis for p in whole.products],
+                [p.rounded for p in whole.products],
+                _in_order(whole.sums),
+                whole.groups,
             ),
-            "strength": tuple(strength_members(bank, s) for s in range(len(bank.scales))),
+            "strength": strength,
+            "flat": ()
+            if bank.planes > 1
+            else tuple(flat_bound(bank, members, found.bounds) for members in strength),
             "abi": _interface_number(bank),
             "asked": kind,
+            "tolerance": float(tolerance),
+            "costs": costs,
+            "work": found.work,
+            "expected_ns": costs.time(found.work),
+            "fixed_ns": costs.fill + FIXED_SHARE * costs.beyond_fill(_in_whole(bank, whole)),
         },
     )
+
+
+def _in_whole(bank: Bank, whole: Parts) -> Work:
+    """Work of a bank's fixed point: its products, all of them whole."""
+    work = of_products(whole.products, whole.groups, whole.sums.values(), bank.radius)
+    return work + of_planes(len(bank))
+
+
+def _in_order(sums: Mapping[int, Sum]) -> tuple[Sum, ...]:
+    return tuple(sums[k] for k in sorted(sums))
+
+
+def _rows(found: Candidate) -> tuple[list[Product], list[list[int]]]:
+    """Products that compiled responses are made of, and their groups."""
+    terms = [t for k, t in found.parts.sums.items() if k not in found.elsewhere]
+    used = {number for some in terms for number, _ in some}
+    groups = [[p for p in group if p in used] for group in found.parts.groups]
+    return [found.parts.products[p] for p in sorted(used)], [g for g in groups if g]
+
+
+def _name(found: Candidate) -> str:
+    used = _rows(found)[0]
+    words = []
+    if any(p.factors is None for p in used):
+        whole = {p.basis for p in used if p.factors is None}
+        words.append("parity" if whole - {"all"} else "direct")
+    if any(p.factors is not None for p in used):
+        words.append("separable")
+    words += ["tile FFT"] * (found.tiles is not None)
+    words += ["half resolution"] * (found.halved is not None)
+    return " and ".join(words) or "direct"
+
+
+def _lines(found: Candidate, coloured: bool) -> tuple[str, ...]:
+    said = list(described(found.parts.products, _rows(found)[1], coloured))
+    if found.tiles is not None:
+        tiles = found.tiles
+        said.append(
+            f"{len(tiles.kernels)} kernels of {tiles.size} x {tiles.size} by tile FFT, blocks of "
+            f"{LENGTH} rows for {tiles.rows}"
+        )
+    if found.halved is not None:
+        half = found.halved
+        said.append(
+            f"{len(half.kernels)} kernels at half resolution: smoothed by "
+            f"{4 * half.flatness - 1} taps, {2 * half.radius + 1} x {2 * half.radius + 1} taps, "
+            f"interpolated by {2 * half.flatness}"
+        )
+        said += [f"  {line}" for line in described(half.products, half.groups)]
+    return tuple(said)
 
 
 def rebuilt_taps(plan: Plan, size: int) -> Iterator[F64]:
@@ -388,6 +279,9 @@ def rebuilt_taps(plan: Plan, size: int) -> Iterator[F64]:
         for product, sign in terms:
             basis = plan.detail["bases"][product]
             values = plan.detail["coefficients"][product].astype(np.float64)
+            factors = plan.detail["factors"][product]
+            if factors is not None:
+                values = np.outer(*(f.astype(np.float64) for f in factors))
             kernel += sign * unfold(values, basis, c)
         yield kernel
 
@@ -395,12 +289,13 @@ def rebuilt_taps(plan: Plan, size: int) -> Iterator[F64]:
 def describe(plan: Plan) -> str:
     """The plan as a few lines for a person."""
     kernels = len(plan.detail["sums"])
-    tiles = plan.detail["fft"]
-    rows = [s for k, s in enumerate(plan.detail["sums"]) if not tiles or k not in tiles.kernels]
+    others = [plan.detail[way].kernels for way in ("fft", "halved") if plan.detail[way]]
+    elsewhere = {k for some in others for k in some}
+    rows = [s for k, s in enumerate(plan.detail["sums"]) if k not in elsewhere]
     shared = sum(len(terms) for terms in rows) - len({p for terms in rows for p, _ in terms})
     head = (
-        f"{plan.kind} plan: {kernels} kernels, {plan.multiplies:.0f} multiplies and "
-        f"{plan.adds:.0f} additions a pixel"
+        f"{plan.kind} plan: {kernels} kernels, {plan.multiplies:.0f} multiplies, "
+        f"{plan.adds:.0f} additions and {plan.loads:.0f} loads a pixel"
     )
     if shared:
         head += f"; {shared} parts are shared between kernels"
@@ -408,4 +303,9 @@ def describe(plan: Plan) -> str:
     fixed = plan.detail["fixed"]
     if fixed is not None:
         worst += f"; in 16-bit fixed point {max(fixed.bound):.3g}, nothing can overflow"
-    return "\n".join([head, *(f"  {line}" for line in plan.groups), worst])
+    float_ns, fixed_ns = plan.detail["expected_ns"], plan.detail["fixed_ns"]
+    speed = f"about {float_ns:.1f} ns a pixel by the plan's prices"
+    if fixed is not None:
+        speed += f", {fixed_ns:.1f} in fixed point: "
+        speed += "fixed point is faster" if fixed_ns < float_ns else "float32 is faster"
+    return "\n".join([head, *(f"  {line}" for line in plan.groups), worst, speed])

@@ -2,8 +2,9 @@
 
 from __future__ import annotations
 
-from collections.abc import Mapping
-from dataclasses import dataclass
+from collections.abc import Iterable, Mapping, Sequence
+from dataclasses import dataclass, replace
+from typing import Any
 
 import numpy as np
 
@@ -13,19 +14,33 @@ PARITY_BASES = ("ee", "eo", "oe", "oo")
 
 Sum = tuple[tuple[int, int], ...]
 """A kernel as ((product, +1 or -1), ...)."""
+GROUP = 6
+"""Products that are computed together: what the registers of a core hold."""
 
 
 @dataclass(frozen=True, eq=False)
 class Product:
-    """Coefficients and the basis they are dotted with, exact and as float32.
+    """Coefficients and the basis they are dotted with.
 
-    ``plane`` is the working plane that the basis is of.
+    Parameters
+    ----------
+    basis : all, ee, eo, oe or oo
+    exact : what the product stands for
+    rounded : what is computed: float32 coefficients, or the float64 product of the factors
+    factors : float32 column and row, where the product is separable
+    plane : the working plane that the basis is of
     """
 
     basis: str
     exact: F64
-    rounded: F32
+    rounded: F32 | F64
+    factors: tuple[F32, F32] | None = None
     plane: int = 0
+
+    @property
+    def multiplies(self) -> float:
+        """Multiplies a pixel, a separable product's columns counted once."""
+        return float(self.exact.size if self.factors is None else sum(self.exact.shape))
 
 
 Part = tuple[int, str]
@@ -81,6 +96,19 @@ def trimmed(basis: str, part: F64) -> F64:
     return part[: rows.max(initial=0) + 1, : cols.max(initial=0) + 1]
 
 
+def padded(product: Product, shape: tuple[int, int]) -> Product:
+    """A product with zeros at its rim; taps stay centred."""
+    down, right = (n - m for n, m in zip(shape, product.exact.shape, strict=True))
+    if not (down or right):
+        return product
+    room = ((0, down), (0, right))
+    if product.basis == "all":
+        room = ((down // 2, down // 2), (right // 2, right // 2))
+    exact: F64 = np.pad(product.exact, room)
+    rounded: F32 = np.pad(product.rounded, room)
+    return replace(product, exact=exact, rounded=rounded)
+
+
 def uses_of(basis: str, shape: tuple[int, int]) -> F64:
     """How many pixels each basis value is made of: 1, 2 or 4."""
     if basis == "all":
@@ -92,6 +120,11 @@ def uses_of(basis: str, shape: tuple[int, int]) -> F64:
 
 
 # ---------------------------------------------------------------- sharing
+
+
+def in_plane(parts: Mapping[str, F64], plane: int = 0) -> dict[Part, F64]:
+    """The parts of a kernel on one working plane."""
+    return {(plane, basis): part for basis, part in parts.items()}
 
 
 def share(parts: Mapping[int, Mapping[Part, F64]]) -> tuple[list[Product], dict[int, Sum]]:
@@ -109,7 +142,8 @@ def share(parts: Mapping[int, Mapping[Part, F64]]) -> tuple[list[Product], dict[
             key = (where, exact.shape, (exact + 0.0).tobytes())  # + 0.0: minus zero is zero
             if key not in known:
                 place = len(products)
-                products.append(Product(basis, exact, exact.astype(np.float32), plane))
+                rounded = exact.astype(np.float32)
+                products.append(Product(basis, exact, rounded, plane=plane))
                 known[(where, exact.shape, (0.0 - exact).tobytes())] = (place, -1)
                 known[key] = (place, 1)
             terms.append(known[key])
@@ -148,3 +182,34 @@ def unfold(values: F64, basis: str, c: int) -> F64:
     quarter[top : top + rows, left : left + cols] = values
     half = np.concatenate([(1 if basis[1] == "e" else -1) * quarter[:, :0:-1], quarter], axis=1)
     return np.concatenate([(1 if basis[0] == "e" else -1) * half[:0:-1], half])
+
+
+def in_groups(keys: Mapping[int, tuple[Any, ...]]) -> list[list[int]]:
+    """Products with one key, at most GROUP together, in the order of the keys."""
+    groups: list[list[int]] = []
+    for key in sorted(set(keys.values())):
+        same = [p for p in sorted(keys) if keys[p] == key]
+        count = -(-len(same) // GROUP)
+        groups += [list(map(int, part)) for part in np.array_split(same, count)]
+    return groups
+
+
+def described(
+    products: Sequence[Product], groups: Iterable[Sequence[int]], coloured: bool = False
+) -> tuple[str, ...]:
+    """Groups of products, a line each, for a person; ``coloured`` names their planes."""
+    words = {
+        "all": "taps as they are",
+        "ee": "even in y, even in x",
+        "eo": "even in y, odd in x",
+        "oe": "odd in y, even in x",
+        "oo": "odd in y, odd in x",
+    }
+    said = []
+    for group in groups:
+        first = products[group[0]]
+        rows, cols = first.exact.shape
+        how = "coefficients" if first.factors is None else "coefficients as column times row"
+        plane = f", working plane {first.plane + 1}" if coloured else ""
+        said.append(f"{len(group)} x {rows} x {cols} {how}, {words[first.basis]}{plane}")
+    return tuple(said)

@@ -38,9 +38,6 @@ LENGTH = 64
 """Rows of a block."""
 LARGEST = 33
 """Largest kernel side: beyond, more than half of a block is overlap."""
-TRANSFORM = 20.0
-"""About how many operations on vectors one transform, its loads and its stores cost for each row
-of output, in multiply-adds. Measured at 32 kernels of 15 x 15 on an x86-64 core with AVX-512."""
 
 
 @dataclass(frozen=True, eq=False)
@@ -62,13 +59,6 @@ class TileFFT:
     def rows(self) -> int:
         """Rows of output of a block."""
         return LENGTH - self.size + 1
-
-
-def cost(size: int, kernels: int) -> float:
-    """Multiply-adds a pixel for some kernels, transforms counted as if they were such."""
-    rows = LENGTH - size + 1
-    product = 4 * size * (LENGTH // 2 + 1) / rows
-    return kernels * (product + TRANSFORM) + TRANSFORM * LENGTH / rows
 
 
 def work(size: int, kernels: int) -> tuple[float, float]:

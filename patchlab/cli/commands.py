@@ -530,6 +530,12 @@ def _say_assess(result: dict[str, Any]) -> None:
 @click.option("--repeats", default=7, type=click.IntRange(3, 100), help="Timed runs of each.")
 @click.option("--against-libraries", is_flag=True, help="Run the installed libraries too.")
 @click.option("--cases", is_flag=True, help="Time the fixed banks in place of a BANK.")
+@click.option(
+    "--calibrate",
+    type=click.Path(dir_okay=False, path_type=Path),
+    metavar="FILE",
+    help="Fit the planner's prices to this machine and write them to FILE, for export --costs.",
+)
 @_shared
 def bench(
     bank: Path | None,
@@ -537,12 +543,22 @@ def bench(
     repeats: int,
     against_libraries: bool,
     cases: bool,
+    calibrate: Path | None,
     terminal: Terminal,
     as_json: bool,
 ) -> None:
     """Time a BANK's plans and targets side by side, one thread and two, as ratios of one run."""
     from patchlab.pipeline import bench as timed
+    from patchlab.pipeline.calibrate import calibrate as fit_costs
     from patchlab.pipeline.loaded import bank_folder
+
+    if calibrate is not None:
+        if cases or bank is not None or against_libraries:
+            raise UsageError("--calibrate stands alone: it times banks of its own")
+        with terminal.working():
+            fit = fit_costs(calibrate, repeats, progress=terminal)
+        _print(fit, as_json, _say_costs)
+        return
 
     try:
         width, height = (int(part) for part in size.lower().split("x"))
@@ -551,7 +567,7 @@ def bench(
             f"--size {size!r} is not WIDTHxHEIGHT", remedy="for example 1920x1080"
         ) from None
     if cases == (bank is not None):
-        raise UsageError("name a BANK or give --cases, and not both")
+        raise UsageError("name a BANK, or give --cases or --calibrate, and only one of them")
     with terminal.working():
         if bank is None:
             result = timed.cases(width, height, repeats, peers=against_libraries, progress=terminal)
@@ -563,23 +579,40 @@ def bench(
     _print(result, as_json, _say_bench)
 
 
+def _say_costs(result: dict[str, Any]) -> None:
+    rows = [(r["plan"], f"{r['measured_ns']:.2f}", f"{r['model_ns']:.2f}") for r in result["plans"]]
+    table(rows, ("plan", "measured ns a pixel", "model"))
+    prices = ", ".join(f"{name} {value:.3g}" for name, value in result["prices_ns"].items())
+    click.echo(f"prices in ns: {prices}")
+    click.echo(f"written to {result['file']}: patchlab export --costs {result['file']} goes by it")
+
+
 def _say_bench(result: dict[str, Any]) -> None:
     for case in result.get("cases", [result]):
+        click.echo(f"{case['bank']}: {case['plan']}")
         table(
             [
                 (
                     f"{case['bank']}: {p['kind']}{' (chosen)' if p['chosen'] else ''}",
                     f"{p['multiplies_per_pixel']:.0f}",
                     f"{p['adds_per_pixel']:.0f}",
+                    f"{p['loads_per_pixel']:.0f}",
                     f"{p['scratch_bytes'] / 1024:.0f}",
                     f"{p['error_bound']:.2g}",
                     f"{p['compile_s']:.1f}",
+                    f"{p['library_bytes'] / 1024:.0f}",
+                    f"{p['first_call_ms']:.2f}",
+                    f"{p['expected_ms']:.1f}",
                     f"{p['median_ms']:.1f}",
+                    f"{p['cpu_ms']:.1f}",
                 )
                 for p in case["plans"]
             ],
-            ("plan", "multiplies", "additions", "scratch kB", "bound", "compiled s", "median ms"),
-        )
+            (
+                "plan", "multiplies", "additions", "loads", "scratch kB", "bound", "compiled s",
+                "library kB", "first call ms", "expected ms", "median ms", "processor ms",
+            ),
+        )  # fmt: skip
         table(
             [
                 (
@@ -603,6 +636,9 @@ def _say_bench(result: dict[str, Any]) -> None:
                 "note",
             ),
         )
+        if case["skipped"] is not None:
+            shares = ", ".join(f"{100 * share:.1f} %" for share in case["skipped"]["share"])
+            click.echo(f"skipped as provably flat, by scale: {shares}")
 
 
 @patchlab.command()

@@ -11,7 +11,7 @@ import numpy as np
 
 from patchlab.conventions import BORDERS
 from patchlab.errors import UsageError
-from patchlab.export import c_code, c_colour, c_edgels, c_fft, c_fixed
+from patchlab.export import c_code, c_colour, c_edgels, c_fft, c_fixed, c_flat, c_halved
 from patchlab.export.c_edge_model import EdgelRules
 from patchlab.export.c_text import (
     fill,
@@ -124,6 +124,8 @@ def emit(bank: Bank, plan: Plan, edgels: EdgelRules | None = None) -> dict[str, 
     if edgels is not None:
         about |= MATHEMATICS
     about |= {k: _told(v, about) for k, v in c_colour.sections(bank).items()}
+    about |= c_flat.sections(bank, plan, CHUNK)
+    about |= c_halved.sections(plan, CHUNK, _line(bank.radius))
 
     # texts with tokens of their own are filled before they are put in place
     about |= {k: fill(str(v), {"N": name}).decode() for k, v in about.items() if "@N@" in str(v)}
@@ -174,7 +176,8 @@ def _about(bank: Bank, plan: Plan) -> dict[str, object]:
         "LINE": line,
         "TILE": tile,
         "FOLDED": folded,
-        "WORK": folded + (products + 2) * CHUNK,
+        "COLUMNS": (products + 2) * CHUNK,
+        "WORK": folded + (products + 2) * CHUNK + c_code.columns(plan) * line,
         "PLAN": f"{plan.kind}, {plan.multiplies:.0f} multiplies a pixel.",
         **(MATHEMATICS if roots else dict.fromkeys(MATHEMATICS, "")),
         "VERSION": VERSION,
@@ -189,7 +192,7 @@ def _line(radius: int) -> int:
 def _sections(bank: Bank, plan: Plan) -> dict[str, object]:
     """The parts of the source that depend on the bank."""
     scales = range(len(plan.detail["strength"]))
-    fft = plan.detail.get("fft")
+    fft, half = plan.detail["fft"], plan.detail["halved"]
     return {
         "THRESHOLDS": _thresholds(bank),
         "CODES": ",\n".join(f"    @N@_{word} = {i}" for i, (word, _) in enumerate(CODES)),
@@ -206,6 +209,7 @@ def _sections(bank: Bank, plan: Plan) -> dict[str, object]:
         "JOINS": c_code.joins(plan),
         "RESPONSES": c_code.responses(plan),
         "EDGES": "".join(c_code.edges(bank, plan, s) for s in scales),
+        **{f"HALF_{isa}": f"@N@_half_block_{isa}" if half else "NULL" for isa in ISAS},
         **{f"FFT_{isa}": f"@N@_fft_block_{isa}" if fft else "NULL" for isa in ISAS},
         "ROWS_CALL": ROWS_CALL if c_code.by_rows(plan) else "",
         **(c_code.TAKE if scales else dict.fromkeys(c_code.TAKE, "")),

@@ -10,6 +10,7 @@ from typing import Any
 
 import numpy as np
 
+from patchlab.export import c_separable
 from patchlab.export.c_text import lines, numbers
 from patchlab.types import Bank, Plan
 
@@ -19,12 +20,34 @@ def folds(plan: Plan) -> bool:
     return any(plan.detail["bases"][p] != "all" for p in needed(plan))
 
 
+def columns(plan: Plan) -> int:
+    """Lines of columns that separable products keep at a time."""
+    groups = [plan.detail["product_groups"][g] for g in used_groups(plan)]
+    return max((len(g) for g in groups if plan.detail["factors"][g[0]] is not None), default=0)
+
+
+def about(number: int, plan: Plan) -> str:
+    """A group of products in words."""
+    group = plan.detail["product_groups"][number]
+    rows, cols = plan.detail["coefficients"][group[0]].shape
+    basis = plan.detail["bases"][group[0]]
+    if basis == "all":
+        return f"{len(group)} x {rows} x {cols} coefficients, taps as they are"
+    words = {"e": "even", "o": "odd"}
+    return (
+        f"{len(group)} x {rows} x {cols} coefficients, {words[basis[0]]} in y, "
+        f"{words[basis[1]]} in x"
+    )
+
+
 def coefficients(number: int, plan: Plan) -> str:
     """The coefficients of a group: by row, column, product, as they are read."""
     group = plan.detail["product_groups"][number]
+    if plan.detail["factors"][group[0]] is not None:
+        return c_separable.coefficients(number, plan)
     stack = np.stack([plan.detail["coefficients"][p] for p in group], axis=-1)
     return (
-        f"/* {plan.groups[number]} */\n"
+        f"/* {about(number, plan)} */\n"
         f"static const float @N@_group{number}_taps[{stack.size}] = {{\n"
         f"{numbers(np.ascontiguousarray(stack, dtype=np.float32))}\n}};\n"
     )
@@ -77,6 +100,8 @@ def _step(group: Any, left: str, right: str) -> list[str]:
 def group_code(number: int, plan: Plan, radius: int) -> str:
     """C function that computes a group of products on one chunk."""
     group = plan.detail["product_groups"][number]
+    if plan.detail["factors"][group[0]] is not None:
+        return c_separable.group_code(number, plan, radius)
     basis = plan.detail["bases"][group[0]]
     height, width = plan.detail["coefficients"][group[0]].shape
     second = " + @N@_LANES"
@@ -120,7 +145,7 @@ def group_code(number: int, plan: Plan, radius: int) -> str:
         "}",
     ]
     head = f"static @N@_TARGET void @N@_FN(group{number})({arguments})"
-    return f"/* {plan.groups[number]} */\n{head}\n{{\n{lines(body, 4)}\n}}\n"
+    return f"/* {about(number, plan)} */\n{head}\n{{\n{lines(body, 4)}\n}}\n"
 
 
 def _in(rows: list[str], by: int = 4) -> list[str]:
@@ -198,9 +223,8 @@ def joins(plan: Plan) -> str:
 
 
 def by_rows(plan: Plan) -> list[int]:
-    """Kernels that are computed row by row; the others go by tile transforms."""
-    tiles = plan.detail.get("fft")
-    others = tiles.kernels if tiles else ()
+    """Kernels that are computed row by row; the others go by transforms or half resolution."""
+    others = {k for way in ("fft", "halved") if plan.detail[way] for k in plan.detail[way].kernels}
     return [k for k in range(len(plan.detail["sums"])) if k not in others]
 
 
@@ -287,7 +311,7 @@ typedef int @N@_FN(bits) __attribute__((vector_size(4 * @N@_LANES)));
 """Keeping the winner, by instruction set; left out of a bank without a strength."""
 
 
-def _expression(terms: Any) -> str:
+def expression(terms: Any) -> str:
     """A kernel's response at x."""
     text = "".join(
         f"{' + ' if s > 0 else ' - '}@N@_LOAD(t + {p} * @N@_CHUNK + x)" for p, s in terms
@@ -300,11 +324,11 @@ def _magnitude(plan: Plan, member: Any) -> list[str]:
     _, even, odd = member
     sums = plan.detail["sums"]
     if even is None or odd is None:
-        only = _expression(sums[odd if even is None else even])
+        only = expression(sums[odd if even is None else even])
         return [f"v = {only};", "v = @N@_ABS(v);"]
     return [
-        f"e = {_expression(sums[even])};",
-        f"o = {_expression(sums[odd])};",
+        f"e = {expression(sums[even])};",
+        f"o = {expression(sums[odd])};",
         "v = e * e + o * o;",
     ]
 

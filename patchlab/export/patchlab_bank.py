@@ -86,6 +86,21 @@ class Edges(NamedTuple):
     threshold: float
 
 
+class FixedPoint(NamedTuple):
+    """A bank in 16-bit fixed point.
+
+    ``step`` : float32 (n,), working value of one count of a kernel. ``error_bound`` : (n,), largest
+    error of ``step * count``. ``taps`` : the whole kernels; ``codes`` : of every pixel value;
+    ``shift`` : bits that a sum is shifted by.
+    """
+
+    step: Array
+    error_bound: Array
+    taps: Array
+    codes: Array
+    shift: Array
+
+
 def load(folder: str | os.PathLike[str], library: bool | None = None) -> Bank:
     """Load a bank from its folder; the hash of every file is checked before its use.
 
@@ -119,7 +134,8 @@ class Bank:
     (n, h, h), of colour pixels (n, h, h, planes); ``size`` (side of a kernel); ``pixels`` (format
     by its GenICam name) and ``dtype``; ``border``; ``error_bound`` (one a kernel); ``scales`` and
     ``angles`` (radians, one a direction, by scale); ``manifest``; ``compiled`` (the library in
-    use, or None).
+    use, or None); ``fixed`` (fixed point, or None): its ``step`` (value of one count) and
+    ``error_bound``, one a kernel.
     """
 
     compiled: _Library | None = None
@@ -157,6 +173,7 @@ class Bank:
         self._table = self._array("input_table.npy") if self.bits < 32 else None
         if self._table is not None and self._table.shape != (1 << self.bits,):
             raise BankError(f"{self.folder}: the input table does not fit the pixel format")
+        self.fixed = self._fixed_point()
         self._members = _members(head["kernels"], self.strength)
         self.scales = tuple(sorted(self._members))
         self.angles = {s: _angles(head["kernels"], self._members[s]) for s in self.scales}
@@ -174,6 +191,27 @@ class Bank:
     def size_of(self, image: Array) -> tuple[int, int]:
         """Height and width of a picture, in pixels (of a mosaic, in cells)."""
         return image.shape[0] // self.cell, image.shape[1] // self.cell
+
+    def _fixed_point(self) -> FixedPoint | None:
+        about = self.manifest["fixed_point"]
+        if about is None:
+            return None
+        taps, codes = (self._whole(n) for n in ("fixed_kernels.npy", "fixed_codes.npy"))
+        shift, step, bound = (
+            np.array(about[k]) for k in ("shift", "value_of_a_count", "error_bound")
+        )
+        fits = taps.shape == self.taps.shape and codes.shape == (1 << self.bits,)
+        if not fits or any(v.shape != (len(taps),) for v in (shift, step, bound)):
+            raise BankError(f"{self.folder}: the fixed point does not fit the kernels")
+        if shift.dtype.kind != "i" or not ((shift >= 0) & (shift < 32)).all():
+            raise BankError(f"{self.folder}: the fixed point's shifts make no sense")
+        return FixedPoint(step.astype(np.float32), bound.astype(float), taps, codes, shift)
+
+    def _whole(self, name: str) -> Array:
+        found = _npy(_read(self.folder, self.manifest, name), self.folder / name)
+        if found.dtype.kind != "i":
+            raise BankError(f"{self.folder / name}: holds other things than whole numbers")
+        return found.astype(np.int64)
 
     def _array(self, name: str) -> Array:
         data = _read(self.folder, self.manifest, name)
@@ -212,6 +250,46 @@ class Bank:
         if self.compiled is not None:
             return self.compiled.responses(image, threads)
         return self._planes(image, range(len(self.kernels)))
+
+    def responses_fixed(self, image: Array, threads: int = 1) -> tuple[Array, int]:
+        """Responses in 16-bit fixed point, the same bits with the library and without.
+
+        Parameters
+        ----------
+        image, threads : as :meth:`responses`
+
+        Returns
+        -------
+        int16 (n, h, w) : counts; ``fixed.step[k] * counts[k]`` are responses
+        int : how many counts stand at the ends of the range
+
+        Raises
+        ------
+        BankError : the picture does not fit, or the bank has no fixed point.
+        """
+        image = self._checked(image)
+        self._need_fixed()
+        if self.compiled is not None:
+            return self.compiled.responses_fixed(image, threads)
+        out = self._counts(image, range(len(self.kernels)))
+        return out, int((np.abs(out.astype(np.int32)) == 32767).sum())
+
+    def _need_fixed(self) -> FixedPoint:
+        if self.fixed is None:
+            raise BankError(f"bank {self.name} has no fixed point: it takes {self.pixels} pixels")
+        return self.fixed
+
+    def _counts(self, image: Array, kernels: Sequence[int]) -> Array:
+        """Some kernels' counts by numpy: whole numbers below 2^53, exact in float64."""
+        fixed = self._need_fixed()
+        self._working(image)  # refuses codes beyond the format
+        sums = self._sums(
+            fixed.codes[image].astype(np.float64)[None], fixed.taps[list(kernels)], np.int64
+        )
+        for plane, k in zip(sums, kernels, strict=True):
+            b = int(fixed.shift[k])
+            plane[:] = (plane + (1 << b >> 1)) >> b
+        return np.clip(sums, -32767, 32767).astype(np.int16)
 
     def _checked(self, image: Array) -> Array:
         flat = self.samples == 1 or self.cell > 1
@@ -263,13 +341,17 @@ class Bank:
 
     def _planes(self, image: Array, kernels: Sequence[int]) -> Array:
         """Some kernels' responses by numpy: float64 sums, rounded once."""
-        h, w = self.size_of(image)
-        mode: Any = PAD_MODES[self.border]
         planes = self._working_planes(image)
+        return self._sums(planes, self.taps[list(kernels)], np.float32)
+
+    def _sums(self, planes: Array, taps: Array, dtype: Any) -> Array:
+        """Correlations with working planes (planes, h, w), summed in float64."""
+        h, w = planes.shape[1:]
+        mode: Any = PAD_MODES[self.border]
         padded = [np.pad(plane, self.radius, mode=mode) for plane in planes]
         area = self.size**2
-        taps = self.taps[list(kernels)].reshape(-1, area, len(planes)).astype(np.float64)
-        out = np.empty((len(taps), h, w), np.float32)
+        taps = taps.reshape(-1, area, len(planes)).astype(np.float64)
+        out = np.empty((len(taps), h, w), dtype)
         step = max(1, BAND_VALUES // (w * area))
         for top in range(0, h, step):
             sums: Array = 0.0
@@ -282,7 +364,9 @@ class Bank:
 
     # ------------------------------------------------------------ edges
 
-    def strengths(self, image: Array, scale: int, threads: int = 1) -> tuple[Array, Array]:
+    def strengths(
+        self, image: Array, scale: int, threads: int = 1, fixed: bool = False
+    ) -> tuple[Array, Array]:
         """Strength of one scale and the number of the winning direction.
 
         Parameters
@@ -290,6 +374,7 @@ class Bank:
         image : as :meth:`responses`
         scale : one of ``scales``
         threads : as :meth:`responses`
+        fixed : in 16-bit fixed point
 
         Returns
         -------
@@ -302,8 +387,12 @@ class Bank:
         image = self._checked(image)
         if scale not in self.scales:
             raise BankError(f"bank {self.name} has no scale {scale}")
+        if fixed:
+            self._need_fixed()
         if self.compiled is not None:
-            return self.compiled.edges(image, self.scales.index(scale), threads)
+            return self.compiled.edges(image, self.scales.index(scale), threads, fixed)
+        if fixed:
+            return self._strengths_fixed(image, scale)
         best = np.full(self.size_of(image), -1, np.float32)
         winner = np.zeros(best.shape, np.uint8)
         for turn, members in self._members[scale]:
@@ -312,6 +401,19 @@ class Bank:
             winner[size > best] = turn
             np.maximum(best, size, out=best)
         return (np.sqrt(best) if self.strength == "energy" else best), winner
+
+    def _strengths_fixed(self, image: Array, scale: int) -> tuple[Array, Array]:
+        best = np.full(image.shape, -1, np.int32)
+        winner = np.zeros(image.shape, np.uint8)
+        for turn, members in self._members[scale]:
+            planes = self._counts(image, members).astype(np.int32)
+            size = np.abs(planes[0]) if len(planes) == 1 else planes[0] ** 2 + planes[1] ** 2
+            winner[size > best] = turn
+            np.maximum(best, size, out=best)
+        strength = best.astype(np.float32)
+        if self.strength == "energy":
+            strength = np.sqrt(strength)
+        return self._need_fixed().step[self._members[scale][0][1][0]] * strength, winner
 
     def threshold(self, rate: float = RATE) -> float:
         """The strength that promises ``rate`` false elements per megapixel of flat picture.
@@ -338,6 +440,8 @@ class Bank:
         rate: float | None = None,
         threshold: float | None = None,
         threads: int = 1,
+        invalid: Array | None = None,
+        fixed: bool = False,
     ) -> Edges:
         """Edges of one picture.
 
@@ -347,6 +451,8 @@ class Bank:
         rate : false elements per megapixel of flat picture; 10 when nothing is given
         threshold : a strength instead of a rate
         threads : as :meth:`responses`
+        invalid : bool (h, w); elements whose kernel touches such a pixel are dropped
+        fixed : strengths in 16-bit fixed point
 
         Returns
         -------
@@ -360,11 +466,13 @@ class Bank:
         rules = self._rules()
         high = self._high(rate, threshold)
         low = float(rules["hysteresis"]) * high
-        maps = [self.strengths(image, s["scale"], threads) for s in rules["scales"]]
+        maps = [self.strengths(image, s["scale"], threads, fixed) for s in rules["scales"]]
         planes = [
             _candidates(strength, turn, about, rules, low, self._rival(image, about, threads))
             for (strength, turn), about in zip(maps, rules["scales"], strict=True)
         ]
+        if invalid is not None:
+            _drop(planes, _mask(invalid, image), rules)
         edges, level = _cascade(planes, low, high, int(rules["dilation_px"]))
         return _joined(maps, [s["scale"] for s in rules["scales"]], edges, level, high)
 
@@ -521,6 +629,20 @@ def _candidates(
     return np.where(keep, strength, np.float32(0))
 
 
+def _mask(invalid: Array, image: Array) -> Array:
+    if not isinstance(invalid, np.ndarray) or invalid.dtype != bool:
+        raise BankError("invalid is an array of bool, one a pixel")
+    if invalid.shape != image.shape:
+        raise BankError(f"invalid is {invalid.shape}, the picture {image.shape}")
+    return invalid
+
+
+def _drop(planes: list[Array], invalid: Array, rules: Mapping[str, Any]) -> None:
+    """Remove the elements whose kernel touches a pixel that does not count."""
+    for plane, about in zip(planes, rules["scales"], strict=True):
+        plane[_largest_around(invalid, int(about["reach_px"]))] = 0
+
+
 def _largest_around(plane: Array, half: int) -> Array:
     """The largest value of every (2 half + 1) square, the rim repeated outwards."""
     out, size = np.pad(plane, half, mode="edge"), 2 * half + 1
@@ -612,6 +734,13 @@ class _Library:
         self._edges = self._function(
             "edges_rows", number, *picture, number, pointer, stride, pointer, stride, pointer
         )
+        if bank.fixed is not None:
+            self._counts = self._function(
+                "responses_q_rows", number, *picture, pointer, stride, stride, pointer, pointer
+            )
+            self._edges_q = self._function(
+                "edges_q_rows", number, *picture, number, pointer, stride, pointer, stride, pointer
+            )
         if self._function("abi", number)() != bank.manifest["interface"]:
             raise BankError(f"the library in {bank.folder} belongs to another bank")
 
@@ -635,12 +764,30 @@ class _Library:
         self._run(image, threads, band)
         return out
 
-    def edges(self, image: Array, place_of_scale: int, threads: int) -> tuple[Array, Array]:
+    def responses_fixed(self, image: Array, threads: int) -> tuple[Array, int]:
+        out, ends = np.empty((self.kernels, *image.shape), np.int16), []
+
+        def band(place: tuple[Any, ...], first: int, count: int, scratch: Array) -> int:
+            found = ctypes.c_uint64(0)
+            code = self._counts(
+                *place, first, count, out.ctypes.data + first * out.strides[1], out.strides[1],
+                out.strides[0], ctypes.addressof(found), scratch.ctypes.data,
+            )  # fmt: skip
+            ends.append(int(found.value))
+            return int(code)
+
+        self._run(image, threads, band)
+        return out, sum(ends)
+
+    def edges(
+        self, image: Array, place_of_scale: int, threads: int, fixed: bool
+    ) -> tuple[Array, Array]:
+        call = self._edges_q if fixed else self._edges
         size = self.size_of(image)
         strength, turn = np.empty(size, np.float32), np.empty(size, np.uint8)
 
         def band(place: tuple[Any, ...], first: int, count: int, scratch: Array) -> int:
-            code = self._edges(
+            code = call(
                 *place, first, count, place_of_scale,
                 strength[first:].ctypes.data, strength.strides[0],
                 turn[first:].ctypes.data, turn.strides[0], scratch.ctypes.data,

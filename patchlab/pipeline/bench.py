@@ -6,20 +6,19 @@ import math
 import time
 from collections.abc import Iterator, Mapping
 from pathlib import Path
-from typing import Any, Literal
+from typing import Any
 
 import numpy as np
 
 from patchlab import bank as banks
 from patchlab import export, store
-from patchlab.bank.lattice import lattice_bank
 from patchlab.bank.plan import KINDS
 from patchlab.errors import UsageError
 from patchlab.export.bench import Entrant, Timing
-from patchlab.families import render
+from patchlab.pipeline.bench_banks import fixed_cases
 from patchlab.pipeline.bundle import open_native
 from patchlab.progress import Progress, silent
-from patchlab.types import F32, F64, Bank, InputContract, InputTable, Kernel, Plan
+from patchlab.types import F32, Bank, Plan
 
 SMALL = (131, 257)
 """Rows and columns of the picture on which results are compared with the exact ones."""
@@ -64,7 +63,7 @@ def _bench(
     peers: bool,
     progress: Progress,
 ) -> dict[str, Any]:
-    built = list(_built(bank))
+    built = list(_built(bank, plan))
     first = [native] if native is not None else [b for b, about in built if about["chosen"]]
     entrants = [e for n in first for e in _compiled(n, plan)]
     entrants += [_planes(b, about["plan"], f"plan {about['asked']}") for b, about in built]
@@ -84,17 +83,22 @@ def _bench(
         progress=progress,
     )
     alone = {t.target: t for t in timings if t.threads == 1}
+    flat = skipped(first[0], export.bench.picture(bank, *size)) if first else None
     for _, about in built:
         name = f"plan {about['asked']}"
+        about["expected_ms"] = round(about["plan"].detail["expected_ns"] * math.prod(size) / 1e6, 3)
         about["median_ms"] = round(alone[name].median_ms, 3)
+        about["cpu_ms"] = round(alone[name].cpu_ms, 3)
         del about["plan"]
     return {
         "bank": bank.name,
         "size": list(size),
         "kernels": len(bank),
         "kernel_size": bank.size,
+        "plan": banks.describe(plan),
         "plans": [about for _, about in built],
         "targets": [_row(t, alone) for t in timings],
+        "skipped": flat,
     }
 
 
@@ -116,12 +120,16 @@ def _row(t: Timing, alone: Mapping[str, Timing]) -> dict[str, Any]:
 # ---------------------------------------------------------------- our own targets
 
 
-def _built(bank: Bank) -> Iterator[tuple[banks.NativeBank, dict[str, Any]]]:
+def _built(bank: Bank, chosen: Plan) -> Iterator[tuple[banks.NativeBank, dict[str, Any]]]:
     """Every plan that differs from those before it, compiled; none without a compiler."""
-    compiler = export.find_compiler()
-    chosen, seen = banks.make_plan(bank), set()
-    for kind in KINDS[1:]:
-        plan = banks.make_plan(bank, kind)
+    compiler, seen = export.find_compiler(), set()
+    about = chosen.detail
+    asked = [
+        banks.make_plan(bank, kind, tolerance=about["tolerance"], costs=about["costs"])
+        for kind in KINDS
+        if kind != "auto"
+    ]
+    for plan in (*asked, chosen):
         if compiler is None or (plan.kind, plan.groups) in seen:
             continue
         seen.add((plan.kind, plan.groups))
@@ -131,20 +139,22 @@ def _built(bank: Bank) -> Iterator[tuple[banks.NativeBank, dict[str, Any]]]:
         compiled = time.perf_counter()
         native = banks.NativeBank(bank, plan, library, store.sha256(library))
         native.responses(export.bench.picture(bank, bank.size, bank.size))
+        first = 1e3 * (time.perf_counter() - compiled)
         yield (
             native,
             {
-                "asked": kind,
+                "asked": plan.detail["asked"],
                 "kind": plan.kind,
                 "chosen": plan.kind == chosen.kind and plan.groups == chosen.groups,
                 "groups": list(plan.groups),
                 "multiplies_per_pixel": plan.multiplies,
                 "adds_per_pixel": plan.adds,
+                "loads_per_pixel": plan.loads,
                 "scratch_bytes": native.scratch_bytes(1920, 1080),
                 "error_bound": max(plan.error_bound),
                 "compile_s": round(compiled - start, 2),
                 "library_bytes": len(library),
-                "first_call_ms": round(1e3 * (time.perf_counter() - compiled), 3),
+                "first_call_ms": round(first, 3),
                 "plan": plan,
             },
         )
@@ -171,6 +181,7 @@ def _compiled(native: banks.NativeBank, plan: Plan) -> Iterator[Entrant]:
             "compiled library, edges", "all scales, float32",
             lambda p, n: [native.edges(p, s, threads=n) for s in scales],
         )  # fmt: skip
+    yield from _above(native)
     if fixed is None:
         return
     room: dict[tuple[int, ...], Any] = {}
@@ -190,6 +201,30 @@ def _compiled(native: banks.NativeBank, plan: Plan) -> Iterator[Entrant]:
         )  # fmt: skip
 
 
+def _above(native: banks.NativeBank) -> Iterator[Entrant]:
+    """Edges above the bank's own threshold; its note tells the share that was skipped."""
+    known = native.bank.thresholds
+    if known is None:
+        return
+    low = known.hysteresis * float(np.interp(10.0, known.rate, known.strength))
+    scales = range(len(native.bank.scales))
+
+    def run(pixels: Any, threads: int) -> Any:
+        return [native.edges_above(pixels, s, low, threads=threads) for s in scales]
+
+    yield Entrant(
+        "compiled library, edges above a threshold", f"all scales, strength {low:.3g}", run
+    )
+
+
+def skipped(native: banks.NativeBank, pixels: Any) -> dict[str, Any] | None:
+    """The share of a picture that is provably too flat, by scale; None without thresholds."""
+    for entrant in _above(native):
+        found = entrant.run(pixels, 1)
+        return {"note": entrant.note, "share": [round(n / pixels.size, 4) for *_, n in found]}
+    return None
+
+
 # ---------------------------------------------------------------- fixed cases
 
 
@@ -204,65 +239,3 @@ def cases(
         )
         found.append({"what": what, **result})
     return {"cases": found}
-
-
-def fixed_cases() -> Iterator[tuple[Bank, str]]:
-    """The fixed banks, all for 8-bit pixels as they are, and what each stands for."""
-    yield (
-        _mirrored("a", "gabor", 8, 11),
-        "16 Gabors 11 x 11, 8 orientations, even and odd, mirrored",
-    )
-    yield _arbitrary("b", 32, 15), "32 kernels 15 x 15, arbitrary"
-    yield _mirrored("c", "gd", 12, 9), "24 Gaussian derivatives 9 x 9, 12 orientations, mirrored"
-    kernels, taps = lattice_bank((8, 8), ((1.2, 1.8), (2.0, 3.0)), ("odd",))
-    yield (
-        Bank("edges", kernels, taps, _table(), strength="step"),
-        "edge bank: 8 orientations, 2 sizes",
-    )
-    for size in (7, 9, 11, 15, 21, 31):
-        yield _arbitrary(f"size_{size}", 16, size), f"16 kernels {size} x {size}, arbitrary"
-
-
-def _table() -> InputTable:
-    contract = InputContract("Mono8", 0.0, 255.0)
-    return InputTable("identity", contract, np.arange(256, dtype=np.float32), None)
-
-
-def _arbitrary(name: str, count: int, size: int) -> Bank:
-    taps = np.random.default_rng(size).standard_normal((count, size, size)) / size
-    kernels = tuple(Kernel(f"k{i}", "given", "none", None, None, {}, 1.0) for i in range(count))
-    return Bank(name, kernels, taps.astype(np.float32), _table(), purpose="taps")
-
-
-def _mirrored(name: str, family: str, count: int, size: int) -> Bank:
-    """Even and odd kernels of one size, mirror images tap for tap."""
-    kernels, taps = [], []
-    parities: tuple[Literal["even", "odd"], ...] = ("even", "odd")
-    for parity in parities:
-        planes: list[F32] = []
-        for j in range(count):
-            if 2 * j > count:
-                planes.append(planes[count - j][:, ::-1])
-            else:
-                planes.append(_drawn(family, parity, j, count, size).astype(np.float32))
-            about = {"theta_rad": math.pi * j / count}
-            kernels.append(Kernel(f"{parity}_{j}", family, parity, 0, j, about, 1.0))
-        taps += planes
-    return Bank(name, tuple(kernels), np.stack(taps), _table(), strength="energy")
-
-
-def _drawn(family: str, parity: str, j: int, count: int, size: int) -> F64:
-    """Orientation j of the first quarter turn, with its exact symmetries."""
-    p = {"theta_rad": math.pi * j / count, "sigma_u_px": size / 6, "sigma_v_px": size / 5}
-    if family == "gabor":
-        p |= {"frequency_cpp": 0.15, "phase_rad": 0.0 if parity == "even" else math.pi / 2}
-        plane = render("gabor", p, size)
-    else:
-        plane = render("gd2" if parity == "even" else "gd1", p, size)
-    sign = 1 if parity == "even" else -1
-    plane = (plane + sign * plane[::-1, ::-1]) / 2
-    if j == 0:
-        plane = (plane + plane[::-1]) / 2
-    if 2 * j == count:
-        plane = (plane + plane[:, ::-1]) / 2
-    return plane

@@ -13,6 +13,7 @@ from patchlab import bank as banks
 from patchlab import edges, export, store
 from patchlab.edges import thin
 from patchlab.errors import PatchlabError, UsageError, VerificationError
+from patchlab.pipeline.calibrate import chosen_costs, refuse_planning
 from patchlab.pipeline.desk import Desk, may_write
 from patchlab.pipeline.edgel_rules import edgel_cases, edgel_finder, edgel_rules
 from patchlab.progress import Progress, silent
@@ -62,7 +63,8 @@ def write_bundle(
     ------
     VerificationError : a target differs from the oracle; the folder stays for inspection.
     """
-    plan = banks.make_plan(bank)
+    s = desk.settings
+    plan = banks.make_plan(bank, s.plan, tolerance=s.tolerance, costs=chosen_costs(s))
     files = dict(export.emit(bank, plan, edgel_rules(bank)))
     edgels = edgel_cases(bank, plan, crop)
     files |= export.emit_selftest(
@@ -118,6 +120,7 @@ def add_libraries(folder: Path, out: Path, desk: Desk, *, force: bool) -> Writte
     VerificationError : a file was changed since it was written, or a target differs.
     """
     export.parse_targets(desk.settings.target)
+    refuse_planning(desk.settings)
     if out != folder:
         may_write(out, force)
     bank, plan, head = banks.read_bank(folder)
@@ -215,21 +218,19 @@ def open_native(
 FIXED = "fixed point"
 
 
-def _fixed_target(path: str, native: banks.NativeBank, plan: Plan) -> export.Target:
-    """The library's fixed-point part: bit for bit, and within its bound."""
+def _fixed_target(name: str, counted: Any, strengths: Any, plan: Plan) -> export.Target:
+    """A target's fixed-point part: bit for bit, and within its bound."""
     fixed = plan.detail["fixed"]
     step = np.array(fixed.step, dtype=np.float32)[:, None, None]
 
     def responses(pixels: Any) -> Any:
-        counts, ends = native.responses_q(pixels)
+        counts, ends = counted(pixels)
         expected, at_the_ends = fixed.counts(pixels)
         if ends != at_the_ends or not np.array_equal(counts, expected):
             raise VerificationError("counts differ from the exact integer sums")
         return step * counts
 
-    return export.Target(
-        f"compiled library {path}, {FIXED}", responses, native.edges_q, fixed.bound
-    )
+    return export.Target(f"{name}, {FIXED}", responses, strengths, fixed.bound)
 
 
 def prove(
@@ -246,12 +247,15 @@ def prove(
         ),
     )
 
-    engines = {"engine": engine, **_runtimes(folder, bank, head)}
+    engines = {"engine": engine, **_runtimes(folder, bank, plan, head)}
 
     def open_library(path: Path) -> export.Target:
         relative = path.relative_to(folder).as_posix()
         native = banks.load_native(folder, bank, plan, head, relative)
-        also = (_fixed_target(relative, native, plan),) if plan.detail["fixed"] else ()
+        also: tuple[export.Target, ...] = ()
+        if plan.detail["fixed"]:
+            name = f"compiled library {relative}"
+            also = (_fixed_target(name, native.responses_q, native.edges_q, plan),)
         edgels = native.edgels if native.has_edgels else None
         return export.Target(path.name, native.responses, native.edges, also=also, edgels=edgels)
 
@@ -278,7 +282,9 @@ def prove(
     )
 
 
-def _runtimes(folder: Path, bank: Bank, head: Mapping[str, Any]) -> dict[str, export.Target]:
+def _runtimes(
+    folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any]
+) -> dict[str, export.Target]:
     """The folder's Python runtime, with numpy alone and with this machine's library."""
     if export.RUNTIME not in head["files"]:
         return {"runtime": export.Target("Python runtime", not_run="the folder holds none")}
@@ -286,21 +292,27 @@ def _runtimes(folder: Path, bank: Bank, head: Mapping[str, Any]) -> dict[str, ex
         module = export.open_runtime(store.read_file(folder, head, export.RUNTIME))
     except PatchlabError as error:
         return {"runtime": export.broken_target("Python runtime", error)}
-    found = {"numpy": _runtime("Python runtime, numpy", module, folder, bank, False)}
+    found = {"numpy": _runtime("Python runtime, numpy", module, folder, plan, False)}
     if own_library(bank) in head["files"]:
-        found["library"] = _runtime("Python runtime, library", module, folder, bank, True)
+        found["library"] = _runtime("Python runtime, library", module, folder, plan, True)
     return found
 
 
-def _runtime(name: str, module: Any, folder: Path, bank: Bank, library: bool) -> export.Target:
+def _runtime(name: str, module: Any, folder: Path, plan: Plan, library: bool) -> export.Target:
     try:
         loaded = module.load(folder, library=library)
     except Exception as error:  # the folder's code, and a folder that may be damaged
         return export.broken_target(name, error)
-    strengths = None
+    strengths = counted = None
     if loaded.scales:
 
         def strengths(pixels: Any, place: int) -> Any:
             return loaded.strengths(pixels, loaded.scales[place])
 
-    return export.Target(name, loaded.responses, strengths)
+        def counted(pixels: Any, place: int) -> Any:
+            return loaded.strengths(pixels, loaded.scales[place], fixed=True)
+
+    also: tuple[export.Target, ...] = ()
+    if plan.detail["fixed"]:
+        also = (_fixed_target(name, loaded.responses_fixed, counted, plan),)
+    return export.Target(name, loaded.responses, strengths, also=also)

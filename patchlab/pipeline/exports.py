@@ -15,6 +15,7 @@ from patchlab.errors import InputError, UsageError
 from patchlab.export import parse_targets
 from patchlab.pipeline import tell
 from patchlab.pipeline.bundle import add_libraries, write_bundle
+from patchlab.pipeline.calibrate import chosen_costs
 from patchlab.pipeline.desk import Desk, bank_name, may_write
 from patchlab.pipeline.run import choose, standing_dictionary
 from patchlab.settings import Settings, option_name
@@ -32,6 +33,7 @@ def export_run(desk: Desk, out: Path | None, *, force: bool) -> dict[str, Any]:
             )
     folder = out or desk.out / "bank"
     parse_targets(desk.settings.target)
+    chosen_costs(desk.settings)
     may_write(folder, force)
     dictionary, _ = standing_dictionary(desk)
     fits, fits_head = store.load(desk.out / "fits", "fits")
@@ -50,6 +52,7 @@ def export_taps(path: Path, desk: Desk, *, force: bool) -> dict[str, Any]:
     may_write(desk.out, force)
     s = desk.settings
     parse_targets(s.target)
+    chosen_costs(s)
     try:
         data = path.read_bytes()
         taps = np.load(io.BytesIO(data), allow_pickle=False)

@@ -15,6 +15,7 @@ from patchlab.errors import InputError, UsageError
 from patchlab.export import parse_targets
 from patchlab.pipeline import colour, tell
 from patchlab.pipeline.bundle import write_bundle
+from patchlab.pipeline.calibrate import chosen_costs
 from patchlab.pipeline.desk import RECIPE, Desk, bank_name, clear_after
 from patchlab.pipeline.keep import Keeper
 from patchlab.pipeline.measure import take_in_extras
@@ -392,6 +393,7 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
     """
     if until == "run":
         parse_targets(desk.settings.target)  # what cannot be built is said before the work
+        chosen_costs(desk.settings)
     with cluster.using(desk.settings.cluster, desk.jobs):
         return _work(photos, desk, until)
 

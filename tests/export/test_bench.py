@@ -71,12 +71,13 @@ def folder(tmp_path_factory):
 def test_the_command_prints_plans_and_targets(folder):
     options = ["bench", str(folder), "--size", "64x48", "--repeats", "3"]
     found = json.loads(CliRunner().invoke(patchlab, [*options, "--json"]).stdout)
-    assert {p["kind"] for p in found["plans"]} == {"direct", "parity"}
+    assert {p["asked"] for p in found["plans"]} == {"direct", "parity", "separable"}
     assert sum(p["chosen"] for p in found["plans"]) == 1
     by_kind = {p["kind"]: p for p in found["plans"]}
     assert by_kind["direct"]["multiplies_per_pixel"] == 4 * 81
     assert by_kind["parity"]["multiplies_per_pixel"] < 4 * 81
     assert all(p["library_bytes"] > 0 and p["scratch_bytes"] > 0 for p in found["plans"])
+    assert all(p["loads_per_pixel"] > 0 and p["expected_ms"] > 0 for p in found["plans"])
     for target in found["targets"]:
         assert target["error_of_bound"] is None or 0 <= target["error_of_bound"] <= 1
     names = {t["target"] for t in found["targets"]}

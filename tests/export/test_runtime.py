@@ -284,7 +284,8 @@ def targets(folder):
 def test_verify_runs_the_runtime(folders, tmp_path, monkeypatch):
     monkeypatch.setattr("patchlab.export.vectors.WIDEST_TILE", 1000)
     found = targets(folders["energy"])
-    assert {target for target, _ in found} == {"Python runtime, numpy", "Python runtime, library"}
+    both = {"Python runtime, numpy", "Python runtime, library"}
+    assert {target for target, _ in found} == both | {f"{name}, fixed point" for name in both}
     assert all(c.passed for c in found.values())
     assert ("Python runtime, numpy", "strength, scale 0") in found
     folder = shutil.copytree(folders["energy"], tmp_path / "b")
