@@ -17,7 +17,12 @@ from patchlab.types import F32, F64, Bank, Plan, Thresholds
 
 
 def edgel_rules(bank: Bank) -> export.EdgelRules | None:
-    """The rules of a bank's edgels; None for a bank that finds no edges."""
+    """The rules of a bank's edgels; None for a bank that finds no edges, or of colours.
+
+    Edgels of colour stand at the pixel: the model of an edge is one of one plane.
+    """
+    if bank.planes > 1:
+        return None
     try:
         own = thin.shapes_of(bank)
     except UsageError:
