@@ -99,9 +99,7 @@ def _says_the_same(head: Mapping[str, Any], about: Mapping[str, Any]) -> bool:
 # ---------------------------------------------------------------- the run's folder
 
 
-def prepare(
-    out: Path, photos: Path | None, *, resume: bool, force: bool, dry_run: bool = False
-) -> None:
+def prepare(out: Path, photos: object, *, resume: bool, force: bool, dry_run: bool = False) -> None:
     """Check that a run may use its output folder, and sweep up after a killed run.
 
     Raises
@@ -109,7 +107,7 @@ def prepare(
     UsageError : the folder is inside the photographs', holds something else, or holds a run
         and neither ``resume`` nor ``force`` was given.
     """
-    if photos is not None and photos.exists():
+    if isinstance(photos, Path) and photos.exists():
         inside = photos.resolve() if photos.is_dir() else photos.resolve().parent
         if photos.is_dir() and (out.resolve() == inside or inside in out.resolve().parents):
             raise UsageError(
