@@ -27,6 +27,8 @@ from patchlab.settings import Settings
 from patchlab.workers import usable_cores
 
 ROOMS = ("parts", "survey", "patches", "dictionary", "fits", "bank", "report", "assess")
+MAPPED = ("patches",)
+"""Artefacts that are mapped into memory, for they may be larger than it."""
 RECIPE = 3
 """Raised whenever a stage would give another result for the same settings."""
 
@@ -81,10 +83,13 @@ class Desk:
             head = store.read_manifest(folder, kind)
             if _says_the_same(head, about):
                 self.tell(f"  {kind}: kept from before")
-                return store.load(folder, kind)
+                return store.load(folder, kind, mapped=kind in MAPPED)
         with self.timed(kind):
             noun = make()
         head = store.save(folder, kind, noun, force=True, extra=extra(noun), **about)
+        if kind in MAPPED:
+            del noun  # from here on it is read as it is needed
+            return store.load(folder, kind, mapped=True)
         return noun, head
 
 
