@@ -20,7 +20,7 @@ import shutil
 import tempfile
 from collections.abc import Callable, Mapping
 from pathlib import Path, PurePosixPath
-from typing import Any
+from typing import Any, BinaryIO
 
 import numpy as np
 
@@ -29,6 +29,8 @@ from patchlab.errors import InputError, UsageError, VerificationError
 
 FORMAT = "patchlab"
 VERSION = "1.0"
+WORTH_MAPPING = 1 << 20
+"""Smaller files are simply read."""
 LICENCE = (
     "The content of this folder is its maker's own. The parts that come from patchlab's "
     "templates are granted to everyone for any use, without conditions or attribution."
@@ -59,9 +61,14 @@ def canonical_json(value: Any) -> bytes:
 
 def npy_bytes(array: np.ndarray[Any, Any]) -> bytes:
     """An array as the bytes of a ``.npy`` file (no pickle)."""
-    buffer = io.BytesIO()
-    np.lib.format.write_array(buffer, np.ascontiguousarray(array), allow_pickle=False)
-    return buffer.getvalue()
+    array = np.ascontiguousarray(array)
+    if array.dtype.hasobject:
+        raise ValueError("an array of objects is not written")
+    head = io.BytesIO()
+    np.lib.format.write_array_header_1_0(head, np.lib.format.header_data_from_array_1_0(array))
+    flat: Any = array.reshape(-1)
+    body = memoryview(flat).cast("B") if array.size else b""
+    return b"".join([head.getvalue(), body])  # one copy only
 
 
 def npy_array(data: bytes, where: str) -> np.ndarray[Any, Any]:
@@ -80,14 +87,17 @@ def npy_array(data: bytes, where: str) -> np.ndarray[Any, Any]:
 
 def _check_npy_size(data: bytes) -> None:
     """Refuse a header that promises other than what follows, before memory is taken for it."""
-    file = io.BytesIO(data)
+    _check_npy_header(io.BytesIO(data), len(data))
+
+
+def _check_npy_header(file: BinaryIO, length: int) -> None:
     version = np.lib.format.read_magic(file)
     read = {
         (1, 0): np.lib.format.read_array_header_1_0,
         (2, 0): np.lib.format.read_array_header_2_0,
     }
     shape, _, dtype = read[version](file)
-    if math.prod(shape) * dtype.itemsize != len(data) - file.tell():
+    if math.prod(shape) * dtype.itemsize != length - file.tell():
         raise ValueError("its header does not fit its size")
 
 
@@ -144,17 +154,17 @@ def pack(noun: Any) -> tuple[Any, dict[str, bytes]]:
     return plain(noun, ""), files
 
 
-def unpack(data: Any, read: Callable[[str], bytes]) -> Any:
-    """Rebuild a noun from :func:`pack`'s data; runs no code from the data."""
+def unpack(data: Any, array: Callable[[str], np.ndarray[Any, Any]]) -> Any:
+    """Rebuild a noun from :func:`pack`'s data and its arrays; runs no code from the data."""
     if isinstance(data, list):
-        return tuple(unpack(v, read) for v in data)
+        return tuple(unpack(v, array) for v in data)
     if not isinstance(data, dict):
         return data
     if set(data) == {"array"}:
-        return npy_array(read(data["array"]), data["array"])
+        return array(data["array"])
     if set(data) == {"number"}:
         return float(data["number"])
-    values = {k: unpack(v, read) for k, v in data.items() if k != "is"}
+    values = {k: unpack(v, array) for k, v in data.items() if k != "is"}
     if "is" not in data:
         return values
     if data["is"] not in _NOUNS:
@@ -322,21 +332,56 @@ def read_file(folder: Path, head: Mapping[str, Any], name: str) -> bytes:
     ------
     VerificationError : it is missing, changed, or not in the manifest.
     """
-    path = Path(folder) / _safe(name)
-    if name not in head["files"]:
-        raise VerificationError("the manifest does not know this file", where=str(path))
+    path = _known(folder, head, name)
     try:
         _check_plain(path)
         data = path.read_bytes()
     except OSError as error:
         raise VerificationError(f"cannot be read ({error.strerror})", where=str(path)) from None
-    if sha256(data) != head["files"][name]:
+    _check_hash(sha256(data), head, name, path)
+    return data
+
+
+def _known(folder: Path, head: Mapping[str, Any], name: str) -> Path:
+    path = Path(folder) / _safe(name)
+    if name not in head["files"]:
+        raise VerificationError("the manifest does not know this file", where=str(path))
+    return path
+
+
+def _check_hash(found: str, head: Mapping[str, Any], name: str, path: Path) -> None:
+    if found != head["files"][name]:
         raise VerificationError(
             "was changed after it was written (its hash differs)",
             where=str(path),
             remedy="export the bank again, or restore the file",
         )
-    return data
+
+
+def _size(path: Path) -> int:
+    return path.stat().st_size if path.is_file() else 0
+
+
+def map_array(folder: Path, head: Mapping[str, Any], name: str) -> np.ndarray[Any, Any]:
+    """An array of an artefact, mapped into memory, not read; its hash is checked all the same.
+
+    Raises
+    ------
+    InputError : the file is no array.
+    VerificationError : it is missing, changed, or not in the manifest.
+    """
+    path = _known(folder, head, name)
+    try:
+        _check_plain(path)
+        with path.open("rb") as file:
+            _check_hash(hashlib.file_digest(file, "sha256").hexdigest(), head, name, path)
+            file.seek(0)
+            _check_npy_header(file, path.stat().st_size)
+        return np.asarray(np.lib.format.open_memmap(path, mode="r"))
+    except OSError as error:
+        raise VerificationError(f"cannot be read ({error.strerror})", where=str(path)) from None
+    except (ValueError, KeyError) as error:
+        raise InputError(f"is not an array ({error})", where=str(path)) from None
 
 
 def save(folder: Path, kind: str, noun: Any, **about: Any) -> dict[str, Any]:
@@ -350,13 +395,22 @@ def save(folder: Path, kind: str, noun: Any, **about: Any) -> dict[str, Any]:
     return write_artefact(folder, kind, files, **about)
 
 
-def load(folder: Path, kind: str) -> tuple[Any, dict[str, Any]]:
-    """Read a noun and its manifest; every file's hash is checked as it is read."""
+def load(folder: Path, kind: str, *, mapped: bool = False) -> tuple[Any, dict[str, Any]]:
+    """Read a noun and its manifest; every file's hash is checked as it is read.
+
+    With ``mapped``, larger arrays are mapped into memory and read as they are used.
+    """
     head = read_manifest(folder, kind)
     data = read_file(folder, head, "content.json")
+
+    def array(name: str) -> np.ndarray[Any, Any]:
+        if mapped and _size(_known(folder, head, name)) > WORTH_MAPPING:
+            return map_array(folder, head, name)
+        return npy_array(read_file(folder, head, name), name)
+
     try:
         content = json.loads(data)
-        return unpack(content, lambda name: read_file(folder, head, name)), head
+        return unpack(content, array), head
     except (KeyError, TypeError, ValueError, AttributeError, RecursionError) as error:
         raise InputError(
             f"damaged content ({type(error).__name__})", where=str(folder / "content.json")

@@ -18,6 +18,21 @@ from patchlab.cli.terminal import Terminal, table
 from patchlab.errors import InputError, QualityError, UsageError, VerificationError
 
 FOLDER = click.Path(path_type=Path)
+
+
+class _Photos(click.ParamType):  # type: ignore[type-arg]
+    """A folder of this machine, or an address."""
+
+    name = "photos"
+
+    def convert(self, value: Any, param: Any, ctx: Any) -> Any:
+        """The place itself."""
+        from patchlab.images.address import place
+
+        return place(value)
+
+
+PHOTOS = _Photos()
 Command = Callable[..., Any]
 
 
@@ -122,7 +137,7 @@ def _warn_of(result: dict[str, Any], out: Path, terminal: Terminal) -> None:
 
 
 @patchlab.command()
-@click.argument("photos", type=FOLDER)
+@click.argument("photos", type=PHOTOS)
 @_fills_a_run
 @settings_options("photos", "survey", "measure", "patches", "learn", "bank", "cluster", "common")
 @_shared
@@ -184,7 +199,7 @@ def _hold_to_quality(strict: bool, result: dict[str, Any]) -> None:
 
 
 @patchlab.command()
-@click.argument("photos", type=FOLDER)
+@click.argument("photos", type=PHOTOS)
 @click.option("-o", "--out", type=FOLDER, help="Keep the survey in this run's folder.")
 @click.option("--resume", is_flag=True, help="Go on with the run that stands there.")
 @click.option("--force", is_flag=True, help="Start anew where a run stands.")
@@ -250,7 +265,7 @@ def _say_survey(result: dict[str, Any]) -> None:
 
 
 @patchlab.command()
-@click.argument("photos", type=FOLDER)
+@click.argument("photos", type=PHOTOS)
 @_fills_a_run
 @settings_options("photos", "survey", "measure", "patches", "learn", "cluster", "common")
 @_shared

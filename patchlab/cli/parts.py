@@ -7,12 +7,12 @@ from typing import Any
 
 import click
 
-from patchlab.cli.commands import FOLDER, _print, _shared
+from patchlab.cli.commands import FOLDER, PHOTOS, _print, _shared
 from patchlab.cli.terminal import Terminal, table
 
 
 @click.command()
-@click.argument("pictures", type=FOLDER)
+@click.argument("pictures", type=PHOTOS)
 @click.option(
     "-o", "--out", type=FOLDER, required=True, help="Folder of the result; RUN/parts for its page."
 )

@@ -4,6 +4,7 @@ The way through: ``list_photos`` -> ``take_in`` -> ``iterate`` (frames) or
 ``sample_folder`` (patches). ``scenes`` and ``demo`` render pictures instead.
 """
 
+from patchlab.images.address import Place, place
 from patchlab.images.decode import SUFFIXES, decode, decoder_versions
 from patchlab.images.demo import make_sample_images
 from patchlab.images.develop import ReadOptions
@@ -27,6 +28,7 @@ __all__ = [
     "FrameRecord",
     "Intake",
     "Listing",
+    "Place",
     "RawLayout",
     "ReadOptions",
     "SampleSettings",
@@ -38,6 +40,7 @@ __all__ = [
     "make_sample_images",
     "memory_needed",
     "one_plane",
+    "place",
     "read_file",
     "reread",
     "sample",

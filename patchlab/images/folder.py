@@ -17,6 +17,7 @@ from typing import NoReturn
 
 from patchlab.errors import InputError
 from patchlab.images import pfnc
+from patchlab.images.address import Address, Place, place
 from patchlab.images.decode import SUFFIXES, decode
 from patchlab.images.develop import ReadOptions, conform
 from patchlab.progress import Progress, silent
@@ -29,7 +30,7 @@ Missed = Callable[[Quarantined], None]
 
 
 TOLD = 10  # unusable files that a refusal names; the others are counted
-Task = tuple[Path, str, str, ReadOptions, InputContract]
+Task = tuple[Place, str, str, ReadOptions, InputContract]
 """A file to read again: root, relative path, SHA-256, options, the folder's contract."""
 
 
@@ -53,19 +54,19 @@ class Listing:
     unreadable : folders that cannot be listed, names that are not valid text
     """
 
-    root: Path
+    root: Place
     files: tuple[str, ...]
     hidden: int = 0
     other: int = 0
     unreadable: tuple[Quarantined, ...] = ()
 
 
-def list_photos(folder: str | Path) -> Listing:
+def list_photos(folder: str | Place) -> Listing:
     """List a folder's pictures, its subfolders included; or one picture alone.
 
     Parameters
     ----------
-    folder : path of a folder, or of one file
+    folder : path of a folder, or of one file; or an address with ``://`` that fsspec reads
 
     Returns
     -------
@@ -75,7 +76,10 @@ def list_photos(folder: str | Path) -> Listing:
     ------
     InputError : there is nothing at that path.
     """
-    root = Path(folder)
+    root = place(folder)
+    if isinstance(root, Address):
+        return _list_address(root)
+    root = Path(str(root))
     if not root.exists():
         raise InputError("there is no such folder or file", where=str(folder))
     if root.is_file():
@@ -89,6 +93,18 @@ def list_photos(folder: str | Path) -> Listing:
         walk.other,
         tuple(sorted(walk.unreadable, key=lambda q: q.path)),
     )
+
+
+def _list_address(root: Address) -> Listing:
+    """The same behind an address."""
+    found = root.listed()
+    if not found:
+        if not root.is_file():
+            raise InputError("there is no such folder or file", where=str(root))
+        return Listing(Address(root.url.rsplit("/", 1)[0]), (root.name,))
+    open_ones = [f for f in found if not any(p.startswith(".") for p in f.split("/"))]
+    files = [f for f in open_ones if "." + f.rsplit(".", 1)[-1].lower() in SUFFIXES]
+    return Listing(root, tuple(files), len(found) - len(open_ones), len(open_ones) - len(files))
 
 
 class _Walk:
@@ -198,7 +214,7 @@ class Intake:
     copies: tuple[tuple[str, str], ...] = ()
 
     @property
-    def root(self) -> Path:
+    def root(self) -> Place:
         """The photo folder."""
         return self.listing.root
 
@@ -238,7 +254,7 @@ class Intake:
         return max(h * w for h, w in (record.shape for record in self.frames))
 
 
-def read_file(root: Path, file: str, options: ReadOptions) -> tuple[Frame, ...]:
+def read_file(root: Place, file: str, options: ReadOptions) -> tuple[Frame, ...]:
     """Read and decode one file below ``root``.
 
     Raises
@@ -248,7 +264,7 @@ def read_file(root: Path, file: str, options: ReadOptions) -> tuple[Frame, ...]:
     return decode(_bytes(root, file), file, _with_sidecar(root, file, options))
 
 
-def _with_sidecar(root: Path, file: str, options: ReadOptions) -> ReadOptions:
+def _with_sidecar(root: Place, file: str, options: ReadOptions) -> ReadOptions:
     """The options for one file: a raw buffer's sidecar goes before what was given."""
     if not file.lower().endswith(pfnc.SUFFIX):
         return options
@@ -256,7 +272,7 @@ def _with_sidecar(root: Path, file: str, options: ReadOptions) -> ReadOptions:
     return options if layout is None else replace(options, raw=layout)
 
 
-def _bytes(root: Path, file: str) -> bytes:
+def _bytes(root: Place, file: str) -> bytes:
     try:
         return (root / file).read_bytes()
     except FileNotFoundError:
@@ -316,7 +332,7 @@ def take_in(
     return Intake(listing, options, contract, records, bad, tuple(sorted(copies.items())))
 
 
-def _inspect(task: tuple[Path, str, ReadOptions]) -> tuple[FrameRecord, ...] | Quarantined:
+def _inspect(task: tuple[Place, str, ReadOptions]) -> tuple[FrameRecord, ...] | Quarantined:
     root, file, options = task
     digest = ""
     try:
@@ -366,7 +382,7 @@ def _copies(good: list[tuple[FrameRecord, ...]]) -> dict[str, str]:
     return copies
 
 
-def _common(records: tuple[FrameRecord, ...], mixed_depths: bool, root: Path) -> InputContract:
+def _common(records: tuple[FrameRecord, ...], mixed_depths: bool, root: Place) -> InputContract:
     """The contract of a folder: the one its frames share, or the deepest of several."""
     groups: dict[InputContract, list[str]] = {}
     for record in records:

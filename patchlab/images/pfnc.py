@@ -21,13 +21,13 @@ from __future__ import annotations
 import math
 import tomllib
 from dataclasses import dataclass
-from pathlib import Path
 from typing import Any
 
 import numpy as np
 from numpy.typing import NDArray
 
 from patchlab.errors import InputError, UsageError
+from patchlab.images.address import Place
 
 SUFFIX = ".raw"
 FOLDER_SIDECAR = "raw.toml"
@@ -132,7 +132,7 @@ class RawLayout:
         return self.offset + self.row_bytes * (self.height - 1) + form.row_bytes(self.width)
 
 
-def sidecar(path: Path) -> RawLayout | None:
+def sidecar(path: Place) -> RawLayout | None:
     """The layout beside a raw buffer, or None where there is no sidecar.
 
     Raises
@@ -145,10 +145,10 @@ def sidecar(path: Path) -> RawLayout | None:
     return None
 
 
-def _layout(beside: Path) -> RawLayout:
+def _layout(beside: Place) -> RawLayout:
     known = {"format": str, "width": int, "height": int, "offset": int, "row_bytes": int}
     try:
-        found: dict[str, Any] = tomllib.loads(beside.read_text(encoding="utf-8"))
+        found: dict[str, Any] = tomllib.loads(beside.read_bytes().decode("utf-8"))
         for key, value in found.items():
             if key not in known:
                 raise UsageError(f"unknown key {key!r}", remedy=f"known are {', '.join(known)}")

@@ -27,6 +27,8 @@ from patchlab.settings import Settings
 from patchlab.workers import usable_cores
 
 ROOMS = ("parts", "survey", "patches", "dictionary", "fits", "bank", "report", "assess")
+MAPPED = ("patches",)
+"""Artefacts that are mapped into memory, for they may be larger than it."""
 RECIPE = 3
 """Raised whenever a stage would give another result for the same settings."""
 
@@ -81,10 +83,13 @@ class Desk:
             head = store.read_manifest(folder, kind)
             if _says_the_same(head, about):
                 self.tell(f"  {kind}: kept from before")
-                return store.load(folder, kind)
+                return store.load(folder, kind, mapped=kind in MAPPED)
         with self.timed(kind):
             noun = make()
         head = store.save(folder, kind, noun, force=True, extra=extra(noun), **about)
+        if kind in MAPPED:
+            del noun  # from here on it is read as it is needed
+            return store.load(folder, kind, mapped=True)
         return noun, head
 
 
@@ -99,9 +104,7 @@ def _says_the_same(head: Mapping[str, Any], about: Mapping[str, Any]) -> bool:
 # ---------------------------------------------------------------- the run's folder
 
 
-def prepare(
-    out: Path, photos: Path | None, *, resume: bool, force: bool, dry_run: bool = False
-) -> None:
+def prepare(out: Path, photos: object, *, resume: bool, force: bool, dry_run: bool = False) -> None:
     """Check that a run may use its output folder, and sweep up after a killed run.
 
     Raises
@@ -109,7 +112,7 @@ def prepare(
     UsageError : the folder is inside the photographs', holds something else, or holds a run
         and neither ``resume`` nor ``force`` was given.
     """
-    if photos is not None and photos.exists():
+    if isinstance(photos, Path) and photos.exists():
         inside = photos.resolve() if photos.is_dir() else photos.resolve().parent
         if photos.is_dir() and (out.resolve() == inside or inside in out.resolve().parents):
             raise UsageError(

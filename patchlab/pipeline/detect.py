@@ -328,7 +328,7 @@ def detect(
         may_write(out, force)
         _clear(out)
         journal.begin()
-    root = listing.root
+    root = Path(str(listing.root))
     left = [
         name
         for name in listing.files

@@ -18,7 +18,7 @@ MOST = 2**27
 
 
 def find_parts(
-    pictures: Path,
+    pictures: images.Place,
     out: Path,
     *,
     samples: Any = "pixels",
@@ -33,7 +33,7 @@ def find_parts(
 
     Parameters
     ----------
-    pictures : folder of pictures of one size, the object in one place and one light
+    pictures : folder or address of pictures of one size, the object in one place and one light
     out : folder of the artefact; may be ``RUN/parts``, for the page of that run
     samples, components, seed : of :func:`patchlab.learn.learn_parts`
     pages : independent and principal ones to further files, for people

@@ -4,7 +4,6 @@ from __future__ import annotations
 
 import functools
 from dataclasses import replace
-from pathlib import Path
 from typing import Any
 
 import numpy as np
@@ -40,7 +39,7 @@ SAME = 0.9
 # ---------------------------------------------------------------- one stage after another
 
 
-def take_in(photos: Path, desk: Desk) -> images.Intake:
+def take_in(photos: images.Place, desk: Desk) -> images.Intake:
     """Walk the folder, decode every file once, quarantine what cannot serve."""
     s = desk.settings
     options = images.ReadOptions(
@@ -367,7 +366,7 @@ def calibrated(bank: Bank, desk: Desk) -> Bank:
 # ---------------------------------------------------------------- commands
 
 
-def foresee(photos: Path, desk: Desk) -> dict[str, Any]:
+def foresee(photos: images.Place, desk: Desk) -> dict[str, Any]:
     """What a run would do, without opening a picture or writing a file."""
     listing = images.list_photos(photos)
     return {
@@ -380,7 +379,7 @@ def foresee(photos: Path, desk: Desk) -> dict[str, Any]:
     }
 
 
-def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
+def work(photos: images.Place, desk: Desk, until: str = "run") -> dict[str, Any]:
     """Fill a run's folder from photographs, up to ``survey``, ``learn`` or the whole ``run``.
 
     Returns
@@ -398,7 +397,7 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
         return _work(photos, desk, until)
 
 
-def _work(photos: Path, desk: Desk, until: str) -> dict[str, Any]:
+def _work(photos: images.Place, desk: Desk, until: str) -> dict[str, Any]:
     intake = take_in(photos, desk)
     found, survey_head = survey(intake, desk)
     if not desk.resume:

@@ -52,6 +52,49 @@ def test_a_changed_byte_is_found(tmp_path, survey):
         store.load(tmp_path / "s", "survey")
 
 
+@pytest.fixture
+def large(tmp_path):
+    """An artefact with one array worth mapping and one that is not."""
+    contract = InputContract("Mono8", 0, 255)
+    noise = NoiseModel(True, levels=np.arange(300_000.0), sd=np.empty(0))
+    table = InputTable("identity", contract, np.arange(256, dtype=np.float32), 1.0)
+    store.save(tmp_path / "s", "survey", Survey(contract, noise, table))
+    return tmp_path / "s"
+
+
+def test_large_arrays_can_be_mapped(large):
+    back, _ = store.load(large, "survey", mapped=True)
+    assert isinstance(back.noise.levels.base, np.memmap)
+    assert not back.noise.levels.flags.writeable
+    np.testing.assert_array_equal(back.noise.levels, np.arange(300_000.0))
+    assert back.noise.sd.size == 0
+    assert back.table.values.base is None or not isinstance(back.table.values.base, np.memmap)
+
+
+def test_what_is_mapped_is_checked_as_well(large):
+    path = large / "noise.levels.npy"
+    data = bytearray(path.read_bytes())
+    data[-1] ^= 1
+    path.write_bytes(data)
+    with pytest.raises(VerificationError, match="changed"):
+        store.load(large, "survey", mapped=True)
+    path.unlink()
+    with pytest.raises(VerificationError, match="cannot be read"):
+        store.load(large, "survey", mapped=True)
+
+
+@pytest.mark.parametrize("shape", [(3, 4), (0, 2), (5,), (2, 3, 4)])
+@pytest.mark.parametrize("dtype", ["f4", "f8", "i2", "?", "U5", ">u2"])
+def test_arrays_are_written_as_numpy_writes_them(shape, dtype):
+    import io
+
+    array = np.ones(shape).astype(dtype)
+    wanted = io.BytesIO()
+    np.save(wanted, array)
+    assert store.npy_bytes(array) == wanted.getvalue()
+    assert np.array_equal(store.npy_array(store.npy_bytes(array), "x"), array)
+
+
 @pytest.mark.parametrize(
     ("entry", "value", "message"),
     [("version", "2.0", "version"), ("kind", "bank", "bank"), ("format", "other", "not patchlab")],

@@ -60,6 +60,35 @@ def test_kkt_conditions(problem, penalty, scale):
     assert np.abs(c[~active]).max() <= penalty + slack
 
 
+@pytest.mark.parametrize("penalty", [0.8, 2.0])
+def test_exact_steps_finish_what_descent_begins(problem, penalty, monkeypatch):
+    """Independent atoms never need more than the active set: conditions at rounding level."""
+    z, B = problem
+    monkeypatch.setattr("patchlab.learn.coding._settle", None)
+    a = lasso(z, B, penalty)
+    c = (z - a @ B.T) @ B
+    wrong = np.where(a != 0, np.abs(c - penalty * np.sign(a)), np.abs(c) - penalty)
+    assert wrong.max() < 1e-6 * penalty
+    assert np.abs(wrong[a != 0]).max() < 1e-10
+
+
+@pytest.mark.parametrize("penalty", [0.05, 1.0])
+def test_atoms_that_repeat_meet_the_conditions(problem, penalty):
+    """Equal and opposite atoms leave the active set singular: feature-sign search finishes."""
+    z, B = problem
+    B = np.concatenate([B, B[:, :10], -B[:, 5:15]], axis=1)
+    a = lasso(z[:60], B, penalty)
+    c = (z[:60] - a @ B.T) @ B
+    wrong = np.where(a != 0, np.abs(c - penalty * np.sign(a)), np.abs(c) - penalty)
+    assert wrong.max() < 1e-6 * penalty + 1e-10
+    single = lasso(z[:60], B[:, :50], penalty)
+    both = [
+        0.5 * np.sum((z[:60] - x @ D.T) ** 2) + penalty * np.abs(x).sum()
+        for x, D in ((a, B), (single, B[:, :50]))
+    ]
+    assert both[0] == pytest.approx(both[1], rel=1e-9)
+
+
 def test_float32_meets_its_tolerance(problem):
     z, B = problem
     a = lasso(z.astype(np.float32), B, 1.0, tolerance=1e-3)
