@@ -81,15 +81,6 @@ def _with_samples(found: Survey, contract: InputContract, frames: Frames) -> Sur
     )
 
 
-def one_plane(found: Survey) -> Survey:
-    """The survey as that of the plane that was surveyed."""
-    form = found.contract.format
-    if form.planes == 1:
-        return found
-    contract = replace(found.contract, pixels=f"Mono{form.bits}")
-    return replace(found, contract=contract, table=replace(found.table, contract=contract))
-
-
 def fit(dictionary: Dictionary, colours: str, progress: Progress) -> tuple[KernelFits, ...]:
     """Fits of atoms and filters; of colour ones their profiles, each with its direction."""
     both = (("atoms", dictionary.atoms), ("filters", dictionary.filters))

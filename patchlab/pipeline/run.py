@@ -287,11 +287,10 @@ def choose(
                 name=name,
                 seed=s.seed,
             )
-            plain = colour.one_plane(found)
             bank = banks.choose_bank(
                 colour.profiles(dictionary),
                 fits[0],
-                plain,
+                banks.one_plane(found),
                 settings,
                 patch_contrast=patches.contrast,
             )
