@@ -588,13 +588,19 @@ def compare(first: Path, second: Path, terminal: Terminal, as_json: bool, **opti
 @patchlab.command()
 @click.option("-o", "--out", type=FOLDER, required=True, help="Folder for the frames.")
 @click.option("--count", default=24, type=click.IntRange(1, 1000), help="Frames to render.")
+@click.option(
+    "--pixels",
+    default="Mono8",
+    type=click.Choice(["Mono8", "RGB8", "BayerRG8"]),
+    help="What a pixel is; with colours the surfaces are glazed.",
+)
 @_shared
-def scenes(out: Path, count: int, terminal: Terminal, as_json: bool) -> None:
+def scenes(out: Path, count: int, pixels: str, terminal: Terminal, as_json: bool) -> None:
     """Render frames of an invented camera at an invented place, with noise and blur known."""
     from patchlab.pipeline import use
 
     if out.exists() and not out.is_dir():
         raise InputError("the output is a file", where=str(out))
     with terminal.working():
-        result = use.scenes(out, count, terminal)
+        result = use.scenes(out, count, terminal, pixels)
     _print(result, as_json, _rows)

@@ -4,6 +4,7 @@ The way through: ``list_photos`` -> ``take_in`` -> ``iterate`` (frames) or
 ``sample_folder`` (patches). ``scenes`` and ``demo`` render pictures instead.
 """
 
+from patchlab.images.coloured import make_colour_images
 from patchlab.images.decode import SUFFIXES, decode, decoder_versions
 from patchlab.images.demo import make_sample_images
 from patchlab.images.develop import ReadOptions
@@ -33,6 +34,7 @@ __all__ = [
     "decoder_versions",
     "iterate",
     "list_photos",
+    "make_colour_images",
     "make_sample_images",
     "memory_needed",
     "one_plane",

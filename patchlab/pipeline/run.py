@@ -388,6 +388,8 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
     if until == "run":
         parse_targets(desk.settings.target)  # what cannot be built is said before the work
     intake = take_in(photos, desk)
+    if until == "run":
+        colour.check(intake.contract, desk.settings)
     found, survey_head = survey(intake, desk)
     if not desk.resume:
         clear_after(desk.out, "survey")

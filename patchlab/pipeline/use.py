@@ -84,8 +84,10 @@ def orientation_count(bank: Bank) -> int:
 # ---------------------------------------------------------------- scenes
 
 
-def scenes(out: Path, count: int, progress: Progress = silent) -> dict[str, Any]:
-    """Render the frames of the invented camera.
+def scenes(
+    out: Path, count: int, progress: Progress = silent, pixels: str = "Mono8"
+) -> dict[str, Any]:
+    """Render the frames of the invented camera; with glazes where the pixels have colours.
 
     Raises
     ------
@@ -97,7 +99,10 @@ def scenes(out: Path, count: int, progress: Progress = silent) -> dict[str, Any]
         raise UsageError(
             "the folder holds something else", where=str(out), remedy="name a new folder"
         )
-    images.make_sample_images(out, count, progress=progress)
+    if pixels == "Mono8":
+        images.make_sample_images(out, count, progress=progress)
+    else:
+        images.make_colour_images(out, count, pixels, progress=progress)
     return {"folder": str(out), "frames": count}
 
 
