@@ -331,13 +331,22 @@ def shift_cosine(a: Array, b: Array) -> float:
 
     Parameters
     ----------
-    a, b : ndarray of shape (h, w) and (h', w')
+    a, b : ndarray of shape (h, w) and (h', w'), or (h, w, planes) and (h', w', planes)
 
     Returns
     -------
-    float in [0, 1]; the full norms are used, so what a shift pushes out counts against.
+    float in [0, 1]; the full norms are used, so what a shift pushes out counts against. 0 for
+    kernels of different numbers of planes.
     """
+    if a.shape[2:] != b.shape[2:]:
+        return 0.0
     from scipy.signal import correlate2d
 
     norm = float(np.linalg.norm(a) * np.linalg.norm(b))
-    return float(np.abs(correlate2d(a, b, mode="full")).max() / norm) if norm else 0.0
+    if not norm:
+        return 0.0
+    if a.ndim == 2:
+        return float(np.abs(correlate2d(a, b, mode="full")).max() / norm)
+    planes = range(a.shape[2])
+    moved = np.sum([correlate2d(a[..., m], b[..., m], mode="full") for m in planes], axis=0)
+    return float(np.abs(moved).max() / norm)

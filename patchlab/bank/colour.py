@@ -27,6 +27,15 @@ def relative_noise(survey: Survey) -> F64 | None:
     return np.asarray(survey.sample_noise / sd)
 
 
+def one_plane(survey: Survey) -> Survey:
+    """The survey as that of the plane that was surveyed; a monochrome one as it is."""
+    form = survey.contract.format
+    if form.planes == 1:
+        return survey
+    contract = replace(survey.contract, pixels=f"Mono{form.bits}")
+    return replace(survey, contract=contract, table=replace(survey.table, contract=contract))
+
+
 def colour_bank(lattice: Bank, survey: Survey) -> Bank:
     """The kernels of a lattice bank on each of the three opponent planes.
 
@@ -98,7 +107,7 @@ def colour_bank_as_learned(
     filters = np.asarray(dictionary.filters, dtype=np.float64)
     filters = filters - filters.mean(axis=(1, 2), keepdims=True)
     flat = replace(dictionary, filters=filters[..., 0], atoms=dictionary.atoms[..., 0])
-    plain = bank_as_learned(flat, survey, name, border, fits)
+    plain = bank_as_learned(flat, one_plane(survey), name, border, fits)
     if filters.shape[1] % 2 == 0:
         filters = np.pad(filters, ((0, 0), (0, 1), (0, 1), (0, 0)))
     noise, covariance = relative_noise(survey), survey.noise.autocovariance
@@ -115,4 +124,10 @@ def colour_bank_as_learned(
     )
     gains = [float(t.ravel()[int(np.abs(t).argmax())]) for t in taps]
     kernels = (replace(k, gain=g) for k, g in zip(plain.kernels, gains, strict=True))
-    return replace(plain, kernels=tuple(kernels), taps=np.ascontiguousarray(taps), mix=mix)
+    return replace(
+        plain,
+        kernels=tuple(kernels),
+        taps=np.ascontiguousarray(taps),
+        table=survey.table,
+        mix=mix,
+    )

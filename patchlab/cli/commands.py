@@ -705,13 +705,21 @@ def compare(first: Path, second: Path, terminal: Terminal, as_json: bool, **opti
     type=click.Choice(["views", "brackets"]),
     help="Views of a tile works, or aligned pictures of stamped brackets.",
 )
+@click.option(
+    "--pixels",
+    default="Mono8",
+    type=click.Choice(["Mono8", "RGB8", "BayerRG8"]),
+    help="What a pixel of a view is; with colours the surfaces are glazed.",
+)
 @_shared
-def scenes(out: Path, count: int, kind: str, terminal: Terminal, as_json: bool) -> None:
+def scenes(
+    out: Path, count: int, kind: str, pixels: str, terminal: Terminal, as_json: bool
+) -> None:
     """Render frames of an invented camera at an invented place, with noise and blur known."""
     from patchlab.pipeline import use
 
     if out.exists() and not out.is_dir():
         raise InputError("the output is a file", where=str(out))
     with terminal.working():
-        result = use.scenes(out, count, terminal, kind=kind)
+        result = use.scenes(out, count, terminal, kind=kind, pixels=pixels)
     _print(result, as_json, _rows)

@@ -5,6 +5,7 @@ The way through: ``list_photos`` -> ``take_in`` -> ``iterate`` (frames) or
 """
 
 from patchlab.images.address import Place, place
+from patchlab.images.coloured import make_colour_images
 from patchlab.images.decode import SUFFIXES, decode, decoder_versions
 from patchlab.images.demo import make_sample_images
 from patchlab.images.develop import ReadOptions
@@ -37,6 +38,7 @@ __all__ = [
     "iterate",
     "list_photos",
     "make_brackets",
+    "make_colour_images",
     "make_sample_images",
     "memory_needed",
     "one_plane",

@@ -9,6 +9,7 @@ from __future__ import annotations
 
 import math
 from dataclasses import replace
+from pathlib import Path
 
 import numpy as np
 from numpy.typing import NDArray
@@ -16,7 +17,12 @@ from numpy.typing import NDArray
 from patchlab.conventions import pixel_format, rng
 from patchlab.errors import UsageError
 from patchlab.images.canvas import Scene, blur, grain_tile, paint
-from patchlab.images.scenes import Camera, dead_leaves
+from patchlab.images.demo import LIGHTS, OMBREL_K2, SHAPE, VIEWS, tile_works
+from patchlab.images.formats import png_bytes
+from patchlab.images.pfnc import FOLDER_SIDECAR
+from patchlab.images.scenes import Camera
+from patchlab.progress import Progress, silent
+from patchlab.store import write_file
 from patchlab.types import F64, Frame, InputContract
 
 STRONGEST = 0.7
@@ -127,28 +133,72 @@ def _sample(
     return amplified.capture(clean[..., place] / gains[place], draw)
 
 
-def colour_leaves(
-    seed: int,
-    shape: tuple[int, int] = (256, 256),
-    camera: Camera | None = None,
-    *,
-    light: float = 900.0,
-    pixels: str = "RGB8",
-    gains: tuple[float, float, float] = (1.0, 1.0, 1.0),
-    strength: float = STRONGEST,
-) -> Frame:
-    """A picture of mixed leaves with invented glazes: one call for tests and demonstrations.
+# ---------------------------------------------------------------- frames to try colour on
+
+NOTE = """\
+# Sample images with colours
+
+The {count} pictures in this folder are invented: rendered by patchlab's scene maker, not taken
+by any camera. Camera "Ombrel K2" and the place, "Tessary tile works, Port Hallan", do not exist.
+Its surfaces carry invented glazes.
+
+- {width} x {height} samples, 8 bit, linear: {how}
+- gain {camera.gain} DN per electron, read noise {camera.read_noise:g} electrons, blur
+  {camera.blur_sigma_px} pixels (one standard deviation, pixel aperture included), black level 0
+
+They are dedicated to the public domain under CC0 1.0; use them for anything.
+
+    patchlab run THIS_FOLDER -o OUT {options}
+"""
+WAYS = {
+    "RGB8": ("red, green and blue in every pixel", "--planes colour --transfer linear"),
+    "BayerRG8": ("one sample a place, red and green over green and blue", "--planes colour "
+                 "--as-learned"),
+}  # fmt: skip
+"""Pixels of frames to try colour on, with what a reader of them needs to know."""
+
+
+def make_colour_images(
+    folder: Path, count: int = 24, pixels: str = "RGB8", *, progress: Progress = silent
+) -> list[Path]:
+    """Write frames of the invented tile works, glazed, and the note that says what they are.
 
     Parameters
     ----------
-    seed : of the scene and its noise
-    shape : (height, width) of samples
-    camera : Camera; None is the invented Ombrel K2 with a wide range
-    light, pixels, gains, strength : as :func:`expose_colour`
+    folder : where; files of the same names are replaced
+    count : frames
+    pixels : one of :data:`WAYS`; a mosaic is written as raw buffers with a sidecar
+    progress : as everywhere
+
+    Returns
+    -------
+    list of Path : the pictures
+
+    Raises
+    ------
+    UsageError : other pixels.
     """
-    scene = dead_leaves(seed, shape, smallest=4.0, largest=80.0, texture=0.05)
-    used = camera or Camera(gain=0.25, full_well=1040.0, read_noise=3.0)
-    return expose_colour(
-        scene, used, light=light, pixels=pixels, gains=gains, strength=strength, seed=seed,
-        path=f"leaves_{seed}",
-    )[0]  # fmt: skip
+    if pixels not in WAYS:
+        raise UsageError(f"no frames of {pixels} pixels", remedy=f"choose of {', '.join(WAYS)}")
+    written, views = [], list(VIEWS)
+    height, width = SHAPE
+    for k in range(count):
+        view, number = views[k % len(views)], k // len(views) + 1
+        light = LIGHTS[(k + number) % len(LIGHTS)]
+        scene = tile_works(view, number)
+        frame, _ = expose_colour(scene, OMBREL_K2, light=light, pixels=pixels, seed=k)
+        interleaved = frame.contract.format.interleaved
+        data = png_bytes(frame.pixels) if interleaved else frame.pixels.tobytes()
+        path = folder / f"{view}-{number:02d}.{'png' if interleaved else 'raw'}"
+        write_file(path, data)
+        written.append(path)
+        progress("rendering", k + 1, count)
+    if pixels != "RGB8":
+        layout = f'format = "{pixels}"\nwidth = {width}\nheight = {height}\n'
+        write_file(folder / FOLDER_SIDECAR, layout.encode())
+    how, options = WAYS[pixels]
+    note = NOTE.format(
+        count=count, width=width, height=height, camera=OMBREL_K2, how=how, options=options
+    )
+    write_file(folder / "NOTE.md", note.encode())
+    return written

@@ -157,17 +157,17 @@ def read_deep_png(chunks: list[tuple[bytes, bytes]], orientation: int) -> Pictur
 
 
 def png_bytes(codes: NDArray[Any], *, packed: bool = False) -> bytes:
-    """A grey PNG of uint8 or uint16 codes (h, w).
+    """A PNG of uint8 or uint16 codes, grey (h, w) or red, green and blue (h, w, 3).
 
     Unpacked (stored deflate blocks, RFC 1951 section 3.2.4) the same codes give the same bytes
     everywhere; packed bytes depend on the zlib at hand.
     """
-    height, width = codes.shape
+    height, width = codes.shape[:2]
     depth = 8 * codes.dtype.itemsize
     rows = codes.astype(codes.dtype.newbyteorder(">")).view(np.uint8).reshape(height, -1)
     raw = np.pad(rows, ((0, 0), (1, 0))).tobytes()  # filter 0 before every row
     body = zlib.compress(raw, 9) if packed else _stored(raw)
-    head = struct.pack(">IIBBBBB", width, height, depth, 0, 0, 0, 0)
+    head = struct.pack(">IIBBBBB", width, height, depth, 2 * (codes.ndim == 3), 0, 0, 0)
     return PNG_MAGIC + b"".join(
         struct.pack(">I", len(part)) + kind + part + struct.pack(">I", zlib.crc32(kind + part))
         for kind, part in ((b"IHDR", head), (b"IDAT", body), (b"IEND", b""))

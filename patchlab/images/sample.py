@@ -231,7 +231,7 @@ def _gather(
 
 def _by_plane(rows: NDArray[Any], planes: int) -> NDArray[Any]:
     """Patches (n, d) as (n, pixels, samples); one plane stays as it is."""
-    return rows if planes == 1 else rows.reshape(len(rows), -1, planes)
+    return rows if planes == 1 else rows.reshape(len(rows), rows.shape[1] // planes, planes)
 
 
 def _judge(

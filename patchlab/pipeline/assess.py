@@ -24,7 +24,7 @@ from patchlab.edges import assess, rivals, spaced
 from patchlab.errors import InputError
 from patchlab.images import scenes
 from patchlab.pipeline.desk import may_write
-from patchlab.pipeline.loaded import bank_folder
+from patchlab.pipeline.loaded import bank_folder, need_one_plane
 from patchlab.pipeline.use import responder
 from patchlab.progress import Progress, silent
 from patchlab.types import F64, Bank
@@ -262,10 +262,11 @@ def assess_bank(
     Raises
     ------
     InputError : the bank holds no noise law or no blur.
-    UsageError : the output exists; the rate is outside the bank's table.
+    UsageError : the output exists; the bank takes colours; the rate is outside the bank's table.
     """
     folder = bank_folder(path)
     bank, _, head = banks.read_bank(folder)
+    need_one_plane(bank.contract, "assess")
     camera = camera_of(bank)
     if bank.thresholds is None:
         raise InputError("this bank has no thresholds, so nothing is promised", where=bank.name)

@@ -17,6 +17,7 @@ from patchlab.errors import UsageError
 from patchlab.export.bench import Entrant, Timing
 from patchlab.pipeline.bench_banks import fixed_cases
 from patchlab.pipeline.bundle import open_native
+from patchlab.pipeline.loaded import need_one_plane
 from patchlab.progress import Progress, silent
 from patchlab.types import F32, Bank, Plan
 
@@ -44,10 +45,11 @@ def bench(
 
     Raises
     ------
-    UsageError : the picture is smaller than the kernels.
+    UsageError : the picture is smaller than the kernels, or the bank takes colours.
     VerificationError : something gave a wrong result.
     """
     bank, plan, head = banks.read_bank(folder)
+    need_one_plane(bank.contract, "bench")
     if min(width, height) < bank.size:
         raise UsageError(f"--size must be at least {bank.size}x{bank.size}")
     native = open_native(folder, bank, plan, head)

@@ -13,11 +13,33 @@ from dataclasses import replace
 import numpy as np
 
 from patchlab import camera, images, shapes
+from patchlab.errors import UsageError
 from patchlab.pipeline.measure import Extras
 from patchlab.progress import Progress
+from patchlab.settings import Settings
 from patchlab.types import Dictionary, Frame, InputContract, KernelFits, Survey, TableKind
 
 Frames = Callable[[], Iterable[Frame]]
+
+
+def check(contract: InputContract, settings: Settings) -> None:
+    """Refuse, before the work, what a bank of colour pixels cannot be.
+
+    Raises
+    ------
+    UsageError : edge kernels on a mosaic, or the WebAssembly loader, which takes one plane.
+    """
+    form = contract.format
+    if form.planes > 1 and "wasm32" in settings.target.split(","):
+        raise UsageError(
+            "the loader of the WebAssembly module takes pictures of one plane",
+            remedy="leave wasm32 out of --target, or add --planes luminance",
+        )
+    if form.cell > 1 and not settings.as_learned:
+        raise UsageError(
+            "an edge bank needs the colours of a pixel in one place, and a mosaic has them in four",
+            remedy="add --as-learned for the learned filters, or take --planes luminance",
+        )
 
 
 def survey(
@@ -79,15 +101,6 @@ def _with_samples(found: Survey, contract: InputContract, frames: Frames) -> Sur
         sample_noise=noise,
         notes=(*found.notes, *notes),
     )
-
-
-def one_plane(found: Survey) -> Survey:
-    """The survey as that of the plane that was surveyed."""
-    form = found.contract.format
-    if form.planes == 1:
-        return found
-    contract = replace(found.contract, pixels=f"Mono{form.bits}")
-    return replace(found, contract=contract, table=replace(found.table, contract=contract))
 
 
 def fit(dictionary: Dictionary, colours: str, progress: Progress) -> tuple[KernelFits, ...]:

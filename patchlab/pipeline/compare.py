@@ -28,7 +28,7 @@ class Side:
 
     Parameters
     ----------
-    kernels : ndarray (k, size, size)
+    kernels : ndarray (k, size, size), of colour pixels (k, size, size, samples)
     shapes : name with its unit to ndarray (m,)
     families : how many kernels each family describes
     digest : of the kernels' bytes
@@ -165,7 +165,10 @@ def _kind_at(path: Path) -> str:
 def _bank(folder: Path) -> Side:
     bank, _, head = banks.read_bank(folder)
     families = dict(sorted(Counter(k.family for k in bank.kernels).items()))
-    return Side(bank.taps.astype(np.float64), {}, families, head["files"]["kernels.npy"])
+    taps = bank.taps.astype(np.float64)
+    if bank.mix is not None:  # over the samples, which two banks of one camera share
+        taps = taps @ bank.mix.astype(np.float64)
+    return Side(taps, {}, families, head["files"]["kernels.npy"])
 
 
 def _dictionary(path: Path) -> Side:
@@ -183,7 +186,10 @@ def _fits(path: Path) -> Side:
 
 
 def _rendered(fits: KernelFits) -> F64:
-    return np.stack([render(f.family, f.parameters, fits.size) for f in fits.fits])
+    drawn = np.stack([render(f.family, f.parameters, fits.size) for f in fits.fits])
+    if not fits.colours:
+        return drawn
+    return np.asarray(drawn[..., None] * np.array([f.direction for f in fits.fits])[:, None, None])
 
 
 def _families(fits: KernelFits) -> dict[str, int]:

@@ -3,6 +3,7 @@
 from __future__ import annotations
 
 import io
+from dataclasses import replace
 from pathlib import Path
 from typing import Any
 
@@ -13,7 +14,7 @@ from patchlab import store
 from patchlab.conventions import pixel_format
 from patchlab.errors import InputError, UsageError
 from patchlab.export import parse_targets
-from patchlab.pipeline import tell
+from patchlab.pipeline import colour, tell
 from patchlab.pipeline.bundle import add_libraries, write_bundle
 from patchlab.pipeline.calibrate import chosen_costs
 from patchlab.pipeline.desk import Desk, bank_name, may_write
@@ -38,6 +39,7 @@ def export_run(desk: Desk, out: Path | None, *, force: bool) -> dict[str, Any]:
     dictionary, _ = standing_dictionary(desk)
     fits, fits_head = store.load(desk.out / "fits", "fits")
     survey, survey_head = store.load(desk.out / "survey", "survey")
+    colour.check(survey.contract, desk.settings)
     home = folder if out else desk.out
     patches, _ = store.load(desk.out / "patches", "patches")
     name = bank_name(home, desk.settings)
@@ -71,6 +73,7 @@ def export_taps(path: Path, desk: Desk, *, force: bool) -> dict[str, Any]:
         white=s.white,
         where=str(path),
     )
+    colour.check(bank.contract, replace(s, as_learned=True))
     inputs = {path.name: store.sha256(data)}
     return tell.bank(write_bundle(desk.out, bank, desk, parents={}, inputs=inputs))
 

@@ -15,9 +15,9 @@ from numpy.typing import ArrayLike, NDArray
 
 from patchlab import bank as banks
 from patchlab import edges
-from patchlab.errors import InputError
+from patchlab.errors import InputError, UsageError
 from patchlab.pipeline.bundle import open_native, own_library
-from patchlab.types import F32, Bank, EdgeMap, Plan
+from patchlab.types import F32, Bank, EdgeMap, InputContract, Plan
 
 
 @dataclass(frozen=True, eq=False)
@@ -154,3 +154,16 @@ def bank_folder(path: Path) -> Path:
     if not (path / "bank.json").is_file() and (path / "bank" / "bank.json").is_file():
         return path / "bank"
     return path
+
+
+def need_one_plane(contract: InputContract, command: str) -> None:
+    """Refuse a colour bank where a command knows pictures of one plane only.
+
+    Raises
+    ------
+    UsageError
+    """
+    if contract.format.planes > 1:
+        raise UsageError(
+            f"{command} takes banks of one plane, and this one takes {contract.pixels} pixels"
+        )

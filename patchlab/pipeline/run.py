@@ -287,11 +287,10 @@ def choose(
                 name=name,
                 seed=s.seed,
             )
-            plain = colour.one_plane(found)
             bank = banks.choose_bank(
                 colour.profiles(dictionary),
                 fits[0],
-                plain,
+                banks.one_plane(found),
                 settings,
                 patch_contrast=patches.contrast,
             )
@@ -399,6 +398,8 @@ def work(photos: images.Place, desk: Desk, until: str = "run") -> dict[str, Any]
 
 def _work(photos: images.Place, desk: Desk, until: str) -> dict[str, Any]:
     intake = take_in(photos, desk)
+    if until == "run":
+        colour.check(intake.contract, desk.settings)
     found, survey_head = survey(intake, desk)
     if not desk.resume:
         clear_after(desk.out, "survey")

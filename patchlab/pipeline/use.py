@@ -90,9 +90,16 @@ NOTES = {"views": b"# Sample images", "brackets": b"# Pictures for inspection"}
 
 
 def scenes(
-    out: Path, count: int, progress: Progress = silent, *, kind: str = "views"
+    out: Path,
+    count: int,
+    progress: Progress = silent,
+    *,
+    kind: str = "views",
+    pixels: str = "Mono8",
 ) -> dict[str, Any]:
     """Render the frames of the invented camera: views of a tile works, or stamped brackets.
+
+    Views have glazes where the pixels have colours.
 
     Raises
     ------
@@ -104,8 +111,14 @@ def scenes(
         raise UsageError(
             "the folder holds something else", where=str(out), remedy="name a new folder"
         )
-    make = images.make_sample_images if kind == "views" else images.make_brackets
-    make(out, count, progress=progress)
+    if kind == "brackets":
+        if pixels != "Mono8":
+            raise UsageError("pictures of brackets are grey", remedy="leave out --pixels")
+        images.make_brackets(out, count, progress=progress)
+    elif pixels == "Mono8":
+        images.make_sample_images(out, count, progress=progress)
+    else:
+        images.make_colour_images(out, count, pixels, progress=progress)
     return {"folder": str(out), "frames": count}
 
 

@@ -33,9 +33,10 @@ def comparison_pictures(found: Comparison) -> Mapping[str, bytes]:
 
 def _pairs(found: Comparison) -> bytes:
     size = max(found.first.kernels.shape[1], found.second.kernels.shape[1])
-    one = _unit(_padded(found.first.kernels[found.left[:SHOWN]], size))
-    two = _unit(_padded(found.second.kernels[found.right[:SHOWN]], size))
-    two = two * np.where((one * two).sum(axis=(1, 2), keepdims=True) < 0, -1.0, 1.0)
+    one = _unit(_padded(_seen(found.first.kernels[found.left[:SHOWN]]), size))
+    two = _unit(_padded(_seen(found.second.kernels[found.right[:SHOWN]]), size))
+    within = tuple(range(1, one.ndim))
+    two = two * np.where((one * two).sum(axis=within, keepdims=True) < 0, -1.0, 1.0)
     labels = [
         f"{i + 1} / {j + 1}  {c:.3f}"
         for i, j, c in zip(found.left, found.right, found.cosine[:SHOWN], strict=False)
@@ -43,15 +44,22 @@ def _pairs(found: Comparison) -> bytes:
     return mosaic([one, two, one - two], labels, across=6, zoom=max(2, 48 // size), as_is=True)
 
 
+def _seen(kernels: F64) -> F64:
+    """Kernels to be drawn: one plane or three as they are, the samples of a cell added."""
+    return kernels.sum(axis=3) if kernels.ndim == 4 and kernels.shape[3] != 3 else kernels
+
+
 def _unit(kernels: F64) -> F64:
-    norm = np.sqrt((kernels**2).sum(axis=(1, 2), keepdims=True))
+    within = tuple(range(1, kernels.ndim))
+    norm = np.sqrt((kernels**2).sum(axis=within, keepdims=True))
     return np.asarray(kernels / np.maximum(norm, 1e-300))
 
 
 def _padded(kernels: F64, size: int) -> F64:
     missing = size - kernels.shape[1]
     low = missing // 2
-    return np.pad(kernels, ((0, 0), (low, missing - low), (low, missing - low)))
+    more = ((0, 0),) * (kernels.ndim - 3)
+    return np.pad(kernels, ((0, 0), (low, missing - low), (low, missing - low), *more))
 
 
 def _shapes(found: Comparison) -> bytes:
