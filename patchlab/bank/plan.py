@@ -40,8 +40,8 @@ from patchlab.errors import UsageError
 from patchlab.types import F64, Bank, Plan
 
 FIXED_SHARE = 0.55
-"""Time of 16-bit products over that of the same float32 ones: measured from 0.5 to 0.6 with AVX-512,
-for banks from 9 x 9 to 19 x 19."""
+"""Time of 16-bit products over that of the same float32 ones: from 0.5 to 0.6 was measured with
+AVX-512, for banks from 9 x 9 to 19 x 19."""
 
 __all__ = ["KINDS", "describe", "make_plan", "parity_parts", "rebuilt_taps", "strength_members"]
 
@@ -140,8 +140,8 @@ def make_plan(
         (one a scale, see :mod:`patchlab.bank.flat`), ``fft``
         and ``halved`` (kernels by tile transforms and at half resolution, or None), ``fixed`` (the
         bank in 16-bit fixed point, or None), ``abi`` (the interface's number), ``asked`` (the
-        kind), ``tolerance``, ``costs``, ``work`` (counted), ``fixed_ns`` and ``expected_ns`` (of a pixel, by
-        those prices)
+        kind), ``tolerance``, ``costs``, ``work`` (counted), ``expected_ns``
+        and ``fixed_ns`` (of a pixel, by those prices, in float32 and in fixed point)
 
     Raises
     ------
