@@ -1,7 +1,7 @@
 """The ways a bank can be computed: each counted, priced and bounded, the cheapest taken.
 
 Kernels that share parity parts are one cluster and are planned together. A cluster is computed by
-its taps or by its parts, whole products or separable ones; or, where it makes no strength, by tile
+its taps or by its parts, whole products or separable ones; or, where it makes no edges, by tile
 transforms or at half resolution. One plan may hold all of them.
 """
 
@@ -224,11 +224,13 @@ class Planner:
     def _elsewhere(self, parts: Parts) -> tuple[TileFFT | None, Halved | None]:
         """Kernels whose responses compiled code makes by tile transforms, or at half resolution.
 
-        Kernels that make a strength stay with the products, which fused edges need. With float
-        pixels none goes unasked: a pixel that is not a number, or far beyond the contract, would
+        Kernels of an edge bank that make its strength stay with the products, which fused edges
+        need anyway. Learned and given kernels, which are there for their responses, may go: their
+        fused edges still take the products. With float pixels none goes unasked: a pixel that is not a number, or far beyond the contract, would
         spoil its whole block.
         """
-        free = [k for k, terms in parts.sums.items() if k not in self.fused and terms]
+        kept = self.fused if self.bank.purpose == "edges" else frozenset()
+        free = [k for k, terms in parts.sums.items() if k not in kept and terms]
         unasked = self.kind == "auto" and self.bank.contract.format.integer
         if not free or not (unasked or self.kind in ("fft", "halved")):
             return None, None
