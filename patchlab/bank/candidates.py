@@ -36,6 +36,8 @@ from patchlab.types import F64, Bank
 CLEARLY = 1.5
 """How many times cheaper tile transforms must be to be taken unasked: their bound is larger, and
 what they cost differs most between processors."""
+CLASSES = 16
+"""Different shapes up to which it is tried to bring them together."""
 KINDS = ("auto", "direct", "parity", "separable", "halved", "fft")
 
 
@@ -158,7 +160,7 @@ class Planner:
             else:
                 same[1].append(number)
         first = products[0]
-        while len(classes) > 1 and first.factors is None:
+        while 1 < len(classes) <= CLASSES and first.factors is None:
             pairs = [(self._saved(first.basis, a, b), a, b) for a, b in combinations(classes, 2)]
             saved, a, b = max(pairs, key=lambda pair: pair[0])
             if saved <= 0:
@@ -226,8 +228,9 @@ class Planner:
 
         Kernels of an edge bank that make its strength stay with the products, which fused edges
         need anyway. Learned and given kernels, which are there for their responses, may go: their
-        fused edges still take the products. With float pixels none goes unasked: a pixel that is not a number, or far beyond the contract, would
-        spoil its whole block.
+        fused edges still take the products. With float pixels none goes unasked: a pixel that is
+        not a number, or far beyond the contract, would spoil its whole block. Half resolution is
+        not tried without a tolerance: it is never as exact as rounding.
         """
         kept = self.fused if self.bank.purpose == "edges" else frozenset()
         free = [k for k, terms in parts.sums.items() if k not in kept and terms]
@@ -236,7 +239,8 @@ class Planner:
             return None, None
         if self.kind == "fft":
             return tile_fft(self.bank.taps, tuple(free)), None
-        halved = self._halve(free)
+        asked = self.kind == "halved" or self.tolerance > 0
+        halved = self._halve(free) if asked else None
         if self.kind == "halved":
             return None, halved
         return self._cheapest(parts, free, halved)

@@ -29,7 +29,7 @@ Blocks start at whole multiples of their height and width, so a band gives the b
 
 from __future__ import annotations
 
-from collections.abc import Mapping
+from collections.abc import Mapping, Sequence
 from dataclasses import dataclass, replace
 
 import numpy as np
@@ -58,7 +58,6 @@ class Halved:
     taps : float64 (2 P,), the interpolator's
     products, sums : of the small kernels; one sum a kernel
     bound : largest error of every kernel
-    phases : float64 (kernels, 2, 2, n, n), ``K_ab``, what is really computed
     """
 
     kernels: tuple[int, ...]
@@ -68,7 +67,10 @@ class Halved:
     products: tuple[Product, ...]
     sums: tuple[Sum, ...]
     bound: tuple[float, ...]
-    phases: F64
+
+    def phases(self, place: int) -> F64:
+        """``K_ab`` of one of the kernels, what is really computed: float64 (2, 2, n, n)."""
+        return computed(small_taps(self.products, self.sums[place], self.radius), self.flatness)
 
     @property
     def groups(self) -> list[list[int]]:
@@ -154,6 +156,15 @@ def small_kernels(
     """
     through = ways(flatness, radius)
     return {k: _fitted(parts, through, radius, c) for k, parts in split.items()}
+
+
+def small_taps(products: Sequence[Product], terms: Sum, radius: int) -> F64:
+    """A small kernel, as its rounded products make it."""
+    small = np.zeros((2 * radius + 1,) * 2)
+    for number, sign in terms:
+        p = products[number]
+        small += sign * unfold(p.rounded.astype(np.float64), p.basis, radius)
+    return small
 
 
 def computed(small: F64, flatness: int) -> F64:
@@ -258,22 +269,17 @@ def _halved(
     radius: int,
 ) -> Halved | None:
     products, sums = share(small_kernels(split, flatness, radius, c))
-    kept, bounds, phases = [], [], []
+    kept, bounds = [], []
     for k, parts in split.items():
-        small = np.zeros((2 * radius + 1,) * 2)
-        for number, sign in sums[k]:
-            p = products[number]
-            small += sign * unfold(p.rounded.astype(np.float64), p.basis, radius)
         kernel = np.zeros((2 * c + 1,) * 2)
         for basis, part in parts.items():
             kernel += unfold(part, basis, c)
-        done = computed(small, flatness)
+        done = computed(small_taps(products, sums[k], radius), flatness)
         bound = approximation(off_by(done, kernel), *span)
         bound += rounding(products, sums[k], flatness) * max(abs(span[0]), abs(span[1]))
         if bound <= allowed[k]:
             kept.append(k)
             bounds.append(bound)
-            phases.append(done)
     if not kept:
         return None
     every = Halved(
@@ -284,7 +290,6 @@ def _halved(
         products=tuple(products),
         sums=tuple(sums[k] for k in kept),
         bound=tuple(bounds),
-        phases=np.stack(phases),
     )
     return only(every, kept)
 
@@ -302,5 +307,4 @@ def only(halved: Halved, kernels: list[int]) -> Halved | None:
         products=tuple(halved.products[n] for n in used),
         sums=tuple(tuple((place[n], s) for n, s in halved.sums[i]) for i in kept),
         bound=tuple(halved.bound[i] for i in kept),
-        phases=halved.phases[kept],
     )
