@@ -1,7 +1,7 @@
 """The ways a bank can be computed: each counted, priced and bounded, the cheapest taken.
 
 Kernels that share parity parts are one cluster and are planned together. A cluster is computed by
-its taps or by its parts, whole products or separable ones; or, where it makes no strength, by tile
+its taps or by its parts, whole products or separable ones; or, where it makes no edges, by tile
 transforms or at half resolution. One plan may hold all of them.
 """
 
@@ -46,6 +46,8 @@ from patchlab.types import F64, Bank
 CLEARLY = 1.5
 """How many times cheaper tile transforms must be to be taken unasked: their bound is larger, and
 what they cost differs most between processors."""
+CLASSES = 16
+"""Different shapes up to which it is tried to bring them together."""
 KINDS = ("auto", "direct", "parity", "separable", "halved", "fft")
 
 
@@ -170,7 +172,7 @@ class Planner:
             else:
                 same[1].append(number)
         first = products[0]
-        while len(classes) > 1 and first.factors is None:
+        while 1 < len(classes) <= CLASSES and first.factors is None:
             pairs = [(self._saved(first.basis, a, b), a, b) for a, b in combinations(classes, 2)]
             saved, a, b = max(pairs, key=lambda pair: pair[0])
             if saved <= 0:
@@ -236,19 +238,23 @@ class Planner:
     def _elsewhere(self, parts: Parts) -> tuple[TileFFT | None, Halved | None]:
         """Kernels whose responses compiled code makes by tile transforms, or at half resolution.
 
-        Kernels that make a strength stay with the products, which fused edges need. With float
-        pixels none goes unasked: a pixel that is not a number, or far beyond the contract, would
-        spoil its whole block.
+        Kernels of an edge bank that make its strength stay with the products, which fused edges
+        need anyway. Learned and given kernels, which are there for their responses, may go: their
+        fused edges still take the products. With float pixels none goes unasked: a pixel that is
+        not a number, or far beyond the contract, would spoil its whole block. Half resolution is
+        not tried without a tolerance: it is never as exact as rounding.
         """
-        free = [k for k, terms in parts.sums.items() if k not in self.fused and terms]
         if self.bank.planes > 1:
             return None, None
+        kept = self.fused if self.bank.purpose == "edges" else frozenset()
+        free = [k for k, terms in parts.sums.items() if k not in kept and terms]
         unasked = self.kind == "auto" and self.bank.contract.format.integer
         if not free or not (unasked or self.kind in ("fft", "halved")):
             return None, None
         if self.kind == "fft":
             return tile_fft(self.bank.taps, tuple(free)), None
-        halved = self._halve(free)
+        asked = self.kind == "halved" or self.tolerance > 0
+        halved = self._halve(free) if asked else None
         if self.kind == "halved":
             return None, halved
         return self._cheapest(parts, free, halved)

@@ -29,7 +29,7 @@ Blocks start at whole multiples of their height and width, so a band gives the b
 
 from __future__ import annotations
 
-from collections.abc import Mapping
+from collections.abc import Mapping, Sequence
 from dataclasses import dataclass, replace
 
 import numpy as np
@@ -67,7 +67,6 @@ class Halved:
     taps : float64 (2 P,), the interpolator's
     products, sums : of the small kernels; one sum a kernel
     bound : largest error of every kernel
-    phases : float64 (kernels, 2, 2, n, n), ``K_ab``, what is really computed
     """
 
     kernels: tuple[int, ...]
@@ -77,7 +76,10 @@ class Halved:
     products: tuple[Product, ...]
     sums: tuple[Sum, ...]
     bound: tuple[float, ...]
-    phases: F64
+
+    def phases(self, place: int) -> F64:
+        """``K_ab`` of one of the kernels, what is really computed: float64 (2, 2, n, n)."""
+        return computed(small_taps(self.products, self.sums[place], self.radius), self.flatness)
 
     @property
     def groups(self) -> list[list[int]]:
@@ -163,6 +165,15 @@ def small_kernels(
     """
     through = ways(flatness, radius)
     return {k: _fitted(parts, through, radius, c) for k, parts in split.items()}
+
+
+def small_taps(products: Sequence[Product], terms: Sum, radius: int) -> F64:
+    """A small kernel, as its rounded products make it."""
+    small = np.zeros((2 * radius + 1,) * 2)
+    for number, sign in terms:
+        p = products[number]
+        small += sign * unfold(p.rounded.astype(np.float64), p.basis, radius)
+    return small
 
 
 def computed(small: F64, flatness: int) -> F64:
@@ -268,22 +279,17 @@ def _halved(
 ) -> Halved | None:
     small_ones = small_kernels(split, flatness, radius, c)
     products, sums = share({k: in_plane(parts) for k, parts in small_ones.items()})
-    kept, bounds, phases = [], [], []
+    kept, bounds = [], []
     for k, parts in split.items():
-        small = np.zeros((2 * radius + 1,) * 2)
-        for number, sign in sums[k]:
-            p = products[number]
-            small += sign * unfold(p.rounded.astype(np.float64), p.basis, radius)
         kernel = np.zeros((2 * c + 1,) * 2)
         for basis, part in parts.items():
             kernel += unfold(part, basis, c)
-        done = computed(small, flatness)
+        done = computed(small_taps(products, sums[k], radius), flatness)
         bound = approximation(off_by(done, kernel), *span)
         bound += rounding(products, sums[k], flatness) * max(abs(span[0]), abs(span[1]))
         if bound <= allowed[k]:
             kept.append(k)
             bounds.append(bound)
-            phases.append(done)
     if not kept:
         return None
     every = Halved(
@@ -294,7 +300,6 @@ def _halved(
         products=tuple(products),
         sums=tuple(sums[k] for k in kept),
         bound=tuple(bounds),
-        phases=np.stack(phases),
     )
     return only(every, kept)
 
@@ -312,5 +317,4 @@ def only(halved: Halved, kernels: list[int]) -> Halved | None:
         products=tuple(halved.products[n] for n in used),
         sums=tuple(tuple((place[n], s) for n, s in halved.sums[i]) for i in kept),
         bound=tuple(halved.bound[i] for i in kept),
-        phases=halved.phases[kept],
     )

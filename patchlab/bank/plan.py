@@ -127,7 +127,7 @@ def make_plan(
     bank : Bank
     kind : "direct" (every tap), "parity" (every kernel by its parts), "separable" (a column times a
         row wherever the rank allows, see :mod:`patchlab.bank.separable`), "halved" and "fft" (every
-        kernel that makes no strength at half resolution, where that is within a hundredth of the
+        kernel, but an edge bank's, at half resolution, where that is within a hundredth of the
         largest response, or by tile transforms, see :mod:`patchlab.bank.halved` and
         :mod:`patchlab.bank.tile_fft`), or "auto", which takes for each set of kernels that share
         parts whichever is cheapest

@@ -15,6 +15,8 @@ folds, and the joins.
 
 from __future__ import annotations
 
+import math
+
 import numpy as np
 
 from patchlab.bank.products import Product, uses_of
@@ -59,6 +61,9 @@ def separable_terms(product: Product, allowed: float, most: int = MOST) -> tuple
     uses = uses_of(product.basis, (product.exact.shape[0], product.exact.shape[1]))
     terms: list[Product] = []
     left = product.exact
+    values = np.linalg.svd(left, compute_uv=False)
+    if math.sqrt(float((values[most:] ** 2).sum())) > allowed:
+        return ()  # no matrix of that rank is nearer (Eckart & Young), and sum |E| is more
     while len(terms) < most and (len(terms) + 1) * sum(left.shape) < left.size:
         column, row = rank_one(left)
         term = np.outer(column.astype(np.float64), row.astype(np.float64))

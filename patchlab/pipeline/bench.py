@@ -16,6 +16,7 @@ from patchlab.bank.plan import KINDS
 from patchlab.errors import UsageError
 from patchlab.export.bench import Entrant, Timing
 from patchlab.pipeline.bench_banks import fixed_cases
+from patchlab.pipeline.bench_learned import learned_bank
 from patchlab.pipeline.bundle import open_native
 from patchlab.pipeline.loaded import need_one_plane
 from patchlab.progress import Progress, silent
@@ -235,7 +236,8 @@ def cases(
 ) -> dict[str, Any]:
     """The banks that benchmarks are quoted for, each as :func:`bench`; plain data."""
     found = []
-    for bank, what in fixed_cases():
+    learned = "32 filters 12 x 12, learned from the photographs of scikit-image"
+    for bank, what in (*fixed_cases(), (learned_bank(), learned)):
         result = _bench(
             bank, banks.make_plan(bank), None, (width, height), repeats, peers, progress
         )

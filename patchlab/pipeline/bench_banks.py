@@ -28,6 +28,10 @@ def fixed_cases() -> Iterator[tuple[Bank, str]]:
     )
     for size in (7, 9, 11, 15, 21, 31):
         yield arbitrary(f"size_{size}", 16, size), f"16 kernels {size} x {size}, arbitrary"
+    for count in (4, 8):
+        yield arbitrary(f"count_{count}", count, 15), f"{count} kernels 15 x 15, arbitrary"
+    yield round_gabors("round", 21), "8 Gabors 21 x 21 with round envelopes"
+    yield smooth("smooth", 31), "8 wide step kernels 31 x 31"
 
 
 def _table() -> InputTable:

@@ -6,7 +6,7 @@ import numpy as np
 import pytest
 from scipy import fft as scipy_fft
 
-from patchlab.bank import apply, reference, tile_fft
+from patchlab.bank import apply, bank_from_taps, reference, tile_fft
 from patchlab.bank.plan import describe, make_plan
 from tests.bank.banks import given_bank, lattice_bank, picture, random_bank
 
@@ -82,3 +82,16 @@ def test_one_plan_may_hold_parts_and_tiles():
 def test_kernels_larger_than_half_a_block_do_not():
     assert make_plan(random_bank(2, 35), "fft").detail["fft"] is None
     assert make_plan(random_bank(2, 3), "fft").kind == "tile FFT"
+
+
+def test_learned_and_given_kernels_go_by_tiles_though_they_make_a_strength():
+    taps = random_bank(8, 13).taps
+    bank = bank_from_taps(taps, pixels="Mono8", name="given")
+    assert bank.scales == (0,)
+    plan = make_plan(bank)
+    assert plan.kind == "tile FFT"
+    assert len(plan.detail["strength"][0]) == 8  # by products, which stand by
+    pixels = picture((30, 31))
+    found, _ = apply.strength(bank, pixels, 0, plan)
+    expected, _ = reference.strength(bank, pixels, 0)
+    assert np.abs(found - expected).max() <= max(plan.error_bound)
