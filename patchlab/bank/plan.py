@@ -169,7 +169,7 @@ def make_plan(
         raise UsageError(f"unknown plan {kind!r}", remedy=f"choose one of {', '.join(KINDS)}")
     if bank.planes > 1 and kind not in COLOUR_KINDS:
         raise UsageError(
-            f"a bank of colours has no {kind} plan",
+            f"a bank of colours has no {kind} plan: that takes one plane",
             remedy=f"choose one of {', '.join(COLOUR_KINDS)}",
         )
     if not 0 <= tolerance < math.inf:
