@@ -215,9 +215,11 @@ def _say_survey(result: dict[str, Any]) -> None:
         return
     noise, blur = result["noise"], result["blur"]
     if noise["measurable"] and noise["gain_dn_per_electron"] is not None:
+        read = noise["read_noise_dn"]
         law = (
             f"gain {noise['gain_dn_per_electron']:.4g} DN/e- "
-            f"(se {noise['gain_standard_error']:.2g}), read noise {noise['read_noise_dn']:.3g} DN"
+            f"(se {noise['gain_standard_error']:.2g}), "
+            + (f"read noise {read:.3g} DN" if read is not None else noise["reason"])
         )
     else:
         law = "measured as a curve" if noise["measurable"] else noise["reason"]
