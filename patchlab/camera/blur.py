@@ -147,7 +147,7 @@ def _fine_noise(rest: F64) -> F64:
     band = plane.reshape(-1, side, side)
     for axis in (1, 2):
         band = np.roll(band, 1, axis) + np.roll(band, -1, axis) - 2 * band
-    inside = ndimage.binary_erosion(_DISK.reshape(side, side), np.ones((3, 3)))
+    inside = ndimage.binary_erosion(_DISK.reshape(side, side), np.ones((3, 3), bool))
     return np.asarray(np.maximum(np.sqrt((band[:, inside] ** 2).mean(axis=1)) / 6, 1e-9))
 
 

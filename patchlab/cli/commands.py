@@ -194,11 +194,14 @@ def _hold_to_quality(strict: bool, result: dict[str, Any]) -> None:
 def survey(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Say what the camera itself does to PHOTOS: noise, blur, spectrum, marks.
 
-    Without -o the survey is only printed. Static scenes, dark frames and a slanted edge tell
-    more than photographs can.
+    Without -o the survey is only printed; with it, a page is written too (OUT/report), unless
+    a whole run's page stands there. Static scenes, dark frames and a slanted edge tell more
+    than photographs can.
     """
     if options["out"] is not None:
         result = _work(photos, "survey", terminal, options)
+        if result is not None and not options["dry_run"]:
+            result["page"] = _survey_page(options["out"], terminal)
     else:
         with tempfile.TemporaryDirectory(prefix="patchlab-") as folder:
             passing = {**options, "out": Path(folder) / "run", "passing": True}
@@ -207,6 +210,17 @@ def survey(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> N
             result.pop("out", None)
     if result is not None:
         _print(result, as_json, _say_survey)
+
+
+def _survey_page(out: Path, terminal: Terminal) -> str:
+    """Where the page is: a survey's own, or that of the run of which it is a stage."""
+    from patchlab import report
+
+    page = out / "report" / "index.html"
+    if not (out / "bank").exists() or not page.exists():
+        with terminal.working():
+            report.write_survey(out, terminal)
+    return str(page)
 
 
 def _say_survey(result: dict[str, Any]) -> None:
@@ -231,6 +245,7 @@ def _say_survey(result: dict[str, Any]) -> None:
             "blur": f"{blur['sigma_px']:.2f} px" if blur["sigma_px"] else blur["note"],
             "spectrum": result["spectrum"]["exponent"],
             "table": result["table"],
+            **({"page": result["page"]} if "page" in result else {}),
             **{f"note {k}": text for k, text in enumerate(result["notes"], 1)},
         }
     )

@@ -376,6 +376,8 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
         clear_after(desk.out, "survey")
     if until == "survey":
         return tell.survey(found, survey_head)
+    for note in found.notes:
+        desk.tell(f"  note: {note}")
     patches, patches_head = sample(intake, found, survey_head, desk)
     (dictionary, _), dictionary_head = learn_basis(patches, found, patches_head, desk)
     if until == "learn":

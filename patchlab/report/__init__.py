@@ -2,6 +2,6 @@
 
 from patchlab.report.compare import comparison_pictures
 from patchlab.report.mosaic import edge_pictures
-from patchlab.report.page import write
+from patchlab.report.page import write, write_survey
 
-__all__ = ["comparison_pictures", "edge_pictures", "write"]
+__all__ = ["comparison_pictures", "edge_pictures", "write", "write_survey"]
