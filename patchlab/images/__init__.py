@@ -10,13 +10,12 @@ from patchlab.images.develop import ReadOptions
 from patchlab.images.folder import (
     FrameRecord,
     Intake,
-    Listing,
     iterate,
-    list_photos,
     read_file,
     reread,
     take_in,
 )
+from patchlab.images.listing import Listing, list_photos
 from patchlab.images.pfnc import RawLayout
 from patchlab.images.sample import SampleSettings, memory_needed, sample, sample_folder
 

@@ -61,6 +61,8 @@ def take_in(photos: Path, desk: Desk) -> images.Intake:
             progress=desk.progress,
         )
     desk.tell(f"  {len(intake.frames)} frames, {len(intake.quarantined)} quarantined")
+    if intake.listing.outside:
+        desk.tell(f"  {intake.listing.outside} links that lead out of the folder, passed over")
     return intake
 
 
@@ -352,6 +354,7 @@ def foresee(photos: Path, desk: Desk) -> dict[str, Any]:
         "files": len(listing.files),
         "hidden": listing.hidden,
         "other": listing.other,
+        "outside": listing.outside,
         "out": str(desk.out),
         "settings": desk.settings.plain(),
     }

@@ -53,7 +53,9 @@ def noise_curve(survey: Survey) -> bytes:
             formula = rf"sd = $\sqrt{{K\,{above} + read^2{tail}"
             axes.plot(level, _law(noise, light, quantum), color=TEAL, label=formula)
             told = f"K = {noise.gain:.4g} ± {noise.gain_error or 0:.1g} DN/e⁻"
-            if noise.read_noise is not None:
+            if noise.read_noise is None:
+                told += "\nread noise not told"
+            else:
                 told += f"\nread = {noise.read_noise:.3g} ± {noise.read_noise_error or 0:.1g} DN"
             axes.text(0.97, 0.05, told, transform=axes.transAxes, ha="right", va="bottom")
         else:
@@ -112,7 +114,7 @@ def edge_spread(survey: Survey) -> bytes:
 
     def draw(axes: Axes) -> None:
         widths = survey.edge_widths_px
-        axes.hist(widths, bins=[k / 10 for k in range(26)], color=SLATE, alpha=0.75)
+        axes.hist(widths, bins=[k / 20 for k in range(51)], color=SLATE, alpha=0.75)
         if survey.blur_sigma_px is not None:
             sigma = survey.blur_sigma_px
             axes.axvline(sigma, color=AMBER, label=f"the camera's: {sigma:.2f} px")
