@@ -216,6 +216,11 @@ def option_name(name: str) -> str:
     return "--" + name.replace("_", "-")
 
 
+def _plain(value: float) -> str:
+    """A limit as a person would type it: 10000000, not 1e+07."""
+    return str(int(value)) if value == int(value) else f"{value:g}"
+
+
 def _validate(f: dataclasses.Field[Any], value: Any) -> None:
     about, name = f.metadata, option_name(f.name)
     if value is None and f.default is None:
@@ -231,7 +236,7 @@ def _validate(f: dataclasses.Field[Any], value: Any) -> None:
         raise UsageError(f"{name} {value!r} is not one of {', '.join(about['choices'])}")
     low, high = about["low"], about["high"]
     if (low is not None and value < low) or (high is not None and value > high):
-        span = f"{low:g} to {high:g}" if high is not None else f"at least {low:g}"
+        span = f"at least {_plain(low)}" if high is None else f"{_plain(low)} to {_plain(high)}"
         raise UsageError(f"{name} {value} is out of range", remedy=f"it takes {span}")
     if isinstance(value, float) and value != value:
         raise UsageError(f"{name} is not a number")

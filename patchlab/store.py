@@ -18,7 +18,8 @@ import os
 import platform
 import shutil
 import tempfile
-from collections.abc import Callable, Mapping
+from collections.abc import Callable, Iterator, Mapping
+from contextlib import contextmanager
 from pathlib import Path, PurePosixPath
 from typing import Any, BinaryIO
 
@@ -257,7 +258,8 @@ def write_artefact(
         for name, data in files.items():
             target = work / _safe(name)
             target.parent.mkdir(parents=True, exist_ok=True)
-            target.write_bytes(data)
+            with _naming(folder / name):
+                target.write_bytes(data)
         (work / manifest).write_bytes(canonical_json(head))
         os.chmod(work, 0o755)
         if folder.exists():
@@ -272,12 +274,21 @@ def write_artefact(
     return head
 
 
+@contextmanager
+def _naming(path: Path) -> Iterator[None]:
+    """Give a failing write the file's own name: a full disk names none."""
+    try:
+        yield
+    except OSError as error:
+        raise OSError(error.errno, error.strerror or str(error), str(path)) from None
+
+
 def write_file(path: Path, data: bytes) -> None:
     """Write one file whole: a temporary name beside it, then a rename."""
     path.parent.mkdir(parents=True, exist_ok=True)
     handle, name = tempfile.mkstemp(prefix=f".{path.name}.", dir=path.parent)
     try:
-        with os.fdopen(handle, "wb") as out:
+        with _naming(path), os.fdopen(handle, "wb") as out:
             out.write(data)
         os.chmod(name, 0o644)
         os.replace(name, path)

@@ -203,7 +203,8 @@ class NoiseModel:
     measurable : False when the folder cannot tell; the numbers are None, ``reason`` says why
     gain : DN per electron; None for a bent law that only ``levels`` and ``sd`` describe
     gain_error : its standard error
-    read_noise : DN, quantisation taken out
+    read_noise : DN, quantisation taken out; None beside a gain where the frames cannot tell it
+        (``reason`` says why): then ``sd[0]`` is the law's value at the black level
     levels, sd : sampled curve, codes and DN
     autocovariance : (2m+1, 2m+1) of the noise, centre 1; None means white
     kept_fraction : share of the pixels that were flat enough to tell

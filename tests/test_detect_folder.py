@@ -83,7 +83,7 @@ def test_one_table_holds_every_edgel_and_a_bad_frame_is_told(whole):
     assert sum(counted.values()) == len(rows) > 300
     for name, count in counted.items():
         own = [r for r in rows if r["picture"] == name]
-        with (out / "edgels" / f"{name}.csv").open(newline="") as file:
+        with (out / "edgels" / f"{name.replace('.', '_')}.csv").open(newline="") as file:
             alone = list(csv.DictReader(file))
         assert len(alone) == count
         assert [{k: v for k, v in r.items() if k != "picture"} for r in own] == alone
@@ -130,6 +130,19 @@ def test_a_picture_that_changed_is_looked_at_again(bank, folder, tmp_path):
     result = run(bank, copy, out, resume=True, progress=lambda *a: again.append(a[3]))
     assert again == ["e.png"]
     assert result["images"][1]["edgels"] == run(bank, copy, tmp_path / "x")["images"][1]["edgels"]
+
+
+def test_a_result_does_not_outlive_the_pictures_it_tells_of(bank, folder, tmp_path):
+    copy, out = tmp_path / "p", tmp_path / "d"
+    copy.mkdir()
+    (copy / "a.png").write_bytes((folder / "a.png").read_bytes())
+    run(bank, copy, out)
+    assert (out / job.RESULT).is_file()
+    (copy / "bad.png").write_bytes(b"nothing")
+    with pytest.raises(InputError, match="1 of 2"):
+        run(bank, copy, out, resume=True)
+    assert not (out / job.RESULT).exists()
+    assert (out / "edgels" / "a_png.csv").is_file()
 
 
 def test_another_request_does_not_go_on(bank, folder, whole, tmp_path):
@@ -213,7 +226,7 @@ def test_no_two_pictures_share_a_file(bank, folder, tmp_path):
     assert [i["path"] for i in result["images"]] == [
         "a#b.png", "a_pageb.png", "t.tif#0", "t.tif#1", "t.tif_page0.tif"
     ]  # fmt: skip
-    files = ("a#b.png", "a_pageb.png", "t.tif_page0", "t.tif_page1", "t.tif_page0.tif")
+    files = ("a#b_png", "a_pageb_png", "t_tif_page0", "t_tif_page1", "t.tif_page0_tif")
     assert {p.name for p in (out / "edgels").iterdir()} == {f"{name}.csv" for name in files}
     for name, image in zip(files, result["images"], strict=True):
         rows = (out / "edgels" / f"{name}.csv").read_text().splitlines()[1:]
@@ -225,7 +238,7 @@ def test_force_leaves_nothing_of_the_job_before(bank, folder, tmp_path):
     draw = edge_pictures
     run(bank, folder, out, draw=draw)
     (out / "mine.txt").write_text("kept")
-    assert (out / "overlay" / "e.png.png").is_file()
+    assert (out / "overlay" / "e_png.png").is_file()
     run(bank, alone, out, force=True)
     (out / "mine.txt").unlink()
     run(bank, alone, tmp_path / "fresh")
@@ -241,9 +254,9 @@ def test_force_clears_only_what_a_detection_wrote(bank, folder, tmp_path):
     photo.write_bytes((folder / "a.png").read_bytes())
     kept = photo.read_bytes()
     run(bank, folder / "a.png", tmp_path / "d", force=True, draw=edge_pictures)
-    half = own.parent / ".a.png.png.x1y2z3_k"  # the draft of a killed worker
+    half = own.parent / ".a_png.png.x1y2z3_k"  # the draft of a killed worker
     half.write_bytes(b"half")
-    (own.parent / "t.tif_page0.png").write_bytes(b"of a page")
+    (own.parent / "t_tif_page0.png").write_bytes(b"of a page")
     run(bank, folder / "e.png", tmp_path / "d", force=True)
     assert {p.name for p in own.parent.iterdir()} == {"notes.txt", "photo.png"}
     assert own.read_text() == "kept"
@@ -304,7 +317,7 @@ def test_kinds_and_pictures_from_the_command_line(bank, folder, tmp_path):
 
     both = call("both", "--edges", "both", "--false-edges", "10")
     assert both["thresholds"] == {"step": pytest.approx(5.2), "line": pytest.approx(5.3)}
-    assert (tmp_path / "both" / "overlay" / "a.png.png").is_file()
+    assert (tmp_path / "both" / "overlay" / "a_png.png").is_file()
     lines = call("line", "--edges", "line", "--no-pictures")
     assert set(lines["thresholds"]) == {"line"}
     assert {p.name for p in (tmp_path / "line").iterdir()} == {

@@ -16,6 +16,7 @@ from typing import Any
 import numpy as np
 from numpy.typing import NDArray
 
+from patchlab import __version__
 from patchlab.bank.costs import read_costs
 from patchlab.bank.lattice import check_name
 from patchlab.bank.plan import KINDS, make_plan
@@ -44,6 +45,8 @@ from patchlab.types import (
 )
 
 MANIFEST = "bank.json"
+LAYOUT = 1
+"""Raised whenever the same kernels would be planned or laid out otherwise."""
 TAPS, TABLE, NOISE = "kernels.npy", "input_table.npy", "autocovariance.npy"
 MIX = "mix.npy"
 FIXED_TAPS, FIXED_CODES = "fixed_kernels.npy", "fixed_codes.npy"
@@ -135,6 +138,7 @@ def _body(bank: Bank, plan: Plan) -> dict[str, Any]:
         },
         "fixed_point": _fixed_entry(plan.detail["fixed"]),
         "interface": plan.detail["abi"],
+        "layout": LAYOUT,
         "provenance": dict(bank.provenance),
         "warnings": list(bank.warnings),
     }
@@ -453,6 +457,15 @@ def _plan(folder: Path, head: Mapping[str, Any], bank: Bank) -> Plan:
     stored = np.array(entry["error_bound"], dtype=np.float64)
     same = stored.shape == (len(bank),) and np.allclose(stored, plan.error_bound, 1e-9, 0)
     if not same or head["interface"] != plan.detail["abi"]:
+        made = head.get("layout"), head.get("environment", {}).get("patchlab")
+        if made != (LAYOUT, __version__):
+            raise VerificationError(
+                f"this bank was exported by another patchlab (version {shown(made[1])}, layout "
+                f"{shown(made[0])}; here is {__version__}, layout {LAYOUT}), which planned it "
+                "otherwise",
+                where=bank.name,
+                remedy="export it again with this version, or use the one that made it",
+            )
         raise VerificationError(
             "the plan in the manifest does not belong to these kernels",
             where=bank.name,

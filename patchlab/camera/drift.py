@@ -15,7 +15,8 @@ from typing import Literal
 
 import numpy as np
 
-from patchlab.camera.noise import KEEP_RULE, MIN_KEPT, Samples, mask_gains, noise_bands
+from patchlab.camera.law import KEEP_RULE, MIN_KEPT, Samples
+from patchlab.camera.noise import mask_gains, noise_bands
 from patchlab.camera.pixels import draw, regions, windows
 from patchlab.types import F64, Frame, InputTable, Mark, NoiseModel, Survey
 

@@ -7,7 +7,9 @@ from itertools import combinations
 
 import numpy as np
 
-from patchlab.camera.noise import KEEP_RULE, MIN_KEPT, NoiseMeter, unit_scale
+from patchlab.camera.law import KEEP_RULE, MIN_KEPT, unit_scale
+from patchlab.camera.noise import NoiseMeter
+from patchlab.camera.table import read_of
 from patchlab.errors import InputError
 from patchlab.types import NoiseModel
 
@@ -95,10 +97,11 @@ def frame_scale(meter: NoiseMeter, noise: NoiseModel) -> float | None:
     """
     assert meter.contract is not None
     assert noise.gain is not None
-    assert noise.read_noise is not None
+    read = read_of(noise, meter.contract)
+    assert read is not None
     samples, unit = meter.samples, unit_scale(meter.contract)
     quantum = 1 / 12 if meter.contract.format.integer else 0.0
-    law = noise.gain * unit * np.maximum(samples.level, 0) + (noise.read_noise * unit) ** 2
+    law = noise.gain * unit * np.maximum(samples.level, 0) + (read * unit) ** 2
     law = np.maximum(law + quantum, 0.02)
     size = 16.0
     for _ in range(ROUNDS):

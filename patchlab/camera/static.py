@@ -13,10 +13,12 @@ from dataclasses import replace
 
 import numpy as np
 from scipy import ndimage
+from scipy.optimize import brentq
+from scipy.special import ndtr
 
 from patchlab.camera.flat import BLOCK, LAG, lagged_products
-from patchlab.camera.noise import MIN_KEPT, NO_ELECTRONS, Fit, Samples, line, model, refused
-from patchlab.camera.noise import unit_scale as _scale
+from patchlab.camera.law import MIN_KEPT, NO_ELECTRONS, Fit, Samples, line, model, refused
+from patchlab.camera.law import unit_scale as _scale
 from patchlab.camera.pixels import MAX_SAMPLES, clip_codes, diagonal_band, limited, windows
 from patchlab.conventions import rng
 from patchlab.errors import InputError
@@ -30,6 +32,8 @@ EMVA_FLOOR = 0.24
 PAIRS = 16
 BINS = 40
 CURVE_BINS = 24
+READ_ERROR = 0.05
+"""Largest relative standard error of the read noise that static scenes tell."""
 
 _NEIGHBOURS = np.array([[1, 1, 1], [1, 0, 1], [1, 1, 1]], np.float32) / 8
 
@@ -182,7 +186,9 @@ def _static_law(contract: InputContract, samples: Samples, differences: list[F32
         return _static_curve(contract, kept, acov)
     if fit.slope_error > 0.05 * fit.slope:
         return refused("the scenes do not span enough grey levels", 1.0)
-    found = replace(model(contract, replace(fit, share=1.0)), autocovariance=acov)
+    found = replace(
+        model(contract, replace(fit, share=1.0), read_error=READ_ERROR), autocovariance=acov
+    )
     return found if acov is None else replace(found, **NO_ELECTRONS)
 
 
@@ -221,11 +227,13 @@ def measure_noise_dark(frames: Iterable[Frame]) -> NoiseModel:
     powers: list[float] = []
     counts: list[int] = []
     means: list[float] = []
+    spreads: list[float] = []
     floor = 0.0
     single = 0.0
     for frame in limited(frames):
         codes = frame.pixels.astype(np.float64)
         means.append(float(codes.mean()))
+        spreads.append(float(codes.var()))
         floor = max(floor, float((frame.pixels <= 0).mean()))
         single = float((diagonal_band(codes.astype(np.float32)) ** 2)[1:-1, 1:-1].mean())
         if before is not None:
@@ -239,19 +247,50 @@ def measure_noise_dark(frames: Iterable[Frame]) -> NoiseModel:
         return replace(refused(why, 0.0), source="dark")
     variance = float(np.mean(powers)) if powers else single
     n = float(sum(counts)) if powers else 0.35 * before.pixels.size
-    return _dark_law(before.contract, variance, n, float(np.mean(means)))
+    pattern = max(float(np.mean(spreads)) - variance, 0.0) if powers else 0.0
+    return _dark_law(before.contract, variance, n, float(np.mean(means)), float(np.sqrt(pattern)))
 
 
-def _dark_law(contract: InputContract, variance: float, count: float, level: float) -> NoiseModel:
+def _rounded_variance(sd: float, means: F64, weights: F64) -> float:
+    """Variance of a rounded Gaussian, exactly, averaged over the pixels' means."""
+    reach = int(np.ceil(8 * sd + 2))
+    code = np.rint(means)[:, None] + np.arange(-reach, reach + 1)
+    below = ndtr((code + 0.5 - means[:, None]) / sd)
+    chance = np.diff(below, axis=1, prepend=0.0)
+    mean = (chance * code).sum(axis=1)
+    return float(weights @ (chance * (code - mean[:, None]) ** 2).sum(axis=1))
+
+
+def _dark_law(
+    contract: InputContract, variance: float, count: float, level: float, pattern: float
+) -> NoiseModel:
+    """The noise whose rounding gives this variance.
+
+    1/12 for the rounding is right only where noise or fixed pattern spreads over the codes:
+    at 0.45 codes about a whole code it is wrong by 4 % of the read noise.
+    """
     integer = contract.format.integer
     if integer and variance < EMVA_FLOOR:
         why = f"the dark noise, {np.sqrt(variance):.2f} codes, is below the quantisation step"
         return replace(refused(why, 1.0), source="dark")
-    read = float(np.sqrt(variance - (1 / 12 if integer else 0.0)))
+    read, slope = float(np.sqrt(variance)), 2 * float(np.sqrt(variance))
+    if integer:
+        nodes, weights = np.polynomial.hermite_e.hermegauss(9)
+        about, weights = level + pattern * nodes, weights / weights.sum()
+        read = float(
+            brentq(
+                lambda sd: _rounded_variance(sd, about, weights) - variance,
+                0.02,
+                read + 1,
+                xtol=1e-6,
+            )
+        )
+        near = [_rounded_variance(f * read, about, weights) for f in (0.99, 1.01)]
+        slope = (near[1] - near[0]) / (0.02 * read)
     return NoiseModel(
         True,
         read_noise=read,
-        read_noise_error=variance * float(np.sqrt(2 / count)) / (2 * read),
+        read_noise_error=variance * float(np.sqrt(2 / count)) / slope,
         levels=np.array([level]),
         sd=np.array([np.sqrt(variance)]),
         kept_fraction=1.0,

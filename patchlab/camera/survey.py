@@ -15,7 +15,7 @@ from patchlab.camera.noise import NoiseMeter
 from patchlab.camera.pixels import limited
 from patchlab.camera.spectrum import Spectrum, SpectrumMeter
 from patchlab.camera.static import measure_noise_dark, measure_noise_static
-from patchlab.camera.table import default_kind, make_table, sd_of
+from patchlab.camera.table import default_kind, make_table, read_of, sd_of
 from patchlab.progress import Progress, silent
 from patchlab.types import Frame, InputContract, NoiseModel, SlantedEdge, Survey, TableKind
 
@@ -70,7 +70,7 @@ def survey(
     from_photos = joined(meters).result()
     if not mixed:
         one_camera(meters, from_photos)
-    noise, notes = better_noise(from_photos, static, dark)
+    noise, notes = better_noise(from_photos, contract, static, dark)
     spectrum = spectrum_meter.result()
 
     blur_meter, mark_meter = BlurMeter(noise), MarkMeter(noise)
@@ -128,6 +128,7 @@ def _blur(meter: BlurMeter, chart: SlantedEdge | None) -> tuple[float | None, st
 
 def better_noise(
     photos: NoiseModel,
+    contract: InputContract,
     static: Iterable[Sequence[Frame]] | None,
     dark: Iterable[Frame] | None,
 ) -> tuple[NoiseModel, tuple[str, ...]]:
@@ -149,21 +150,25 @@ def better_noise(
         else:
             notes.append(f"static scenes: {from_static.reason}")
     if dark is not None:
-        noise, note = _with_dark(noise, measure_noise_dark(dark))
+        noise, note = _with_dark(noise, measure_noise_dark(dark), contract)
         notes.append(note)
     return noise, tuple(notes)
 
 
-def _with_dark(noise: NoiseModel, at_rest: NoiseModel) -> tuple[NoiseModel, str]:
+def _with_dark(
+    noise: NoiseModel, at_rest: NoiseModel, contract: InputContract
+) -> tuple[NoiseModel, str]:
     """Put the dark frames' read noise into a straight law."""
     if at_rest.read_noise is None:
         return noise, f"read noise from dark frames: {at_rest.reason}"
     told = f"read noise {at_rest.read_noise:.3g} DN at a mean dark level of {at_rest.levels[0]:.4g}"
-    if noise.gain is None or noise.read_noise is None:
+    before = read_of(noise, contract)
+    if noise.gain is None or before is None:
         return noise, f"the dark frames' {told} is not used: there is no straight law to put it in"
-    change = at_rest.read_noise**2 - noise.read_noise**2
+    change = at_rest.read_noise**2 - before**2
     better = replace(
         noise,
+        reason="",
         read_noise=at_rest.read_noise,
         read_noise_error=at_rest.read_noise_error,
         sd=np.sqrt(np.maximum(noise.sd**2 + change, 1e-12)),

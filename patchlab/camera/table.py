@@ -32,13 +32,23 @@ _QUANTUM = 1 / 12
 # ---------------------------------------------------------------- the noise at a level
 
 
+def read_of(noise: NoiseModel, contract: InputContract) -> float | None:
+    """Read noise of a straight law in codes, also where it is not told; None for a curve."""
+    if noise.gain is None or noise.read_noise is not None:
+        return noise.read_noise
+    quantum = _QUANTUM if contract.format.integer else 0.0
+    variance = noise.sd[0] ** 2 - noise.gain * (noise.levels[0] - contract.black) - quantum
+    return float(np.sqrt(max(variance, 0.0)))
+
+
 def sd_of(noise: NoiseModel, contract: InputContract, codes: F64) -> F64:
     """Standard deviation of the noise in codes at mean code values (quantisation included)."""
     codes = np.asarray(codes, dtype=np.float64)
-    if noise.gain is not None and noise.read_noise is not None:
+    read = read_of(noise, contract)
+    if noise.gain is not None and read is not None:
         quantum = _QUANTUM if contract.format.integer else 0.0
         light = np.maximum(codes - contract.black, 0)
-        return np.sqrt(noise.gain * light + noise.read_noise**2 + quantum)
+        return np.sqrt(noise.gain * light + read**2 + quantum)
     return np.interp(codes, noise.levels, noise.sd)
 
 
@@ -60,7 +70,7 @@ def code_probabilities(noise: NoiseModel, contract: InputContract, level: float)
     sd = float(sd_of(noise, contract, np.array([level]))[0])
     codes = _window(contract, level, sd)
     edges = codes[:-1] + 0.5
-    gain, read = noise.gain, noise.read_noise
+    gain, read = noise.gain, read_of(noise, contract)
     electrons = (level - contract.black) / gain if gain else np.inf
     if gain is None or read is None or electrons > EXACT_ELECTRONS:
         below = ndtr((edges - level) / np.sqrt(max(sd**2 - _QUANTUM, 1e-6)))
@@ -119,9 +129,10 @@ def _log(light: F64) -> F64:
 
 def _start(noise: NoiseModel, contract: InputContract, codes: F64) -> F64:
     """Slope of the generalised Anscombe transform, or 1 / sd of a curve, at every code."""
-    if noise.gain is None or noise.read_noise is None:
+    read = read_of(noise, contract)
+    if noise.gain is None or read is None:
         return 1 / np.maximum(sd_of(noise, contract, codes), 0.3)
-    a, b = noise.gain, noise.read_noise**2 + _QUANTUM
+    a, b = noise.gain, read**2 + _QUANTUM
     light = np.maximum(codes - contract.black, 0.0)
     return np.asarray(1 / np.sqrt(a * light + 0.375 * a**2 + b))
 
@@ -156,8 +167,9 @@ def _stabilise(noise: NoiseModel, contract: InputContract) -> F64:
 
 def _float_formula(noise: NoiseModel, contract: InputContract) -> tuple[float, float, float]:
     """Slope, offset and scale of the Anscombe root for float pixels."""
-    if noise.gain is not None and noise.read_noise is not None:
-        a, b = noise.gain, noise.read_noise**2
+    read = read_of(noise, contract)
+    if noise.gain is not None and read is not None:
+        a, b = noise.gain, read**2
     else:
         light = noise.levels - contract.black
         weight = 1 / np.maximum(noise.sd, 1e-12) ** 2

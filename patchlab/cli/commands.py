@@ -209,11 +209,14 @@ def _hold_to_quality(strict: bool, result: dict[str, Any]) -> None:
 def survey(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Say what the camera itself does to PHOTOS: noise, blur, spectrum, marks.
 
-    Without -o the survey is only printed. Static scenes, dark frames and a slanted edge tell
-    more than photographs can.
+    Without -o the survey is only printed; with it, a page is written too (OUT/report), unless
+    a whole run's page stands there. Static scenes, dark frames and a slanted edge tell more
+    than photographs can.
     """
     if options["out"] is not None:
         result = _work(photos, "survey", terminal, options)
+        if result is not None and not options["dry_run"]:
+            result["page"] = _survey_page(options["out"], terminal)
     else:
         with tempfile.TemporaryDirectory(prefix="patchlab-") as folder:
             passing = {**options, "out": Path(folder) / "run", "passing": True}
@@ -224,15 +227,28 @@ def survey(photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> N
         _print(result, as_json, _say_survey)
 
 
+def _survey_page(out: Path, terminal: Terminal) -> str:
+    """Where the page is: a survey's own, or that of the run of which it is a stage."""
+    from patchlab import report
+
+    page = out / "report" / "index.html"
+    if not (out / "bank").exists() or not page.exists():
+        with terminal.working():
+            report.write_survey(out, terminal)
+    return str(page)
+
+
 def _say_survey(result: dict[str, Any]) -> None:
     if "noise" not in result:
         _rows(result)
         return
     noise, blur = result["noise"], result["blur"]
     if noise["measurable"] and noise["gain_dn_per_electron"] is not None:
+        read = noise["read_noise_dn"]
         law = (
             f"gain {noise['gain_dn_per_electron']:.4g} DN/e- "
-            f"(se {noise['gain_standard_error']:.2g}), read noise {noise['read_noise_dn']:.3g} DN"
+            f"(se {noise['gain_standard_error']:.2g}), "
+            + (f"read noise {read:.3g} DN" if read is not None else noise["reason"])
         )
     else:
         law = "measured as a curve" if noise["measurable"] else noise["reason"]
@@ -244,6 +260,7 @@ def _say_survey(result: dict[str, Any]) -> None:
             "blur": f"{blur['sigma_px']:.2f} px" if blur["sigma_px"] else blur["note"],
             "spectrum": result["spectrum"]["exponent"],
             "table": result["table"],
+            **({"page": result["page"]} if "page" in result else {}),
             **{f"note {k}": text for k, text in enumerate(result["notes"], 1)},
         }
     )

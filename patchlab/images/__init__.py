@@ -12,13 +12,12 @@ from patchlab.images.develop import ReadOptions
 from patchlab.images.folder import (
     FrameRecord,
     Intake,
-    Listing,
     iterate,
-    list_photos,
     read_file,
     reread,
     take_in,
 )
+from patchlab.images.listing import Listing, list_photos
 from patchlab.images.parts import make_brackets
 from patchlab.images.pfnc import RawLayout
 from patchlab.images.planes import one_plane

@@ -84,6 +84,7 @@ class Desk:
             if _says_the_same(head, about):
                 self.tell(f"  {kind}: kept from before")
                 return store.load(folder, kind, mapped=kind in MAPPED)
+            self.tell(f"  {kind}: made anew ({_why_anew(head, about)})")
         with self.timed(kind):
             noun = make()
         head = store.save(folder, kind, noun, force=True, extra=extra(noun), **about)
@@ -99,6 +100,31 @@ def _says_the_same(head: Mapping[str, Any], about: Mapping[str, Any]) -> bool:
     return all(head.get(k) == v for k, v in {**wanted, **body}.items()) and (
         head.get("environment") == store.environment()
     )
+
+
+_OTHER = {
+    "inputs": "other photographs",
+    "photos": "other photographs",
+    "measured_on": "other static, dark or edge frames",
+    "example": "another example frame",
+    "seed": "another seed",
+    "parents": "an earlier stage was made anew",
+    "recipe": "another version of patchlab",
+}
+
+
+def _why_anew(head: Mapping[str, Any], about: Mapping[str, Any]) -> str:
+    """What differs from a standing artefact, in a few words."""
+    wanted = json.loads(store.canonical_json({**about, **about["body"]}))
+    differs = {k for k in wanted if k != "body" and head.get(k) != wanted[k]}
+    why = [text for key, text in _OTHER.items() if key in differs]
+    if "settings" in differs:
+        before, now = head.get("settings") or {}, wanted["settings"]
+        names = sorted(k for k in {*before, *now} if before.get(k) != now.get(k))
+        why.append(f"other settings: {', '.join(names)}")
+    if head.get("environment") != store.environment():
+        why.append("another environment")
+    return "; ".join(dict.fromkeys(why)) or "it was made otherwise"
 
 
 # ---------------------------------------------------------------- the run's folder

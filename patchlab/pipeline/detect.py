@@ -110,12 +110,13 @@ def read_options(bank: Bank) -> images.ReadOptions:
 
 
 def _stem(file: str, path: str) -> str:
-    """The name of a picture's files: that of its own file, and the page's where it has several.
+    """The name of a picture's files, ``a_tif`` for ``a.tif``, and ``a_tif_page0`` for a page.
 
-    No two are equal: a file ends in a suffix of pictures, and a page never does.
+    No two are equal: a file's name ends in a suffix of pictures, and a page's never does.
     """
+    stem, _, suffix = file.rpartition(".")
     page = path.removeprefix(f"{file}#")
-    return file if page == path else f"{file}_page{page}"
+    return f"{stem}_{suffix}" if page == path else f"{stem}_{suffix}_page{page}"
 
 
 def _one(bank: Bank, frame: Frame, respond: Any, task: _Task) -> dict[str, Any]:
@@ -258,12 +259,12 @@ def _clear_place(place: Path) -> None:
 def _is_ours(name: str) -> bool:
     """Whether a file is named as a picture's files are, or as the draft of one.
 
-    A person's own ``a.png`` is not; ``a.png.png`` and ``a.tif_page0.csv`` are.
+    A person's own ``a.png`` is not; ``a_png.png`` and ``a_tif_page0.csv`` are.
     """
     whole = name[1:].rpartition(".")[0] if name.startswith(".") else name
     stem, _, kind = whole.rpartition(".")
-    picture = Path(re.sub(r"_page\d+$", "", stem))
-    return kind in ("csv", "png") and picture.suffix.lower() in images.SUFFIXES
+    suffix = re.sub(r"_page\d+$", "", stem).rpartition("_")[2]
+    return kind in ("csv", "png") and f".{suffix.lower()}" in images.SUFFIXES
 
 
 def _leave_nothing(out: Path, *, made: bool) -> None:
@@ -324,6 +325,7 @@ def detect(
     made = not out.exists()
     if resume and not made:
         journal.reopen()
+        (out / RESULT).unlink(missing_ok=True)  # it stands again when the job is done
     else:
         may_write(out, force)
         _clear(out)

@@ -62,6 +62,8 @@ def take_in(photos: images.Place, desk: Desk) -> images.Intake:
             progress=desk.progress,
         )
     desk.tell(f"  {len(intake.frames)} frames, {len(intake.quarantined)} quarantined")
+    if intake.listing.outside:
+        desk.tell(f"  {intake.listing.outside} links that lead out of the folder, passed over")
     return intake
 
 
@@ -373,6 +375,7 @@ def foresee(photos: images.Place, desk: Desk) -> dict[str, Any]:
         "files": len(listing.files),
         "hidden": listing.hidden,
         "other": listing.other,
+        "outside": listing.outside,
         "out": str(desk.out),
         "settings": desk.settings.plain(),
     }
@@ -405,6 +408,8 @@ def _work(photos: images.Place, desk: Desk, until: str) -> dict[str, Any]:
         clear_after(desk.out, "survey")
     if until == "survey":
         return tell.survey(found, survey_head)
+    for note in found.notes:
+        desk.tell(f"  note: {note}")
     patches, patches_head = sample(intake, found, survey_head, desk)
     (dictionary, _), dictionary_head = learn_basis(patches, found, patches_head, desk)
     if until == "learn":

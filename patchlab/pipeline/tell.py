@@ -25,6 +25,7 @@ def photos(intake: Intake) -> dict[str, Any]:
         ],
         "hidden": intake.listing.hidden,
         "other": intake.listing.other,
+        "outside": intake.listing.outside,
         "pixels": intake.contract.pixels,
         "plane": intake.contract.plane,
         "transfer": intake.contract.transfer,

@@ -199,6 +199,29 @@ class RunContent:
         return (*self.dictionary.warnings, *self.bank.warnings)
 
 
+@dataclass(frozen=True, eq=False)
+class SurveyContent:
+    """What a survey holds, for its page."""
+
+    photos: Mapping[str, Any]
+    survey: Survey
+    head: Mapping[str, Any]
+    settings: Mapping[str, Any]
+    frame: Frame | None
+
+
+def open_survey(out: Path) -> SurveyContent:
+    """Read the survey that stands in a run's folder.
+
+    Raises
+    ------
+    InputError : there is none; VerificationError : a file was changed.
+    """
+    survey, head = store.load(out / "survey", "survey")
+    frame = _example(out, survey, head)
+    return SurveyContent(head["photos"], survey, head, head["settings"], frame)
+
+
 def open_run(out: Path) -> RunContent:
     """Read every artefact of a finished run, and find the edges of its example frame.
 

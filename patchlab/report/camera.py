@@ -30,8 +30,9 @@ FINE = {"row_noise", "column_noise", "interpolation_lattice", "sharpening", "blo
 def _law(noise: NoiseModel, light: F64, quantum: float, errors: float = 0.0) -> F64:
     """Standard deviation by the straight law, some standard errors up or down."""
     assert noise.gain is not None
-    assert noise.read_noise is not None
     gain = noise.gain + errors * (noise.gain_error or 0.0)
+    if noise.read_noise is None:
+        return np.asarray(np.sqrt(np.maximum(gain * light + noise.sd[0] ** 2, 0)))
     read = max(noise.read_noise + errors * (noise.read_noise_error or 0.0), 0.0)
     return np.sqrt(np.maximum(gain * light + read**2 + quantum, 0))
 
@@ -52,7 +53,10 @@ def noise_curve(survey: Survey) -> bytes:
             formula = rf"sd = $\sqrt{{K\,{above} + read^2{tail}"
             axes.plot(level, _law(noise, light, quantum), color=TEAL, label=formula)
             told = f"K = {noise.gain:.4g} ± {noise.gain_error or 0:.1g} DN/e⁻"
-            told += f"\nread = {noise.read_noise:.3g} ± {noise.read_noise_error or 0:.1g} DN"
+            if noise.read_noise is None:
+                told += "\nread noise not told"
+            else:
+                told += f"\nread = {noise.read_noise:.3g} ± {noise.read_noise_error or 0:.1g} DN"
             axes.text(0.97, 0.05, told, transform=axes.transAxes, ha="right", va="bottom")
         else:
             axes.plot(noise.levels, noise.sd, color=TEAL, label="curve")
@@ -110,7 +114,7 @@ def edge_spread(survey: Survey) -> bytes:
 
     def draw(axes: Axes) -> None:
         widths = survey.edge_widths_px
-        axes.hist(widths, bins=[k / 10 for k in range(26)], color=SLATE, alpha=0.75)
+        axes.hist(widths, bins=[k / 20 for k in range(51)], color=SLATE, alpha=0.75)
         if survey.blur_sigma_px is not None:
             sigma = survey.blur_sigma_px
             axes.axvline(sigma, color=AMBER, label=f"the camera's: {sigma:.2f} px")

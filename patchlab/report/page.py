@@ -16,6 +16,7 @@ from patchlab.images.planes import one_plane
 from patchlab.pipeline import use
 from patchlab.progress import Progress, silent
 from patchlab.report import assess, camera, colour, mosaic, parts, plots, sure
+from patchlab.types import Frame, Survey
 
 SHOWN = 96
 """Most components drawn in one mosaic; the page says how many there are."""
@@ -24,30 +25,81 @@ SHOWN = 96
 def write(run: Path, progress: Progress = silent) -> float:
     """Write the page of a finished run to ``RUN/report``; gives the seconds it took.
 
+    Where nothing but the survey stands, the page is the survey's.
+
     Raises
     ------
     InputError : the folder holds no finished run.
     """
     start = time.perf_counter()
+    if not any((run / room).exists() for room in ("patches", "bank")):
+        return write_survey(run, progress)
     content = use.open_run(run)
     makers = _pictures(content)
+    drawn = _drawn(makers, progress)
+    page = _render(
+        "page.html",
+        drawn,
+        c=content,
+        shown=SHOWN,
+        how_sure=sure.in_words(content.dictionary),
+        about_parts=parts.in_words(*content.parts) if content.parts else "",
+        colours=colour.in_words(content.atom_fits),
+    )
+    _keep(run, drawn, page, {"bank": content.bank_head["id"]})
+    progress("page", 1, 1)
+    return round(time.perf_counter() - start, 3)
+
+
+def write_survey(run: Path, progress: Progress = silent) -> float:
+    """Write the page of a survey alone to ``RUN/report``; gives the seconds it took.
+
+    Raises
+    ------
+    InputError : the folder holds no survey.
+    """
+    start = time.perf_counter()
+    content = use.open_survey(run)
+    drawn = _drawn(_of_camera(content.survey, content.frame), progress)
+    _keep(run, drawn, _render("survey.html", drawn, c=content), {"survey": content.head["id"]})
+    progress("page", 1, 1)
+    return round(time.perf_counter() - start, 3)
+
+
+def _drawn(makers: Mapping[str, Callable[[], bytes]], progress: Progress) -> dict[str, bytes]:
     pictures = {}
     for done, (name, make) in enumerate(makers.items(), 1):
         pictures[name] = make()
         progress("page", done, len(makers) + 1)
-    page = _render(content, pictures)
-    files = {f"{name}.png": data for name, data in pictures.items()}
+    return pictures
+
+
+def _keep(run: Path, drawn: Mapping[str, bytes], page: str, parents: Mapping[str, str]) -> None:
+    files = {f"{name}.png": data for name, data in drawn.items()}
     files["index.html"] = page.encode()
-    parents = {"bank": content.bank_head["id"]}
     store.write_artefact(run / "report", "report", files, parents=parents, force=True)
-    progress("page", 1, 1)
-    return round(time.perf_counter() - start, 3)
+
+
+def _of_camera(survey: Survey, frame: Frame | None) -> dict[str, Callable[[], bytes]]:
+    """The pictures of the section on the camera."""
+    makers: dict[str, Callable[[], bytes]] = {"table": lambda: plots.table_curve(survey)}
+    if survey.noise.measurable:
+        makers["noise"] = lambda: camera.noise_curve(survey)
+        makers["autocovariance"] = lambda: plots.autocovariance(survey)
+    if survey.spectrum_frequency.size:
+        makers["spectrum"] = lambda: camera.spectrum(survey)
+    if survey.edge_widths_px.size or survey.slanted_edge is not None:
+        makers["spread"] = lambda: camera.edge_spread(survey)
+    crops = None if frame is None else camera.mark_crops(survey, one_plane(frame))
+    if crops is not None:
+        makers["marks"] = lambda: crops
+    return makers
 
 
 def _pictures(c: use.RunContent) -> Mapping[str, Callable[[], bytes]]:
     """Every picture of the page by its name, made when called."""
     makers: dict[str, Callable[[], bytes]] = {
-        "table": lambda: plots.table_curve(c.survey),
+        **_of_camera(c.survey, c.frame),
         "whitening": lambda: plots.whitening_spectrum(c.dictionary.whitening),
         "convergence": lambda: plots.convergence(c.dictionary),
         "atoms": lambda: _beside_fits(c.dictionary.atoms, c.atom_fits),
@@ -65,17 +117,6 @@ def _pictures(c: use.RunContent) -> Mapping[str, Callable[[], bytes]]:
     choice = c.dictionary.choice
     if choice is not None:
         makers["choice"] = lambda: sure.component_choice(choice)
-    if c.survey.noise.measurable:
-        makers["noise"] = lambda: camera.noise_curve(c.survey)
-        makers["autocovariance"] = lambda: plots.autocovariance(c.survey)
-    if c.survey.spectrum_frequency.size:
-        makers["spectrum"] = lambda: camera.spectrum(c.survey)
-    if c.survey.edge_widths_px.size or c.survey.slanted_edge is not None:
-        makers["spread"] = lambda: camera.edge_spread(c.survey)
-    if c.frame is not None:
-        crops = camera.mark_crops(c.survey, one_plane(c.frame))
-        if crops is not None:
-            makers["marks"] = lambda: crops
     if c.bank.coverage is not None:
         makers["coverage"] = lambda: plots.coverage_curve(c.bank)
     if c.bank.thresholds is not None:
@@ -119,7 +160,7 @@ def _baseline(c: use.RunContent) -> bytes:
     return mosaic.mosaic([atoms], labels, across=16, zoom=max(1, 48 // c.baseline.size))
 
 
-def _render(c: use.RunContent, pictures: Mapping[str, bytes]) -> str:
+def _render(template: str, pictures: Mapping[str, bytes], **content: Any) -> str:
     environment = jinja2.Environment(
         loader=jinja2.PackageLoader("patchlab.report", "."),
         autoescape=True,
@@ -131,11 +172,4 @@ def _render(c: use.RunContent, pictures: Mapping[str, bytes]) -> str:
         name: "data:image/png;base64," + base64.b64encode(data).decode()
         for name, data in pictures.items()
     }
-    return environment.get_template("page.html").render(
-        c=c,
-        pictures=embedded,
-        shown=SHOWN,
-        how_sure=sure.in_words(c.dictionary),
-        about_parts=parts.in_words(*c.parts) if c.parts else "",
-        colours=colour.in_words(c.atom_fits),
-    )
+    return environment.get_template(template).render(pictures=embedded, **content)

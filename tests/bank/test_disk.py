@@ -270,3 +270,14 @@ def test_no_bank_here(tmp_path):
     (tmp_path / "bank.json").write_bytes(b"{")
     with pytest.raises(InputError, match="cannot read"):
         read_bank(tmp_path)
+
+
+@pytest.mark.parametrize(("key", "value"), [("layout", 0), ("environment", {"patchlab": "0.0.1"})])
+def test_a_bank_of_another_layout_says_so(folder, key, value):
+    def older(head):
+        head[key] = value
+        head["interface"] = 12
+
+    reseal(folder, older)
+    with pytest.raises(VerificationError, match="was exported by another patchlab"):
+        read_bank(folder)

@@ -74,7 +74,15 @@ def test_further_frames_better_the_law_and_the_json_tells_all(camera, capsys, tm
     kept, _ = store.load(tmp_path / "run" / "survey", "survey")
     assert isinstance(kept, Survey)
     assert kept.noise.gain == pytest.approx(noise["gain_dn_per_electron"], rel=1e-4)
+    page = told.pop("page")
     assert json.loads((tmp_path / "run" / "survey" / "survey.json").read_text()) == told
+    text = (tmp_path / "run" / "report" / "index.html").read_text()
+    assert page == str(tmp_path / "run" / "report" / "index.html")
+    assert text.count("data:image/png;base64,") >= 5
+    assert "<script" not in text
+    assert "http" not in text
+    assert f"{noise['gain_dn_per_electron']:.4g}" in text
+    assert "The read noise comes from the dark frames" in text
 
 
 def test_a_survey_can_be_printed_only(camera, capsys):

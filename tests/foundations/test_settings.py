@@ -40,3 +40,10 @@ def test_every_setting_has_a_meaning_and_a_group():
     for f in dataclasses.fields(Settings):
         assert f.metadata["help"].endswith(".")
         assert f.metadata["group"]
+
+
+def test_a_limit_is_told_as_a_person_would_type_it():
+    with pytest.raises(UsageError, match=r"it takes 500 to 10000000$"):
+        Settings(patches=20_000_000)
+    with pytest.raises(UsageError, match=r"it takes 0\.5 to 1$"):
+        Settings(retain=0.2)

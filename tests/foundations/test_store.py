@@ -2,6 +2,7 @@
 
 import json
 from dataclasses import replace
+from pathlib import Path
 
 import numpy as np
 import pytest
@@ -145,3 +146,14 @@ def test_a_write_that_fails_leaves_nothing(tmp_path):
 def test_content_cannot_name_a_class_outside_the_nouns():
     with pytest.raises(InputError, match="unknown kind of content"):
         store.unpack({"is": "Popen", "args": "x"}, lambda name: b"")
+
+
+def test_a_full_disk_is_told_with_the_files_name(tmp_path, monkeypatch):
+    def full(self, data):
+        raise OSError(28, "No space left on device")
+
+    monkeypatch.setattr(Path, "write_bytes", full)
+    with pytest.raises(OSError, match="No space left") as caught:
+        store.write_artefact(tmp_path / "a", "patches", {"x.npy": b"1"})
+    assert caught.value.filename == str(tmp_path / "a" / "x.npy")
+    assert not (tmp_path / "a").exists()
