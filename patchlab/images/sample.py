@@ -13,10 +13,14 @@ The stated rules, in order:
 3. *flat*: all pixels are equal.
 4. *below the noise*: where the camera's noise is known, a standard deviation under twice the
    noise's: such a patch would teach the learner the noise.
-5. The DC (mean of the working values, float64) is subtracted.
-6. *flattest*: of all frames' candidates together, the stated share of lowest standard
+5. *on the block grid*: where the grid of block compression is known, the mean step between
+   pixels on either side of a block's boundary is more than twice the mean step inside blocks:
+   such a patch would teach the learner the grid. (Patches that straddle no boundary hardly
+   exist, and a dictionary of those that do not would be locked to the grid.)
+6. The DC (mean of the working values, float64) is subtracted.
+7. *flattest*: of all frames' candidates together, the stated share of lowest standard
    deviation is dropped (ties: by path, then by place in the frame's sequence).
-7. The rest is divided by its contrast, the patch's standard deviation.
+8. The rest is divided by its contrast, the patch's standard deviation.
 """
 
 from __future__ import annotations
@@ -39,7 +43,11 @@ from patchlab.workers import map_ordered
 _BLOCK = 1024  # positions drawn at a time: part of the sequence's definition
 _PATIENCE = 20  # positions drawn at most for each patch asked
 SMALL = "frame smaller than a patch"
-REASONS = ("invalid", "saturated", "flat", "below the noise")
+REASONS = ("invalid", "saturated", "flat", "below the noise", "on the block grid")
+BLOCK = 8
+"""Side of a block of compression, pixels."""
+GRID_MULTIPLE = 2.0
+"""Steps across the boundaries of blocks over steps inside them that a patch may have."""
 NOISE_MULTIPLE = 2.0
 """Contrast that a patch must have, in standard deviations of the camera's noise."""
 
@@ -56,6 +64,8 @@ class SampleSettings:
     seed : of every draw
     flat_fraction : share of the candidates that is dropped for lowest contrast, 0 to 0.9
     normalise : divide each patch by its contrast
+    grid : row and column, 0 to 7, where the blocks of compression begin, to leave out patches
+        that show them; None where there are none, or for all patches
 
     Raises
     ------
@@ -68,6 +78,7 @@ class SampleSettings:
     seed: int = 0
     flat_fraction: float = 0.3
     normalise: bool = True
+    grid: tuple[int, int] | None = None
 
     def __post_init__(self) -> None:
         if not 8 <= self.size <= 32:
@@ -163,7 +174,7 @@ def sample_frame(frame: Frame, table: InputTable, settings: SampleSettings, budg
     missing = budget
     for origin in _positions(frame, settings, budget):
         codes = _gather(frame.pixels, origin, settings.size)
-        reason = _judge(frame, codes, origin, table)
+        reason = _judge(frame, codes, origin, table, settings.grid)
         good = np.flatnonzero(reason == 0)[:missing]
         end = len(reason) if len(good) < missing else int(good[-1]) + 1
         for k, name in enumerate(rejected, 1):
@@ -213,7 +224,11 @@ def _gather(
 
 
 def _judge(
-    frame: Frame, codes: NDArray[np.generic], origin: NDArray[np.int32], table: InputTable
+    frame: Frame,
+    codes: NDArray[np.generic],
+    origin: NDArray[np.int32],
+    table: InputTable,
+    grid: tuple[int, int] | None = None,
 ) -> NDArray[np.uint8]:
     """0 for a patch that can serve, else 1 + its place in :data:`REASONS`."""
     low, high = trusted_codes(table)
@@ -222,11 +237,38 @@ def _judge(
     if table.noise_sd is not None:
         sd = table.apply(codes).std(axis=1, dtype=np.float64)
         reason[(reason == 0) & (sd < NOISE_MULTIPLE * table.noise_sd)] = 4
+    if grid is not None:
+        reason[(reason == 0) & (grid_steps(codes, origin, grid) > GRID_MULTIPLE)] = 5
     reason[(darkest < low) | (brightest > high)] = 2
     if frame.invalid is not None:
         size = math.isqrt(codes.shape[1])
         reason[_gather(frame.invalid, origin, size).any(axis=1)] = 1
     return reason
+
+
+def grid_steps(
+    codes: NDArray[np.generic], origin: NDArray[np.int32], grid: tuple[int, int]
+) -> F64:
+    """Mean step across the boundaries of blocks over the mean step inside them, by patch.
+
+    Parameters
+    ----------
+    codes : ndarray (n, size * size)
+    origin : int32 ndarray (n, 2), top-left (row, column) of each patch in its frame
+    grid : row and column where blocks begin
+    """
+    size = math.isqrt(codes.shape[1])
+    planes = codes.reshape(-1, size, size).astype(np.float32)
+    sums, counts = np.zeros((2, len(codes))), np.zeros((2, len(codes)))
+    for axis in (0, 1):
+        steps = np.abs(np.diff(planes, axis=1 + axis)).mean(axis=2 - axis)  # (n, size - 1)
+        first = origin[:, axis, None] + np.arange(1, size)
+        on = (first - grid[axis]) % BLOCK == 0
+        for k, where in enumerate((on, ~on)):
+            sums[k] += (steps * where).sum(axis=1)
+            counts[k] += where.sum(axis=1)
+    means = sums / np.maximum(counts, 1)
+    return np.asarray(means[0] / np.maximum(means[1], 1e-12))
 
 
 def trusted_codes(table: InputTable) -> tuple[float, float]:

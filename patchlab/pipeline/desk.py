@@ -26,7 +26,7 @@ from patchlab.settings import Settings
 from patchlab.workers import usable_cores
 
 ROOMS = ("survey", "patches", "dictionary", "fits", "bank", "report", "assess")
-RECIPE = 2
+RECIPE = 3
 """Raised whenever a stage would give another result for the same settings."""
 
 

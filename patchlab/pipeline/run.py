@@ -146,6 +146,7 @@ def sample(intake: images.Intake, found: Survey, parent: Head, desk: Desk) -> tu
         seed=s.seed,
         flat_fraction=s.flat_fraction,
         normalise=s.normalise,
+        grid=None if s.grid_patches else found.grid,
     )
     taken = images.memory_needed(
         settings, pixels=intake.largest, frames=len(intake.frames), jobs=desk.jobs

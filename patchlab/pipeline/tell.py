@@ -63,6 +63,7 @@ def survey(found: Survey, head: dict[str, Any]) -> dict[str, Any]:
             for m in found.marks
         ],
         "distrusted": [{"path": path, "reason": reason} for path, reason in found.distrusted],
+        "block_grid_begins": None if found.grid is None else list(found.grid),
         "notes": list(found.notes),
     }
 
@@ -226,6 +227,7 @@ def run(
     return {
         "frames": {"used": len(patches.frames), "quarantined": len(intake.quarantined)},
         "frames_left_out": {} if desk.settings.all_frames else left_out(found),
+        "patches_left_out": dict(patches.rejected),
         "marked_components": flagged(written.bank),
         "patches": len(patches),
         "patch_size": patches.size,
