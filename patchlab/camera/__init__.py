@@ -2,7 +2,7 @@
 
 from patchlab.camera.blur import measure_blur
 from patchlab.camera.chart import slanted_edge
-from patchlab.camera.flags import flag_components
+from patchlab.camera.flags import flag_components, looks
 from patchlab.camera.marks import find_marks
 from patchlab.camera.noise import measure_noise
 from patchlab.camera.pixels import MAX_FRAMES
@@ -17,6 +17,7 @@ __all__ = [
     "default_kind",
     "find_marks",
     "flag_components",
+    "looks",
     "make_table",
     "measure_blur",
     "measure_noise",

@@ -126,8 +126,8 @@ def verdict(found: Sharpness | None, *, grid: bool) -> bool | None:
     """True, False, or None where the noise cannot tell.
 
     None: hardly a place with noise above half a code; block compression, which colours noise
-    itself; or a ratio below what plain noise gives, where scene or smoothing may hide the mark. A mask much wider
-    than a pixel lifts fine and middling noise alike and is not seen.
+    itself; or a ratio below what plain noise gives, where scene or smoothing may hide the mark.
+    A mask much wider than a pixel lifts fine and middling noise alike and is not seen.
     """
     if found is None or grid:
         return None

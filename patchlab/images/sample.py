@@ -246,9 +246,7 @@ def _judge(
     return reason
 
 
-def grid_steps(
-    codes: NDArray[np.generic], origin: NDArray[np.int32], grid: tuple[int, int]
-) -> F64:
+def grid_steps(codes: NDArray[np.generic], origin: NDArray[np.int32], grid: tuple[int, int]) -> F64:
     """Mean step across the boundaries of blocks over the mean step inside them, by patch.
 
     Parameters

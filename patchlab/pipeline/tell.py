@@ -76,7 +76,10 @@ def left_out(found: Survey) -> dict[str, int]:
 def flagged(made: Bank) -> list[dict[str, Any]]:
     """Components that describe a mark, numbered from 1 as on the page."""
     known = made.provenance.get("marked_components", ())
-    return [{"component": n, "mark": name, "kept": kept} for n, name, kept in known]
+    return [
+        {"component": n, "mark": name, "kept": kept, "looks": looks[0] if looks else ""}
+        for n, name, kept, *looks in known
+    ]
 
 
 def _noise(found: Survey) -> dict[str, Any]:
