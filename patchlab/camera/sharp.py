@@ -45,10 +45,11 @@ PLAIN = (0.93, 1.02)
 
 @dataclass(frozen=True)
 class Sharpness:
-    """Fine over middling power of so many calm blocks, and its standard error."""
+    """Fine over middling power of so many calm blocks, its standard error, the noise in codes."""
 
     ratio: float
     error: float
+    noise: float
     blocks: int
 
 
@@ -66,31 +67,33 @@ class SharpMeter:
 
     def __init__(self) -> None:
         self._kept: tuple[list[F32], list[F32]] = ([], [])
-        self._looked = 0
+        self._seen = [0, 0]
 
     def add(self, region: Region) -> None:
         """Look at one region: the five mean powers of its calmer blocks."""
         flat = _powers(region)
-        if not len(flat):
-            return
-        self._looked += len(flat)
         held = max(LEAST, int(HELD * len(flat)))
         for half in (0, 1):  # each half keeps its own, or the other's would choose with it
-            order = np.argsort(_score(flat, half), kind="stable")[:held]
-            self._kept[half].append(flat[order])
+            seen = flat[flat[:, 3 + half] > FAINT**2]
+            self._seen[half] += len(seen)
+            order = np.argsort(_score(seen, half), kind="stable")[:held]
+            self._kept[half].append(seen[order])
 
     def result(self) -> Sharpness | None:
         """What the folder says; None where hardly a block is usable."""
-        if self._looked < LEAST:
-            return None
-        fine, middle, errors, count = 0.0, 0.0, 0.0, 0
+        fine, middle, errors, noise = [], [], [], []
         for half in (0, 1):
-            powers = np.concatenate(self._kept[half]).astype(np.float64)
-            h, m = _measured(powers, half, self._looked)
-            fine, middle, count = fine + h.mean(), middle + m.mean(), h.size
+            powers = np.concatenate([*self._kept[half], np.empty((0, 5))]).astype(np.float64)
+            if len(powers) < LEAST:
+                return None
+            h, m, level = _measured(powers, half, self._seen[half])
+            fine.append(h.mean())
+            middle.append(m.mean())
+            noise.append((h * level).mean())
             # half-overlapping blocks: about a quarter of them are independent
-            errors += 4 / h.size * (h.var() / h.mean() ** 2 + m.var() / m.mean() ** 2) / 2
-        return Sharpness(fine / middle, float(np.sqrt(errors / 2)), count)
+            errors.append(4 / h.size * (h.var() / h.mean() ** 2 + m.var() / m.mean() ** 2))
+        ratio, error = sum(fine) / sum(middle), float(np.sqrt(sum(errors))) / 2
+        return Sharpness(float(ratio), error, float(np.sqrt(np.mean(noise))), h.size)
 
 
 def _powers(region: Region) -> F32:
@@ -99,7 +102,6 @@ def _powers(region: Region) -> F32:
     whole = sliding_window_view(region.usable, (SIDE, SIDE))[cut].all(axis=(2, 3))
     blocks = sliding_window_view(region.codes, (SIDE, SIDE))[cut][whole]
     power = dctn(blocks, axes=(1, 2), norm="ortho") ** 2
-    power = power[power[:, _FINE].mean(axis=1) > FAINT**2]
     parts = [_LOW, *(band & side for band in (_MIDDLE, _FINE) for side in (~_ODD, _ODD))]
     return np.stack([power[:, p].mean(axis=1) for p in parts], axis=1).astype(np.float32)
 
@@ -111,15 +113,15 @@ def _score(powers: NDArray[np.floating], half: int) -> F64:
     return np.asarray(coarse / (powers[:, 3 + half] + 1e-3), np.float64)
 
 
-def _measured(powers: F64, half: int, looked: int) -> tuple[F64, F64]:
-    """Fine and middling power of the other half in calm blocks, over the level by this one."""
+def _measured(powers: F64, half: int, seen: int) -> tuple[F64, F64, F64]:
+    """Fine and middling power of the other half in calm blocks, over this one's level; that."""
     score = _score(powers, half)
-    calm = min(int((score < CALM).sum()), int(MOST * looked))
-    count = min(max(LEAST, int(SHARE * looked), calm), len(score))
+    calm = min(int((score < CALM).sum()), int(MOST * seen))
+    count = min(max(LEAST, int(SHARE * seen), calm), len(score))
     chosen = powers[np.argsort(score, kind="stable")[:count]]
     level = (chosen[:, 1 + half] + chosen[:, 3 + half]) / 2 + 1e-3
     other = 1 - half
-    return chosen[:, 3 + other] / level, chosen[:, 1 + other] / level
+    return chosen[:, 3 + other] / level, chosen[:, 1 + other] / level, level
 
 
 def verdict(found: Sharpness | None, *, grid: bool) -> bool | None:
@@ -129,7 +131,7 @@ def verdict(found: Sharpness | None, *, grid: bool) -> bool | None:
     itself; or a ratio below what plain noise gives, where scene or smoothing may hide the mark.
     A mask much wider than a pixel lifts fine and middling noise alike and is not seen.
     """
-    if found is None or grid:
+    if found is None or found.noise < FAINT or grid:
         return None
     if found.ratio > SHARP_THRESHOLD and found.ratio > 1 + SURE * found.error:
         return True

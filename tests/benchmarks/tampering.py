@@ -159,6 +159,8 @@ class Folder:
     codes : on those, before any tone curve
     tones : after the tone curve
     file : on whole codes
+    touched : frames that carry the mark, where it is theirs alone
+    note, spots, grid : which way, how many and where
     """
 
     camera: Camera
@@ -173,6 +175,7 @@ class Folder:
     touched: set[int] = field(default_factory=set)
     note: str = ""
     spots: int = 0
+    grid: tuple[int, int] | None = None
 
     def sensor(self, light: Plane) -> Plane:
         """Codes above black of light at each pixel: photons, read noise."""
@@ -240,13 +243,14 @@ def clean(photos: list[Plane], index: int, side: str) -> Clean:
 
 
 def block_grid(f: Folder) -> None:
+    """JPEG of quality 50 to 90, 8 bits, the grid at any of its 64 places."""
     quality = int(f.draw.integers(50, 91))
     y, x = f.draw.integers(0, 8, 2)
 
     def file(codes: Plane, _: int) -> Plane:
         return jpeg(np.pad(codes, ((y, 0), (x, 0)), mode="reflect"), quality)[y:, x:]
 
-    f.file = file
+    f.file, f.grid = file, (int(-y % 8), int(-x % 8))
 
 
 def jpeg(codes: Plane, quality: int) -> Plane:
@@ -256,6 +260,7 @@ def jpeg(codes: Plane, quality: int) -> Plane:
 
 
 def row_noise(f: Folder, axis: int = 0) -> None:
+    """Offsets of rows, anew in every frame, of 0.3 to 1 of the pixels' noise at mid-grey."""
     sd = f.draw.uniform(0.3, 1.0) * f.camera.sd(0.5)
     shape = (f.camera.shape[0], 1) if axis == 0 else (1, f.camera.shape[1])
     fixed = f.draw.standard_normal(shape)
@@ -268,6 +273,7 @@ def row_noise(f: Folder, axis: int = 0) -> None:
 
 
 def column_noise(f: Folder) -> None:
+    """The same for columns, one set of offsets for all frames."""
     row_noise(f, axis=1)
 
 
@@ -306,12 +312,14 @@ def clipped_levels(f: Folder) -> None:
 
 
 def missing_levels(f: Folder) -> None:
+    """A file's codes stretched by 1.1 to 1.6."""
     stretch = f.draw.uniform(1.1, 1.6)
     low = int(f.draw.integers(0, 12))
     f.file = lambda codes, _: np.round((codes.astype(float) - low) * stretch)
 
 
 def posterised_depth(f: Folder) -> None:
+    """1 to 3 of the bits lost."""
     step = 2 ** int(f.draw.integers(1, 4))
     f.file = lambda codes, _: codes // step * step
 
@@ -347,6 +355,7 @@ def fixed_spots(f: Folder) -> None:
 
 
 def vignetting(f: Folder) -> None:
+    """Corners that lose 40 to 60 % of the light, by the fourth power of the cosine."""
     h, w = f.camera.shape
     lost = f.draw.uniform(0.4, 0.6)
     y, x = np.mgrid[:h, :w]
