@@ -19,9 +19,9 @@ LOCKED = 0.25
 ONE_LINE = 0.7
 STRAIGHT = 0.8
 WHOLLY_STRAIGHT = 0.97
-ROUGH = 0.3
-"""Squared steps of a profile over its power that lines of noise have: 2 where they differ freely,
-next to nothing for the slow shading that every scene has."""
+ROUGH = 1.5
+"""Squared steps of a profile over its power, in those of one wave as long as the patch, that lines
+of noise have at least: the slow shading of a scene has less."""
 LATTICE_LOCKED = 0.05
 ERRORS = 5.0
 LOOKED = 40_000
@@ -75,7 +75,8 @@ def flag_components(
             # sizes, not powers: heavy tails would drown the lattice's small share
             places = ((rows + columns) % 2, rows % 2, columns % 2)
             locked = np.any([locking(size, p, LATTICE_LOCKED) for p in places], axis=0)
-            flags |= dict.fromkeys(np.flatnonzero(locked).tolist(), "interpolation_lattice")
+            # what follows the grid of 8 follows one of 2 as well
+            flags = dict.fromkeys(np.flatnonzero(locked).tolist(), "interpolation_lattice") | flags
     return tuple(sorted(flags.items()))
 
 
@@ -110,9 +111,9 @@ def lone_lines(atoms: F64) -> NDArray[np.bool_]:
     strongest = (profile**2).max(axis=1)
     alone = strongest > ONE_LINE * np.maximum((profile**2).sum(axis=1), 1e-300)
     steps = (np.diff(profile, axis=1) ** 2).sum(axis=1)
-    rough = steps > ROUGH * (profile**2).sum(axis=1)
+    slow = (2 * np.pi / atoms.shape[1]) ** 2 * (profile**2).sum(axis=1)
     needed = np.where(alone, STRAIGHT, WHOLLY_STRAIGHT)
-    return np.asarray((straight > needed * whole) & (alone | rough))
+    return np.asarray((straight > needed * whole) & (alone | (steps > ROUGH * slow)))
 
 
 def looks(atom: F64) -> str:
