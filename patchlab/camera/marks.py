@@ -308,7 +308,8 @@ class MarkMeter:
         verdicts["fixed_spots"] = spotted, spots
         verdicts["vignetting"] = None if few else shaded, shade
         sharp = self._pool.sharp.result()
-        sharpened = sharp_verdict(sharp, grid=self._pool.grid.value > GRID_THRESHOLD)
+        colours = ("block_grid", "missing_levels", "posterised_depth")
+        sharpened = sharp_verdict(sharp, coloured=any(verdicts[c][0] for c in colours))
         verdicts["sharpening"] = None if few else sharpened, sharp.ratio if sharp else 0.0
         told = tuple(_mark(n, *verdicts[n], t) for n, t in _THRESHOLDS.items())
         return Marks(told, odd, self._pool.grid.place if verdicts["block_grid"][0] else None)

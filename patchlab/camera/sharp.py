@@ -124,14 +124,14 @@ def _measured(powers: F64, half: int, seen: int) -> tuple[F64, F64, F64]:
     return chosen[:, 3 + other] / level, chosen[:, 1 + other] / level, level
 
 
-def verdict(found: Sharpness | None, *, grid: bool) -> bool | None:
+def verdict(found: Sharpness | None, *, coloured: bool) -> bool | None:
     """True, False, or None where the noise cannot tell.
 
-    None: hardly a place with noise above half a code; block compression, which colours noise
-    itself; or a ratio below what plain noise gives, where scene or smoothing may hide the mark.
+    None: hardly a place with noise above half a code; noise that is ``coloured`` by block
+    compression or by codes that are missing; or a ratio below what plain noise gives, where scene or smoothing may hide the mark.
     A mask much wider than a pixel lifts fine and middling noise alike and is not seen.
     """
-    if found is None or found.noise < FAINT or grid:
+    if found is None or found.noise < FAINT or coloured:
         return None
     if found.ratio > SHARP_THRESHOLD and found.ratio > 1 + SURE * found.error:
         return True

@@ -34,7 +34,7 @@ def steps():
 def test_white_noise_gives_one_whatever_is_chosen(seed):
     found = measured(seed=seed)
     assert found.ratio == pytest.approx(1, abs=3 * found.error)
-    assert verdict(found, grid=False) is not True
+    assert verdict(found, coloured=False) is not True
 
 
 @pytest.mark.parametrize(("amount", "radius"), [(0.5, 1.0), (1.0, 1.0), (1.0, 0.7)])
@@ -42,8 +42,8 @@ def test_sharpened_noise_lies_above_one_beside_edges_too(amount, radius):
     for scene in (0.0, ndimage.gaussian_filter(steps(), 0.7)):
         found = measured(unsharp(amount, radius), scene)
         assert found.ratio > 1.1
-        assert verdict(found, grid=False) is True
-        assert verdict(found, grid=True) is None  # compression colours noise itself
+        assert verdict(found, coloured=False) is True
+        assert verdict(found, coloured=True) is None  # compression has its own colour
 
 
 def test_more_sharpening_gives_a_higher_ratio():
@@ -54,15 +54,15 @@ def test_more_sharpening_gives_a_higher_ratio():
 
 
 def test_smoothed_or_faint_noise_cannot_tell():
-    assert verdict(measured(lambda x: ndimage.gaussian_filter(x, 0.6)), grid=False) is None
+    assert verdict(measured(lambda x: ndimage.gaussian_filter(x, 0.6)), coloured=False) is None
     for seed in range(4):  # a third of a code: what stands out by chance must not decide
         faint = measured(lambda x: 500 + (x - 500) / 12, seed=seed)
-        assert verdict(faint, grid=False) is None
-    assert verdict(None, grid=False) is None
+        assert verdict(faint, coloured=False) is None
+    assert verdict(None, coloured=False) is None
 
 
 def test_false_is_said_only_of_plain_and_well_measured_noise():
-    assert verdict(Sharpness(1.0, 0.03, 1.0, 500), grid=False) is False
-    assert verdict(Sharpness(1.0, 0.08, 1.0, 60), grid=False) is None
-    assert verdict(Sharpness(PLAIN[0] - 0.01, 0.03, 1.0, 500), grid=False) is None
-    assert verdict(Sharpness(SHARP_THRESHOLD + 0.01, 0.2, 1.0, 60), grid=False) is None
+    assert verdict(Sharpness(1.0, 0.03, 1.0, 500), coloured=False) is False
+    assert verdict(Sharpness(1.0, 0.08, 1.0, 60), coloured=False) is None
+    assert verdict(Sharpness(PLAIN[0] - 0.01, 0.03, 1.0, 500), coloured=False) is None
+    assert verdict(Sharpness(SHARP_THRESHOLD + 0.01, 0.2, 1.0, 60), coloured=False) is None
