@@ -110,6 +110,11 @@ class Settings:
         "patches",
         "Draw from every frame, also from near duplicates, blurred and clipped ones.",
     )
+    grid_patches: bool = _setting(
+        False,
+        "patches",
+        "Draw patches also where the steps of block compression are stronger than the scene.",
+    )
     # learning
     method: str = _setting(
         "ica", "learn", "Learner: independent components or sparse code.", choices=("ica", "sparse")

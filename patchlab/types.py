@@ -269,6 +269,7 @@ class Survey:
     linear light over the frame's mean; ``noise_power`` is the noise's share on that scale
     and ``noise_overtakes_cpp`` the frequency above which it is the larger part, or None.
     ``distrusted`` lists (path, reason) of frames better left out of learning.
+    ``grid`` is the row and column where the blocks of compression begin, where that mark was found.
     ``slanted_edge`` is the chart's transfer when one was given, and then where the blur is from.
     ``notes`` say what static, dark or chart frames changed, or why they could not serve.
     Of colour frames one plane was surveyed (green), and ``sample_noise`` (samples,) holds the
@@ -294,6 +295,7 @@ class Survey:
     slanted_edge: SlantedEdge | None = None
     notes: tuple[str, ...] = ()
     sample_noise: F64 = field(default_factory=lambda: np.empty(0))
+    grid: tuple[int, int] | None = None
 
 
 # ---------------------------------------------------------------- learning

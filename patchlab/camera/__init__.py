@@ -10,7 +10,7 @@ from patchlab.camera.drift import (
     new_marks,
     verdict_of,
 )
-from patchlab.camera.flags import flag_components
+from patchlab.camera.flags import flag_components, looks
 from patchlab.camera.marks import find_marks
 from patchlab.camera.noise import measure_noise
 from patchlab.camera.pixels import MAX_FRAMES
@@ -30,6 +30,7 @@ __all__ = [
     "default_kind",
     "find_marks",
     "flag_components",
+    "looks",
     "make_table",
     "measure_blur",
     "measure_noise",

@@ -53,6 +53,12 @@ class GridMeter:
         return np.roll(mean, (-4, -4), axis=(0, 1))
 
     @property
+    def place(self) -> tuple[int, int]:
+        """Row and column, 0 to 7, where blocks begin."""
+        y, x = np.unravel_index(int(self.phases.argmin()), (8, 8))
+        return int(y), int(x)
+
+    @property
     def value(self) -> float:
         """Median over smallest of the 64 phases; 1 where there is no grid."""
         phases = self.phases

@@ -7,21 +7,23 @@ eight frames every mark's ``found`` is None: cannot tell.
 from __future__ import annotations
 
 from collections.abc import Iterable
-from dataclasses import dataclass, field
+from dataclasses import dataclass, field, replace
 
 import numpy as np
 from numpy.typing import NDArray
 from scipy import ndimage
 
-from patchlab.camera.flat import LAG, Blocks, flat_blocks, flat_law, join
+from patchlab.camera.alike import DUPLICATE_THRESHOLD, likeness, near_duplicates, small_copy
 from patchlab.camera.grid import GRID_THRESHOLD, GridMeter
+from patchlab.camera.law import unit_scale
 from patchlab.camera.pixels import Region, clip_codes, diagonal_band, limited, regions
+from patchlab.camera.sharp import SHARP_THRESHOLD, SharpMeter
+from patchlab.camera.sharp import verdict as sharp_verdict
+from patchlab.camera.spots import SPOT_THRESHOLD, SpotMeter
 from patchlab.camera.table import sd_of
 from patchlab.camera.wide import (
     DEPTH_THRESHOLD,
     SHADE_THRESHOLD,
-    SPOT_THRESHOLD,
-    SpotMeter,
     falloff,
     lost_bits,
     shading,
@@ -31,15 +33,12 @@ from patchlab.types import F64, Frame, InputContract, Mark, NoiseModel
 
 MIN_FRAMES = 8
 SEGMENTS = 8
-THUMB = 24
 
-STRIPE_THRESHOLD = 0.05
-LATTICE_THRESHOLD = 1.05
+STRIPE_THRESHOLD = 0.1
+LATTICE_THRESHOLD = 1.03
 CLIPPED_THRESHOLD = 0.01
 MISSING_THRESHOLD = 0.05
-SHARP_THRESHOLD = -0.03
-DUPLICATE_THRESHOLD = 0.995
-BLURRED_THRESHOLD = 0.62
+BLURRED_THRESHOLD = 0.68
 MOSTLY_CLIPPED = 0.2
 
 
@@ -52,7 +51,8 @@ class _About:
 _ABOUT = {
     "block_grid": _About(
         "filters along the axes with a wavelength of 8 pixels, and noise that was rounded away",
-        "patches start at random offsets, so the grid averages out; save frames uncompressed",
+        "patches start at random offsets, and those in which the grid is stronger than the scene "
+        "are left out; save frames uncompressed",
     ),
     "row_noise": _About(
         "filters of long horizontal lines one pixel high",
@@ -128,15 +128,17 @@ class _FrameFacts:
     clipped: float
     falloff: float
     sharpness: float
-    thumb: F64
+    copy: F64
 
 
 @dataclass(frozen=True)
 class Marks:
-    """The marks, and the frames that the survey distrusts with the reason for each."""
+    """The marks, the frames that the survey distrusts with the reason for each, and where the
+    blocks of compression begin, if they were found."""
 
     marks: tuple[Mark, ...]
     distrusted: tuple[tuple[str, str], ...] = ()
+    grid: tuple[int, int] | None = None
 
 
 # ---------------------------------------------------------------- one frame
@@ -191,15 +193,6 @@ def _sharpness(codes: F64, usable: NDArray[np.bool_], noise: float) -> float:
     return float(np.quantile(ratios, 0.9)) if ratios.size else np.nan
 
 
-def _thumb(codes: F64) -> F64:
-    """A small copy with mean 0 and norm 1."""
-    h, w = (n // THUMB * THUMB for n in codes.shape)
-    small = codes[:h, :w].reshape(THUMB, h // THUMB, THUMB, w // THUMB).mean(axis=(1, 3))
-    small = small - small.mean()
-    norm = float(np.linalg.norm(small))
-    return np.asarray(small / norm if norm > 0 else small).ravel()
-
-
 # ---------------------------------------------------------------- the folder
 
 
@@ -209,8 +202,7 @@ class _Pool:
 
     grid: GridMeter = field(default_factory=GridMeter)
     spots: SpotMeter = field(default_factory=SpotMeter)
-    blocks: list[Blocks] = field(default_factory=list)
-    looked: int = 0
+    sharp: SharpMeter = field(default_factory=SharpMeter)
     parity: F64 = field(default_factory=lambda: np.zeros(2))
     parity_count: F64 = field(default_factory=lambda: np.zeros(2))
     histogram: NDArray[np.int64] | None = None
@@ -231,16 +223,20 @@ class MarkMeter:
         found = list(regions(frame))
         for region in found:
             self._pool.grid.add(region)
-            blocks, looked = flat_blocks(region)
-            self._pool.blocks.append(blocks)
-            self._pool.looked += looked
             self._lattice(region)
         self._count_codes(frame)
-        self._pool.spots.add(frame, found)
-        if found:
-            self._pool.facts.append(self._facts(frame, found[len(found) // 2]))
+        if not found:
+            return
+        contract, black, unit = frame.contract, frame.contract.black, unit_scale(frame.contract)
+        above = [replace(r, codes=(r.codes - black) * np.float32(unit)) for r in found]
+        for region in above:
+            self._pool.sharp.add(region)
+        copy = small_copy(frame)
+        if not any(likeness(copy, f.copy) > DUPLICATE_THRESHOLD for f in self._pool.facts):
+            self._pool.spots.add(above, frame.pixels.shape, (contract.white - black) * unit)
+        self._pool.facts.append(self._facts(frame, found[len(found) // 2], copy))
 
-    def _facts(self, frame: Frame, region: Region) -> _FrameFacts:
+    def _facts(self, frame: Frame, region: Region, copy: F64) -> _FrameFacts:
         codes = region.codes.astype(np.float64)
         low, high = clip_codes(frame.contract)
         pixels = frame.pixels
@@ -259,7 +255,7 @@ class MarkMeter:
             clipped,
             falloff(frame),
             _sharpness(codes, region.usable, variance),
-            _thumb(frame.contract.light(frame.pixels)),
+            copy,
         )
 
     def _lattice(self, region: Region) -> None:
@@ -311,19 +307,23 @@ class MarkMeter:
         spots, spotted = self._pool.spots.result(MIN_FRAMES)
         verdicts["fixed_spots"] = spotted, spots
         verdicts["vignetting"] = None if few else shaded, shade
-        sharpening = self._sharpening(few)
-        verdicts["sharpening"] = sharpening.found, sharpening.value
-        return Marks(tuple(_mark(n, *verdicts[n], t) for n, t in _THRESHOLDS.items()), odd)
+        sharp = self._pool.sharp.result()
+        colours = ("block_grid", "missing_levels", "posterised_depth")
+        sharpened = sharp_verdict(sharp, coloured=any(verdicts[c][0] for c in colours))
+        verdicts["sharpening"] = None if few else sharpened, sharp.ratio if sharp else 0.0
+        told = tuple(_mark(n, *verdicts[n], t) for n, t in _THRESHOLDS.items())
+        return Marks(told, odd, self._pool.grid.place if verdicts["block_grid"][0] else None)
 
     def _odd_frames(self) -> tuple[tuple[tuple[str, str], ...], float, float]:
         """Frames better left out, with the reason, and the shares of copies and soft frames.
 
-        The rules: a small copy that correlates above 0.995 with an earlier frame's; more than a
-        fifth of the pixels clipped, where that is not the rule in the folder; edges less than
-        0.62 as sharp as the folder's median (eight frames and more).
+        The rules: fine light and shade of a small copy that correlate above 0.9 with an earlier
+        frame's, at some small shift; more than a fifth of the pixels clipped, where that is not
+        the rule in the folder; edges less than 0.68 as sharp as the folder's median (eight frames
+        and more).
         """
         facts = self._pool.facts
-        copies = near_duplicates(np.stack([f.thumb for f in facts]))
+        copies = near_duplicates([f.copy for f in facts])
         sharp = np.array([f.sharpness for f in facts])
         usual = float(np.nanmedian(sharp)) if np.isfinite(sharp).any() else 0.0
         soft = sharp < BLURRED_THRESHOLD * usual
@@ -338,24 +338,6 @@ class MarkMeter:
             if any(hit[i] for hit in reasons.values())
         ]
         return tuple(odd), float(copies.mean()), float(soft.mean())
-
-    def _sharpening(self, few: bool) -> Mark:
-        """Negative neighbours in flat blocks: sharpened noise. Scenes push the sign up only."""
-        law = flat_law(join(self._pool.blocks), self._pool.looked, share=0.03)
-        acov = law.autocovariance
-        if acov is None:
-            return _mark("sharpening", None, 0.0, SHARP_THRESHOLD)
-        c = LAG
-        near = (acov[c, c - 1] + acov[c, c + 1] + acov[c - 1, c] + acov[c + 1, c]) / 4
-        value = float(near + acov[c - 1 : c + 2 : 2, c - 1 : c + 2 : 2].mean())
-        lag2 = float((acov[c, c + 2] + acov[c + 2, c]) / 2)
-        faint = float(np.sqrt(np.median(law.variance))) < 0.5
-        jpeg = self._pool.grid.value > GRID_THRESHOLD
-        found: bool | None = value < SHARP_THRESHOLD
-        unclear = jpeg or lag2 > 0.05 or not -0.015 < value < 0.03
-        if few or faint or (not found and unclear):
-            found = None  # scene structure or processing hides the sign
-        return _mark("sharpening", found, value, SHARP_THRESHOLD)
 
 
 def _mark(name: str, found: bool | None, value: float, threshold: float) -> Mark:
@@ -382,17 +364,6 @@ def missing_levels(histogram: NDArray[np.int64] | None) -> float:
         due &= ndimage.maximum_filter1d(counts, 17, origin=side) > 0
     share = float((counts[due] == 0).mean()) if due.sum() > 16 else 0.0
     return max(share, 1 - 1 / step)
-
-
-def near_duplicates(thumbs: F64) -> NDArray[np.bool_]:
-    """True for each frame that nearly repeats an earlier one.
-
-    Parameters
-    ----------
-    thumbs : ndarray (n, m), small copies with mean 0 and norm 1
-    """
-    alike = thumbs @ thumbs.T > DUPLICATE_THRESHOLD
-    return np.asarray(np.tril(alike, -1).any(axis=1))
 
 
 def find_marks(frames: Iterable[Frame], noise: NoiseModel | None) -> tuple[Mark, ...]:

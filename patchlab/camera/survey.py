@@ -89,6 +89,7 @@ def survey(
         marks=marks.marks,
         frames=total,
         distrusted=marks.distrusted,
+        grid=marks.grid,
         edge_widths_px=blur_meter.all_widths,
         slanted_edge=chart,
         notes=(*notes, *_depth_note(contract, largest)),

@@ -13,12 +13,16 @@ The stated rules, in order:
 3. *flat*: all pixels are equal (in every plane by itself, where pixels have colours).
 4. *below the noise*: where the camera's noise is known, a standard deviation under twice the
    noise's: such a patch would teach the learner the noise.
-5. The DC (mean of the working values, float64) is subtracted, of each plane its own. A plane's
+5. *on the block grid*: where the grid of block compression is known, the mean step between
+   pixels on either side of a block's boundary is more than twice the mean step inside blocks:
+   such a patch would teach the learner the grid. (Patches that straddle no boundary hardly
+   exist, and a dictionary of those that do not would be locked to the grid.)
+6. The DC (mean of the working values, float64) is subtracted, of each plane its own. A plane's
    mean follows the light and its colour; without it a filter is blind to a flat field of any
    colour, which is what a promise of false edges on flat fields needs.
-6. *flattest*: of all frames' candidates together, the stated share of lowest standard
+7. *flattest*: of all frames' candidates together, the stated share of lowest standard
    deviation is dropped (ties: by path, then by place in the frame's sequence).
-7. The rest is divided by its contrast, the patch's standard deviation.
+8. The rest is divided by its contrast, the patch's standard deviation.
 """
 
 from __future__ import annotations
@@ -42,7 +46,11 @@ from patchlab.workers import map_ordered
 _BLOCK = 1024  # positions drawn at a time: part of the sequence's definition
 _PATIENCE = 20  # positions drawn at most for each patch asked
 SMALL = "frame smaller than a patch"
-REASONS = ("invalid", "saturated", "flat", "below the noise")
+REASONS = ("invalid", "saturated", "flat", "below the noise", "on the block grid")
+BLOCK = 8
+"""Side of a block of compression, pixels."""
+GRID_MULTIPLE = 2.0
+"""Steps across the boundaries of blocks over steps inside them that a patch may have."""
 NOISE_MULTIPLE = 2.0
 """Contrast that a patch must have, in standard deviations of the camera's noise."""
 
@@ -59,6 +67,8 @@ class SampleSettings:
     seed : of every draw
     flat_fraction : share of the candidates that is dropped for lowest contrast, 0 to 0.9
     normalise : divide each patch by its contrast
+    grid : row and column, 0 to 7, where the blocks of compression begin, to leave out patches
+        that show them; None where there are none, or for all patches
 
     Raises
     ------
@@ -71,6 +81,7 @@ class SampleSettings:
     seed: int = 0
     flat_fraction: float = 0.3
     normalise: bool = True
+    grid: tuple[int, int] | None = None
 
     def __post_init__(self) -> None:
         if not 8 <= self.size <= 32:
@@ -175,7 +186,7 @@ def sample_frame(frame: Frame, table: InputTable, settings: SampleSettings, budg
     missing = budget
     for origin in _positions(frame, settings, budget):
         codes = _gather(samples, origin, settings.size)
-        reason = _judge(frame, codes, origin, table)
+        reason = _judge(frame, codes, origin, table, settings.grid)
         good = np.flatnonzero(reason == 0)[:missing]
         end = len(reason) if len(good) < missing else int(good[-1]) + 1
         for k, name in enumerate(rejected, 1):
@@ -235,7 +246,11 @@ def _by_plane(rows: NDArray[Any], planes: int) -> NDArray[Any]:
 
 
 def _judge(
-    frame: Frame, codes: NDArray[np.generic], origin: NDArray[np.int32], table: InputTable
+    frame: Frame,
+    codes: NDArray[np.generic],
+    origin: NDArray[np.int32],
+    table: InputTable,
+    grid: tuple[int, int] | None = None,
 ) -> NDArray[np.uint8]:
     """0 for a patch that can serve, else 1 + its place in :data:`REASONS`."""
     low, high = trusted_codes(table)
@@ -246,6 +261,9 @@ def _judge(
         sd = _by_plane(table.apply(codes), planes).std(axis=1, dtype=np.float64)
         sd = sd if planes == 1 else np.sqrt((sd**2).mean(axis=1))
         reason[(reason == 0) & (sd < NOISE_MULTIPLE * table.noise_sd)] = 4
+    if grid is not None and frame.contract.format.cell == 1:
+        grey = codes if planes == 1 else _by_plane(codes, planes).mean(axis=2)
+        reason[(reason == 0) & (grid_steps(grey, origin, grid) > GRID_MULTIPLE)] = 5
     reason[(darkest < low) | (brightest > high)] = 2
     if frame.invalid is not None:
         size = math.isqrt(codes.shape[1] // planes)
@@ -258,6 +276,29 @@ def _flat(codes: NDArray[np.generic], planes: int) -> NDArray[np.bool_]:
     own = _by_plane(codes, planes)
     equal = own.min(axis=1) == own.max(axis=1)
     return np.asarray(equal if planes == 1 else equal.all(axis=1))
+
+
+def grid_steps(codes: NDArray[np.generic], origin: NDArray[np.int32], grid: tuple[int, int]) -> F64:
+    """Mean step across the boundaries of blocks over the mean step inside them, by patch.
+
+    Parameters
+    ----------
+    codes : ndarray (n, size * size)
+    origin : int32 ndarray (n, 2), top-left (row, column) of each patch in its frame
+    grid : row and column where blocks begin
+    """
+    size = math.isqrt(codes.shape[1])
+    planes = codes.reshape(-1, size, size).astype(np.float32)
+    sums, counts = np.zeros((2, len(codes))), np.zeros((2, len(codes)))
+    for axis in (0, 1):
+        steps = np.abs(np.diff(planes, axis=1 + axis)).mean(axis=2 - axis)  # (n, size - 1)
+        first = origin[:, axis, None] + np.arange(1, size)
+        on = (first - grid[axis]) % BLOCK == 0
+        for k, where in enumerate((on, ~on)):
+            sums[k] += (steps * where).sum(axis=1)
+            counts[k] += where.sum(axis=1)
+    means = sums / np.maximum(counts, 1)
+    return np.asarray(means[0] / np.maximum(means[1], 1e-12))
 
 
 def trusted_codes(table: InputTable) -> tuple[float, float]:

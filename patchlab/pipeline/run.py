@@ -147,6 +147,7 @@ def sample(intake: images.Intake, found: Survey, parent: Head, desk: Desk) -> tu
         seed=s.seed,
         flat_fraction=s.flat_fraction,
         normalise=s.normalise,
+        grid=None if s.grid_patches else found.grid,
     )
     taken = images.memory_needed(
         settings,
@@ -270,6 +271,7 @@ def choose(
     """Choose the kernels and calibrate their thresholds on noise."""
     s = desk.settings
     flagged = marked(dictionary, found, patches)
+    shapes_of = {i: camera.looks(dictionary.atoms[i]) for i, _ in flagged}
     if flagged and not s.keep_marked:
         dictionary, fits = _unmarked(dictionary, fits, flagged)
         desk.tell(f"  {len(flagged)} components that describe a mark are kept out of the bank")
@@ -310,7 +312,9 @@ def choose(
         )
         bank = replace(bank, warnings=(*bank.warnings, told))
     if flagged:
-        known["marked_components"] = [[i + 1, name, s.keep_marked] for i, name in flagged]
+        known["marked_components"] = [
+            [i + 1, name, s.keep_marked, shapes_of[i]] for i, name in flagged
+        ]
     return calibrated(replace(bank, provenance=known), desk)
 
 

@@ -64,6 +64,7 @@ def survey(found: Survey, head: dict[str, Any]) -> dict[str, Any]:
             for m in found.marks
         ],
         "distrusted": [{"path": path, "reason": reason} for path, reason in found.distrusted],
+        "block_grid_begins": None if found.grid is None else list(found.grid),
         "notes": list(found.notes),
     }
 
@@ -76,7 +77,10 @@ def left_out(found: Survey) -> dict[str, int]:
 def flagged(made: Bank) -> list[dict[str, Any]]:
     """Components that describe a mark, numbered from 1 as on the page."""
     known = made.provenance.get("marked_components", ())
-    return [{"component": n, "mark": name, "kept": kept} for n, name, kept in known]
+    return [
+        {"component": n, "mark": name, "kept": kept, "looks": looks[0] if looks else ""}
+        for n, name, kept, *looks in known
+    ]
 
 
 def _noise(found: Survey) -> dict[str, Any]:
@@ -229,6 +233,7 @@ def run(
     return {
         "frames": {"used": len(patches.frames), "quarantined": len(intake.quarantined)},
         "frames_left_out": {} if desk.settings.all_frames else left_out(found),
+        "patches_left_out": dict(patches.rejected),
         "marked_components": flagged(written.bank),
         "patches": len(patches),
         "patch_size": patches.size,

@@ -187,10 +187,15 @@ class RunContent:
         return dict(sorted(Counter(gone).items()))
 
     @property
+    def flagged(self) -> list[tuple[int, str, bool, str]]:
+        """Components that describe a mark: number from 1, mark, kept or not, looks in words."""
+        known = self.bank.provenance.get("marked_components", ())
+        return [(n, name, kept, looks[0] if looks else "") for n, name, kept, *looks in known]
+
+    @property
     def marked(self) -> str:
         """Components that describe a mark of the camera, in words."""
-        known = self.bank.provenance.get("marked_components", ())
-        names = Counter(name.replace("_", " ") for _, name, _ in known)
+        names = Counter(name.replace("_", " ") for _, name, *_ in self.flagged)
         return ", ".join(f"{count} by the {name}" for name, count in names.most_common())
 
     @property

@@ -210,8 +210,7 @@ def grid_phase(frame: Frame) -> tuple[int, int]:
     meter = GridMeter()
     for region in regions(frame):
         meter.add(region)
-    y, x = np.unravel_index(int(meter.phases.argmin()), (8, 8))
-    return int(y), int(x)
+    return meter.place
 
 
 def _beneath(axes: Any, fine: F64) -> None:

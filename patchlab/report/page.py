@@ -114,6 +114,8 @@ def _pictures(c: use.RunContent) -> Mapping[str, Callable[[], bytes]]:
         makers["colours"] = lambda: colour.directions(c.atom_fits, c.filter_fits)
     if sure.measured(c.dictionary):
         makers["sure"] = lambda: sure.how_sure(c.dictionary)
+    if c.flagged:
+        makers["flagged"] = lambda: _flagged(c)
     choice = c.dictionary.choice
     if choice is not None:
         makers["choice"] = lambda: sure.component_choice(choice)
@@ -150,6 +152,17 @@ def _beside_fits(kernels: Any, fits: Any) -> bytes:
         ],
         verdicts=[f.verdict for f in fits.fits[:SHOWN]],
         zoom=max(1, 48 // fits.size),
+        across=8,
+    )
+
+
+def _flagged(c: use.RunContent) -> bytes:
+    """Atom and filter of each component that describes a mark."""
+    shown = [n - 1 for n, *_ in c.flagged][:SHOWN]
+    return mosaic.mosaic(
+        [c.dictionary.atoms[shown], c.dictionary.filters[shown]],
+        [f"{n}  {name.replace('_', ' ')}"[:17] for n, name, *_ in c.flagged[:SHOWN]],
+        zoom=max(1, 48 // c.dictionary.atoms.shape[1]),
         across=8,
     )
 

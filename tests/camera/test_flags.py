@@ -1,14 +1,17 @@
 """Learned components that describe a mark, and frames left out of learning."""
 
+from dataclasses import replace
+
 import imageio.v3 as iio
 import numpy as np
 import pytest
 from scipy import ndimage
 
 from patchlab import images
-from patchlab.camera import flag_components, survey
+from patchlab.camera import flag_components, looks, survey
 from patchlab.cli import main
 from patchlab.images import SampleSettings, sample_folder
+from patchlab.images.sample import grid_steps
 from patchlab.types import Mark
 
 SIZE = 8
@@ -41,7 +44,8 @@ def planted(seed=0, count=20_000):
     ("name", "flags"),
     [
         ("block_grid", ((1, "block_grid"),)),
-        ("interpolation_lattice", ((2, "interpolation_lattice"),)),
+        # the grid's line is met on even rows only, so it follows the finer lattice as well
+        ("interpolation_lattice", ((1, "interpolation_lattice"), (2, "interpolation_lattice"))),
     ],
 )
 def test_components_locked_to_a_lattice_are_flagged_by_name(name, flags):
@@ -64,6 +68,39 @@ def test_lone_lines_are_the_row_noise_s(turn):
     patches, origin = np.zeros((1, SIZE**2), np.float32), np.zeros((1, 2), np.int32)
     name = "column_noise" if turn else "row_noise"
     assert flag_components(atoms, atoms, patches, origin, [mark(name)]) == ((0, name),)
+
+
+def test_slow_shading_is_no_row_noise():
+    slow = np.outer(CODES, np.ones(SIZE))
+    bowl = np.outer(CODES**2 - (CODES**2).mean(), np.ones(SIZE))
+    lines = np.outer([1, -2, 1, 2, -1, -2, 1, 0], np.ones(SIZE))
+    patches, origin = np.zeros((1, SIZE**2), np.float32), np.zeros((1, 2), np.int32)
+    atoms = np.stack([slow, bowl, lines])
+    assert flag_components(atoms, atoms, patches, origin, [mark("row_noise")]) == (
+        (2, "row_noise"),
+    )
+
+
+def test_a_lattice_of_rows_alone_is_seen():
+    atoms, patches, origin = planted()
+    where = np.where(origin[:, 0] % 2 == 0, 1.1, 0.9)[:, None].astype(np.float32)
+    code = patches @ atoms[0].ravel()
+    mixed = patches + (where - 1) * np.outer(code, atoms[0].ravel()).astype(np.float32)
+    marks = [mark("interpolation_lattice"), mark("block_grid")]
+    before, after = (
+        dict(flag_components(atoms, atoms, p, origin, marks)) for p in (patches, mixed)
+    )
+    lattice = "interpolation_lattice"
+    assert before == {1: "block_grid", 2: lattice}
+    assert after == {0: lattice, 1: "block_grid", 2: lattice}
+
+
+def test_a_flagged_atom_in_words():
+    wave = np.cos(2 * np.pi * np.arange(16) / 8)
+    assert looks(np.outer(np.ones(16), wave)) == "axis-aligned, columns, wavelength 8.0 px"
+    check = (-1.0) ** np.add.outer(np.arange(16), np.arange(16))
+    assert looks(check) == "at 45 degrees, wavelength 1.4 px, near Nyquist"
+    assert looks(np.ones((16, 16))) == "broad"
 
 
 @pytest.fixture(scope="module")
@@ -121,3 +158,21 @@ def test_a_long_folder_is_thinned_evenly(odd_folder):
     assert [r.path for r in intake.thinned(3).frames] == ["00.png", "03.png", "06.png"]
     assert intake.thinned(10) is intake
     assert [f.path for f in images.iterate(intake.thinned(2))] == ["00.png", "05.png"]
+
+
+def test_the_grid_s_patches_are_counted_and_left_out(bench, tmp_path):
+    contract = bench.contract(8, transfer="srgb")
+    for frame in bench.folder(bench.photos(8), contract, 0.1, 1.0, blur=0.7, post=bench.jpeg(20)):
+        iio.imwrite(tmp_path / frame.path, frame.pixels)
+    intake = images.take_in(images.list_photos(tmp_path))
+    found = survey(lambda: images.iterate(intake), intake.contract)
+    assert found.grid == (0, 0)
+    settings = SampleSettings(size=8, patches=1000)
+    whole = sample_folder(intake, found.table, settings)
+    less = sample_folder(intake, found.table, replace(settings, grid=found.grid))
+    assert whole.rejected["on the block grid"] == 0
+    assert less.rejected["on the block grid"] > 200
+    # the rule goes by codes; the table bends them a little
+    shown = [(grid_steps(p.patches, p.origin, found.grid) > 2).mean() for p in (whole, less)]
+    assert shown[0] > 0.1
+    assert shown[1] < shown[0] / 3

@@ -3,8 +3,9 @@ import pytest
 from scipy import ndimage
 
 from patchlab.camera import find_marks, measure_noise
+from patchlab.camera.alike import likeness, near_duplicates, small_copy
 from patchlab.camera.grid import GridMeter
-from patchlab.camera.marks import missing_levels, near_duplicates
+from patchlab.camera.marks import missing_levels
 from patchlab.camera.pixels import regions
 
 CLEAN = {
@@ -122,10 +123,24 @@ def test_copies_and_blurred_frames_are_found(bench):
     assert marks["blurred_frames"].value == pytest.approx(1 / 11)
 
 
-def test_near_duplicates_keep_the_first():
-    rng = np.random.default_rng(0)
-    a, b = (v / np.linalg.norm(v) for v in rng.standard_normal((2, 100)))
-    assert near_duplicates(np.stack([a, b, a, a])).tolist() == [False, False, True, True]
+def test_near_duplicates_keep_the_first(bench):
+    contract = bench.contract(8, black=8)
+    frames = bench.folder(bench.photos(2), contract, 0.2, 1.0, seed=1)
+    again = bench.folder(bench.photos(2), contract, 0.2, 1.0, seed=2)
+    copies = [small_copy(f) for f in (*frames, *again)]
+    assert near_duplicates(copies).tolist() == [False, False, True, True]
+    assert near_duplicates([]).tolist() == []
+
+
+def test_a_copy_is_known_after_a_shift_and_in_another_light(bench):
+    contract = bench.contract(8, black=8)
+    light = bench.light("chelsea.png")
+    frames = bench.folder([light[6:, 5:], 0.6 * light[:-6, :-5]], contract, 0.2, 1.0, blur=0.7)
+    other = bench.folder([bench.light("coins.png")], contract, 0.2, 1.0, blur=0.7)
+    one, two, three = (small_copy(f) for f in (*frames, *other))
+    assert likeness(one, one) == pytest.approx(1)
+    assert likeness(one, two) > 0.9
+    assert likeness(one, three) < 0.5
 
 
 def test_missing_levels_counts_only_what_is_due():

@@ -6,7 +6,7 @@ import pytest
 from patchlab.errors import InputError, UsageError
 from patchlab.images import SampleSettings, list_photos, memory_needed, sample_folder, take_in
 from patchlab.images.formats import png_bytes
-from patchlab.images.sample import quota, sample, sample_frame
+from patchlab.images.sample import grid_steps, quota, sample, sample_frame
 from patchlab.types import Frame, InputContract, InputTable
 
 MONO8 = InputContract("Mono8", 0, 255)
@@ -267,3 +267,27 @@ def test_invalid_pixels_everywhere_are_not_blamed_on_the_exposure():
     with pytest.raises(InputError, match="check the exposure") as caught:
         draw([Frame("a.png", white, MONO8)])
     assert "transparent" not in str(caught.value)
+
+
+def test_steps_on_the_grid_are_told_from_steps_beside_it():
+    rng = np.random.default_rng(0)
+    size, grid = 12, (3, 6)
+    plane = 0.1 * rng.standard_normal((64, 64))
+    blocks = np.kron(rng.standard_normal((9, 9)), np.ones((8, 8)))
+    plane += blocks[8 - grid[0] :, 8 - grid[1] :][:64, :64]
+    origin = rng.integers(0, 64 - size, (200, 2)).astype(np.int32)
+    codes = np.stack([plane[y : y + size, x : x + size].ravel() for y, x in origin])
+    assert np.median(grid_steps(codes, origin, grid)) > 5
+    assert np.median(grid_steps(codes, origin, (7, 2))) < 1
+    # scale and offset change nothing
+    same = grid_steps(3 * codes + 50, origin, grid)
+    assert np.allclose(same, grid_steps(codes, origin, grid), rtol=1e-4)
+
+
+def test_a_single_boundary_is_measured_exactly():
+    codes = np.zeros((1, 64), np.float32)
+    codes[0, 32:] = 8  # a step of 8 between rows 3 and 4; ramps of 1 along the columns
+    codes += np.tile(np.arange(8, dtype=np.float32), 8)
+    # patch at (4, 0): row 4 of it is row 8 of the frame, where a block begins
+    steps = grid_steps(codes, np.array([[4, 0]], np.int32), (0, 0))
+    assert steps[0] == pytest.approx(8 / (7 / 13))  # inside: 7 columns of 1, 6 rows of 0
