@@ -129,8 +129,8 @@ def verdict(found: Sharpness | None, *, coloured: bool) -> bool | None:
 
     None: hardly a place with noise above half a code; noise that is ``coloured`` by block
     compression or by codes that are missing; or a ratio below what plain noise gives, where
-    scene or smoothing may hide the mark.
-    A mask much wider than a pixel lifts fine and middling noise alike and is not seen.
+    scene or smoothing may hide the mark. A mask much wider than a pixel lifts fine and middling
+    noise alike and is not seen.
     """
     if found is None or found.noise < FAINT or coloured:
         return None
