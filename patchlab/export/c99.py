@@ -58,6 +58,8 @@ CODES = (
     ("BAD_ORIENTATION_ROW_BYTES", "orientation_row_bytes is smaller than a row"),
     ("NO_SCRATCH", "scratch is NULL"),
     ("BAD_PIXEL", "a pixel code is beyond the pixel format; the output is not to be used"),
+    ("BAD_STRENGTH_PLANE_BYTES", "strength_plane_bytes: planes overlap, or no multiple of 4"),
+    ("BAD_ORIENTATION_PLANE_BYTES", "orientation_plane_bytes makes the planes overlap"),
 )
 """Names and messages of the return codes, by value."""
 
@@ -112,6 +114,7 @@ def emit(bank: Bank, plan: Plan) -> dict[str, bytes]:
     about = _about(bank, plan) | _sections(bank, plan) | c_fixed.sections(bank, plan, CHUNK)
     about |= c_fft.sections(plan, bank.radius, CHUNK, _line(bank.radius))
     about |= c_flat.sections(bank, plan, CHUNK)
+    about["ALL_CALLS"], about["ALL_HEADER"] = template("all.c.in"), template("all.h.in")
     about |= c_halved.sections(plan, CHUNK, _line(bank.radius))
 
     # texts with tokens of their own are filled before they are put in place
@@ -191,7 +194,9 @@ def _sections(bank: Bank, plan: Plan) -> dict[str, object]:
         ),
         "JOINS": c_code.joins(plan),
         "RESPONSES": c_code.responses(plan),
-        "EDGES": "".join(c_code.edges(bank, plan, s) for s in scales),
+        "EDGES": "".join(c_code.edges(bank, plan, s) for s in scales)
+        + (c_code.every_edge(bank, plan) if scales else ""),
+        **{f"ALL_{isa}": f"@N@_edges_all_{isa}" if scales else "NULL" for isa in ISAS},
         **{f"HALF_{isa}": f"@N@_half_block_{isa}" if half else "NULL" for isa in ISAS},
         **{f"FFT_{isa}": f"@N@_fft_block_{isa}" if fft else "NULL" for isa in ISAS},
         "ROWS_CALL": ROWS_CALL if c_code.by_rows(plan) else "",
