@@ -94,6 +94,10 @@ class NativeBank:
         self._edges = self._call(
             "edges_rows", _INT, *_PICTURE, _INT, _POINTER, _STRIDE, _POINTER, _STRIDE, _POINTER
         )
+        self._edges_all = self._call(
+            "edges_all_rows", _INT, *_PICTURE, _POINTER, _STRIDE, _STRIDE, _POINTER, _STRIDE,
+            _STRIDE, _POINTER,
+        )  # fmt: skip
         self._edges_above = self._call(
             "edges_above_rows", _INT, *_PICTURE, _INT, ctypes.c_float, _POINTER, _STRIDE, _POINTER,
             _STRIDE, _POINTER, _POINTER,
@@ -187,6 +191,42 @@ class NativeBank:
         """
         pixels, (first, count) = self._picture(pixels, rows)
         return self._strongest(self._edges, pixels, first, count, scale, threads)
+
+    def edges_all(
+        self, pixels: NDArray[Any], *, rows: tuple[int, int] | None = None, threads: int = 1
+    ) -> tuple[F32, NDArray[np.uint8]]:
+        """Strengths and winning orientations of all scales in one pass: the bits of :meth:`edges`.
+
+        Parameters
+        ----------
+        pixels, rows, threads : as in :meth:`edges`
+
+        Returns
+        -------
+        float32 ndarray (scales, count, w), uint8 ndarray (scales, count, w)
+
+        Raises
+        ------
+        InputError : the picture does not fit the bank.
+        UsageError : no such band, or a bank without scales.
+        """
+        pixels, (first, count) = self._picture(pixels, rows)
+        strength = np.empty((len(self.bank.scales), count, pixels.shape[1]), dtype=np.float32)
+        turn = np.empty(strength.shape, dtype=np.uint8)
+
+        def band(start: int, height: int) -> int:
+            to, who = strength[:, start - first :], turn[:, start - first :]
+            scratch = self._memory(pixels)
+            return int(
+                self._edges_all(
+                    *_address(pixels), start, height, to.ctypes.data, strength.strides[1],
+                    strength.strides[0], who.ctypes.data, turn.strides[1], turn.strides[0],
+                    scratch.ctypes.data,
+                )
+            )  # fmt: skip
+
+        self._in_bands(band, first, count, threads)
+        return strength, turn
 
     def edges_above(
         self,

@@ -66,6 +66,8 @@ CODES = (
     ("EDGELS_MISALIGNED", "out is not a multiple of 4"),
     ("TOO_MANY", "there are more edgels than capacity; those that had room were written"),
     ("TOO_LARGE", "the picture has too many pixels for the edgels' scratch memory"),
+    ("BAD_STRENGTH_PLANE_BYTES", "strength_plane_bytes: planes overlap, or no multiple of 4"),
+    ("BAD_ORIENTATION_PLANE_BYTES", "orientation_plane_bytes makes the planes overlap"),
 )
 """Names and messages of the return codes, by value."""
 
@@ -125,6 +127,7 @@ def emit(bank: Bank, plan: Plan, edgels: EdgelRules | None = None) -> dict[str, 
         about |= MATHEMATICS
     about |= {k: _told(v, about) for k, v in c_colour.sections(bank).items()}
     about |= c_flat.sections(bank, plan, CHUNK)
+    about["ALL_CALLS"], about["ALL_HEADER"] = template("all.c.in"), template("all.h.in")
     about |= c_halved.sections(plan, CHUNK, _line(bank.radius))
 
     # texts with tokens of their own are filled before they are put in place
@@ -208,7 +211,9 @@ def _sections(bank: Bank, plan: Plan) -> dict[str, object]:
         ),
         "JOINS": c_code.joins(plan),
         "RESPONSES": c_code.responses(plan),
-        "EDGES": "".join(c_code.edges(bank, plan, s) for s in scales),
+        "EDGES": "".join(c_code.edges(bank, plan, s) for s in scales)
+        + (c_code.every_edge(bank, plan) if scales else ""),
+        **{f"ALL_{isa}": f"@N@_edges_all_{isa}" if scales else "NULL" for isa in ISAS},
         **{f"HALF_{isa}": f"@N@_half_block_{isa}" if half else "NULL" for isa in ISAS},
         **{f"FFT_{isa}": f"@N@_fft_block_{isa}" if fft else "NULL" for isa in ISAS},
         "ROWS_CALL": ROWS_CALL if c_code.by_rows(plan) else "",

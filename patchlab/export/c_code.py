@@ -335,20 +335,65 @@ def _magnitude(plan: Plan, member: Any) -> list[str]:
 
 def edges(bank: Bank, plan: Plan, scale: int) -> str:
     """C function for the strength and the winner of one scale on one chunk."""
+    body = [
+        *_edge_work(plan),
+        "int x;",
+        *_calls(plan, _of_scale(plan, scale)),
+        *_winner(bank, plan, scale, "strength", "orientation"),
+    ]
+    if not _of_scale(plan, scale):
+        body += ["(void)rows;", "(void)at;"]
+    return (
+        f"/* Strength and winner of scale {scale}. */\n"
+        f"static @N@_TARGET void @N@_FN(edges{scale})(const float *const *rows, ptrdiff_t at,\n"
+        "    int n, float *work, float *strength, unsigned char *orientation)\n"
+        f"{{\n{lines(body, 4)}\n}}\n\n"
+    )
+
+
+def every_edge(bank: Bank, plan: Plan) -> str:
+    """C function for the strengths and the winners of all scales on one chunk."""
+    scales = range(len(plan.detail["strength"]))
+    wanted = {p for scale in scales for p in _of_scale(plan, scale)}
+    body = [*_edge_work(plan), "int x;", *_calls(plan, wanted)]
+    for scale in scales:
+        strength = f"(float *)(void *)(strength + {scale} * plane)"
+        body += _winner(bank, plan, scale, strength, f"(orientation + {scale} * turns)")
+    if not wanted:
+        body += ["(void)rows;", "(void)at;"]
+    return (
+        "/* Strengths and winners of all scales. */\n"
+        "static @N@_TARGET void @N@_FN(edges_all)(const float *const *rows, ptrdiff_t at, int n,\n"
+        "    float *work, char *strength, ptrdiff_t plane, unsigned char *orientation,\n"
+        f"    ptrdiff_t turns)\n{{\n{lines(body, 4)}\n}}\n\n"
+    )
+
+
+def _of_scale(plan: Plan, scale: int) -> set[int]:
+    """Products that a scale's strength is made of."""
+    pairs = [pair for _, *pair in plan.detail["strength"][scale]]
+    kernels = [k for pair in pairs for k in pair if k is not None]
+    return {p for k in kernels for p, _ in plan.detail["sums"][k]}
+
+
+def _edge_work(plan: Plan) -> list[str]:
+    return [
+        "float *const t = work + @N@_FOLDED; /* products */",
+        f"float *const top = t + {len(plan.detail['bases'])} * @N@_CHUNK;",
+        "float *const winner = top + @N@_CHUNK;",
+    ]
+
+
+def _winner(bank: Bank, plan: Plan, scale: int, strength: str, orientation: str) -> list[str]:
+    """Statements that find the largest response of a scale and send it to the caller."""
     members = plan.detail["strength"][scale]
     kernels = [i for _, even, odd in members for i in (even, odd) if i is not None]
-    wanted = {p for i in kernels for p, _ in plan.detail["sums"][i]}
     energy = bank.strength == "energy"
     loop = [*_magnitude(plan, members[0]), "best = v;"]
     for member in members[1:]:
         loop += [*_magnitude(plan, member), f"@N@_TAKE(v, {member[0]}.0f);"]
     empty = any(not plan.detail["sums"][k] for k in kernels)
-    body = [
-        "float *const t = work + @N@_FOLDED; /* products */",
-        f"float *const top = t + {len(plan.detail['bases'])} * @N@_CHUNK;",
-        "float *const winner = top + @N@_CHUNK;",
-        "int x;",
-        *_calls(plan, wanted),
+    return [
         "for (x = 0; x < @N@_CHUNK; x += @N@_LANES) {",
         f"    @N@_FN(vec) v, best{', e, o' if energy else ''}, who = {{0.0f}};",
         *(["    const @N@_FN(vec) zero = {0.0f};"] if empty else []),
@@ -358,14 +403,6 @@ def edges(bank: Bank, plan: Plan, scale: int) -> str:
         "    @N@_STORE(winner + x, who);",
         "}",
         *(["for (x = 0; x < @N@_CHUNK; ++x) top[x] = sqrtf(top[x]);"] if energy else []),
-        "memcpy(strength, top, (size_t)n * sizeof(float));",
-        "for (x = 0; x < n; ++x) orientation[x] = (unsigned char)winner[x];",
+        f"memcpy({strength}, top, (size_t)n * sizeof(float));",
+        f"for (x = 0; x < n; ++x) {orientation}[x] = (unsigned char)winner[x];",
     ]
-    if not wanted:
-        body += ["(void)rows;", "(void)at;"]
-    return (
-        f"/* Strength and winner of scale {scale}. */\n"
-        f"static @N@_TARGET void @N@_FN(edges{scale})(const float *const *rows, ptrdiff_t at,\n"
-        "    int n, float *work, float *strength, unsigned char *orientation)\n"
-        f"{{\n{lines(body, 4)}\n}}\n\n"
-    )

@@ -184,6 +184,11 @@ def _compiled(native: banks.NativeBank, plan: Plan) -> Iterator[Entrant]:
             "compiled library, edges", "all scales, float32",
             lambda p, n: [native.edges(p, s, threads=n) for s in scales],
         )  # fmt: skip
+    if len(scales) > 1:
+        yield Entrant(
+            "compiled library, edges in one pass", "all scales, float32",
+            lambda p, n: native.edges_all(p, threads=n),
+        )  # fmt: skip
     yield from _above(native)
     if fixed is None:
         return

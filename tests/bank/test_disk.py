@@ -214,6 +214,12 @@ def test_a_changed_manifest_is_found(folder):
         set_to("files", {"/etc/passwd": "0" * 64}),
         set_to("files", {"C:\\x": "0" * 64}),
         set_to("files", []),
+        set_to("plan", "tolerance", -1.0),
+        set_to("plan", "tolerance", "none"),
+        set_to("plan", "prices_ns", None),
+        set_to("plan", "prices_ns", "load", -1.0),
+        set_to("plan", "prices_ns", "load", 1e300),
+        set_to("plan", "prices_ns", "more", 1.0),
     ],
 )
 def test_hostile_manifests_are_refused(folder, change):

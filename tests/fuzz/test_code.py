@@ -8,6 +8,7 @@ from __future__ import annotations
 import os
 import secrets
 import subprocess
+from dataclasses import replace
 from pathlib import Path
 
 import pytest
@@ -16,15 +17,26 @@ from patchlab import export
 from patchlab.bank.plan import make_plan
 from patchlab.export import build
 from patchlab.export.c_text import fill
+from tests.bank.banks import random_bank
+from tests.bank.test_halved import smooth
+from tests.bank.test_separable import round_gabors
 from tests.export.folders import BANKS
 
 DRIVER = Path(__file__).with_name("bank_fuzz.c.in").read_text()
 LONG = os.environ.get("PATCHLAB_FUZZ")
 
 
-@pytest.mark.parametrize("name", BANKS if LONG else ("energy", "line"))
+PLANS = {
+    "halved": (smooth(25, 2.6, 3.0, 1), "halved"),
+    "separable": (replace(round_gabors(9), name="round"), "separable"),
+    "fft": (random_bank(3, 11, border="wrap"), "fft"),
+}
+EVERY = {**{name: (bank, "auto") for name, bank in BANKS.items()}, **PLANS}
+
+
+@pytest.mark.parametrize("name", EVERY if LONG else ("energy", "line", "halved"))
 def test_no_access_goes_astray(name, tmp_path):
-    bank = BANKS[name]
+    bank, kind = EVERY[name]
     form = bank.contract.format
     values = {
         "N": bank.name,
@@ -33,7 +45,7 @@ def test_no_access_goes_astray(name, tmp_path):
         "TOP": form.full_scale if form.integer else 1000,
         "SCALE": "" if form.integer else " / 1000.0f",
     }
-    build._unpack(tmp_path, export.emit(bank, make_plan(bank)))
+    build._unpack(tmp_path, export.emit(bank, make_plan(bank, kind)))
     (tmp_path / "fuzz.c").write_bytes(fill(DRIVER, values))
     compiler = build.find_compiler()
     assert compiler is not None
