@@ -9,7 +9,7 @@ from __future__ import annotations
 
 from collections.abc import Iterator
 from contextlib import contextmanager
-from typing import Any, Literal
+from typing import Any, ClassVar, Literal
 
 import numpy as np
 from numpy.typing import NDArray
@@ -20,7 +20,6 @@ from sklearn.utils.validation import check_is_fitted, validate_data
 
 from patchlab.errors import PatchlabError
 from patchlab.learn import sparse
-from patchlab.learn.coding import lasso
 from patchlab.learn.density import log_density
 from patchlab.learn.ica import components_of, unmix
 from patchlab.learn.likelihood import Rows
@@ -68,7 +67,23 @@ class _Rows(ClassNamePrefixFeaturesOutMixin, TransformerMixin, BaseEstimator):  
         return tags
 
 
-class Whitener(_Rows):
+class _Linear(_Rows):
+    """Rows to coordinates by one matrix, and back by another, whose attribute ``_back`` names."""
+
+    _back: ClassVar[str]
+
+    def transform(self, X: Any) -> Array:
+        """Coordinates (n, k) of rows X (n, d): ``(X - mean_) @ components_.T``."""
+        X = self._checked(X, reset=False)
+        return np.asarray((X - self.mean_) @ self.components_.T)
+
+    def inverse_transform(self, X: Any) -> Array:
+        """Rows (n, d) of coordinates, without what the whitening cut."""
+        check_is_fitted(self)
+        return np.asarray(np.asarray(X) @ getattr(self, self._back).T + self.mean_)
+
+
+class Whitener(_Linear):
     """Decorrelate rows: ``transform`` gives unit covariance, ``inverse_transform`` goes back.
 
     Parameters
@@ -95,6 +110,8 @@ class Whitener(_Rows):
     >>> bool(np.allclose(z.T @ z / 500, np.eye(4)))
     True
     """
+
+    _back = "dewhitening_"
 
     def __init__(
         self,
@@ -126,18 +143,8 @@ class Whitener(_Rows):
         self.rank_, self.removed_ = found.rank, found.removed
         return self
 
-    def transform(self, X: Any) -> Array:
-        """White coordinates (n, rank) of rows X (n, d)."""
-        X = self._checked(X, reset=False)
-        return np.asarray((X - self.mean_) @ self.components_.T)
 
-    def inverse_transform(self, X: Any) -> Array:
-        """Rows (n, d) of white coordinates, without what was cut."""
-        check_is_fitted(self)
-        return np.asarray(np.asarray(X) @ self.dewhitening_.T + self.mean_)
-
-
-class ICA(_Rows):
+class ICA(_Linear):
     """Independent components by maximum likelihood: :func:`patchlab.learn.learn_ica` on rows.
 
     Parameters
@@ -171,6 +178,8 @@ class ICA(_Rows):
     >>> ica.converged_, ica.components_.shape
     (True, (2, 2))
     """
+
+    _back = "mixing_"
 
     def __init__(
         self,
@@ -229,16 +238,6 @@ class ICA(_Rows):
         self._unmixing, self._signs = run.W[order], run.signs[order]
         _warn_unless(self.converged_, self.n_iter_)
         return self
-
-    def transform(self, X: Any) -> Array:
-        """Coefficients (n, k) of rows X (n, d)."""
-        X = self._checked(X, reset=False)
-        return np.asarray((X - self.mean_) @ self.components_.T)
-
-    def inverse_transform(self, X: Any) -> Array:
-        """Rows (n, d) of coefficients, without what the whitening cut."""
-        check_is_fitted(self)
-        return np.asarray(np.asarray(X) @ self.mixing_.T + self.mean_)
 
     def score_samples(self, X: Any) -> F64:
         """Log density of rows X (n, d) in nats: :func:`patchlab.learn.density.log_density`."""
@@ -330,9 +329,7 @@ class SparseCoder(_Rows):
             learner = sparse.Learner(
                 rows, through, count, self.penalty, _seed(self.random_state), self.tol, mapper
             )
-            state = learner.start()
-            while not state.outcome:
-                state = learner.follow(state, learner.turn(state), self.max_iter)
+            state = learner.run(learner.start(), self.max_iter)
             second, _, _ = learner.statistics(state.B)
         atoms = (through.D @ state.B).T
         _, self.components_, _ = canonical(atoms, atoms, second / learner.train.size)
@@ -342,12 +339,10 @@ class SparseCoder(_Rows):
     def transform(self, X: Any) -> Array:
         """Sparse codes (n, k) of rows X (n, d); ``codes @ components_ + mean_`` rebuilds them."""
         X = self._checked(X, reset=False)
-        K = self.whitening_.K
-        with _as_value_error(), one_thread():
-            B = K @ self.components_.T.astype(np.float64)
-            norm = np.maximum(np.linalg.norm(B, axis=0), 1e-300)
-            z = (X.astype(np.float64) - self.whitening_.mean) @ K.T
-            codes = lasso(z, B / norm, self.penalty, tolerance=self.transform_tol) / norm
+        with _as_value_error():
+            codes = sparse.codes_of(
+                X, self.whitening_, self.components_, self.penalty, self.transform_tol
+            )
         return np.asarray(codes.astype(X.dtype))
 
     def inverse_transform(self, X: Any) -> Array:

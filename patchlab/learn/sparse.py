@@ -94,12 +94,13 @@ def learn_sparse(
     check_options(used, atoms, penalty, tolerance, max_iterations, jobs)
     with one_thread(), threads(jobs) as mapper:
         learner = Learner(patch_set.patches, used, atoms, penalty, seed, tolerance, mapper)
-        state = resume or learner.start()
-        while not state.outcome:
-            state = learner.follow(state, learner.turn(state), max_iterations)
+
+        def after(state: SparseState) -> None:
             progress("learn", state.passes, max_iterations, f"objective {state.curve[-1]:.4f}")
             if checkpoint is not None:
                 checkpoint(state)
+
+        state = learner.run(resume or learner.start(), max_iterations, after)
         return learner.result(state, tolerance)
 
 
@@ -151,13 +152,21 @@ def encode(
     ------
     UsageError : patches of another size, or a penalty that is not positive.
     """
-    K, mean = known.whitening.K, known.whitening.mean
+    mean = known.whitening.mean
     if patches.ndim != 2 or patches.shape[1] != mean.size:
         raise UsageError(f"patches of this dictionary have {mean.size} pixels", where="patches")
+    atoms = known.atoms.reshape(len(known), -1)
+    return codes_of(patches, known.whitening, atoms, penalty, tolerance)
+
+
+def codes_of(
+    rows: NDArray[Any], through: Whitening, atoms: NDArray[Any], penalty: float, tolerance: float
+) -> F64:
+    """Sparse codes (n, k) of rows (n, d) over atoms (k, d): what :func:`encode` gives."""
     with one_thread():
-        B = K @ known.atoms.reshape(len(known), -1).T
+        B = through.K @ atoms.T.astype(np.float64)
         norm = np.maximum(np.linalg.norm(B, axis=0), 1e-300)
-        z = (patches.astype(np.float64) - mean) @ K.T
+        z = (rows.astype(np.float64) - through.mean) @ through.K.T
         return np.asarray(lasso(z, B / norm, penalty, tolerance=tolerance) / norm)
 
 
@@ -267,6 +276,18 @@ class Learner:
             noise = rng(self.seed, "sparse").standard_normal((count - drawn.size, d))
             B[:, drawn.size :] = self.whitening.K @ noise.T
         return SparseState(_unit(B), np.zeros((count, count)), np.zeros((m, count)))
+
+    def run(
+        self,
+        state: SparseState,
+        limit: int,
+        after: Callable[[SparseState], None] = lambda state: None,
+    ) -> SparseState:
+        """Pass after pass, until learning ends; ``after`` is told each state."""
+        while not state.outcome:
+            state = self.follow(state, self.turn(state), limit)
+            after(state)
+        return state
 
     def turn(self, state: SparseState) -> SparseState:
         """One pass over the patches of a stage."""

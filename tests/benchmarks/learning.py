@@ -2,6 +2,8 @@
 
     python tests/benchmarks/learning.py [--photos FOLDER] [-o OUT] [--case 12,100,100000 ...]
 
+`pip install python-picard` adds that library; `--threads 2` times ours on two threads as well.
+
 One run, peers and ours in turn, on the same whitened patches, BLAS on one thread. The
 objective is the mean negative log-likelihood of the learning patches (logistic-like
 density 1 / (pi cosh y), free scales, log|det W| included), in float64; the held-out value
@@ -27,6 +29,7 @@ from patchlab.learn.solver import Orthogonal, Solver, State
 from patchlab.learn.trust import split
 from patchlab.learn.whiten import threads
 
+MARKERS = {"FastICA float32": "o", "FastICA float64": "s", "picard float64": "^"}
 CASES = ((12, 100, 100_000), (16, 160, 100_000))
 
 
@@ -159,9 +162,14 @@ def plot(path: Path, everything: dict[str, dict[str, list[Any]]]) -> None:
         for r in found["ours"]:
             best = min(v for _, v in r["curve"])
             axes.loglog(*zip(*[(t, v - best + 1e-4) for t, v in r["curve"]], strict=True), "C2")
-            for name, marker in (("FastICA float32", "o"), ("FastICA float64", "s")):
-                for p in found.get(name, []):
-                    axes.plot(p["seconds"], p["value"] - best + 1e-4, marker, color="C1")
+            for name, marker in MARKERS.items():
+                for i, p in enumerate(found.get(name, [])):
+                    label = "" if i else name
+                    axes.plot(
+                        p["seconds"], p["value"] - best + 1e-4, marker, color="C1", label=label
+                    )
+        axes.plot([], [], "C2", label="ours")
+        axes.legend(fontsize=7)
         axes.set(xlabel="seconds", ylabel="objective above our end, nats", title=title)
     figure.savefig(path)
 

@@ -61,6 +61,8 @@ VARIANTS: dict[str, dict[str, Any]] = {
 AGAINST_NOISE: dict[str, dict[str, Any]] = {
     "contrast 2 sd, share 0.5": {},
     "contrast 1.25 sd, share 0.5": {"multiple": 1.25},
+    "contrast 1.25 sd, share 0.5, flattest 15 % dropped": {"multiple": 1.25, "flat": 0.15},
+    "contrast 2 sd, share 0.5, flattest 15 % dropped": {"flat": 0.15},
     "contrast 1.25 sd, share 0.5, no flattest dropped": {"multiple": 1.25, "flat": 0.0},
     "share 0.5 only": {"multiple": 0.0},
     "share 0.5 only, no flattest dropped": {"multiple": 0.0, "flat": 0.0},
