@@ -7,6 +7,7 @@ bits on every machine, whatever the number of threads or the size of the bands.
 
 from __future__ import annotations
 
+import functools
 from collections.abc import Callable, Iterator
 from functools import partial
 from typing import Any
@@ -16,6 +17,7 @@ from numpy.typing import NDArray
 
 from patchlab.bank.plan import make_plan
 from patchlab.bank.planes import mixed
+from patchlab.bank.products import EVERY
 from patchlab.bank.reference import check_picture
 from patchlab.conventions import border_index
 from patchlab.errors import UsageError
@@ -122,7 +124,12 @@ def _bands(
         for group in groups:
             basis, plane = plan.detail["bases"][group[0]], plan.detail["planes"][group[0]]
             taps = np.stack([plan.detail["coefficients"][p] for p in group])
-            sums = _products(padded[plane], basis, taps, bank.radius, folds[plane])
+            if plane == EVERY:
+                parts = (_products(p, basis, np.ascontiguousarray(taps[:, m]), bank.radius, {})
+                         for m, p in enumerate(padded))  # fmt: skip
+                sums = functools.reduce(np.add, parts)
+            else:
+                sums = _products(padded[plane], basis, taps, bank.radius, folds[plane])
             products.update(zip(group, sums, strict=True))
         joined = partial(_joined, plan, products, (count, w))
         yield slice(top, top + count), joined

@@ -30,6 +30,7 @@ import numpy as np
 
 from patchlab.bank.fixed import fixed_point
 from patchlab.bank.products import (
+    EVERY,
     Part,
     Product,
     Sum,
@@ -45,7 +46,7 @@ from patchlab.bank.tile_fft import cost as tile_cost
 from patchlab.bank.tile_fft import work as tile_work
 from patchlab.conventions import gamma
 from patchlab.errors import UsageError
-from patchlab.types import F64, Bank, Plan
+from patchlab.types import F32, F64, Bank, Plan
 
 KINDS = ("auto", "direct", "parity", "fft")
 CLEARLY = 1.5
@@ -115,7 +116,11 @@ def _split(exact: F64) -> tuple[dict[int, dict[Part, F64]], dict[int, dict[Part,
         planes = [kernel] if kernel.ndim == 2 else list(np.moveaxis(kernel, -1, 0))
         own = [(m, part) for m, taps in enumerate(planes) for part in parity_parts(taps).items()]
         parity[index] = {(m, basis): part for m, (basis, part) in own}
-        direct[index] = {(m, "all"): taps for m, taps in enumerate(planes)}
+        read = [m for m, taps in enumerate(planes) if taps.any()]
+        if len(read) > 1:
+            direct[index] = {(EVERY, "all"): np.stack(planes)}
+        else:
+            direct[index] = {(m, "all"): planes[m] for m in read or [0]}
     return parity, direct
 
 
@@ -153,6 +158,13 @@ def _group(products: list[Product], sums: Mapping[int, Sum], bank: Bank) -> list
     return groups
 
 
+def _by_plane(p: Product) -> list[tuple[int, F32, F64]]:
+    """The working planes that a product reads, with its coefficients there."""
+    if p.plane != EVERY:
+        return [(p.plane, p.rounded, p.exact)]
+    return [(m, p.rounded[m], p.exact[m]) for m in range(len(p.exact))]
+
+
 def _bounds(
     products: list[Product], sums: Mapping[int, Sum], spans: tuple[float, ...], mixing: int
 ) -> tuple[float, ...]:
@@ -162,12 +174,13 @@ def _bounds(
         totals = [0.0] * len(spans)
         for number, _ in sums[index]:
             p = products[number]
-            uses = uses_of(p.basis, (p.exact.shape[0], p.exact.shape[1]))
+            uses = uses_of(p.basis, (p.exact.shape[-2], p.exact.shape[-1]))
             folds = 0 if p.basis == "all" else 2
             roundings = p.exact.size + folds + len(sums[index]) - 1 + mixing
-            size = float((np.abs(p.rounded).astype(np.float64) * uses).sum())
-            totals[p.plane] += gamma(roundings) * size
-            totals[p.plane] += float((np.abs(p.rounded - p.exact) * uses).sum())
+            for plane, rounded, exact in _by_plane(p):
+                size = float((np.abs(rounded).astype(np.float64) * uses).sum())
+                totals[plane] += gamma(roundings) * size
+                totals[plane] += float((np.abs(rounded - exact) * uses).sum())
         bounds.append(sum(total * span for total, span in zip(totals, spans, strict=True)))
     return tuple(bounds)
 
@@ -179,7 +192,7 @@ def _additions(products: list[Product], groups: list[list[int]], sums: Mapping[i
     total = sum(count for _, kind, count in fold_rows if kind != "a")
     for group in groups:
         first = products[group[0]]
-        rows, cols = first.exact.shape
+        rows, cols = first.exact.shape[-2:]
         if first.basis != "all":
             total += rows * (cols - (first.basis[1] == "e"))
         total += len(group) * (first.exact.size - 1)
@@ -202,6 +215,10 @@ def _interface_number(bank: Bank) -> int:
     return int(h.hexdigest()[:7], 16)
 
 
+def _which(plane: int) -> str:
+    return ", in every working plane" if plane == EVERY else f", working plane {plane + 1}"
+
+
 def _lines(
     products: list[Product], groups: list[list[int]], coloured: bool = False
 ) -> tuple[str, ...]:
@@ -213,9 +230,9 @@ def _lines(
         "oo": "odd in y, odd in x",
     }
     return tuple(
-        f"{len(group)} x {products[group[0]].exact.shape[0]} x "
-        f"{products[group[0]].exact.shape[1]} coefficients, {words[products[group[0]].basis]}"
-        + f", working plane {products[group[0]].plane + 1}"
+        f"{len(group)} x {products[group[0]].exact.shape[-2]} x "
+        f"{products[group[0]].exact.shape[-1]} coefficients, {words[products[group[0]].basis]}"
+        + _which(products[group[0]].plane)
         * coloured
         for group in groups
     )

@@ -19,7 +19,8 @@ Sum = tuple[tuple[int, int], ...]
 class Product:
     """Coefficients and the basis they are dotted with, exact and as float32.
 
-    ``plane`` is the working plane that the basis is of.
+    ``plane`` is the working plane that the basis is of, or :data:`EVERY` for coefficients
+    (planes, h, w) of the basis "all" in every plane.
     """
 
     basis: str
@@ -30,6 +31,9 @@ class Product:
 
 Part = tuple[int, str]
 """A working plane and a basis of it."""
+
+EVERY = -1
+"""In the place of a working plane: all of them."""
 
 
 # ---------------------------------------------------------------- parity parts
@@ -73,11 +77,11 @@ def basis_size(basis: str, radius: int) -> tuple[int, int]:
 
 def trimmed(basis: str, part: F64) -> F64:
     """A product's coefficients without the zeros beyond its own support."""
-    rows, cols = np.nonzero(part)
+    rows, cols = np.nonzero(part)[-2:]
     if basis == "all":  # stays centred
-        c = part.shape[0] // 2
+        c = part.shape[-1] // 2
         a, b = (int(np.abs(at - c).max(initial=0)) for at in (rows, cols))
-        return part[c - a : c + a + 1, c - b : c + b + 1]
+        return part[..., c - a : c + a + 1, c - b : c + b + 1]
     return part[: rows.max(initial=0) + 1, : cols.max(initial=0) + 1]
 
 
