@@ -7,6 +7,7 @@ bits on every machine, whatever the number of threads or the size of the bands.
 
 from __future__ import annotations
 
+import functools
 from collections.abc import Callable, Iterator
 from functools import partial
 from typing import Any
@@ -16,6 +17,7 @@ from numpy.typing import NDArray
 
 from patchlab.bank.plan import make_plan
 from patchlab.bank.planes import mixed
+from patchlab.bank.products import EVERY
 from patchlab.bank.reference import check_picture
 from patchlab.conventions import border_index
 from patchlab.errors import UsageError
@@ -124,12 +126,30 @@ def _bands(
             factors = [plan.detail["factors"][p] for p in group]
             if factors[0] is None:
                 taps = np.stack([plan.detail["coefficients"][p] for p in group])
-                sums = _products(padded[plane], basis, taps, bank.radius, folds[plane])
+                sums = _whole(padded, plane, basis, taps, bank.radius, folds)
             else:
                 sums = _separable(padded[plane], basis, factors, bank.radius, folds[plane])
             products.update(zip(group, sums, strict=True))
         joined = partial(_joined, plan, products, (count, w))
         yield slice(top, top + count), joined
+
+
+def _whole(
+    padded: list[F32],
+    plane: int,
+    basis: str,
+    taps: F32,
+    radius: int,
+    folds: list[dict[tuple[str, int], F32]],
+) -> Any:
+    """Products of one working plane, or of every plane, added in the planes' order."""
+    if plane != EVERY:
+        return _products(padded[plane], basis, taps, radius, folds[plane])
+    parts = (
+        _products(p, basis, np.ascontiguousarray(taps[:, m]), radius, {})
+        for m, p in enumerate(padded)
+    )
+    return functools.reduce(np.add, parts)
 
 
 def _joined(plan: Plan, products: dict[int, F32], shape: tuple[int, int], kernel: int) -> F32:

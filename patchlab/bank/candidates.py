@@ -26,9 +26,11 @@ from patchlab.bank.costs import (
 )
 from patchlab.bank.halved import Halved
 from patchlab.bank.products import (
+    EVERY,
     Part,
     Product,
     Sum,
+    by_plane,
     clusters,
     in_groups,
     in_plane,
@@ -165,14 +167,15 @@ class Planner:
         """Shapes with which products go together best: zeros at the rim may fill up a group."""
         classes: list[tuple[tuple[int, int], list[int]]] = []
         for p, number in zip(products, numbers, strict=True):
-            shape = (p.exact.shape[0], p.exact.shape[1])
+            shape = (p.exact.shape[-2], p.exact.shape[-1])
             same = next((c for c in classes if c[0] == shape), None)
             if same is None:
                 classes.append((shape, [number]))
             else:
                 same[1].append(number)
         first = products[0]
-        while 1 < len(classes) <= CLASSES and first.factors is None:
+        plain = first.factors is None and first.plane != EVERY
+        while plain and 1 < len(classes) <= CLASSES:
             pairs = [(self._saved(first.basis, a, b), a, b) for a, b in combinations(classes, 2)]
             saved, a, b = max(pairs, key=lambda pair: pair[0])
             if saved <= 0:
@@ -353,7 +356,11 @@ def _split(exact: F64) -> tuple[dict[int, dict[Part, F64]], dict[int, dict[Part,
     parity: dict[int, dict[Part, F64]] = {}
     for index, kernel in enumerate(exact):
         planes = [kernel] if kernel.ndim == 2 else list(np.moveaxis(kernel, -1, 0))
-        whole[index] = {(m, "all"): taps for m, taps in enumerate(planes)}
+        read = [m for m, taps in enumerate(planes) if taps.any()]
+        if len(read) > 1:
+            whole[index] = {(EVERY, "all"): np.stack(planes)}
+        else:
+            whole[index] = {(m, "all"): planes[m] for m in read or [0]}
         parity[index] = {}
         for m, taps in enumerate(planes):
             parity[index] |= in_plane(parity_parts(taps), m)
@@ -365,11 +372,12 @@ def _bound(products: tuple[Product, ...], terms: Sum, spans: Sequence[float], mi
     total = 0.0
     for number, _ in terms:
         p = products[number]
-        uses = uses_of(p.basis, (p.exact.shape[0], p.exact.shape[1]))
+        uses = uses_of(p.basis, (p.exact.shape[-2], p.exact.shape[-1]))
         length = p.exact.size if p.factors is None else sum(p.exact.shape)
         folds = 0 if p.basis == "all" else 2
         roundings = length + folds + len(terms) - 1 + mixing
-        share = gamma(roundings) * float((np.abs(p.rounded).astype(np.float64) * uses).sum())
-        share += float((np.abs(p.rounded - p.exact) * uses).sum())
-        total += share * spans[p.plane]
+        for plane, rounded, exact in by_plane(p):
+            share = gamma(roundings) * float((np.abs(rounded).astype(np.float64) * uses).sum())
+            share += float((np.abs(rounded - exact) * uses).sum())
+            total += share * spans[plane]
     return total

@@ -153,7 +153,7 @@ def of_products(
     rows_read = set()
     for group in groups:
         first = products[group[0]]
-        rows = first.exact.shape[0]
+        rows = first.exact.shape[-2]
         if first.basis != "all":
             rows_read.add((first.plane, first.basis[0], rows - (first.basis[0] == "e")))
         shared = len(group) / GROUP if among else 1.0
@@ -168,9 +168,9 @@ def of_products(
 
 
 def _dense(n: int, first: Product, wide: float, shared: float) -> Work:
-    rows, cols = first.exact.shape
+    rows, cols = first.exact.shape[-2:]
     lone = 0 if first.basis == "all" else rows * (cols - (first.basis[1] == "e"))
-    size = rows * cols
+    size = first.exact.size
     return Work(n * size, n * (size - 1) + shared * lone, shared * (size + lone), n)
 
 

@@ -211,7 +211,8 @@ class NativeBank:
         UsageError : no such band, or a bank without scales.
         """
         pixels, (first, count) = self._picture(pixels, rows)
-        strength = np.empty((len(self.bank.scales), count, pixels.shape[1]), dtype=np.float32)
+        width = self.bank.contract.format.size_of(pixels)[1]
+        strength = np.empty((len(self.bank.scales), count, width), dtype=np.float32)
         turn = np.empty(strength.shape, dtype=np.uint8)
 
         def band(start: int, height: int) -> int:
@@ -219,7 +220,7 @@ class NativeBank:
             scratch = self._memory(pixels)
             return int(
                 self._edges_all(
-                    *_address(pixels), start, height, to.ctypes.data, strength.strides[1],
+                    *self._address(pixels), start, height, to.ctypes.data, strength.strides[1],
                     strength.strides[0], who.ctypes.data, turn.strides[1], turn.strides[0],
                     scratch.ctypes.data,
                 )

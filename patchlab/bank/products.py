@@ -28,7 +28,8 @@ class Product:
     exact : what the product stands for
     rounded : what is computed: float32 coefficients, or the float64 product of the factors
     factors : float32 column and row, where the product is separable
-    plane : the working plane that the basis is of
+    plane : the working plane that the basis is of, or :data:`EVERY` for coefficients
+        (planes, h, w) of the basis "all" in every plane
     """
 
     basis: str
@@ -45,6 +46,9 @@ class Product:
 
 Part = tuple[int, str]
 """A working plane and a basis of it."""
+
+EVERY = -1
+"""In the place of a working plane: all of them."""
 
 
 # ---------------------------------------------------------------- parity parts
@@ -88,17 +92,17 @@ def basis_size(basis: str, radius: int) -> tuple[int, int]:
 
 def trimmed(basis: str, part: F64) -> F64:
     """A product's coefficients without the zeros beyond its own support."""
-    rows, cols = np.nonzero(part)
+    rows, cols = np.nonzero(part)[-2:]
     if basis == "all":  # stays centred
-        c = part.shape[0] // 2
+        c = part.shape[-1] // 2
         a, b = (int(np.abs(at - c).max(initial=0)) for at in (rows, cols))
-        return part[c - a : c + a + 1, c - b : c + b + 1]
+        return part[..., c - a : c + a + 1, c - b : c + b + 1]
     return part[: rows.max(initial=0) + 1, : cols.max(initial=0) + 1]
 
 
 def padded(product: Product, shape: tuple[int, int]) -> Product:
     """A product with zeros at its rim; taps stay centred."""
-    down, right = (n - m for n, m in zip(shape, product.exact.shape, strict=True))
+    down, right = (n - m for n, m in zip(shape, product.exact.shape[-2:], strict=True))
     if not (down or right):
         return product
     room = ((0, down), (0, right))
@@ -120,6 +124,13 @@ def uses_of(basis: str, shape: tuple[int, int]) -> F64:
 
 
 # ---------------------------------------------------------------- sharing
+
+
+def by_plane(p: Product) -> list[tuple[int, F32 | F64, F64]]:
+    """The working planes that a product reads, with its coefficients there."""
+    if p.plane != EVERY:
+        return [(p.plane, p.rounded, p.exact)]
+    return [(m, p.rounded[m], p.exact[m]) for m in range(len(p.exact))]
 
 
 def in_plane(parts: Mapping[str, F64], plane: int = 0) -> dict[Part, F64]:
@@ -208,8 +219,9 @@ def described(
     said = []
     for group in groups:
         first = products[group[0]]
-        rows, cols = first.exact.shape
+        rows, cols = first.exact.shape[-2:]
         how = "coefficients" if first.factors is None else "coefficients as column times row"
-        plane = f", working plane {first.plane + 1}" if coloured else ""
+        which = "every working plane" if first.plane == EVERY else f"plane {first.plane + 1}"
+        plane = f", {which}" if coloured else ""
         said.append(f"{len(group)} x {rows} x {cols} {how}, {words[first.basis]}{plane}")
     return tuple(said)

@@ -3,7 +3,7 @@
 from __future__ import annotations
 
 import math
-from collections.abc import Callable, Iterator, Sequence
+from collections.abc import Callable, Iterator
 
 import numpy as np
 from numpy.typing import NDArray
@@ -75,7 +75,7 @@ class Torus:
         plane[: taps.shape[0], : taps.shape[0]] = taps
         return np.asarray(fft.rfft2(np.roll(plane, (-(taps.shape[0] // 2),) * 2, (0, 1))).conj())
 
-    def responses(self, tiles: Sequence[F32]) -> Callable[[int], F32]:
+    def responses(self, *tiles: F32) -> Callable[[int], F32]:
         """Kernel index to its response plane, from a tile of each working plane."""
         spectra = [fft.rfft2(tile) for tile in tiles]
 

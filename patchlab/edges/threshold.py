@@ -125,7 +125,7 @@ def count_on_noise(
         own = [sd * unit for unit in units]
         plane: Any
         if torus is not None:
-            plane = torus.responses(own)
+            plane = torus.responses(*own)
         else:
             assert correlate is not None
             plane = correlate(own[0])[:, cut : TILE - cut, cut : TILE - cut].__getitem__

@@ -103,11 +103,12 @@ def group_code(number: int, plan: Plan, radius: int) -> str:
     if plan.detail["factors"][group[0]] is not None:
         return c_separable.group_code(number, plan, radius)
     basis = plan.detail["bases"][group[0]]
-    height, width = plan.detail["coefficients"][group[0]].shape
+    height, width = plan.detail["coefficients"][group[0]].shape[-2:]
+    every = plan.detail["planes"][group[0]] < 0
     second = " + @N@_LANES"
     if basis == "all":
         arguments, first = "const float *const *rows, ptrdiff_t at, float *t", radius - height // 2
-        source = "rows[j] + at + x"
+        source = f"rows[{'m * @N@_SIZE + ' if every else ''}j] + at + x"
         pre: list[str] = []
         start = radius - width // 2
         values = ("@N@_LOAD(r + i)", f"@N@_LOAD(r{second} + i)")
@@ -126,17 +127,21 @@ def group_code(number: int, plan: Plan, radius: int) -> str:
     loop = f"for (i = {start}; i < {start + width}; ++i) {{"
     inner = [loop, *_in(_step(group, *values)), "}"] if width else []  # or the middle one alone
     block = ["{", *_in(pre), "}"] if pre else []
+    rows = [
+        f"for (j = {first}; j < {first + height}; ++j) {{",
+        f"    const float *const r = {source};",
+        *_in(block),
+        *_in(inner),
+        "}",
+    ]
+    over_planes = ["for (m = 0; m < @N@_PLANES; ++m) {", *_in(rows), "}"] if every else rows
     body = [
         "int x;",
         "for (x = 0; x < @N@_CHUNK; x += 2 * @N@_LANES) {",
         f"    const float *k = @N@_group{number}_taps;",
         *(f"    @N@_FN(vec) a{n} = {{0.0f}}, b{n} = {{0.0f}};" for n in range(len(group))),
-        f"    int j{', i' if inner else ''};",
-        f"    for (j = {first}; j < {first + height}; ++j) {{",
-        f"        const float *const r = {source};",
-        *_in(block, 8),
-        *_in(inner, 8),
-        "    }",
+        f"    int {'m, ' if every else ''}j{', i' if inner else ''};",
+        *_in(over_planes),
         *(
             f"    @N@_STORE(t + {p} * @N@_CHUNK + x{tail}, {v}{n});"
             for n, p in enumerate(group)
@@ -161,7 +166,7 @@ def _calls(plan: Plan, wanted: set[int]) -> list[str]:
     ]
     calls = []
     for plane in sorted({plane for plane, _, _ in chosen}):
-        rows = f"rows + {plane} * @N@_SIZE" if plane else "rows"
+        rows = f"rows + {plane} * @N@_SIZE" if plane > 0 else "rows"
         own = [(g, direct) for at, g, direct in chosen if at == plane]
         if not all(direct for _, direct in own):
             calls.append(f"@N@_FN(fold)({rows}, at, work);")
