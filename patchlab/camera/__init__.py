@@ -6,6 +6,7 @@ from patchlab.camera.flags import flag_components
 from patchlab.camera.marks import find_marks
 from patchlab.camera.noise import measure_noise
 from patchlab.camera.pixels import MAX_FRAMES
+from patchlab.camera.rest import judge_rest
 from patchlab.camera.spectrum import Spectrum, measure_spectrum
 from patchlab.camera.static import measure_noise_dark, measure_noise_static
 from patchlab.camera.survey import survey
@@ -17,6 +18,7 @@ __all__ = [
     "default_kind",
     "find_marks",
     "flag_components",
+    "judge_rest",
     "make_table",
     "measure_blur",
     "measure_noise",
