@@ -14,6 +14,7 @@ from patchlab.camera.flags import flag_components, looks
 from patchlab.camera.marks import find_marks
 from patchlab.camera.noise import measure_noise
 from patchlab.camera.pixels import MAX_FRAMES
+from patchlab.camera.rest import judge_rest
 from patchlab.camera.samples import sample_noise
 from patchlab.camera.spectrum import Spectrum, measure_spectrum
 from patchlab.camera.static import measure_noise_dark, measure_noise_static
@@ -30,6 +31,7 @@ __all__ = [
     "default_kind",
     "find_marks",
     "flag_components",
+    "judge_rest",
     "looks",
     "make_table",
     "measure_blur",

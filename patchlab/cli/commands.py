@@ -448,6 +448,9 @@ def _say_drift(result: dict[str, Any]) -> None:
 @click.option("--force", is_flag=True, help="Replace what stands there.")
 @click.option("--resume", is_flag=True, help="Go on with what stands there.")
 @click.option("--max-bad", type=float, default=0.1, help="Share of pictures that may be unusable.")
+@click.option("--raw-format", help="PFNC name of the pixels in .raw files without a sidecar.")
+@click.option("--raw-width", type=click.IntRange(1), help="Width of .raw files, pixels.")
+@click.option("--raw-height", type=click.IntRange(1), help="Height of .raw files, pixels.")
 @_shared
 def detect(bank: Path, pictures: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Find edges in PICTURES with a BANK: one table of edgels, maps and overlays.
@@ -466,7 +469,12 @@ def detect(bank: Path, pictures: Path, terminal: Terminal, as_json: bool, **opti
             bank,
             pictures,
             out,
-            job.Request(options["what"], options["false_edges"], options["threshold"]),
+            job.Request(
+                options["what"],
+                options["false_edges"],
+                options["threshold"],
+                job.raw_layout(*(options[f"raw_{k}"] for k in ("format", "width", "height"))),
+            ),
             jobs=options["jobs"] or usable_cores(),
             draw=report.edge_pictures if options["drawn"] else None,
             max_bad=options["max_bad"],

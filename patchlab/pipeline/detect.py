@@ -45,11 +45,29 @@ class Request:
     what : step, line, both; None means the bank's own kind
     rate : false elements per megapixel of flat picture, for each kind
     threshold : a strength instead
+    raw : what ``.raw`` buffers hold where no sidecar tells it
     """
 
     what: edges.What | None = None
     rate: float | None = None
     threshold: float | None = None
+    raw: images.RawLayout | None = None
+
+
+def raw_layout(
+    format: str | None, width: int | None, height: int | None
+) -> images.RawLayout | None:
+    """What ``.raw`` files hold by the words that were given; None where nothing was said.
+
+    Raises
+    ------
+    UsageError : an unknown format, no size, or only some of the words.
+    """
+    if format is None and width is None and height is None:
+        return None
+    if format is None or width is None or height is None:
+        raise UsageError("--raw-format, --raw-width and --raw-height go together")
+    return images.RawLayout(format, width, height)
 
 
 @dataclass(frozen=True)
@@ -88,11 +106,32 @@ def _work(task: _Task) -> dict[str, Any]:
         "frames": [],
     }
     try:
-        for frame in images.read_file(Path(task.root), task.file, read_options(bank)):
+        options = replace(read_options(bank), raw=task.request.raw)
+        for frame in images.read_file(Path(task.root), task.file, options):
+            _same_kind(bank, frame)
             line["frames"].append(_one(bank, frame, respond, task))
     except PatchlabError as error:
-        line["reason"] = str(error)
+        line["reason"] = f"{error.what}; {error.remedy}" if error.remedy else error.what
     return line
+
+
+def _same_kind(bank: Bank, frame: Frame) -> None:
+    """Refuse pixels of another kind than the bank's: a plane of a Bayer sensor, or a plain picture.
+
+    Green lattices and luminances look alike whatever the pattern; a mosaic's own counts.
+    """
+    wanted, given = bank.contract.plane, frame.contract.plane
+    if wanted == given:
+        return
+    planes = [plane.rpartition(" ")[2] for plane in (wanted, given)]
+    if planes[0] == planes[1] != "mosaic":
+        return
+    told = [plane or "a picture without a colour pattern" for plane in (wanted, given)]
+    raise InputError(
+        f"the bank takes {told[0]}, this is {told[1]}",
+        where=frame.path,
+        remedy="give frames as the sensor wrote them" if wanted else "learn a bank on such frames",
+    )
 
 
 def read_options(bank: Bank) -> images.ReadOptions:

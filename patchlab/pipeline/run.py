@@ -16,6 +16,7 @@ from patchlab.pipeline import colour, tell
 from patchlab.pipeline.bundle import write_bundle
 from patchlab.pipeline.calibrate import chosen_costs
 from patchlab.pipeline.desk import RECIPE, Desk, bank_name, clear_after
+from patchlab.pipeline.detect import raw_layout
 from patchlab.pipeline.keep import Keeper
 from patchlab.pipeline.measure import take_in_extras
 from patchlab.types import (
@@ -48,7 +49,7 @@ def take_in(photos: images.Place, desk: Desk) -> images.Intake:
         transfer=s.transfer,  # type: ignore[arg-type]  # checked by the settings
         pixels=s.pixels,
         pixel_limit=s.pixel_limit,
-        raw=_raw_layout(desk),
+        raw=raw_layout(s.raw_format, s.raw_width, s.raw_height),
         bayer=s.bayer,  # type: ignore[arg-type]  # checked by the settings
         planes=s.planes,  # type: ignore[arg-type]  # checked by the settings
     )
@@ -67,17 +68,6 @@ def take_in(photos: images.Place, desk: Desk) -> images.Intake:
     return intake
 
 
-def _raw_layout(desk: Desk) -> images.RawLayout | None:
-    """What ``.raw`` files hold by the settings; None where nothing was said."""
-    s = desk.settings
-    given = [v for v in (s.raw_format, s.raw_width, s.raw_height) if v is not None]
-    if not given:
-        return None
-    if s.raw_format is None or s.raw_width is None or s.raw_height is None:
-        raise UsageError("--raw-format, --raw-width and --raw-height go together")
-    return images.RawLayout(s.raw_format, s.raw_width, s.raw_height)
-
-
 def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
     """Measure the camera on the frames and make the input table."""
     wanted = desk.settings.table
@@ -90,15 +80,21 @@ def survey(intake: images.Intake, desk: Desk) -> tuple[Survey, Head]:
     extras = take_in_extras(intake, desk)
     about["body"]["measured_on"] = extras.inputs
 
+    some = intake.thinned(camera.MAX_FRAMES)
+
     def make() -> Survey:
-        return colour.survey(
-            functools.partial(images.iterate, intake.thinned(camera.MAX_FRAMES)),
+        found = colour.survey(
+            functools.partial(images.iterate, some),
             intake.contract,
             extras,
             kind=kind,
             mixed=desk.settings.mixed_cameras,
             progress=desk.progress,
         )
+        if len(some.frames) == len(intake.frames):
+            return found
+        every = map(images.one_plane, images.iterate(intake, jobs=desk.jobs))
+        return camera.judge_rest(found, every, some.names, desk.progress)
 
     example = _example(intake)
     about["body"]["example"] = example.path

@@ -30,7 +30,9 @@ from patchlab.camera import (
     measure_noise_dark,
     measure_noise_static,
     noise_of_table,
+    survey,
 )
+from patchlab.errors import InputError
 from patchlab.images import demo
 from patchlab.images.scenes import Camera as Sensor
 from patchlab.images.scenes import dead_leaves, expose
@@ -54,7 +56,7 @@ class Camera:
     @property
     def contract(self) -> InputContract:
         full = (1 << self.bits) - 1
-        white = min(full, math.floor(self.black + self.gain * self.full_well))
+        white = min(full, math.floor(self.black + self.gain * self.full_well + 1e-6))
         return InputContract(f"Mono{self.bits}", self.black, float(white))
 
     @property
@@ -170,6 +172,37 @@ def table_from_photos(seed: int, dark: bool, stock: Any) -> Row:
     return row | of_table(camera, found) if found.measurable else row
 
 
+def folder_of(cameras: list[Camera], seed: int, stock: Any) -> list[Frame]:
+    """Ten views, each in a light of its own, one camera after the other."""
+    r = np.random.default_rng([seed, 9])
+    planes = lights(*stock, cameras[0], r)
+    return [
+        c.shoot(0.95 * c.full_well * r.uniform(0.3, 1.0) * p, [seed, i], f"{i:02d}.png")
+        for i, (p, c) in enumerate(zip(planes, cameras * 5, strict=False))
+    ]
+
+
+def refused(frames: list[Frame]) -> Row:
+    try:
+        found = survey(lambda: iter(frames), frames[0].contract)
+    except InputError as error:
+        return {"accepted": True, "refused": "different cameras" in error.what, "why": error.what}
+    return {"accepted": found.noise.measurable, "refused": False, "why": found.noise.reason}
+
+
+def of_mixed(seed: int, other: bool, stock: Any) -> Row:
+    """Whether a folder is refused; ``other``: half its frames are of another gain."""
+    r = np.random.default_rng([seed, 11])
+    bits, black = int(r.choice([8, 10, 12])), 24.0
+    top = (1 << bits) - 1 - black
+    well = float(np.exp(r.uniform(np.log(100), np.log(3000))))
+    one = Camera(bits, top / well, well, max(2 * top / well, 0.5), black)
+    ratio = float(r.uniform(2.0, 4.0)) ** float(r.choice([-1, 1]))
+    two = Camera(bits, one.gain * ratio, top / one.gain / ratio, one.read * ratio, black)
+    found = refused(folder_of([one, two] if other else [one], seed, stock))
+    return {"camera": one.__dict__, "ratio": ratio if other else 1.0, **found}
+
+
 # ---------------------------------------------------------------- the table of results
 
 PARTS: dict[str, tuple[Callable[[int, bool, Any], Row], float, float]] = {
@@ -178,6 +211,7 @@ PARTS: dict[str, tuple[Callable[[int, bool, Any], Row], float, float]] = {
     "dark": (from_dark, 0.0, 0.02),
     "table": (table_from_law, 0.0, 0.0),
     "table from photos": (table_from_photos, 0.0, 0.0),
+    "mixed": (of_mixed, 0.0, 0.0),
 }
 
 
@@ -221,6 +255,12 @@ def main() -> None:
             rows = [make(seed, dark, stock) for seed in seeds]
             title = f"{part}, black level {'above 0' if dark else '0'}"
             accepted = [r for r in rows if r["accepted"]]
+            if part == "mixed":
+                title = "two cameras, gains 2 to 4 apart" if dark else "one camera, light varies"
+                told = [r["refused"] for r in rows if r["accepted"]]
+                print(f"| {title} | {len(told)} of {len(rows)} told, {sum(told)} refused | |")
+                everything[title] = rows
+                continue
             head = f"| {title} | {len(accepted)} of {len(rows)} | "
             if part.startswith("table"):
                 print(head + stable(accepted), flush=True)
