@@ -11,24 +11,21 @@ import contextlib
 import ctypes
 import os
 import tempfile
-from collections.abc import Callable, Mapping
+from collections.abc import Mapping
 from itertools import pairwise
 from pathlib import Path
-from threading import Lock, Thread
 from typing import Any
 
 import numpy as np
 from numpy.typing import NDArray
 
+from patchlab.bank.bands import Band, side_by_side
 from patchlab.bank.reference import check_picture
 from patchlab.errors import InputError, UsageError, VerificationError
 from patchlab.store import read_file, sha256
 from patchlab.types import F32, Bank, Plan
 
 _POINTER, _STRIDE, _INT = ctypes.c_void_p, ctypes.c_ssize_t, ctypes.c_int
-Band = Callable[[int, int], int]
-"""Computes some rows, (first, count); returns a code."""
-
 _PICTURE = [_POINTER, _STRIDE, _INT, _INT, _INT, _INT]
 
 
@@ -351,7 +348,7 @@ class NativeBank:
         unit = tiles.rows if tiles else 1  # no block is computed twice
         inner = {(first + count * i // parts) // unit * unit for i in range(1, parts)}
         tops = [first, *sorted(top for top in inner if top > first), first + count]
-        self._check(max(_side_by_side(band, list(pairwise(tops)), threads)))
+        self._check(max(side_by_side(band, list(pairwise(tops)), threads)))
 
     def _need_fixed(self) -> None:
         if self._fixed is None:
@@ -379,39 +376,6 @@ class NativeBank:
             message = self._message(code).decode("ascii", "replace")
             kind = InputError if "pixel code" in message else UsageError
             raise kind(message, where=self.bank.name)
-
-
-def _side_by_side(band: Band, parts: list[tuple[int, int]], threads: int) -> list[int]:
-    """Compute bands, from row to row, in this thread and some more; their codes.
-
-    The next band goes to whoever is free. A thread is started for the call: that takes some
-    50 us, less than a pool does.
-    """
-    codes: list[int] = []
-    failed: list[BaseException] = []
-    waiting = iter(parts)
-    lock = Lock()
-
-    def work() -> None:
-        while not failed:
-            with lock:
-                first, end = next(waiting, (0, 0))
-            if end == 0:
-                return
-            try:
-                codes.append(band(first, end - first))
-            except BaseException as error:  # told by the thread that asked
-                failed.append(error)
-
-    others = [Thread(target=work) for _ in range(threads - 1)]
-    for thread in others:
-        thread.start()
-    work()
-    for thread in others:
-        thread.join()
-    if failed:
-        raise failed[0]
-    return codes
 
 
 def _address(pixels: NDArray[Any]) -> tuple[int, int, int, int]:
