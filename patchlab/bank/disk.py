@@ -455,7 +455,10 @@ def _plan(folder: Path, head: Mapping[str, Any], bank: Bank) -> Plan:
         costs=read_costs(entry["prices_ns"], str(folder / MANIFEST)),
     )
     stored = np.array(entry["error_bound"], dtype=np.float64)
-    same = stored.shape == (len(bank),) and np.allclose(stored, plan.error_bound, 1e-9, 0)
+    # what is fitted to a kernel may differ by a rounding between libraries of linear algebra
+    fits = plan.detail["halved"] is not None or any(plan.detail["factors"])
+    near = 1e-2 if fits else 1e-9
+    same = stored.shape == (len(bank),) and np.allclose(stored, plan.error_bound, near, 0)
     if not same or head["interface"] != plan.detail["abi"]:
         made = head.get("layout"), head.get("environment", {}).get("patchlab")
         if made != (LAYOUT, __version__):

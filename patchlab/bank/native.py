@@ -11,15 +11,15 @@ import contextlib
 import ctypes
 import os
 import tempfile
-from collections.abc import Callable, Mapping
+from collections.abc import Mapping
 from itertools import pairwise
 from pathlib import Path
-from threading import Lock, Thread
 from typing import Any
 
 import numpy as np
 from numpy.typing import NDArray
 
+from patchlab.bank.bands import Band, side_by_side
 from patchlab.bank.reference import check_picture
 from patchlab.errors import InputError, UsageError, VerificationError
 from patchlab.store import read_file, sha256
@@ -27,9 +27,6 @@ from patchlab.types import EDGEL, F32, Bank, Plan
 
 _POINTER, _STRIDE, _INT = ctypes.c_void_p, ctypes.c_ssize_t, ctypes.c_int
 _SIZE, _REAL = ctypes.c_size_t, ctypes.c_double
-Band = Callable[[int, int], int]
-"""Computes some rows, (first, count); returns a code."""
-
 _EDGEL = np.dtype(
     {
         "names": ["x", "y", "theta", "strength", "sd", "width", "scale", "kind"],
@@ -373,7 +370,7 @@ class NativeBank:
         unit = tiles.rows if tiles else 1  # no block is computed twice
         inner = {(first + count * i // parts) // unit * unit for i in range(1, parts)}
         tops = [first, *sorted(top for top in inner if top > first), first + count]
-        self._check(max(_side_by_side(band, list(pairwise(tops)), threads)))
+        self._check(max(side_by_side(band, list(pairwise(tops)), threads)))
 
     def edgels(
         self, pixels: NDArray[Any], threshold: float, line_threshold: float = 0.0
@@ -456,39 +453,6 @@ def as_edgels(found: NDArray[np.void]) -> NDArray[np.void]:
     for name in EDGEL.names or ():
         out[name] = found[name]
     return out
-
-
-def _side_by_side(band: Band, parts: list[tuple[int, int]], threads: int) -> list[int]:
-    """Compute bands, from row to row, in this thread and some more; their codes.
-
-    The next band goes to whoever is free. A thread is started for the call: that takes some
-    50 us, less than a pool does.
-    """
-    codes: list[int] = []
-    failed: list[BaseException] = []
-    waiting = iter(parts)
-    lock = Lock()
-
-    def work() -> None:
-        while not failed:
-            with lock:
-                first, end = next(waiting, (0, 0))
-            if end == 0:
-                return
-            try:
-                codes.append(band(first, end - first))
-            except BaseException as error:  # told by the thread that asked
-                failed.append(error)
-
-    others = [Thread(target=work) for _ in range(threads - 1)]
-    for thread in others:
-        thread.start()
-    work()
-    for thread in others:
-        thread.join()
-    if failed:
-        raise failed[0]
-    return codes
 
 
 def _output(out: NDArray[Any] | None, shape: tuple[int, ...], dtype: Any) -> NDArray[Any]:

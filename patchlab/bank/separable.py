@@ -32,8 +32,8 @@ def rank_one(part: F64) -> tuple[F32, F32]:
     The row is fitted to the rounded column, so that the column's rounding does no harm of its own.
     """
     left, values, right = np.linalg.svd(part)
-    size = np.sqrt(values[0])
-    column = (size * left[:, 0]).astype(np.float32)
+    turn = np.sign(left[np.abs(left[:, 0]).argmax(), 0])  # either sign would do: one is chosen
+    column = (np.sqrt(values[0]) * turn * left[:, 0]).astype(np.float32)
     wide = column.astype(np.float64)
     weight = float(wide @ wide)
     row = part.T @ wide / weight if weight else 0 * right[0]
