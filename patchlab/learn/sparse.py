@@ -36,6 +36,8 @@ LEAST_PENALTY, LARGEST_PENALTY = 0.3, 3.0
 """Bounds of a penalty that is chosen from the noise."""
 STAGES = ((8192, 512, 3e-2), (32768, 1024, 1e-2))
 """Early stages: patches, batch, and the relative gain of a pass that ends them."""
+WINDOW = 0.3
+"""Share of a pass that the sums stand for; older codes belong to atoms that have moved on."""
 BATCH = 2048
 """Patches coded between two renewals of the atoms, in the last stage."""
 CODING = 1e-3
@@ -193,7 +195,7 @@ class SparseState:
     ----------
     B : ndarray (m, K), atoms of unit norm
     A, C : ndarray (K, K) and (m, K), sums of ``a a'`` and ``z a'``, weighted towards the recent
-    weight : how many patches the sums stand for
+    seen : patches that went into them, from the start
     stage, passes : what is under way; passes count the last stage's
     draws : passes over any stage, key of the next order of patches
     curve : held-out objective after each pass of this stage
@@ -204,7 +206,7 @@ class SparseState:
     B: F64
     A: F64
     C: F64
-    weight: float = 0.0
+    seen: int = 0
     stage: int = 0
     passes: int = 0
     draws: int = 0
@@ -229,7 +231,7 @@ class SparseState:
                 B=data["B"],
                 A=data["A"],
                 C=data["C"],
-                weight=float(data["weight"]),
+                seen=int(data["seen"]),
                 stage=int(data["stage"]),
                 passes=int(data["passes"]),
                 draws=int(data["draws"]),
@@ -328,13 +330,15 @@ class Learner:
         return np.asarray(lasso(z, B, self.penalty, tolerance=CODING, mapper=self.mapper))
 
     def _renew(self, state: SparseState, z: F32, codes: F32, memory: float) -> SparseState:
-        """Fade the sums, add a batch, renew every atom once."""
-        kept = max(1 - len(z) / memory, 0.0) if state.weight >= memory else _fade(state, len(z))
+        """Fade the sums, add a batch, renew every atom once.
+
+        What fades is older than half of what was seen, and than ``WINDOW`` of a pass.
+        """
+        window = min(state.seen / 2, WINDOW * memory)
+        kept = max(1 - len(z) / window, 0.0) if window else 0.0
         A = kept * state.A + codes.T @ codes
         C = kept * state.C + z.T @ codes
-        return replace(
-            state, A=A, C=C, weight=kept * state.weight + len(z), B=_renewed(state.B, A, C)
-        )
+        return replace(state, A=A, C=C, seen=state.seen + len(z), B=_renewed(state.B, A, C))
 
     def _revive(self, state: SparseState, used: NDArray[np.int64], worst: F32) -> SparseState:
         """Replace dead atoms by the residuals of the worst-coded patches."""
@@ -393,11 +397,6 @@ def objective(z: F32, B: F64, codes: F32, penalty: float) -> F64:
     """``1/2 |z - B a|^2 + penalty |a|_1`` of each row, (n,)."""
     residual = z - codes @ B.T
     return np.asarray(0.5 * np.sum(residual**2, axis=1) + penalty * np.abs(codes).sum(axis=1))
-
-
-def _fade(state: SparseState, batch: int) -> float:
-    """While the first pass lasts, forget what is older than half of what was seen."""
-    return max(1 - 2 * batch / (state.weight + batch), 0.0) if state.weight else 0.0
 
 
 def _renewed(B: F64, A: F64, C: F64) -> F64:

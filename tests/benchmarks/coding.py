@@ -107,7 +107,7 @@ def dictionaries(patches, through) -> list[dict[str, Any]]:
     def ours() -> None:
         with threadpool_limits(1):
             learner = sparse.Learner(
-                patches.patches, through, ATOMS, PENALTY, 0, 1e-3, map
+                patches.patches, through, ATOMS, PENALTY, 0, 1e-5, map
             )  # fmt: skip
             state, spent = learner.start(), 0.0
             while not state.outcome:

@@ -274,3 +274,12 @@ def test_noise_alone_hardly_uses_an_atom_at_the_penalty_from_noise(photos):
     assert np.count_nonzero(lasso(noise @ w.K.T, B, penalty / 3), axis=1).mean() > 5
     tiny, huge = (penalty_from_noise(w, v * np.eye(64), 50) for v in (0.0, 1e6))
     assert 0 < tiny < penalty < huge < 10
+
+
+def test_smaller_batches_do_not_learn_worse(photos, whitened, monkeypatch):
+    """The sums stand for a share of a pass, whatever the batch."""
+    ends = []
+    for batch in (512, 4096):
+        monkeypatch.setattr("patchlab.learn.sparse.BATCH", batch)
+        ends.append(learn_sparse(photos, whitened, atoms=60, max_iterations=4).curve[-1])
+    assert ends[0] < 1.002 * ends[1]
