@@ -350,16 +350,16 @@ class Bank:
         mode: Any = PAD_MODES[self.border]
         padded = [np.pad(plane, self.radius, mode=mode) for plane in planes]
         area = self.size**2
-        taps = taps.reshape(-1, area, len(planes)).astype(np.float64)
-        out = np.empty((len(taps), h, w), dtype)
+        some = taps.reshape(-1, area, len(planes)).astype(np.float64)
+        out = np.empty((len(some), h, w), dtype)
         step = max(1, BAND_VALUES // (w * area))
         for top in range(0, h, step):
             sums: Array = 0.0
-            for m, plane in enumerate(padded):
+            for plane, own in zip(padded, np.moveaxis(some, -1, 0), strict=True):
                 rows = plane[top : min(top + step, h) + 2 * self.radius]
                 view = np.lib.stride_tricks.sliding_window_view(rows, (self.size, self.size))
-                sums = sums + taps[..., m] @ view.reshape(-1, area).T
-            out[:, top : top + step] = sums.reshape(len(taps), -1, w)
+                sums = sums + own @ view.reshape(-1, area).T
+            out[:, top : top + step] = sums.reshape(len(some), -1, w)
         return out
 
     # ------------------------------------------------------------ edges

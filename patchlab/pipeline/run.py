@@ -304,7 +304,8 @@ def choose(
     if found.contract.lattice > 1:
         told = (
             "learned on a Bayer mosaic: a kernel sees the colours as it learned them only where "
-            "its patch begins on an even row and column"
+            "its patch begins on an even row and column (--planes colour learns on whole cells, "
+            "and its filters keep the phase)"
         )
         bank = replace(bank, warnings=(*bank.warnings, told))
     if flagged:
