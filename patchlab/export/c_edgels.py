@@ -34,22 +34,20 @@ def sections(bank: Bank, plan: Plan, rules: EdgelRules | None) -> dict[str, str]
     window = max(-(-len(x) // 8) * 8 for x, _ in disks)
     blur = rules.blur_px or rules.start_blur_px
     line_blur = max(blur, 1.0)
-    tail = c_edge_model.tail()
     parts = {
         "PER_PIXEL": f"{len(planes) * 5 + kinds + 5} bytes",
         "OWN_WORDS": _own_words(bank),
         "LINE_WORDS": _line_words(bank, kinds),
         "RATIO": double_literal(rules.hysteresis),
         "LINE_RATIO": double_literal(rules.line_hysteresis),
-        "TAIL_COUNT": tail.size,
-        "TAIL": numbers(tail),
+        **c_edge_model.tail(),
+        **c_edge_model.curve(rules),
+        **c_edge_model.to_light(bank, rules),
         "WINDOW": window,
         "DISKS": ",\n".join(c_edge_model.disk_text(x, y, window) for x, y in disks),
         "LARGEST_STEP": inside(np.where(np.isfinite(rules.largest_step), rules.largest_step, 0)),
         "PRIOR": inside(rules.prior),
         "CURVE_TABLES": c_edge_model.curve_tables(bank, rules),
-        "CURVE": c_edge_model.curve(rules),
-        "CURVE_COUNT": rules.light.size,
         "CORRELATION": c_edge_model.correlation(rules),
         "VARIANCE": "@N@_variance(p, s->by, x)",
         "ITERATIONS": rules.iterations,
