@@ -28,7 +28,7 @@ NARROW_PX = 2.5
 """Radius of the disk where other edges are near."""
 MISFIT = 1.8
 """Chi-square per degree of freedom above which the narrow disk is tried."""
-LEASH_PX = 1.0
+LEASH_PX = 1.5
 """A fit that moves farther than this from the parabola's place is not trusted."""
 BLUR_PX = 0.8
 """Where to start when the blur of the camera is not known."""

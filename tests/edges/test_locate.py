@@ -386,7 +386,7 @@ def test_jacobian_is_that_of_finite_differences(profile, stabilised):
     curve = model.Curve(np.array([0.0, 1e4]), np.array([0.0, 2e4]), clipped=False)
     window = model.Window.disk(4)
     data = g.standard_normal((3, window.x.size))
-    problem = model._Problem(data, np.ones_like(data), window, curve, profile, 0.8)
+    problem = model._Problem(data, np.ones_like(data), window, curve, profile, 0.8, np.zeros(3))
     q = g.normal(0, 0.3, (3, 6)) + np.array([0, 0, 100, 140, 0, 0])
     _, jac = problem.residual(q)
     for i in range(6):
@@ -394,4 +394,4 @@ def test_jacobian_is_that_of_finite_differences(profile, stabilised):
         h[i] = 1e-6
         up, _ = problem.residual(q + h)
         down, _ = problem.residual(q - h)
-        np.testing.assert_allclose(jac[:, :, i], (down - up) / 2e-6, atol=1e-5)
+        np.testing.assert_allclose(jac[:, i], (down - up) / 2e-6, atol=1e-5)
