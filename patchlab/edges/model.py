@@ -171,10 +171,13 @@ class _Problem:
         profile: Profile,
         blur: float,
         place: F64,
+        slack: float = 1.0,
     ) -> None:
         self.data, self.weight, self.curve, self.profile = data, weight, curve, profile
         self.x, self.y = window.x[None].astype(float), window.y[None].astype(float)
-        self.prior = np.array([PLACE_PRIOR**-2, 0, 0, 0, CURVATURE_PRIOR**-2, BLUR_PRIOR**-2])
+        self.slack = slack
+        loose = (slack * PLACE_PRIOR) ** -2
+        self.prior = np.array([loose, 0, 0, 0, CURVATURE_PRIOR**-2, BLUR_PRIOR**-2])
         self.centre = np.zeros((len(data), 6))
         self.centre[:, 0], self.centre[:, 5] = place, math.log(blur)
 
@@ -274,7 +277,7 @@ def _descend(problem: _Problem, q: F64, active: NDArray[np.bool_]) -> tuple[F64,
             kept, np.maximum(damping[live] / 5, DAMPING), np.maximum(damping[live] * 5, 0.3)
         )
         settled[live] = promise < SETTLED * np.maximum(1.0, cost / free[live])
-        near = np.abs(q[live, 0] - origin[live]) <= RUNAWAY_PX
+        near = np.abs(q[live, 0] - origin[live]) <= problem.slack * RUNAWAY_PX
         going = np.flatnonzero(~settled[live] & near)
         if not going.size:
             break
@@ -356,6 +359,7 @@ def fit_edges(
     radius: float = 4,
     autocovariance: F64 | None = None,
     invalid: NDArray[np.bool_] | None = None,
+    slack: float = 1.0,
 ) -> Fits:
     """Fit a blurred step or line in a disk about each element.
 
@@ -373,6 +377,7 @@ def fit_edges(
     radius : of the disk, pixels
     autocovariance : of the noise, for honest errors when it is not white
     invalid : bool ndarray (h, w), pixels that do not count
+    slack : how many times farther than usual the edge may lie from its start
 
     Returns
     -------
@@ -388,7 +393,7 @@ def fit_edges(
     for begin in range(0, len(rows), CHUNK):
         cut = slice(begin, begin + CHUNK)
         data, weight = _gather(values, rows[cut], cols[cut], window, noise_sd, invalid)
-        problem = _Problem(data, weight, window, curve, profile, blur_px, position[cut])
+        problem = _Problem(data, weight, window, curve, profile, blur_px, position[cut], slack)
         q = np.zeros((len(data), 6))
         q[:, 0], q[:, 1], q[:, 5] = position[cut], theta[cut], math.log(blur_px)
         parts.append(_fit_chunk(problem, _levels(problem, q), blur_known, correlation))
