@@ -7,7 +7,7 @@ import numpy as np
 import pytest
 from scipy.special import ndtr
 
-from patchlab.edges import calibrate, detect_edgels, threshold, thin
+from patchlab.edges import calibrate, detect_edgels, thin, threshold
 
 BASE, FIRST = ((1.1, 1.4),), ((2.2, 2.8), (4.4, 5.6))
 
