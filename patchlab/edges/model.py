@@ -40,6 +40,8 @@ CURVATURE_PRIOR = 0.25
 """Standard deviation of the curvature before looking, 1 / pixels."""
 BLUR_PRIOR = 0.7
 """The same of log blur about the blur given."""
+LEVEL_ROUNDING = 1e-9
+"""Levels on either side that differ by less than this share are equal."""
 PLACE_PRIOR = 1.0
 """The same of the place about the start, pixels: it keeps faint edges from running away."""
 PRIOR = np.array([PLACE_PRIOR**-2, 0, 0, 0, CURVATURE_PRIOR**-2, BLUR_PRIOR**-2])
@@ -335,6 +337,9 @@ def _levels(problem: _Problem, q: F64) -> F64:
     for column, side in ((2, low), (3, high)):
         weight = problem.weight * side + 1e-6
         out[:, column] = (weight * light).sum(axis=1) / weight.sum(axis=1)
+    # levels that differ by a rounding are equal: its sign must not choose the first step
+    gap = np.abs(out[:, 3] - out[:, 2])
+    out[:, 3] = np.where(gap <= LEVEL_ROUNDING * np.abs(out[:, 2]), out[:, 2], out[:, 3])
     return out
 
 
