@@ -1,6 +1,7 @@
 """Edgels of the compiled code are those of Python: the same elements, in the same places."""
 
 from dataclasses import replace
+from functools import cache
 
 import numpy as np
 import pytest
@@ -59,11 +60,16 @@ def compiled(bank, flags=("-O1",)):
     return NativeBank(bank, plan, library, sha256(library))
 
 
-@pytest.fixture(scope="module", params=BANKS)
-def case(request):
-    bank, threshold, kinds = BANKS[request.param]
-    bank = replace(bank, name=request.param)
+@cache
+def compiled_case(name):
+    bank, threshold, kinds = BANKS[name]
+    bank = replace(bank, name=name)
     return bank, compiled(bank), threshold, kinds
+
+
+@pytest.fixture(params=BANKS)
+def case(request):
+    return compiled_case(request.param)
 
 
 def both_edgels(bank, native, pixels, what, threshold):
@@ -144,8 +150,7 @@ def test_noise_has_the_same_edgels(case):
 
 
 def test_soft_edges_are_left_to_the_same_octaves():
-    bank, threshold, _ = BANKS["octaves"]
-    native = compiled(replace(bank, name="octaves"))
+    bank, native, threshold, _ = compiled_case("octaves")
     got, want = both_edgels(bank, native, softened(bank, (140, 203)), None, threshold)
     assert_same(got, want, 100)
     assert set(got["scale"][got["sd"] > 0]) >= {0, 2}
