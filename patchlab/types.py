@@ -555,6 +555,7 @@ class Bank:
     purpose : "edges", "features", "learned" or "taps"
     thresholds, coverage : None when not known
     line_thresholds : for lines, where the bank has even kernels beside its odd ones
+    octaves : how many of its last scales are octaves, for soft and large edges
     noise_autocovariance : of the working values, centre 1; None means white
     provenance : plain data for the manifest (settings, seed, inputs, parents)
     """
@@ -572,6 +573,7 @@ class Bank:
     provenance: Mapping[str, Any] = field(default_factory=dict)
     warnings: tuple[str, ...] = ()
     line_thresholds: Thresholds | None = None
+    octaves: int = 0
 
     def __post_init__(self) -> None:
         n, h, w = self.taps.shape

@@ -97,6 +97,7 @@ def _body(bank: Bank, plan: Plan) -> dict[str, Any]:
     return {
         "name": bank.name,
         "purpose": bank.purpose,
+        "octaves": bank.octaves,
         "strength": bank.strength,
         "border": bank.border,
         "operation": OPERATION,
@@ -323,6 +324,7 @@ def _bank(folder: Path, head: Mapping[str, Any]) -> Bank:
         border=_one_of(head["border"], BORDERS, "border"),
         strength=_one_of(head["strength"], ("step", "line", "energy"), "strength"),
         purpose=str(head["purpose"]),
+        octaves=int(head.get("octaves", 0)),
         thresholds=_thresholds(head["thresholds"]),
         line_thresholds=_thresholds(head.get("line_thresholds")),
         coverage=_coverage(head["coverage"]),

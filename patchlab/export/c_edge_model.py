@@ -6,6 +6,7 @@ A stage does not import another, so the rules of :mod:`patchlab.edges` come in a
 from __future__ import annotations
 
 import math
+from collections.abc import Iterable
 from dataclasses import dataclass
 from typing import Any
 
@@ -33,6 +34,13 @@ class EdgelScale:
     rival : kernels of the other parity; empty where they have no say
     rival_of_lines : the rival has a say only where lines are looked for beside steps
     slope_odd, slope_even : root mean square slope of each kernel's noise along its normal
+    apart_px : how far its elements must be from those of finer scales
+    radii : of the two disks that an edge is fitted in, pixels
+    blur_px : where the fit's blur starts; None means the camera's
+    slack : spacing of the parabola's samples, and how many pixels more the edge may be off
+    softer : place of the scale among those of its kind that soft edges are left to, half side
+        of the square that is looked at, and the share of its strength that this one's must
+        have; None where there is none
     """
 
     scale: int
@@ -47,6 +55,11 @@ class EdgelScale:
     rival_of_lines: bool
     slope_odd: F64
     slope_even: F64
+    apart_px: int
+    radii: tuple[float, float]
+    blur_px: float | None
+    slack: float
+    softer: tuple[int, int, float] | None
 
 
 @dataclass(frozen=True, eq=False)
@@ -57,23 +70,22 @@ class EdgelRules:
     ----------
     own, lines : scales of the bank's own kind, and of lines beside steps, finest first
     hysteresis, line_hysteresis : low threshold over high threshold
-    dilation_px : a coarser scale adds only farther than this from finer elements
     light, value, clipped : the curve from light to working values, piecewise linear
     noise_sd : of the working values; None when not known
     autocovariance : of the noise; None when white
     blur_px : of the camera; None when not known
     start_blur_px : where to start then
-    radii : of the two disks that an edge is fitted in, pixels
     misfit : above it the narrow disk is tried
-    leash_px : a fit that moves farther is not trusted
-    iterations, asks, largest_step, prior : of the least squares
+    leash_px, runaway_px : a fit that moves farther is not trusted, or given up
+    soft_noise : what a scale's strength must have beside the share of an octave's
+    level_rounding : levels that differ by less than this share are equal
+    iterations, settled, damping, asks, largest_step, prior : of the least squares
     """
 
     own: tuple[EdgelScale, ...]
     lines: tuple[EdgelScale, ...]
     hysteresis: float
     line_hysteresis: float
-    dilation_px: int
     light: F64
     value: F64
     clipped: bool
@@ -81,10 +93,14 @@ class EdgelRules:
     autocovariance: F64 | None
     blur_px: float | None
     start_blur_px: float
-    radii: tuple[float, float]
     misfit: float
     leash_px: float
+    runaway_px: float
+    soft_noise: float
+    level_rounding: float
     iterations: int
+    settled: float
+    damping: float
     asks: float
     largest_step: F64
     prior: F64
@@ -136,11 +152,27 @@ def disk(radius: float) -> tuple[NDArray[np.int64], NDArray[np.int64]]:
     return x[keep], y[keep]
 
 
-def disk_text(x: NDArray[np.int64], y: NDArray[np.int64], window: int) -> str:
-    """A disk as an initialiser, its offsets padded with zeros."""
-    padded = [np.pad(v, (0, window - len(v))) for v in (x, y)]
-    rows = ",\n".join(f"{{\n{numbers(v.astype(np.float64), indent=8)}}}" for v in padded)
-    return f"    {{{len(x)}, {-(-len(x) // 8) * 8}, {rows}}}"
+def disk_texts(radii: Iterable[float]) -> str:
+    """The disks as C arrays, their offsets padded with zeros to whole eights."""
+    text, entries = [], []
+    for k, radius in enumerate(radii):
+        x, y = disk(radius)
+        padded = padded_count(radius)
+        for word, v in (("x", x), ("y", y)):
+            values = np.pad(v, (0, padded - len(v))).astype(np.float64)
+            text += [
+                f"static const double @N@_disk_{word}{k}[{padded}] = {{",
+                numbers(values),
+                "};",
+            ]
+        entries.append(f"    {{{len(x)}, {padded}, @N@_disk_x{k}, @N@_disk_y{k}}}")
+    text += [f"static const struct @N@_disk @N@_disks[{len(entries)}] = {{", ",\n".join(entries)]
+    return lines([*text, "};", ""])
+
+
+def padded_count(radius: float) -> int:
+    """Pixels of a disk, in whole eights."""
+    return -(-len(disk(radius)[0]) // 8) * 8
 
 
 def _table_first(bank: Bank, rules: EdgelRules) -> int | None:
@@ -268,7 +300,7 @@ def to_light(bank: Bank, rules: EdgelRules) -> dict[str, str]:
     """C function from a pixel, or from its working value, to the light that it stands for."""
     if bank.table.values is None:
         text = _SEARCH.replace("@LAST@", str(rules.light.size - 1))
-        return {"TO_LIGHT": text, "LIGHT_OF": "p.data[i]"}
+        return {"TO_LIGHT": text, "LIGHT_OF": "work->data[i]"}
     light = np.interp(bank.table.values, np.maximum.accumulate(rules.value), rules.light)
     head = "/* Light that a pixel stands for. */\n"
     if np.array_equal(light, np.arange(light.size)):
@@ -281,11 +313,11 @@ def to_light(bank: Bank, rules: EdgelRules) -> dict[str, str]:
 
 _WHITE = """\
 /* Variance of the position for white noise; x is its row of the inverse normal matrix. */
-static double @N@_variance(const struct @N@_problem *p, double by[6][@N@_WINDOW],
+static double @N@_variance(const struct @N@_problem *p, const struct @N@_slopes *s,
     const double *x)
 {
     (void)p;
-    (void)by;
+    (void)s;
     return x[0] > 0.0 ? x[0] : 0.0;
 }
 """
@@ -297,15 +329,16 @@ static const double @N@_noise[@SIDE@][@SIDE@] = {
 
 /* Variance of the position under noise that is not white; x is its row of the inverse normal
  * matrix. */
-static double @N@_variance(const struct @N@_problem *p, double by[6][@N@_WINDOW],
+static double @N@_variance(const struct @N@_problem *p, const struct @N@_slopes *s,
     const double *x)
 {
-    double pull[@N@_WINDOW], sum = 0.0;
+    double *const pull = p->work->a;
+    double sum = 0.0;
     const int n = p->disk->count;
     int i, j;
     for (i = 0; i < n; ++i) {
-        pull[i] = x[0] * by[0][i] + x[1] * by[1][i] + x[2] * by[2][i] + x[3] * by[3][i]
-            + x[4] * by[4][i] + x[5] * by[5][i];
+        pull[i] = x[0] * s->by[0][i] + x[1] * s->by[1][i] + x[2] * s->by[2][i]
+            + x[3] * s->by[3][i] + x[4] * s->by[4][i] + x[5] * s->by[5][i];
     }
     for (i = 0; i < n; ++i) {
         double row = 0.0;
