@@ -148,6 +148,14 @@ class Settings:
     kernels: int = _setting(16, "bank", "Kernels in the bank.", low=4, high=64)
     purpose: str = _setting("edges", "bank", "What the bank is for.", choices=("edges", "features"))
     lines: bool = _setting(False, "bank", "Add even (line) partners to an edge bank.")
+    octaves: int = _setting(
+        0,
+        "bank",
+        "Octaves to add to an edge bank for soft and large edges, on top of its kernels; each "
+        "takes about four times the work of the one before.",
+        low=0,
+        high=3,
+    )
     keep_marked: bool = _setting(
         False, "bank", "Let components that describe a mark of the camera into the bank."
     )
@@ -204,6 +212,9 @@ class Settings:
                 "--planes colour keeps all of a Bayer sensor's pixels",
                 remedy="leave out --bayer",
             )
+        if self.octaves and (self.as_learned or self.purpose != "edges"):
+            other = "--as-learned" if self.as_learned else f"--purpose {self.purpose}"
+            raise UsageError(f"--octaves is for banks of edges, and {other} makes none")
         if self.white is not None and self.white <= (self.black or 0):
             raise UsageError("--white must exceed --black")
 

@@ -648,6 +648,7 @@ class Bank:
     purpose : "edges", "features", "learned" or "taps"
     thresholds, coverage : None when not known
     line_thresholds : for lines, where the bank has even kernels beside its odd ones
+    octaves : how many of its last scales are octaves, for soft and large edges
     noise_autocovariance : of the working values, centre 1; None means white
     provenance : plain data for the manifest (settings, seed, inputs, parents)
     mix : float32 ndarray (planes, samples), the working planes as weighted sums of a pixel's
@@ -668,6 +669,7 @@ class Bank:
     warnings: tuple[str, ...] = ()
     line_thresholds: Thresholds | None = None
     mix: F32 | None = None
+    octaves: int = 0
 
     def __post_init__(self) -> None:
         n, h, w = self.taps.shape[:3]

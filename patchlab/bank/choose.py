@@ -22,7 +22,7 @@ from typing import Any, Literal
 import numpy as np
 from numpy.typing import NDArray
 
-from patchlab.bank import predict
+from patchlab.bank import octaves, predict
 from patchlab.bank.coverage import Parity, RefinedWidths, Widths, refine_widths, report_coverage
 from patchlab.bank.lattice import (
     LINES,
@@ -60,7 +60,9 @@ class BankSettings:
     border : one of the five names
     name : C identifier, prefix of every exported symbol
     widths : (across, along) of each size, pixels, to set them by hand
-    size : kernel side, odd, 3 to 63, to set it by hand
+    size : kernel side, odd, 3 to 63, to set it by hand (octaves have their own)
+    octaves : doubled widths added to an edge bank, each with as many directions as its coarsest
+        size; their kernels come on top of the budget
     seed : of the rotated basis that coverage is compared with
 
     Raises
@@ -77,6 +79,7 @@ class BankSettings:
     widths: Widths | None = None
     size: int | None = None
     seed: int = 0
+    octaves: int = 0
 
     def __post_init__(self) -> None:
         if not 4 <= self.kernels <= 64:
@@ -95,6 +98,10 @@ class BankSettings:
             )
         if self.lines and self.purpose == "features":
             raise UsageError("a bank of features has its line kernels already")
+        if not 0 <= self.octaves <= octaves.MOST:
+            raise UsageError(f"{self.octaves} octaves", remedy=f"ask for 0 to {octaves.MOST}")
+        if self.octaves and self.purpose == "features":
+            raise UsageError("octaves are for banks of edges", remedy="leave out one of the two")
         check_name(self.name)
 
     @property
@@ -345,6 +352,15 @@ def choose_bank(
     best = float(coverage.curve[list(coverage.budget).index(kernels)])
     warnings = [*_budget_warnings(asked, kernels), *choice.warnings]
     warnings += _cut_warnings(taps.shape[1] // 2, choice.widths)
+    added = 0
+    if asked.octaves:
+        widest, directions = choice.widths[-1], choice.structure[-1]
+        more = octaves.with_octaves(
+            made, taps, asked.octaves, directions, widest, parities, covariance, sd
+        )
+        made, taps = more.kernels, more.taps
+        added = len(more.widths)
+        warnings += more.warnings
     warnings += _noise_warnings(sd, covariance)
     warnings += _doubts(fits, best - coverage.rotated)
     return Bank(
@@ -359,6 +375,7 @@ def choose_bank(
         noise_autocovariance=covariance,
         provenance={"settings": dataclasses.asdict(asked), "choice": choice.about},
         warnings=tuple(warnings),
+        octaves=added,
     )
 
 

@@ -114,6 +114,7 @@ def _body(bank: Bank, plan: Plan) -> dict[str, Any]:
     return {
         "name": bank.name,
         "purpose": bank.purpose,
+        "octaves": bank.octaves,
         "strength": bank.strength,
         "border": bank.border,
         "operation": OPERATION if bank.planes == 1 else COLOUR_OPERATION,
@@ -352,6 +353,7 @@ def _bank(folder: Path, head: Mapping[str, Any]) -> Bank:
         border=_one_of(head["border"], BORDERS, "border"),
         strength=_one_of(head["strength"], ("step", "line", "energy"), "strength"),
         purpose=str(head["purpose"]),
+        octaves=int(head.get("octaves", 0)),
         thresholds=_thresholds(head["thresholds"]),
         line_thresholds=_thresholds(head.get("line_thresholds")),
         coverage=_coverage(head["coverage"]),

@@ -67,8 +67,10 @@ def threshold_of(
 
 def _checked(bank: Bank, pixels: NDArray[Any], respond: Respond) -> F32:
     form = bank.contract.format
-    fits = pixels.ndim == (3 if form.interleaved else 2)
-    if not fits or min(form.size_of(pixels)) < bank.size:
+    if pixels.ndim != (3 if form.interleaved else 2):
+        plane = "is one plane (h, w)" if bank.planes == 1 else f"is of {form.name} pixels"
+        raise InputError(f"a picture {plane}, not an array of shape {pixels.shape}")
+    if min(form.size_of(pixels)) < bank.size:
         raise InputError(
             f"a picture of shape {pixels.shape} is too small for kernels of {bank.size} px",
             remedy=f"give one plane of at least {bank.size} x {bank.size} pixels"

@@ -28,12 +28,44 @@ NARROW_PX = 2.5
 """Radius of the disk where other edges are near."""
 MISFIT = 1.8
 """Chi-square per degree of freedom above which the narrow disk is tried."""
-LEASH_PX = 1.0
+LEASH_PX = 1.5
 """A fit that moves farther than this from the parabola's place is not trusted."""
 BLUR_PX = 0.8
 """Where to start when the blur of the camera is not known."""
 
+WIDE_DISK = 2.5
+"""Radius of an octave's disk, in widths of its kernels: its edges are soft, and both levels must
+be seen."""
+WIDE_UNIT_PX = 2.5
+"""A kernel so wide may be a pixel off; an octave's, in proportion more."""
+
 Index = NDArray[np.int64]
+
+
+@dataclass(frozen=True)
+class Disk:
+    """How elements of one scale are placed.
+
+    Parameters
+    ----------
+    radius, narrow : of the disk that the model is fitted in, and of the one tried where other
+        edges are near, pixels
+    blur_px : where the blur starts; None means the camera's
+    slack : spacing of the parabola's samples, and how many pixels more the edge may be off
+    """
+
+    radius: float
+    narrow: float
+    blur_px: float | None = None
+    slack: float = 1.0
+
+
+def disk_of(shape: thin.ScaleShape, radius: float) -> Disk:
+    """The disk of a scale: the usual one, or an octave's, whose edges are as soft as it is wide."""
+    if not shape.octave:
+        return Disk(radius, NARROW_PX)
+    wide = max(radius, WIDE_DISK * shape.sigma_px)
+    return Disk(wide, 0.6 * wide, shape.sigma_px, max(1.0, shape.sigma_px / WIDE_UNIT_PX))
 
 
 @dataclass(frozen=True, eq=False)
@@ -128,11 +160,11 @@ def _start_scale(
     if kind == "energy":
         is_step = np.abs(responses[odd[j], y, x]) >= np.abs(responses[even[j], y, x])
     offset, theta, sd = (np.zeros(y.shape) for _ in range(3))
-    sign = np.ones(y.shape)
+    sign, span = np.ones(y.shape), disk_of(shape, RADIUS_PX).slack
     for step, members in ((True, odd), (False, even)):
         at = np.flatnonzero(is_step == step)
         if at.size:
-            part = _peak(bank, responses, members, shape.angles, y[at], x[at], j[at], step)
+            part = _peak(bank, responses, members, shape.angles, y[at], x[at], j[at], step, span)
             offset[at], theta[at], sd[at], sign[at] = part
     code = np.where(is_step, STEP, np.where(sign > 0, BRIGHT, DARK)).astype(np.uint8)
     theta = np.where(is_step & (sign < 0), theta + math.pi, theta)
@@ -141,12 +173,20 @@ def _start_scale(
 
 
 def _peak(
-    bank: Bank, responses: F32, members: Index, angles: F64, y: Index, x: Index, j: Index, odd: bool
+    bank: Bank,
+    responses: F32,
+    members: Index,
+    angles: F64,
+    y: Index,
+    x: Index,
+    j: Index,
+    odd: bool,
+    span: float,
 ) -> tuple[F64, F64, F64, F64]:
     """Offset and direction along the lattice normal, standard error, sign of the response."""
     here = responses[members[j], y, x].astype(np.float64)
     sign = np.where(here < 0, -1.0, 1.0)
-    cos, sin = np.cos(angles[j]), np.sin(angles[j])
+    cos, sin = span * np.cos(angles[j]), span * np.sin(angles[j])
     before, after = (
         sign * sample(responses, members[j], y + s * sin, x + s * cos) for s in (-1, 1)
     )
@@ -160,8 +200,9 @@ def _peak(
             for i, a in zip(members, angles, strict=True)
         ]
     )
-    sd = np.minimum(slope[j] / np.maximum(-bend, 1e-9), 1.0)  # the reach of the parabola
-    return offset, angles[j] + turn * math.pi / count, sd, sign
+    # at most the reach of the parabola
+    sd = span * np.minimum(span * slope[j] / np.maximum(-bend, 1e-9), 1.0)
+    return span * offset, angles[j] + turn * math.pi / count, sd, sign
 
 
 def start(
@@ -215,7 +256,7 @@ def edgels(
     kind : step, line or energy; None means ``bank.strength``
     refine : False keeps the parabola's place (quick; biased to the dark side on tables
         that bend)
-    radius : of the disk that the edge model sees, pixels
+    radius : of the disk that the edge model sees, pixels; octaves have wider ones
     invalid : bool ndarray (h, w), pixels that do not count
 
     Returns
@@ -238,12 +279,14 @@ def edgels(
     spread = np.zeros(rows.size)
     if refine:
         picture = _Picture(bank, values, blur_px, invalid)
-        for line in (False, True):
-            at = np.flatnonzero((begin.kind != STEP) == line)
-            if at.size:
-                part = _refine(picture, rows, cols, begin, at, line, radius)
-                offset[at], theta[at], sd[at] = part[:3]
-                spread[at] = part[3] if line else 0.0
+        scale = found.scale[rows, cols]
+        for disk, scales in _disks(bank, kind, radius).items():
+            for line in (False, True):
+                at = np.flatnonzero(((begin.kind != STEP) == line) & np.isin(scale, scales))
+                if at.size:
+                    part = _refine(picture, rows, cols, begin, at, line, disk)
+                    offset[at], theta[at], sd[at] = part[:3]
+                    spread[at] = part[3] if line else 0.0
     out = np.zeros(rows.size, EDGEL)
     out["x"], out["y"] = cols + offset * np.cos(theta), rows + offset * np.sin(theta)
     lines = begin.kind != STEP
@@ -251,6 +294,14 @@ def edgels(
     out["strength"], out["sd"] = found.strength[rows, cols], sd
     out["scale"], out["kind"] = found.scale[rows, cols], begin.kind
     out["width"] = _widths(spread, blur_px)
+    return out
+
+
+def _disks(bank: Bank, kind: thin.Kind | None, radius: float) -> dict[Disk, list[int]]:
+    """The scales that are fitted in each kind of disk."""
+    out: dict[Disk, list[int]] = {}
+    for shape in thin.shapes_of(bank, kind):
+        out.setdefault(disk_of(shape, radius), []).append(shape.scale)
     return out
 
 
@@ -272,10 +323,17 @@ class _Picture:
     invalid: NDArray[np.bool_] | None
 
     def fit(
-        self, rows: Index, cols: Index, begin: Start, at: Index, line: bool, radius: float
+        self,
+        rows: Index,
+        cols: Index,
+        begin: Start,
+        at: Index,
+        line: bool,
+        disk: Disk,
+        radius: float,
     ) -> tuple[F64, F64, F64, F64, F64]:
         """Offset, direction, standard error (infinite where not to be trusted), misfit, blur."""
-        bank, width = self.bank, self.blur_px or BLUR_PX
+        bank, width = self.bank, disk.blur_px or self.blur_px or BLUR_PX
         fits = model.fit_edges(
             self.values,
             rows[at],
@@ -285,17 +343,18 @@ class _Picture:
             curve=model.curve_of(bank.table),
             profile="line" if line else "step",
             blur_px=max(width, 1.0) if line else width,
-            blur_known=self.blur_px is not None and not line,
+            blur_known=self.blur_px is not None and disk.blur_px is None and not line,
             noise_sd=bank.table.noise_sd or 1.0,
             radius=radius,
             autocovariance=bank.noise_autocovariance,
             invalid=self.invalid,
+            slack=disk.slack,
         )
         q = fits.parameters
         rises = q[:, 3] > q[:, 2]
         if line:
             rises = rises == (begin.kind[at] == BRIGHT)
-        good = fits.ok & rises & (np.abs(q[:, 0] - begin.offset[at]) <= LEASH_PX)
+        good = fits.ok & rises & (np.abs(q[:, 0] - begin.offset[at]) <= disk.slack * LEASH_PX)
         # a misfit, or noise that is not measured, shows in the residual
         scatter = fits.chi2 if bank.table.noise_sd is None else np.maximum(fits.chi2, 1.0)
         sd = np.where(good, fits.sd[:, 0] * np.sqrt(scatter), np.inf)
@@ -303,17 +362,17 @@ class _Picture:
 
 
 def _refine(
-    picture: _Picture, rows: Index, cols: Index, begin: Start, at: Index, line: bool, radius: float
+    picture: _Picture, rows: Index, cols: Index, begin: Start, at: Index, line: bool, disk: Disk
 ) -> tuple[F64, F64, F64, F64]:
     """Best place of the elements ``at``: the wide disk's, or a narrow one's, or the parabola's.
 
     Other edges inside the wide disk pull at the fit; where its residual is too large, a
     narrow disk is tried and the smaller standard error (misfit included) wins.
     """
-    offset, theta, sd, misfit, spread = picture.fit(rows, cols, begin, at, line, radius)
+    offset, theta, sd, misfit, spread = picture.fit(rows, cols, begin, at, line, disk, disk.radius)
     again = np.flatnonzero((misfit > MISFIT) | ~np.isfinite(sd))
-    if again.size and radius > NARROW_PX:
-        near = picture.fit(rows, cols, begin, at[again], line, NARROW_PX)
+    if again.size and disk.radius > disk.narrow:
+        near = picture.fit(rows, cols, begin, at[again], line, disk, disk.narrow)
         better = near[2] < sd[again]
         for whole, part in zip((offset, theta, sd), near[:3], strict=True):
             whole[again[better]] = part[better]

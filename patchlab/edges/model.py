@@ -15,7 +15,7 @@ from __future__ import annotations
 import math
 from dataclasses import dataclass
 from functools import cached_property
-from typing import Any, Literal
+from typing import Any, Literal, NamedTuple
 
 import numpy as np
 from numpy.typing import NDArray
@@ -27,16 +27,31 @@ from patchlab.types import F32, F64, InputTable
 Profile = Literal["step", "line"]
 
 ITERATIONS = 12
-ASKS = 6.63
-"""Fall of the chi-square that frees a further parameter (1 % of straight edges, by chance)."""
+SETTLED = 1e-3
+"""Fall of the chi-square, over its value a degree of freedom, that a last step may promise."""
+DAMPING = 1e-3
+"""Least damping, as a share of the normal matrix's diagonal."""
+RUNAWAY_PX = 2.0
+"""A fit that moves farther than this from its start is given up."""
+ASKS = 9.0
+"""Fall of the chi-square that frees a further parameter: by chance, three straight edges in a
+thousand, which costs them a third of their precision."""
 CURVATURE_PRIOR = 0.25
 """Standard deviation of the curvature before looking, 1 / pixels."""
 BLUR_PRIOR = 0.7
 """The same of log blur about the blur given."""
-PRIOR = np.array([0, 0, 0, 0, CURVATURE_PRIOR**-2, BLUR_PRIOR**-2])
+LEVEL_ROUNDING = 1e-9
+"""Levels on either side that differ by less than this share are equal."""
+PLACE_PRIOR = 1.0
+"""The same of the place about the start, pixels: it keeps faint edges from running away."""
+PRIOR = np.array([PLACE_PRIOR**-2, 0, 0, 0, CURVATURE_PRIOR**-2, BLUR_PRIOR**-2])
 """One over the variance of each parameter before looking."""
 LARGEST_STEP = np.array([0.5, 0.3, np.inf, np.inf, 0.1, 0.4])
 """What a round may change of each parameter."""
+KEPT = 0.25
+"""Share of its promised fall that a step must keep; after one that does not ..."""
+CAREFUL = 0.3
+"""... the damping is at least so much."""
 CHUNK = 2048
 
 
@@ -146,10 +161,8 @@ class Fits:
     ok: NDArray[np.bool_]
 
 
-def _profile(u: F64, profile: Profile, *, slope: bool = True) -> tuple[F64, F64]:
+def _profile(u: F64, profile: Profile) -> tuple[F64, F64]:
     """The blurred edge's shape at ``u`` blurs from it, and its slope."""
-    if profile == "step" and not slope:
-        return np.asarray(ndtr(u)), np.empty(0)
     bell = np.exp(-u * u / 2)
     if profile == "step":
         return np.asarray(ndtr(u)), bell / math.sqrt(2 * math.pi)
@@ -157,64 +170,81 @@ def _profile(u: F64, profile: Profile, *, slope: bool = True) -> tuple[F64, F64]
 
 
 class _Problem:
-    """One chunk of windows with their data; all arrays (n, m) or (n, m, 6)."""
+    """One chunk of windows with their data; all arrays (n, m) or (n, k, m)."""
 
     def __init__(
-        self, data: F64, weight: F64, window: Window, curve: Curve, profile: Profile, blur: float
+        self,
+        data: F64,
+        weight: F64,
+        window: Window,
+        curve: Curve,
+        profile: Profile,
+        blur: float,
+        place: F64,
+        slack: float = 1.0,
     ) -> None:
         self.data, self.weight, self.curve, self.profile = data, weight, curve, profile
         self.x, self.y = window.x[None].astype(float), window.y[None].astype(float)
-        self.prior = PRIOR
-        self.centre = np.array([0, 0, 0, 0, 0, math.log(blur)])
+        self.slack = slack
+        self.prior = PRIOR.copy()
+        self.prior[0] /= slack**2
+        self.centre = np.zeros((len(data), 6))
+        self.centre[:, 0], self.centre[:, 5] = place, math.log(blur)
 
     def take(self, index: NDArray[Any]) -> _Problem:
         """The same for some of the windows."""
         part = object.__new__(_Problem)
         part.__dict__.update(self.__dict__)
         part.data, part.weight = self.data[index], self.weight[index]
+        part.centre = self.centre[index]
         return part
 
-    def residual(self, q: F64, *, jacobian: bool = True) -> tuple[F64, F64]:
-        """Weighted data minus model, and the model's derivatives in the six parameters."""
+    def residual(self, q: F64, count: int = 6) -> tuple[F64, F64]:
+        """Weighted data minus model (n, m), and the model's derivatives in the first ``count``
+        parameters (n, count, m)."""
         p, theta, low, high, bend, log_blur = (q[:, i, None] for i in range(6))
-        cos, sin, blur = np.cos(theta), np.sin(theta), np.exp(log_blur)
-        along = -self.x * sin + self.y * cos
+        cos, sin, inverse = np.cos(theta), np.sin(theta), np.exp(-log_blur)
+        along = self.y * cos - self.x * sin
         across = self.x * cos + self.y * sin
-        u = (across - p - bend * along**2 / 2) / blur
-        shape, slope = _profile(u, self.profile, slope=jacobian)
+        squared = along * along / 2
+        u = (across - p - bend * squared) * inverse
+        shape, slope = _profile(u, self.profile)
         value, gain = self.curve.at(low + (high - low) * shape)
         left = self.weight * (self.data - value)
-        if not jacobian:
-            return left, np.empty(0)
         gain = gain * self.weight
-        by_u = gain * (high - low) * slope
-        columns = (
-            -by_u / blur,
-            by_u * (along + bend * along * across) / blur,
-            gain * (1 - shape),
-            gain * shape,
-            -by_u * along**2 / 2 / blur,
-            -by_u * u,
-        )
-        return left, np.stack(columns, axis=2)
+        by_d = gain * slope * ((high - low) * inverse)
+        jac = np.empty((len(q), count, self.x.size))
+        np.negative(by_d, out=jac[:, 0])
+        np.multiply(by_d, along * (1 + bend * across), out=jac[:, 1])
+        np.multiply(gain, shape, out=jac[:, 3])
+        np.subtract(gain, jac[:, 3], out=jac[:, 2])
+        if count > 4:
+            np.multiply(jac[:, 0], squared, out=jac[:, 4])
+            np.multiply(jac[:, 0], u * np.exp(log_blur), out=jac[:, 5])
+        return left, jac
+
+    def freedom(self, active: NDArray[np.bool_]) -> F64:
+        """Degrees of freedom (n,), at least one."""
+        return np.asarray(np.maximum((self.weight > 0).sum(axis=1) - active.sum(axis=1), 1.0))
 
     def cost(self, q: F64, left: F64, active: NDArray[np.bool_]) -> F64:
         """Sum of squares with the priors of the active parameters."""
         off = (q - self.centre) ** 2 * self.prior * active
-        return np.asarray((left**2).sum(axis=1) + off.sum(axis=1))
+        return np.asarray(np.einsum("nm,nm->n", left, left) + off.sum(axis=1))
 
 
 def _normal(
     problem: _Problem, q: F64, left: F64, jac: F64, active: NDArray[np.bool_]
 ) -> tuple[F64, F64]:
-    """Normal matrix and right side; held parameters get a unit row and no step."""
-    turned = jac.transpose(0, 2, 1)
-    matrix = turned @ jac
-    right = (turned @ left[:, :, None])[:, :, 0] - problem.prior * (q - problem.centre)
-    diagonal = np.arange(6)
-    matrix[:, diagonal, diagonal] += problem.prior
-    both = active[:, :, None] & active[:, None, :]
-    matrix = np.where(both, matrix, 0.0)
+    """Normal matrix (n, k, k) and right side; held parameters get a unit row and no step."""
+    k = jac.shape[1]
+    prior, active = problem.prior[:k], active[:, :k]
+    matrix = jac @ jac.transpose(0, 2, 1)
+    right = (jac @ left[:, :, None])[:, :, 0] - prior * (q - problem.centre)[:, :k]
+    diagonal = np.arange(k)
+    matrix[:, diagonal, diagonal] += prior
+    if not active.all():
+        matrix = np.where(active[:, :, None] & active[:, None, :], matrix, 0.0)
     # a ridge relative to the largest entry: parameters that the pixels cannot tell apart get
     # no step and a huge standard error instead of a singular matrix
     ridge = 1e-12 + 1e-10 * matrix[:, diagonal, diagonal].max(axis=1, keepdims=True)
@@ -223,57 +253,76 @@ def _normal(
 
 
 def _descend(problem: _Problem, q: F64, active: NDArray[np.bool_]) -> tuple[F64, NDArray[np.bool_]]:
-    """Damped Gauss-Newton for every window; windows that settled are left out of later rounds."""
-    q = q.copy()
-    damping = np.full(len(q), 1e-3)
-    settled = np.zeros(len(q), bool)
+    """Damped Gauss-Newton for every window; windows that settled are left out of later rounds.
+
+    A window settles with the step that promises to lower its chi-square by less than
+    :data:`SETTLED` of the scatter: such a step is a small share of a standard error. Where a
+    step keeps less than a quarter of its promise the next one is shorter (Marquardt 1963,
+    J. Soc. Indust. Appl. Math. 11:431-441). One that has run away is given up.
+    """
+    q, damping, settled = q.copy(), np.full(len(q), DAMPING), np.zeros(len(q), bool)
+    origin, count = q[:, 0].copy(), 6 if active[:, 4:].any() else 4
+    live, part, i = np.arange(len(q)), problem, np.arange(count)
+    left, jac = part.residual(q, count)
+    cost = part.cost(q, left, active)
+    free = problem.freedom(active)
     for _ in range(ITERATIONS):
-        live = np.flatnonzero(~settled)
-        if not live.size:
-            break
-        part, on, start = problem.take(live), active[live], q[live]
-        left, jac = part.residual(start)
+        start, on = q[live], active[live]
         matrix, right = _normal(part, start, left, jac, on)
-        i = np.arange(6)
         matrix[:, i, i] *= 1 + damping[live, None]
         step = np.linalg.solve(matrix, right[:, :, None])[:, :, 0]
-        step *= np.minimum(1, (LARGEST_STEP / np.maximum(np.abs(step), 1e-30)).min(axis=1))[:, None]
-        trial = start + step
-        before = part.cost(start, left, on)
-        after = part.cost(trial, part.residual(trial, jacobian=False)[0], on)
-        better = after <= before
+        share = (LARGEST_STEP[:count] / np.maximum(np.abs(step), 1e-30)).min(axis=1)
+        step *= np.minimum(1, share)[:, None]
+        promise = np.einsum("nk,nk->n", step, right)
+        trial = start.copy()
+        trial[:, :count] += step
+        ahead, slopes = part.residual(trial, count)
+        after = part.cost(trial, ahead, on)
+        better, kept = after <= cost, cost - after >= KEPT * promise
         q[live[better]] = trial[better]
-        damping[live] = np.where(better, damping[live] / 5, damping[live] * 8)
-        still = (np.abs(step[:, 0]) < 3e-4) & (before - after < 1e-2)
-        settled[live] = still | (damping[live] > 1e4)
+        damping[live] = np.where(
+            kept, np.maximum(damping[live] / 5, DAMPING), np.maximum(damping[live] * 5, CAREFUL)
+        )
+        settled[live] = promise < SETTLED * np.maximum(1.0, cost / free[live])
+        near = np.abs(q[live, 0] - origin[live]) <= problem.slack * RUNAWAY_PX
+        going = np.flatnonzero(~settled[live] & near)
+        if not going.size:
+            break
+        keep = better[going]
+        left = np.where(keep[:, None], ahead[going], left[going])
+        jac = np.where(keep[:, None, None], slopes[going], jac[going])
+        cost = np.where(keep, after[going], cost[going])
+        live, part = live[going], part.take(going)
     return q, settled
 
 
-def _score(problem: _Problem, q: F64, active: NDArray[np.bool_], extra: int) -> F64:
-    """Predicted fall of the chi-square if one more parameter were let free."""
-    left, jac = problem.residual(q)
-    matrix, _ = _normal(problem, q, left, jac, active)
-    column = jac[:, :, extra]
-    cross = np.where(active, (jac * column[:, :, None]).sum(axis=1), 0.0)
-    explained = (cross * np.linalg.solve(matrix, cross[:, :, None])[:, :, 0]).sum(axis=1)
-    free = (column**2).sum(axis=1) - explained
-    push = (column * left).sum(axis=1)
-    return np.asarray(push**2 / np.maximum(free, 1e-9))
+class _Look(NamedTuple):
+    """What the residual of a finished fit tells: see :func:`_look`."""
+
+    sd: F64
+    chi2: F64
+    asks: NDArray[np.bool_]
 
 
-def _errors(
-    problem: _Problem, q: F64, active: NDArray[np.bool_], correlation: F64 | None
-) -> tuple[F64, F64]:
-    """Standard errors (n, 6) for unit noise, and chi-square per degree of freedom."""
+def _look(problem: _Problem, q: F64, active: NDArray[np.bool_], correlation: F64 | None) -> _Look:
+    """Standard errors (n, 6) for unit noise, chi-square per degree of freedom, and whether the
+    residual asks for curvature or blur (n, 2) by the fall of the chi-square they would bring."""
     left, jac = problem.residual(q)
     matrix, _ = _normal(problem, q, left, jac, active)
+    matrix[:, 0, 0] -= problem.prior[0]  # the start saw the same noise: it adds no knowledge
     inverse = np.linalg.inv(matrix)
+    turned = jac.transpose(0, 2, 1)
+    column = jac[:, 4:]
+    cross = np.where(active[:, None], column @ turned, 0.0)
+    explained = ((cross @ inverse) * cross).sum(axis=2)
+    room = np.einsum("nkm,nkm->nk", column, column) - explained
+    push = (column @ left[:, :, None])[:, :, 0]
+    asks = (push**2 > ASKS * np.maximum(room, 1e-9)) & ~active[:, 4:]
     if correlation is not None:  # least squares under noise that is not white
-        seen = jac.transpose(0, 2, 1) @ (correlation @ jac)
-        inverse = inverse @ seen @ inverse
+        inverse = inverse @ ((jac @ correlation) @ turned) @ inverse
     spread = np.sqrt(np.maximum(np.diagonal(inverse, axis1=1, axis2=2), 0.0))
-    free = np.maximum((problem.weight > 0).sum(axis=1) - active.sum(axis=1), 1)
-    return np.where(active, spread, 0.0), (left**2).sum(axis=1) / free
+    chi2 = np.einsum("nm,nm->n", left, left) / problem.freedom(active)
+    return _Look(np.where(active, spread, 0.0), chi2, asks)
 
 
 def _levels(problem: _Problem, q: F64) -> F64:
@@ -288,6 +337,9 @@ def _levels(problem: _Problem, q: F64) -> F64:
     for column, side in ((2, low), (3, high)):
         weight = problem.weight * side + 1e-6
         out[:, column] = (weight * light).sum(axis=1) / weight.sum(axis=1)
+    # levels that differ by a rounding are equal: its sign must not choose the first step
+    gap = np.abs(out[:, 3] - out[:, 2])
+    out[:, 3] = np.where(gap <= LEVEL_ROUNDING * np.abs(out[:, 2]), out[:, 2], out[:, 3])
     return out
 
 
@@ -317,6 +369,7 @@ def fit_edges(
     radius: float = 4,
     autocovariance: F64 | None = None,
     invalid: NDArray[np.bool_] | None = None,
+    slack: float = 1.0,
 ) -> Fits:
     """Fit a blurred step or line in a disk about each element.
 
@@ -334,6 +387,7 @@ def fit_edges(
     radius : of the disk, pixels
     autocovariance : of the noise, for honest errors when it is not white
     invalid : bool ndarray (h, w), pixels that do not count
+    slack : how many times farther than usual the edge may lie from its start
 
     Returns
     -------
@@ -349,7 +403,7 @@ def fit_edges(
     for begin in range(0, len(rows), CHUNK):
         cut = slice(begin, begin + CHUNK)
         data, weight = _gather(values, rows[cut], cols[cut], window, noise_sd, invalid)
-        problem = _Problem(data, weight, window, curve, profile, blur_px)
+        problem = _Problem(data, weight, window, curve, profile, blur_px, position[cut], slack)
         q = np.zeros((len(data), 6))
         q[:, 0], q[:, 1], q[:, 5] = position[cut], theta[cut], math.log(blur_px)
         parts.append(_fit_chunk(problem, _levels(problem, q), blur_known, correlation))
@@ -381,12 +435,15 @@ def _fit_chunk(
     active = np.ones(q.shape, bool)
     active[:, 4], active[:, 5] = False, not blur_known
     q, ok = _descend(problem, q, active)
-    for extra in (4, 5):
-        asks = (_score(problem, q, active, extra) > ASKS) & ~active[:, extra]
-        again = np.flatnonzero(asks)
+    seen = _look(problem, q, active, correlation)
+    for extra in (0, 1):
+        again = np.flatnonzero(seen.asks[:, extra])
         if again.size:
-            active[again, extra] = True
-            q[again], ok[again] = _descend(problem.take(again), q[again], active[again])
-    sd, chi2 = _errors(problem, q, active, correlation)
-    ok &= np.isfinite(q).all(axis=1) & np.isfinite(sd).all(axis=1)
-    return q, sd, chi2, ok
+            part = problem.take(again)
+            active[again, 4 + extra] = True
+            q[again], ok[again] = _descend(part, q[again], active[again])
+            parts = _look(part, q[again], active[again], correlation)
+            for whole, found in zip(seen, parts, strict=True):
+                whole[again] = found
+    ok &= np.isfinite(q).all(axis=1) & np.isfinite(seen.sd).all(axis=1)
+    return q, seen.sd, seen.chi2, ok

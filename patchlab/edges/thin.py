@@ -10,7 +10,7 @@ from __future__ import annotations
 
 import math
 from collections.abc import Iterable, Sequence
-from dataclasses import dataclass
+from dataclasses import dataclass, replace
 from typing import Any, Literal
 
 import numpy as np
@@ -25,6 +25,8 @@ Mask = NDArray[np.bool_]
 
 DILATION_PX = 2
 """A coarser scale may only add elements farther than this from what finer ones found."""
+APART = 1.0
+"""The same for an octave, in widths of its kernels."""
 RELATIVE_FLOOR = 0.35
 """Coarse elements below this share of the strongest response around are tails of another edge."""
 WINDOW_SIGMAS = 2.5
@@ -36,6 +38,13 @@ LINE_OVER_STEP = 0.8
 """And so high against the largest step response: the lobes of a step reach 0.5 of the step, while
 the flanks of a bar reach 1 / 0.8 of its middle when it is about four kernel widths wide. Where
 both kinds are looked for, it is a line up to there and two steps beyond."""
+SOFT = 1.2
+"""An edge whose blur is more than so many widths of a kernel is left to an octave, and ..."""
+SOFT_CAMERA = 2.0
+"""... more than so many times the camera's own."""
+SOFT_NOISE = 0.5
+"""How much larger than that share a scale's own response must be, noise units: noise adds about
+so much to the largest response around."""
 HYSTERESIS = 0.7
 """Low threshold over high threshold."""
 
@@ -51,6 +60,8 @@ class ScaleShape:
     angles : ndarray (n,), normal directions, radians in [0, pi)
     sigma_px : width of the kernels across the edge
     reach_px : pixels beyond which the kernels hold less than a thousandth of their energy
+    octave : whether it is one of the octaves added for soft and large edges
+    soft_px : blur from which edges are left to such an octave
     """
 
     scale: int
@@ -59,6 +70,13 @@ class ScaleShape:
     angles: F64
     sigma_px: float
     reach_px: int
+    octave: bool = False
+    soft_px: float = math.inf
+
+    @property
+    def apart_px(self) -> int:
+        """How far its elements must be from those of finer scales, pixels."""
+        return max(DILATION_PX, round(APART * self.sigma_px)) if self.octave else DILATION_PX
 
 
 @dataclass(frozen=True, eq=False)
@@ -66,7 +84,8 @@ class ScaleMap:
     """Strength of one scale: float32 (h, w), and uint8 (h, w) index of the winning direction.
 
     An element must have the share ``own`` of the largest strength around it, and the share
-    ``other`` of the largest response of the other parity, ``rival``, where that has a say.
+    ``other`` of the largest response of the other parity, ``rival``, where that has a say, and
+    the largest strength around it must have the share ``least`` of that of an octave, ``softer``.
     """
 
     shape: ScaleShape
@@ -75,6 +94,8 @@ class ScaleMap:
     own: float = 0.0
     rival: F32 | None = None
     other: float = 0.0
+    softer: ScaleMap | None = None
+    least: float = 0.0
 
 
 def _sigma(bank: Bank, index: int) -> float:
@@ -134,8 +155,19 @@ def shapes_of(bank: Bank, kind: Kind | None = None) -> tuple[ScaleShape, ...]:
             ]
         )
         members = odd + even if wanted == "energy" else lead
+        sigma, octaves = _sigma(bank, lead[0]), bank.scales[len(bank.scales) - bank.octaves :]
+        blur = SOFT_CAMERA * float(bank.provenance.get("blur_sigma_px") or 0)
         found.append(
-            ScaleShape(scale, odd, even, angles, _sigma(bank, lead[0]), _reach(bank, members))
+            ScaleShape(
+                scale,
+                odd,
+                even,
+                angles,
+                sigma,
+                _reach(bank, members),
+                scale in octaves,
+                max(SOFT * sigma, blur),
+            )
         )
     if not found:
         raise UsageError(
@@ -195,6 +227,37 @@ def strongest(shape: ScaleShape, plane: Any, kind: Kind, *, no_flanks: bool = Fa
     if kind == "step" and no_flanks:
         return ScaleMap(shape, best, winner, own, _largest(shape.even, plane), 1 / LINE_OVER_STEP)
     return ScaleMap(shape, best, winner, own)
+
+
+def softer_of(shapes: Sequence[ScaleShape], kind: Kind) -> list[tuple[int, float] | None]:
+    """For each scale the place of the octave it leaves soft edges to, and the share of that
+    octave's strength that its own must have; None where there is none.
+
+    A kernel of width s answers a step of blur b by ``s^2 / sqrt(s^2 + b^2)``, in noise units: an
+    octave q times as wide sees a sharp edge q times as strong, a very soft one q^2 times. The
+    share is the one at the blur ``soft_px`` of the scale.
+    """
+    out: list[tuple[int, float] | None] = []
+    for k, shape in enumerate(shapes):
+        later = [j for j in range(k + 1, len(shapes)) if shapes[j].octave]
+        if kind != "step" or not later:
+            out.append(None)
+            continue
+        own, wide = shape.sigma_px, shapes[later[0]].sigma_px
+        ratio = math.hypot(wide, shape.soft_px) / math.hypot(own, shape.soft_px)
+        out.append((later[0], (own / wide) ** 2 * ratio))
+    return out
+
+
+def scale_maps(
+    shapes: Sequence[ScaleShape], plane: Any, kind: Kind, *, no_flanks: bool = False
+) -> list[ScaleMap]:
+    """Strength of every scale, finest first; parameters as for :func:`strongest`."""
+    maps = [strongest(s, plane, kind, no_flanks=no_flanks) for s in shapes]
+    return [
+        m if found is None else replace(m, softer=maps[found[0]], least=found[1])
+        for m, found in zip(maps, softer_of(shapes, kind), strict=True)
+    ]
 
 
 # ---------------------------------------------------------------- thinning
@@ -283,6 +346,13 @@ def candidates(scale_map: ScaleMap, floor: float, *, margin: int | None = None) 
         if field is not None and share:
             around = ndimage.maximum_filter(field, size=window, mode="nearest")
             keep &= strength >= np.float32(share) * around
+    soft = scale_map.softer
+    if soft is not None:
+        size = 2 * math.ceil(soft.shape.sigma_px) + 1
+        own, theirs = (
+            ndimage.maximum_filter(s, size=size, mode="nearest") for s in (strength, soft.strength)
+        )
+        keep &= own >= np.float32(scale_map.least) * theirs + np.float32(SOFT_NOISE)
     return np.where(keep, strength, np.float32(0))
 
 
@@ -327,13 +397,17 @@ def dilate(mask: Mask, radius: int) -> Mask:
     return out
 
 
-def cascade(planes: Sequence[F32], low: float, high: float) -> tuple[Mask, NDArray[np.uint8]]:
+def cascade(
+    planes: Sequence[F32], low: float, high: float, apart: Sequence[int] | None = None
+) -> tuple[Mask, NDArray[np.uint8]]:
     """Join scales, finest first: a coarser one adds only where finer ones found nothing.
 
     Parameters
     ----------
     planes : candidates of each scale, finest first, float32 (h, w)
     low, high : hysteresis thresholds
+    apart : for each scale, how far its elements must be from those of finer ones, pixels; None
+        means :data:`DILATION_PX`
 
     Returns
     -------
@@ -345,7 +419,7 @@ def cascade(planes: Sequence[F32], low: float, high: float) -> tuple[Mask, NDArr
     for k, plane in enumerate(planes[1:], 1):
         more = hysteresis(plane, low, high)
         if more.any():
-            more &= ~dilate(edges, DILATION_PX)
+            more &= ~dilate(edges, DILATION_PX if apart is None else apart[k])
             edges |= more
             level[more] = k
     return edges, level
@@ -388,15 +462,13 @@ def edge_map(
         raise UsageError(f"the strength threshold must be positive, not {threshold:g}")
     wanted = kind or bank.strength
     low = hysteresis_ratio * threshold
-    maps = [
-        strongest(s, responses.__getitem__, wanted, no_flanks=no_flanks)
-        for s in shapes_of(bank, wanted)
-    ]
+    shapes = shapes_of(bank, wanted)
+    maps = scale_maps(shapes, responses.__getitem__, wanted, no_flanks=no_flanks)
     planes = [candidates(m, low) for m in maps]
     if invalid is not None and invalid.any():
         for m, plane in zip(maps, planes, strict=True):
             plane[ndimage.maximum_filter(invalid, size=2 * m.shape.reach_px + 1)] = 0
-    edges, level = cascade(planes, low, threshold)
+    edges, level = cascade(planes, low, threshold, [s.apart_px for s in shapes])
     return _joined(maps, edges, level, threshold)
 
 

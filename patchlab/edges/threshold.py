@@ -65,11 +65,13 @@ class Counts:
     megapixels: float
 
 
-def _count(planes: Sequence[F32], level: F64, ratio: float) -> NDArray[np.int64]:
+def _count(
+    planes: Sequence[F32], level: F64, ratio: float, apart: Sequence[int]
+) -> NDArray[np.int64]:
     """Elements, groups and maxima, (3, t), of one tile's candidates."""
     out = np.zeros((3, level.size), np.int64)
     for k, high in enumerate(level):
-        edges, _ = thin.cascade(planes, ratio * high, high)
+        edges, _ = thin.cascade(planes, ratio * high, high, apart)
         out[0, k] = np.count_nonzero(edges)
         out[1, k] = ndimage.label(edges, structure=np.ones((3, 3)))[1]
         out[2, k] = sum(np.count_nonzero(p >= high) for p in planes)
@@ -129,9 +131,10 @@ def count_on_noise(
         else:
             assert correlate is not None
             plane = correlate(own[0])[:, cut : TILE - cut, cut : TILE - cut].__getitem__
-        maps = [thin.strongest(s, plane, wanted) for s in shapes]
+        maps = thin.scale_maps(shapes, plane, wanted)
         floor = hysteresis * float(levels.min())
-        total += _count([thin.candidates(m, floor, margin=0) for m in maps], levels, hysteresis)
+        planes = [thin.candidates(m, floor, margin=0) for m in maps]
+        total += _count(planes, levels, hysteresis, [s.apart_px for s in shapes])
         progress("thresholds", done, tiles)
     area = tiles * (TILE - 2 * cut - 2) ** 2 / 1e6
     return Counts(levels, total[0], total[1], total[2], area)

@@ -30,40 +30,38 @@ def sections(bank: Bank, plan: Plan, rules: EdgelRules | None) -> dict[str, str]
     kinds = 2 if rules.lines else 1
     planes, maps = _maps(rules)
     tiles = plan.detail.get("fft")
-    disks = [c_edge_model.disk(radius) for radius in rules.radii]
-    window = max(-(-len(x) // 8) * 8 for x, _ in disks)
-    blur = rules.blur_px or rules.start_blur_px
-    line_blur = max(blur, 1.0)
-    tail = c_edge_model.tail()
+    radii = [radius for pair in _pairs(rules) for radius in pair]
+    far = math.ceil(max(s.slack for s in (*rules.own, *rules.lines)))
     parts = {
         "PER_PIXEL": f"{len(planes) * 5 + kinds + 5} bytes",
         "OWN_WORDS": _own_words(bank),
         "LINE_WORDS": _line_words(bank, kinds),
         "RATIO": double_literal(rules.hysteresis),
         "LINE_RATIO": double_literal(rules.line_hysteresis),
-        "TAIL_COUNT": tail.size,
-        "TAIL": numbers(tail),
-        "WINDOW": window,
-        "DISKS": ",\n".join(c_edge_model.disk_text(x, y, window) for x, y in disks),
+        **c_edge_model.tail(),
+        **c_edge_model.curve(rules),
+        **c_edge_model.to_light(bank, rules),
+        "WINDOW": max(map(c_edge_model.padded_count, radii)),
+        "ABOVE": far + 1,
+        "BELOW": far + 2,
+        "DISKS": c_edge_model.disk_texts(radii),
         "LARGEST_STEP": inside(np.where(np.isfinite(rules.largest_step), rules.largest_step, 0)),
         "PRIOR": inside(rules.prior),
         "CURVE_TABLES": c_edge_model.curve_tables(bank, rules),
-        "CURVE": c_edge_model.curve(rules),
-        "CURVE_COUNT": rules.light.size,
         "CORRELATION": c_edge_model.correlation(rules),
-        "VARIANCE": "@N@_variance(p, s->by, x)",
         "ITERATIONS": rules.iterations,
         "ASKS": double_literal(rules.asks),
+        "SETTLED": double_literal(rules.settled),
+        "DAMPING": double_literal(rules.damping),
+        "KEPT": double_literal(rules.kept),
+        "CAREFUL": double_literal(rules.careful),
+        "RUNAWAY": double_literal(rules.runaway_px),
+        "LEVEL_ROUNDING": double_literal(rules.level_rounding),
+        "SOFT_NOISE": float_literal(rules.soft_noise),
         "BAND": tiles.rows * -(-BAND // tiles.rows) if tiles else BAND,
         "KINDS": kinds,
         "PLANES": len(planes),
         "MAPS": _map_text(rules, planes, maps),
-        "DILATION": rules.dilation_px,
-        "DILATION_SQUARED": (2 * rules.dilation_px + 1) ** 2,
-        "STEP_BLUR": double_literal(blur),
-        "LINE_BLUR": double_literal(line_blur),
-        "LOG_STEP_BLUR": double_literal(math.log(blur)),
-        "LOG_LINE_BLUR": double_literal(math.log(line_blur)),
         "BLUR_KNOWN": int(rules.blur_px is not None),
         "BLUR_SQUARED": double_literal((rules.blur_px or 0.0) ** 2),
         "WEIGHT": double_literal(1.0 / (rules.noise_sd or 1.0)),
@@ -147,6 +145,24 @@ def _structs(kind: str, name: str, entries: list[str]) -> list[str]:
     return [head, ",\n".join(entries), "};"]
 
 
+def _pairs(rules: EdgelRules) -> list[tuple[float, float]]:
+    """Radii of a wide and a narrow disk, each pair once."""
+    return list(dict.fromkeys(s.radii for s in (*rules.own, *rules.lines)))
+
+
+def _apart(rules: EdgelRules, s: EdgelScale, k: int) -> str:
+    """What sets a scale apart from finer and softer ones, and how its elements are placed."""
+    place, around, least = s.softer or (-1, 0, 0.0)
+    softer = place if place < 0 else place + (0 if k < len(rules.own) else len(rules.own))
+    blur = s.blur_px or rules.blur_px or rules.start_blur_px
+    blurs = [v for b in (blur, max(blur, 1.0)) for v in (b, math.log(b))]
+    disk = 2 * _pairs(rules).index(s.radii)
+    return (
+        f"{s.apart_px}, {softer}, {around}, {float_literal(least)}, {disk}, "
+        f"{int(s.blur_px is not None)},\n     {inside([s.slack, *blurs])}"
+    )
+
+
 def _map_text(
     rules: EdgelRules, planes: list[Plane], maps: list[tuple[EdgelScale, int, int]]
 ) -> str:
@@ -172,7 +188,7 @@ def _map_text(
         entries.append(
             f"    {{{s.scale}, {plane}, {rival}, {int(s.rival_of_lines)}, {s.reach_px}, "
             f"{s.around_px}, {float_literal(s.own)}, {float_literal(s.other)},\n"
-            f"     @N@_ahead{k}, @N@_behind{k}, {names}}}"
+            f"     @N@_ahead{k}, @N@_behind{k}, {_apart(rules, s, k)},\n     {names}}}"
         )
     text += _structs("map", "maps", entries)
     first = [0, len(rules.own), len(maps)] if rules.lines else [0, len(maps)]

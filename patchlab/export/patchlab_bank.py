@@ -344,21 +344,21 @@ class Bank:
         planes = self._working_planes(image)
         return self._sums(planes, self.taps[list(kernels)], np.float32)
 
-    def _sums(self, planes: Array, taps: Array, dtype: Any) -> Array:
+    def _sums(self, planes: Array, some: Array, dtype: Any) -> Array:
         """Correlations with working planes (planes, h, w), summed in float64."""
         h, w = planes.shape[1:]
         mode: Any = PAD_MODES[self.border]
         padded = [np.pad(plane, self.radius, mode=mode) for plane in planes]
         area = self.size**2
-        some = taps.reshape(-1, area, len(planes)).astype(np.float64)
+        some = some.reshape(-1, area, len(planes)).astype(np.float64)
         out = np.empty((len(some), h, w), dtype)
         step = max(1, BAND_VALUES // (w * area))
         for top in range(0, h, step):
             sums: Array = 0.0
-            for plane, own in zip(padded, np.moveaxis(some, -1, 0), strict=True):
+            for plane, taps in zip(padded, np.moveaxis(some, -1, 0), strict=True):
                 rows = plane[top : min(top + step, h) + 2 * self.radius]
                 view = np.lib.stride_tricks.sliding_window_view(rows, (self.size, self.size))
-                sums = sums + own @ view.reshape(-1, area).T
+                sums = sums + taps @ view.reshape(-1, area).T
             out[:, top : top + step] = sums.reshape(len(some), -1, w)
         return out
 
@@ -471,9 +471,15 @@ class Bank:
             _candidates(strength, turn, about, rules, low, self._rival(image, about, threads))
             for (strength, turn), about in zip(maps, rules["scales"], strict=True)
         ]
+        for k, about in enumerate(rules["scales"]):
+            if about["softer"] is not None:  # soft edges are left to an octave
+                place, share, more = about["softer"]
+                half = math.ceil(float(rules["scales"][place]["sigma_px"]))
+                own, theirs = (_largest_around(maps[n][0], half) for n in (k, place))
+                planes[k][own < np.float32(share) * theirs + np.float32(more)] = 0
         if invalid is not None:
             _drop(planes, _mask(invalid, image), rules)
-        edges, level = _cascade(planes, low, high, int(rules["dilation_px"]))
+        edges, level = _cascade(planes, low, high, [s["apart_px"] for s in rules["scales"]])
         return _joined(maps, [s["scale"] for s in rules["scales"]], edges, level, high)
 
     def _rival(self, image: Array, about: Mapping[str, Any], threads: int) -> Array | None:
@@ -535,6 +541,14 @@ def _checked_rules(given: Mapping[str, Any], bank: Bank) -> dict[str, Any]:
                     int(number(k, 0, len(bank.kernels) - 1)) for k in entry["rival_kernels"]
                 ],
                 "rival_share": number(entry["rival_share"], 0, 4),
+                "softer": None
+                if "softer" not in entry
+                else (
+                    int(number(entry["softer"][0], 0, len(given["scales"]) - 1)),
+                    number(entry["softer"][1], 0, 1),
+                    number(entry["softer"][2], 0, 4),
+                ),
+                "apart_px": int(number(entry.get("apart_px", given["dilation_px"]), 0, 64)),
             }
         )
     if not scales:
@@ -683,12 +697,12 @@ def _dilate(mask: Array, radius: int) -> Array:
     return out
 
 
-def _cascade(planes: list[Array], low: float, high: float, dilation: int) -> tuple[Array, Array]:
+def _cascade(planes: list[Array], low: float, high: float, apart: list[int]) -> tuple[Array, Array]:
     """Finest scale first; a coarser one adds only where finer ones found nothing."""
     edges = _hysteresis(planes[0], low, high)
     level = np.zeros(edges.shape, np.uint8)
     for k, plane in enumerate(planes[1:], 1):
-        more = _hysteresis(plane, low, high) & ~_dilate(edges, dilation)
+        more = _hysteresis(plane, low, high) & ~_dilate(edges, apart[k])
         edges |= more
         level[more] = k
     return edges, level

@@ -26,7 +26,9 @@ def runtime_files(rules: Mapping[str, Any] | None) -> Bundle:
     ----------
     rules : plain data: hysteresis, dilation_px, window_sigmas, and scales with scale,
         angles_rad, sigma_px, reach_px, floor (share of the largest strength around), and
-        rival_kernels with rival_share (share of their largest response around) each; None for
+        rival_kernels with rival_share (share of their largest response around) each, and softer
+        (place of an octave, share of its largest strength around, what comes on top) and apart_px
+        (in place of dilation_px) where there are octaves; None for
         a bank that finds no edges
     """
     source = resources.files("patchlab.export").joinpath(RUNTIME).read_bytes()

@@ -9,6 +9,7 @@ from patchlab.images.coloured import make_colour_images
 from patchlab.images.decode import SUFFIXES, decode, decoder_versions
 from patchlab.images.demo import make_sample_images
 from patchlab.images.develop import ReadOptions
+from patchlab.images.film import FilmPart, film_parts, is_film, read_part
 from patchlab.images.folder import (
     FrameRecord,
     Intake,
@@ -25,6 +26,7 @@ from patchlab.images.sample import SampleSettings, memory_needed, sample, sample
 
 __all__ = [
     "SUFFIXES",
+    "FilmPart",
     "FrameRecord",
     "Intake",
     "Listing",
@@ -34,6 +36,8 @@ __all__ = [
     "SampleSettings",
     "decode",
     "decoder_versions",
+    "film_parts",
+    "is_film",
     "iterate",
     "list_photos",
     "make_brackets",
@@ -43,6 +47,7 @@ __all__ = [
     "one_plane",
     "place",
     "read_file",
+    "read_part",
     "reread",
     "sample",
     "sample_folder",

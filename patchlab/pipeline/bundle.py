@@ -156,10 +156,19 @@ def edge_rules(bank: Bank) -> dict[str, Any] | None:
                 "sigma_px": s.sigma_px,
                 "reach_px": s.reach_px,
                 **_rivals(bank, s),
+                **_octaves(s, softer),
             }
-            for s in shapes
+            for s, softer in zip(shapes, thin.softer_of(shapes, bank.strength), strict=True)
         ],
     }
+
+
+def _octaves(shape: thin.ScaleShape, softer: tuple[int, float] | None) -> dict[str, Any]:
+    """What octaves add to the rules of a scale; nothing in a bank without them."""
+    known: dict[str, Any] = {"apart_px": shape.apart_px} if shape.octave else {}
+    if softer is not None:
+        known["softer"] = [softer[0], softer[1], thin.SOFT_NOISE]
+    return known
 
 
 def _rivals(bank: Bank, shape: thin.ScaleShape) -> dict[str, Any]:

@@ -31,11 +31,10 @@ def edgel_rules(bank: Bank) -> export.EdgelRules | None:
     curve = model.curve_of(bank.table)
     known, of_lines = bank.thresholds, bank.line_thresholds
     return export.EdgelRules(
-        own=tuple(_scale(bank, s, bank.strength) for s in own),
-        lines=tuple(_scale(bank, s, "line") for s in lines),
+        own=_scales(bank, own, bank.strength),
+        lines=_scales(bank, lines, "line"),
         hysteresis=thin.HYSTERESIS if known is None else known.hysteresis,
         line_hysteresis=thin.HYSTERESIS if of_lines is None else of_lines.hysteresis,
-        dilation_px=thin.DILATION_PX,
         light=curve.light,
         value=curve.value,
         clipped=curve.clipped,
@@ -43,10 +42,16 @@ def edgel_rules(bank: Bank) -> export.EdgelRules | None:
         autocovariance=bank.noise_autocovariance,
         blur_px=bank.provenance.get("blur_sigma_px"),
         start_blur_px=locate.BLUR_PX,
-        radii=(locate.RADIUS_PX, locate.NARROW_PX),
         misfit=locate.MISFIT,
         leash_px=locate.LEASH_PX,
+        runaway_px=model.RUNAWAY_PX,
+        soft_noise=thin.SOFT_NOISE,
         iterations=model.ITERATIONS,
+        settled=model.SETTLED,
+        damping=model.DAMPING,
+        kept=model.KEPT,
+        careful=model.CAREFUL,
+        level_rounding=model.LEVEL_ROUNDING,
         asks=model.ASKS,
         largest_step=model.LARGEST_STEP,
         prior=model.PRIOR,
@@ -105,7 +110,18 @@ def _lines(bank: Bank) -> tuple[thin.ScaleShape, ...]:
         return ()
 
 
-def _scale(bank: Bank, shape: thin.ScaleShape, kind: thin.Kind) -> export.EdgelScale:
+def _scales(
+    bank: Bank, shapes: tuple[thin.ScaleShape, ...], kind: thin.Kind
+) -> tuple[export.EdgelScale, ...]:
+    softer = thin.softer_of(shapes, kind)
+    around = [s and (s[0], math.ceil(shapes[s[0]].sigma_px), s[1]) for s in softer]
+    return tuple(_scale(bank, s, kind, a) for s, a in zip(shapes, around, strict=True))
+
+
+def _scale(
+    bank: Bank, shape: thin.ScaleShape, kind: thin.Kind, softer: tuple[int, int, float] | None
+) -> export.EdgelScale:
+    disk = locate.disk_of(shape, locate.RADIUS_PX)
     odd = shape.odd if kind != "line" else ()
     even = shape.even if kind != "step" else ()
     own = thin.RELATIVE_FLOOR if shape.scale > 0 else 0.0
@@ -128,6 +144,11 @@ def _scale(bank: Bank, shape: thin.ScaleShape, kind: thin.Kind) -> export.EdgelS
         rival_of_lines=kind == "step",
         slope_odd=_slopes(bank, odd, shape.angles),
         slope_even=_slopes(bank, even, shape.angles),
+        apart_px=shape.apart_px,
+        radii=(disk.radius, disk.narrow),
+        blur_px=disk.blur_px,
+        slack=disk.slack,
+        softer=softer,
     )
 
 

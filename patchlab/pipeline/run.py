@@ -282,6 +282,7 @@ def choose(
                 kernels=s.kernels,
                 purpose=s.purpose,  # type: ignore[arg-type]  # checked by the settings
                 lines=s.lines,
+                octaves=s.octaves,
                 false_edges=s.false_edges,
                 border=s.border,
                 name=name,
