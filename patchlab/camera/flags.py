@@ -116,13 +116,13 @@ def lone_lines(atoms: F64) -> NDArray[np.bool_]:
     return np.asarray((straight > needed * whole) & (alone | (steps > ROUGH * slow)))
 
 
-def looks(atom: F64) -> str:
-    """A flagged atom in words: where its strongest wave runs, and how long it is.
+def looks(kernel: F64) -> str:
+    """A flagged filter in words: where its strongest wave runs, and how long it is.
 
     >>> looks(np.cos(2 * np.pi * np.arange(16) / 8)[:, None] * np.ones(16))
     'axis-aligned, rows, wavelength 8.0 px'
     """
-    power = np.abs(np.fft.fft2(atom, (WAVES, WAVES)))
+    power = np.abs(np.fft.fft2(kernel, (WAVES, WAVES)))
     y, x = np.unravel_index(int(power.argmax()), power.shape)
     fy, fx = (abs(np.fft.fftfreq(WAVES)[k]) for k in (y, x))
     f = float(np.hypot(fy, fx))

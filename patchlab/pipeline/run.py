@@ -267,7 +267,7 @@ def choose(
     """Choose the kernels and calibrate their thresholds on noise."""
     s = desk.settings
     flagged = marked(dictionary, found, patches)
-    shapes_of = {i: camera.looks(dictionary.atoms[i]) for i, _ in flagged}
+    seen_as = {i: camera.looks(dictionary.filters[i]) for i, _ in flagged}
     if flagged and not s.keep_marked:
         dictionary, fits = _unmarked(dictionary, fits, flagged)
         desk.tell(f"  {len(flagged)} components that describe a mark are kept out of the bank")
@@ -311,7 +311,7 @@ def choose(
         bank = replace(bank, warnings=(*bank.warnings, told))
     if flagged:
         known["marked_components"] = [
-            [i + 1, name, s.keep_marked, shapes_of[i]] for i, name in flagged
+            [i + 1, name, s.keep_marked, seen_as[i]] for i, name in flagged
         ]
     return calibrated(replace(bank, provenance=known), desk)
 

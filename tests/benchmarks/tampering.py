@@ -6,8 +6,6 @@ photograph, reduced (so that what its own camera and file left in it is gone), e
 simulated sensor and, in a tampered folder, given one mark of a stated strength.
 """
 
-from __future__ import annotations
-
 import io
 from collections.abc import Callable
 from dataclasses import dataclass, field, replace

@@ -11,7 +11,7 @@ import pytest
 from patchlab.camera import measure_noise
 from patchlab.camera.marks import MarkMeter
 
-FOLDERS = 3
+FOLDERS = 2
 PLACE = Path(__file__).parents[1] / "benchmarks" / "tampering.py"
 SPEC = importlib.util.spec_from_file_location("tampering", PLACE)
 tampering = importlib.util.module_from_spec(SPEC)
