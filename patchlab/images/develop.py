@@ -45,6 +45,7 @@ class ReadOptions:
     pixel_limit : pictures of more pixels are refused before their pixels are decoded
     raw : what ``.raw`` buffers hold; a sidecar goes before it
     bayer : what is taken of a Bayer sensor: "green", "luminance" or "mosaic"
+    cache : folder where a video's frames are kept once they were decoded, or None
 
     Raises
     ------
@@ -58,6 +59,7 @@ class ReadOptions:
     pixel_limit: float = 200e6
     raw: RawLayout | None = None
     bayer: Plane = "green"
+    cache: str | None = None
 
     def __post_init__(self) -> None:
         if self.transfer not in ("auto", "linear", "srgb"):

@@ -26,6 +26,7 @@ from patchlab.settings import Settings
 from patchlab.workers import usable_cores
 
 ROOMS = ("survey", "patches", "dictionary", "fits", "bank", "report", "assess")
+CACHE = ".frames"
 RECIPE = 2
 """Raised whenever a stage would give another result for the same settings."""
 
@@ -48,6 +49,11 @@ class Desk:
     def jobs(self) -> int:
         """Worker processes."""
         return self.settings.jobs or usable_cores()
+
+    @property
+    def cache(self) -> Path:
+        """Where a video's decoded frames wait for the next pass; gone when the work ends."""
+        return self.out / CACHE
 
     @contextmanager
     def timed(self, stage: str) -> Iterator[None]:
@@ -171,6 +177,7 @@ def _of_a_run(path: Path) -> bool:
 
 def _sweep(out: Path) -> None:
     """Remove what a killed run left half made."""
+    shutil.rmtree(out / CACHE, ignore_errors=True)
     for left in out.glob(".*.*"):
         if left.is_dir() and left.name.split(".")[1] in ROOMS:
             shutil.rmtree(left, ignore_errors=True)

@@ -3,6 +3,7 @@
 from __future__ import annotations
 
 import functools
+import shutil
 from dataclasses import replace
 from pathlib import Path
 from typing import Any
@@ -51,6 +52,7 @@ def take_in(photos: Path, desk: Desk) -> images.Intake:
         pixel_limit=s.pixel_limit,
         raw=raw_layout(s.raw_format, s.raw_width, s.raw_height),
         bayer=s.bayer,  # type: ignore[arg-type]  # checked by the settings
+        cache=str(desk.cache),
     )
     with desk.timed("reading"):
         intake = images.take_in(
@@ -367,6 +369,16 @@ def work(photos: Path, desk: Desk, until: str = "run") -> dict[str, Any]:
     ------
     InputError, UsageError, Interrupted : finished stages are kept.
     """
+    stood = desk.out.exists()
+    try:
+        return _work(photos, desk, until)
+    finally:
+        shutil.rmtree(desk.cache, ignore_errors=True)
+        if not stood and desk.out.is_dir() and not any(desk.out.iterdir()):
+            desk.out.rmdir()
+
+
+def _work(photos: Path, desk: Desk, until: str) -> dict[str, Any]:
     if until == "run":
         parse_targets(desk.settings.target)  # what cannot be built is said before the work
     intake = take_in(photos, desk)
