@@ -27,7 +27,7 @@ from patchlab.workers import usable_cores
 
 ROOMS = ("survey", "patches", "dictionary", "fits", "bank", "report", "assess")
 CACHE = ".frames"
-RECIPE = 2
+RECIPE = 3
 """Raised whenever a stage would give another result for the same settings."""
 
 
