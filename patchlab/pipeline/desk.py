@@ -25,8 +25,8 @@ from patchlab.progress import Progress, silent
 from patchlab.settings import Settings
 from patchlab.workers import usable_cores
 
-ROOMS = ("survey", "patches", "dictionary", "fits", "bank", "report", "assess")
 CACHE = ".frames"
+ROOMS = ("survey", "patches", "dictionary", "fits", "bank", "report", "assess")
 RECIPE = 3
 """Raised whenever a stage would give another result for the same settings."""
 
