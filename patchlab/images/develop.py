@@ -49,6 +49,7 @@ class ReadOptions:
     bayer : what is taken of a Bayer sensor: "green", "luminance" or "mosaic"
     planes : "luminance" makes one plane of every picture; "colour" keeps its colours (then a
         Bayer sensor's pixels are its cells, and ``bayer`` has no say)
+    cache : folder where a video's frames are kept once they were decoded, or None
 
     Raises
     ------
@@ -63,6 +64,7 @@ class ReadOptions:
     raw: RawLayout | None = None
     bayer: Plane = "green"
     planes: Planes = "luminance"
+    cache: str | None = None
 
     def __post_init__(self) -> None:
         if self.transfer not in ("auto", "linear", "srgb"):

@@ -10,6 +10,7 @@ import importlib
 import io
 from bisect import bisect_left
 from collections.abc import Iterator
+from dataclasses import dataclass
 from pathlib import Path
 from typing import Any
 
@@ -19,11 +20,14 @@ from numpy.typing import NDArray
 from patchlab.errors import InputError
 from patchlab.images.develop import Picture, ReadOptions, check_size
 from patchlab.images.pfnc import PATTERNS
+from patchlab.store import sha256, write_file
 
 RAW_SUFFIXES = frozenset((".dng", ".nef", ".cr2", ".cr3", ".arw", ".raf", ".orf", ".rw2", ".pef"))
 VIDEO_SUFFIXES = frozenset((".mp4", ".avi", ".mov", ".mkv", ".webm"))
 VIDEO_FRAMES = 32
 """Most frames of one video that are used, evenly spread."""
+CACHE_LIMIT = 4 << 30
+"""Bytes of decoded frames that a cache holds at most; further videos are decoded anew."""
 
 
 def _package(name: str, extra: str) -> Any:
@@ -82,22 +86,100 @@ _GREY = {"gray": 255, "gray10le": 1023, "gray12le": 4095, "gray16le": 65535}
 def read_video(data: bytes, options: ReadOptions) -> list[Picture]:
     """At most 32 frames of a video's first stream, evenly spread.
 
-    Grey streams keep their codes and are linear; colour streams come as 8-bit sRGB.
+    Grey streams keep their codes and are linear; colour streams come as 8-bit sRGB. Where the
+    options name a cache, the frames are decoded once and then taken from there.
     """
+    kept = None if options.cache is None else _Cached.find(Path(options.cache), data)
+    if kept is None:
+        kept = _decoded(data, options)
+        if options.cache is not None:
+            kept.keep(Path(options.cache), data)
+    return kept.pictures
+
+
+@dataclass(frozen=True, eq=False)
+class _Cached:
+    """The frames of a video that are used.
+
+    Parameters
+    ----------
+    frames : ndarray (n, h, w) or (n, h, w, 3)
+    numbers : ndarray (n,), places in the video
+    total : frames in all
+    kind : the stream's pixel format
+    """
+
+    frames: NDArray[Any]
+    numbers: NDArray[np.int64]
+    total: int
+    kind: str
+
+    @property
+    def pictures(self) -> list[Picture]:
+        """As decoded pictures."""
+        top = _GREY.get(self.kind, 255)
+        more = () if self.kind in _GREY else (f"{self.kind} brought to 8-bit RGB",)
+        return [
+            Picture(
+                frame, top, coded=self.kind not in _GREY,
+                notes=(f"frame {k + 1} of {self.total} of a video", *more),
+            )
+            for k, frame in zip(self.numbers.tolist(), self.frames, strict=True)
+        ]  # fmt: skip
+
+    @classmethod
+    def find(cls, cache: Path, data: bytes) -> _Cached | None:
+        """The frames that are kept of a video, or None."""
+        try:
+            with np.load(_place(cache, data), allow_pickle=False) as held:
+                return cls(held["frames"], held["numbers"], int(held["total"]), str(held["kind"]))
+        except (OSError, ValueError, KeyError):
+            return None
+
+    def keep(self, cache: Path, data: bytes) -> None:
+        """Keep the frames while the cache stays below its limit; a full disk is no failure."""
+        place = _place(cache, data)
+        try:
+            held = sum(p.stat().st_size for p in cache.iterdir()) if cache.is_dir() else 0
+            if held + self.frames.nbytes > CACHE_LIMIT:
+                return
+            buffer = io.BytesIO()
+            np.savez(
+                buffer, frames=self.frames, numbers=self.numbers, total=self.total, kind=self.kind
+            )
+            write_file(place, buffer.getvalue())
+        except OSError:
+            place.unlink(missing_ok=True)
+
+
+def _place(cache: Path, data: bytes) -> Path:
+    return cache / f"{sha256(data)}.npz"
+
+
+def _decoded(data: bytes, options: ReadOptions) -> _Cached:
+    """Decode a video once; how many frames there are is told by its packets."""
     av = _package("av", "video")
     with av.open(io.BytesIO(data)) as film:
         if not film.streams.video:
             raise InputError("the file holds no video")
-        total = sum(1 for _ in film.decode(video=0))
-    if not total:
-        raise InputError("the video holds no frame")
-    kept = {int(k * max(total / VIDEO_FRAMES, 1)) for k in range(min(total, VIDEO_FRAMES))}
+        total = sum(1 for packet in film.demux(video=0) if packet.size)
+    wanted = {int(k * max(total / VIDEO_FRAMES, 1)) for k in range(min(total, VIDEO_FRAMES))}
+    frames, numbers, kind = [], [], ""
     with av.open(io.BytesIO(data)) as film:
-        return [
-            _video_frame(frame, k, total, options)
-            for k, frame in enumerate(film.decode(video=0))
-            if k in kept
-        ]
+        for k, frame in enumerate(film.decode(video=0)):
+            if k in wanted:
+                check_size(frame.width, frame.height, options)
+                kind = frame.format.name
+                grey = kind in _GREY
+                frames.append(frame.to_ndarray() if grey else frame.to_ndarray(format="rgb24"))
+                numbers.append(k)
+            if len(frames) == len(wanted):
+                break
+    if not frames:
+        raise InputError("the video holds no frame")
+    if len({f.shape for f in frames}) > 1:
+        raise InputError("the frames of the video differ in size")
+    return _Cached(np.stack(frames), np.array(numbers), total, kind)
 
 
 def _video_frame(frame: Any, number: int, total: int, options: ReadOptions) -> Picture:

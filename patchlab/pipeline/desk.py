@@ -26,6 +26,7 @@ from patchlab.progress import Progress, silent
 from patchlab.settings import Settings
 from patchlab.workers import usable_cores
 
+CACHE = ".frames"
 ROOMS = ("parts", "survey", "patches", "dictionary", "fits", "bank", "report", "assess")
 MAPPED = ("patches",)
 """Artefacts that are mapped into memory, for they may be larger than it."""
@@ -54,6 +55,11 @@ class Desk:
         if farm is not None:
             return max(farm.workers, 2)  # even one of it is elsewhere
         return self.settings.jobs or usable_cores()
+
+    @property
+    def cache(self) -> Path:
+        """Where a video's decoded frames wait for the next pass; gone when the work ends."""
+        return self.out / CACHE
 
     @contextmanager
     def timed(self, stage: str) -> Iterator[None]:
@@ -178,6 +184,7 @@ def _of_a_run(path: Path) -> bool:
 
 def _sweep(out: Path) -> None:
     """Remove what a killed run left half made."""
+    shutil.rmtree(out / CACHE, ignore_errors=True)
     for left in out.glob(".*.*"):
         if left.is_dir() and left.name.split(".")[1] in ROOMS:
             shutil.rmtree(left, ignore_errors=True)

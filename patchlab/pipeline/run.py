@@ -3,6 +3,7 @@
 from __future__ import annotations
 
 import functools
+import shutil
 from dataclasses import replace
 from typing import Any
 
@@ -52,6 +53,7 @@ def take_in(photos: images.Place, desk: Desk) -> images.Intake:
         raw=raw_layout(s.raw_format, s.raw_width, s.raw_height),
         bayer=s.bayer,  # type: ignore[arg-type]  # checked by the settings
         planes=s.planes,  # type: ignore[arg-type]  # checked by the settings
+        cache=str(desk.cache),
     )
     with desk.timed("reading"):
         intake = images.take_in(
@@ -397,8 +399,14 @@ def work(photos: images.Place, desk: Desk, until: str = "run") -> dict[str, Any]
     if until == "run":
         parse_targets(desk.settings.target)  # what cannot be built is said before the work
         chosen_costs(desk.settings)
-    with cluster.using(desk.settings.cluster, desk.jobs):
-        return _work(photos, desk, until)
+    stood = desk.out.exists()
+    try:
+        with cluster.using(desk.settings.cluster, desk.jobs):
+            return _work(photos, desk, until)
+    finally:
+        shutil.rmtree(desk.cache, ignore_errors=True)
+        if not stood and desk.out.is_dir() and not any(desk.out.iterdir()):
+            desk.out.rmdir()
 
 
 def _work(photos: images.Place, desk: Desk, until: str) -> dict[str, Any]:

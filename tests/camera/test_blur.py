@@ -125,3 +125,13 @@ def test_a_slanted_edge_must_be_there_and_slanted():
     straight[:, 30:] = 0.8
     with pytest.raises(InputError, match="tilt"):
         slanted_edge(Frame("straight", straight, contract))
+
+
+def test_a_photograph_of_a_scene_is_no_chart(bench):
+    # lines through the middles of its rows exist, but no row's edge lies on them
+    contract = bench.contract(8)
+    for name in ("astronaut.png", "coffee.png", "motorcycle_left.png"):
+        frame = bench.frame(bench.expose(bench.light(name), contract, 0.5, 1.0, 1), contract, name)
+        with pytest.raises(InputError, match=r"no single straight edge|no edge runs") as refused:
+            slanted_edge(frame)
+        assert refused.value.where == name

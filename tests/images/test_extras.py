@@ -9,7 +9,7 @@ import pytest
 import tifffile
 
 from patchlab.errors import InputError
-from patchlab.images import ReadOptions, decode, iterate, list_photos, take_in
+from patchlab.images import ReadOptions, decode, extras, iterate, list_photos, read_file, take_in
 
 BLACK, WHITE = 64, 1023
 
@@ -119,6 +119,34 @@ def test_a_long_video_is_thinned_evenly_and_colour_is_srgb():
     assert [int(f.pixels[0, 0]) for f in frames[:4]] == [40, 44, 50, 54]
     assert frames[0].contract.transfer == "srgb"
     assert frames[1].notes[0] == "frame 3 of 80 of a video"
+
+
+def test_a_video_is_decoded_once_where_there_is_a_cache(tmp_path, monkeypatch):
+    rng = np.random.default_rng(8)
+    grey = [rng.integers(0, 4096, (48, 64)).astype(np.uint16) for _ in range(6)]
+    colour = [rng.integers(0, 256, (32, 48, 3)).astype(np.uint8) for _ in range(4)]
+    (tmp_path / "v").mkdir()
+    (tmp_path / "v/a.mkv").write_bytes(film(grey, "ffv1", "gray12le", "gray12le"))
+    (tmp_path / "v/b.mkv").write_bytes(film(colour, "ffv1", "bgr0", "rgb24"))
+    told, decoded = [], extras._decoded
+    monkeypatch.setattr(extras, "_decoded", lambda *a: told.append(1) or decoded(*a))
+    options = {
+        name: ReadOptions(cache=c) for name, c in (("no", None), ("yes", str(tmp_path / "c")))
+    }
+    reads = [
+        [read_file(tmp_path / "v", name, options[which]) for name in ("a.mkv", "b.mkv")]
+        for which in ("no", "yes", "yes")
+    ]
+    assert len(told) == 4  # the third reading decoded nothing
+    for plain, *others in zip(*reads, strict=True):
+        for other in others:
+            assert [f.path for f in other] == [f.path for f in plain]
+            for one, two in zip(plain, other, strict=True):
+                assert np.array_equal(one.pixels, two.pixels)
+                assert (one.contract, one.notes) == (two.contract, two.notes)
+    monkeypatch.setattr(extras, "CACHE_LIMIT", 0)
+    read_file(tmp_path / "v", "a.mkv", ReadOptions(cache=str(tmp_path / "full")))
+    assert not (tmp_path / "full").exists()
 
 
 def test_a_file_that_is_no_video_is_put_aside():
