@@ -487,6 +487,7 @@ def test_the_library_shows_only_its_own_names(compiled, tmp_path):
         for word in (
             "abi", "kernel_count", "kernel_name", "scale_count", "message", "scratch_bytes",
             "responses", "responses_rows", "edges", "edges_rows", "q_step",
+            "edges_all", "edges_all_rows", "edges_above", "edges_above_rows",
             "responses_q", "responses_q_rows", "edges_q", "edges_q_rows",
         )
     }  # fmt: skip
@@ -649,6 +650,8 @@ def test_the_selftest_tries_every_code_and_every_output():
         "bands and strides give the same bits",
         "strength equals the reference",
         "edges in bands and strides give the same bits",
+        "edges above a threshold are those that are found without",
+        "all scales in one pass give the same bits",
         "a wide picture of repetitions gives repetitions",
     ):
         assert len(re.findall(rf"^ok +\w+: {words}", output, re.MULTILINE)) >= 3, words
