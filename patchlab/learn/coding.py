@@ -19,7 +19,7 @@ from patchlab.types import F64
 
 ROUGH = 1e-4
 """Tolerance down to which float32 rows are coded by coordinate descent alone."""
-COARSE = 8e-3
+COARSE = 6e-3
 """Tolerance at which descent hands over to exact steps, where more is asked for."""
 CODES = 1024
 """Patches that are coded together."""

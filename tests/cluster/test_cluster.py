@@ -164,8 +164,9 @@ def test_blocks_that_die_with_their_worker_are_sent_again(address):
     with cluster.using(address):
         assert known(np.eye(5)).value == alone
         held = cluster.current()._held[known.rows]
-        before = [f.key for f in held.futures]
-        kill_one(address)
+        before, client = [f.key for f in held.futures], cluster.current()._client
+        ((holder, *_),) = client.who_has(held.futures[:1]).values()
+        os.kill(client.run(os.getpid, workers=[holder])[holder], signal.SIGKILL)
         assert known(np.eye(5)).value == alone
         assert [f.key for f in held.futures] != before
         del held, known
