@@ -108,7 +108,7 @@ def opponent_mix(colours: str, sample_noise: F64 | None = None) -> tuple[tuple[s
     if sorted(colours) != ["B", "G", "R"]:
         raise UsageError(
             f"opponent planes need samples R, G and B, not {colours or 'one plane'}",
-            remedy="export the filters as they were learned (--as-learned)",
+            remedy="the samples of a mosaic lie in four places: see mosaic_bank",
         )
     sd = np.ones(3) if sample_noise is None or not sample_noise.size else sample_noise
     place = ["RGB".index(letter) for letter in colours]

@@ -266,7 +266,7 @@ def answer(taps, cells):
 
 
 def test_mosaics_have_no_opponent_planes():
-    with pytest.raises(UsageError, match="as-learned"):
+    with pytest.raises(UsageError, match="mosaic_bank"):
         opponent_mix("RGGB")
 
 

@@ -115,12 +115,17 @@ def test_a_mosaic_is_learned_in_cells_and_exported_as_learned(tmp_path):
             mosaic[row::2, column::2] = codes[row::2, column::2, "RGB".index(letter)]
         (photos / f"{k}.raw").write_bytes(mosaic.tobytes())
     (photos / "raw.toml").write_text('format = "BayerRG8"\nwidth = 140\nheight = 120\n')
-    words = ("run", photos, "-o", tmp_path / "run", "--planes", "colour", *QUICK)
-    told = json.loads(invoke(*words, "--as-learned", "--no-library", "--force", "--json"))
-    bank = load_bank(tmp_path / "run")
+    told = json.loads(invoke("run", photos, "-o", tmp_path / "run", "--planes", "colour",
+                             "--kernels", "4", "--no-library", *QUICK, "--json"))  # fmt: skip
     assert told["bank"]["kernels"] == 12
-    assert bank.bank.contract.pixels == "BayerRG8"
-    assert bank.responses(mosaic).shape == (12, 60, 70)
+    assert told["bank"]["worst_error"] <= told["bank"]["error_bound"]
+    edges = load_bank(tmp_path / "run")
+    assert edges.bank.contract.pixels == "BayerRG8"
+    assert edges.responses(mosaic).shape == (12, 60, 70)
+    invoke("export", tmp_path / "run", "-o", tmp_path / "own", "--as-learned", "--no-library")
+    own = load_bank(tmp_path / "own").bank
+    assert own.purpose == "learned"
+    assert own.taps.shape == (12, 9, 9, 4)
 
 
 def test_frames_to_try_colour_on_are_rendered(tmp_path):
@@ -129,6 +134,6 @@ def test_frames_to_try_colour_on_are_rendered(tmp_path):
     assert told["frames"] == 1
     note = (tmp_path / "m" / "NOTE.md").read_text()
     assert note.startswith("# Sample images")
-    assert "--as-learned" in note
+    assert "--planes colour" in note
     assert (tmp_path / "m" / "wall-01.raw").stat().st_size == 360 * 480
     assert 'format = "BayerRG8"' in (tmp_path / "m" / "raw.toml").read_text()
