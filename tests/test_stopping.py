@@ -92,6 +92,36 @@ def test_ctrl_c_again_ends_it_whatever_it_does(notice, swallow, answers):
     assert said == "patchlab: stopped at once; finished stages are kept\n"
 
 
+LEAVING = """
+import sys, time
+import patchlab.cli
+from patchlab.errors import Interrupted
+from patchlab.workers import map_ordered
+def call(stop):
+    stop.notice = lambda: None
+    busy = map_ordered(time.sleep, [0, 0, 90, 90], jobs=2)
+    next(busy), next(busy)
+    print("here", flush=True)
+    while not stop.asked:
+        time.sleep(0.01)
+    busy.close()
+    raise Interrupted("stopped during sleep")
+patchlab.cli._call = call
+sys.argv = ["patchlab"]
+patchlab.cli.main()
+"""
+
+
+def test_ctrl_c_again_does_not_wait_for_workers_once_all_is_said():
+    process = child(LEAVING)
+    process.send_signal(signal.SIGINT)
+    assert process.stderr.readline() == "patchlab: stopped during sleep\n"
+    time.sleep(0.5)  # most often it waits for its workers by then; either way it ends
+    process.send_signal(signal.SIGINT)
+    process.communicate(timeout=60)  # the workers sleep for longer
+    assert process.returncode == 130
+
+
 def test_sigterm_ends_a_run_in_good_order_and_tells_the_command_as_typed(tmp_path):
     photos, out = tmp_path / "my photos", tmp_path / "an out"
     make_sample_images(photos, 6)

@@ -82,7 +82,7 @@ class Samples:
         )
 
 
-def _bands(region: Region) -> tuple[F32, F32, F32]:
+def noise_bands(region: Region) -> tuple[F32, F32, F32]:
     """Diagonal band squared, level, and structure power (noise variance in white noise)."""
     codes = region.codes
     power = np.zeros_like(codes)
@@ -98,7 +98,7 @@ def _bands(region: Region) -> tuple[F32, F32, F32]:
     return diagonal_band(codes) ** 2, level, structure
 
 
-def _mask_gains(acov: F64) -> tuple[float, float]:
+def mask_gains(acov: F64) -> tuple[float, float]:
     """Mean square of the diagonal band and of the structure band for noise of unit variance."""
     size = 64
     spectrum = np.zeros((size, size))
@@ -134,7 +134,7 @@ class NoiseMeter:
         found = list(regions(frame))
         for region in found:
             region = replace(region, codes=(region.codes - frame.contract.black) * scale)
-            band, level, structure = _bands(region)
+            band, level, structure = noise_bands(region)
             at = draw(region, region.usable, MAX_SAMPLES // len(found))
             self._samples.append(Samples(band.flat[at], level.flat[at], structure.flat[at]))
             blocks, looked = flat_blocks(region)
@@ -323,7 +323,7 @@ def _law(
     fit = _consistent(samples, _limits(contract), bent)
     acov = flat.autocovariance
     if acov is not None and _neighbours(acov) < SHARP:
-        fit = _consistent(samples.scaled(_mask_gains(acov)), _limits(contract), bent)
+        fit = _consistent(samples.scaled(mask_gains(acov)), _limits(contract), bent)
         reason = _doubt(contract, fit, grid)
         if not reason:
             return replace(model(contract, fit), autocovariance=acov, **NO_ELECTRONS)

@@ -25,6 +25,7 @@ def main(argv: Sequence[str] | None = None) -> None:
         sys.stdout.flush()
         sys.stderr.flush()
         os._exit(code)
+    stop.leaving = True  # the interpreter waits for workers that are at a task
     sys.exit(code)
 
 

@@ -341,6 +341,66 @@ def _say_verify(result: dict[str, Any]) -> None:
 
 @patchlab.command()
 @click.argument("bank", type=FOLDER)
+@click.argument("photos", type=FOLDER)
+@click.option("--false-edges", type=float, default=10.0, help="The rate that production asks for.")
+@click.option("--max-bad", type=float, default=0.1, help="Share of bad files that is let pass.")
+@click.option("--jobs", type=click.IntRange(0, 1024), default=0, help="Worker processes; 0: all.")
+@_shared
+def drift(bank: Path, photos: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
+    """Tell whether new PHOTOS still come from the camera that a BANK was made for.
+
+    Surveys them as the first ones were, and holds noise, blur and marks against the bank.
+    Exit 5 when the camera has drifted, 3 when the photographs cannot tell.
+    """
+    from patchlab.pipeline.drift import drift as measured
+    from patchlab.workers import usable_cores
+
+    with terminal.working():
+        result = measured(
+            bank,
+            photos,
+            rate=options["false_edges"],
+            max_bad=options["max_bad"],
+            jobs=options["jobs"] or usable_cores(),
+            progress=terminal,
+        )
+    for bad in result["frames"]["quarantined"]:
+        terminal.warn(f"{bad['path']}: {bad['reason']}")
+    _print(result, as_json, _say_drift)
+    named = ", ".join(c["name"] for c in result["changes"] if c["verdict"] == result["verdict"])
+    if result["verdict"] == "drifted":
+        raise VerificationError(
+            f"the camera has drifted from its bank ({named})",
+            where=str(bank),
+            remedy="look at the camera and its light; if the change is to stay, run anew",
+        )
+    if result["verdict"] == "cannot tell":
+        raise InputError(
+            f"these photographs cannot tell whether the camera has drifted ({named})",
+            where=str(photos),
+            remedy="take ten or more, sharp, with flat areas, at the bank's setting",
+        )
+
+
+def _say_drift(result: dict[str, Any]) -> None:
+    def told(value: float | None) -> str:
+        return "" if value is None else f"{value:.3g}"
+
+    table(
+        [
+            (c["name"], c["unit"], told(c["before"]), told(c["now"]), c["verdict"], c["note"])
+            for c in result["changes"]
+        ],
+        ("what", "unit", "bank", "now", "verdict", "note"),
+    )
+    if result["false_edges"]["now"] is not None:
+        asked, now = (result["false_edges"][k] for k in ("asked", "now"))
+        click.echo(f"\nfalse edges per megapixel at the setting for {asked:g}: about {now:.3g} now")
+    click.echo(f"verdict: {result['verdict']}")
+
+
+@patchlab.command()
+@click.argument("bank", type=FOLDER)
 @click.argument("pictures", type=FOLDER)
 @click.option("-o", "--out", type=FOLDER, required=True, help="Folder for maps and edgels.")
 @click.option("--false-edges", type=float, help="False elements per megapixel of flat area.")

@@ -26,7 +26,8 @@ class Stop:
     While ``notice`` is set a step is at work that looks at ``asked`` with each of its
     reports: the first signal calls ``notice`` and the step ends in good order. Without
     one, and from the second Ctrl-C on, the signal raises KeyboardInterrupt; the
-    third Ctrl-C ends the process whatever it does.
+    third Ctrl-C ends the process whatever it does. Once all is said and only workers are
+    waited for (``leaving``), the second one does.
 
     Parameters
     ----------
@@ -40,6 +41,7 @@ class Stop:
         self.notice: Callable[[], None] | None = None
         self.ending = False
         self.at_once = False
+        self.leaving = False
         self._times = 0
 
     @property
@@ -69,7 +71,7 @@ class Stop:
             return  # sent to a process and to its group, it comes twice
         self.asked = self.asked or number
         self._times += 1
-        if self._times > 2:
+        if self._times > 2 or (self._times == 2 and self.leaving):
             self._end_now()
         if self.ending:
             return

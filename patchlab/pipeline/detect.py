@@ -88,14 +88,15 @@ def _work(task: _Task) -> dict[str, Any]:
         "frames": [],
     }
     try:
-        for frame in images.read_file(Path(task.root), task.file, _options(bank)):
+        for frame in images.read_file(Path(task.root), task.file, read_options(bank)):
             line["frames"].append(_one(bank, frame, respond, task))
     except PatchlabError as error:
         line["reason"] = str(error)
     return line
 
 
-def _options(bank: Bank) -> images.ReadOptions:
+def read_options(bank: Bank) -> images.ReadOptions:
+    """How pictures for a bank are read: as its input contract says."""
     c = bank.contract
     known = images.ReadOptions(
         white=c.white,

@@ -297,7 +297,11 @@ def choose(
             if dictionary.planes > 1:
                 cells = found.contract.format.cell > 1
                 bank = (banks.mosaic_bank if cells else banks.colour_bank)(bank, found)
-    known = {**bank.provenance, "blur_sigma_px": found.blur_sigma_px}
+    known = {
+        **bank.provenance,
+        "blur_sigma_px": found.blur_sigma_px,
+        "marks": [m.name for m in found.marks if m.found],
+    }
     if found.contract.lattice > 1:
         told = (
             "learned on a Bayer mosaic: a kernel sees the colours as it learned them only where "
