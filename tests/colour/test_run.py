@@ -81,7 +81,8 @@ def test_edges_of_colour_frames_are_found_and_drawn(run, frames, tmp_path):
     told = json.loads(invoke(*words, *asked, "--json"))
     assert told["images"][0]["edgels"] > 100
     assert (tmp_path / "edges" / "overlay" / "0.png.png").stat().st_size > 1000
-    assert "takes" in str(invoke("bench", out / "bank", code=1))
+    for words in (("bench", out / "bank"), ("assess", out), ("drift", out, frames)):
+        assert f"{words[0]} takes banks of one plane" in str(invoke(*words, code=1))
 
 
 def test_the_runtime_takes_a_picture_with_its_colours(run, frames):
