@@ -2,7 +2,7 @@
 
 from patchlab.bank.apply import responses, strength
 from patchlab.bank.choose import BankSettings, choose_bank, compare_banks
-from patchlab.bank.colour import colour_bank, colour_bank_as_learned, one_plane
+from patchlab.bank.colour import colour_bank, colour_bank_as_learned, mosaic_bank, one_plane
 from patchlab.bank.disk import bank_files, read_bank, write_bank
 from patchlab.bank.given import bank_as_learned, bank_from_taps
 from patchlab.bank.native import NativeBank, load_native
@@ -25,6 +25,7 @@ __all__ = [
     "exact_strength",
     "load_native",
     "make_plan",
+    "mosaic_bank",
     "one_plane",
     "read_bank",
     "responses",

@@ -12,11 +12,12 @@ from dataclasses import replace
 import numpy as np
 
 from patchlab.bank.given import bank_as_learned
-from patchlab.bank.lattice import exact_taps, unit_noise
-from patchlab.bank.planes import coloured, opponent_mix
-from patchlab.conventions import DEFAULT_BORDER
+from patchlab.bank.lattice import exact_taps, impulse_response, step_response, unit_noise
+from patchlab.bank.planes import AXES, coloured, opponent_mix, weights
+from patchlab.conventions import DEFAULT_BORDER, rgb_weights
 from patchlab.errors import UsageError
-from patchlab.types import F32, F64, Bank, Dictionary, KernelFits, Survey
+from patchlab.families import render, without_dc
+from patchlab.types import F32, F64, Bank, Dictionary, Kernel, KernelFits, Survey
 
 
 def relative_noise(survey: Survey) -> F64 | None:
@@ -78,6 +79,65 @@ def colour_bank(lattice: Bank, survey: Survey) -> Bank:
     )
 
 
+def mosaic_bank(lattice: Bank, survey: Survey) -> Bank:
+    """The kernels of a lattice bank on the cells of a Bayer sensor: grey and two opponent sets.
+
+    A sample does not lie in its cell's middle, so a kernel is drawn anew for every sample, where
+    that one lies. An edge without colour then looks the same to all four, and the opponent
+    kernels, whose weights add up to nothing, answer to it by what the sampling aliases alone: 2 %
+    of the grey answer for kernels of 0.9 cells and a blur of 0.8 samples, 6 % for 0.7 cells.
+
+    Parameters
+    ----------
+    lattice : Bank of one plane of cells
+    survey : of the mosaics: their contract, table and the noise of their samples
+
+    Returns
+    -------
+    Bank : as :func:`colour_bank`, with a tap for each sample; widths and places are in cells
+    """
+    noise = relative_noise(survey)
+    sd = np.ones(survey.contract.format.planes) if noise is None else noise
+    colours = survey.contract.format.colours
+    rows = weights(np.array(list(AXES.values())) @ rgb_weights(colours), sd)
+    gain = (survey.noise.autocovariance, survey.table.noise_sd or None)
+    count, kernels, taps = len(lattice.scales), [], []
+    for m, (name, row) in enumerate(zip(("grey", *AXES), rows, strict=True)):
+        for k in lattice.kernels:
+            planes = unit_noise(_on_samples(k, lattice.size, row) * sd, *gain)
+            exact = np.stack([exact_taps(p) for p in np.moveaxis(planes, -1, 0)], axis=-1)
+            step = step_response(exact.sum(axis=-1), k.parameters["theta_rad"])
+            scale = None if k.scale is None else k.scale + m * count
+            own = step if k.parity == "odd" else impulse_response(exact)
+            kernels.append(replace(k, name=f"{name}_{k.name}", scale=scale, gain=own))
+            taps.append(exact)
+    return replace(
+        lattice,
+        kernels=tuple(kernels),
+        taps=np.ascontiguousarray(np.stack(taps)),
+        table=survey.table,
+        mix=_equal_noise(noise),
+        provenance={**lattice.provenance, "sets": ["grey", *AXES]},
+    )
+
+
+def _on_samples(kernel: Kernel, size: int, row: F64) -> F64:
+    """A kernel over the samples of cells, (size, size, 4): each drawn where its sample lies."""
+    planes = []
+    for sample, weight in enumerate(row):
+        y, x = ((place - 0.5) / 2 for place in divmod(sample, 2))
+        at = {**kernel.parameters, "x_px": -x, "y_px": -y}
+        planes.append(weight * without_dc(render(kernel.family, at, size)))
+    return np.stack(planes, axis=-1)
+
+
+def _equal_noise(noise: F64 | None) -> F32 | None:
+    """The mix that brings all samples to one noise; None where they have it already."""
+    if noise is None or np.allclose(noise, 1.0, atol=1e-6):
+        return None
+    return np.diag(1 / noise).astype(np.float32)
+
+
 def colour_bank_as_learned(
     dictionary: Dictionary,
     survey: Survey,
@@ -111,9 +171,8 @@ def colour_bank_as_learned(
     if filters.shape[1] % 2 == 0:
         filters = np.pad(filters, ((0, 0), (0, 1), (0, 1), (0, 0)))
     noise, covariance = relative_noise(survey), survey.noise.autocovariance
-    mix: F32 | None = None
-    if noise is not None and not np.allclose(noise, 1.0, atol=1e-6):
-        mix = np.diag(1 / noise).astype(np.float32)
+    mix = _equal_noise(noise)
+    if mix is not None and noise is not None:
         filters = filters * noise  # in the mixed planes the same filter
     sd = survey.table.noise_sd if survey.table.noise_sd else None
     taps = np.stack(

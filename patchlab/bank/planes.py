@@ -108,18 +108,33 @@ def opponent_mix(colours: str, sample_noise: F64 | None = None) -> tuple[tuple[s
     if sorted(colours) != ["B", "G", "R"]:
         raise UsageError(
             f"opponent planes need samples R, G and B, not {colours or 'one plane'}",
-            remedy="export the filters as they were learned (--as-learned)",
+            remedy="the samples of a mosaic lie in four places: see mosaic_bank",
         )
     sd = np.ones(3) if sample_noise is None or not sample_noise.size else sample_noise
-    covariance = np.diag(np.asarray(sd, dtype=np.float64) ** 2)
-    rows = [np.linalg.solve(covariance, np.ones(3))]
-    for axis in AXES.values():
-        row = np.array([axis["RGB".index(letter)] for letter in colours])
+    place = ["RGB".index(letter) for letter in colours]
+    return ("grey", *AXES), _blind(weights(np.array(list(AXES.values()))[:, place], sd))
+
+
+def weights(opponents: F64, sample_noise: F64) -> F64:
+    """Weights of the samples for grey, then for each opponent, of unit noise and uncorrelated.
+
+    Parameters
+    ----------
+    opponents : ndarray (n, samples), each adding up to zero, taken in order
+    sample_noise : ndarray (samples,), standard deviations
+
+    Returns
+    -------
+    ndarray (1 + n, samples)
+    """
+    covariance = np.diag(np.asarray(sample_noise, dtype=np.float64) ** 2)
+    rows = [np.linalg.solve(covariance, np.ones(len(covariance)))]
+    for opponent in opponents:
+        row = opponent
         for before in rows[1:]:
             row = row - before * (row @ covariance @ before) / (before @ covariance @ before)
         rows.append(row)
-    unit = np.array([row / np.sqrt(row @ covariance @ row) for row in rows])
-    return ("grey", *AXES), _blind(unit)
+    return np.array([row / np.sqrt(row @ covariance @ row) for row in rows])
 
 
 def _blind(rows: F64) -> F32:

@@ -152,9 +152,8 @@ They are dedicated to the public domain under CC0 1.0; use them for anything.
 """
 WAYS = {
     "RGB8": ("red, green and blue in every pixel", "--planes colour --transfer linear"),
-    "BayerRG8": ("one sample a place, red and green over green and blue", "--planes colour "
-                 "--as-learned"),
-}  # fmt: skip
+    "BayerRG8": ("one sample a place, red and green over green and blue", "--planes colour"),
+}
 """Pixels of frames to try colour on, with what a reader of them needs to know."""
 
 

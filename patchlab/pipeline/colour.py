@@ -27,18 +27,13 @@ def check(contract: InputContract, settings: Settings) -> None:
 
     Raises
     ------
-    UsageError : edge kernels on a mosaic, or the WebAssembly loader, which takes one plane.
+    UsageError : the WebAssembly loader, which takes one plane.
     """
     form = contract.format
     if form.planes > 1 and "wasm32" in settings.target.split(","):
         raise UsageError(
             "the loader of the WebAssembly module takes pictures of one plane",
             remedy="leave wasm32 out of --target, or add --planes luminance",
-        )
-    if form.cell > 1 and not settings.as_learned:
-        raise UsageError(
-            "an edge bank needs the colours of a pixel in one place, and a mosaic has them in four",
-            remedy="add --as-learned for the learned filters, or take --planes luminance",
         )
 
 

@@ -15,7 +15,7 @@ from patchlab import bank as banks
 from patchlab import camera, edges, images
 from patchlab.errors import InputError
 from patchlab.pipeline.detect import read_options
-from patchlab.pipeline.loaded import bank_folder
+from patchlab.pipeline.loaded import bank_folder, need_one_plane
 from patchlab.progress import Progress, silent
 from patchlab.types import Bank, Frame, Survey, Thresholds
 
@@ -53,6 +53,7 @@ def drift(
     UsageError : the rate is outside the bank's thresholds.
     """
     bank, _, head = banks.read_bank(bank_folder(path))
+    need_one_plane(bank.contract, "drift")
     before = bank.provenance.get("blur_sigma_px")
     if not stabilised(bank) and before is None:
         raise InputError(

@@ -298,7 +298,8 @@ def choose(
                 patch_contrast=patches.contrast,
             )
             if dictionary.planes > 1:
-                bank = banks.colour_bank(bank, found)
+                cells = found.contract.format.cell > 1
+                bank = (banks.mosaic_bank if cells else banks.colour_bank)(bank, found)
     known = {
         **bank.provenance,
         "blur_sigma_px": found.blur_sigma_px,

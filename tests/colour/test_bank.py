@@ -6,11 +6,11 @@ import itertools
 import numpy as np
 import onnxruntime
 import pytest
-from scipy import ndimage
+from scipy import ndimage, special
 
 from patchlab import bank as banks
 from patchlab import edges, export
-from patchlab.bank.colour import colour_bank, colour_bank_as_learned
+from patchlab.bank.colour import colour_bank, colour_bank_as_learned, mosaic_bank
 from patchlab.bank.given import bank_from_taps
 from patchlab.bank.lattice import lattice_bank
 from patchlab.bank.planes import opponent_mix
@@ -232,8 +232,41 @@ def test_grey_pictures_give_nothing_on_the_colour_planes_exactly():
     assert np.abs(banks.exact_responses(bank, grey)[8:]).max() < 1e-12
 
 
+def test_a_mosaic_edge_bank_is_nearly_blind_to_edges_without_colour():
+    """A blurred grey edge at any place and turn, sampled by the mosaic: the opponent sets answer
+    by aliasing alone, and to an edge of colour they answer fully."""
+    kernels, taps = lattice_bank((4,), ((0.9, 1.35),), ("odd",), None, 1.0)
+    lattice = Bank("demo", kernels, taps, table("Mono8"))
+    noise = (1.2, 1.0, 1.0, 0.8)
+    bank = mosaic_bank(lattice, survey("BayerRG8", noise))
+    for k in bank.taps:
+        assert noise_gain(k.astype(float)) == pytest.approx(1, abs=1e-6)
+    assert np.abs(bank.taps.astype(np.float64).sum(axis=(1, 2))).max() == 0
+    samples = bank.taps.astype(np.float64) @ bank.mix.astype(np.float64)
+    y, x = np.mgrid[:40, :40] - 19.5
+    form, worst = pixel_format("BayerRG8"), 0.0
+    for turn in range(8):
+        for place in (0.0, 0.3, 0.6):
+            along = x * np.cos(np.pi * turn / 8) + y * np.sin(np.pi * turn / 8) - place
+            edge = form.split((1 + special.erf(along / 0.8 / np.sqrt(2))) / 2)
+            grey, colour = (answer(samples[part], edge) for part in (slice(4), slice(4, None)))
+            worst = max(worst, colour / grey)
+            red = edge * np.array([1.0, 0, 0, 0])  # an edge in red alone
+            assert answer(samples[8:], red) > 0.3 * answer(samples[:4], red)
+    assert worst < 0.04
+
+
+def answer(taps, cells):
+    """Largest response in the middle of a picture of cells (h, w, samples)."""
+    found = [
+        sum(ndimage.correlate(cells[..., c], k[..., c]) for c in range(cells.shape[2]))[7:13, 7:13]
+        for k in taps
+    ]
+    return np.abs(found).max()
+
+
 def test_mosaics_have_no_opponent_planes():
-    with pytest.raises(UsageError, match="as-learned"):
+    with pytest.raises(UsageError, match="mosaic_bank"):
         opponent_mix("RGGB")
 
 

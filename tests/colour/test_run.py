@@ -81,7 +81,8 @@ def test_edges_of_colour_frames_are_found_and_drawn(run, frames, tmp_path):
     told = json.loads(invoke(*words, *asked, "--json"))
     assert told["images"][0]["edgels"] > 100
     assert (tmp_path / "edges" / "overlay" / "0.png.png").stat().st_size > 1000
-    assert "takes" in str(invoke("bench", out / "bank", code=1))
+    for words in (("bench", out / "bank"), ("assess", out), ("drift", out, frames)):
+        assert f"{words[0]} takes banks of one plane" in str(invoke(*words, code=1))
 
 
 def test_the_runtime_takes_a_picture_with_its_colours(run, frames):
@@ -115,13 +116,17 @@ def test_a_mosaic_is_learned_in_cells_and_exported_as_learned(tmp_path):
             mosaic[row::2, column::2] = codes[row::2, column::2, "RGB".index(letter)]
         (photos / f"{k}.raw").write_bytes(mosaic.tobytes())
     (photos / "raw.toml").write_text('format = "BayerRG8"\nwidth = 140\nheight = 120\n')
-    words = ("run", photos, "-o", tmp_path / "run", "--planes", "colour", *QUICK)
-    assert "--as-learned" in str(invoke(*words, code=1).remedy)
-    told = json.loads(invoke(*words, "--as-learned", "--no-library", "--force", "--json"))
-    bank = load_bank(tmp_path / "run")
+    told = json.loads(invoke("run", photos, "-o", tmp_path / "run", "--planes", "colour",
+                             "--kernels", "4", "--no-library", *QUICK, "--json"))  # fmt: skip
     assert told["bank"]["kernels"] == 12
-    assert bank.bank.contract.pixels == "BayerRG8"
-    assert bank.responses(mosaic).shape == (12, 60, 70)
+    assert told["bank"]["worst_error"] <= told["bank"]["error_bound"]
+    edges = load_bank(tmp_path / "run")
+    assert edges.bank.contract.pixels == "BayerRG8"
+    assert edges.responses(mosaic).shape == (12, 60, 70)
+    invoke("export", tmp_path / "run", "-o", tmp_path / "own", "--as-learned", "--no-library")
+    own = load_bank(tmp_path / "own").bank
+    assert own.purpose == "learned"
+    assert own.taps.shape == (12, 9, 9, 4)
 
 
 def test_frames_to_try_colour_on_are_rendered(tmp_path):
@@ -130,6 +135,6 @@ def test_frames_to_try_colour_on_are_rendered(tmp_path):
     assert told["frames"] == 1
     note = (tmp_path / "m" / "NOTE.md").read_text()
     assert note.startswith("# Sample images")
-    assert "--as-learned" in note
+    assert "--planes colour" in note
     assert (tmp_path / "m" / "wall-01.raw").stat().st_size == 360 * 480
     assert 'format = "BayerRG8"' in (tmp_path / "m" / "raw.toml").read_text()
