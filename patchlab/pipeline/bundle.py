@@ -312,4 +312,10 @@ def _runtime(name: str, module: Any, folder: Path, bank: Bank, library: bool) ->
         def strengths(pixels: Any, place: int) -> Any:
             return loaded.strengths(pixels, loaded.scales[place])
 
-    return export.Target(name, loaded.responses, strengths)
+    edgels = None
+    if library and loaded.compiled.has_edgels:
+
+        def edgels(pixels: Any, high: float, lines: float) -> Any:
+            return banks.as_edgels(loaded.compiled.edgels(pixels, high, lines))
+
+    return export.Target(name, loaded.responses, strengths, edgels=edgels)
