@@ -220,7 +220,8 @@ def test_the_readmes_example_runs_beside_a_second_bank(tmp_path):
         "        != second_bank_NO_SCRATCH) free(memory);\n    return done;\n}\n"
     )
     (tmp_path / "main.c").write_text(program)
-    command = [*build.find_compiler().command, *build.FLAGS, "-O1", "-o", "main", "main.c"]
+    lanes = [f"-D{bank.name}_MAX_LANES=4" for bank in (one, other)]
+    command = [*build.find_compiler().command, *build.FLAGS, "-O1", *lanes, "-o", "main", "main.c"]
     build._run(tmp_path, [*command, "first_bank.c", "second_bank.c", "-lm"])
     said = subprocess.run([tmp_path / "main"], capture_output=True, text=True, check=True).stdout
     native = compiled(one)
