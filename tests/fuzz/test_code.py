@@ -16,13 +16,20 @@ from patchlab import export
 from patchlab.bank.plan import make_plan
 from patchlab.export import build
 from patchlab.export.c_text import fill
+from patchlab.pipeline.edgel_rules import edgel_rules
 from tests.export.folders import BANKS
 
 DRIVER = Path(__file__).with_name("bank_fuzz.c.in").read_text()
+EDGELS = Path(__file__).with_name("edgels_fuzz.c.in").read_text()
+TRY_EDGELS = """\
+    edgels(plain, flip ? padded + (ptrdiff_t)(h - 1) * row : padded,
+        flip ? -row * bytes : row * bytes, w, h);
+    edgel_nonsense(plain);
+"""
 LONG = os.environ.get("PATCHLAB_FUZZ")
 
 
-@pytest.mark.parametrize("name", BANKS if LONG else ("energy", "line"))
+@pytest.mark.parametrize("name", BANKS if LONG else ("energy", "line", "both"))
 def test_no_access_goes_astray(name, tmp_path):
     bank = BANKS[name]
     form = bank.contract.format
@@ -33,7 +40,12 @@ def test_no_access_goes_astray(name, tmp_path):
         "TOP": form.full_scale if form.integer else 1000,
         "SCALE": "" if form.integer else " / 1000.0f",
     }
-    build._unpack(tmp_path, export.emit(bank, make_plan(bank)))
+    rules = edgel_rules(bank)
+    values |= {"EDGELS": "", "TRY_EDGELS": "", "LINES": int(bool(rules and rules.lines))}
+    if rules is not None:
+        values["EDGELS"] = fill(EDGELS, values).decode()
+        values["TRY_EDGELS"] = TRY_EDGELS
+    build._unpack(tmp_path, export.emit(bank, make_plan(bank), rules))
     (tmp_path / "fuzz.c").write_bytes(fill(DRIVER, values))
     compiler = build.find_compiler()
     assert compiler is not None
