@@ -5,7 +5,7 @@ from patchlab.bank.choose import BankSettings, choose_bank, compare_banks
 from patchlab.bank.colour import colour_bank, colour_bank_as_learned, mosaic_bank, one_plane
 from patchlab.bank.disk import bank_files, read_bank, write_bank
 from patchlab.bank.given import bank_as_learned, bank_from_taps
-from patchlab.bank.native import NativeBank, load_native
+from patchlab.bank.native import NativeBank, as_edgels, load_native
 from patchlab.bank.plan import describe, make_plan
 from patchlab.bank.reference import responses as exact_responses
 from patchlab.bank.reference import strength as exact_strength
@@ -13,6 +13,7 @@ from patchlab.bank.reference import strength as exact_strength
 __all__ = [
     "BankSettings",
     "NativeBank",
+    "as_edgels",
     "bank_as_learned",
     "bank_files",
     "bank_from_taps",

@@ -22,6 +22,7 @@ RATE = 10.0
 What = Literal["step", "line", "both"]
 """What a person asks for: steps, lines, or both, each with its own promise."""
 Respond = Callable[[NDArray[Any]], F32]
+Place = Callable[[NDArray[Any]], NDArray[np.void]]
 
 
 def threshold_of(
@@ -243,6 +244,7 @@ def find(
     threshold: float | None = None,
     invalid: NDArray[np.bool_] | None = None,
     blur_px: float | None = None,
+    place: Place | None = None,
 ) -> Found:
     """Find steps, lines or both in one picture, each kind at its own promised rate.
 
@@ -252,6 +254,7 @@ def find(
     Parameters
     ----------
     what : step, line or both; None means the bank's own kind
+    place : gives the edgels of the picture in place of Python's own, such as compiled code
     others : as :func:`detect_edgels`
 
     Raises
@@ -260,7 +263,7 @@ def find(
     """
     levels = levels_of(bank, what, rate, threshold)
     responses = _checked(bank, pixels, respond)
-    return find_on(bank, pixels, responses, levels, invalid=invalid, blur_px=blur_px)
+    return find_on(bank, pixels, responses, levels, invalid=invalid, blur_px=blur_px, place=place)
 
 
 def find_on(
@@ -271,6 +274,7 @@ def find_on(
     *,
     invalid: NDArray[np.bool_] | None = None,
     blur_px: float | None = None,
+    place: Place | None = None,
 ) -> Found:
     """As :func:`find`, from responses that stand and thresholds that are known.
 
@@ -278,6 +282,7 @@ def find_on(
     ----------
     responses : float32 ndarray (n, h, w)
     levels : as :func:`levels_of` gives them
+    place : as for :func:`find`
     others : as :func:`detect_edgels`
     """
     values = _values(bank, pixels, responses)
@@ -292,18 +297,21 @@ def find_on(
             invalid=invalid,
             no_flanks=len(levels) > 1,
         )
-        parts.append(
-            edgels(
-                bank,
-                values,
-                found,
-                responses,
-                blur_px=blur_px,
-                kind=kind,
-                invalid=invalid,
-                refine=bank.planes == 1,
+        if place is None:
+            parts.append(
+                edgels(
+                    bank,
+                    values,
+                    found,
+                    responses,
+                    blur_px=blur_px,
+                    kind=kind,
+                    invalid=invalid,
+                    refine=bank.planes == 1,
+                )
             )
-        )
+    if place is not None:
+        return Found(maps, place(pixels))
     both = np.concatenate(parts)
     if len(parts) > 1:
         both = both[np.lexsort((both["x"], np.rint(both["y"])))]

@@ -5,6 +5,7 @@
     bank = patchlab_bank.load("path/to/the/bank")
     planes = bank.responses(picture)  # float32 (kernels, height, width)
     found = bank.edges(picture)       # found.edges, found.strength, found.orientation, ...
+    points = bank.edgels(picture)     # points["x"], points["y"], ... (takes the library)
 
 This one file is all it takes beside the bank's folder: Python 3.10 or newer and numpy.
 
@@ -64,6 +65,19 @@ RATE = 10.0
 """Default promise, false edge elements per megapixel of flat picture."""
 BAND_VALUES = 1 << 19
 """Values that numpy sums at a time (4 MB)."""
+
+
+EDGEL = np.dtype(
+    {
+        "names": ["x", "y", "theta", "strength", "sd", "width", "scale", "kind"],
+        "formats": ["f4"] * 6 + ["u1"] * 2,
+        "offsets": [0, 4, 8, 12, 16, 20, 24, 25],
+        "itemsize": 28,
+    }
+)
+"""One edge element, as the C header describes it: position (pixels), normal direction (radians,
+towards the brighter side of a step), strength, standard error of the position along the normal,
+width of a line, scale, kind (0 step, 1 bright line, 2 dark line)."""
 
 
 class BankError(ValueError):
@@ -482,6 +496,38 @@ class Bank:
         edges, level = _cascade(planes, low, high, [s["apart_px"] for s in rules["scales"]])
         return _joined(maps, [s["scale"] for s in rules["scales"]], edges, level, high)
 
+    def edgels(
+        self,
+        image: Array,
+        rate: float | None = None,
+        threshold: float | None = None,
+        line_threshold: float = 0.0,
+    ) -> Array:
+        """Edge elements of one picture, placed below the pixel. Only the library finds them.
+
+        Parameters
+        ----------
+        image : as :meth:`responses`
+        rate, threshold : as :meth:`edges`
+        line_threshold : a strength from which lines are found beside steps; 0 looks for none
+
+        Returns
+        -------
+        structured array of :data:`EDGEL`, row by row
+
+        Raises
+        ------
+        BankError : as :meth:`edges`; no compiled library, or one that finds no edgels.
+        """
+        image = self._checked(image)
+        high = self._high(rate, threshold)
+        if self.compiled is None or not self.compiled.has_edgels:
+            raise BankError(
+                f"bank {self.name}: edgels take a compiled library that finds them; "
+                f"compile {self.name}.c for this machine"
+            )
+        return self.compiled.edgels(image, high, float(line_threshold))
+
     def _rival(self, image: Array, about: Mapping[str, Any], threads: int) -> Array | None:
         """The largest response of the kernels that a scale's elements are held against."""
         kernels = about["rival_kernels"]
@@ -755,6 +801,13 @@ class _Library:
             self._edges_q = self._function(
                 "edges_q_rows", number, *picture, number, pointer, stride, pointer, stride, pointer
             )
+        self.has_edgels = hasattr(self._code, f"{self.name}_edgels")
+        if self.has_edgels:
+            size, real = ctypes.c_size_t, ctypes.c_double
+            self._edgels_scratch = self._function("edgels_scratch_bytes", size, number, number)
+            self._edgels = self._function(
+                "edgels", number, *picture[:4], real, real, pointer, size, pointer, pointer
+            )
         if self._function("abi", number)() != bank.manifest["interface"]:
             raise BankError(f"the library in {bank.folder} belongs to another bank")
 
@@ -811,11 +864,35 @@ class _Library:
         self._run(image, threads, band)
         return strength, turn
 
-    def _run(self, image: Array, threads: int, band: Any) -> None:
+    def edgels(self, image: Array, high: float, lines: float) -> Array:
+        image, place = self._placed(image)
+        scratch = np.empty(self._edgels_scratch(*place[2:]), np.uint8)
+        count, capacity = ctypes.c_size_t(0), image.size // 2
+        while True:
+            out = np.empty(capacity, EDGEL)
+            code = self._edgels(
+                *place, high, lines, out.ctypes.data, capacity, ctypes.addressof(count),
+                scratch.ctypes.data,
+            )  # fmt: skip
+            if count.value <= capacity:
+                self._check(code)
+                return out[: count.value].copy()
+            capacity = count.value
+
+    def _placed(self, image: Array) -> tuple[Array, tuple[int, int, int, int]]:
+        """A picture whose rows the code can walk, with its address, row stride, width, height."""
         if not image[0].flags.c_contiguous or abs(image.strides[0]) < image[0].nbytes:
             image = np.ascontiguousarray(image)
         h, w = self.size_of(image)
-        place = (image.ctypes.data, image.strides[0], w, h)
+        return image, (image.ctypes.data, image.strides[0], w, h)
+
+    def _check(self, code: int) -> None:
+        if code:
+            raise BankError(f"bank {self.name}: {self._message(code).decode('ascii')}")
+
+    def _run(self, image: Array, threads: int, band: Any) -> None:
+        image, place = self._placed(image)
+        w, h = place[2:]
 
         def one(rows: tuple[int, int]) -> int:
             return int(band(place, *rows, np.empty(self._scratch(w, h), np.uint8)))
@@ -827,8 +904,7 @@ class _Library:
             with ThreadPoolExecutor(len(bands)) as pool:
                 codes = list(pool.map(one, bands))
         for code in codes:
-            if code:
-                raise BankError(f"bank {self.name}: {self._message(code).decode('ascii')}")
+            self._check(code)
 
 
 def _bands(height: int, count: int) -> Iterator[tuple[int, int]]:

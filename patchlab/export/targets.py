@@ -67,7 +67,10 @@ _HEADERS = {
         "void *memset(void *, int, size_t);\n"
     ),
     # one instruction on every processor here, as errno is not asked for
-    "math.h": "#define sqrtf(x) __builtin_sqrtf(x)\n#define fabsf(x) __builtin_fabsf(x)\n",
+    "math.h": (
+        "#define sqrt(x) __builtin_sqrt(x)\n#define sqrtf(x) __builtin_sqrtf(x)\n"
+        "#define fabsf(x) __builtin_fabsf(x)\n"
+    ),
     # the compiler's own header of vector intrinsics asks for it
     "stdlib.h": "#include <stddef.h>\nvoid *malloc(size_t);\nvoid free(void *);\n",
     "malloc.h": "#include <stdlib.h>\n",

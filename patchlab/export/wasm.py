@@ -14,17 +14,22 @@ from numpy.typing import NDArray
 
 from patchlab.errors import UsageError, VerificationError
 from patchlab.export.compare import Target
-from patchlab.types import Bank
+from patchlab.export.edgel_vectors import COLUMNS
+from patchlab.types import EDGEL, Bank
 
 _DRIVER = """\
 import { readFileSync, writeFileSync } from "node:fs";
 import { load } from "./bank.mjs";
-const [array, width, height, scale] = process.argv.slice(2);
+const [array, width, height, scale, lines] = process.argv.slice(2);
 const bank = await load(readFileSync("bank.wasm"));
 const raw = Uint8Array.from(readFileSync("image.bin"));
 const picture = new globalThis[array](raw.buffer);
 if (scale === undefined) writeFileSync("planes.bin", bank.responses(picture, +width, +height));
-else {
+else if (lines !== undefined) {
+  const found = bank.edgels(picture, +width, +height, +scale, +lines);
+  const names = ["x", "y", "theta", "strength", "sd", "scale", "kind", "width"];
+  writeFileSync("planes.bin", Float32Array.from(names.flatMap((name) => [...found[name]])));
+} else {
   const found = bank.edges(picture, +width, +height, +scale);
   writeFileSync("planes.bin", found.strength);
   writeFileSync("turns.bin", found.orientation);
@@ -85,4 +90,14 @@ def wasm_target(bank: Bank, module: bytes, loader: bytes) -> Target:
             np.frombuffer(turns, np.uint8).reshape(shape),
         )
 
-    return Target(f"WebAssembly lib/wasm32/{bank.name}.wasm", responses, edges)
+    def edgels(pixels: NDArray[Any], threshold: float, line_threshold: float) -> NDArray[np.void]:
+        planes, _ = run(pixels, repr(float(threshold)), repr(float(line_threshold)))
+        columns = np.frombuffer(planes, "<f4").reshape(len(COLUMNS), -1)
+        found = np.zeros(columns.shape[1], EDGEL)
+        for name, column in zip(COLUMNS, columns, strict=True):
+            found[name] = column
+        return found
+
+    has_edgels = f"{bank.name}_edgels".encode() in module
+    name = f"WebAssembly lib/wasm32/{bank.name}.wasm"
+    return Target(name, responses, edges, edgels=edgels if has_edgels else None)

@@ -321,7 +321,13 @@ def _runtime(name: str, module: Any, folder: Path, plan: Plan, library: bool) ->
         def counted(pixels: Any, place: int) -> Any:
             return loaded.strengths(pixels, loaded.scales[place], fixed=True)
 
+    edgels = None
+    if library and loaded.compiled.has_edgels:
+
+        def edgels(pixels: Any, high: float, lines: float) -> Any:
+            return banks.as_edgels(loaded.compiled.edgels(pixels, high, lines))
+
     also: tuple[export.Target, ...] = ()
     if plan.detail["fixed"]:
         also = (_fixed_target(name, loaded.responses_fixed, counted, plan),)
-    return export.Target(name, loaded.responses, strengths, also=also)
+    return export.Target(name, loaded.responses, strengths, also=also, edgels=edgels)

@@ -20,7 +20,9 @@ from typing import Any, get_args
 from patchlab import bank as banks
 from patchlab import edges, images, store
 from patchlab.errors import InputError, PatchlabError, UsageError
+from patchlab.pipeline.bundle import open_native
 from patchlab.pipeline.desk import may_write
+from patchlab.pipeline.edgel_rules import compiled_edgels
 from patchlab.pipeline.edgel_table import (
     Part,
     TableFormat,
@@ -29,7 +31,7 @@ from patchlab.pipeline.edgel_table import (
     write_table,
 )
 from patchlab.pipeline.loaded import bank_folder
-from patchlab.pipeline.use import orientation_count, responder
+from patchlab.pipeline.use import orientation_count
 from patchlab.progress import Progress, silent
 from patchlab.types import Bank, EdgeMap, Frame
 from patchlab.workers import map_ordered
@@ -111,10 +113,13 @@ class _Task:
 
 
 @functools.lru_cache(maxsize=2)
-def _opened(folder: str, bank_id: str) -> tuple[Bank, Any]:
+def _opened(folder: str, bank_id: str) -> tuple[Bank, banks.NativeBank | None, Any]:
     path = Path(folder)
     bank, plan, head = banks.read_bank(path)
-    return bank, responder(path, bank, plan, head)
+    native = open_native(path, bank, plan, head)
+    if native is None:
+        return bank, None, lambda pixels: banks.responses(bank, pixels, plan)
+    return bank, native, native.responses
 
 
 def _stamp(path: Path) -> list[int]:
@@ -128,7 +133,7 @@ def _stamp(path: Path) -> list[int]:
 
 def _work(task: _Task) -> dict[str, Any]:
     """Find the edges of one unit, write them, and give its line of the journal."""
-    bank, respond = _opened(task.bank, task.bank_id)
+    bank, native, respond = _opened(task.bank, task.bank_id)
     unit, root = task.unit, Path(task.root)
     line: dict[str, Any] = {
         "key": unit.key,
@@ -144,9 +149,10 @@ def _work(task: _Task) -> dict[str, Any]:
         elif unit.part is None:
             for frame in images.read_file(root, unit.file, options):
                 _same_kind(bank, frame)
-                line["frames"].append(_one(bank, frame, respond, task))
+                line["frames"].append(_one(bank, frame, native, respond, task))
         else:
-            _film(bank, images.read_part(root, unit.file, unit.part, options), respond, task, line)
+            frames = images.read_part(root, unit.file, unit.part, options)
+            _film(bank, frames, native, respond, task, line)
     except PatchlabError as error:
         line["reason"] = f"{error.what}; {error.remedy}" if error.remedy else error.what
     return line
@@ -174,6 +180,7 @@ def _same_kind(bank: Bank, frame: Frame) -> None:
 def _film(
     bank: Bank,
     frames: Iterable[tuple[str, Frame | str]],
+    native: banks.NativeBank | None,
     respond: Any,
     task: _Task,
     line: dict[str, Any],
@@ -183,7 +190,7 @@ def _film(
         try:
             if isinstance(frame, str):
                 raise InputError(frame, where=name)
-            line["frames"].append(_one(bank, frame, respond, task))
+            line["frames"].append(_one(bank, frame, native, respond, task))
         except PatchlabError as error:
             line["bad"].append({"path": name, "reason": str(error)})
 
@@ -212,8 +219,13 @@ def _stem(file: str, path: str) -> str:
     return f"{stem}_{suffix}" if page == path else f"{stem}_{suffix}_page{page}"
 
 
-def _one(bank: Bank, frame: Frame, respond: Any, task: _Task) -> dict[str, Any]:
+def _one(
+    bank: Bank, frame: Frame, native: banks.NativeBank | None, respond: Any, task: _Task
+) -> dict[str, Any]:
+    """Edges of one picture; its edgels by the compiled library where that has them."""
     asked, out = task.request, Path(task.out)
+    levels = edges.levels_of(bank, asked.what, asked.rate, asked.threshold)
+    place = compiled_edgels(bank, native, levels) if frame.invalid is None else None
     found = edges.find(
         bank,
         frame.pixels,
@@ -223,6 +235,7 @@ def _one(bank: Bank, frame: Frame, respond: Any, task: _Task) -> dict[str, Any]:
         threshold=asked.threshold,
         invalid=frame.invalid,
         blur_px=bank.provenance.get("blur_sigma_px"),
+        place=place,
     )
     stem = _stem(task.unit.file, frame.path)
     store.write_file(out / "edgels" / f"{stem}.csv", edges.edgels_csv(found.edgels))

@@ -3,6 +3,7 @@
 from __future__ import annotations
 
 import math
+from collections.abc import Callable, Mapping
 from typing import Any
 
 import numpy as np
@@ -77,6 +78,22 @@ def edgel_finder(bank: Bank) -> export.EdgelFinder:
         return edges.find_on(bank, pixels, responses, levels, blur_px=blur).edgels
 
     return find
+
+
+def compiled_edgels(
+    bank: Bank, native: banks.NativeBank | None, levels: Mapping[thin.Kind, tuple[float, float]]
+) -> Callable[[NDArray[Any]], NDArray[np.void]] | None:
+    """The compiled library's edgels at some thresholds; None where it has not these kinds.
+
+    They are those that Python finds on the library's responses, several times as fast.
+    """
+    kinds = {bank.strength, "line"} if bank.strength == "step" else {bank.strength}
+    if native is None or not native.has_edgels or not set(levels) <= kinds:
+        return None
+    high = {kind: level for kind, (level, _) in levels.items()}
+    own = high.get(bank.strength, 0.0)
+    lines = high.get("line", 0.0) if bank.strength == "step" else 0.0
+    return lambda pixels: native.edgels(pixels, own, lines)
 
 
 def edgel_cases(bank: Bank, plan: Plan, crop: Any = None) -> tuple[export.EdgelCase, ...]:

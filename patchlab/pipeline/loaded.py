@@ -17,6 +17,7 @@ from patchlab import bank as banks
 from patchlab import edges
 from patchlab.errors import InputError, UsageError
 from patchlab.pipeline.bundle import open_native, own_library
+from patchlab.pipeline.edgel_rules import compiled_edgels
 from patchlab.types import F32, Bank, EdgeMap, InputContract, Plan
 
 
@@ -110,9 +111,15 @@ class LoadedBank:
         -------
         structured ndarray of :data:`patchlab.types.EDGEL`
         """
+        pixels = self._pixels(image)
+        if invalid is None:
+            levels = edges.levels_of(self.bank, None, rate, threshold)
+            compiled = compiled_edgels(self.bank, self.native, levels)
+            if compiled is not None:
+                return compiled(pixels)
         _, found = edges.detect_edgels(
             self.bank,
-            self._pixels(image),
+            pixels,
             self.responses,
             rate=rate,
             threshold=threshold,

@@ -32,6 +32,9 @@ BANKS = {
         "line", families=("gd2",), count=4, size=9, strength="line", pixels="float32",
         kind="stabilised", border="zero",
     ),
+    "both": lattice_bank(
+        "both", families=("gd1", "gd2"), count=4, size=9, kind="stabilised", border="edge"
+    ),
     "arbitrary": random_bank(5, 7, border="mirror"),
 }  # fmt: skip
 

@@ -17,12 +17,19 @@ from patchlab import export
 from patchlab.bank.plan import make_plan
 from patchlab.export import build
 from patchlab.export.c_text import fill
+from patchlab.pipeline.edgel_rules import edgel_rules
 from tests.bank.banks import random_bank
 from tests.bank.test_halved import smooth
 from tests.bank.test_separable import round_gabors
 from tests.export.folders import BANKS
 
 DRIVER = Path(__file__).with_name("bank_fuzz.c.in").read_text()
+EDGELS = Path(__file__).with_name("edgels_fuzz.c.in").read_text()
+TRY_EDGELS = """\
+    edgels(plain, flip ? padded + (ptrdiff_t)(h - 1) * row : padded,
+        flip ? -row * bytes : row * bytes, w, h);
+    edgel_nonsense(plain);
+"""
 LONG = os.environ.get("PATCHLAB_FUZZ")
 
 
@@ -34,7 +41,7 @@ PLANS = {
 EVERY = {**{name: (bank, "auto") for name, bank in BANKS.items()}, **PLANS}
 
 
-@pytest.mark.parametrize("name", EVERY if LONG else ("energy", "line", "halved"))
+@pytest.mark.parametrize("name", EVERY if LONG else ("energy", "line", "both", "halved"))
 def test_no_access_goes_astray(name, tmp_path):
     bank, kind = EVERY[name]
     form = bank.contract.format
@@ -45,7 +52,12 @@ def test_no_access_goes_astray(name, tmp_path):
         "TOP": form.full_scale if form.integer else 1000,
         "SCALE": "" if form.integer else " / 1000.0f",
     }
-    build._unpack(tmp_path, export.emit(bank, make_plan(bank, kind)))
+    rules = edgel_rules(bank)
+    values |= {"EDGELS": "", "TRY_EDGELS": "", "LINES": int(bool(rules and rules.lines))}
+    if rules is not None:
+        values["EDGELS"] = fill(EDGELS, values).decode()
+        values["TRY_EDGELS"] = TRY_EDGELS
+    build._unpack(tmp_path, export.emit(bank, make_plan(bank, kind), rules))
     (tmp_path / "fuzz.c").write_bytes(fill(DRIVER, values))
     compiler = build.find_compiler()
     assert compiler is not None

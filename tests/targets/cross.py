@@ -23,8 +23,10 @@ from patchlab.bank.disk import write_bank
 from patchlab.bank.native import NativeBank
 from patchlab.bank.plan import make_plan
 from patchlab.export import build, patchlab_bank
+from patchlab.export.edgel_vectors import edgel_checks
 from patchlab.export.targets import TARGETS, cross_compile
 from patchlab.pipeline import bundle
+from patchlab.pipeline.edgel_rules import edgel_cases, edgel_finder, edgel_rules
 from patchlab.settings import Settings
 from patchlab.store import sha256
 from tests.bank.banks import picture
@@ -41,7 +43,10 @@ def sources(bank):
             ("wide", picture((bank.size + 2, 131), bank.contract.pixels)),
         )
     ]
-    return plan, {**export.emit(bank, plan), **export.emit_selftest(bank, plan, cases)}
+    pictures = edgel_cases(bank, plan)
+    edgels = pictures[0] if pictures else None
+    source = export.emit(bank, plan, edgel_rules(bank))
+    return plan, {**source, **export.emit_selftest(bank, plan, cases, edgels)}
 
 
 def tool(name):
@@ -101,7 +106,7 @@ def test_a_machine_without_a_compiler_uses_the_one_of_the_extra(monkeypatch):
     assert (np.abs(got - reference.responses(bank, pixels)) <= bound).all()
 
 
-@pytest.mark.parametrize("name", ["step", "energy"])
+@pytest.mark.parametrize("name", ["step", "energy", "both"])
 def test_qemu_runs_the_selftest_of_aarch64(name, tmp_path):
     bank = BANKS[name]
     _, files = sources(bank)
@@ -153,6 +158,16 @@ def test_the_windows_library_gives_the_interface_and_takes_nothing():
 
 
 # ---------------------------------------------------------------- WebAssembly
+
+
+def test_webassembly_finds_the_edgels_that_python_finds():
+    tool("node")
+    bank = BANKS["both"]
+    plan, files = sources(bank)
+    made = cross_compile(files, bank, plan, "wasm32")
+    target = export.wasm_target(bank, *(made[f"lib/wasm32/both.{end}"] for end in ("wasm", "mjs")))
+    checks = list(edgel_checks(target, edgel_cases(bank, plan), edgel_finder(bank)))
+    assert [c.passed for c in checks] == [True, True]
 
 
 @pytest.mark.parametrize("name", BANKS)
