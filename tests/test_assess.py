@@ -14,7 +14,7 @@ from patchlab.cli import commands
 from patchlab.errors import InputError
 from patchlab.images.scenes import Camera
 from patchlab.pipeline import assess
-from patchlab.types import Bank, InputTable
+from patchlab.types import Bank, InputContract, InputTable
 
 CAMERA = Camera(bits=8, gain=0.5, full_well=600, read_noise=2.0, blur_sigma_px=0.8)
 
@@ -70,6 +70,21 @@ def test_banks_that_know_too_little_are_refused():
     bank = made_bank(thresholds=False)
     with pytest.raises(InputError, match="noise was measured"):
         assess.camera_of(replace(bank, table=replace(bank.table, noise_sd=None)))
+
+
+def test_cameras_that_are_not_simulated_are_told_apart():
+    bank = made_bank(thresholds=False)
+    bent = replace(bank.table, contract=replace(bank.contract, transfer="srgb"))
+    with pytest.raises(InputError, match=r"follow srgb.*your own pictures"):
+        assess.camera_of(replace(bank, table=bent))
+    floats = InputTable(
+        "stabilised", InputContract("float32", 0.0, 1.0), None, 1.0, slope=2.0, offset=1.0, scale=9
+    )
+    with pytest.raises(InputError, match=r"takes float32 pixels.*your own pictures"):
+        assess.camera_of(replace(bank, table=floats))
+    for kind in ("identity", "linear", "log"):
+        with pytest.raises(InputError, match="noise was measured"):
+            assess.camera_of(replace(bank, table=replace(bank.table, kind=kind)))
 
 
 def run(*words):

@@ -352,6 +352,12 @@ def _say_verify(result: dict[str, Any]) -> None:
     help="What is looked for, each kind at the rate; by default what the bank is made for.",
 )
 @click.option("--pictures/--no-pictures", "drawn", default=True, help="Draw maps and overlays.")
+@click.option(
+    "--table",
+    type=click.Choice(["csv", "parquet"]),
+    default="csv",
+    help="Form of the one table of all edgels; parquet needs the extra [parquet].",
+)
 @click.option("--jobs", type=click.IntRange(0, 1024), default=1, help="Worker processes; 0: all.")
 @click.option("--force", is_flag=True, help="Replace what stands there.")
 @click.option("--resume", is_flag=True, help="Go on with what stands there.")
@@ -359,6 +365,8 @@ def _say_verify(result: dict[str, Any]) -> None:
 @_shared
 def detect(bank: Path, pictures: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Find edges in PICTURES with a BANK: one table of edgels, maps and overlays.
+
+    PICTURES is a folder, a picture or a video; of a video every frame is taken.
 
     Edges that steer a machine or gauge a safety part need the usual care: validate on your own
     parts and light, and follow the codes and qualified practice that apply.
@@ -380,6 +388,7 @@ def detect(bank: Path, pictures: Path, terminal: Terminal, as_json: bool, **opti
             max_bad=options["max_bad"],
             force=options["force"],
             resume=options["resume"],
+            table=options["table"],
             progress=terminal,
         )
     for bad in result["quarantined"]:

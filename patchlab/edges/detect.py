@@ -67,7 +67,9 @@ def threshold_of(
 
 
 def _checked(bank: Bank, pixels: NDArray[Any], respond: Respond) -> F32:
-    if pixels.ndim != 2 or min(pixels.shape) < bank.size:
+    if pixels.ndim != 2:
+        raise InputError(f"a picture is one plane (h, w), not an array of shape {pixels.shape}")
+    if min(pixels.shape) < bank.size:
         raise InputError(
             f"a picture of shape {pixels.shape} is too small for kernels of {bank.size} px",
             remedy=f"give one plane of at least {bank.size} x {bank.size} pixels",

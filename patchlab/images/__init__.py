@@ -7,6 +7,7 @@ The way through: ``list_photos`` -> ``take_in`` -> ``iterate`` (frames) or
 from patchlab.images.decode import SUFFIXES, decode, decoder_versions
 from patchlab.images.demo import make_sample_images
 from patchlab.images.develop import ReadOptions
+from patchlab.images.film import FilmPart, film_parts, is_film, read_part
 from patchlab.images.folder import (
     FrameRecord,
     Intake,
@@ -22,6 +23,7 @@ from patchlab.images.sample import SampleSettings, memory_needed, sample, sample
 
 __all__ = [
     "SUFFIXES",
+    "FilmPart",
     "FrameRecord",
     "Intake",
     "Listing",
@@ -30,11 +32,14 @@ __all__ = [
     "SampleSettings",
     "decode",
     "decoder_versions",
+    "film_parts",
+    "is_film",
     "iterate",
     "list_photos",
     "make_sample_images",
     "memory_needed",
     "read_file",
+    "read_part",
     "reread",
     "sample",
     "sample_folder",

@@ -8,6 +8,9 @@ from __future__ import annotations
 
 import importlib
 import io
+from bisect import bisect_left
+from collections.abc import Iterator
+from pathlib import Path
 from typing import Any
 
 import numpy as np
@@ -105,3 +108,65 @@ def _video_frame(frame: Any, number: int, total: int, options: ReadOptions) -> P
         return Picture(np.array(frame.to_ndarray()), _GREY[kind], notes=notes)
     notes += (f"{kind} brought to 8-bit RGB",)
     return Picture(np.array(frame.to_ndarray(format="rgb24")), 255, coded=True, notes=notes)
+
+
+def film_times(path: Path) -> tuple[tuple[int, ...], bool]:
+    """When the frames of a video's first stream are shown, rising, and whether one can seek there.
+
+    Nothing is decoded. Where the file does not tell the times, they are the frames' numbers.
+    """
+    av = _package("av", "video")
+    with av.open(str(path)) as film:
+        if not film.streams.video:
+            raise InputError("the file holds no video")
+        times = [packet.pts for packet in film.demux(video=0) if packet.size]
+    if not times:
+        raise InputError("the video holds no frame")
+    known = None not in times and len(set(times)) == len(times)
+    return tuple(sorted(times) if known else range(len(times))), known
+
+
+def film_frames(
+    path: Path,
+    times: tuple[int, ...],
+    first: int,
+    total: int,
+    seeks: bool,
+    options: ReadOptions,
+) -> Iterator[tuple[int, Picture | str]]:
+    """Some frames of a video by number, or why one cannot be decoded; one is held at a time.
+
+    Parameters
+    ----------
+    times, seeks : of the frames wanted, from :func:`film_times`
+    first, total : number of the first of them, and of frames in all
+    """
+    av = _package("av", "video")
+    with av.open(str(path)) as film:
+        stream = film.streams.video[0]
+        stream.codec_context.thread_count = 1  # whoever reads parts in parallel has the cores
+        # damage is told, not painted over
+        stream.codec_context.options = {"err_detect": "crccheck+bitstream+buffer+explode"}
+        if seeks and first:
+            film.seek(times[0], stream=stream, backward=True)
+        counted = 0
+        for packet in film.demux(stream):
+            try:
+                frames = packet.decode()
+            except av.FFmpegError as error:
+                if packet.pts is not None and times[0] <= packet.pts <= times[-1] and seeks:
+                    number = first + bisect_left(times, packet.pts)
+                    yield number, f"the frame cannot be decoded ({error.strerror})"
+                continue
+            for frame in frames:
+                time = frame.pts if seeks else counted
+                counted += 1
+                if time is None or time < times[0]:
+                    continue
+                if time > times[-1]:
+                    return
+                number = first + bisect_left(times, time)
+                if frame.is_corrupt:
+                    yield number, "the frame is damaged"
+                else:
+                    yield number, _video_frame(frame, number, total, options)

@@ -77,16 +77,30 @@ def camera_of(bank: Bank) -> scenes.Camera:
     """
     table, c = bank.table, bank.contract
     blur = bank.provenance.get("blur_sigma_px")
+    if not c.format.integer:
+        raise InputError(
+            f"assess simulates cameras of whole codes, and this bank takes {c.pixels} pixels",
+            where=bank.name,
+            remedy="prove it on your own pictures, or learn from the camera's own codes",
+        )
+    if c.transfer != "linear":
+        raise InputError(
+            f"assess simulates cameras whose codes follow light, and these follow {c.transfer}",
+            where=bank.name,
+            remedy="prove it on your own pictures, or learn from linear files of the camera",
+        )
     if table.kind != "stabilised" or table.noise_sd is None or table.values is None:
         raise InputError(
-            "only a bank whose integer camera's noise was measured can be assessed",
+            "only a bank whose camera's noise was measured can be assessed",
             where=bank.name,
             remedy="survey a folder whose noise can be measured, flat or static frames for sure",
         )
-    if c.transfer != "linear":
-        raise InputError("assess simulates cameras whose codes follow light", where=bank.name)
     if blur is None:
-        raise InputError("the camera's blur was not measured", where=bank.name)
+        raise InputError(
+            "the camera's blur was not measured",
+            where=bank.name,
+            remedy="survey a folder with sharp edges, or give a slanted edge",
+        )
     slope, read = _law(table.values, table.noise_sd, c.black, c.white)
     weight = _neighbour(bank.noise_autocovariance)
     kept = (1 - 2 * weight) ** 2 + 2 * weight**2  # of the variance, along either axis

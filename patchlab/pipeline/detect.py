@@ -1,22 +1,21 @@
-"""Edges of a folder of pictures: in parallel, picture by picture, kept as they are done.
+"""Edges of a folder of pictures and videos: in parallel, each kept as it is done.
 
 Each picture's files are written by the worker that found them, and a line of the journal says
 that they stand; so an interrupted job goes on where it was, and memory does not grow with the
-number of pictures. At the end, or where it stopped, all edgels stand in one table too.
+number of pictures. Videos are taken in parts of a few frames, which are read apart. At the end,
+or where it stopped, all edgels stand in one table too.
 """
 
 from __future__ import annotations
 
-import csv
 import functools
-import io
 import json
 import os
 import re
-from collections.abc import Callable, Iterator, Mapping
+from collections.abc import Callable, Iterable, Iterator, Mapping
 from dataclasses import dataclass, replace
 from pathlib import Path
-from typing import Any
+from typing import Any, get_args
 
 from patchlab import bank as banks
 from patchlab import edges, images, store
@@ -24,6 +23,13 @@ from patchlab.errors import InputError, PatchlabError, UsageError
 from patchlab.pipeline.bundle import open_native
 from patchlab.pipeline.desk import may_write
 from patchlab.pipeline.edgel_rules import compiled_edgels
+from patchlab.pipeline.edgel_table import (
+    Part,
+    TableFormat,
+    require_format,
+    table_name,
+    write_table,
+)
 from patchlab.pipeline.loaded import bank_folder
 from patchlab.pipeline.use import orientation_count
 from patchlab.progress import Progress, silent
@@ -32,7 +38,6 @@ from patchlab.workers import map_ordered
 
 Draw = Callable[[Frame, EdgeMap, int], Mapping[str, bytes]]
 JOURNAL = "journal.jsonl"
-TABLE = "edgels.csv"
 RESULT = "detect.json"
 PLACES = ("edgels", "strength", "orientation", "edges", "overlay")
 """Folders with files of single pictures: the edgels', and those that a drawing fills."""
@@ -55,24 +60,56 @@ class Request:
 
 
 @dataclass(frozen=True)
+class _Unit:
+    """What one worker does at a time: a file of pictures, or a part of a video."""
+
+    file: str
+    part: images.FilmPart | None = None
+    reason: str = ""
+
+    @property
+    def key(self) -> str:
+        """Its name in the journal."""
+        return self.file if self.part is None else f"{self.file}#{self.part.first}"
+
+
+def _units(root: Path, file: str) -> list[_Unit]:
+    """The pieces of one file; for a video that cannot be read one that says why."""
+    if not images.is_film(file):
+        return [_Unit(file)]
+    try:
+        return [_Unit(file, part) for part in images.film_parts(root, file)]
+    except PatchlabError as error:
+        return [_Unit(file, reason=str(error))]
+
+
+@dataclass(frozen=True)
 class _Task:
     bank: str
     bank_id: str
     root: str
-    file: str
+    unit: _Unit
     out: str
     request: Request
     draw: Draw | None
 
 
+@dataclass(frozen=True)
+class _Engine:
+    """What computes a bank: responses, and the compiled library where there is one."""
+
+    respond: Callable[[Any], Any]
+    native: banks.NativeBank | None = None
+
+
 @functools.lru_cache(maxsize=2)
-def _opened(folder: str, bank_id: str) -> tuple[Bank, banks.NativeBank | None, Any]:
+def _opened(folder: str, bank_id: str) -> tuple[Bank, _Engine]:
     path = Path(folder)
     bank, plan, head = banks.read_bank(path)
     native = open_native(path, bank, plan, head)
     if native is None:
-        return bank, None, lambda pixels: banks.responses(bank, pixels, plan)
-    return bank, native, native.responses
+        return bank, _Engine(lambda pixels: banks.responses(bank, pixels, plan))
+    return bank, _Engine(native.responses, native)
 
 
 def _stamp(path: Path) -> list[int]:
@@ -85,19 +122,45 @@ def _stamp(path: Path) -> list[int]:
 
 
 def _work(task: _Task) -> dict[str, Any]:
-    """Find the edges of one file, write them, and give its line of the journal."""
-    bank, native, respond = _opened(task.bank, task.bank_id)
+    """Find the edges of one unit, write them, and give its line of the journal."""
+    bank, engine = _opened(task.bank, task.bank_id)
+    unit, root = task.unit, Path(task.root)
     line: dict[str, Any] = {
-        "file": task.file,
-        "stamp": _stamp(Path(task.root) / task.file),
+        "key": unit.key,
+        "file": unit.file,
+        "stamp": _stamp(root / unit.file),
         "frames": [],
+        "bad": [],
     }
     try:
-        for frame in images.read_file(Path(task.root), task.file, _options(bank)):
-            line["frames"].append(_one(bank, frame, native, respond, task))
+        if unit.reason:
+            line["reason"] = unit.reason
+        elif unit.part is None:
+            for frame in images.read_file(root, unit.file, _options(bank)):
+                line["frames"].append(_one(bank, frame, engine, task))
+        else:
+            _film(bank, images.read_part(root, unit.file, unit.part, _options(bank)), engine,
+                  task, line)  # fmt: skip
     except PatchlabError as error:
         line["reason"] = str(error)
     return line
+
+
+def _film(
+    bank: Bank,
+    frames: Iterable[tuple[str, Frame | str]],
+    engine: _Engine,
+    task: _Task,
+    line: dict[str, Any],
+) -> None:
+    """Find the edges of some frames of a video; a bad one is put aside, the others go on."""
+    for name, frame in frames:
+        try:
+            if isinstance(frame, str):
+                raise InputError(frame, where=name)
+            line["frames"].append(_one(bank, frame, engine, task))
+        except PatchlabError as error:
+            line["bad"].append({"path": name, "reason": str(error)})
 
 
 def _options(bank: Bank) -> images.ReadOptions:
@@ -116,17 +179,15 @@ def _stem(file: str, path: str) -> str:
     return file if page == path else f"{file}_page{page}"
 
 
-def _one(
-    bank: Bank, frame: Frame, native: banks.NativeBank | None, respond: Any, task: _Task
-) -> dict[str, Any]:
+def _one(bank: Bank, frame: Frame, engine: _Engine, task: _Task) -> dict[str, Any]:
     """Edges of one picture; its edgels by the compiled library where that has them."""
     asked, out = task.request, Path(task.out)
     levels = edges.levels_of(bank, asked.what, asked.rate, asked.threshold)
-    place = compiled_edgels(bank, native, levels) if frame.invalid is None else None
+    place = compiled_edgels(bank, engine.native, levels) if frame.invalid is None else None
     found = edges.find(
         bank,
         frame.pixels,
-        respond,
+        engine.respond,
         what=asked.what,
         rate=asked.rate,
         threshold=asked.threshold,
@@ -134,7 +195,7 @@ def _one(
         blur_px=bank.provenance.get("blur_sigma_px"),
         place=place,
     )
-    stem = _stem(task.file, frame.path)
+    stem = _stem(task.unit.file, frame.path)
     store.write_file(out / "edgels" / f"{stem}.csv", edges.edgels_csv(found.edgels))
     if task.draw is not None:
         for name, data in task.draw(frame, found.shown, orientation_count(bank)).items():
@@ -147,7 +208,7 @@ def _one(
 
 
 class _Journal:
-    """Which files are done, one line each, and what was asked in the first line."""
+    """Which units are done, one line each, and what was asked in the first line."""
 
     def __init__(self, out: Path, asked: Mapping[str, Any]) -> None:
         self.path, self.asked = out / JOURNAL, json.loads(json.dumps(asked))
@@ -179,13 +240,13 @@ class _Journal:
                 remedy="--force starts anew",
             )
         known = [line for line in map(_parsed, rest) if line]
-        self.lines = {line["file"]: line for line in known}
+        self.lines = {line["key"]: line for line in known}
         whole = [self.asked, *self.lines.values()]
         store.write_file(self.path, "".join(json.dumps(x) + "\n" for x in whole).encode())
 
     def add(self, line: dict[str, Any]) -> None:
-        """Note a file as done."""
-        self.lines[line["file"]] = line
+        """Note a unit as done."""
+        self.lines[line["key"]] = line
         with self.path.open("a", encoding="utf-8") as out:
             out.write(json.dumps(line) + "\n")
 
@@ -201,23 +262,12 @@ def _parsed(text: str) -> dict[str, Any]:
 # ---------------------------------------------------------------- one table
 
 
-def _rows(out: Path, lines: Mapping[str, dict[str, Any]], order: tuple[str, ...]) -> Iterator[str]:
-    """The table's text, a picture at a time, from the pictures' own files."""
-    yield ",".join(("picture", *edges.CSV_COLUMNS)) + "\n"
-    for name in order:
-        for frame in lines.get(name, {"frames": []})["frames"]:
-            cell = io.StringIO()
-            csv.writer(cell, lineterminator="").writerow([frame["path"]])
-            path = out / "edgels" / f"{_stem(name, frame['path'])}.csv"
-            own = path.read_text(encoding="utf-8")
-            yield "".join(f"{cell.getvalue()},{row}\n" for row in own.splitlines()[1:])
-
-
-def _write_table(out: Path, lines: Mapping[str, dict[str, Any]], order: tuple[str, ...]) -> None:
-    draft = out / f".{TABLE}.part"
-    with draft.open("w", encoding="utf-8", newline="\n") as table:
-        table.writelines(_rows(out, lines, order))
-    os.replace(draft, out / TABLE)
+def _parts(out: Path, lines: Mapping[str, dict[str, Any]], order: Iterable[str]) -> Iterator[Part]:
+    """The pictures that are done, in order, each with its own file."""
+    for key in order:
+        for frame in lines.get(key, {"frames": []})["frames"]:
+            stem = _stem(lines[key]["file"], frame["path"])
+            yield frame["path"], out / "edgels" / f"{stem}.csv"
 
 
 # ---------------------------------------------------------------- the output's folder
@@ -247,7 +297,8 @@ def _clear(out: Path) -> None:
     for name in PLACES:
         if not (out / name).is_symlink():
             _clear_place(out / name)
-    for name in (f".{TABLE}.part", TABLE, RESULT, JOURNAL):
+    tables = [f"edgels.{kind}" for kind in get_args(TableFormat)]
+    for name in (*(f".{t}.part" for t in tables), *tables, RESULT, JOURNAL):
         (out / name).unlink(missing_ok=True)
 
 
@@ -291,6 +342,7 @@ def detect(
     max_bad: float = 0.1,
     force: bool = False,
     resume: bool = False,
+    table: TableFormat = "csv",
     progress: Progress = silent,
 ) -> dict[str, Any]:
     """Edges of every picture: edgels in one table and one file a picture, maps when asked for.
@@ -298,22 +350,27 @@ def detect(
     Parameters
     ----------
     path : a bank's folder, or a run's
-    pictures : a folder or one file
-    out : folder for ``edgels.csv``, ``edgels/``, ``detect.json`` and the pictures drawn
+    pictures : a folder or one file, of pictures or videos
+    out : folder for ``edgels.csv`` or ``edgels.parquet``, ``edgels/``, ``detect.json`` and the
+        pictures drawn
     request : what is looked for
     jobs : worker processes; the files are the same whatever their number
     draw : makes the pictures of one frame (a top-level function); None draws none
-    max_bad : share of files that may be unusable; those are listed and left out
+    max_bad : share of files, and of frames of videos, that may be unusable; those are listed
+        and left out
     force, resume : replace what stands at ``out``, or go on with it
-    progress : told after each file; when it raises, finished files are kept
+    table : csv or parquet, which needs pyarrow
+    progress : told after each file and each part of a video; when it raises, what is finished
+        is kept
 
     Raises
     ------
     InputError : there are no pictures, or more than ``max_bad`` of them cannot serve; when
         none could, nothing is left at ``out``.
     UsageError : the output exists, is a file or lies among the pictures; ``max_bad`` is not a
-        share; or the bank has no promise to set a threshold from.
+        share; the bank has no promise to set a threshold from; or pyarrow is missing.
     """
+    require_format(table)
     if not 0 <= max_bad <= 1:
         raise UsageError(f"the share of bad pictures must be between 0 and 1, not {max_bad:g}")
     _check_place(out, pictures)
@@ -333,51 +390,67 @@ def detect(
         _clear(out)
         journal.begin()
     root = listing.root
+    units = [unit for name in listing.files for unit in _units(root, name)]
     left = [
-        name
-        for name in listing.files
-        if journal.lines.get(name, {}).get("stamp") != _stamp(root / name)
+        unit
+        for unit in units
+        if journal.lines.get(unit.key, {}).get("stamp") != _stamp(root / unit.file)
     ]
     tasks = [
-        _Task(str(folder), head["id"], str(root), name, str(out), request, draw) for name in left
+        _Task(str(folder), head["id"], str(root), unit, str(out), request, draw) for unit in left
     ]
+    done = len(units) - len(left)
     try:
         for line in map_ordered(_work, tasks, jobs=jobs):
             journal.add(line)
-            done = len(listing.files) - len(left) + len([n for n in left if n in journal.lines])
-            progress("detect", min(done, len(listing.files)), len(listing.files), line["file"])
+            done += 1
+            progress("detect", done, len(units), line["file"])
     finally:
-        _write_table(out, journal.lines, listing.files)
-    lines = [journal.lines[name] for name in listing.files]
+        write_table(out, table, _parts(out, journal.lines, [unit.key for unit in units]))
+    lines = [journal.lines[unit.key] for unit in units]
     try:
         _check_bad(lines, pictures, max_bad)
     except InputError:
         if not any(line["frames"] for line in lines):
             _leave_nothing(out, made=made)
         raise
-    return _result(head["id"], told, lines, out)
+    return _result(head["id"], told, lines, out, table_name(table))
+
+
+def _quarantined(lines: Iterable[dict[str, Any]]) -> list[dict[str, str]]:
+    """Files, and frames of videos, that could not serve."""
+    found = []
+    for line in lines:
+        if "reason" in line:
+            found.append({"path": line["file"], "reason": line["reason"]})
+        found += line["bad"]
+    return found
 
 
 def _check_bad(lines: list[dict[str, Any]], pictures: Path, max_bad: float) -> None:
-    bad = [line for line in lines if "reason" in line]
-    if len(bad) > max_bad * len(lines):
+    bad = _quarantined(lines)
+    film = [images.is_film(line["file"]) for line in lines]
+    total = sum(
+        max(1, len(line["frames"]) + len(line["bad"])) if is_film else 1
+        for line, is_film in zip(lines, film, strict=True)
+    )
+    if len(bad) > max_bad * total:
         raise InputError(
-            f"{len(bad)} of {len(lines)} pictures cannot serve",
+            f"{len(bad)} of {total} pictures cannot serve",
             where=str(pictures),
-            remedy=f"the first: {bad[0]['file']}: {bad[0]['reason']}",
+            remedy=f"the first: {bad[0]['path']}: {bad[0]['reason']}",
         )
 
 
 def _result(
-    bank_id: str, told: Mapping[str, float], lines: list[dict[str, Any]], out: Path
+    bank_id: str, told: Mapping[str, float], lines: list[dict[str, Any]], out: Path, table: str
 ) -> dict[str, Any]:
-    bad = [line for line in lines if "reason" in line]
     result = {
         "bank": bank_id,
         "thresholds": dict(told),
         "images": [frame for line in lines for frame in line["frames"]],
-        "quarantined": [{"path": line["file"], "reason": line["reason"]} for line in bad],
-        "table": TABLE,
+        "quarantined": _quarantined(lines),
+        "table": table,
     }
     store.write_file(out / RESULT, store.canonical_json(result))
     return result

@@ -49,7 +49,8 @@ class LoadedBank:
 
         Parameters
         ----------
-        image : (h, w) of the contract's dtype, both sides at least the kernels'
+        image : (h, w) of the contract's dtype in any byte order, both sides at least the
+            kernels'; for a contract of floats, of any real dtype
 
         Returns
         -------
@@ -59,7 +60,7 @@ class LoadedBank:
         ------
         InputError : the picture does not fit the bank.
         """
-        pixels = np.asarray(image)
+        pixels = self._pixels(image)
         if self.native is not None:
             return self.native.responses(pixels)
         return banks.responses(self.bank, pixels, self.plan)
@@ -89,7 +90,7 @@ class LoadedBank:
         """
         return edges.detect(
             self.bank,
-            np.asarray(image),
+            self._pixels(image),
             self.responses,
             rate=rate,
             threshold=threshold,
@@ -110,7 +111,7 @@ class LoadedBank:
         -------
         structured ndarray of :data:`patchlab.types.EDGEL`
         """
-        pixels = np.asarray(image)
+        pixels = self._pixels(image)
         if invalid is None:
             levels = edges.levels_of(self.bank, None, rate, threshold)
             compiled = compiled_edgels(self.bank, self.native, levels)
@@ -126,6 +127,21 @@ class LoadedBank:
             blur_px=self.bank.provenance.get("blur_sigma_px"),
         )
         return found
+
+    def _pixels(self, image: ArrayLike) -> NDArray[Any]:
+        """The picture in the contract's dtype, where that changes no value beyond its rounding."""
+        if isinstance(image, np.ma.MaskedArray) and np.ma.is_masked(image):
+            raise InputError(
+                "the picture has masked pixels, which an array of codes cannot say",
+                remedy="give its filled data, and its mask as invalid",
+            )
+        pixels, wanted = np.asarray(image), np.dtype(self.bank.contract.format.dtype)
+        same = pixels.dtype.newbyteorder("=") == wanted
+        real = pixels.dtype.kind in "iuf" and wanted.kind == "f"
+        if not (same or real):
+            return pixels  # refused with a sentence where it is used
+        with np.errstate(over="ignore"):  # beyond float32 is infinite, and refused as that
+            return np.asarray(pixels, dtype=wanted)
 
 
 def load_bank(path: str | Path, *, library: bool = False) -> LoadedBank:

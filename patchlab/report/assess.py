@@ -1,4 +1,4 @@
-"""The page of an assessment: five plots and the tables behind them."""
+"""The page of an assessment: four plots and the tables behind them."""
 
 from __future__ import annotations
 
@@ -8,11 +8,14 @@ from typing import Any
 
 import jinja2
 from matplotlib.axes import Axes
+from matplotlib.ticker import FormatStrFormatter, NullFormatter
 
 from patchlab.report.plots import AMBER, RED, SLATE, TEAL, plot
 
 Result = Mapping[str, Any]
 COLOURS = (AMBER, RED, SLATE, "#7c3aed")
+NONE_SEEN = 3.0
+"""Events that a Poisson law with none seen stays below, 95 % sure."""
 
 
 def _rates(result: Result) -> bytes:
@@ -22,12 +25,18 @@ def _rates(result: Result) -> bytes:
     def draw(axes: Axes) -> None:
         asked = [r["asked"] for r in rows]
         axes.loglog(asked, asked, color=SLATE, ls="--", lw=1, label="as promised")
-        axes.loglog(
-            asked, [max(r["found"], 1e-2) for r in rows], "o-", color=TEAL, label="elements"
-        )
-        axes.loglog(
-            asked, [max(r["groups"], 1e-2) for r in rows], ".:", color=AMBER, label="groups"
-        )
+        for name, label, style, colour in (
+            ("found", "elements", "o-", TEAL),
+            ("groups", "groups", ".:", AMBER),
+        ):
+            seen = [(r["asked"], r[name]) for r in rows if r[name] > 0]
+            if seen:
+                axes.loglog(*zip(*seen, strict=True), style, color=colour, label=label)
+        none = [(r["asked"], NONE_SEEN / r["megapixels"]) for r in rows if not r["found"] > 0]
+        if none:
+            axes.loglog(
+                *zip(*none, strict=True), "v", color=TEAL, mfc="none", label="none seen: below"
+            )
         axes.set(
             xlabel="asked, false / Mpx", ylabel="found", title="False elements on flat pictures"
         )
@@ -49,6 +58,10 @@ def _location(result: Result) -> bytes:
         axes.set(
             xlabel="step height, noise sd", ylabel="error along the normal, px", title="Location"
         )
+        axes.set_xticks(contrast, [f"{c:g}" for c in contrast])
+        axes.xaxis.set_minor_formatter(NullFormatter())
+        for which in (axes.yaxis.set_major_formatter, axes.yaxis.set_minor_formatter):
+            which(FormatStrFormatter("%g"))
         axes.legend()
 
     return plot(draw)

@@ -25,6 +25,7 @@ DOORS = {
     "tifffile": {"images/decode.py"},
     "rawpy": {"images/extras.py"},
     "av": {"images/extras.py"},
+    "pyarrow": {"pipeline/edgel_table.py"},
     "click": {"cli/"},
     "rich": {"cli/"},
     "matplotlib": {"report/"},

@@ -10,9 +10,11 @@ import subprocess
 import sys
 import textwrap
 import venv
+from dataclasses import replace
 
 import numpy as np
 import pytest
+from scipy.special import ndtr
 
 from patchlab import edges
 from patchlab.bank import load_native, read_bank, reference
@@ -21,7 +23,7 @@ from patchlab.export import RUNTIME, patchlab_bank
 from patchlab.export.patchlab_bank import BankError
 from patchlab.pipeline import bundle
 from patchlab.store import LICENCE
-from tests.bank.banks import picture
+from tests.bank.banks import lattice_bank, picture
 from tests.export.folders import BANKS, put, reseal, scene, write
 
 
@@ -78,6 +80,23 @@ def test_edges_are_those_of_patchlab(folders, name, library):
     # the root of squares has other roundings; float64 sums in another order leave 1e-14 for 0
     rtol, atol = (3e-7 if name == "energy" else 0), (0 if library else 1e-11)
     np.testing.assert_allclose(found.strength, expected.strength, rtol=rtol, atol=atol)
+
+
+def test_octaves_follow_the_same_rules(tmp_path):
+    widths = ((1.1, 1.4), (2.2, 2.8), (4.4, 5.6))
+    bank = replace(lattice_bank("wide", count=6, widths=widths, size=37), octaves=2)
+    loaded = patchlab_bank.load(write(tmp_path / "b", bank, library=False))
+    y, x = np.mgrid[:130, :150]
+    light = 90 + 25 * ndtr((x - 60 - 0.1 * y) / 4) + 20 * ndtr((y - 70) / 0.8)
+    pixels = np.rint(light + np.random.default_rng(4).normal(0, 2, x.shape)).astype(np.uint8)
+    level = float(np.quantile(loaded.strengths(pixels, 0)[0][20:-20, 20:-20], 0.9))
+    found = loaded.edges(pixels, threshold=level)
+    expected = edges.detect(bank, pixels, loaded.responses, threshold=level)
+    assert set(found.scale[found.edges]) == {0, 1, 2}
+    np.testing.assert_array_equal(found.edges, expected.edges)
+    np.testing.assert_array_equal(found.scale, expected.scale)
+    plain = edges.detect(replace(bank, octaves=0), pixels, loaded.responses, threshold=level)
+    assert (plain.edges != expected.edges).any()
 
 
 def test_a_promised_rate_becomes_the_threshold_that_patchlab_takes(folders):

@@ -84,6 +84,58 @@ def test_what_does_not_fit_is_refused_in_one_sentence(folder, tmp_path):
         patchlab.load_bank(tmp_path)
 
 
+@pytest.mark.parametrize(
+    "dtype", ["bool", "int8", "int16", "uint16", "int32", "int64", "float16", "float32", "float64",
+              "complex64", "object", "U3"],
+)  # fmt: skip
+def test_what_an_8_bit_contract_does_not_know_is_refused(folder, dtype):
+    loaded = patchlab.load_bank(folder)
+    pixels = (picture((60, 70)) // 2).astype(dtype)
+    for call in (loaded.responses, loaded.edges, loaded.edgels):
+        with pytest.raises(InputError, match=r"takes Mono8 pixels \(uint8\), not ") as caught:
+            call(pixels)
+        assert "\n" not in str(caught.value)
+
+
+def test_shapes_and_masks_that_mean_nothing_are_refused(folder):
+    loaded, pixels = patchlab.load_bank(folder), picture((60, 70))
+    for call in (loaded.responses, loaded.edges, loaded.edgels):
+        with pytest.raises(InputError, match="one plane"):
+            call(np.stack([pixels] * 3, axis=2))
+        with pytest.raises(InputError, match="masked"):
+            call(np.ma.array(pixels, mask=pixels > 200))
+        with pytest.raises(InputError, match="kernel"):
+            call(pixels[:5])
+
+
+def test_byte_order_and_real_dtypes_change_nothing(tmp_path):
+    twelve, floats = (
+        patchlab.load_bank(write(tmp_path / name, BANKS[name], library=False))
+        for name in ("energy", "line")
+    )
+    codes = picture((40, 50), "Mono12")
+    for other in (codes.astype(">u2"), codes[:, ::-1][:, ::-1], np.ma.array(codes)):
+        np.testing.assert_array_equal(twelve.responses(other), twelve.responses(codes))
+    light = np.round(picture((40, 50), "float32") * 100)
+    for dtype in ("float16", "float64", ">f4", "int32", "uint8"):
+        found = floats.edgels(light.astype(dtype), threshold=3.0)
+        assert found.dtype == patchlab.types.EDGEL
+        assert found.tobytes() == floats.edgels(light.astype("float32"), threshold=3.0).tobytes()
+    for dtype in ("bool", "complex128", "object"):
+        with pytest.raises(InputError, match="takes float32 pixels"):
+            floats.edges(light.astype(dtype), threshold=3.0)
+
+
+def test_codes_beyond_the_contract_s_depth_are_refused(tmp_path):
+    loaded = patchlab.load_bank(write(tmp_path / "b", BANKS["energy"], library=False))
+    pixels = picture((40, 50), "Mono12")
+    pixels[3, 4] = 5000
+    with pytest.raises(InputError, match="5000 is beyond Mono12"):
+        loaded.responses(pixels)
+    with pytest.raises(InputError, match="5000 is beyond Mono12"):
+        loaded.edges(pixels, threshold=3.0)
+
+
 def test_loading_runs_nothing_of_the_folder(folder, tmp_path):
     """A library that would end the process when loaded is not touched unless asked for."""
     bank, _, head = read_bank(folder)
