@@ -112,14 +112,22 @@ class _Task:
     draw: Draw | None
 
 
+@dataclass(frozen=True)
+class _Engine:
+    """What computes a bank: responses, and the compiled library where there is one."""
+
+    respond: Callable[[Any], Any]
+    native: banks.NativeBank | None = None
+
+
 @functools.lru_cache(maxsize=2)
-def _opened(folder: str, bank_id: str) -> tuple[Bank, banks.NativeBank | None, Any]:
+def _opened(folder: str, bank_id: str) -> tuple[Bank, _Engine]:
     path = Path(folder)
     bank, plan, head = banks.read_bank(path)
     native = open_native(path, bank, plan, head)
     if native is None:
-        return bank, None, lambda pixels: banks.responses(bank, pixels, plan)
-    return bank, native, native.responses
+        return bank, _Engine(lambda pixels: banks.responses(bank, pixels, plan))
+    return bank, _Engine(native.responses, native)
 
 
 def _stamp(path: Path) -> list[int]:
@@ -133,7 +141,7 @@ def _stamp(path: Path) -> list[int]:
 
 def _work(task: _Task) -> dict[str, Any]:
     """Find the edges of one unit, write them, and give its line of the journal."""
-    bank, native, respond = _opened(task.bank, task.bank_id)
+    bank, engine = _opened(task.bank, task.bank_id)
     unit, root = task.unit, Path(task.root)
     line: dict[str, Any] = {
         "key": unit.key,
@@ -149,10 +157,10 @@ def _work(task: _Task) -> dict[str, Any]:
         elif unit.part is None:
             for frame in images.read_file(root, unit.file, options):
                 _same_kind(bank, frame)
-                line["frames"].append(_one(bank, frame, native, respond, task))
+                line["frames"].append(_one(bank, frame, engine, task))
         else:
-            frames = images.read_part(root, unit.file, unit.part, options)
-            _film(bank, frames, native, respond, task, line)
+            parts = images.read_part(root, unit.file, unit.part, options)
+            _film(bank, parts, engine, task, line)
     except PatchlabError as error:
         line["reason"] = f"{error.what}; {error.remedy}" if error.remedy else error.what
     return line
@@ -180,8 +188,7 @@ def _same_kind(bank: Bank, frame: Frame) -> None:
 def _film(
     bank: Bank,
     frames: Iterable[tuple[str, Frame | str]],
-    native: banks.NativeBank | None,
-    respond: Any,
+    engine: _Engine,
     task: _Task,
     line: dict[str, Any],
 ) -> None:
@@ -190,7 +197,7 @@ def _film(
         try:
             if isinstance(frame, str):
                 raise InputError(frame, where=name)
-            line["frames"].append(_one(bank, frame, native, respond, task))
+            line["frames"].append(_one(bank, frame, engine, task))
         except PatchlabError as error:
             line["bad"].append({"path": name, "reason": str(error)})
 
@@ -219,17 +226,15 @@ def _stem(file: str, path: str) -> str:
     return f"{stem}_{suffix}" if page == path else f"{stem}_{suffix}_page{page}"
 
 
-def _one(
-    bank: Bank, frame: Frame, native: banks.NativeBank | None, respond: Any, task: _Task
-) -> dict[str, Any]:
+def _one(bank: Bank, frame: Frame, engine: _Engine, task: _Task) -> dict[str, Any]:
     """Edges of one picture; its edgels by the compiled library where that has them."""
     asked, out = task.request, Path(task.out)
     levels = edges.levels_of(bank, asked.what, asked.rate, asked.threshold)
-    place = compiled_edgels(bank, native, levels) if frame.invalid is None else None
+    place = compiled_edgels(bank, engine.native, levels) if frame.invalid is None else None
     found = edges.find(
         bank,
         frame.pixels,
-        respond,
+        engine.respond,
         what=asked.what,
         rate=asked.rate,
         threshold=asked.threshold,
