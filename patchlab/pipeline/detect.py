@@ -20,7 +20,6 @@ from typing import Any, get_args
 from patchlab import bank as banks
 from patchlab import edges, images, store
 from patchlab.errors import InputError, PatchlabError, UsageError
-from patchlab.pipeline.bundle import open_native
 from patchlab.pipeline.desk import may_write
 from patchlab.pipeline.edgel_rules import compiled_edgels
 from patchlab.pipeline.edgel_table import (
@@ -31,7 +30,7 @@ from patchlab.pipeline.edgel_table import (
     write_table,
 )
 from patchlab.pipeline.loaded import bank_folder
-from patchlab.pipeline.use import orientation_count
+from patchlab.pipeline.use import Engine, engine_of, orientation_count
 from patchlab.progress import Progress, silent
 from patchlab.types import Bank, EdgeMap, Frame
 from patchlab.workers import map_ordered
@@ -112,22 +111,11 @@ class _Task:
     draw: Draw | None
 
 
-@dataclass(frozen=True)
-class _Engine:
-    """What computes a bank: responses, and the compiled library where there is one."""
-
-    respond: Callable[[Any], Any]
-    native: banks.NativeBank | None = None
-
-
 @functools.lru_cache(maxsize=2)
-def _opened(folder: str, bank_id: str) -> tuple[Bank, _Engine]:
+def _opened(folder: str, bank_id: str) -> tuple[Bank, Engine]:
     path = Path(folder)
     bank, plan, head = banks.read_bank(path)
-    native = open_native(path, bank, plan, head)
-    if native is None:
-        return bank, _Engine(lambda pixels: banks.responses(bank, pixels, plan))
-    return bank, _Engine(native.responses, native)
+    return bank, engine_of(path, bank, plan, head)
 
 
 def _stamp(path: Path) -> list[int]:
@@ -188,7 +176,7 @@ def _same_kind(bank: Bank, frame: Frame) -> None:
 def _film(
     bank: Bank,
     frames: Iterable[tuple[str, Frame | str]],
-    engine: _Engine,
+    engine: Engine,
     task: _Task,
     line: dict[str, Any],
 ) -> None:
@@ -226,7 +214,7 @@ def _stem(file: str, path: str) -> str:
     return f"{stem}_{suffix}" if page == path else f"{stem}_{suffix}_page{page}"
 
 
-def _one(bank: Bank, frame: Frame, engine: _Engine, task: _Task) -> dict[str, Any]:
+def _one(bank: Bank, frame: Frame, engine: Engine, task: _Task) -> dict[str, Any]:
     """Edges of one picture; its edgels by the compiled library where that has them."""
     asked, out = task.request, Path(task.out)
     levels = edges.levels_of(bank, asked.what, asked.rate, asked.threshold)
