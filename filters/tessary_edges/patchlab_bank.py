@@ -5,6 +5,7 @@
     bank = patchlab_bank.load("path/to/the/bank")
     planes = bank.responses(picture)  # float32 (kernels, height, width)
     found = bank.edges(picture)       # found.edges, found.strength, found.orientation, ...
+    points = bank.edgels(picture)     # points["x"], points["y"], ... (takes the library)
 
 This one file is all it takes beside the bank's folder: Python 3.10 or newer and numpy.
 
@@ -50,6 +51,8 @@ FORMATS = {
     "Mono16": ("uint16", 16),
     "float32": ("float32", 32),
 }
+COLOURS = {"RGB": 1, "BGR": 1, "BayerRG": 2, "BayerGR": 2, "BayerGB": 2, "BayerBG": 2}
+"""Kinds of colour pixels, with the rows and columns of samples in one: 2 for a mosaic's cell."""
 PARITIES = {"step": ("odd",), "line": ("even",), "energy": ("even", "odd")}
 PAD_MODES = {
     "zero": "constant",
@@ -62,6 +65,19 @@ RATE = 10.0
 """Default promise, false edge elements per megapixel of flat picture."""
 BAND_VALUES = 1 << 19
 """Values that numpy sums at a time (4 MB)."""
+
+
+EDGEL = np.dtype(
+    {
+        "names": ["x", "y", "theta", "strength", "sd", "width", "scale", "kind"],
+        "formats": ["f4"] * 6 + ["u1"] * 2,
+        "offsets": [0, 4, 8, 12, 16, 20, 24, 25],
+        "itemsize": 28,
+    }
+)
+"""One edge element, as the C header describes it: position (pixels), normal direction (radians,
+towards the brighter side of a step), strength, standard error of the position along the normal,
+width of a line, scale, kind (0 step, 1 bright line, 2 dark line)."""
 
 
 class BankError(ValueError):
@@ -82,6 +98,21 @@ class Edges(NamedTuple):
     orientation: Array
     scale: Array
     threshold: float
+
+
+class FixedPoint(NamedTuple):
+    """A bank in 16-bit fixed point.
+
+    ``step`` : float32 (n,), working value of one count of a kernel. ``error_bound`` : (n,), largest
+    error of ``step * count``. ``taps`` : the whole kernels; ``codes`` : of every pixel value;
+    ``shift`` : bits that a sum is shifted by.
+    """
+
+    step: Array
+    error_bound: Array
+    taps: Array
+    codes: Array
+    shift: Array
 
 
 def load(folder: str | os.PathLike[str], library: bool | None = None) -> Bank:
@@ -114,9 +145,11 @@ class Bank:
     """A loaded bank; :func:`load` makes it.
 
     Attributes: ``name``; ``kernels`` (names, in the order of the planes); ``taps`` float32
-    (n, h, h); ``size`` (side of a kernel); ``pixels`` (format by its GenICam name) and ``dtype``;
-    ``border``; ``error_bound`` (one a kernel); ``scales`` and ``angles`` (radians, one a direction,
-    by scale); ``manifest``; ``compiled`` (the library in use, or None).
+    (n, h, h), of colour pixels (n, h, h, planes); ``size`` (side of a kernel); ``pixels`` (format
+    by its GenICam name) and ``dtype``; ``border``; ``error_bound`` (one a kernel); ``scales`` and
+    ``angles`` (radians, one a direction, by scale); ``manifest``; ``compiled`` (the library in
+    use, or None); ``fixed`` (fixed point, or None): its ``step`` (value of one count) and
+    ``error_bound``, one a kernel.
     """
 
     compiled: _Library | None = None
@@ -138,10 +171,15 @@ class Bank:
         self.kernels = tuple(_identifier(k["name"]) for k in head["kernels"])
         self.border = _known(head["border"], PAD_MODES, "border")
         self.strength = _known(head["strength"], PARITIES, "strength")
-        self.pixels = _known(head["input"]["pixels"], FORMATS, "pixel format")
-        self.dtype, self.bits = np.dtype(FORMATS[self.pixels][0]), FORMATS[self.pixels][1]
+        self._fill_pixels(str(head["input"]["pixels"]))
         self.taps = self._array("kernels.npy")
-        n, h, w = self.taps.shape
+        self._mix = self._array("mix.npy") if head.get("mix") else None
+        planes = self.samples if self._mix is None else self._mix.shape[0]
+        if self.taps.shape[3:] != (() if self.samples == 1 else (planes,)):
+            raise BankError(f"{self.folder}: the kernels do not fit the pixel format")
+        if self._mix is not None and self._mix.shape[1:] != (self.samples,):
+            raise BankError(f"{self.folder}: the mix does not fit the pixel format")
+        n, h, w = self.taps.shape[:3]
         if n != len(self.kernels) or h != w or h % 2 == 0 or n == 0:
             raise BankError(f"{self.folder}: the kernels do not fit the manifest")
         self.size, self.radius = h, h // 2
@@ -149,9 +187,45 @@ class Bank:
         self._table = self._array("input_table.npy") if self.bits < 32 else None
         if self._table is not None and self._table.shape != (1 << self.bits,):
             raise BankError(f"{self.folder}: the input table does not fit the pixel format")
+        self.fixed = self._fixed_point()
         self._members = _members(head["kernels"], self.strength)
         self.scales = tuple(sorted(self._members))
         self.angles = {s: _angles(head["kernels"], self._members[s]) for s in self.scales}
+
+    def _fill_pixels(self, pixels: str) -> None:
+        """What a pixel is: its samples, their depth, and the rows they stand in."""
+        kind = pixels.rstrip("0123456789")
+        self.cell = COLOURS.get(kind, 1)
+        self.samples = (3 if self.cell == 1 else 4) if kind in COLOURS else 1
+        mono = f"Mono{pixels[len(kind) :]}" if kind in COLOURS else pixels
+        self.pixels = pixels
+        self.dtype = np.dtype(FORMATS[_known(mono, FORMATS, "pixel format")][0])
+        self.bits = FORMATS[mono][1]
+
+    def size_of(self, image: Array) -> tuple[int, int]:
+        """Height and width of a picture, in pixels (of a mosaic, in cells)."""
+        return image.shape[0] // self.cell, image.shape[1] // self.cell
+
+    def _fixed_point(self) -> FixedPoint | None:
+        about = self.manifest["fixed_point"]
+        if about is None:
+            return None
+        taps, codes = (self._whole(n) for n in ("fixed_kernels.npy", "fixed_codes.npy"))
+        shift, step, bound = (
+            np.array(about[k]) for k in ("shift", "value_of_a_count", "error_bound")
+        )
+        fits = taps.shape == self.taps.shape and codes.shape == (1 << self.bits,)
+        if not fits or any(v.shape != (len(taps),) for v in (shift, step, bound)):
+            raise BankError(f"{self.folder}: the fixed point does not fit the kernels")
+        if shift.dtype.kind != "i" or not ((shift >= 0) & (shift < 32)).all():
+            raise BankError(f"{self.folder}: the fixed point's shifts make no sense")
+        return FixedPoint(step.astype(np.float32), bound.astype(float), taps, codes, shift)
+
+    def _whole(self, name: str) -> Array:
+        found = _npy(_read(self.folder, self.manifest, name), self.folder / name)
+        if found.dtype.kind != "i":
+            raise BankError(f"{self.folder / name}: holds other things than whole numbers")
+        return found.astype(np.int64)
 
     def _array(self, name: str) -> Array:
         data = _read(self.folder, self.manifest, name)
@@ -174,7 +248,8 @@ class Bank:
 
         Parameters
         ----------
-        image : (h, w) of the bank's dtype, both sides at least ``size``
+        image : (h, w) of the bank's dtype, both sides at least ``size``; (h, w, 3) where pixels
+            are RGB or BGR; of a Bayer bank the mosaic (2 h, 2 w), and h, w count its cells
         threads : bands of rows computed side by side by the compiled library
 
         Returns
@@ -190,20 +265,81 @@ class Bank:
             return self.compiled.responses(image, threads)
         return self._planes(image, range(len(self.kernels)))
 
+    def responses_fixed(self, image: Array, threads: int = 1) -> tuple[Array, int]:
+        """Responses in 16-bit fixed point, the same bits with the library and without.
+
+        Parameters
+        ----------
+        image, threads : as :meth:`responses`
+
+        Returns
+        -------
+        int16 (n, h, w) : counts; ``fixed.step[k] * counts[k]`` are responses
+        int : how many counts stand at the ends of the range
+
+        Raises
+        ------
+        BankError : the picture does not fit, or the bank has no fixed point.
+        """
+        image = self._checked(image)
+        self._need_fixed()
+        if self.compiled is not None:
+            return self.compiled.responses_fixed(image, threads)
+        out = self._counts(image, range(len(self.kernels)))
+        return out, int((np.abs(out.astype(np.int32)) == 32767).sum())
+
+    def _need_fixed(self) -> FixedPoint:
+        if self.fixed is None:
+            raise BankError(f"bank {self.name} has no fixed point: it takes {self.pixels} pixels")
+        return self.fixed
+
+    def _counts(self, image: Array, kernels: Sequence[int]) -> Array:
+        """Some kernels' counts by numpy: whole numbers below 2^53, exact in float64."""
+        fixed = self._need_fixed()
+        self._working(image)  # refuses codes beyond the format
+        sums = self._sums(
+            fixed.codes[image].astype(np.float64)[None], fixed.taps[list(kernels)], np.int64
+        )
+        for plane, k in zip(sums, kernels, strict=True):
+            b = int(fixed.shift[k])
+            plane[:] = (plane + (1 << b >> 1)) >> b
+        return np.clip(sums, -32767, 32767).astype(np.int16)
+
     def _checked(self, image: Array) -> Array:
-        if not isinstance(image, np.ndarray) or image.ndim != 2:
+        flat = self.samples == 1 or self.cell > 1
+        tail = () if flat else (self.samples,)
+        if not isinstance(image, np.ndarray) or image.ndim < 2 or image.shape[2:] != tail:
             shape = getattr(image, "shape", type(image).__name__)
-            raise BankError(f"a picture is one plane (height, width), not {shape}")
+            what = "one plane (height, width)" if flat else f"(height, width, {self.samples})"
+            raise BankError(f"a picture is {what}, not {shape}")
         if image.dtype != self.dtype:
             raise BankError(
                 f"bank {self.name} takes {self.pixels} pixels ({self.dtype}), not {image.dtype}"
             )
-        if min(image.shape) < self.size:
+        height, width = self.size_of(image)
+        if (height * self.cell, width * self.cell) != image.shape[:2]:
             raise BankError(
-                f"a picture of {image.shape[1]} x {image.shape[0]} pixels is smaller than the "
+                f"a mosaic of cells of {self.cell} x {self.cell} has cells that are cut"
+            )
+        if min(height, width) < self.size:
+            raise BankError(
+                f"a picture of {width} x {height} pixels is smaller than the "
                 f"bank's {self.size} x {self.size} kernels"
             )
         return image
+
+    def _working_planes(self, image: Array) -> Array:
+        """Working planes in float64, (planes, h, w)."""
+        tabled = self._working(image).astype(np.float64)
+        if self.samples == 1:
+            return tabled[None]
+        if self.cell > 1:
+            (h, w), c = self.size_of(image), self.cell
+            cells = tabled.reshape(h, c, w, c).swapaxes(1, 2)
+            tabled = cells.reshape(h, w, self.samples)
+        if self._mix is not None:
+            tabled = tabled @ self._mix.astype(np.float64).T
+        return np.moveaxis(tabled, -1, 0)
 
     def _working(self, image: Array) -> Array:
         """Working values: the input table, or its formula for float pixels."""
@@ -219,23 +355,32 @@ class Bank:
 
     def _planes(self, image: Array, kernels: Sequence[int]) -> Array:
         """Some kernels' responses by numpy: float64 sums, rounded once."""
-        h, w = image.shape
+        planes = self._working_planes(image)
+        return self._sums(planes, self.taps[list(kernels)], np.float32)
+
+    def _sums(self, planes: Array, some: Array, dtype: Any) -> Array:
+        """Correlations with working planes (planes, h, w), summed in float64."""
+        h, w = planes.shape[1:]
         mode: Any = PAD_MODES[self.border]
-        padded = np.pad(self._working(image).astype(np.float64), self.radius, mode=mode)
+        padded = [np.pad(plane, self.radius, mode=mode) for plane in planes]
         area = self.size**2
-        taps = self.taps[list(kernels)].reshape(-1, area).astype(np.float64)
-        out = np.empty((len(taps), h, w), np.float32)
+        some = some.reshape(-1, area, len(planes)).astype(np.float64)
+        out = np.empty((len(some), h, w), dtype)
         step = max(1, BAND_VALUES // (w * area))
         for top in range(0, h, step):
-            rows = padded[top : min(top + step, h) + 2 * self.radius]
-            view = np.lib.stride_tricks.sliding_window_view(rows, (self.size, self.size))
-            sums = taps @ view.reshape(-1, area).T
-            out[:, top : top + step] = sums.reshape(len(taps), -1, w)
+            sums: Array = 0.0
+            for plane, taps in zip(padded, np.moveaxis(some, -1, 0), strict=True):
+                rows = plane[top : min(top + step, h) + 2 * self.radius]
+                view = np.lib.stride_tricks.sliding_window_view(rows, (self.size, self.size))
+                sums = sums + taps @ view.reshape(-1, area).T
+            out[:, top : top + step] = sums.reshape(len(some), -1, w)
         return out
 
     # ------------------------------------------------------------ edges
 
-    def strengths(self, image: Array, scale: int, threads: int = 1) -> tuple[Array, Array]:
+    def strengths(
+        self, image: Array, scale: int, threads: int = 1, fixed: bool = False
+    ) -> tuple[Array, Array]:
         """Strength of one scale and the number of the winning direction.
 
         Parameters
@@ -243,6 +388,7 @@ class Bank:
         image : as :meth:`responses`
         scale : one of ``scales``
         threads : as :meth:`responses`
+        fixed : in 16-bit fixed point
 
         Returns
         -------
@@ -255,16 +401,33 @@ class Bank:
         image = self._checked(image)
         if scale not in self.scales:
             raise BankError(f"bank {self.name} has no scale {scale}")
+        if fixed:
+            self._need_fixed()
         if self.compiled is not None:
-            return self.compiled.edges(image, self.scales.index(scale), threads)
-        best = np.full(image.shape, -1, np.float32)
-        winner = np.zeros(image.shape, np.uint8)
+            return self.compiled.edges(image, self.scales.index(scale), threads, fixed)
+        if fixed:
+            return self._strengths_fixed(image, scale)
+        best = np.full(self.size_of(image), -1, np.float32)
+        winner = np.zeros(best.shape, np.uint8)
         for turn, members in self._members[scale]:
             planes = self._planes(image, members)
             size = np.abs(planes[0]) if len(planes) == 1 else planes[0] ** 2 + planes[1] ** 2
             winner[size > best] = turn
             np.maximum(best, size, out=best)
         return (np.sqrt(best) if self.strength == "energy" else best), winner
+
+    def _strengths_fixed(self, image: Array, scale: int) -> tuple[Array, Array]:
+        best = np.full(image.shape, -1, np.int32)
+        winner = np.zeros(image.shape, np.uint8)
+        for turn, members in self._members[scale]:
+            planes = self._counts(image, members).astype(np.int32)
+            size = np.abs(planes[0]) if len(planes) == 1 else planes[0] ** 2 + planes[1] ** 2
+            winner[size > best] = turn
+            np.maximum(best, size, out=best)
+        strength = best.astype(np.float32)
+        if self.strength == "energy":
+            strength = np.sqrt(strength)
+        return self._need_fixed().step[self._members[scale][0][1][0]] * strength, winner
 
     def threshold(self, rate: float = RATE) -> float:
         """The strength that promises ``rate`` false elements per megapixel of flat picture.
@@ -291,6 +454,8 @@ class Bank:
         rate: float | None = None,
         threshold: float | None = None,
         threads: int = 1,
+        invalid: Array | None = None,
+        fixed: bool = False,
     ) -> Edges:
         """Edges of one picture.
 
@@ -300,6 +465,8 @@ class Bank:
         rate : false elements per megapixel of flat picture; 10 when nothing is given
         threshold : a strength instead of a rate
         threads : as :meth:`responses`
+        invalid : bool (h, w); elements whose kernel touches such a pixel are dropped
+        fixed : strengths in 16-bit fixed point
 
         Returns
         -------
@@ -313,13 +480,53 @@ class Bank:
         rules = self._rules()
         high = self._high(rate, threshold)
         low = float(rules["hysteresis"]) * high
-        maps = [self.strengths(image, s["scale"], threads) for s in rules["scales"]]
+        maps = [self.strengths(image, s["scale"], threads, fixed) for s in rules["scales"]]
         planes = [
             _candidates(strength, turn, about, rules, low, self._rival(image, about, threads))
             for (strength, turn), about in zip(maps, rules["scales"], strict=True)
         ]
-        edges, level = _cascade(planes, low, high, int(rules["dilation_px"]))
+        for k, about in enumerate(rules["scales"]):
+            if about["softer"] is not None:  # soft edges are left to an octave
+                place, share, more = about["softer"]
+                half = math.ceil(float(rules["scales"][place]["sigma_px"]))
+                own, theirs = (_largest_around(maps[n][0], half) for n in (k, place))
+                planes[k][own < np.float32(share) * theirs + np.float32(more)] = 0
+        if invalid is not None:
+            _drop(planes, _mask(invalid, image), rules)
+        edges, level = _cascade(planes, low, high, [s["apart_px"] for s in rules["scales"]])
         return _joined(maps, [s["scale"] for s in rules["scales"]], edges, level, high)
+
+    def edgels(
+        self,
+        image: Array,
+        rate: float | None = None,
+        threshold: float | None = None,
+        line_threshold: float = 0.0,
+    ) -> Array:
+        """Edge elements of one picture, placed below the pixel. Only the library finds them.
+
+        Parameters
+        ----------
+        image : as :meth:`responses`
+        rate, threshold : as :meth:`edges`
+        line_threshold : a strength from which lines are found beside steps; 0 looks for none
+
+        Returns
+        -------
+        structured array of :data:`EDGEL`, row by row
+
+        Raises
+        ------
+        BankError : as :meth:`edges`; no compiled library, or one that finds no edgels.
+        """
+        image = self._checked(image)
+        high = self._high(rate, threshold)
+        if self.compiled is None or not self.compiled.has_edgels:
+            raise BankError(
+                f"bank {self.name}: edgels take a compiled library that finds them; "
+                f"compile {self.name}.c for this machine"
+            )
+        return self.compiled.edgels(image, high, float(line_threshold))
 
     def _rival(self, image: Array, about: Mapping[str, Any], threads: int) -> Array | None:
         """The largest response of the kernels that a scale's elements are held against."""
@@ -380,6 +587,14 @@ def _checked_rules(given: Mapping[str, Any], bank: Bank) -> dict[str, Any]:
                     int(number(k, 0, len(bank.kernels) - 1)) for k in entry["rival_kernels"]
                 ],
                 "rival_share": number(entry["rival_share"], 0, 4),
+                "softer": None
+                if "softer" not in entry
+                else (
+                    int(number(entry["softer"][0], 0, len(given["scales"]) - 1)),
+                    number(entry["softer"][1], 0, 1),
+                    number(entry["softer"][2], 0, 4),
+                ),
+                "apart_px": int(number(entry.get("apart_px", given["dilation_px"]), 0, 64)),
             }
         )
     if not scales:
@@ -474,6 +689,20 @@ def _candidates(
     return np.where(keep, strength, np.float32(0))
 
 
+def _mask(invalid: Array, image: Array) -> Array:
+    if not isinstance(invalid, np.ndarray) or invalid.dtype != bool:
+        raise BankError("invalid is an array of bool, one a pixel")
+    if invalid.shape != image.shape:
+        raise BankError(f"invalid is {invalid.shape}, the picture {image.shape}")
+    return invalid
+
+
+def _drop(planes: list[Array], invalid: Array, rules: Mapping[str, Any]) -> None:
+    """Remove the elements whose kernel touches a pixel that does not count."""
+    for plane, about in zip(planes, rules["scales"], strict=True):
+        plane[_largest_around(invalid, int(about["reach_px"]))] = 0
+
+
 def _largest_around(plane: Array, half: int) -> Array:
     """The largest value of every (2 half + 1) square, the rim repeated outwards."""
     out, size = np.pad(plane, half, mode="edge"), 2 * half + 1
@@ -514,12 +743,12 @@ def _dilate(mask: Array, radius: int) -> Array:
     return out
 
 
-def _cascade(planes: list[Array], low: float, high: float, dilation: int) -> tuple[Array, Array]:
+def _cascade(planes: list[Array], low: float, high: float, apart: list[int]) -> tuple[Array, Array]:
     """Finest scale first; a coarser one adds only where finer ones found nothing."""
     edges = _hysteresis(planes[0], low, high)
     level = np.zeros(edges.shape, np.uint8)
     for k, plane in enumerate(planes[1:], 1):
-        more = _hysteresis(plane, low, high) & ~_dilate(edges, dilation)
+        more = _hysteresis(plane, low, high) & ~_dilate(edges, apart[k])
         edges |= more
         level[more] = k
     return edges, level
@@ -553,7 +782,7 @@ class _Library:
     """The compiled code, loaded from bytes whose hash was checked."""
 
     def __init__(self, bank: Bank, data: bytes) -> None:
-        self.kernels, self.name = len(bank.kernels), bank.name
+        self.kernels, self.name, self.size_of = len(bank.kernels), bank.name, bank.size_of
         self._code = _open(data, bank.name)
         pointer, stride, number = ctypes.c_void_p, ctypes.c_ssize_t, ctypes.c_int
         picture = [pointer, stride, number, number, number, number]
@@ -565,6 +794,20 @@ class _Library:
         self._edges = self._function(
             "edges_rows", number, *picture, number, pointer, stride, pointer, stride, pointer
         )
+        if bank.fixed is not None:
+            self._counts = self._function(
+                "responses_q_rows", number, *picture, pointer, stride, stride, pointer, pointer
+            )
+            self._edges_q = self._function(
+                "edges_q_rows", number, *picture, number, pointer, stride, pointer, stride, pointer
+            )
+        self.has_edgels = hasattr(self._code, f"{self.name}_edgels")
+        if self.has_edgels:
+            size, real = ctypes.c_size_t, ctypes.c_double
+            self._edgels_scratch = self._function("edgels_scratch_bytes", size, number, number)
+            self._edgels = self._function(
+                "edgels", number, *picture[:4], real, real, pointer, size, pointer, pointer
+            )
         if self._function("abi", number)() != bank.manifest["interface"]:
             raise BankError(f"the library in {bank.folder} belongs to another bank")
 
@@ -577,7 +820,7 @@ class _Library:
         return function
 
     def responses(self, image: Array, threads: int) -> Array:
-        out = np.empty((self.kernels, *image.shape), np.float32)
+        out = np.empty((self.kernels, *self.size_of(image)), np.float32)
 
         def band(place: tuple[Any, ...], first: int, count: int, scratch: Array) -> int:
             to = out.ctypes.data + first * out.strides[1]
@@ -588,11 +831,30 @@ class _Library:
         self._run(image, threads, band)
         return out
 
-    def edges(self, image: Array, place_of_scale: int, threads: int) -> tuple[Array, Array]:
-        strength, turn = np.empty(image.shape, np.float32), np.empty(image.shape, np.uint8)
+    def responses_fixed(self, image: Array, threads: int) -> tuple[Array, int]:
+        out, ends = np.empty((self.kernels, *image.shape), np.int16), []
 
         def band(place: tuple[Any, ...], first: int, count: int, scratch: Array) -> int:
-            code = self._edges(
+            found = ctypes.c_uint64(0)
+            code = self._counts(
+                *place, first, count, out.ctypes.data + first * out.strides[1], out.strides[1],
+                out.strides[0], ctypes.addressof(found), scratch.ctypes.data,
+            )  # fmt: skip
+            ends.append(int(found.value))
+            return int(code)
+
+        self._run(image, threads, band)
+        return out, sum(ends)
+
+    def edges(
+        self, image: Array, place_of_scale: int, threads: int, fixed: bool
+    ) -> tuple[Array, Array]:
+        call = self._edges_q if fixed else self._edges
+        size = self.size_of(image)
+        strength, turn = np.empty(size, np.float32), np.empty(size, np.uint8)
+
+        def band(place: tuple[Any, ...], first: int, count: int, scratch: Array) -> int:
+            code = call(
                 *place, first, count, place_of_scale,
                 strength[first:].ctypes.data, strength.strides[0],
                 turn[first:].ctypes.data, turn.strides[0], scratch.ctypes.data,
@@ -602,11 +864,35 @@ class _Library:
         self._run(image, threads, band)
         return strength, turn
 
-    def _run(self, image: Array, threads: int, band: Any) -> None:
-        if image.strides[1] != image.itemsize or abs(image.strides[0]) < image.shape[1]:
+    def edgels(self, image: Array, high: float, lines: float) -> Array:
+        image, place = self._placed(image)
+        scratch = np.empty(self._edgels_scratch(*place[2:]), np.uint8)
+        count, capacity = ctypes.c_size_t(0), image.size // 2
+        while True:
+            out = np.empty(capacity, EDGEL)
+            code = self._edgels(
+                *place, high, lines, out.ctypes.data, capacity, ctypes.addressof(count),
+                scratch.ctypes.data,
+            )  # fmt: skip
+            if count.value <= capacity:
+                self._check(code)
+                return out[: count.value].copy()
+            capacity = count.value
+
+    def _placed(self, image: Array) -> tuple[Array, tuple[int, int, int, int]]:
+        """A picture whose rows the code can walk, with its address, row stride, width, height."""
+        if not image[0].flags.c_contiguous or abs(image.strides[0]) < image[0].nbytes:
             image = np.ascontiguousarray(image)
-        h, w = image.shape
-        place = (image.ctypes.data, image.strides[0], w, h)
+        h, w = self.size_of(image)
+        return image, (image.ctypes.data, image.strides[0], w, h)
+
+    def _check(self, code: int) -> None:
+        if code:
+            raise BankError(f"bank {self.name}: {self._message(code).decode('ascii')}")
+
+    def _run(self, image: Array, threads: int, band: Any) -> None:
+        image, place = self._placed(image)
+        w, h = place[2:]
 
         def one(rows: tuple[int, int]) -> int:
             return int(band(place, *rows, np.empty(self._scratch(w, h), np.uint8)))
@@ -618,8 +904,7 @@ class _Library:
             with ThreadPoolExecutor(len(bands)) as pool:
                 codes = list(pool.map(one, bands))
         for code in codes:
-            if code:
-                raise BankError(f"bank {self.name}: {self._message(code).decode('ascii')}")
+            self._check(code)
 
 
 def _bands(height: int, count: int) -> Iterator[tuple[int, int]]:

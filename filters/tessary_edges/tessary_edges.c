@@ -7,8 +7,9 @@
  * working values of the last 13 rows. For every stretch of tessary_edges_CHUNK output pixels
  * the rows of the ring are folded (added and subtracted about the middle row) and
  * dotted with the plan's coefficients; a kernel's response is a signed sum of such
- * products. Kernels by tile transforms, where the plan has any, take blocks of rows instead.
- * The plan: parity, 564 multiplies a pixel.
+ * products. Kernels by tile transforms or at half resolution, where the plan
+ * has any, take blocks of rows instead.
+ * The plan: parity, 672 multiplies a pixel.
  *
  * This file includes itself once for every instruction set, with tessary_edges_LANES set to the
  * floats in one vector. -Dtessary_edges_MAX_LANES=1 leaves nothing but plain C.
@@ -102,30 +103,45 @@ static tessary_edges_TARGET void tessary_edges_FN(fold)(const float *const *rows
     }
 }
 
-/* 1 x 6 x 4 coefficients, even in y, odd in x */
+/* 4 x 7 x 6 coefficients, even in y, odd in x */
 static tessary_edges_TARGET void tessary_edges_FN(group0)(const float *s, float *t)
 {
     int x;
     for (x = 0; x < tessary_edges_CHUNK; x += 2 * tessary_edges_LANES) {
         const float *k = tessary_edges_group0_taps;
         tessary_edges_FN(vec) a0 = {0.0f}, b0 = {0.0f};
+        tessary_edges_FN(vec) a1 = {0.0f}, b1 = {0.0f};
+        tessary_edges_FN(vec) a2 = {0.0f}, b2 = {0.0f};
+        tessary_edges_FN(vec) a3 = {0.0f}, b3 = {0.0f};
         int j, i;
-        for (j = 0; j < 6; ++j) {
+        for (j = 0; j < 7; ++j) {
             const float *const r = s + (ptrdiff_t)j * tessary_edges_LINE + x + tessary_edges_RADIUS;
-            for (i = 1; i < 5; ++i) {
+            for (i = 1; i < 7; ++i) {
                 const tessary_edges_FN(vec) p = tessary_edges_LOAD(r + i) - tessary_edges_LOAD(r - i);
                 const tessary_edges_FN(vec) q = tessary_edges_LOAD(r + tessary_edges_LANES + i) - tessary_edges_LOAD(r + tessary_edges_LANES - i);
                 tessary_edges_MUL_ADD(a0, p, k[0]);
                 tessary_edges_MUL_ADD(b0, q, k[0]);
-                k += 1;
+                tessary_edges_MUL_ADD(a1, p, k[1]);
+                tessary_edges_MUL_ADD(b1, q, k[1]);
+                tessary_edges_MUL_ADD(a2, p, k[2]);
+                tessary_edges_MUL_ADD(b2, q, k[2]);
+                tessary_edges_MUL_ADD(a3, p, k[3]);
+                tessary_edges_MUL_ADD(b3, q, k[3]);
+                k += 4;
             }
         }
         tessary_edges_STORE(t + 0 * tessary_edges_CHUNK + x, a0);
         tessary_edges_STORE(t + 0 * tessary_edges_CHUNK + x + tessary_edges_LANES, b0);
+        tessary_edges_STORE(t + 1 * tessary_edges_CHUNK + x, a1);
+        tessary_edges_STORE(t + 1 * tessary_edges_CHUNK + x + tessary_edges_LANES, b1);
+        tessary_edges_STORE(t + 3 * tessary_edges_CHUNK + x, a2);
+        tessary_edges_STORE(t + 3 * tessary_edges_CHUNK + x + tessary_edges_LANES, b2);
+        tessary_edges_STORE(t + 5 * tessary_edges_CHUNK + x, a3);
+        tessary_edges_STORE(t + 5 * tessary_edges_CHUNK + x + tessary_edges_LANES, b3);
     }
 }
 
-/* 3 x 6 x 5 coefficients, even in y, odd in x */
+/* 4 x 6 x 7 coefficients, odd in y, even in x */
 static tessary_edges_TARGET void tessary_edges_FN(group1)(const float *s, float *t)
 {
     int x;
@@ -134,71 +150,9 @@ static tessary_edges_TARGET void tessary_edges_FN(group1)(const float *s, float 
         tessary_edges_FN(vec) a0 = {0.0f}, b0 = {0.0f};
         tessary_edges_FN(vec) a1 = {0.0f}, b1 = {0.0f};
         tessary_edges_FN(vec) a2 = {0.0f}, b2 = {0.0f};
+        tessary_edges_FN(vec) a3 = {0.0f}, b3 = {0.0f};
         int j, i;
-        for (j = 0; j < 6; ++j) {
-            const float *const r = s + (ptrdiff_t)j * tessary_edges_LINE + x + tessary_edges_RADIUS;
-            for (i = 1; i < 6; ++i) {
-                const tessary_edges_FN(vec) p = tessary_edges_LOAD(r + i) - tessary_edges_LOAD(r - i);
-                const tessary_edges_FN(vec) q = tessary_edges_LOAD(r + tessary_edges_LANES + i) - tessary_edges_LOAD(r + tessary_edges_LANES - i);
-                tessary_edges_MUL_ADD(a0, p, k[0]);
-                tessary_edges_MUL_ADD(b0, q, k[0]);
-                tessary_edges_MUL_ADD(a1, p, k[1]);
-                tessary_edges_MUL_ADD(b1, q, k[1]);
-                tessary_edges_MUL_ADD(a2, p, k[2]);
-                tessary_edges_MUL_ADD(b2, q, k[2]);
-                k += 3;
-            }
-        }
-        tessary_edges_STORE(t + 1 * tessary_edges_CHUNK + x, a0);
-        tessary_edges_STORE(t + 1 * tessary_edges_CHUNK + x + tessary_edges_LANES, b0);
-        tessary_edges_STORE(t + 3 * tessary_edges_CHUNK + x, a1);
-        tessary_edges_STORE(t + 3 * tessary_edges_CHUNK + x + tessary_edges_LANES, b1);
-        tessary_edges_STORE(t + 5 * tessary_edges_CHUNK + x, a2);
-        tessary_edges_STORE(t + 5 * tessary_edges_CHUNK + x + tessary_edges_LANES, b2);
-    }
-}
-
-/* 1 x 4 x 6 coefficients, odd in y, even in x */
-static tessary_edges_TARGET void tessary_edges_FN(group2)(const float *s, float *t)
-{
-    int x;
-    for (x = 0; x < tessary_edges_CHUNK; x += 2 * tessary_edges_LANES) {
-        const float *k = tessary_edges_group2_taps;
-        tessary_edges_FN(vec) a0 = {0.0f}, b0 = {0.0f};
-        int j, i;
-        for (j = 7; j < 11; ++j) {
-            const float *const r = s + (ptrdiff_t)j * tessary_edges_LINE + x + tessary_edges_RADIUS;
-            {
-                const tessary_edges_FN(vec) p = tessary_edges_LOAD(r);
-                const tessary_edges_FN(vec) q = tessary_edges_LOAD(r + tessary_edges_LANES);
-                tessary_edges_MUL_ADD(a0, p, k[0]);
-                tessary_edges_MUL_ADD(b0, q, k[0]);
-                k += 1;
-            }
-            for (i = 1; i < 6; ++i) {
-                const tessary_edges_FN(vec) p = tessary_edges_LOAD(r + i) + tessary_edges_LOAD(r - i);
-                const tessary_edges_FN(vec) q = tessary_edges_LOAD(r + tessary_edges_LANES + i) + tessary_edges_LOAD(r + tessary_edges_LANES - i);
-                tessary_edges_MUL_ADD(a0, p, k[0]);
-                tessary_edges_MUL_ADD(b0, q, k[0]);
-                k += 1;
-            }
-        }
-        tessary_edges_STORE(t + 7 * tessary_edges_CHUNK + x, a0);
-        tessary_edges_STORE(t + 7 * tessary_edges_CHUNK + x + tessary_edges_LANES, b0);
-    }
-}
-
-/* 3 x 5 x 6 coefficients, odd in y, even in x */
-static tessary_edges_TARGET void tessary_edges_FN(group3)(const float *s, float *t)
-{
-    int x;
-    for (x = 0; x < tessary_edges_CHUNK; x += 2 * tessary_edges_LANES) {
-        const float *k = tessary_edges_group3_taps;
-        tessary_edges_FN(vec) a0 = {0.0f}, b0 = {0.0f};
-        tessary_edges_FN(vec) a1 = {0.0f}, b1 = {0.0f};
-        tessary_edges_FN(vec) a2 = {0.0f}, b2 = {0.0f};
-        int j, i;
-        for (j = 7; j < 12; ++j) {
+        for (j = 7; j < 13; ++j) {
             const float *const r = s + (ptrdiff_t)j * tessary_edges_LINE + x + tessary_edges_RADIUS;
             {
                 const tessary_edges_FN(vec) p = tessary_edges_LOAD(r);
@@ -209,9 +163,11 @@ static tessary_edges_TARGET void tessary_edges_FN(group3)(const float *s, float 
                 tessary_edges_MUL_ADD(b1, q, k[1]);
                 tessary_edges_MUL_ADD(a2, p, k[2]);
                 tessary_edges_MUL_ADD(b2, q, k[2]);
-                k += 3;
+                tessary_edges_MUL_ADD(a3, p, k[3]);
+                tessary_edges_MUL_ADD(b3, q, k[3]);
+                k += 4;
             }
-            for (i = 1; i < 6; ++i) {
+            for (i = 1; i < 7; ++i) {
                 const tessary_edges_FN(vec) p = tessary_edges_LOAD(r + i) + tessary_edges_LOAD(r - i);
                 const tessary_edges_FN(vec) q = tessary_edges_LOAD(r + tessary_edges_LANES + i) + tessary_edges_LOAD(r + tessary_edges_LANES - i);
                 tessary_edges_MUL_ADD(a0, p, k[0]);
@@ -220,7 +176,9 @@ static tessary_edges_TARGET void tessary_edges_FN(group3)(const float *s, float 
                 tessary_edges_MUL_ADD(b1, q, k[1]);
                 tessary_edges_MUL_ADD(a2, p, k[2]);
                 tessary_edges_MUL_ADD(b2, q, k[2]);
-                k += 3;
+                tessary_edges_MUL_ADD(a3, p, k[3]);
+                tessary_edges_MUL_ADD(b3, q, k[3]);
+                k += 4;
             }
         }
         tessary_edges_STORE(t + 2 * tessary_edges_CHUNK + x, a0);
@@ -229,15 +187,17 @@ static tessary_edges_TARGET void tessary_edges_FN(group3)(const float *s, float 
         tessary_edges_STORE(t + 4 * tessary_edges_CHUNK + x + tessary_edges_LANES, b1);
         tessary_edges_STORE(t + 6 * tessary_edges_CHUNK + x, a2);
         tessary_edges_STORE(t + 6 * tessary_edges_CHUNK + x + tessary_edges_LANES, b2);
+        tessary_edges_STORE(t + 7 * tessary_edges_CHUNK + x, a3);
+        tessary_edges_STORE(t + 7 * tessary_edges_CHUNK + x + tessary_edges_LANES, b3);
     }
 }
 
 /* 4 x 7 x 6 coefficients, even in y, odd in x */
-static tessary_edges_TARGET void tessary_edges_FN(group4)(const float *s, float *t)
+static tessary_edges_TARGET void tessary_edges_FN(group2)(const float *s, float *t)
 {
     int x;
     for (x = 0; x < tessary_edges_CHUNK; x += 2 * tessary_edges_LANES) {
-        const float *k = tessary_edges_group4_taps;
+        const float *k = tessary_edges_group2_taps;
         tessary_edges_FN(vec) a0 = {0.0f}, b0 = {0.0f};
         tessary_edges_FN(vec) a1 = {0.0f}, b1 = {0.0f};
         tessary_edges_FN(vec) a2 = {0.0f}, b2 = {0.0f};
@@ -271,11 +231,11 @@ static tessary_edges_TARGET void tessary_edges_FN(group4)(const float *s, float 
 }
 
 /* 4 x 6 x 7 coefficients, odd in y, even in x */
-static tessary_edges_TARGET void tessary_edges_FN(group5)(const float *s, float *t)
+static tessary_edges_TARGET void tessary_edges_FN(group3)(const float *s, float *t)
 {
     int x;
     for (x = 0; x < tessary_edges_CHUNK; x += 2 * tessary_edges_LANES) {
-        const float *k = tessary_edges_group5_taps;
+        const float *k = tessary_edges_group3_taps;
         tessary_edges_FN(vec) a0 = {0.0f}, b0 = {0.0f};
         tessary_edges_FN(vec) a1 = {0.0f}, b1 = {0.0f};
         tessary_edges_FN(vec) a2 = {0.0f}, b2 = {0.0f};
@@ -359,8 +319,6 @@ static tessary_edges_TARGET void tessary_edges_FN(responses)(const float *const 
     tessary_edges_FN(group1)(work, t);
     tessary_edges_FN(group2)(work, t);
     tessary_edges_FN(group3)(work, t);
-    tessary_edges_FN(group4)(work, t);
-    tessary_edges_FN(group5)(work, t);
     tessary_edges_FN(put)(t + 0 * tessary_edges_CHUNK, (float *)(void *)(out + 0 * plane), n, stream);
     tessary_edges_FN(add)(r, t + 1 * tessary_edges_CHUNK, t + 2 * tessary_edges_CHUNK);
     tessary_edges_FN(put)(r, (float *)(void *)(out + 1 * plane), n, stream);
@@ -402,8 +360,6 @@ static tessary_edges_TARGET void tessary_edges_FN(edges0)(const float *const *ro
     tessary_edges_FN(fold)(rows, at, work);
     tessary_edges_FN(group0)(work, t);
     tessary_edges_FN(group1)(work, t);
-    tessary_edges_FN(group2)(work, t);
-    tessary_edges_FN(group3)(work, t);
     for (x = 0; x < tessary_edges_CHUNK; x += tessary_edges_LANES) {
         tessary_edges_FN(vec) v, best, who = {0.0f};
         v = tessary_edges_LOAD(t + 0 * tessary_edges_CHUNK + x);
@@ -446,8 +402,8 @@ static tessary_edges_TARGET void tessary_edges_FN(edges1)(const float *const *ro
     float *const winner = top + tessary_edges_CHUNK;
     int x;
     tessary_edges_FN(fold)(rows, at, work);
-    tessary_edges_FN(group4)(work, t);
-    tessary_edges_FN(group5)(work, t);
+    tessary_edges_FN(group2)(work, t);
+    tessary_edges_FN(group3)(work, t);
     for (x = 0; x < tessary_edges_CHUNK; x += tessary_edges_LANES) {
         tessary_edges_FN(vec) v, best, who = {0.0f};
         v = tessary_edges_LOAD(t + 8 * tessary_edges_CHUNK + x);
@@ -480,6 +436,159 @@ static tessary_edges_TARGET void tessary_edges_FN(edges1)(const float *const *ro
     memcpy(strength, top, (size_t)n * sizeof(float));
     for (x = 0; x < n; ++x) orientation[x] = (unsigned char)winner[x];
 }
+
+/* Strengths and winners of all scales. */
+static tessary_edges_TARGET void tessary_edges_FN(edges_all)(const float *const *rows, ptrdiff_t at, int n,
+    float *work, char *strength, ptrdiff_t plane, unsigned char *orientation,
+    ptrdiff_t turns)
+{
+    float *const t = work + tessary_edges_FOLDED; /* products */
+    float *const top = t + 16 * tessary_edges_CHUNK;
+    float *const winner = top + tessary_edges_CHUNK;
+    int x;
+    tessary_edges_FN(fold)(rows, at, work);
+    tessary_edges_FN(group0)(work, t);
+    tessary_edges_FN(group1)(work, t);
+    tessary_edges_FN(group2)(work, t);
+    tessary_edges_FN(group3)(work, t);
+    for (x = 0; x < tessary_edges_CHUNK; x += tessary_edges_LANES) {
+        tessary_edges_FN(vec) v, best, who = {0.0f};
+        v = tessary_edges_LOAD(t + 0 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        best = v;
+        v = tessary_edges_LOAD(t + 1 * tessary_edges_CHUNK + x) + tessary_edges_LOAD(t + 2 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 1.0f);
+        v = tessary_edges_LOAD(t + 3 * tessary_edges_CHUNK + x) + tessary_edges_LOAD(t + 4 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 2.0f);
+        v = tessary_edges_LOAD(t + 5 * tessary_edges_CHUNK + x) + tessary_edges_LOAD(t + 6 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 3.0f);
+        v = tessary_edges_LOAD(t + 7 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 4.0f);
+        v = - tessary_edges_LOAD(t + 5 * tessary_edges_CHUNK + x) + tessary_edges_LOAD(t + 6 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 5.0f);
+        v = - tessary_edges_LOAD(t + 3 * tessary_edges_CHUNK + x) + tessary_edges_LOAD(t + 4 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 6.0f);
+        v = - tessary_edges_LOAD(t + 1 * tessary_edges_CHUNK + x) + tessary_edges_LOAD(t + 2 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 7.0f);
+        tessary_edges_STORE(top + x, best);
+        tessary_edges_STORE(winner + x, who);
+    }
+    memcpy((float *)(void *)(strength + 0 * plane), top, (size_t)n * sizeof(float));
+    for (x = 0; x < n; ++x) (orientation + 0 * turns)[x] = (unsigned char)winner[x];
+    for (x = 0; x < tessary_edges_CHUNK; x += tessary_edges_LANES) {
+        tessary_edges_FN(vec) v, best, who = {0.0f};
+        v = tessary_edges_LOAD(t + 8 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        best = v;
+        v = tessary_edges_LOAD(t + 9 * tessary_edges_CHUNK + x) + tessary_edges_LOAD(t + 10 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 1.0f);
+        v = tessary_edges_LOAD(t + 11 * tessary_edges_CHUNK + x) + tessary_edges_LOAD(t + 12 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 2.0f);
+        v = tessary_edges_LOAD(t + 13 * tessary_edges_CHUNK + x) + tessary_edges_LOAD(t + 14 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 3.0f);
+        v = tessary_edges_LOAD(t + 15 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 4.0f);
+        v = - tessary_edges_LOAD(t + 13 * tessary_edges_CHUNK + x) + tessary_edges_LOAD(t + 14 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 5.0f);
+        v = - tessary_edges_LOAD(t + 11 * tessary_edges_CHUNK + x) + tessary_edges_LOAD(t + 12 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 6.0f);
+        v = - tessary_edges_LOAD(t + 9 * tessary_edges_CHUNK + x) + tessary_edges_LOAD(t + 10 * tessary_edges_CHUNK + x);
+        v = tessary_edges_ABS(v);
+        tessary_edges_TAKE(v, 7.0f);
+        tessary_edges_STORE(top + x, best);
+        tessary_edges_STORE(winner + x, who);
+    }
+    memcpy((float *)(void *)(strength + 1 * plane), top, (size_t)n * sizeof(float));
+    for (x = 0; x < n; ++x) (orientation + 1 * turns)[x] = (unsigned char)winner[x];
+}
+
+#if tessary_edges_LANES == 16
+/* with a full mask, as some compilers take the plain form's own header for a mistake */
+#define tessary_edges_LEAST(a, b) \
+    ((tessary_edges_FN(vec))_mm512_maskz_min_ps((__mmask16)0xffff, (__m512)(a), (__m512)(b)))
+#define tessary_edges_MOST(a, b) \
+    ((tessary_edges_FN(vec))_mm512_maskz_max_ps((__mmask16)0xffff, (__m512)(a), (__m512)(b)))
+#elif tessary_edges_LANES == 8
+#define tessary_edges_LEAST(a, b) ((tessary_edges_FN(vec))_mm256_min_ps((__m256)(a), (__m256)(b)))
+#define tessary_edges_MOST(a, b) ((tessary_edges_FN(vec))_mm256_max_ps((__m256)(a), (__m256)(b)))
+#elif tessary_edges_LANES == 4 && defined(__SSE2__)
+#define tessary_edges_LEAST(a, b) ((tessary_edges_FN(vec))_mm_min_ps((__m128)(a), (__m128)(b)))
+#define tessary_edges_MOST(a, b) ((tessary_edges_FN(vec))_mm_max_ps((__m128)(a), (__m128)(b)))
+#elif tessary_edges_LANES == 4 && defined(__aarch64__)
+#define tessary_edges_LEAST(a, b) ((tessary_edges_FN(vec))vminq_f32((float32x4_t)(a), (float32x4_t)(b)))
+#define tessary_edges_MOST(a, b) ((tessary_edges_FN(vec))vmaxq_f32((float32x4_t)(a), (float32x4_t)(b)))
+#elif tessary_edges_LANES == 4
+typedef int tessary_edges_FN(pick) __attribute__((vector_size(16)));
+static inline tessary_edges_FN(vec) tessary_edges_FN(least)(tessary_edges_FN(vec) a, tessary_edges_FN(vec) b)
+{
+    const tessary_edges_FN(pick) m = a < b;
+    return (tessary_edges_FN(vec))(((tessary_edges_FN(pick))a & m) | ((tessary_edges_FN(pick))b & ~m));
+}
+#define tessary_edges_LEAST(a, b) tessary_edges_FN(least)((a), (b))
+#define tessary_edges_MOST(a, b) (-tessary_edges_FN(least)(-(a), -(b)))
+#else
+#define tessary_edges_LEAST(a, b) ((a) < (b) ? (a) : (b))
+#define tessary_edges_MOST(a, b) ((a) > (b) ? (a) : (b))
+#endif
+
+/* The least and the largest values of stretches of a row, 16 of each side by side. */
+static tessary_edges_TARGET void tessary_edges_FN(range)(const float *row, int stretches, float *to)
+{
+    int s, x, i;
+    for (s = 0; s < stretches; ++s, row += tessary_edges_CHUNK, to += 32) {
+        for (x = 0; x < 16; x += tessary_edges_LANES) {
+            tessary_edges_FN(vec) low = tessary_edges_LOAD(row + x), high = low;
+            for (i = 16; i < tessary_edges_CHUNK; i += 16) {
+                const tessary_edges_FN(vec) v = tessary_edges_LOAD(row + i + x);
+                low = tessary_edges_LEAST(low, v);
+                high = tessary_edges_MOST(high, v);
+            }
+            tessary_edges_STORE(to + x, low);
+            tessary_edges_STORE(to + 16 + x, high);
+        }
+    }
+}
+
+/* The least and the largest value of some rows' stretches. */
+static tessary_edges_TARGET void tessary_edges_FN(spread)(const float *const *ranges, int at, float *low, float *high)
+{
+    float found[32];
+    int x, j, s;
+    for (x = 0; x < 16; x += tessary_edges_LANES) {
+        tessary_edges_FN(vec) l = tessary_edges_LOAD(ranges[0] + at * 32 + x);
+        tessary_edges_FN(vec) h = tessary_edges_LOAD(ranges[0] + at * 32 + 16 + x);
+        for (j = 0; j < tessary_edges_FLAT_ROWS; ++j) {
+            for (s = at; s < at + tessary_edges_FLAT_SPAN; ++s) {
+                l = tessary_edges_LEAST(l, tessary_edges_LOAD(ranges[j] + s * 32 + x));
+                h = tessary_edges_MOST(h, tessary_edges_LOAD(ranges[j] + s * 32 + 16 + x));
+            }
+        }
+        tessary_edges_STORE(found + x, l);
+        tessary_edges_STORE(found + 16 + x, h);
+    }
+    *low = found[0];
+    *high = found[16];
+    for (x = 1; x < 16; ++x) {
+        if (found[x] < *low) *low = found[x];
+        if (found[16 + x] > *high) *high = found[16 + x];
+    }
+}
+
+#undef tessary_edges_LEAST
+#undef tessary_edges_MOST
 
 /* ---- fixed point: 16-bit codes and coefficients, exact sums in 32 bits */
 
@@ -703,26 +812,51 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_group0)(const int16_t *s, 
     for (x = 0; x < tessary_edges_CHUNK; x += tessary_edges_WIDE) {
         const int16_t *k = tessary_edges_group0_counts;
         tessary_edges_FN(q32) a0 = tessary_edges_FN(q_nought)(), b0 = a0;
+        tessary_edges_FN(q32) a1 = tessary_edges_FN(q_nought)(), b1 = a1;
+        tessary_edges_FN(q32) a2 = tessary_edges_FN(q_nought)(), b2 = a2;
+        tessary_edges_FN(q32) a3 = tessary_edges_FN(q_nought)(), b3 = a3;
         int j;
-        for (j = 0; j < 6; j += 1) {
+        for (j = 0; j < 7; j += 1) {
             const int16_t *const r = s + (ptrdiff_t)(j) * tessary_edges_LINE_Q + x + tessary_edges_RADIUS;
             {
                 const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 1), tessary_edges_FN(q_load)(r - 1));
                 const tessary_edges_FN(q16) w = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 2), tessary_edges_FN(q_load)(r - 2));
                 tessary_edges_PAIR(v, w);
                 tessary_edges_MAC(a0, b0, k + 0);
-                k += 2;
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
             }
             {
                 const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 3), tessary_edges_FN(q_load)(r - 3));
                 const tessary_edges_FN(q16) w = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 4), tessary_edges_FN(q_load)(r - 4));
                 tessary_edges_PAIR(v, w);
                 tessary_edges_MAC(a0, b0, k + 0);
-                k += 2;
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 5), tessary_edges_FN(q_load)(r - 5));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 6), tessary_edges_FN(q_load)(r - 6));
+                tessary_edges_PAIR(v, w);
+                tessary_edges_MAC(a0, b0, k + 0);
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
             }
         }
         tessary_edges_FN(q_keep)(t + 0 * tessary_edges_CHUNK + x, a0);
         tessary_edges_FN(q_keep)(t + 0 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b0);
+        tessary_edges_FN(q_keep)(t + 1 * tessary_edges_CHUNK + x, a1);
+        tessary_edges_FN(q_keep)(t + 1 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b1);
+        tessary_edges_FN(q_keep)(t + 3 * tessary_edges_CHUNK + x, a2);
+        tessary_edges_FN(q_keep)(t + 3 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b2);
+        tessary_edges_FN(q_keep)(t + 5 * tessary_edges_CHUNK + x, a3);
+        tessary_edges_FN(q_keep)(t + 5 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b3);
     }
 }
 
@@ -734,138 +868,80 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_group1)(const int16_t *s, 
         tessary_edges_FN(q32) a0 = tessary_edges_FN(q_nought)(), b0 = a0;
         tessary_edges_FN(q32) a1 = tessary_edges_FN(q_nought)(), b1 = a1;
         tessary_edges_FN(q32) a2 = tessary_edges_FN(q_nought)(), b2 = a2;
+        tessary_edges_FN(q32) a3 = tessary_edges_FN(q_nought)(), b3 = a3;
         int j;
-        for (j = 0; j < 6; j += 2) {
+        for (j = 7; j < 13; j += 2) {
             const int16_t *const r = s + (ptrdiff_t)(j) * tessary_edges_LINE_Q + x + tessary_edges_RADIUS;
             const int16_t *const r2 = s + (ptrdiff_t)(j + 1) * tessary_edges_LINE_Q + x + tessary_edges_RADIUS;
             {
-                const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 1), tessary_edges_FN(q_load)(r - 1));
-                const tessary_edges_FN(q16) w = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r2 + 1), tessary_edges_FN(q_load)(r2 - 1));
-                tessary_edges_PAIR(v, w);
-                tessary_edges_MAC(a0, b0, k + 0);
-                tessary_edges_MAC(a1, b1, k + 2);
-                tessary_edges_MAC(a2, b2, k + 4);
-                k += 6;
-            }
-            {
-                const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 2), tessary_edges_FN(q_load)(r - 2));
-                const tessary_edges_FN(q16) w = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r2 + 2), tessary_edges_FN(q_load)(r2 - 2));
-                tessary_edges_PAIR(v, w);
-                tessary_edges_MAC(a0, b0, k + 0);
-                tessary_edges_MAC(a1, b1, k + 2);
-                tessary_edges_MAC(a2, b2, k + 4);
-                k += 6;
-            }
-            {
-                const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 3), tessary_edges_FN(q_load)(r - 3));
-                const tessary_edges_FN(q16) w = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r2 + 3), tessary_edges_FN(q_load)(r2 - 3));
-                tessary_edges_PAIR(v, w);
-                tessary_edges_MAC(a0, b0, k + 0);
-                tessary_edges_MAC(a1, b1, k + 2);
-                tessary_edges_MAC(a2, b2, k + 4);
-                k += 6;
-            }
-            {
-                const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 4), tessary_edges_FN(q_load)(r - 4));
-                const tessary_edges_FN(q16) w = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r2 + 4), tessary_edges_FN(q_load)(r2 - 4));
-                tessary_edges_PAIR(v, w);
-                tessary_edges_MAC(a0, b0, k + 0);
-                tessary_edges_MAC(a1, b1, k + 2);
-                tessary_edges_MAC(a2, b2, k + 4);
-                k += 6;
-            }
-            {
-                const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 5), tessary_edges_FN(q_load)(r - 5));
-                const tessary_edges_FN(q16) w = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r2 + 5), tessary_edges_FN(q_load)(r2 - 5));
-                tessary_edges_PAIR(v, w);
-                tessary_edges_MAC(a0, b0, k + 0);
-                tessary_edges_MAC(a1, b1, k + 2);
-                tessary_edges_MAC(a2, b2, k + 4);
-                k += 6;
-            }
-        }
-        tessary_edges_FN(q_keep)(t + 1 * tessary_edges_CHUNK + x, a0);
-        tessary_edges_FN(q_keep)(t + 1 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b0);
-        tessary_edges_FN(q_keep)(t + 3 * tessary_edges_CHUNK + x, a1);
-        tessary_edges_FN(q_keep)(t + 3 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b1);
-        tessary_edges_FN(q_keep)(t + 5 * tessary_edges_CHUNK + x, a2);
-        tessary_edges_FN(q_keep)(t + 5 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b2);
-    }
-}
-
-static tessary_edges_TARGET_Q void tessary_edges_FN(q_group2)(const int16_t *s, int32_t *t)
-{
-    int x;
-    for (x = 0; x < tessary_edges_CHUNK; x += tessary_edges_WIDE) {
-        const int16_t *k = tessary_edges_group2_counts;
-        tessary_edges_FN(q32) a0 = tessary_edges_FN(q_nought)(), b0 = a0;
-        int j;
-        for (j = 7; j < 11; j += 1) {
-            const int16_t *const r = s + (ptrdiff_t)(j) * tessary_edges_LINE_Q + x + tessary_edges_RADIUS;
-            {
                 const tessary_edges_FN(q16) v = tessary_edges_FN(q_load)(r);
-                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 1), tessary_edges_FN(q_load)(r - 1));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_load)(r2);
                 tessary_edges_PAIR(v, w);
                 tessary_edges_MAC(a0, b0, k + 0);
-                k += 2;
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 1), tessary_edges_FN(q_load)(r - 1));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 1), tessary_edges_FN(q_load)(r2 - 1));
+                tessary_edges_PAIR(v, w);
+                tessary_edges_MAC(a0, b0, k + 0);
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
             }
             {
                 const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 2), tessary_edges_FN(q_load)(r - 2));
-                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 3), tessary_edges_FN(q_load)(r - 3));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 2), tessary_edges_FN(q_load)(r2 - 2));
                 tessary_edges_PAIR(v, w);
                 tessary_edges_MAC(a0, b0, k + 0);
-                k += 2;
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 3), tessary_edges_FN(q_load)(r - 3));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 3), tessary_edges_FN(q_load)(r2 - 3));
+                tessary_edges_PAIR(v, w);
+                tessary_edges_MAC(a0, b0, k + 0);
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
             }
             {
                 const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 4), tessary_edges_FN(q_load)(r - 4));
-                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 5), tessary_edges_FN(q_load)(r - 5));
-                tessary_edges_PAIR(v, w);
-                tessary_edges_MAC(a0, b0, k + 0);
-                k += 2;
-            }
-        }
-        tessary_edges_FN(q_keep)(t + 7 * tessary_edges_CHUNK + x, a0);
-        tessary_edges_FN(q_keep)(t + 7 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b0);
-    }
-}
-
-static tessary_edges_TARGET_Q void tessary_edges_FN(q_group3)(const int16_t *s, int32_t *t)
-{
-    int x;
-    for (x = 0; x < tessary_edges_CHUNK; x += tessary_edges_WIDE) {
-        const int16_t *k = tessary_edges_group3_counts;
-        tessary_edges_FN(q32) a0 = tessary_edges_FN(q_nought)(), b0 = a0;
-        tessary_edges_FN(q32) a1 = tessary_edges_FN(q_nought)(), b1 = a1;
-        tessary_edges_FN(q32) a2 = tessary_edges_FN(q_nought)(), b2 = a2;
-        int j;
-        for (j = 7; j < 12; j += 1) {
-            const int16_t *const r = s + (ptrdiff_t)(j) * tessary_edges_LINE_Q + x + tessary_edges_RADIUS;
-            {
-                const tessary_edges_FN(q16) v = tessary_edges_FN(q_load)(r);
-                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 1), tessary_edges_FN(q_load)(r - 1));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 4), tessary_edges_FN(q_load)(r2 - 4));
                 tessary_edges_PAIR(v, w);
                 tessary_edges_MAC(a0, b0, k + 0);
                 tessary_edges_MAC(a1, b1, k + 2);
                 tessary_edges_MAC(a2, b2, k + 4);
-                k += 6;
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
             }
             {
-                const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 2), tessary_edges_FN(q_load)(r - 2));
-                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 3), tessary_edges_FN(q_load)(r - 3));
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 5), tessary_edges_FN(q_load)(r - 5));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 5), tessary_edges_FN(q_load)(r2 - 5));
                 tessary_edges_PAIR(v, w);
                 tessary_edges_MAC(a0, b0, k + 0);
                 tessary_edges_MAC(a1, b1, k + 2);
                 tessary_edges_MAC(a2, b2, k + 4);
-                k += 6;
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
             }
             {
-                const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 4), tessary_edges_FN(q_load)(r - 4));
-                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 5), tessary_edges_FN(q_load)(r - 5));
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 6), tessary_edges_FN(q_load)(r - 6));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 6), tessary_edges_FN(q_load)(r2 - 6));
                 tessary_edges_PAIR(v, w);
                 tessary_edges_MAC(a0, b0, k + 0);
                 tessary_edges_MAC(a1, b1, k + 2);
                 tessary_edges_MAC(a2, b2, k + 4);
-                k += 6;
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
             }
         }
         tessary_edges_FN(q_keep)(t + 2 * tessary_edges_CHUNK + x, a0);
@@ -874,14 +950,16 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_group3)(const int16_t *s, 
         tessary_edges_FN(q_keep)(t + 4 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b1);
         tessary_edges_FN(q_keep)(t + 6 * tessary_edges_CHUNK + x, a2);
         tessary_edges_FN(q_keep)(t + 6 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b2);
+        tessary_edges_FN(q_keep)(t + 7 * tessary_edges_CHUNK + x, a3);
+        tessary_edges_FN(q_keep)(t + 7 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b3);
     }
 }
 
-static tessary_edges_TARGET_Q void tessary_edges_FN(q_group4)(const int16_t *s, int32_t *t)
+static tessary_edges_TARGET_Q void tessary_edges_FN(q_group2)(const int16_t *s, int32_t *t)
 {
     int x;
     for (x = 0; x < tessary_edges_CHUNK; x += tessary_edges_WIDE) {
-        const int16_t *k = tessary_edges_group4_counts;
+        const int16_t *k = tessary_edges_group2_counts;
         tessary_edges_FN(q32) a0 = tessary_edges_FN(q_nought)(), b0 = a0;
         tessary_edges_FN(q32) a1 = tessary_edges_FN(q_nought)(), b1 = a1;
         tessary_edges_FN(q32) a2 = tessary_edges_FN(q_nought)(), b2 = a2;
@@ -931,11 +1009,11 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_group4)(const int16_t *s, 
     }
 }
 
-static tessary_edges_TARGET_Q void tessary_edges_FN(q_group5)(const int16_t *s, int32_t *t)
+static tessary_edges_TARGET_Q void tessary_edges_FN(q_group3)(const int16_t *s, int32_t *t)
 {
     int x;
     for (x = 0; x < tessary_edges_CHUNK; x += tessary_edges_WIDE) {
-        const int16_t *k = tessary_edges_group5_counts;
+        const int16_t *k = tessary_edges_group3_counts;
         tessary_edges_FN(q32) a0 = tessary_edges_FN(q_nought)(), b0 = a0;
         tessary_edges_FN(q32) a1 = tessary_edges_FN(q_nought)(), b1 = a1;
         tessary_edges_FN(q32) a2 = tessary_edges_FN(q_nought)(), b2 = a2;
@@ -1056,8 +1134,6 @@ static tessary_edges_TARGET_Q uint64_t tessary_edges_FN(q_responses)(const int16
     tessary_edges_FN(q_group1)(s, t);
     tessary_edges_FN(q_group2)(s, t);
     tessary_edges_FN(q_group3)(s, t);
-    tessary_edges_FN(q_group4)(s, t);
-    tessary_edges_FN(q_group5)(s, t);
     for (x = 0; x < tessary_edges_CHUNK; x += tessary_edges_WIDE) {
         const tessary_edges_FN(q32) l = tessary_edges_FN(q_sum)(t + 0 * tessary_edges_CHUNK + x);
         const tessary_edges_FN(q32) h = tessary_edges_FN(q_sum)(t + 0 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2);
@@ -1182,8 +1258,6 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_edges0)(const int16_t *con
     tessary_edges_FN(q_fold)(rows, at, s);
     tessary_edges_FN(q_group0)(s, t);
     tessary_edges_FN(q_group1)(s, t);
-    tessary_edges_FN(q_group2)(s, t);
-    tessary_edges_FN(q_group3)(s, t);
     for (x = 0; x < tessary_edges_CHUNK; ++x) best[x] = -1;
     for (x = 0; x < tessary_edges_CHUNK; ++x) who[x] = 0;
     for (x = 0; x < tessary_edges_CHUNK; x += tessary_edges_WIDE) {
@@ -1234,7 +1308,7 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_edges0)(const int16_t *con
         tessary_edges_FN(q_store)(r + x, tessary_edges_FN(q_round)(l, h, 15));
     }
     tessary_edges_FN(q_take)(r, 7, best, who);
-    for (x = 0; x < n; ++x) strength[x] = 0.00375549984f * (float)best[x];
+    for (x = 0; x < n; ++x) strength[x] = 0.0040397332f * (float)best[x];
     for (x = 0; x < n; ++x) orientation[x] = (unsigned char)who[x];
 }
 
@@ -1249,8 +1323,8 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_edges1)(const int16_t *con
     int16_t *const r = (int16_t *)(void *)(who + tessary_edges_CHUNK);
     int x;
     tessary_edges_FN(q_fold)(rows, at, s);
-    tessary_edges_FN(q_group4)(s, t);
-    tessary_edges_FN(q_group5)(s, t);
+    tessary_edges_FN(q_group2)(s, t);
+    tessary_edges_FN(q_group3)(s, t);
     for (x = 0; x < tessary_edges_CHUNK; ++x) best[x] = -1;
     for (x = 0; x < tessary_edges_CHUNK; ++x) who[x] = 0;
     for (x = 0; x < tessary_edges_CHUNK; x += tessary_edges_WIDE) {
@@ -1301,7 +1375,7 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_edges1)(const int16_t *con
         tessary_edges_FN(q_store)(r + x, tessary_edges_FN(q_round)(l, h, 15));
     }
     tessary_edges_FN(q_take)(r, 7, best, who);
-    for (x = 0; x < n; ++x) strength[x] = 0.00686406903f * (float)best[x];
+    for (x = 0; x < n; ++x) strength[x] = 0.00712869735f * (float)best[x];
     for (x = 0; x < n; ++x) orientation[x] = (unsigned char)who[x];
 }
 
@@ -1312,6 +1386,246 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_edges1)(const int16_t *con
 #undef tessary_edges_X86_STREAM
 #undef tessary_edges_PAIR
 #undef tessary_edges_MAC
+/* ---- edge elements: least squares */
+
+static tessary_edges_TARGET double tessary_edges_FN(dot)(const double *a, const double *b, int n)
+{
+    double s0 = 0.0, s1 = 0.0, s2 = 0.0, s3 = 0.0, s4 = 0.0, s5 = 0.0, s6 = 0.0, s7 = 0.0;
+    int i;
+    for (i = 0; i < n; i += 8) {
+        s0 += a[i] * b[i];
+        s1 += a[i + 1] * b[i + 1];
+        s2 += a[i + 2] * b[i + 2];
+        s3 += a[i + 3] * b[i + 3];
+        s4 += a[i + 4] * b[i + 4];
+        s5 += a[i + 5] * b[i + 5];
+        s6 += a[i + 6] * b[i + 6];
+        s7 += a[i + 7] * b[i + 7];
+    }
+    return ((s0 + s4) + (s2 + s6)) + ((s1 + s5) + (s3 + s7));
+}
+
+/* The model at q against the data. Returns the sum of squares of what is left. */
+static tessary_edges_TARGET double tessary_edges_FN(residual)(const struct tessary_edges_problem *p, const double *q,
+    struct tessary_edges_slopes *to)
+{
+    struct tessary_edges_work *const w = p->work;
+    const double *const px = p->disk->x, *const py = p->disk->y;
+    double *const u = w->u, *const shape = w->shape, *const slope = w->slope, *const a = w->a;
+    double *const light = w->light, *const inside = w->inside, *const from = w->from;
+    double *const rises = w->rises, *const gains = w->gains;
+    int *const at = w->at;
+    const int n = p->disk->padded;
+    const double step = q[3] - q[2], bend = q[4];
+    const double blur = q[5] == p->log_blur ? p->blur : tessary_edges_exp(q[5]);
+    double sine, cosine;
+    int i;
+    tessary_edges_turn(q[1], &sine, &cosine);
+    for (i = 0; i < n; ++i) {
+        const double along = py[i] * cosine - px[i] * sine;
+        const double across = px[i] * cosine + py[i] * sine;
+        u[i] = (across - q[0] - bend * (along * along) / 2) / blur;
+    }
+    /* loops of their own, as compilers make vectors of these and not of one long loop */
+    for (i = 0; i < n; ++i) {
+        const double v = tessary_edges_magnitude(u[i]);
+        a[i] = v < 8.5 ? v : 8.5; /* beyond, all is done to the last bit */
+    }
+    for (i = 0; i < n; ++i) {
+        const double z = a[i] * a[i] * (-1.0 / 128.0);
+        const double e1 = 1.0 + z * (1.0 + z * (1.0 / 2 + z * (1.0 / 6 + z * (1.0 / 24
+            + z * (1.0 / 120 + z * (1.0 / 720 + z * (1.0 / 5040 + z * (1.0 / 40320
+            + z * (1.0 / 362880 + z * (1.0 / 3628800))))))))));
+        const double e2 = e1 * e1, e4 = e2 * e2, e8 = e4 * e4, e16 = e8 * e8, e32 = e16 * e16;
+        const double bell = 0.39894228040143270 * (e32 * e32);
+        const double t = 1.9411764705882355 - 11.764705882352942 / (a[i] + 4.0);
+        slope[i] = bell;
+        a[i] = 0.5 - bell * (0.41203077947424244 + t * (-0.47133828047847964 + t * (0.24919232279170117 + t * (-0.094562716637217742 + t * (0.023789135973789375 + t * (-0.0028538115956059729 + t * (-0.00031780601883045988 + t * (0.00014539073621716082 + t * (3.8754096662636588e-06 + t * (-6.9703666881244076e-06 + t * (-2.40788948985068e-07 + t * (3.6963931056189636e-07 + t * (3.7496750115510685e-08 + t * (-1.8941757186515375e-08 + t * (-4.2770711897314712e-09 + t * (6.7946299171902166e-10 + t * 2.8944222336603035e-10)))
+            )))
+            )))
+            )))
+            )))
+            );
+    }
+    for (i = 0; i < n; ++i) shape[i] = 0.5 + (u[i] < 0.0 ? -a[i] : a[i]);
+    if (p->line) {
+        for (i = 0; i < n; ++i) {
+            shape[i] = 2.5066282746310002 * slope[i];
+            slope[i] = -u[i] * shape[i];
+        }
+    }
+    for (i = 0; i < n; ++i) light[i] = q[2] + step * shape[i];
+    for (i = 0; i < n; ++i) a[i] = light[i] > tessary_edges_LIGHT(0) ? light[i] : tessary_edges_LIGHT(0);
+    for (i = 0; i < n; ++i) inside[i] = a[i] < tessary_edges_LIGHT(255) ? a[i] : tessary_edges_LIGHT(255);
+    for (i = 0; i < n; ++i) a[i] = inside[i] - tessary_edges_LIGHT(0);
+    for (i = 0; i < n; ++i) a[i] = a[i] > 0.0 ? a[i] : 0.0;
+    for (i = 0; i < n; ++i) a[i] = a[i] < 254.0 ? a[i] : 254.0;
+    for (i = 0; i < n; ++i) at[i] = (int)a[i];
+    for (i = 0; i < n; ++i) {
+        from[i] = tessary_edges_KNOT(at[i]);
+        rises[i] = tessary_edges_KNOT(at[i] + 1) - from[i];
+    }
+    for (i = 0; i < n; ++i) gains[i] = rises[i] * (double)(inside[i] == light[i]);
+    for (i = 0; i < n; ++i) {
+        const double along = py[i] * cosine - px[i] * sine;
+        const double across = px[i] * cosine + py[i] * sine;
+        const double value = from[i] + rises[i] * (inside[i] - tessary_edges_LIGHT(at[i]));
+        const double gain = w->weight[i] * gains[i];
+        const double by_u = gain * step * slope[i];
+        to->left[i] = w->weight[i] * (w->data[i] - value);
+        to->by[0][i] = -by_u / blur;
+        to->by[1][i] = by_u * (along + bend * along * across) / blur;
+        to->by[2][i] = gain * (1.0 - shape[i]);
+        to->by[3][i] = gain * shape[i];
+        to->by[4][i] = -by_u * (along * along) / 2 / blur;
+        to->by[5][i] = -by_u * u[i];
+    }
+    return tessary_edges_FN(dot)(to->left, to->left, n);
+}
+
+static double tessary_edges_FN(known)(const struct tessary_edges_problem *p, const double *q, const int *is_free)
+{
+    double sum = 0.0;
+    int i;
+    for (i = 0; i < 6; ++i) {
+        const double off = q[i] - tessary_edges_middle(p, i);
+        if (is_free[i]) sum += off * off * tessary_edges_before(p, i);
+    }
+    return sum;
+}
+
+/* Normal matrix and right side of the free parameters. */
+static tessary_edges_TARGET void tessary_edges_FN(normal)(const struct tessary_edges_problem *p, const double *q,
+    const struct tessary_edges_slopes *s, const int *is_free, double matrix[6][6], double *right)
+{
+    double top = 0.0;
+    int i, j;
+    for (i = 0; i < 6; ++i) {
+        if (!is_free[i]) continue;
+        for (j = 0; j <= i; ++j) {
+            if (is_free[j]) matrix[i][j] = matrix[j][i] =
+                tessary_edges_FN(dot)(s->by[i], s->by[j], p->disk->padded);
+        }
+        matrix[i][i] += tessary_edges_before(p, i);
+        if (matrix[i][i] > top) top = matrix[i][i];
+        right[i] = tessary_edges_FN(dot)(s->by[i], s->left, p->disk->padded)
+            - tessary_edges_before(p, i) * (q[i] - tessary_edges_middle(p, i));
+    }
+    /* a ridge: parameters that the pixels cannot tell apart get no step and a huge error */
+    for (i = 0; i < 6; ++i) {
+        if (is_free[i]) matrix[i][i] += 1e-12 + 1e-10 * top;
+    }
+}
+
+static double tessary_edges_FN(freedom)(const struct tessary_edges_problem *p, const int *is_free)
+{
+    int i, left = p->pixels;
+    for (i = 0; i < 6; ++i) left -= is_free[i];
+    return left > 1 ? (double)left : 1.0;
+}
+
+/* Damped Gauss-Newton. On entry and at the end *s belongs to q. Returns whether it settled. */
+static tessary_edges_TARGET int tessary_edges_FN(descend)(const struct tessary_edges_problem *p, double *q,
+    struct tessary_edges_slopes **s, struct tessary_edges_slopes **spare, double *square, const int *is_free)
+{
+    const double loose = tessary_edges_FN(freedom)(p, is_free), origin = q[0];
+    double matrix[6][6], right[6], damping = 0.001;
+    int round, i, moved = 1;
+    for (round = 0; round < 12; ++round) {
+        double damped[6][6], step[6], trial[6], part = 1.0, promise = 0.0, before, after, squared;
+        if (moved) tessary_edges_FN(normal)(p, q, *s, is_free, matrix, right);
+        memcpy(damped, matrix, sizeof(damped));
+        for (i = 0; i < 6; ++i) {
+            if (is_free[i]) damped[i][i] *= 1.0 + damping;
+        }
+        if (!tessary_edges_solve(damped, right, is_free, step)) return 0;
+        for (i = 0; i < 6; ++i) {
+            const double size = tessary_edges_magnitude(step[i]);
+            if (tessary_edges_largest_step[i] > 0.0 && size > 1e-30 && tessary_edges_largest_step[i] / size < part)
+                part = tessary_edges_largest_step[i] / size;
+        }
+        for (i = 0; i < 6; ++i) {
+            step[i] *= part;
+            trial[i] = q[i] + step[i];
+            if (is_free[i]) promise += step[i] * right[i];
+        }
+        before = *square + tessary_edges_FN(known)(p, q, is_free);
+        squared = tessary_edges_FN(residual)(p, trial, *spare);
+        after = squared + tessary_edges_FN(known)(p, trial, is_free);
+        moved = after <= before;
+        if (moved) {
+            struct tessary_edges_slopes *const swap = *s;
+            *s = *spare;
+            *spare = swap;
+            memcpy(q, trial, sizeof(trial));
+            *square = squared;
+        }
+        if (before - after >= 0.25 * promise) {
+            damping = damping / 5.0 > 0.001 ? damping / 5.0 : 0.001;
+        } else {
+            damping = damping * 5.0 > 0.29999999999999999 ? damping * 5.0 : 0.29999999999999999;
+        }
+        if (promise < 0.001 * (before / loose > 1.0 ? before / loose : 1.0)) return 1;
+        if (!(tessary_edges_magnitude(q[0] - origin) <= p->slack * 2.0)) return 0;
+    }
+    return 0;
+}
+
+/* The inverse normal matrix times a vector, for errors: the start saw the same noise, so it adds
+ * no knowledge of the position. Returns 0 when there is none. */
+static tessary_edges_TARGET int tessary_edges_FN(error_row)(const struct tessary_edges_problem *p, const double *q,
+    const struct tessary_edges_slopes *s, const int *is_free, const double *of, double *x)
+{
+    double matrix[6][6], right[6];
+    tessary_edges_FN(normal)(p, q, s, is_free, matrix, right);
+    matrix[0][0] -= tessary_edges_before(p, 0);
+    return tessary_edges_solve(matrix, of, is_free, x);
+}
+
+/* Would the sum of squares fall enough if one more parameter were let free? */
+static tessary_edges_TARGET int tessary_edges_FN(asks)(const struct tessary_edges_problem *p, const double *q,
+    const struct tessary_edges_slopes *s, const int *is_free, int extra)
+{
+    const int n = p->disk->padded;
+    double cross[6], x[6], room, push;
+    int i;
+    for (i = 0; i < 6; ++i) {
+        cross[i] = is_free[i] ? tessary_edges_FN(dot)(s->by[i], s->by[extra], n) : 0.0;
+    }
+    if (is_free[extra] || !tessary_edges_FN(error_row)(p, q, s, is_free, cross, x)) return 0;
+    room = tessary_edges_FN(dot)(s->by[extra], s->by[extra], n);
+    for (i = 0; i < 6; ++i) room -= cross[i] * x[i];
+    push = tessary_edges_FN(dot)(s->by[extra], s->left, n);
+    return push * push > 9.0 * (room > 1e-9 ? room : 1e-9);
+}
+
+/* Fit: q holds where to start. */
+static tessary_edges_TARGET void tessary_edges_FN(fit)(const struct tessary_edges_problem *p, struct tessary_edges_fitted *f)
+{
+    static const double first[6] = {1.0, 0.0, 0.0, 0.0, 0.0, 0.0};
+    struct tessary_edges_slopes *s = &p->work->slopes[0], *spare = &p->work->slopes[1];
+    double x[6], square;
+    int is_free[6] = {1, 1, 1, 1, 0, 0};
+    int i, extra;
+    is_free[5] = !p->blur_known;
+    square = tessary_edges_FN(residual)(p, f->q, s);
+    f->ok = tessary_edges_FN(descend)(p, f->q, &s, &spare, &square, is_free);
+    for (extra = 4; extra < 6; ++extra) {
+        if (tessary_edges_FN(asks)(p, f->q, s, is_free, extra)) {
+            is_free[extra] = 1;
+            f->ok = tessary_edges_FN(descend)(p, f->q, &s, &spare, &square, is_free);
+        }
+    }
+    f->misfit = square / tessary_edges_FN(freedom)(p, is_free);
+    f->sd = 0.0;
+    if (!tessary_edges_FN(error_row)(p, f->q, s, is_free, first, x)) f->ok = 0;
+    else f->sd = sqrt(tessary_edges_variance(p, s, x));
+    for (i = 0; i < 6; ++i) {
+        if (!(tessary_edges_magnitude(f->q[i]) < 1e300)) f->ok = 0;
+    }
+    if (!(f->sd < 1e300)) f->ok = 0;
+}
+
 #undef tessary_edges_LOAD
 #undef tessary_edges_STORE
 #undef tessary_edges_MUL_ADD
@@ -1326,6 +1640,7 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_edges1)(const int16_t *con
 #endif
 #include "tessary_edges.h"
 
+#include <math.h>
 #include <string.h>
 
 #if defined(__GNUC__) && defined(__x86_64__)
@@ -1345,6 +1660,7 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_edges1)(const int16_t *con
 #define tessary_edges_LINE 80 /* a chunk with its halo, in whole vectors */
 #define tessary_edges_FOLDED 1040 /* floats of the folded rows of a chunk */
 #define tessary_edges_TILE 3776 /* widest part of the picture that the ring holds */
+#define tessary_edges_COLUMNS 1152 /* floats of products, and then columns of separable ones */
 #define tessary_edges_SCRATCH 2192 /* floats of scratch memory beside the ring */
 #define tessary_edges_LINE_Q 96 /* the same in 16-bit codes */
 #define tessary_edges_FOLDED_Q 1248 /* codes of the folded rows of a chunk */
@@ -1395,182 +1711,179 @@ static const float tessary_edges_table[256] = {
     58.0081329f, 58.1595459f, 58.3106651f, 58.4614906f
 };
 
-/* 1 x 6 x 4 coefficients, even in y, odd in x */
-static const float tessary_edges_group0_taps[24] = {
-    0.526036024f, 0.109365344f, 0.0037702322f, 2.5510788e-05f, 0.311547279f, 0.0647721291f,
-    0.0022329092f, 1.51395798e-05f, 0.0647215843f, 0.013455987f, 0.000463843346f,
-    3.09944153e-06f, 0.00471615791f, 0.000980496407f, 3.38554382e-05f, 2.38418579e-07f,
-    0.000120520592f, 2.50339508e-05f, 8.34465027e-07f, 0.0f, 1.07288361e-06f, 2.38418579e-07f,
-    0.0f, 0.0f
-};
-
-/* 3 x 6 x 5 coefficients, even in y, odd in x */
-static const float tessary_edges_group1_taps[90] = {
-    0.498781621f, 0.411727726f, 0.243225098f, 0.114765108f, 0.121009648f, 0.09131217f,
-    0.00468474627f, 0.00742810965f, 0.00842887163f, 4.02331352e-05f, 0.000112891197f,
-    0.000226736069f, 5.96046448e-08f, 4.76837158e-07f, 1.84774399e-06f, 0.270009071f,
-    0.172493607f, 0.0730602443f, 0.0647213161f, 0.0555153191f, 0.0289877951f, 0.00282162428f,
-    0.00391882658f, 0.00292024016f, 2.643466e-05f, 7.10189342e-05f, 8.8006258e-05f,
-    5.96046448e-08f, 3.57627869e-07f, 8.34465027e-07f, 0.0417353213f, 0.00485780835f,
-    -0.00748941302f, 0.0114802718f, 0.00372797251f, -0.00239890814f, 0.000605821609f,
-    0.000503629446f, -0.000151455402f, 7.03334808e-06f, 1.49011612e-05f, -1.07288361e-06f,
-    2.98023224e-08f, 1.1920929e-07f, 2.98023224e-08f, 0.00161418319f, -0.00130355358f,
-    -0.000950694084f, 0.000613749027f, -0.000263243914f, -0.000364482403f, 4.4465065e-05f,
-    2.95042992e-06f, -3.439188e-05f, 6.85453415e-07f, 7.4505806e-07f, -9.23871994e-07f, 0.0f,
-    0.0f, 0.0f, 4.02331352e-06f, -4.14550304e-05f, -1.32024288e-05f, 8.64267349e-06f,
-    -1.28149986e-05f, -5.60283661e-06f, 1.04308128e-06f, -6.85453415e-07f, -6.2584877e-07f,
-    2.98023224e-08f, 0.0f, -2.98023224e-08f, 0.0f, 0.0f, 0.0f, -2.38418579e-07f,
-    -2.38418579e-07f, -5.96046448e-08f, 2.98023224e-08f, -1.1920929e-07f, -2.98023224e-08f,
-    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f
-};
-
-/* 1 x 4 x 6 coefficients, odd in y, even in x */
-static const float tessary_edges_group2_taps[24] = {
-    0.526036024f, 0.311547279f, 0.0647215843f, 0.00471615791f, 0.000120520592f, 1.07288361e-06f,
-    0.109365344f, 0.0647721291f, 0.013455987f, 0.000980496407f, 2.50339508e-05f,
-    2.38418579e-07f, 0.0037702322f, 0.0022329092f, 0.000463843346f, 3.38554382e-05f,
-    8.34465027e-07f, 0.0f, 2.5510788e-05f, 1.51395798e-05f, 3.09944153e-06f, 2.38418579e-07f,
-    0.0f, 0.0f
-};
-
-/* 3 x 5 x 6 coefficients, odd in y, even in x */
-static const float tessary_edges_group3_taps[90] = {
-    0.243225098f, 0.411727726f, 0.498781621f, 0.0730602443f, 0.172493607f, 0.270009071f,
-    -0.00748941302f, 0.00485780835f, 0.0417353213f, -0.000950694084f, -0.00130355358f,
-    0.00161418319f, -1.32024288e-05f, -4.14550304e-05f, 4.02331352e-06f, -5.96046448e-08f,
-    -2.38418579e-07f, -2.38418579e-07f, 0.09131217f, 0.121009648f, 0.114765108f, 0.0289877951f,
-    0.0555153191f, 0.0647213161f, -0.00239890814f, 0.00372797251f, 0.0114802718f,
-    -0.000364482403f, -0.000263243914f, 0.000613749027f, -5.60283661e-06f, -1.28149986e-05f,
-    8.64267349e-06f, -2.98023224e-08f, -1.1920929e-07f, 2.98023224e-08f, 0.00842887163f,
-    0.00742810965f, 0.00468474627f, 0.00292024016f, 0.00391882658f, 0.00282162428f,
-    -0.000151455402f, 0.000503629446f, 0.000605821609f, -3.439188e-05f, 2.95042992e-06f,
-    4.4465065e-05f, -6.2584877e-07f, -6.85453415e-07f, 1.04308128e-06f, 0.0f, 0.0f, 0.0f,
-    0.000226736069f, 0.000112891197f, 4.02331352e-05f, 8.8006258e-05f, 7.10189342e-05f,
-    2.643466e-05f, -1.07288361e-06f, 1.49011612e-05f, 7.03334808e-06f, -9.23871994e-07f,
-    7.4505806e-07f, 6.85453415e-07f, -2.98023224e-08f, 0.0f, 2.98023224e-08f, 0.0f, 0.0f, 0.0f,
-    1.84774399e-06f, 4.76837158e-07f, 5.96046448e-08f, 8.34465027e-07f, 3.57627869e-07f,
-    5.96046448e-08f, 2.98023224e-08f, 1.1920929e-07f, 2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f,
-    0.0f, 0.0f, 0.0f, 0.0f, 0.0f
-};
-
 /* 4 x 7 x 6 coefficients, even in y, odd in x */
-static const float tessary_edges_group4_taps[168] = {
-    0.286126912f, 0.267354012f, 0.210289061f, 0.116958439f, 0.267948389f, 0.259010434f,
-    0.22112f, 0.133482337f, 0.113478363f, 0.116076052f, 0.113593817f, 0.0786052942f,
-    0.0257591009f, 0.0285199881f, 0.0337896347f, 0.0283075571f, 0.00330543518f, 0.00405192375f,
-    0.00613814592f, 0.00657504797f, 0.000245511532f, 0.000340878963f, 0.000697314739f,
-    0.0010086298f, 0.240026295f, 0.217066765f, 0.15710783f, 0.0798731446f, 0.224776685f,
-    0.211247802f, 0.16675964f, 0.0916066468f, 0.0951948166f, 0.0953860879f, 0.0870088339f,
-    0.0543870926f, 0.0216088295f, 0.0236831009f, 0.0264434516f, 0.0198093653f, 0.00277286768f,
-    0.00340995193f, 0.00493592024f, 0.00466811657f, 0.000205993652f, 0.000291526318f,
-    0.00057926774f, 0.000728756189f, 0.141696453f, 0.115823954f, 0.0626197755f, 0.0212448239f,
-    0.132694066f, 0.114348173f, 0.0688894391f, 0.0249994397f, 0.0561970472f, 0.0528557897f,
-    0.0380399823f, 0.0154673159f, 0.0127564669f, 0.0135473609f, 0.0124464035f, 0.00595089793f,
-    0.00163692236f, 0.00202876329f, 0.00253385305f, 0.00149786472f, 0.000121593475f,
-    0.000181555748f, 0.000327289104f, 0.000251919031f, 0.0588653088f, 0.0401867628f,
-    0.00994896889f, -0.00237435102f, 0.0551254153f, 0.0407602489f, 0.0125001669f,
-    -0.00233525038f, 0.0233460665f, 0.0196570456f, 0.0082373023f, -0.000999301672f,
-    0.00529944897f, 0.00532114506f, 0.00325143337f, -0.00016400218f, 0.000680029392f,
-    0.00084900856f, 0.000792354345f, 2.30073929e-05f, 5.04851341e-05f, 8.14199448e-05f,
-    0.000120669603f, 1.55866146e-05f, 0.0172091722f, 0.00884366035f, -0.00141486526f,
-    -0.00270107388f, 0.0161158442f, 0.00940337777f, -0.000852882862f, -0.00302094221f,
-    0.00682520866f, 0.00485929847f, 0.000149607658f, -0.00171470642f, 0.00154930353f,
-    0.001426965f, 0.000318318605f, -0.000582188368f, 0.00019878149f, 0.000248104334f,
-    0.000131487846f, -0.000123471022f, 1.47819519e-05f, 2.59280205e-05f, 2.70009041e-05f,
-    -1.6450882e-05f, 0.0035404563f, 0.00115907192f, -0.000895619392f, -0.000640422106f,
-    0.00331550837f, 0.00134968758f, -0.000849545002f, -0.0007340312f, 0.00140416622f,
-    0.000783503056f, -0.000344306231f, -0.000434696674f, 0.00031876564f, 0.000258892775f,
-    -5.50746918e-05f, -0.000157266855f, 4.08887863e-05f, 5.01871109e-05f, 4.20212746e-06f,
-    -3.65376472e-05f, 3.03983688e-06f, 5.78165054e-06f, 3.06963921e-06f, -5.54323196e-06f,
-    0.000512599945f, 7.173419e-05f, -0.000166207552f, -7.37309456e-05f, 0.000479996204f,
-    0.000107616186f, -0.000171124935f, -8.6247921e-05f, 0.000203311443f, 7.90655613e-05f,
-    -8.28206539e-05f, -5.28097153e-05f, 4.61339951e-05f, 3.12924385e-05f, -2.11000443e-05f,
-    -2.00271606e-05f, 5.90085983e-06f, 6.97374344e-06f, -2.47359276e-06f, -4.94718552e-06f,
-    4.17232513e-07f, 8.94069672e-07f, 2.98023224e-08f, -8.34465027e-07f
+static const float tessary_edges_group0_taps[168] = {
+    0.496147513f, 0.470242023f, 0.384918392f, 0.223841786f, 0.143657446f, 0.148444355f,
+    0.149693847f, 0.10724318f, 0.00860130787f, 0.0102645755f, 0.0146545172f, 0.0148636103f,
+    0.000126242638f, 0.000184237957f, 0.000428020954f, 0.000706315041f, 4.76837158e-07f,
+    8.94069672e-07f, 3.93390656e-06f, 1.21593475e-05f, 0.0f, 0.0f, 0.0f, 5.96046448e-08f,
+    0.317140698f, 0.27799949f, 0.183185786f, 0.0813970268f, 0.0918267965f, 0.0904023349f,
+    0.0760205388f, 0.0405033231f, 0.00549799204f, 0.00655984879f, 0.00824275613f,
+    0.00596621633f, 8.0704689e-05f, 0.000125676394f, 0.000274777412f, 0.000307440758f,
+    2.98023224e-07f, 6.55651093e-07f, 2.95042992e-06f, 5.81145287e-06f, 0.0f, 0.0f, 0.0f,
+    2.98023224e-08f, 0.0828276277f, 0.0563555956f, 0.0117616653f, -0.0061365068f, 0.0239824057f,
+    0.0202355981f, 0.00767886639f, -0.00232839584f, 0.0014359355f, 0.00169613957f,
+    0.00131815672f, -0.000171780586f, 2.11000443e-05f, 3.85046005e-05f, 6.56545162e-05f,
+    2.86102295e-06f, 5.96046448e-08f, 2.68220901e-07f, 9.83476639e-07f, 2.98023224e-07f, 0.0f,
+    0.0f, 0.0f, 0.0f, 0.00883853436f, 0.00358572602f, -0.00196781754f, -0.00177949667f,
+    0.00255918503f, 0.00160813332f, -0.000472724438f, -0.000850111246f, 0.000153243542f,
+    0.000173032284f, 1.83582306e-05f, -0.000115931034f, 2.2649765e-06f, 4.91738319e-06f,
+    4.44054604e-06f, -5.21540642e-06f, 0.0f, 2.98023224e-08f, 1.1920929e-07f, -8.94069672e-08f,
+    0.0f, 0.0f, 0.0f, 0.0f, 0.000385344028f, 4.35113907e-05f, -0.000133633614f,
+    -5.32567501e-05f, 0.000111579895f, 4.08291817e-05f, -5.06341457e-05f, -2.75969505e-05f,
+    6.67572021e-06f, 6.70552254e-06f, -3.90410423e-06f, -4.32133675e-06f, 1.1920929e-07f,
+    2.38418579e-07f, 0.0f, -2.38418579e-07f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    6.85453415e-06f, -9.83476639e-07f, -1.93715096e-06f, -3.57627869e-07f, 1.96695328e-06f,
+    1.78813934e-07f, -9.23871994e-07f, -2.08616257e-07f, 1.1920929e-07f, 8.94069672e-08f,
+    -1.1920929e-07f, -2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    0.0f, 0.0f, 0.0f, 5.96046448e-08f, -2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    0.0f
 };
 
 /* 4 x 6 x 7 coefficients, odd in y, even in x */
-static const float tessary_edges_group5_taps[168] = {
-    0.116958439f, 0.210289061f, 0.267354012f, 0.286126912f, 0.0798731446f, 0.15710783f,
-    0.217066765f, 0.240026295f, 0.0212448239f, 0.0626197755f, 0.115823954f, 0.141696453f,
-    -0.00237435102f, 0.00994896889f, 0.0401867628f, 0.0588653088f, -0.00270107388f,
-    -0.00141486526f, 0.00884366035f, 0.0172091722f, -0.000640422106f, -0.000895619392f,
-    0.00115907192f, 0.0035404563f, -7.37309456e-05f, -0.000166207552f, 7.173419e-05f,
-    0.000512599945f, 0.133482337f, 0.22112f, 0.259010434f, 0.267948389f, 0.0916066468f,
-    0.16675964f, 0.211247802f, 0.224776685f, 0.0249994397f, 0.0688894391f, 0.114348173f,
-    0.132694066f, -0.00233525038f, 0.0125001669f, 0.0407602489f, 0.0551254153f, -0.00302094221f,
-    -0.000852882862f, 0.00940337777f, 0.0161158442f, -0.0007340312f, -0.000849545002f,
-    0.00134968758f, 0.00331550837f, -8.6247921e-05f, -0.000171124935f, 0.000107616186f,
-    0.000479996204f, 0.0786052942f, 0.113593817f, 0.116076052f, 0.113478363f, 0.0543870926f,
-    0.0870088339f, 0.0953860879f, 0.0951948166f, 0.0154673159f, 0.0380399823f, 0.0528557897f,
-    0.0561970472f, -0.000999301672f, 0.0082373023f, 0.0196570456f, 0.0233460665f,
-    -0.00171470642f, 0.000149607658f, 0.00485929847f, 0.00682520866f, -0.000434696674f,
-    -0.000344306231f, 0.000783503056f, 0.00140416622f, -5.28097153e-05f, -8.28206539e-05f,
-    7.90655613e-05f, 0.000203311443f, 0.0283075571f, 0.0337896347f, 0.0285199881f,
-    0.0257591009f, 0.0198093653f, 0.0264434516f, 0.0236831009f, 0.0216088295f, 0.00595089793f,
-    0.0124464035f, 0.0135473609f, 0.0127564669f, -0.00016400218f, 0.00325143337f,
-    0.00532114506f, 0.00529944897f, -0.000582188368f, 0.000318318605f, 0.001426965f,
-    0.00154930353f, -0.000157266855f, -5.50746918e-05f, 0.000258892775f, 0.00031876564f,
-    -2.00271606e-05f, -2.11000443e-05f, 3.12924385e-05f, 4.61339951e-05f, 0.00657504797f,
-    0.00613814592f, 0.00405192375f, 0.00330543518f, 0.00466811657f, 0.00493592024f,
-    0.00340995193f, 0.00277286768f, 0.00149786472f, 0.00253385305f, 0.00202876329f,
-    0.00163692236f, 2.30073929e-05f, 0.000792354345f, 0.00084900856f, 0.000680029392f,
-    -0.000123471022f, 0.000131487846f, 0.000248104334f, 0.00019878149f, -3.65376472e-05f,
-    4.20212746e-06f, 5.01871109e-05f, 4.08887863e-05f, -4.94718552e-06f, -2.47359276e-06f,
-    6.97374344e-06f, 5.90085983e-06f, 0.0010086298f, 0.000697314739f, 0.000340878963f,
-    0.000245511532f, 0.000728756189f, 0.00057926774f, 0.000291526318f, 0.000205993652f,
-    0.000251919031f, 0.000327289104f, 0.000181555748f, 0.000121593475f, 1.55866146e-05f,
-    0.000120669603f, 8.14199448e-05f, 5.04851341e-05f, -1.6450882e-05f, 2.70009041e-05f,
-    2.59280205e-05f, 1.47819519e-05f, -5.54323196e-06f, 3.06963921e-06f, 5.78165054e-06f,
-    3.03983688e-06f, -8.34465027e-07f, 2.98023224e-08f, 8.94069672e-07f, 4.17232513e-07f
+static const float tessary_edges_group1_taps[168] = {
+    0.223841786f, 0.384918392f, 0.470242023f, 0.496147513f, 0.0813970268f, 0.183185786f,
+    0.27799949f, 0.317140698f, -0.0061365068f, 0.0117616653f, 0.0563555956f, 0.0828276277f,
+    -0.00177949667f, -0.00196781754f, 0.00358572602f, 0.00883853436f, -5.32567501e-05f,
+    -0.000133633614f, 4.35113907e-05f, 0.000385344028f, -3.57627869e-07f, -1.93715096e-06f,
+    -9.83476639e-07f, 6.85453415e-06f, 0.0f, 0.0f, -2.98023224e-08f, 5.96046448e-08f,
+    0.10724318f, 0.149693847f, 0.148444355f, 0.143657446f, 0.0405033231f, 0.0760205388f,
+    0.0904023349f, 0.0918267965f, -0.00232839584f, 0.00767886639f, 0.0202355981f, 0.0239824057f,
+    -0.000850111246f, -0.000472724438f, 0.00160813332f, 0.00255918503f, -2.75969505e-05f,
+    -5.06341457e-05f, 4.08291817e-05f, 0.000111579895f, -2.08616257e-07f, -9.23871994e-07f,
+    1.78813934e-07f, 1.96695328e-06f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0148636103f, 0.0146545172f,
+    0.0102645755f, 0.00860130787f, 0.00596621633f, 0.00824275613f, 0.00655984879f,
+    0.00549799204f, -0.000171780586f, 0.00131815672f, 0.00169613957f, 0.0014359355f,
+    -0.000115931034f, 1.83582306e-05f, 0.000173032284f, 0.000153243542f, -4.32133675e-06f,
+    -3.90410423e-06f, 6.70552254e-06f, 6.67572021e-06f, -2.98023224e-08f, -1.1920929e-07f,
+    8.94069672e-08f, 1.1920929e-07f, 0.0f, 0.0f, 0.0f, 0.0f, 0.000706315041f, 0.000428020954f,
+    0.000184237957f, 0.000126242638f, 0.000307440758f, 0.000274777412f, 0.000125676394f,
+    8.0704689e-05f, 2.86102295e-06f, 6.56545162e-05f, 3.85046005e-05f, 2.11000443e-05f,
+    -5.21540642e-06f, 4.44054604e-06f, 4.91738319e-06f, 2.2649765e-06f, -2.38418579e-07f, 0.0f,
+    2.38418579e-07f, 1.1920929e-07f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    1.21593475e-05f, 3.93390656e-06f, 8.94069672e-07f, 4.76837158e-07f, 5.81145287e-06f,
+    2.95042992e-06f, 6.55651093e-07f, 2.98023224e-07f, 2.98023224e-07f, 9.83476639e-07f,
+    2.68220901e-07f, 5.96046448e-08f, -8.94069672e-08f, 1.1920929e-07f, 2.98023224e-08f, 0.0f,
+    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 5.96046448e-08f,
+    0.0f, 0.0f, 0.0f, 2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f
 };
 
-static const int16_t tessary_edges_group0_counts[24] = {
-    32759, 6811, 235, 2, 19402, 4034, 139, 1, 4031, 838, 29, 0, 294, 61, 2, 0, 8, 2, 0, 0, 0, 0,
-    0, 0
+/* 4 x 7 x 6 coefficients, even in y, odd in x */
+static const float tessary_edges_group2_taps[168] = {
+    0.270522773f, 0.252572656f, 0.198281348f, 0.110068321f, 0.267425716f, 0.257683635f,
+    0.218303204f, 0.130773067f, 0.123949051f, 0.125881612f, 0.121077955f, 0.0823479891f,
+    0.0319234729f, 0.0348978639f, 0.0400943756f, 0.0325725675f, 0.0048186779f, 0.00579053164f,
+    0.00836062431f, 0.00853574276f, 0.000436484814f, 0.00058889389f, 0.0011241436f,
+    0.00151747465f, 0.229815662f, 0.208128214f, 0.151244164f, 0.0772745013f, 0.227184594f,
+    0.213172644f, 0.167870015f, 0.0921984911f, 0.105297744f, 0.104816645f, 0.0943617523f,
+    0.0584654212f, 0.0271197557f, 0.029322356f, 0.031832546f, 0.0233523846f, 0.0040935874f,
+    0.00492200255f, 0.00679579377f, 0.00619611144f, 0.000370800495f, 0.000507622957f,
+    0.000939935446f, 0.00111824274f, 0.140898645f, 0.116152227f, 0.0645974576f, 0.0230587423f,
+    0.139285564f, 0.120445877f, 0.0739004612f, 0.0280892551f, 0.0645574331f, 0.0604324639f,
+    0.0435943902f, 0.0184205174f, 0.0166269541f, 0.0173783302f, 0.0156704783f, 0.00769644976f,
+    0.00250977278f, 0.00301870704f, 0.00360798836f, 0.0021571219f, 0.000227332115f,
+    0.000324070454f, 0.000543028116f, 0.000414550304f, 0.0623427033f, 0.0435036421f,
+    0.0123049319f, -0.0014012754f, 0.0616289377f, 0.0461631417f, 0.0155793726f, -0.00127831101f,
+    0.0285643935f, 0.024022907f, 0.0105836689f, -0.000391513109f, 0.0073568821f, 0.00724452734f,
+    0.00445142388f, 8.06152821e-05f, 0.00111049414f, 0.0013307333f, 0.00119903684f,
+    0.000103414059f, 0.00010061264f, 0.00015193224f, 0.000209361315f, 3.70740891e-05f,
+    0.0199074745f, 0.0107108355f, -0.00101259351f, -0.00289866328f, 0.0196795464f,
+    0.0118239522f, -0.000394225121f, -0.00336426497f, 0.00912123919f, 0.00652709603f,
+    0.000493198633f, -0.00203084946f, 0.00234919786f, 0.0021135211f, 0.000526547432f,
+    -0.000751376152f, 0.000354588032f, 0.000419229269f, 0.000219792128f, -0.000177800655f,
+    3.21269035e-05f, 5.17368317e-05f, 5.04255295e-05f, -2.70307064e-05f, 0.0045877099f,
+    0.00164958835f, -0.00105366111f, -0.000832825899f, 0.00453519821f, 0.00195875764f,
+    -0.00103265047f, -0.000990003347f, 0.0021020174f, 0.00119191408f, -0.000439018011f,
+    -0.000623106956f, 0.000541388988f, 0.000427961349f, -7.14957714e-05f, -0.000245541334f,
+    8.1717968e-05f, 9.36985016e-05f, 9.59634781e-06f, -6.37173653e-05f, 7.39097595e-06f,
+    1.2665987e-05f, 6.40749931e-06f, -1.10864639e-05f, 0.000762999058f, 0.000135540962f,
+    -0.000241309404f, -0.000117391348f, 0.00075429678f, 0.000192403793f, -0.000257343054f,
+    -0.000142097473f, 0.000349581242f, 0.000141143799f, -0.000132113695f, -9.22083855e-05f,
+    9.00626183e-05f, 5.93364239e-05f, -3.65972519e-05f, -3.79085541e-05f, 1.3589859e-05f,
+    1.47223473e-05f, -4.73856926e-06f, -1.04010105e-05f, 1.25169754e-06f, 2.20537186e-06f,
+    5.96046448e-08f, -1.96695328e-06f
 };
 
-static const int16_t tessary_edges_group1_counts[90] = {
-    31062, 16815, 25640, 10742, 15147, 4550, 7147, 4031, 7536, 3457, 5686, 1805, 292, 176, 463,
-    244, 525, 182, 3, 2, 7, 4, 14, 5, 0, 0, 0, 0, 0, 0, 2599, 101, 303, -81, -466, -59, 715, 38,
-    232, -16, -149, -23, 38, 3, 31, 0, -9, -2, 0, 0, 1, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, -3, 0,
-    -1, 0, 1, 0, -1, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0
+/* 4 x 6 x 7 coefficients, odd in y, even in x */
+static const float tessary_edges_group3_taps[168] = {
+    0.110068321f, 0.198281348f, 0.252572656f, 0.270522773f, 0.0772745013f, 0.151244164f,
+    0.208128214f, 0.229815662f, 0.0230587423f, 0.0645974576f, 0.116152227f, 0.140898645f,
+    -0.0014012754f, 0.0123049319f, 0.0435036421f, 0.0623427033f, -0.00289866328f,
+    -0.00101259351f, 0.0107108355f, 0.0199074745f, -0.000832825899f, -0.00105366111f,
+    0.00164958835f, 0.0045877099f, -0.000117391348f, -0.000241309404f, 0.000135540962f,
+    0.000762999058f, 0.130773067f, 0.218303204f, 0.257683635f, 0.267425716f, 0.0921984911f,
+    0.167870015f, 0.213172644f, 0.227184594f, 0.0280892551f, 0.0739004612f, 0.120445877f,
+    0.139285564f, -0.00127831101f, 0.0155793726f, 0.0461631417f, 0.0616289377f, -0.00336426497f,
+    -0.000394225121f, 0.0118239522f, 0.0196795464f, -0.000990003347f, -0.00103265047f,
+    0.00195875764f, 0.00453519821f, -0.000142097473f, -0.000257343054f, 0.000192403793f,
+    0.00075429678f, 0.0823479891f, 0.121077955f, 0.125881612f, 0.123949051f, 0.0584654212f,
+    0.0943617523f, 0.104816645f, 0.105297744f, 0.0184205174f, 0.0435943902f, 0.0604324639f,
+    0.0645574331f, -0.000391513109f, 0.0105836689f, 0.024022907f, 0.0285643935f,
+    -0.00203084946f, 0.000493198633f, 0.00652709603f, 0.00912123919f, -0.000623106956f,
+    -0.000439018011f, 0.00119191408f, 0.0021020174f, -9.22083855e-05f, -0.000132113695f,
+    0.000141143799f, 0.000349581242f, 0.0325725675f, 0.0400943756f, 0.0348978639f,
+    0.0319234729f, 0.0233523846f, 0.031832546f, 0.029322356f, 0.0271197557f, 0.00769644976f,
+    0.0156704783f, 0.0173783302f, 0.0166269541f, 8.06152821e-05f, 0.00445142388f,
+    0.00724452734f, 0.0073568821f, -0.000751376152f, 0.000526547432f, 0.0021135211f,
+    0.00234919786f, -0.000245541334f, -7.14957714e-05f, 0.000427961349f, 0.000541388988f,
+    -3.79085541e-05f, -3.65972519e-05f, 5.93364239e-05f, 9.00626183e-05f, 0.00853574276f,
+    0.00836062431f, 0.00579053164f, 0.0048186779f, 0.00619611144f, 0.00679579377f,
+    0.00492200255f, 0.0040935874f, 0.0021571219f, 0.00360798836f, 0.00301870704f,
+    0.00250977278f, 0.000103414059f, 0.00119903684f, 0.0013307333f, 0.00111049414f,
+    -0.000177800655f, 0.000219792128f, 0.000419229269f, 0.000354588032f, -6.37173653e-05f,
+    9.59634781e-06f, 9.36985016e-05f, 8.1717968e-05f, -1.04010105e-05f, -4.73856926e-06f,
+    1.47223473e-05f, 1.3589859e-05f, 0.00151747465f, 0.0011241436f, 0.00058889389f,
+    0.000436484814f, 0.00111824274f, 0.000939935446f, 0.000507622957f, 0.000370800495f,
+    0.000414550304f, 0.000543028116f, 0.000324070454f, 0.000227332115f, 3.70740891e-05f,
+    0.000209361315f, 0.00015193224f, 0.00010061264f, -2.70307064e-05f, 5.04255295e-05f,
+    5.17368317e-05f, 3.21269035e-05f, -1.10864639e-05f, 6.40749931e-06f, 1.2665987e-05f,
+    7.39097595e-06f, -1.96695328e-06f, 5.96046448e-08f, 2.20537186e-06f, 1.25169754e-06f
 };
 
-static const int16_t tessary_edges_group2_counts[24] = {
-    32759, 19402, 4031, 294, 8, 0, 6811, 4034, 838, 61, 2, 0, 235, 139, 29, 2, 0, 0, 2, 1, 0, 0,
-    0, 0
-};
-
-static const int16_t tessary_edges_group3_counts[90] = {
-    15147, 4550, 25640, 10742, 31062, 16815, -466, -59, 303, -81, 2599, 101, -1, 0, -3, 0, 0, 0,
-    5686, 1805, 7536, 3457, 7147, 4031, -149, -23, 232, -16, 715, 38, 0, 0, -1, 0, 1, 0, 525,
-    182, 463, 244, 292, 176, -9, -2, 31, 0, 38, 3, 0, 0, 0, 0, 0, 0, 14, 5, 7, 4, 3, 2, 0, 0, 1,
+static const int16_t tessary_edges_group0_counts[168] = {
+    28724, 8317, 27224, 8594, 22284, 8666, 12959, 6209, 498, 7, 594, 11, 848, 25, 861, 41, 0, 0,
+    0, 0, 0, 0, 1, 0, 18360, 5316, 16094, 5234, 10605, 4401, 4712, 2345, 318, 5, 380, 7, 477,
+    16, 345, 18, 0, 0, 0, 0, 0, 0, 0, 0, 4795, 1388, 3263, 1172, 681, 445, -355, -135, 83, 1,
+    98, 2, 76, 4, -10, 0, 0, 0, 0, 0, 0, 0, 0, 0, 512, 148, 208, 93, -114, -27, -103, -49, 9, 0,
+    10, 0, 1, 0, -7, 0, 0, 0, 0, 0, 0, 0, 0, 0, 22, 6, 3, 2, -8, -3, -3, -2, 0, 0, 0, 0, 0, 0,
+    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0,
     0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0
 };
 
-static const int16_t tessary_edges_group4_counts[168] = {
-    9749, 9130, 9109, 8825, 7165, 7534, 3985, 4548, 3866, 878, 3955, 972, 3870, 1151, 2678, 965,
-    113, 8, 138, 12, 209, 24, 224, 34, 8178, 7659, 7396, 7198, 5353, 5682, 2721, 3121, 3244,
-    736, 3250, 807, 2965, 901, 1853, 675, 94, 7, 116, 10, 168, 20, 159, 25, 4828, 4521, 3946,
-    3896, 2134, 2347, 724, 852, 1915, 435, 1801, 462, 1296, 424, 527, 203, 56, 4, 69, 6, 86, 11,
-    51, 9, 2006, 1878, 1369, 1389, 339, 426, -81, -80, 795, 181, 670, 181, 281, 111, -34, -6,
-    23, 2, 29, 3, 27, 4, 1, 1, 586, 549, 301, 320, -48, -29, -92, -103, 233, 53, 166, 49, 5, 11,
-    -58, -20, 7, 1, 8, 1, 4, 1, -4, -1, 121, 113, 39, 46, -31, -29, -22, -25, 48, 11, 27, 9,
-    -12, -2, -15, -5, 1, 0, 2, 0, 0, 0, -1, 0, 17, 16, 2, 4, -6, -6, -3, -3, 7, 2, 3, 1, -3, -1,
-    -2, -1, 0, 0, 0, 0, 0, 0, 0, 0
+static const int16_t tessary_edges_group1_counts[168] = {
+    12959, 6209, 22284, 8666, 27224, 8594, 28724, 8317, 4712, 2345, 10605, 4401, 16094, 5234,
+    18360, 5316, -355, -135, 681, 445, 3263, 1172, 4795, 1388, -103, -49, -114, -27, 208, 93,
+    512, 148, -3, -2, -8, -3, 3, 2, 22, 6, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 861,
+    41, 848, 25, 594, 11, 498, 7, 345, 18, 477, 16, 380, 7, 318, 5, -10, 0, 76, 4, 98, 2, 83, 1,
+    -7, 0, 1, 0, 10, 0, 9, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0,
+    0, 0, 1, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0,
+    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0
 };
 
-static const int16_t tessary_edges_group5_counts[168] = {
-    3985, 4548, 7165, 7534, 9109, 8825, 9749, 9130, 2721, 3121, 5353, 5682, 7396, 7198, 8178,
-    7659, 724, 852, 2134, 2347, 3946, 3896, 4828, 4521, -81, -80, 339, 426, 1369, 1389, 2006,
-    1878, -92, -103, -48, -29, 301, 320, 586, 549, -22, -25, -31, -29, 39, 46, 121, 113, -3, -3,
-    -6, -6, 2, 4, 17, 16, 2678, 965, 3870, 1151, 3955, 972, 3866, 878, 1853, 675, 2965, 901,
-    3250, 807, 3244, 736, 527, 203, 1296, 424, 1801, 462, 1915, 435, -34, -6, 281, 111, 670,
-    181, 795, 181, -58, -20, 5, 11, 166, 49, 233, 53, -15, -5, -12, -2, 27, 9, 48, 11, -2, -1,
-    -3, -1, 3, 1, 7, 2, 224, 34, 209, 24, 138, 12, 113, 8, 159, 25, 168, 20, 116, 10, 94, 7, 51,
-    9, 86, 11, 69, 6, 56, 4, 1, 1, 27, 4, 29, 3, 23, 2, -4, -1, 4, 1, 8, 1, 7, 1, -1, 0, 0, 0,
-    2, 0, 1, 0, 0, 0, 0, 0, 0, 0, 0, 0
+static const int16_t tessary_edges_group2_counts[168] = {
+    8875, 8774, 8286, 8454, 6505, 7162, 3611, 4290, 4066, 1047, 4130, 1145, 3972, 1315, 2702,
+    1069, 158, 14, 190, 19, 274, 37, 280, 50, 7540, 7453, 6828, 6994, 4962, 5507, 2535, 3025,
+    3455, 890, 3439, 962, 3096, 1044, 1918, 766, 134, 12, 161, 17, 223, 31, 203, 37, 4623, 4570,
+    3811, 3952, 2119, 2424, 756, 922, 2118, 545, 1983, 570, 1430, 514, 604, 253, 82, 7, 99, 11,
+    118, 18, 71, 14, 2045, 2022, 1427, 1514, 404, 511, -46, -42, 937, 241, 788, 238, 347, 146,
+    -13, 3, 36, 3, 44, 5, 39, 7, 3, 1, 653, 646, 351, 388, -33, -13, -95, -110, 299, 77, 214,
+    69, 16, 17, -67, -25, 12, 1, 14, 2, 7, 2, -6, -1, 151, 149, 54, 64, -35, -34, -27, -32, 69,
+    18, 39, 14, -14, -2, -20, -8, 3, 0, 3, 0, 0, 0, -2, 0, 25, 25, 4, 6, -8, -8, -4, -5, 11, 3,
+    5, 2, -4, -1, -3, -1, 0, 0, 0, 0, 0, 0, 0, 0
+};
+
+static const int16_t tessary_edges_group3_counts[168] = {
+    3611, 4290, 6505, 7162, 8286, 8454, 8875, 8774, 2535, 3025, 4962, 5507, 6828, 6994, 7540,
+    7453, 756, 922, 2119, 2424, 3811, 3952, 4623, 4570, -46, -42, 404, 511, 1427, 1514, 2045,
+    2022, -95, -110, -33, -13, 351, 388, 653, 646, -27, -32, -35, -34, 54, 64, 151, 149, -4, -5,
+    -8, -8, 4, 6, 25, 25, 2702, 1069, 3972, 1315, 4130, 1145, 4066, 1047, 1918, 766, 3096, 1044,
+    3439, 962, 3455, 890, 604, 253, 1430, 514, 1983, 570, 2118, 545, -13, 3, 347, 146, 788, 238,
+    937, 241, -67, -25, 16, 17, 214, 69, 299, 77, -20, -8, -14, -2, 39, 14, 69, 18, -3, -1, -4,
+    -1, 5, 2, 11, 3, 280, 50, 274, 37, 190, 19, 158, 14, 203, 37, 223, 31, 161, 17, 134, 12, 71,
+    14, 118, 18, 99, 11, 82, 7, 3, 1, 39, 7, 44, 5, 36, 3, -6, -1, 7, 2, 14, 2, 12, 1, -2, 0, 0,
+    0, 3, 0, 3, 0, 0, 0, 0, 0, 0, 0, 0, 0
 };
 
 /* Code of every Mono8 value. */
@@ -1593,6 +1906,182 @@ static const int16_t tessary_edges_codes[256] = {
     7657, 7676, 7694, 7712, 7729, 7746, 7763, 7779, 7795, 7811, 7828, 7845, 7862, 7880, 7899,
     7918, 7937, 7957, 7978, 7999, 8021, 8042, 8064, 8085, 8106, 8127, 8149, 8170, 8191
 };
+#define tessary_edges_FLAT_ROWS 15 /* a kernel's, one above, one below */
+#define tessary_edges_FLAT_SPAN 2 /* stretches that a chunk depends on */
+/* ---- edge elements: tables */
+
+#define tessary_edges_WINDOW 56 /* pixels of the widest disk, in whole eights */
+
+/* The disks of pixels that an edge is fitted in: offsets from the middle, then zeros. */
+struct tessary_edges_disk {
+    int count, padded;
+    const double *x, *y;
+};
+
+static const double tessary_edges_disk_x0[56] = {
+    0.0, -2.0, -1.0, 0.0, 1.0, 2.0, -3.0, -2.0, -1.0, 0.0, 1.0, 2.0, 3.0, -3.0, -2.0, -1.0, 0.0,
+    1.0, 2.0, 3.0, -4.0, -3.0, -2.0, -1.0, 0.0, 1.0, 2.0, 3.0, 4.0, -3.0, -2.0, -1.0, 0.0, 1.0,
+    2.0, 3.0, -3.0, -2.0, -1.0, 0.0, 1.0, 2.0, 3.0, -2.0, -1.0, 0.0, 1.0, 2.0, 0.0, 0.0, 0.0,
+    0.0, 0.0, 0.0, 0.0, 0.0
+};
+static const double tessary_edges_disk_y0[56] = {
+    -4.0, -3.0, -3.0, -3.0, -3.0, -3.0, -2.0, -2.0, -2.0, -2.0, -2.0, -2.0, -2.0, -1.0, -1.0,
+    -1.0, -1.0, -1.0, -1.0, -1.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 1.0, 1.0, 1.0,
+    1.0, 1.0, 1.0, 1.0, 2.0, 2.0, 2.0, 2.0, 2.0, 2.0, 2.0, 3.0, 3.0, 3.0, 3.0, 3.0, 4.0, 0.0,
+    0.0, 0.0, 0.0, 0.0, 0.0, 0.0
+};
+static const double tessary_edges_disk_x1[24] = {
+    -1.0, 0.0, 1.0, -2.0, -1.0, 0.0, 1.0, 2.0, -2.0, -1.0, 0.0, 1.0, 2.0, -2.0, -1.0, 0.0, 1.0,
+    2.0, -1.0, 0.0, 1.0, 0.0, 0.0, 0.0
+};
+static const double tessary_edges_disk_y1[24] = {
+    -2.0, -2.0, -2.0, -1.0, -1.0, -1.0, -1.0, -1.0, 0.0, 0.0, 0.0, 0.0, 0.0, 1.0, 1.0, 1.0, 1.0,
+    1.0, 2.0, 2.0, 2.0, 0.0, 0.0, 0.0
+};
+static const struct tessary_edges_disk tessary_edges_disks[2] = {
+    {49, 56, tessary_edges_disk_x0, tessary_edges_disk_y0},
+    {21, 24, tessary_edges_disk_x1, tessary_edges_disk_y1}
+};
+
+/* Largest step of each parameter, and one over the variance of what is known of it before. */
+static const double tessary_edges_largest_step[6] = {0.5, 0.29999999999999999, 0.0, 0.0, 0.10000000000000001, 0.40000000000000002};
+static const double tessary_edges_prior[6] = {1.0, 0.0, 0.0, 0.0, 16.0, 2.0408163265306123};
+
+#define tessary_edges_LIGHT(i) (0.0 + 1.0 * (double)(i))
+#define tessary_edges_KNOT(i) ((double)tessary_edges_table[(i) + 0])
+
+static double tessary_edges_magnitude(double v) { return v < 0.0 ? -v : v; }
+
+/* Sine and cosine of an angle of a few turns; not-a-number for others. */
+static void tessary_edges_turn(double angle, double *sine, double *cosine)
+{
+    double k, r, z, s, c;
+    int quarter;
+    if (!(tessary_edges_magnitude(angle) < 1e4)) {
+        *sine = *cosine = (angle - angle) / (angle - angle);
+        return;
+    }
+    quarter = (int)(angle * 0.63661977236758134 + (angle < 0.0 ? -0.5 : 0.5));
+    k = (double)quarter;
+    /* pi / 2 in three parts; the first two times a small whole number are exact */
+    r = ((angle - k * 1.5707963267341256) - k * 6.0771005063039659e-11)
+        - k * 2.0222662487959506e-21;
+    z = r * r;
+    s = r + r * z * (-1.0 / 6 + z * (1.0 / 120 + z * (-1.0 / 5040 + z * (1.0 / 362880
+        + z * (-1.0 / 39916800 + z * (1.0 / 6227020800.0 - z / 1307674368000.0))))));
+    c = 1.0 - z * (0.5 - z * (1.0 / 24 - z * (1.0 / 720 - z * (1.0 / 40320 - z * (1.0 / 3628800
+        - z * (1.0 / 479001600 - z * (1.0 / 87178291200.0 - z / 20922789888000.0)))))));
+    quarter &= 3;
+    *sine = quarter == 0 ? s : quarter == 1 ? c : quarter == 2 ? -s : -c;
+    *cosine = quarter == 0 ? c : quarter == 1 ? -s : quarter == 2 ? -c : s;
+}
+
+/* The exponential function between e^-50 and e^50; not-a-number beyond. */
+static double tessary_edges_exp(double x)
+{
+    double r, sum, power = 1.0, base;
+    int k, n;
+    if (!(tessary_edges_magnitude(x) < 50.0)) return (x - x) / (x - x);
+    k = (int)(x * 1.4426950408889634 + (x < 0.0 ? -0.5 : 0.5));
+    r = (x - (double)k * 0.69314718036912382) - (double)k * 1.9082149292705877e-10;
+    sum = 1.0 + r * (1.0 + r * (1.0 / 2 + r * (1.0 / 6 + r * (1.0 / 24 + r * (1.0 / 120
+        + r * (1.0 / 720 + r * (1.0 / 5040 + r * (1.0 / 40320 + r * (1.0 / 362880
+        + r * (1.0 / 3628800 + r * (1.0 / 39916800 + r / 479001600)))))))))));
+    base = k < 0 ? 0.5 : 2.0;
+    for (n = k < 0 ? -k : k; n > 0; --n) power *= base;
+    return sum * power;
+}
+
+/* Light that a pixel stands for. */
+static double tessary_edges_to_light(tessary_edges_pixel p) { return (double)p; }
+
+/* What the model leaves of the data, and its derivatives; in eights, as vectors take them. */
+struct tessary_edges_slopes {
+    double left[tessary_edges_WINDOW];
+    double by[6][tessary_edges_WINDOW];
+};
+
+/* Memory of a fit; a part of the scratch memory. */
+struct tessary_edges_work {
+    double data[tessary_edges_WINDOW]; /* working values */
+    double weight[tessary_edges_WINDOW]; /* one over their noise; 0 outside the picture */
+    struct tessary_edges_slopes slopes[2];
+    double u[tessary_edges_WINDOW], shape[tessary_edges_WINDOW], slope[tessary_edges_WINDOW]; /* of the edge's profile */
+    double light[tessary_edges_WINDOW], inside[tessary_edges_WINDOW], from[tessary_edges_WINDOW]; /* of the curve ... */
+    double rises[tessary_edges_WINDOW], gains[tessary_edges_WINDOW], a[tessary_edges_WINDOW];
+    int at[tessary_edges_WINDOW]; /* ... and its knots */
+};
+
+/* A blurred edge in a disk of pixels. Its parameters q: position along the normal from the middle
+ * pixel, direction of the normal, light on either side, curvature, logarithm of the blur. */
+struct tessary_edges_problem {
+    const struct tessary_edges_disk *disk;
+    struct tessary_edges_work *work;
+    int line; /* a line, else a step */
+    int blur_known, pixels; /* pixels with a weight */
+    double slack; /* how many times farther than usual the edge may lie from its start */
+    double start; /* its position */
+    double blur, log_blur; /* that is known, or expected */
+};
+
+struct tessary_edges_fitted {
+    double q[6];
+    double sd; /* standard error of the position, were the noise as stated */
+    double misfit; /* squared residual over the noise's variance, per degree of freedom */
+    int ok; /* it settled */
+};
+
+/* What was known of a parameter before looking: its middle, and one over its variance. */
+static double tessary_edges_middle(const struct tessary_edges_problem *p, int i)
+{
+    return i == 0 ? p->start : i == 5 ? p->log_blur : 0.0;
+}
+
+static double tessary_edges_before(const struct tessary_edges_problem *p, int i)
+{
+    return i == 0 ? tessary_edges_prior[0] / (p->slack * p->slack) : tessary_edges_prior[i];
+}
+
+/* Solve matrix x = right for the parameters that are free. Returns 0 when that cannot be done. */
+static int tessary_edges_solve(double matrix[6][6], const double *right, const int *is_free, double *x)
+{
+    double lower[6][6], scaled[6][6], inverse[6], y[6]; /* matrix is lower D lower' */
+    int where[6], n = 0, i, j, k;
+    for (i = 0; i < 6; ++i) {
+        x[i] = 0.0;
+        if (is_free[i]) where[n++] = i;
+    }
+    for (i = 0; i < n; ++i) {
+        double pivot = matrix[where[i]][where[i]];
+        for (j = 0; j < i; ++j) {
+            double sum = matrix[where[i]][where[j]];
+            for (k = 0; k < j; ++k) sum -= scaled[i][k] * lower[j][k];
+            scaled[i][j] = sum;
+            lower[i][j] = sum * inverse[j];
+            pivot -= sum * lower[i][j];
+        }
+        if (!(pivot > 0.0)) return 0;
+        inverse[i] = 1.0 / pivot;
+        y[i] = right[where[i]];
+        for (k = 0; k < i; ++k) y[i] -= lower[i][k] * y[k];
+    }
+    for (i = n - 1; i >= 0; --i) {
+        y[i] *= inverse[i];
+        for (k = i + 1; k < n; ++k) y[i] -= lower[k][i] * y[k];
+        x[where[i]] = y[i];
+    }
+    return 1;
+}
+
+/* Variance of the position for white noise; x is its row of the inverse normal matrix. */
+static double tessary_edges_variance(const struct tessary_edges_problem *p, const struct tessary_edges_slopes *s,
+    const double *x)
+{
+    (void)p;
+    (void)s;
+    return x[0] > 0.0 ? x[0] : 0.0;
+}
+
 
 static const char *const tessary_edges_names[16] = {
     "step_s0_o0",
@@ -1620,6 +2109,11 @@ struct tessary_edges_code_of {
     void (*edges[2])(const float *const *, ptrdiff_t, int, float *, float *,
         unsigned char *);
     void (*fft)(const float *, int, int, int, float *, char *, ptrdiff_t, ptrdiff_t, int);
+    void (*half)(const float *, int, int, int, float *, char *, ptrdiff_t, ptrdiff_t, int);
+    void (*edges_all)(const float *const *, ptrdiff_t, int, float *, char *, ptrdiff_t,
+        unsigned char *, ptrdiff_t);
+    void (*range)(const float *, int, float *);
+    void (*spread)(const float *const *, int, float *, float *);
 };
 
 #if !defined(__GNUC__) || tessary_edges_MAX_LANES < 4
@@ -1630,7 +2124,8 @@ struct tessary_edges_code_of {
 #define tessary_edges_FN(x) tessary_edges_##x##_base
 #define tessary_edges_TARGET
 #include "tessary_edges.c"
-static const struct tessary_edges_code_of tessary_edges_base = {tessary_edges_responses_base, {tessary_edges_edges0_base, tessary_edges_edges1_base}, NULL};
+static const struct tessary_edges_code_of tessary_edges_base = {tessary_edges_responses_base, {tessary_edges_edges0_base, tessary_edges_edges1_base}, NULL,
+    NULL, tessary_edges_edges_all_base, tessary_edges_range_base, tessary_edges_spread_base};
 #undef tessary_edges_LANES
 #undef tessary_edges_FN
 #undef tessary_edges_TARGET
@@ -1640,7 +2135,8 @@ static const struct tessary_edges_code_of tessary_edges_base = {tessary_edges_re
 #define tessary_edges_FN(x) tessary_edges_##x##_avx2
 #define tessary_edges_TARGET __attribute__((target("avx2,fma")))
 #include "tessary_edges.c"
-static const struct tessary_edges_code_of tessary_edges_avx2 = {tessary_edges_responses_avx2, {tessary_edges_edges0_avx2, tessary_edges_edges1_avx2}, NULL};
+static const struct tessary_edges_code_of tessary_edges_avx2 = {tessary_edges_responses_avx2, {tessary_edges_edges0_avx2, tessary_edges_edges1_avx2}, NULL,
+    NULL, tessary_edges_edges_all_avx2, tessary_edges_range_avx2, tessary_edges_spread_avx2};
 #undef tessary_edges_LANES
 #undef tessary_edges_FN
 #undef tessary_edges_TARGET
@@ -1651,7 +2147,8 @@ static const struct tessary_edges_code_of tessary_edges_avx2 = {tessary_edges_re
 #define tessary_edges_FN(x) tessary_edges_##x##_avx512
 #define tessary_edges_TARGET __attribute__((target("avx512f,avx512vl,avx512bw,avx512dq,avx2,fma")))
 #include "tessary_edges.c"
-static const struct tessary_edges_code_of tessary_edges_avx512 = {tessary_edges_responses_avx512, {tessary_edges_edges0_avx512, tessary_edges_edges1_avx512}, NULL};
+static const struct tessary_edges_code_of tessary_edges_avx512 = {tessary_edges_responses_avx512, {tessary_edges_edges0_avx512, tessary_edges_edges1_avx512}, NULL,
+    NULL, tessary_edges_edges_all_avx512, tessary_edges_range_avx512, tessary_edges_spread_avx512};
 #undef tessary_edges_LANES
 #undef tessary_edges_FN
 #undef tessary_edges_TARGET
@@ -1742,11 +2239,11 @@ static int tessary_edges_fill(const struct tessary_edges_picture *p, int y, int 
 /* ---- the walk */
 
 struct tessary_edges_job {
-    int scale; /* -1: responses */
+    int scale; /* -1: responses; the number of scales: all of them */
     char *out; /* planes, or strength */
     ptrdiff_t row_bytes, plane_bytes;
     unsigned char *orientation;
-    ptrdiff_t orientation_row_bytes;
+    ptrdiff_t orientation_row_bytes, orientation_plane_bytes;
     int stream;
 };
 
@@ -1769,6 +2266,10 @@ static void tessary_edges_row(const struct tessary_edges_code_of *code, const st
         if (n > count - x) n = count - x;
         if (job->scale < 0) {
             code->responses(rows, x, n, work, to, job->plane_bytes, job->stream);
+        } else if (job->scale == tessary_edges_SCALE_COUNT) {
+            code->edges_all(rows, x, n, work, to, job->plane_bytes,
+                job->orientation + (ptrdiff_t)y * job->orientation_row_bytes + from + x,
+                job->orientation_plane_bytes);
         } else {
             code->edges[job->scale](rows, x, n, work, (float *)(void *)to,
                 job->orientation + (ptrdiff_t)y * job->orientation_row_bytes + from + x);
@@ -1832,14 +2333,14 @@ static int tessary_edges_check_picture(const struct tessary_edges_picture *p, in
 
 /* Do rows or planes of the output overlap? Planes may lie one after the other, or be
  * interleaved row by row. */
-static int tessary_edges_overlap(ptrdiff_t row, ptrdiff_t plane, ptrdiff_t bytes, int rows)
+static int tessary_edges_overlap(ptrdiff_t row, ptrdiff_t plane, ptrdiff_t bytes, int rows, int planes)
 {
     row = tessary_edges_reach(row);
     plane = tessary_edges_reach(plane);
-    if (tessary_edges_KERNEL_COUNT == 1) return 0;
+    if (planes == 1) return 0;
     if (plane < bytes) return 1;
     if ((plane - bytes) / row >= rows - 1) return 0;
-    return (row - bytes) / plane < tessary_edges_KERNEL_COUNT - 1;
+    return (row - bytes) / plane < planes - 1;
 }
 
 /* Check the arguments of a call that writes planes of values of some bytes, and fill in the job. */
@@ -1859,7 +2360,8 @@ static int tessary_edges_check_planes(struct tessary_edges_picture *p, struct te
         out_plane_bytes % bytes != 0)
         return tessary_edges_OUTPUT_MISALIGNED;
     if (tessary_edges_reach(out_row_bytes) < (ptrdiff_t)width * bytes) return tessary_edges_BAD_OUTPUT_ROW_BYTES;
-    if (tessary_edges_overlap(out_row_bytes, out_plane_bytes, (ptrdiff_t)width * bytes, count))
+    if (tessary_edges_overlap(out_row_bytes, out_plane_bytes, (ptrdiff_t)width * bytes, count,
+            tessary_edges_KERNEL_COUNT))
         return tessary_edges_BAD_OUTPUT_PLANE_BYTES;
     if (scratch == NULL) return tessary_edges_NO_SCRATCH;
     job->scale = -1;
@@ -1868,6 +2370,7 @@ static int tessary_edges_check_planes(struct tessary_edges_picture *p, struct te
     job->plane_bytes = out_plane_bytes;
     job->orientation = NULL;
     job->orientation_row_bytes = 0;
+    job->orientation_plane_bytes = 0;
     /* judged by the whole picture: bands of one picture are usually made side by side */
     job->stream = (double)bytes * tessary_edges_KERNEL_COUNT * width * height >= tessary_edges_STREAM_FROM;
     return tessary_edges_OK;
@@ -1899,8 +2402,108 @@ static int tessary_edges_check_edges(struct tessary_edges_picture *p, struct tes
     job->plane_bytes = 0;
     job->orientation = orientation;
     job->orientation_row_bytes = orientation_row_bytes;
+    job->orientation_plane_bytes = 0;
     job->stream = 0;
     return tessary_edges_OK;
+}
+
+/* ---- edges above a threshold: flat stretches are skipped */
+
+struct tessary_edges_flat {
+    float threshold;
+    uint64_t skipped;
+};
+
+static size_t tessary_edges_flat_stretches(int width)
+{
+    const int tile = width < tessary_edges_TILE ? width : tessary_edges_TILE;
+    return (size_t)((tile + tessary_edges_CHUNK - 1) / tessary_edges_CHUNK + tessary_edges_FLAT_SPAN - 1);
+}
+
+/* Floats of a row: one value before it, and whole stretches. */
+static size_t tessary_edges_flat_pitch(int width)
+{
+    return 16 + tessary_edges_flat_stretches(width) * tessary_edges_CHUNK + tessary_edges_LINE;
+}
+
+/* Row y with its neighbours' halo, and the ranges of its stretches, which begin one value before the
+ * chunks: what a chunk and its neighbours depend on begins there. */
+static int tessary_edges_flat_fill(const struct tessary_edges_code_of *code, const struct tessary_edges_picture *p, int y, int from,
+    int part, float *row, float *range)
+{
+    const int end = part + 2 * tessary_edges_RADIUS;
+    const int stretches = (int)tessary_edges_flat_stretches(part);
+    int bad, x;
+    /* beyond the halo of the rim there is no neighbour: the outermost row stands for it */
+    if (y < -tessary_edges_RADIUS) y = -tessary_edges_RADIUS;
+    if (y >= p->height + tessary_edges_RADIUS) y = p->height + tessary_edges_RADIUS - 1;
+    bad = tessary_edges_fill(p, y, from, part, row);
+    row[-1] = row[0];
+    for (x = end; x < stretches * tessary_edges_CHUNK + tessary_edges_CHUNK; ++x) row[x] = row[end - 1];
+    code->range(row - 1, stretches, range);
+    return bad;
+}
+
+/* One row of outputs. The chunks begin at whole multiples of their width, so that every band and
+ * every address skips the same. */
+static void tessary_edges_flat_row(const struct tessary_edges_code_of *code, const struct tessary_edges_job *job,
+    struct tessary_edges_flat *flat, const float *const *rows, const float *const *ranges,
+    int from, int part, int rest, int y, float *work)
+{
+    static const float bounds[2][3] = {{1.89886081f, 0.0f, 0.000710090215f}, {3.18746829f, 0.0f, 0.00125305762f}};
+    const float *const b = bounds[job->scale];
+    float *const strength = (float *)(void *)(job->out + (ptrdiff_t)y * job->row_bytes) + from;
+    unsigned char *const turn = job->orientation + (ptrdiff_t)y * job->orientation_row_bytes + from;
+    int x;
+    for (x = 0; x < part; x += tessary_edges_CHUNK) {
+        const int n = part - x < tessary_edges_CHUNK ? part - x : tessary_edges_CHUNK;
+        /* neighbours beyond a seam of the ring are not seen */
+        const int seam = (x == 0 && from > 0) || (x + n == part && rest > 0);
+        float low, high;
+        code->spread(ranges, x / tessary_edges_CHUNK, &low, &high);
+        if (!seam && b[0] * (high - low) + b[1] * (low < 0.0f ? -low : low) + b[2] < flat->threshold) {
+            memset(strength + x, 0, (size_t)n * sizeof(float));
+            memset(turn + x, 0, (size_t)n);
+            flat->skipped += (uint64_t)n;
+        } else {
+            code->edges[job->scale](rows, x, n, work, strength + x, turn + x);
+        }
+    }
+}
+
+static int tessary_edges_walk_flat(const struct tessary_edges_picture *p, const struct tessary_edges_job *job,
+    struct tessary_edges_flat *flat, int first, int count, void *scratch)
+{
+    const struct tessary_edges_code_of *const code = tessary_edges_choose();
+    const size_t pitch = tessary_edges_flat_pitch(p->width);
+    const size_t ranged = tessary_edges_flat_stretches(p->width) * 32;
+    float *const ring = (float *)(void *)((unsigned char *)scratch +
+        ((64u - ((uintptr_t)scratch & 63u)) & 63u)) + 16;
+    float *const range = ring - 16 + tessary_edges_FLAT_ROWS * pitch;
+    float *const work = range + tessary_edges_FLAT_ROWS * ranged;
+    int bad = 0, from;
+    for (from = 0; from < p->width; from += tessary_edges_TILE) {
+        const int part = p->width - from < tessary_edges_TILE ? p->width - from : tessary_edges_TILE;
+        const float *rows[tessary_edges_FLAT_ROWS], *ranges[tessary_edges_FLAT_ROWS];
+        int y, j;
+        for (j = 0; j < tessary_edges_FLAT_ROWS - 1; ++j) {
+            const int wrong = tessary_edges_flat_fill(code, p, first + j - tessary_edges_RADIUS - 1, from, part,
+                ring + (size_t)j * pitch, range + (size_t)j * ranged);
+            if (j > 0) bad |= wrong; /* the row before the halo is no concern of this band */
+        }
+        for (y = 0; y < count; ++y) {
+            const int last = (y + tessary_edges_FLAT_ROWS - 1) % tessary_edges_FLAT_ROWS;
+            const int wrong = tessary_edges_flat_fill(code, p, first + y + tessary_edges_RADIUS + 1, from, part,
+                ring + (size_t)last * pitch, range + (size_t)last * ranged);
+            if (y + 1 < count) bad |= wrong;
+            for (j = 0; j < tessary_edges_FLAT_ROWS; ++j) {
+                rows[j] = ring + (size_t)((y + j) % tessary_edges_FLAT_ROWS) * pitch;
+                ranges[j] = range + (size_t)((y + j) % tessary_edges_FLAT_ROWS) * ranged;
+            }
+            tessary_edges_flat_row(code, job, flat, rows + 1, ranges, from, part, p->width - from - part, y, work);
+        }
+    }
+    return bad ? tessary_edges_BAD_PIXEL : tessary_edges_OK;
 }
 
 /* ---- fixed point */
@@ -2029,10 +2632,10 @@ static int tessary_edges_walk_q(const struct tessary_edges_picture *p, const str
 float tessary_edges_q_step(int index)
 {
     static const float steps[16] = {
-        0.00375549984f, 0.00375549984f, 0.00375549984f, 0.00375549984f, 0.00375549984f,
-        0.00375549984f, 0.00375549984f, 0.00375549984f, 0.00686406903f, 0.00686406903f,
-        0.00686406903f, 0.00686406903f, 0.00686406903f, 0.00686406903f, 0.00686406903f,
-        0.00686406903f
+        0.0040397332f, 0.0040397332f, 0.0040397332f, 0.0040397332f, 0.0040397332f,
+        0.0040397332f, 0.0040397332f, 0.0040397332f, 0.00712869735f, 0.00712869735f,
+        0.00712869735f, 0.00712869735f, 0.00712869735f, 0.00712869735f, 0.00712869735f,
+        0.00712869735f
     };
     return index < 0 || index >= tessary_edges_KERNEL_COUNT ? 0.0f : steps[index];
 }
@@ -2114,6 +2717,14 @@ const char *tessary_edges_message(int code)
     case tessary_edges_BAD_ORIENTATION_ROW_BYTES: return "orientation_row_bytes is smaller than a row";
     case tessary_edges_NO_SCRATCH: return "scratch is NULL";
     case tessary_edges_BAD_PIXEL: return "a pixel code is beyond the pixel format; the output is not to be used";
+    case tessary_edges_NO_COUNT: return "count is NULL";
+    case tessary_edges_BAD_THRESHOLD: return "a threshold is not between 1e-20 and 1e30, or no kernels find such edges";
+    case tessary_edges_NO_EDGELS: return "out is NULL and capacity is not 0";
+    case tessary_edges_EDGELS_MISALIGNED: return "out is not a multiple of 4";
+    case tessary_edges_TOO_MANY: return "there are more edgels than capacity; those that had room were written";
+    case tessary_edges_TOO_LARGE: return "the picture has too many pixels for the edgels' scratch memory";
+    case tessary_edges_BAD_STRENGTH_PLANE_BYTES: return "strength_plane_bytes: planes overlap, or no multiple of 4";
+    case tessary_edges_BAD_ORIENTATION_PLANE_BYTES: return "orientation_plane_bytes makes the planes overlap";
     default: return "unknown code";
     }
 }
@@ -2128,6 +2739,11 @@ size_t tessary_edges_scratch_bytes(int width, int height)
         const size_t codes = tessary_edges_SIZE * tessary_edges_ring_width_q(width) * sizeof(int16_t)
             + tessary_edges_SCRATCH_Q + 64;
         if (codes > bytes) bytes = codes;
+    }
+    {
+        const size_t flat = (tessary_edges_FLAT_ROWS * (tessary_edges_flat_pitch(width)
+            + 32 * tessary_edges_flat_stretches(width)) + tessary_edges_SCRATCH) * sizeof(float) + 64;
+        if (flat > bytes) bytes = flat;
     }
     return bytes;
 }
@@ -2172,6 +2788,741 @@ int tessary_edges_edges(const tessary_edges_pixel *image, ptrdiff_t row_bytes, i
 {
     return tessary_edges_edges_rows(image, row_bytes, width, height, 0, height, scale,
         strength, strength_row_bytes, orientation, orientation_row_bytes, scratch);
+}
+
+int tessary_edges_edges_above_rows(const tessary_edges_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int first_row, int row_count, int scale, float threshold,
+    float *strength, ptrdiff_t strength_row_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, uint64_t *skipped, void *scratch)
+{
+    struct tessary_edges_picture p;
+    struct tessary_edges_job job;
+    int code = tessary_edges_check_edges(&p, &job, image, row_bytes, width, height, first_row,
+        row_count, scale, strength, strength_row_bytes, orientation, orientation_row_bytes,
+        scratch);
+    if (code != tessary_edges_OK) return code;
+    {
+        struct tessary_edges_flat flat;
+        flat.threshold = threshold;
+        flat.skipped = 0;
+        code = tessary_edges_walk_flat(&p, &job, &flat, first_row, row_count, scratch);
+        if (skipped != NULL) *skipped = flat.skipped;
+    }
+    return code;
+}
+
+int tessary_edges_edges_above(const tessary_edges_pixel *image, ptrdiff_t row_bytes, int width, int height, int scale,
+    float threshold, float *strength, ptrdiff_t strength_row_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, uint64_t *skipped, void *scratch)
+{
+    return tessary_edges_edges_above_rows(image, row_bytes, width, height, 0, height, scale, threshold,
+        strength, strength_row_bytes, orientation, orientation_row_bytes, skipped, scratch);
+}
+
+int tessary_edges_edges_all_rows(const tessary_edges_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int first_row, int row_count,
+    float *strength, ptrdiff_t strength_row_bytes, ptrdiff_t strength_plane_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, ptrdiff_t orientation_plane_bytes,
+    void *scratch)
+{
+    struct tessary_edges_picture p;
+    struct tessary_edges_job job;
+    const int code = tessary_edges_check_edges(&p, &job, image, row_bytes, width, height, first_row,
+        row_count, 0, strength, strength_row_bytes, orientation, orientation_row_bytes, scratch);
+    if (code != tessary_edges_OK) return code;
+    if (strength_plane_bytes % 4 != 0 || tessary_edges_overlap(strength_row_bytes, strength_plane_bytes,
+            (ptrdiff_t)width * 4, row_count, tessary_edges_SCALE_COUNT))
+        return tessary_edges_BAD_STRENGTH_PLANE_BYTES;
+    if (tessary_edges_overlap(orientation_row_bytes, orientation_plane_bytes, width, row_count, tessary_edges_SCALE_COUNT))
+        return tessary_edges_BAD_ORIENTATION_PLANE_BYTES;
+    job.scale = tessary_edges_SCALE_COUNT;
+    job.plane_bytes = strength_plane_bytes;
+    job.orientation_plane_bytes = orientation_plane_bytes;
+    return tessary_edges_walk(&p, &job, first_row, row_count, scratch);
+}
+
+int tessary_edges_edges_all(const tessary_edges_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    float *strength, ptrdiff_t strength_row_bytes, ptrdiff_t strength_plane_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, ptrdiff_t orientation_plane_bytes,
+    void *scratch)
+{
+    return tessary_edges_edges_all_rows(image, row_bytes, width, height, 0, height,
+        strength, strength_row_bytes, strength_plane_bytes,
+        orientation, orientation_row_bytes, orientation_plane_bytes, scratch);
+}
+
+
+/* ---- edge elements */
+
+typedef void (*tessary_edges_fit_function)(const struct tessary_edges_problem *, struct tessary_edges_fitted *);
+
+static tessary_edges_fit_function tessary_edges_choose_fit(void)
+{
+#if defined(__GNUC__) && defined(__x86_64__) && tessary_edges_MAX_LANES >= 8
+    const int known = tessary_edges_processor();
+#if tessary_edges_MAX_LANES >= 16
+    if (known >= 2) return tessary_edges_fit_avx512;
+#endif
+    if (known >= 1) return tessary_edges_fit_avx2;
+#endif
+    return tessary_edges_fit_base;
+}
+
+#define tessary_edges_BAND 48 /* rows of responses that are held at once */
+#define tessary_edges_ABOVE 2 /* rows about an element that its start reads */
+#define tessary_edges_BELOW 3
+
+/* The largest response of some kernels, and which one it is. */
+struct tessary_edges_plane {
+    int count;
+    const int *even, *odd; /* NULL: the other alone; both: the root of the sum of squares */
+};
+
+/* One pixel along each direction: the cell's offset, and the place inside it. */
+struct tessary_edges_along {
+    signed char x, y;
+    float u, v, left_u, left_v; /* left_u is 1 - u */
+};
+
+/* One scale of one kind of edges. */
+struct tessary_edges_map {
+    int scale, plane, rival; /* planes; rival is -1 where there is none */
+    int rival_of_lines; /* the rival has a say only where lines are looked for too */
+    int reach, around; /* pixels at the border left out; half side of "around" */
+    float own, other; /* shares of the largest strength around, and of the largest rival */
+    const struct tessary_edges_along *ahead, *behind;
+    int apart; /* how far its elements must be from those of finer scales */
+    int softer, soft_around; /* map that soft edges are left to, or -1, and what it looks at */
+    float least; /* share of that map's strength that this one's must have */
+    int disk; /* the wide one; the narrow one follows */
+    int blur_free; /* the blur is not the camera's */
+    double slack, step_blur, log_step_blur, line_blur, log_line_blur;
+    const double *angle, *cosine, *sine, *slope_odd, *slope_even;
+};
+
+static const int tessary_edges_odd0[8] = {0, 1, 2, 3, 4, 5, 6, 7};
+static const int tessary_edges_odd1[8] = {8, 9, 10, 11, 12, 13, 14, 15};
+static const struct tessary_edges_plane tessary_edges_planes[2] = {
+    {8, NULL, tessary_edges_odd0},
+    {8, NULL, tessary_edges_odd1}
+};
+static const struct tessary_edges_along tessary_edges_ahead0[8] = {
+    {0, 0, 1.0f, 0.0f, 0.0f, 1.0f},
+    {0, 0, 0.923879504f, 0.382683426f, 0.0761204958f, 0.617316604f},
+    {0, 0, 0.707106769f, 0.707106769f, 0.292893231f, 0.292893231f},
+    {0, 0, 0.382683426f, 0.923879504f, 0.617316604f, 0.0761204958f},
+    {0, 0, 6.12323426e-17f, 1.0f, 1.0f, 0.0f},
+    {-1, 0, 0.617316544f, 0.923879504f, 0.382683456f, 0.0761204958f},
+    {-1, 0, 0.292893231f, 0.707106769f, 0.707106769f, 0.292893231f},
+    {-1, 0, 0.076120466f, 0.382683426f, 0.923879504f, 0.617316604f}
+};
+static const struct tessary_edges_along tessary_edges_behind0[8] = {
+    {-1, 0, 0.0f, 1.22464685e-16f, 1.0f, 1.0f},
+    {-1, -1, 0.076120466f, 0.617316544f, 0.923879504f, 0.382683456f},
+    {-1, -1, 0.292893231f, 0.292893231f, 0.707106769f, 0.707106769f},
+    {-1, -1, 0.617316544f, 0.076120466f, 0.382683456f, 0.923879504f},
+    {-1, -1, 1.0f, 0.0f, 0.0f, 1.0f},
+    {0, -1, 0.382683426f, 0.076120466f, 0.617316604f, 0.923879504f},
+    {0, -1, 0.707106769f, 0.292893231f, 0.292893231f, 0.707106769f},
+    {0, -1, 0.923879504f, 0.617316544f, 0.0761204958f, 0.382683456f}
+};
+static const double tessary_edges_angle0[8] = {
+    0.0, 0.39269908169872414, 0.78539816339744828, 1.1780972450961724, 1.5707963267948966,
+    1.9634954084936207, 2.3561944901923448, 2.748893571891069
+};
+static const double tessary_edges_cosine0[8] = {
+    1.0, 0.92387953251128674, 0.70710678118654757, 0.38268343236508984, 6.123233995736766e-17,
+    -0.38268343236508973, -0.70710678118654746, -0.92387953251128674
+};
+static const double tessary_edges_sine0[8] = {
+    0.0, 0.38268343236508978, 0.70710678118654746, 0.92387953251128674, 1.0,
+    0.92387953251128674, 0.70710678118654757, 0.38268343236508989
+};
+static const double tessary_edges_slope_odd0[8] = {
+    1.3651305601670722, 1.3788711095139832, 1.3874697734110513, 1.3788711095139832,
+    1.3651305601670722, 1.3788711095139832, 1.3874697734110513, 1.3788711095139834
+};
+static const struct tessary_edges_along tessary_edges_ahead1[8] = {
+    {0, 0, 1.0f, 0.0f, 0.0f, 1.0f},
+    {0, 0, 0.923879504f, 0.382683426f, 0.0761204958f, 0.617316604f},
+    {0, 0, 0.707106769f, 0.707106769f, 0.292893231f, 0.292893231f},
+    {0, 0, 0.382683426f, 0.923879504f, 0.617316604f, 0.0761204958f},
+    {0, 0, 6.12323426e-17f, 1.0f, 1.0f, 0.0f},
+    {-1, 0, 0.617316544f, 0.923879504f, 0.382683456f, 0.0761204958f},
+    {-1, 0, 0.292893231f, 0.707106769f, 0.707106769f, 0.292893231f},
+    {-1, 0, 0.076120466f, 0.382683426f, 0.923879504f, 0.617316604f}
+};
+static const struct tessary_edges_along tessary_edges_behind1[8] = {
+    {-1, 0, 0.0f, 1.22464685e-16f, 1.0f, 1.0f},
+    {-1, -1, 0.076120466f, 0.617316544f, 0.923879504f, 0.382683456f},
+    {-1, -1, 0.292893231f, 0.292893231f, 0.707106769f, 0.707106769f},
+    {-1, -1, 0.617316544f, 0.076120466f, 0.382683456f, 0.923879504f},
+    {-1, -1, 1.0f, 0.0f, 0.0f, 1.0f},
+    {0, -1, 0.382683426f, 0.076120466f, 0.617316604f, 0.923879504f},
+    {0, -1, 0.707106769f, 0.292893231f, 0.292893231f, 0.707106769f},
+    {0, -1, 0.923879504f, 0.617316544f, 0.0761204958f, 0.382683456f}
+};
+static const double tessary_edges_angle1[8] = {
+    0.0, 0.39269908169872414, 0.78539816339744828, 1.1780972450961724, 1.5707963267948966,
+    1.9634954084936207, 2.3561944901923448, 2.748893571891069
+};
+static const double tessary_edges_cosine1[8] = {
+    1.0, 0.92387953251128674, 0.70710678118654757, 0.38268343236508984, 6.123233995736766e-17,
+    -0.38268343236508973, -0.70710678118654746, -0.92387953251128674
+};
+static const double tessary_edges_sine1[8] = {
+    0.0, 0.38268343236508978, 0.70710678118654746, 0.92387953251128674, 1.0,
+    0.92387953251128674, 0.70710678118654757, 0.38268343236508989
+};
+static const double tessary_edges_slope_odd1[8] = {
+    0.83944111402506505, 0.83944157734700431, 0.83944202325395323, 0.83944157734700431,
+    0.83944111402506505, 0.8394415773470042, 0.83944202325395323, 0.83944157734700431
+};
+static const struct tessary_edges_map tessary_edges_maps[2] = {
+    {0, 0, -1, 1, 3, 3, 0.0f, 1.25f,
+     tessary_edges_ahead0, tessary_edges_behind0, 2, -1, 0, 0.0f, 0, 0,
+     1.0, 0.79655233233793987, -0.22746244891788103, 1.0, 0.0,
+     tessary_edges_angle0, tessary_edges_cosine0, tessary_edges_sine0, tessary_edges_slope_odd0, NULL},
+    {1, 1, -1, 1, 4, 4, 0.349999994f, 1.25f,
+     tessary_edges_ahead1, tessary_edges_behind1, 2, -1, 0, 0.0f, 0, 0,
+     1.0, 0.79655233233793987, -0.22746244891788103, 1.0, 0.0,
+     tessary_edges_angle1, tessary_edges_cosine1, tessary_edges_sine1, tessary_edges_slope_odd1, NULL}
+};
+static const int tessary_edges_first_map[2] = {0, 2};
+
+/* Everything that a call has to carry. */
+struct tessary_edges_search {
+    struct tessary_edges_picture picture;
+    float *strength; /* planes, one after the other */
+    unsigned char *turn;
+    unsigned char *found[1]; /* 1 + number of the map that found an element, else 0 */
+    unsigned char *weak;
+    int *stack;
+    float *band;
+    int band_first; /* first row in the band */
+    void *inner; /* scratch of the responses */
+    struct tessary_edges_work *work;
+    int lines_too;
+};
+
+static size_t tessary_edges_step64(size_t bytes) { return (bytes + 63) / 64 * 64; }
+
+size_t tessary_edges_edgels_scratch_bytes(int width, int height)
+{
+    const size_t inner = tessary_edges_scratch_bytes(width, height);
+    size_t area;
+    double all;
+    int rows;
+    if (inner == 0 || height > 2147483647 / width) return 0;
+    rows = height < tessary_edges_BAND + tessary_edges_ABOVE + tessary_edges_BELOW ? height : tessary_edges_BAND + tessary_edges_ABOVE + tessary_edges_BELOW;
+    area = (size_t)width * (size_t)height;
+    all = (double)inner + (double)area * (2 * 5 + 1 + 5) + 1024.0
+        + (double)sizeof(struct tessary_edges_work) + 4.0 * tessary_edges_KERNEL_COUNT * (double)rows * (double)width;
+    if (all >= (double)((size_t)-1 / 2)) return 0;
+    return 64 + tessary_edges_step64(sizeof(struct tessary_edges_work)) + tessary_edges_step64(inner)
+        + tessary_edges_step64(area * 2 * 4) + tessary_edges_step64(area * 2)
+        + (1 + 1) * tessary_edges_step64(area) + tessary_edges_step64(area * 4)
+        + tessary_edges_step64(4 * tessary_edges_KERNEL_COUNT * (size_t)rows * (size_t)width);
+}
+
+static void tessary_edges_lay_out(struct tessary_edges_search *s, void *scratch)
+{
+    const size_t area = (size_t)s->picture.width * (size_t)s->picture.height;
+    unsigned char *at = (unsigned char *)scratch + ((64u - ((uintptr_t)scratch & 63u)) & 63u);
+    int k;
+    s->work = (struct tessary_edges_work *)(void *)at;
+    at += tessary_edges_step64(sizeof(struct tessary_edges_work));
+    s->inner = at;
+    at += tessary_edges_step64(tessary_edges_scratch_bytes(s->picture.width, s->picture.height));
+    s->strength = (float *)(void *)at;
+    at += tessary_edges_step64(area * 2 * 4);
+    s->turn = at;
+    at += tessary_edges_step64(area * 2);
+    for (k = 0; k < 1; ++k) {
+        s->found[k] = at;
+        at += tessary_edges_step64(area);
+    }
+    s->weak = at;
+    at += tessary_edges_step64(area);
+    s->stack = (int *)(void *)at;
+    at += tessary_edges_step64(area * 4);
+    s->band = (float *)(void *)at;
+}
+
+/* Responses of rows first .. first + count - 1. */
+static int tessary_edges_fill_band(struct tessary_edges_search *s, int first, int count)
+{
+    const ptrdiff_t row = (ptrdiff_t)s->picture.width * 4;
+    s->band_first = first;
+    return tessary_edges_responses_rows((const tessary_edges_pixel *)(const void *)s->picture.pixels,
+        s->picture.row_bytes, s->picture.width, s->picture.height, first, count, s->band, row,
+        row * (tessary_edges_BAND + tessary_edges_ABOVE + tessary_edges_BELOW < s->picture.height
+            ? tessary_edges_BAND + tessary_edges_ABOVE + tessary_edges_BELOW : s->picture.height), s->inner);
+}
+
+static const float *tessary_edges_band_row(const struct tessary_edges_search *s, int kernel, int y)
+{
+    const int rows = tessary_edges_BAND + tessary_edges_ABOVE + tessary_edges_BELOW < s->picture.height
+        ? tessary_edges_BAND + tessary_edges_ABOVE + tessary_edges_BELOW : s->picture.height;
+    return s->band + ((size_t)kernel * (size_t)rows + (size_t)(y - s->band_first))
+        * (size_t)s->picture.width;
+}
+
+/* ---- strengths and thinning */
+
+static void tessary_edges_strongest(struct tessary_edges_search *s, int number, int y)
+{
+    const struct tessary_edges_plane *const p = &tessary_edges_planes[number];
+    const size_t width = (size_t)s->picture.width;
+    const size_t at = ((size_t)number * (size_t)s->picture.height + (size_t)y) * width;
+    float *const best = s->strength + at;
+    unsigned char *const turn = s->turn + at;
+    size_t x;
+    int j;
+    for (j = 0; j < p->count; ++j) {
+        const float *const a = tessary_edges_band_row(s, p->odd ? p->odd[j] : p->even[j], y);
+        const float *const b = p->odd && p->even ? tessary_edges_band_row(s, p->even[j], y) : NULL;
+        for (x = 0; x < width; ++x) {
+            float v = a[x] < 0.0f ? -a[x] : a[x];
+            if (b) v = (float)sqrt((double)a[x] * (double)a[x] + (double)b[x] * (double)b[x]);
+            if (j == 0 || v > best[x]) {
+                best[x] = v;
+                turn[x] = (unsigned char)j;
+            }
+        }
+    }
+}
+
+/* A product rounded to float by itself: no compiler may fuse it with the sum that follows. */
+static float tessary_edges_times(float a, float b) { return (float)((double)a * (double)b); }
+
+/* Bilinear sample one pixel along a direction. */
+static float tessary_edges_beside(const float *here, ptrdiff_t width, const struct tessary_edges_along *a)
+{
+    const float *const c = here + (ptrdiff_t)a->y * width + a->x;
+    const float upper = tessary_edges_times(a->left_u, c[0]) + tessary_edges_times(a->u, c[1]);
+    const float lower = tessary_edges_times(a->left_u, c[width]) + tessary_edges_times(a->u, c[width + 1]);
+    return tessary_edges_times(a->left_v, upper) + tessary_edges_times(a->v, lower);
+}
+
+/* Is a strength at least a share of all values of a plane around it? */
+static int tessary_edges_stands(const struct tessary_edges_search *s, int plane, int around, int x, int y, float share,
+    float strength)
+{
+    const int w = s->picture.width, h = s->picture.height;
+    const int left = x < around ? 0 : x - around, right = w - 1 - x < around ? w - 1 : x + around;
+    const int top = y < around ? 0 : y - around, end = h - 1 - y < around ? h - 1 : y + around;
+    const float *row = s->strength + ((size_t)plane * (size_t)h + (size_t)top) * (size_t)w;
+    int i, j;
+    for (j = top; j <= end; ++j, row += w) {
+        for (i = left; i <= right; ++i) {
+            if (!(strength >= tessary_edges_times(share, row[i]))) return 0;
+        }
+    }
+    return 1;
+}
+
+/* The largest value of a plane around a pixel. */
+static float tessary_edges_largest(const struct tessary_edges_search *s, int plane, int around, int x, int y)
+{
+    const int w = s->picture.width, h = s->picture.height;
+    const int left = x < around ? 0 : x - around, right = w - 1 - x < around ? w - 1 : x + around;
+    const int top = y < around ? 0 : y - around, end = h - 1 - y < around ? h - 1 : y + around;
+    const float *row = s->strength + ((size_t)plane * (size_t)h + (size_t)top) * (size_t)w;
+    float best = row[left];
+    int i, j;
+    for (j = top; j <= end; ++j, row += w) {
+        for (i = left; i <= right; ++i) {
+            if (row[i] > best) best = row[i];
+        }
+    }
+    return best;
+}
+
+/* Is an edge sharp enough for a map, or is it left to an octave? */
+static int tessary_edges_is_sharp(const struct tessary_edges_search *s, const struct tessary_edges_map *m, int x, int y)
+{
+    const int other = tessary_edges_maps[m->softer].plane;
+    const float own = tessary_edges_largest(s, m->plane, m->soft_around, x, y);
+    const float theirs = tessary_edges_largest(s, other, m->soft_around, x, y);
+    return own >= tessary_edges_times(m->least, theirs) + 0.5f;
+}
+
+/* Mark the thinned elements of a map: 1 from low on, 2 from high on. */
+static void tessary_edges_thin(const struct tessary_edges_search *s, const struct tessary_edges_map *m, float low, float high)
+{
+    const int w = s->picture.width, h = s->picture.height;
+    const int rim = m->reach > 1 ? m->reach : 1;
+    const size_t area = (size_t)w * (size_t)h;
+    const float *const plane = s->strength + (size_t)m->plane * area;
+    const unsigned char *const turns = s->turn + (size_t)m->plane * area;
+    const float least = low > 1e-30f ? low : 1e-30f;
+    int x, y;
+    memset(s->weak, 0, area);
+    for (y = rim; y < h - rim; ++y) {
+        for (x = rim; x < w - rim; ++x) {
+            const size_t at = (size_t)y * (size_t)w + (size_t)x;
+            const float own = plane[at];
+            const int turn = turns[at];
+            if (!(own >= least)) continue;
+            if (!(own > tessary_edges_beside(plane + at, w, &m->ahead[turn]))) continue;
+            if (!(own >= tessary_edges_beside(plane + at, w, &m->behind[turn]))) continue;
+            if (m->own > 0.0f && !tessary_edges_stands(s, m->plane, m->around, x, y, m->own, own)) continue;
+            if (m->rival >= 0 && (s->lines_too || !m->rival_of_lines) &&
+                !tessary_edges_stands(s, m->rival, m->around, x, y, m->other, own))
+                continue;
+            if (m->softer >= 0 && !tessary_edges_is_sharp(s, m, x, y)) continue;
+            s->weak[at] = (unsigned char)(own >= high ? 2 : own >= low ? 1 : 0);
+        }
+    }
+}
+
+/* Weak elements that hang together with a strong one become strong. */
+static void tessary_edges_hang_on(const struct tessary_edges_search *s)
+{
+    const int w = s->picture.width, area = w * s->picture.height;
+    int at, depth = 0;
+    for (at = 0; at < area; ++at) {
+        if (s->weak[at] == 2) s->stack[depth++] = at;
+    }
+    while (depth > 0) {
+        const int from = s->stack[--depth];
+        int dx, dy;
+        for (dy = -1; dy <= 1; ++dy) {
+            for (dx = -1; dx <= 1; ++dx) {
+                /* elements never lie on the rim, so all eight neighbours are in the picture */
+                const int to = from + dy * w + dx;
+                if (s->weak[to] == 1) {
+                    s->weak[to] = 2;
+                    s->stack[depth++] = to;
+                }
+            }
+        }
+    }
+}
+
+/* Take over a map's elements where finer maps found nothing near. */
+static size_t tessary_edges_add(const struct tessary_edges_search *s, unsigned char *found, int number)
+{
+    const int w = s->picture.width, h = s->picture.height, mark = number + 1;
+    const int apart = tessary_edges_maps[number].apart, beyond = (2 * apart + 1) * (2 * apart + 1);
+    size_t count = 0;
+    int x, y, dx, dy;
+    for (y = 0; y < h; ++y) {
+        for (x = 0; x < w; ++x) {
+            const size_t at = (size_t)y * (size_t)w + (size_t)x;
+            int clear = s->weak[at] == 2;
+            if (!clear) continue;
+            for (dy = -apart; clear && dy <= apart; ++dy) {
+                for (dx = -apart; dx <= apart; ++dx) {
+                    if (4 * (dx * dx + dy * dy) < beyond && x + dx >= 0 && x + dx < w &&
+                        y + dy >= 0 && y + dy < h) {
+                        const int other = found[(size_t)(y + dy) * (size_t)w + (size_t)(x + dx)];
+                        if (other != 0 && other != mark) clear = 0;
+                    }
+                }
+            }
+            if (clear) {
+                found[at] = (unsigned char)mark;
+                ++count;
+            }
+        }
+    }
+    return count;
+}
+
+/* ---- where the responses alone put an element */
+
+struct tessary_edges_start {
+    double offset, theta, sd;
+    int kind;
+};
+
+static int tessary_edges_within(int i, int size) { return i < 0 ? 0 : i >= size ? size - 1 : i; }
+
+/* Weights of cubic convolution; Keys 1981. */
+static void tessary_edges_cubic(double t, double *w)
+{
+    w[0] = ((-0.5 * t + 1.0) * t - 0.5) * t;
+    w[1] = (1.5 * t - 2.5) * t * t + 1.0;
+    w[2] = ((-1.5 * t + 2.0) * t + 0.5) * t;
+    w[3] = (0.5 * t - 0.5) * t * t;
+}
+
+static double tessary_edges_sample(const struct tessary_edges_search *s, int kernel, double y, double x)
+{
+    /* y and x are not far below 0 */
+    const int y0 = (int)(y + 2.0) - 2, x0 = (int)(x + 2.0) - 2;
+    double across[4], down[4], total = 0.0;
+    int i, j;
+    tessary_edges_cubic(y - y0, down);
+    tessary_edges_cubic(x - x0, across);
+    for (j = 0; j < 4; ++j) {
+        const float *const row =
+            tessary_edges_band_row(s, kernel, tessary_edges_within(y0 + j - 1, s->picture.height));
+        double line = 0.0;
+        for (i = 0; i < 4; ++i)
+            line += across[i] * (double)row[tessary_edges_within(x0 + i - 1, s->picture.width)];
+        total += down[j] * line;
+    }
+    return total;
+}
+
+/* Place of the top of a parabola through values at -1, 0 and 1. */
+static double tessary_edges_parabola(double before, double here, double after, double reach, double *bend)
+{
+    double top = 0.0;
+    *bend = before - 2.0 * here + after;
+    if (*bend < 0.0) {
+        top = (before - after) / (2.0 * *bend);
+        if (top > reach) top = reach;
+        if (top < -reach) top = -reach;
+    } else {
+        *bend = 0.0;
+    }
+    return top;
+}
+
+/* Response in a lattice direction that may run off either end. */
+static double tessary_edges_turned(const struct tessary_edges_search *s, const int *members, int count, int turn,
+    int odd, int x, int y)
+{
+    const int off = turn < 0 || turn >= count;
+    const int kernel = members[turn < 0 ? turn + count : turn >= count ? turn - count : turn];
+    const double value = (double)tessary_edges_band_row(s, kernel, y)[x];
+    return odd && off ? -value : value;
+}
+
+static void tessary_edges_begin(const struct tessary_edges_search *s, const struct tessary_edges_map *m, int x, int y, int turn,
+    struct tessary_edges_start *b)
+{
+    const struct tessary_edges_plane *const p = &tessary_edges_planes[m->plane];
+    int step = p->odd != NULL;
+    const int *members;
+    const double far = m->slack;
+    double here, sign, before, after, bend, tilt, spare;
+    if (p->odd != NULL && p->even != NULL) {
+        const float o = tessary_edges_band_row(s, p->odd[turn], y)[x];
+        const float e = tessary_edges_band_row(s, p->even[turn], y)[x];
+        step = (o < 0.0f ? -o : o) >= (e < 0.0f ? -e : e);
+    }
+    members = step ? p->odd : p->even;
+    here = (double)tessary_edges_band_row(s, members[turn], y)[x];
+    sign = here < 0.0 ? -1.0 : 1.0;
+    before = sign * tessary_edges_sample(s, members[turn], y - far * m->sine[turn],
+        x - far * m->cosine[turn]);
+    after = sign * tessary_edges_sample(s, members[turn], y + far * m->sine[turn],
+        x + far * m->cosine[turn]);
+    b->offset = far * tessary_edges_parabola(before, sign * here, after, 1.0, &bend);
+    b->sd = far * (step ? m->slope_odd : m->slope_even)[turn] / (-bend > 1e-9 ? -bend : 1e-9);
+    b->sd = far * (b->sd < 1.0 ? b->sd : 1.0);
+    tilt = 0.0;
+    if (p->count > 2) {
+        before = sign * tessary_edges_turned(s, members, p->count, turn - 1, step, x, y);
+        after = sign * tessary_edges_turned(s, members, p->count, turn + 1, step, x, y);
+        tilt = tessary_edges_parabola(before, sign * here, after, 0.5, &spare);
+    }
+    b->theta = m->angle[turn] + tilt * 3.1415926535897931 / p->count;
+    b->kind = step ? tessary_edges_STEP : sign > 0.0 ? tessary_edges_BRIGHT_LINE : tessary_edges_DARK_LINE;
+    if (step && sign < 0.0) {
+        b->theta += 3.1415926535897931;
+        b->offset = -b->offset;
+    }
+}
+
+/* ---- the place */
+
+#define tessary_edges_LOST 1e300 /* standard error of a fit that is not to be trusted */
+
+/* Fit in one of the disks. Returns the standard error. */
+static double tessary_edges_fit_disk(const struct tessary_edges_search *s, const struct tessary_edges_map *m, int x, int y,
+    const struct tessary_edges_start *b, int disk, tessary_edges_fit_function fit, struct tessary_edges_fitted *f)
+{
+    struct tessary_edges_problem p;
+    struct tessary_edges_work *const work = s->work;
+    double sine, cosine, level[2][2] = {{0.0, 0.0}, {0.0, 0.0}}, moved;
+    int i, rises, bad = 0;
+    p.disk = &tessary_edges_disks[disk];
+    p.line = b->kind != tessary_edges_STEP;
+    p.work = work;
+    p.pixels = 0;
+    p.slack = m->slack;
+    p.start = b->offset;
+    p.blur = p.line ? m->line_blur : m->step_blur;
+    p.log_blur = p.line ? m->log_line_blur : m->log_step_blur;
+    p.blur_known = !p.line && !m->blur_free && 1;
+    tessary_edges_turn(b->theta, &sine, &cosine);
+    for (i = 0; i < p.disk->padded; ++i) {
+        const int px = x + (int)p.disk->x[i], py = y + (int)p.disk->y[i];
+        const int inside = px >= 0 && px < s->picture.width && py >= 0 && py < s->picture.height;
+        const tessary_edges_pixel *const row = (const tessary_edges_pixel *)(const void *)(s->picture.pixels
+            + (ptrdiff_t)tessary_edges_within(py, s->picture.height) * s->picture.row_bytes);
+        const double u = (p.disk->x[i] * cosine + p.disk->y[i] * sine - b->offset) / p.blur;
+        const double away = tessary_edges_magnitude(u);
+        const tessary_edges_pixel pixel = row[tessary_edges_within(px, s->picture.width)];
+        work->data[i] = (double)tessary_edges_value(pixel, &bad);
+        work->weight[i] = 0.0;
+        if (i >= p.disk->count) continue;
+        work->weight[i] = inside ? 1.0 : 0.0;
+        p.pixels += inside;
+        {
+            const double light = tessary_edges_to_light(pixel);
+            const int low = p.line ? away > 2.0 : u < -1.0, high = p.line ? away < 0.7 : u > 1.0;
+            const double down = (low ? work->weight[i] : 0.0) + 1e-6;
+            const double up = (high ? work->weight[i] : 0.0) + 1e-6;
+            level[0][0] += down * light;
+            level[0][1] += down;
+            level[1][0] += up * light;
+            level[1][1] += up;
+        }
+    }
+    f->q[0] = b->offset;
+    f->q[1] = b->theta;
+    f->q[2] = level[0][0] / level[0][1];
+    f->q[3] = level[1][0] / level[1][1];
+    /* levels that differ by a rounding are equal: its sign must not choose the first step */
+    if (tessary_edges_magnitude(f->q[3] - f->q[2]) <= 1.0000000000000001e-09 * tessary_edges_magnitude(f->q[2]))
+        f->q[3] = f->q[2];
+    f->q[4] = 0.0;
+    f->q[5] = p.log_blur;
+    fit(&p, f);
+    rises = f->q[3] > f->q[2];
+    if (p.line) rises = rises == (b->kind == tessary_edges_BRIGHT_LINE);
+    moved = tessary_edges_magnitude(f->q[0] - b->offset);
+    if (!f->ok || !rises || !(moved <= m->slack * 1.5)) return tessary_edges_LOST;
+    return f->sd * sqrt(f->misfit > 1.0 ? f->misfit : 1.0);
+}
+
+static void tessary_edges_place(const struct tessary_edges_search *s, int kind, int x, int y, tessary_edges_fit_function fit,
+    struct tessary_edges_edgel *to)
+{
+    const int w = s->picture.width;
+    const size_t at = (size_t)y * (size_t)w + (size_t)x;
+    const struct tessary_edges_map *const m = &tessary_edges_maps[s->found[kind][at] - 1];
+    const size_t plane = (size_t)m->plane * (size_t)w * (size_t)s->picture.height;
+    struct tessary_edges_start b;
+    struct tessary_edges_fitted wide, near;
+    double sd, spread, sine, cosine, whole;
+    int turns;
+    tessary_edges_begin(s, m, x, y, s->turn[plane + at], &b);
+    sd = tessary_edges_fit_disk(s, m, x, y, &b, m->disk, fit, &wide);
+    if (wide.misfit > 1.8 || sd >= tessary_edges_LOST) { /* other edges near pull at it */
+        const double again = tessary_edges_fit_disk(s, m, x, y, &b, m->disk + 1, fit, &near);
+        if (again < sd) {
+            sd = again;
+            wide = near;
+        }
+    }
+    spread = 0.0;
+    if (sd < tessary_edges_LOST) {
+        b.offset = wide.q[0];
+        b.theta = wide.q[1];
+        if (b.kind != tessary_edges_STEP) spread = tessary_edges_exp(wide.q[5]);
+    } else {
+        sd = b.sd;
+    }
+    tessary_edges_turn(b.theta, &sine, &cosine);
+    to->x = (float)(x + b.offset * cosine);
+    to->y = (float)(y + b.offset * sine);
+    whole = b.kind == tessary_edges_STEP ? 6.2831853071795862 : 3.1415926535897931;
+    b.theta += b.kind == tessary_edges_STEP ? 3.1415926535897931 : 0.0;
+    turns = (int)(b.theta / whole);
+    if (whole * turns > b.theta) --turns;
+    b.theta -= whole * turns;
+    to->theta = (float)(b.theta - (b.kind == tessary_edges_STEP ? 3.1415926535897931 : 0.0));
+    to->strength = s->strength[plane + at];
+    to->sd = (float)sd;
+    spread = spread * spread - 0.63449561815301181;
+    to->width = (float)sqrt(12.0 * (spread > 0.0 ? spread : 0.0));
+    to->scale = (unsigned char)m->scale;
+    to->kind = (unsigned char)b.kind;
+    to->unused[0] = to->unused[1] = 0;
+}
+
+/* Place every element that there is room for, row by row. */
+static int tessary_edges_place_all(struct tessary_edges_search *s, struct tessary_edges_edgel *out, size_t capacity)
+{
+    const tessary_edges_fit_function fit = tessary_edges_choose_fit();
+    const int w = s->picture.width, h = s->picture.height;
+    size_t done = 0;
+    int x, y, kind;
+    s->band_first = h;
+    for (y = 0; y < h && done < capacity; ++y) {
+        for (kind = 0; kind < 1; ++kind) {
+            const unsigned char *const found = s->found[kind] + (size_t)y * (size_t)w;
+            for (x = 0; x < w && done < capacity; ++x) {
+                if (!found[x]) continue;
+                if (s->band_first == h || y >= s->band_first + tessary_edges_ABOVE + tessary_edges_BAND) {
+                    const int first = y < tessary_edges_ABOVE ? 0 : y - tessary_edges_ABOVE;
+                    const int rows = tessary_edges_BAND + tessary_edges_ABOVE + tessary_edges_BELOW;
+                    const int code = tessary_edges_fill_band(s, first, h - first < rows ? h - first : rows);
+                    if (code != tessary_edges_OK) return code;
+                }
+                tessary_edges_place(s, kind, x, y, fit, out + done++);
+            }
+        }
+    }
+    return tessary_edges_OK;
+}
+
+/* Find the elements of every kind and scale. */
+static int tessary_edges_find(struct tessary_edges_search *s, const double *high, size_t *count)
+{
+    const size_t area = (size_t)s->picture.width * (size_t)s->picture.height;
+    int y, first, k, number;
+    for (first = 0; first < s->picture.height; first += tessary_edges_BAND) {
+        const int left = s->picture.height - first;
+        const int code = tessary_edges_fill_band(s, first, left < tessary_edges_BAND ? left : tessary_edges_BAND);
+        if (code != tessary_edges_OK) return code;
+        for (y = first; y < first + tessary_edges_BAND && y < s->picture.height; ++y) {
+            for (k = 0; k < 2; ++k) tessary_edges_strongest(s, k, y);
+        }
+    }
+    for (k = 0; k < 1; ++k) {
+        const double ratio = k == 0 ? tessary_edges_HYSTERESIS_RATIO : 0.69999999999999996;
+        memset(s->found[k], 0, area);
+        for (number = tessary_edges_first_map[k]; high[k] > 0.0 && number < tessary_edges_first_map[k + 1]; ++number) {
+            tessary_edges_thin(s, &tessary_edges_maps[number], (float)(ratio * high[k]), (float)high[k]);
+            tessary_edges_hang_on(s);
+            *count += tessary_edges_add(s, s->found[k], number);
+        }
+    }
+    return tessary_edges_OK;
+}
+
+int tessary_edges_edgels(const tessary_edges_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    double threshold, double line_threshold,
+    struct tessary_edges_edgel *out, size_t capacity, size_t *count, void *scratch)
+{
+    struct tessary_edges_search s;
+    double high[2];
+    int code;
+    if (count == NULL) return tessary_edges_NO_COUNT;
+    *count = 0;
+    s.picture.pixels = (const unsigned char *)image;
+    s.picture.row_bytes = row_bytes;
+    s.picture.width = width;
+    s.picture.height = height;
+    code = tessary_edges_check_picture(&s.picture, 0, height > 0 ? height : 1);
+    if (code != tessary_edges_OK) return code;
+    if (tessary_edges_edgels_scratch_bytes(width, height) == 0) return tessary_edges_TOO_LARGE;
+    high[0] = threshold;
+    high[1] = line_threshold;
+    if (!(threshold >= 0.0 && line_threshold >= 0.0 && threshold <= 1e30 &&
+          line_threshold <= 1e30 && (threshold >= 1e-20 || threshold == 0.0) &&
+          (line_threshold >= 1e-20 || line_threshold == 0.0)))
+        return tessary_edges_BAD_THRESHOLD;
+    if ((threshold == 0.0 && line_threshold == 0.0) || (line_threshold > 0.0 && 1 == 1))
+        return tessary_edges_BAD_THRESHOLD;
+    if (out == NULL && capacity > 0) return tessary_edges_NO_EDGELS;
+    if ((uintptr_t)out % sizeof(float) != 0) return tessary_edges_EDGELS_MISALIGNED;
+    if (scratch == NULL) return tessary_edges_NO_SCRATCH;
+    s.lines_too = threshold > 0.0 && line_threshold > 0.0;
+    tessary_edges_lay_out(&s, scratch);
+    code = tessary_edges_find(&s, high, count);
+    if (code == tessary_edges_OK) code = tessary_edges_place_all(&s, out, capacity);
+    if (code != tessary_edges_OK) *count = 0;
+    return code == tessary_edges_OK && *count > capacity ? tessary_edges_TOO_MANY : code;
 }
 
 #endif

@@ -81,7 +81,15 @@ enum tessary_features_code {
     tessary_features_NO_ORIENTATION = 15,
     tessary_features_BAD_ORIENTATION_ROW_BYTES = 16,
     tessary_features_NO_SCRATCH = 17,
-    tessary_features_BAD_PIXEL = 18
+    tessary_features_BAD_PIXEL = 18,
+    tessary_features_NO_COUNT = 19,
+    tessary_features_BAD_THRESHOLD = 20,
+    tessary_features_NO_EDGELS = 21,
+    tessary_features_EDGELS_MISALIGNED = 22,
+    tessary_features_TOO_MANY = 23,
+    tessary_features_TOO_LARGE = 24,
+    tessary_features_BAD_STRENGTH_PLANE_BYTES = 25,
+    tessary_features_BAD_ORIENTATION_PLANE_BYTES = 26
 };
 
 /* ---- about the bank */
@@ -151,6 +159,36 @@ tessary_features_API int tessary_features_edges_rows(const tessary_features_pixe
     float *strength, ptrdiff_t strength_row_bytes,
     unsigned char *orientation, ptrdiff_t orientation_row_bytes, void *scratch);
 
+/* Strengths and orientations of all scales in one pass over the picture, the bits of tessary_features_edges: scale s
+ * goes to strength + s * strength_plane_bytes and orientation + s * orientation_plane_bytes (in bytes).
+ * Returns 0, or a code. */
+tessary_features_API int tessary_features_edges_all(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    float *strength, ptrdiff_t strength_row_bytes, ptrdiff_t strength_plane_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, ptrdiff_t orientation_plane_bytes,
+    void *scratch);
+
+/* The same for some rows alone; strength and orientation are where row first_row goes. */
+tessary_features_API int tessary_features_edges_all_rows(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int first_row, int row_count,
+    float *strength, ptrdiff_t strength_row_bytes, ptrdiff_t strength_plane_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, ptrdiff_t orientation_plane_bytes,
+    void *scratch);
+
+/* As tessary_features_edges, for callers who want what reaches a threshold. At every pixel whose strength is at
+ * least the threshold, and at its eight neighbours, strength and orientation are those of
+ * tessary_features_edges, bit for bit; so thinning with that threshold gives the same edges. Elsewhere they are the
+ * same or both 0: stretches that are provably too flat are not computed. *skipped, where it is not
+ * NULL, becomes the number of such pixels. Returns 0, or a code. */
+tessary_features_API int tessary_features_edges_above(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int scale, float threshold, float *strength, ptrdiff_t strength_row_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, uint64_t *skipped, void *scratch);
+
+/* The same for some rows alone; strength and orientation are where row first_row goes. */
+tessary_features_API int tessary_features_edges_above_rows(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    int first_row, int row_count, int scale, float threshold,
+    float *strength, ptrdiff_t strength_row_bytes,
+    unsigned char *orientation, ptrdiff_t orientation_row_bytes, uint64_t *skipped, void *scratch);
+
 /* ---- fixed point
  *
  * The same bank in 16-bit integers: faster, and the same bits on every processor. A response
@@ -179,6 +217,45 @@ tessary_features_API int tessary_features_edges_q(const tessary_features_pixel *
 tessary_features_API int tessary_features_edges_q_rows(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
     int first_row, int row_count, int scale, float *strength, ptrdiff_t strength_row_bytes,
     unsigned char *orientation, ptrdiff_t orientation_row_bytes, void *scratch);
+
+/* ---- edge elements */
+
+/* An edge element, placed below the pixel by least squares of a blurred edge run through the
+ * input table. */
+struct tessary_features_edgel {
+    float x, y; /* pixels; the centre of the first pixel is 0, 0 */
+    float theta; /* normal, radians from +x towards +y, towards the brighter side for a step */
+    float strength; /* of the response that found it */
+    float sd; /* standard error of the position along the normal, pixels */
+    float width; /* of a line, pixels, blur taken out; 0 for a step */
+    unsigned char scale; /* that found it, 0 the finest */
+    unsigned char kind; /* tessary_features_STEP, tessary_features_BRIGHT_LINE or tessary_features_DARK_LINE */
+    unsigned char unused[2]; /* 0 */
+};
+
+#define tessary_features_STEP 0
+#define tessary_features_BRIGHT_LINE 1
+#define tessary_features_DARK_LINE 2
+
+/* Bytes of scratch memory that tessary_features_edgels needs on a picture of this size (about 11 bytes a
+ * pixel); 0 when no call would accept the size. Any alignment will do; nothing is kept in it. */
+tessary_features_API size_t tessary_features_edgels_scratch_bytes(int width, int height);
+
+/* Edge elements of the whole picture: strength, thinning along the normal, hysteresis, the finest
+ * scale first, and the sub-pixel place of each.
+ *   threshold        strength at which an element stands by itself: one of
+ *                    tessary_features_STRENGTH_THRESHOLDS, or any other.
+ *                    Neighbours of tessary_features_HYSTERESIS_RATIO times that hang on.
+ *   line_threshold   0, as this bank looks for one kind of edges only
+ *   out, capacity    room for that many elements; NULL with 0 to count them only
+ *   count            how many there are, which may be more than capacity; 0 after a refusal
+ *   scratch          tessary_features_edgels_scratch_bytes(width, height) bytes
+ * They come row by row. Returns 0; tessary_features_TOO_MANY when there was not room for all: those of the
+ * first rows stand in out; or another code. */
+#define tessary_features_HYSTERESIS_RATIO 0.69999999999999996
+tessary_features_API int tessary_features_edgels(const tessary_features_pixel *image, ptrdiff_t row_bytes, int width, int height,
+    double threshold, double line_threshold,
+    struct tessary_features_edgel *out, size_t capacity, size_t *count, void *scratch);
 
 #ifdef __cplusplus
 }

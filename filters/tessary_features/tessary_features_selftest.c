@@ -2783,10 +2783,10 @@ static const double expected0[13888] = {
     0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0, 0.0
 };
 static const double tolerance0[16] = {
-    0.0060870083097001315, 0.0080462249743485335, 0.0083208613010227282, 0.0080462249743485335,
-    0.0060870083097001315, 0.0080462249743485335, 0.0083208613010227282, 0.0080462249743485335,
-    0.0063843779142748096, 0.0081137382734013924, 0.0082207314558650803, 0.0081137382734013924,
-    0.0063843779142748096, 0.0081137382734013924, 0.0082207314558650803, 0.0081137382734013924
+    0.047284707404630803, 0.04274973549927228, 0.037661026404987259, 0.03665662146110351,
+    0.036707117606883249, 0.03665662146110351, 0.037661026404987259, 0.04274973549927228,
+    0.045824320937894389, 0.038976852786574201, 0.036614926342350251, 0.036241040423419697,
+    0.036311116883034379, 0.036241040423419697, 0.036614926342350265, 0.038976852786574201
 };
 static const int16_t counts0[13888] = {
     0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0,
@@ -6198,10 +6198,10 @@ static const double expected1[11232] = {
     0.99180328353934044, 8.4864910718296471
 };
 static const double tolerance1[16] = {
-    0.0060870083097001315, 0.0080462249743485335, 0.0083208613010227282, 0.0080462249743485335,
-    0.0060870083097001315, 0.0080462249743485335, 0.0083208613010227282, 0.0080462249743485335,
-    0.0063843779142748096, 0.0081137382734013924, 0.0082207314558650803, 0.0081137382734013924,
-    0.0063843779142748096, 0.0081137382734013924, 0.0082207314558650803, 0.0081137382734013924
+    0.047284707404630803, 0.04274973549927228, 0.037661026404987259, 0.03665662146110351,
+    0.036707117606883249, 0.03665662146110351, 0.037661026404987259, 0.04274973549927228,
+    0.045824320937894389, 0.038976852786574201, 0.036614926342350251, 0.036241040423419697,
+    0.036311116883034379, 0.036241040423419697, 0.036614926342350265, 0.038976852786574201
 };
 static const int16_t counts1[11232] = {
     0, 11, 289, 880, 1539, 1882, 1589, 568, -965, -2453, -3243, -3037, -2101, -1093, -533, -240,
@@ -9450,10 +9450,10 @@ static const double expected2[10000] = {
     0.26290105524521223, -20.355642980383877, -29.263704836637835
 };
 static const double tolerance2[16] = {
-    0.0060870083097001315, 0.0080462249743485335, 0.0083208613010227282, 0.0080462249743485335,
-    0.0060870083097001315, 0.0080462249743485335, 0.0083208613010227282, 0.0080462249743485335,
-    0.0063843779142748096, 0.0081137382734013924, 0.0082207314558650803, 0.0081137382734013924,
-    0.0063843779142748096, 0.0081137382734013924, 0.0082207314558650803, 0.0081137382734013924
+    0.047284707404630803, 0.04274973549927228, 0.037661026404987259, 0.03665662146110351,
+    0.036707117606883249, 0.03665662146110351, 0.037661026404987259, 0.04274973549927228,
+    0.045824320937894389, 0.038976852786574201, 0.036614926342350251, 0.036241040423419697,
+    0.036311116883034379, 0.036241040423419697, 0.036614926342350265, 0.038976852786574201
 };
 static const int16_t counts2[10000] = {
     0, -256, -514, -567, -409, -348, -482, -543, -391, -229, -271, -417, -324, 109, 426, 246,
@@ -10252,6 +10252,78 @@ static void check_edges(const struct test_case *c, edges_function edges, const d
     free(turn);
 }
 
+/* Edges above a threshold: what reaches it, and its neighbours, as without; elsewhere that or 0. */
+static void check_above(const struct test_case *c, int scale, void *scratch)
+{
+    const int width = c->width, height = c->height;
+    const ptrdiff_t in = (ptrdiff_t)width * (ptrdiff_t)sizeof(tessary_features_pixel);
+    const size_t size = (size_t)width * (size_t)height;
+    float *whole = (float *)memory(size * sizeof(float));
+    float *above = (float *)memory(size * sizeof(float));
+    unsigned char *won = (unsigned char *)memory(size), *turn = (unsigned char *)memory(size);
+    uint64_t skipped = 1, part;
+    float threshold = 0.0f;
+    int code = tessary_features_edges(c->pixels, in, width, height, scale, whole, width * 4, won, width, scratch);
+    int same = 1, x, y, i, j;
+    for (i = 0; i < (int)size; ++i) threshold = whole[i] > threshold ? whole[i] : threshold;
+    threshold *= 0.75f;
+    code |= tessary_features_edges_above_rows(c->pixels, in, width, height, 0, height / 2, scale, threshold, above,
+        width * 4, turn, width, &skipped, scratch);
+    code |= tessary_features_edges_above_rows(c->pixels, in, width, height, height / 2, height - height / 2, scale,
+        threshold, above + (ptrdiff_t)(height / 2) * width, width * 4,
+        turn + (ptrdiff_t)(height / 2) * width, width, &part, scratch);
+    skipped += part;
+    for (y = 0; y < height; ++y) {
+        for (x = 0; x < width; ++x) {
+            const size_t at = (size_t)y * (size_t)width + (size_t)x;
+            int near = 0;
+            for (j = y > 0 ? y - 1 : 0; j <= y + 1 && j < height; ++j) {
+                for (i = x > 0 ? x - 1 : 0; i <= x + 1 && i < width; ++i) {
+                    near |= whole[(size_t)j * (size_t)width + (size_t)i] >= threshold;
+                }
+            }
+            if (memcmp(above + at, whole + at, sizeof(float)) != 0 || turn[at] != won[at]) {
+                same &= !near && above[at] <= 0.0f && turn[at] == 0 && skipped > 0;
+            }
+        }
+    }
+    check(code == tessary_features_OK && same && skipped <= size,
+        "edges above a threshold are those that are found without", c->name);
+    free(whole);
+    free(above);
+    free(won);
+    free(turn);
+}
+
+/* All scales in one pass, in two bands. */
+static void check_all_scales(const struct test_case *c, void *scratch)
+{
+    const int width = c->width, height = c->height, half = height / 2;
+    const ptrdiff_t in = (ptrdiff_t)width * (ptrdiff_t)sizeof(tessary_features_pixel);
+    const ptrdiff_t size = (ptrdiff_t)width * height;
+    const size_t scales = tessary_features_SCALE_COUNT > 0 ? tessary_features_SCALE_COUNT : 1;
+    float *all = (float *)memory((size_t)size * scales * sizeof(float));
+    float *one = (float *)memory((size_t)size * sizeof(float));
+    unsigned char *turns = (unsigned char *)memory((size_t)size * scales);
+    unsigned char *turn = (unsigned char *)memory((size_t)size);
+    int code = tessary_features_edges_all_rows(c->pixels, in, width, height, 0, half, all, width * 4, size * 4,
+        turns, width, size, scratch);
+    int same = 1, scale;
+    code |= tessary_features_edges_all_rows(c->pixels, in, width, height, half, height - half,
+        all + (ptrdiff_t)half * width, width * 4, size * 4, turns + (ptrdiff_t)half * width, width,
+        size, scratch);
+    for (scale = 0; scale < tessary_features_SCALE_COUNT; ++scale) {
+        code |= tessary_features_edges(c->pixels, in, width, height, scale, one, width * 4, turn, width, scratch);
+        same &= memcmp(one, all + scale * size, (size_t)size * 4) == 0;
+        same &= memcmp(turn, turns + scale * size, (size_t)size) == 0;
+    }
+    check(code == tessary_features_OK && same, "all scales in one pass give the same bits", c->name);
+    free(all);
+    free(one);
+    free(turns);
+    free(turn);
+}
+
 /* Bands of growing height into padded rows, from a picture stored bottom-up: the same bits. */
 static void check_edge_layouts(const struct test_case *c, int scale, void *scratch)
 {
@@ -10460,6 +10532,26 @@ static void check_refusals(const struct test_case *c, float *planes, void *scrat
         refused(tessary_features_edges(p, in, w, h, 0, planes, row, turn, w - 1, scratch),
             tessary_features_BAD_ORIENTATION_ROW_BYTES);
         refused(tessary_features_edges(p, in, w, h, 0, planes, row, turn, w, NULL), tessary_features_NO_SCRATCH);
+        refused(tessary_features_edges_above(p, in, w, h, tessary_features_SCALE_COUNT, 1.0f, planes, row, turn, w, NULL, scratch),
+            tessary_features_BAD_SCALE);
+        refused(tessary_features_edges_above(NULL, in, w, h, 0, 1.0f, planes, row, turn, w, NULL, scratch),
+            tessary_features_NO_IMAGE);
+        refused(tessary_features_edges_above_rows(p, in, w, h, 1, h, 0, 1.0f, planes, row, turn, w, NULL, scratch),
+            tessary_features_BAD_ROWS);
+        refused(tessary_features_edges_above(p, in, w, h, 0, 1.0f, planes, row, NULL, w, NULL, scratch),
+            tessary_features_NO_ORIENTATION);
+        refused(tessary_features_edges_above(p, in, w, h, 0, 1.0f, planes, row, turn, w, NULL, NULL),
+            tessary_features_NO_SCRATCH);
+        refused(tessary_features_edges_all(NULL, in, w, h, planes, row, row * h, turn, w, w * h, scratch),
+            tessary_features_NO_IMAGE);
+        refused(tessary_features_edges_all(p, in, w, h, planes, row, row * h + 2, turn, w, w * h, scratch),
+            tessary_features_BAD_STRENGTH_PLANE_BYTES);
+        if (tessary_features_SCALE_COUNT > 1) {
+            refused(tessary_features_edges_all(p, in, w, h, planes, row, row - 4, turn, w, w * h, scratch),
+                tessary_features_BAD_STRENGTH_PLANE_BYTES);
+            refused(tessary_features_edges_all(p, in, w, h, planes, row, row * h, turn, w, w - 1, scratch),
+                tessary_features_BAD_ORIENTATION_PLANE_BYTES);
+        }
     }
     if (0) {
         const size_t size = (size_t)w * (size_t)h;
@@ -10498,7 +10590,9 @@ int main(void)
         for (scale = 0; scale < tessary_features_SCALE_COUNT; ++scale) {
             check_edges(c, tessary_features_edges, c->tolerance, scale, scratch + 1);
             check_edge_layouts(c, scale, scratch + 1);
+            check_above(c, scale, scratch + 1);
         }
+        if (tessary_features_SCALE_COUNT > 0) check_all_scales(c, scratch + 1);
         check_wide(c, planes);
         check_fixed(c, scratch + 1);
         for (scale = 0; scale < tessary_features_SCALE_COUNT; ++scale) {
