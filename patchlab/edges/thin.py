@@ -185,7 +185,9 @@ def _magnitudes(shape: ScaleShape, plane: Any, kind: Kind) -> Iterable[F32]:
     """Non-negative response planes in order of orientation; ``plane(i)`` is kernel i's response."""
     if kind == "energy":
         for o, e in zip(shape.odd, shape.even, strict=True):
-            yield np.hypot(plane(o), plane(e))
+            # rounded once, by no library's own rule, so that compiled code gives the same bits
+            odd, even = (plane(i).astype(np.float64) for i in (o, e))
+            yield np.sqrt(odd * odd + even * even).astype(np.float32)
     else:
         for i in shape.even if kind == "line" else shape.odd:
             yield np.abs(plane(i))

@@ -20,7 +20,6 @@ from typing import Any, get_args
 from patchlab import bank as banks
 from patchlab import edges, images, store
 from patchlab.errors import InputError, PatchlabError, UsageError
-from patchlab.pipeline.bundle import open_native
 from patchlab.pipeline.desk import may_write
 from patchlab.pipeline.edgel_rules import compiled_edgels
 from patchlab.pipeline.edgel_table import (
@@ -31,7 +30,7 @@ from patchlab.pipeline.edgel_table import (
     write_table,
 )
 from patchlab.pipeline.loaded import bank_folder
-from patchlab.pipeline.use import orientation_count
+from patchlab.pipeline.use import Engine, engine_of, orientation_count
 from patchlab.progress import Progress, silent
 from patchlab.types import Bank, EdgeMap, Frame
 from patchlab.workers import map_ordered
@@ -95,13 +94,10 @@ class _Task:
 
 
 @functools.lru_cache(maxsize=2)
-def _opened(folder: str, bank_id: str) -> tuple[Bank, banks.NativeBank | None, Any]:
+def _opened(folder: str, bank_id: str) -> tuple[Bank, Engine]:
     path = Path(folder)
     bank, plan, head = banks.read_bank(path)
-    native = open_native(path, bank, plan, head)
-    if native is None:
-        return bank, None, lambda pixels: banks.responses(bank, pixels, plan)
-    return bank, native, native.responses
+    return bank, engine_of(path, bank, plan, head)
 
 
 def _stamp(path: Path) -> list[int]:
@@ -115,7 +111,7 @@ def _stamp(path: Path) -> list[int]:
 
 def _work(task: _Task) -> dict[str, Any]:
     """Find the edges of one unit, write them, and give its line of the journal."""
-    bank, native, respond = _opened(task.bank, task.bank_id)
+    bank, engine = _opened(task.bank, task.bank_id)
     unit, root = task.unit, Path(task.root)
     line: dict[str, Any] = {
         "key": unit.key,
@@ -129,10 +125,10 @@ def _work(task: _Task) -> dict[str, Any]:
             line["reason"] = unit.reason
         elif unit.part is None:
             for frame in images.read_file(root, unit.file, read_options(bank)):
-                line["frames"].append(_one(bank, frame, native, respond, task))
+                line["frames"].append(_one(bank, frame, engine, task))
         else:
-            frames = images.read_part(root, unit.file, unit.part, read_options(bank))
-            _film(bank, frames, native, respond, task, line)
+            _film(bank, images.read_part(root, unit.file, unit.part, read_options(bank)), engine,
+                  task, line)  # fmt: skip
     except PatchlabError as error:
         line["reason"] = str(error)
     return line
@@ -141,8 +137,7 @@ def _work(task: _Task) -> dict[str, Any]:
 def _film(
     bank: Bank,
     frames: Iterable[tuple[str, Frame | str]],
-    native: banks.NativeBank | None,
-    respond: Any,
+    engine: Engine,
     task: _Task,
     line: dict[str, Any],
 ) -> None:
@@ -151,7 +146,7 @@ def _film(
         try:
             if isinstance(frame, str):
                 raise InputError(frame, where=name)
-            line["frames"].append(_one(bank, frame, native, respond, task))
+            line["frames"].append(_one(bank, frame, engine, task))
         except PatchlabError as error:
             line["bad"].append({"path": name, "reason": str(error)})
 
@@ -179,17 +174,15 @@ def _stem(file: str, path: str) -> str:
     return file if page == path else f"{file}_page{page}"
 
 
-def _one(
-    bank: Bank, frame: Frame, native: banks.NativeBank | None, respond: Any, task: _Task
-) -> dict[str, Any]:
+def _one(bank: Bank, frame: Frame, engine: Engine, task: _Task) -> dict[str, Any]:
     """Edges of one picture; its edgels by the compiled library where that has them."""
     asked, out = task.request, Path(task.out)
     levels = edges.levels_of(bank, asked.what, asked.rate, asked.threshold)
-    place = compiled_edgels(bank, native, levels) if frame.invalid is None else None
+    place = compiled_edgels(bank, engine.native, levels) if frame.invalid is None else None
     found = edges.find(
         bank,
         frame.pixels,
-        respond,
+        engine.respond,
         what=asked.what,
         rate=asked.rate,
         threshold=asked.threshold,

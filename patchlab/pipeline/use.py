@@ -8,7 +8,7 @@ from __future__ import annotations
 import io
 import json
 from collections import Counter
-from collections.abc import Mapping
+from collections.abc import Callable, Mapping
 from dataclasses import dataclass
 from pathlib import Path
 from typing import Any
@@ -71,10 +71,23 @@ def verify(path: Path, progress: Progress = silent) -> dict[str, Any]:
 
 def responder(folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any]) -> Any:
     """The fastest engine at hand: the compiled library of this machine, else numpy."""
+    return engine_of(folder, bank, plan, head).respond
+
+
+@dataclass(frozen=True)
+class Engine:
+    """What computes a bank: its responses, and the compiled library where there is one."""
+
+    respond: Callable[[Any], Any]
+    native: banks.NativeBank | None = None
+
+
+def engine_of(folder: Path, bank: Bank, plan: Plan, head: Mapping[str, Any]) -> Engine:
+    """The compiled library of this machine, else numpy."""
     native = open_native(folder, bank, plan, head)
     if native is not None:
-        return native.responses
-    return lambda pixels: banks.responses(bank, pixels, plan)
+        return Engine(native.responses, native)
+    return Engine(lambda pixels: banks.responses(bank, pixels, plan))
 
 
 def orientation_count(bank: Bank) -> int:
