@@ -31,8 +31,9 @@ SETTLED = 1e-3
 """Fall of the chi-square, over its value a degree of freedom, that a last step may promise."""
 DAMPING = 1e-3
 """Least damping, as a share of the normal matrix's diagonal."""
-RUNAWAY_PX = 2.0
-"""A fit that moves farther than this from its start is given up."""
+RUNAWAY_PX = 2.02
+"""A fit that moves farther than this from its start is given up. No whole number of largest steps,
+so that no rounding decides it."""
 ASKS = 9.0
 """Fall of the chi-square that frees a further parameter: by chance, three straight edges in a
 thousand, which costs them a third of their precision."""

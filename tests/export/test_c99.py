@@ -382,7 +382,8 @@ def test_thresholds_stand_in_the_header():
         np.float32(v) for v in known.strength
     ]
     without = c99.emit(replace(bank, thresholds=None), make_plan(bank))["arbitrary.h"].decode()
-    assert "THRESHOLD" not in without
+    assert "THRESHOLD_COUNT" not in without
+    assert "STRENGTH_THRESHOLDS" not in without
     assert "GROUPS" not in header
     grouped = replace(known, groups=np.array([0.2, 1.4, 12.5]))
     both = replace(bank, thresholds=grouped, line_thresholds=known)
