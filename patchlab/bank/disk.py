@@ -45,7 +45,7 @@ from patchlab.types import (
 )
 
 MANIFEST = "bank.json"
-LAYOUT = 1
+LAYOUT = 2
 """Raised whenever the same kernels would be planned or laid out otherwise."""
 TAPS, TABLE, NOISE = "kernels.npy", "input_table.npy", "autocovariance.npy"
 MIX = "mix.npy"
@@ -268,6 +268,22 @@ def write_bank(
 # ---------------------------------------------------------------- reading
 
 
+def _version(head: Mapping[str, Any]) -> Any:
+    made_by = head.get("environment")
+    return made_by.get("patchlab") if isinstance(made_by, dict) else None
+
+
+def _made_elsewhere(head: Mapping[str, Any]) -> VerificationError:
+    version = _version(head)
+    return VerificationError(
+        f"this bank was exported by another patchlab (version {shown(version)}, layout "
+        f"{shown(head.get('layout'))}; here is {__version__}, layout {LAYOUT}), which planned it "
+        "otherwise",
+        where=str(head.get("name", "")),
+        remedy="export it again with this version, or use the one that made it",
+    )
+
+
 def read_bank(folder: Path) -> tuple[Bank, Plan, dict[str, Any]]:
     """Read a bank, its plan and its manifest; nothing of it is run.
 
@@ -288,6 +304,8 @@ def read_bank(folder: Path) -> tuple[Bank, Plan, dict[str, Any]]:
     folder = Path(folder)
     head = read_manifest(folder, "bank", manifest=MANIFEST)
     _check_id(folder, head)
+    if head.get("layout") != LAYOUT:
+        raise _made_elsewhere(head)
     try:
         bank = _bank(folder, head)
         check_names(bank)
@@ -462,15 +480,8 @@ def _plan(folder: Path, head: Mapping[str, Any], bank: Bank) -> Plan:
     near = 1e-2 if fits else 1e-9
     same = stored.shape == (len(bank),) and np.allclose(stored, plan.error_bound, near, 0)
     if not same or head["interface"] != plan.detail["abi"]:
-        made = head.get("layout"), head.get("environment", {}).get("patchlab")
-        if made != (LAYOUT, __version__):
-            raise VerificationError(
-                f"this bank was exported by another patchlab (version {shown(made[1])}, layout "
-                f"{shown(made[0])}; here is {__version__}, layout {LAYOUT}), which planned it "
-                "otherwise",
-                where=bank.name,
-                remedy="export it again with this version, or use the one that made it",
-            )
+        if _version(head) != __version__:
+            raise _made_elsewhere(head)
         raise VerificationError(
             "the plan in the manifest does not belong to these kernels",
             where=bank.name,
