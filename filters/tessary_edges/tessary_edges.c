@@ -1566,7 +1566,7 @@ static tessary_edges_TARGET int tessary_edges_FN(descend)(const struct tessary_e
             damping = damping * 5.0 > 0.29999999999999999 ? damping * 5.0 : 0.29999999999999999;
         }
         if (promise < 0.001 * (before / loose > 1.0 ? before / loose : 1.0)) return 1;
-        if (!(tessary_edges_magnitude(q[0] - origin) <= p->slack * 2.0)) return 0;
+        if (!(tessary_edges_magnitude(q[0] - origin) <= p->slack * 2.02)) return 0;
     }
     return 0;
 }

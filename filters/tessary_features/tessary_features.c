@@ -2905,7 +2905,7 @@ static tessary_features_TARGET int tessary_features_FN(descend)(const struct tes
             damping = damping * 5.0 > 0.29999999999999999 ? damping * 5.0 : 0.29999999999999999;
         }
         if (promise < 0.001 * (before / loose > 1.0 ? before / loose : 1.0)) return 1;
-        if (!(tessary_features_magnitude(q[0] - origin) <= p->slack * 2.0)) return 0;
+        if (!(tessary_features_magnitude(q[0] - origin) <= p->slack * 2.02)) return 0;
     }
     return 0;
 }
