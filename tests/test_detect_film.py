@@ -65,8 +65,8 @@ def test_every_frame_has_the_edges_of_its_picture(bank, frames, whole, tmp_path)
     for k in (0, 1, 16, 17, COUNT - 1):
         Image.fromarray(frames[k]).save(tmp_path / "stills" / f"{k}.png")
         run(bank, tmp_path / "stills" / f"{k}.png", tmp_path / f"out{k}")
-        still = (tmp_path / f"out{k}" / "edgels" / f"{k}.png.csv").read_bytes()
-        assert still == (out / "edgels" / f"film.mkv_page{k}.csv").read_bytes()
+        still = (tmp_path / f"out{k}" / "edgels" / f"{k}_png.csv").read_bytes()
+        assert still == (out / "edgels" / f"film_mkv_page{k}.csv").read_bytes()
         assert still.count(b"\n") > 20
 
 

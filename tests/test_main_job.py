@@ -370,7 +370,7 @@ def test_force_removes_nothing_before_its_successor_stands(first, photos, tmp_pa
     patchlab("run", photos, "-o", copy, "--force", "--dry-run", *SMALL, check=0)
     assert (copy / "bank" / "bank.json").read_bytes() == bank
     patchlab("survey", photos, "-o", copy, "--force", check=0)
-    assert sorted(p.name for p in copy.iterdir()) == ["survey"]
+    assert sorted(p.name for p in copy.iterdir()) == ["report", "survey"]
 
 
 def test_folders_that_only_share_a_name_are_left_alone(photos, tmp_path):

@@ -29,7 +29,7 @@ def columns(plan: Plan) -> int:
 def about(number: int, plan: Plan) -> str:
     """A group of products in words."""
     group = plan.detail["product_groups"][number]
-    rows, cols = plan.detail["coefficients"][group[0]].shape
+    rows, cols = plan.detail["coefficients"][group[0]].shape[-2:]
     basis = plan.detail["bases"][group[0]]
     if basis == "all":
         return f"{len(group)} x {rows} x {cols} coefficients, taps as they are"

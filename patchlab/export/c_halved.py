@@ -41,6 +41,7 @@ def _small(halved: Any) -> Plan:
             "bases": tuple(p.basis for p in products),
             "coefficients": tuple(p.rounded for p in products),
             "factors": (None,) * len(products),
+            "planes": (0,) * len(products),
             "sums": halved.sums,
             "product_groups": halved.groups,
             "strength": (),

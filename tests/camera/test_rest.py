@@ -52,9 +52,9 @@ def test_each_reason_is_found_among_the_other_frames_and_no_clean_one(
     seen = frozenset(f.path for f in frames[:8])
     found = judge_rest(surveyed(contract, law), frames, seen)
     odd = [("again.png", "near duplicate"), ("burnt.png", "clipped")]
-    if known:  # else noise may hide that a frame is soft
-        odd.insert(0, ("09.png", "blurred"))
-    assert list(found.distrusted) == odd
+    soft_too = [("09.png", "blurred"), *odd]
+    # where the noise is not known it may hide that a frame is soft
+    assert list(found.distrusted) in ([soft_too] if known else [soft_too, odd])
     assert found.notes[-1].startswith("18 frames were judged")
     unseen = judge_rest(surveyed(contract, law), frames, frozenset(f.path for f in frames))
     assert unseen.distrusted == ()  # the survey's own verdict stands

@@ -80,7 +80,7 @@ def test_edges_of_colour_frames_are_found_and_drawn(run, frames, tmp_path):
     asked = () if bank.thresholds is not None else ("--threshold", "8")
     told = json.loads(invoke(*words, *asked, "--json"))
     assert told["images"][0]["edgels"] > 100
-    assert (tmp_path / "edges" / "overlay" / "0.png.png").stat().st_size > 1000
+    assert (tmp_path / "edges" / "overlay" / "0_png.png").stat().st_size > 1000
     for words in (("bench", out / "bank"), ("assess", out), ("drift", out, frames)):
         assert f"{words[0]} takes banks of one plane" in str(invoke(*words, code=1))
 

@@ -135,7 +135,7 @@ def test_noise_depends_on_seed_and_key_only():
 def test_periodic_engine_is_wrapped_correlation(make_bank):
     bank = make_bank()
     tile = next(noise.noise_tiles(None, 1, seed=0))
-    plane = noise.Torus(bank, noise.TILE).responses([tile])
+    plane = noise.Torus(bank, noise.TILE).responses(tile)
     for i in (0, 3, 11):
         expected = ndimage.correlate(tile, bank.taps[i], mode="wrap")
         np.testing.assert_allclose(plane(i), expected, atol=2e-5)

@@ -146,12 +146,12 @@ def test_on_white_noise(shipped, spread):
 
 
 def test_levels_that_differ_by_a_rounding_do_not_choose_the_way(shipped):
-    """Here one fit begins with equal levels on either side, so that it begins without an edge."""
+    """Far above the table's noise some fits begin with equal levels on either side: no edge."""
     bank, native = shipped
     noise = np.random.default_rng(0).normal(120, 25, (240, 320))
-    pixels = np.ascontiguousarray(np.clip(noise, 0, 255).astype(np.uint8)[:70, 130:200])
+    pixels = np.clip(noise, 0, 255).astype(np.uint8)
     expected = edgel_finder(bank)(pixels, native.responses(pixels), 4.2, 0.0)
-    assert (np.hypot(expected["x"] - 33.7, expected["y"] - 31.3) < 0.3).any()
+    assert len(expected) > 5000
     assert_same(native.edgels(pixels, 4.2), expected, pixels.shape)
 
 
