@@ -9,7 +9,8 @@ import time
 import pytest
 from click.testing import CliRunner
 
-from patchlab.cli.commands import _warn_of, patchlab
+from patchlab.cli.commands import patchlab
+from patchlab.cli.making import _warn_of
 from patchlab.cli.stopping import Stop
 from patchlab.cli.terminal import Terminal
 from patchlab.errors import Interrupted

@@ -50,9 +50,6 @@ def _outcome(stop: Stop) -> int:
 def _call(stop: Stop) -> int:
     """Load the commands, which takes a while, and run the one that was named."""
     from patchlab.cli.commands import patchlab
-    from patchlab.cli.parts import parts
-
-    patchlab.add_command(parts)
 
     code = patchlab.main(
         args=list(stop.words), prog_name="patchlab", standalone_mode=False, obj=stop

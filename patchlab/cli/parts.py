@@ -7,7 +7,7 @@ from typing import Any
 
 import click
 
-from patchlab.cli.commands import FOLDER, PHOTOS, _print, _shared
+from patchlab.cli.shared import FOLDER, PHOTOS, printed, shared
 from patchlab.cli.terminal import Terminal, table
 
 
@@ -26,7 +26,7 @@ from patchlab.cli.terminal import Terminal, table
 @click.option("--seed", type=click.IntRange(0, 2**31 - 1), default=0, help="Of the starts.")
 @click.option("--jobs", type=click.IntRange(0, 1024), default=0, help="Worker processes; 0: all.")
 @click.option("--force", is_flag=True, help="Replace what stands there.")
-@_shared
+@shared
 def parts(pictures: Path, terminal: Terminal, as_json: bool, **options: Any) -> None:
     """Find the parts of an object in aligned PICTURES of it.
 
@@ -49,7 +49,7 @@ def parts(pictures: Path, terminal: Terminal, as_json: bool, **options: Any) -> 
     result = {"folder": str(out), **work.told(*pair)}
     for text in result["warnings"]:
         terminal.warn(text)
-    _print(result, as_json, _say)
+    printed(result, as_json, _say)
 
 
 def _say(result: dict[str, Any]) -> None:
