@@ -4,12 +4,12 @@
  * templates are granted to everyone for any use, without conditions or attribution.
  *
  * How it works: the picture is walked from top to bottom, once. A ring holds the
- * working values of the last 13 rows. For every stretch of tessary_edges_CHUNK output pixels
+ * working values of the last 21 rows. For every stretch of tessary_edges_CHUNK output pixels
  * the rows of the ring are folded (added and subtracted about the middle row) and
  * dotted with the plan's coefficients; a kernel's response is a signed sum of such
  * products. Kernels by tile transforms or at half resolution, where the plan
  * has any, take blocks of rows instead.
- * The plan: parity, 672 multiplies a pixel.
+ * The plan: parity, 1456 multiplies a pixel.
  *
  * This file includes itself once for every instruction set, with tessary_edges_LANES set to the
  * floats in one vector. -Dtessary_edges_MAX_LANES=1 leaves nothing but plain C.
@@ -103,7 +103,7 @@ static tessary_edges_TARGET void tessary_edges_FN(fold)(const float *const *rows
     }
 }
 
-/* 4 x 7 x 6 coefficients, even in y, odd in x */
+/* 4 x 9 x 8 coefficients, even in y, odd in x */
 static tessary_edges_TARGET void tessary_edges_FN(group0)(const float *s, float *t)
 {
     int x;
@@ -114,9 +114,9 @@ static tessary_edges_TARGET void tessary_edges_FN(group0)(const float *s, float 
         tessary_edges_FN(vec) a2 = {0.0f}, b2 = {0.0f};
         tessary_edges_FN(vec) a3 = {0.0f}, b3 = {0.0f};
         int j, i;
-        for (j = 0; j < 7; ++j) {
+        for (j = 0; j < 9; ++j) {
             const float *const r = s + (ptrdiff_t)j * tessary_edges_LINE + x + tessary_edges_RADIUS;
-            for (i = 1; i < 7; ++i) {
+            for (i = 1; i < 9; ++i) {
                 const tessary_edges_FN(vec) p = tessary_edges_LOAD(r + i) - tessary_edges_LOAD(r - i);
                 const tessary_edges_FN(vec) q = tessary_edges_LOAD(r + tessary_edges_LANES + i) - tessary_edges_LOAD(r + tessary_edges_LANES - i);
                 tessary_edges_MUL_ADD(a0, p, k[0]);
@@ -141,7 +141,7 @@ static tessary_edges_TARGET void tessary_edges_FN(group0)(const float *s, float 
     }
 }
 
-/* 4 x 6 x 7 coefficients, odd in y, even in x */
+/* 4 x 8 x 9 coefficients, odd in y, even in x */
 static tessary_edges_TARGET void tessary_edges_FN(group1)(const float *s, float *t)
 {
     int x;
@@ -152,7 +152,7 @@ static tessary_edges_TARGET void tessary_edges_FN(group1)(const float *s, float 
         tessary_edges_FN(vec) a2 = {0.0f}, b2 = {0.0f};
         tessary_edges_FN(vec) a3 = {0.0f}, b3 = {0.0f};
         int j, i;
-        for (j = 7; j < 13; ++j) {
+        for (j = 11; j < 19; ++j) {
             const float *const r = s + (ptrdiff_t)j * tessary_edges_LINE + x + tessary_edges_RADIUS;
             {
                 const tessary_edges_FN(vec) p = tessary_edges_LOAD(r);
@@ -167,7 +167,7 @@ static tessary_edges_TARGET void tessary_edges_FN(group1)(const float *s, float 
                 tessary_edges_MUL_ADD(b3, q, k[3]);
                 k += 4;
             }
-            for (i = 1; i < 7; ++i) {
+            for (i = 1; i < 9; ++i) {
                 const tessary_edges_FN(vec) p = tessary_edges_LOAD(r + i) + tessary_edges_LOAD(r - i);
                 const tessary_edges_FN(vec) q = tessary_edges_LOAD(r + tessary_edges_LANES + i) + tessary_edges_LOAD(r + tessary_edges_LANES - i);
                 tessary_edges_MUL_ADD(a0, p, k[0]);
@@ -192,7 +192,7 @@ static tessary_edges_TARGET void tessary_edges_FN(group1)(const float *s, float 
     }
 }
 
-/* 4 x 7 x 6 coefficients, even in y, odd in x */
+/* 4 x 11 x 10 coefficients, even in y, odd in x */
 static tessary_edges_TARGET void tessary_edges_FN(group2)(const float *s, float *t)
 {
     int x;
@@ -203,9 +203,9 @@ static tessary_edges_TARGET void tessary_edges_FN(group2)(const float *s, float 
         tessary_edges_FN(vec) a2 = {0.0f}, b2 = {0.0f};
         tessary_edges_FN(vec) a3 = {0.0f}, b3 = {0.0f};
         int j, i;
-        for (j = 0; j < 7; ++j) {
+        for (j = 0; j < 11; ++j) {
             const float *const r = s + (ptrdiff_t)j * tessary_edges_LINE + x + tessary_edges_RADIUS;
-            for (i = 1; i < 7; ++i) {
+            for (i = 1; i < 11; ++i) {
                 const tessary_edges_FN(vec) p = tessary_edges_LOAD(r + i) - tessary_edges_LOAD(r - i);
                 const tessary_edges_FN(vec) q = tessary_edges_LOAD(r + tessary_edges_LANES + i) - tessary_edges_LOAD(r + tessary_edges_LANES - i);
                 tessary_edges_MUL_ADD(a0, p, k[0]);
@@ -230,7 +230,7 @@ static tessary_edges_TARGET void tessary_edges_FN(group2)(const float *s, float 
     }
 }
 
-/* 4 x 6 x 7 coefficients, odd in y, even in x */
+/* 4 x 10 x 11 coefficients, odd in y, even in x */
 static tessary_edges_TARGET void tessary_edges_FN(group3)(const float *s, float *t)
 {
     int x;
@@ -241,7 +241,7 @@ static tessary_edges_TARGET void tessary_edges_FN(group3)(const float *s, float 
         tessary_edges_FN(vec) a2 = {0.0f}, b2 = {0.0f};
         tessary_edges_FN(vec) a3 = {0.0f}, b3 = {0.0f};
         int j, i;
-        for (j = 7; j < 13; ++j) {
+        for (j = 11; j < 21; ++j) {
             const float *const r = s + (ptrdiff_t)j * tessary_edges_LINE + x + tessary_edges_RADIUS;
             {
                 const tessary_edges_FN(vec) p = tessary_edges_LOAD(r);
@@ -256,7 +256,7 @@ static tessary_edges_TARGET void tessary_edges_FN(group3)(const float *s, float 
                 tessary_edges_MUL_ADD(b3, q, k[3]);
                 k += 4;
             }
-            for (i = 1; i < 7; ++i) {
+            for (i = 1; i < 11; ++i) {
                 const tessary_edges_FN(vec) p = tessary_edges_LOAD(r + i) + tessary_edges_LOAD(r - i);
                 const tessary_edges_FN(vec) q = tessary_edges_LOAD(r + tessary_edges_LANES + i) + tessary_edges_LOAD(r + tessary_edges_LANES - i);
                 tessary_edges_MUL_ADD(a0, p, k[0]);
@@ -816,7 +816,7 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_group0)(const int16_t *s, 
         tessary_edges_FN(q32) a2 = tessary_edges_FN(q_nought)(), b2 = a2;
         tessary_edges_FN(q32) a3 = tessary_edges_FN(q_nought)(), b3 = a3;
         int j;
-        for (j = 0; j < 7; j += 1) {
+        for (j = 0; j < 9; j += 1) {
             const int16_t *const r = s + (ptrdiff_t)(j) * tessary_edges_LINE_Q + x + tessary_edges_RADIUS;
             {
                 const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 1), tessary_edges_FN(q_load)(r - 1));
@@ -841,6 +841,16 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_group0)(const int16_t *s, 
             {
                 const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 5), tessary_edges_FN(q_load)(r - 5));
                 const tessary_edges_FN(q16) w = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 6), tessary_edges_FN(q_load)(r - 6));
+                tessary_edges_PAIR(v, w);
+                tessary_edges_MAC(a0, b0, k + 0);
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 7), tessary_edges_FN(q_load)(r - 7));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 8), tessary_edges_FN(q_load)(r - 8));
                 tessary_edges_PAIR(v, w);
                 tessary_edges_MAC(a0, b0, k + 0);
                 tessary_edges_MAC(a1, b1, k + 2);
@@ -870,7 +880,7 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_group1)(const int16_t *s, 
         tessary_edges_FN(q32) a2 = tessary_edges_FN(q_nought)(), b2 = a2;
         tessary_edges_FN(q32) a3 = tessary_edges_FN(q_nought)(), b3 = a3;
         int j;
-        for (j = 7; j < 13; j += 2) {
+        for (j = 11; j < 19; j += 2) {
             const int16_t *const r = s + (ptrdiff_t)(j) * tessary_edges_LINE_Q + x + tessary_edges_RADIUS;
             const int16_t *const r2 = s + (ptrdiff_t)(j + 1) * tessary_edges_LINE_Q + x + tessary_edges_RADIUS;
             {
@@ -943,6 +953,26 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_group1)(const int16_t *s, 
                 tessary_edges_MAC(a3, b3, k + 6);
                 k += 8;
             }
+            {
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 7), tessary_edges_FN(q_load)(r - 7));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 7), tessary_edges_FN(q_load)(r2 - 7));
+                tessary_edges_PAIR(v, w);
+                tessary_edges_MAC(a0, b0, k + 0);
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 8), tessary_edges_FN(q_load)(r - 8));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 8), tessary_edges_FN(q_load)(r2 - 8));
+                tessary_edges_PAIR(v, w);
+                tessary_edges_MAC(a0, b0, k + 0);
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
+            }
         }
         tessary_edges_FN(q_keep)(t + 2 * tessary_edges_CHUNK + x, a0);
         tessary_edges_FN(q_keep)(t + 2 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b0);
@@ -965,7 +995,7 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_group2)(const int16_t *s, 
         tessary_edges_FN(q32) a2 = tessary_edges_FN(q_nought)(), b2 = a2;
         tessary_edges_FN(q32) a3 = tessary_edges_FN(q_nought)(), b3 = a3;
         int j;
-        for (j = 0; j < 7; j += 1) {
+        for (j = 0; j < 11; j += 1) {
             const int16_t *const r = s + (ptrdiff_t)(j) * tessary_edges_LINE_Q + x + tessary_edges_RADIUS;
             {
                 const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 1), tessary_edges_FN(q_load)(r - 1));
@@ -997,6 +1027,26 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_group2)(const int16_t *s, 
                 tessary_edges_MAC(a3, b3, k + 6);
                 k += 8;
             }
+            {
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 7), tessary_edges_FN(q_load)(r - 7));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 8), tessary_edges_FN(q_load)(r - 8));
+                tessary_edges_PAIR(v, w);
+                tessary_edges_MAC(a0, b0, k + 0);
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 9), tessary_edges_FN(q_load)(r - 9));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_sub)(tessary_edges_FN(q_load)(r + 10), tessary_edges_FN(q_load)(r - 10));
+                tessary_edges_PAIR(v, w);
+                tessary_edges_MAC(a0, b0, k + 0);
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
+            }
         }
         tessary_edges_FN(q_keep)(t + 8 * tessary_edges_CHUNK + x, a0);
         tessary_edges_FN(q_keep)(t + 8 * tessary_edges_CHUNK + x + tessary_edges_WIDE / 2, b0);
@@ -1019,7 +1069,7 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_group3)(const int16_t *s, 
         tessary_edges_FN(q32) a2 = tessary_edges_FN(q_nought)(), b2 = a2;
         tessary_edges_FN(q32) a3 = tessary_edges_FN(q_nought)(), b3 = a3;
         int j;
-        for (j = 7; j < 13; j += 2) {
+        for (j = 11; j < 21; j += 2) {
             const int16_t *const r = s + (ptrdiff_t)(j) * tessary_edges_LINE_Q + x + tessary_edges_RADIUS;
             const int16_t *const r2 = s + (ptrdiff_t)(j + 1) * tessary_edges_LINE_Q + x + tessary_edges_RADIUS;
             {
@@ -1085,6 +1135,46 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_group3)(const int16_t *s, 
             {
                 const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 6), tessary_edges_FN(q_load)(r - 6));
                 const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 6), tessary_edges_FN(q_load)(r2 - 6));
+                tessary_edges_PAIR(v, w);
+                tessary_edges_MAC(a0, b0, k + 0);
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 7), tessary_edges_FN(q_load)(r - 7));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 7), tessary_edges_FN(q_load)(r2 - 7));
+                tessary_edges_PAIR(v, w);
+                tessary_edges_MAC(a0, b0, k + 0);
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 8), tessary_edges_FN(q_load)(r - 8));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 8), tessary_edges_FN(q_load)(r2 - 8));
+                tessary_edges_PAIR(v, w);
+                tessary_edges_MAC(a0, b0, k + 0);
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 9), tessary_edges_FN(q_load)(r - 9));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 9), tessary_edges_FN(q_load)(r2 - 9));
+                tessary_edges_PAIR(v, w);
+                tessary_edges_MAC(a0, b0, k + 0);
+                tessary_edges_MAC(a1, b1, k + 2);
+                tessary_edges_MAC(a2, b2, k + 4);
+                tessary_edges_MAC(a3, b3, k + 6);
+                k += 8;
+            }
+            {
+                const tessary_edges_FN(q16) v = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r + 10), tessary_edges_FN(q_load)(r - 10));
+                const tessary_edges_FN(q16) w = tessary_edges_FN(q_add)(tessary_edges_FN(q_load)(r2 + 10), tessary_edges_FN(q_load)(r2 - 10));
                 tessary_edges_PAIR(v, w);
                 tessary_edges_MAC(a0, b0, k + 0);
                 tessary_edges_MAC(a1, b1, k + 2);
@@ -1308,7 +1398,7 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_edges0)(const int16_t *con
         tessary_edges_FN(q_store)(r + x, tessary_edges_FN(q_round)(l, h, 15));
     }
     tessary_edges_FN(q_take)(r, 7, best, who);
-    for (x = 0; x < n; ++x) strength[x] = 0.0040397332f * (float)best[x];
+    for (x = 0; x < n; ++x) strength[x] = 0.00559698977f * (float)best[x];
     for (x = 0; x < n; ++x) orientation[x] = (unsigned char)who[x];
 }
 
@@ -1375,7 +1465,7 @@ static tessary_edges_TARGET_Q void tessary_edges_FN(q_edges1)(const int16_t *con
         tessary_edges_FN(q_store)(r + x, tessary_edges_FN(q_round)(l, h, 15));
     }
     tessary_edges_FN(q_take)(r, 7, best, who);
-    for (x = 0; x < n; ++x) strength[x] = 0.00712869735f * (float)best[x];
+    for (x = 0; x < n; ++x) strength[x] = 0.0128518632f * (float)best[x];
     for (x = 0; x < n; ++x) orientation[x] = (unsigned char)who[x];
 }
 
@@ -1654,17 +1744,17 @@ static tessary_edges_TARGET void tessary_edges_FN(fit)(const struct tessary_edge
 #define tessary_edges_MAX_LANES 16
 #endif
 
-#define tessary_edges_SIZE 13
-#define tessary_edges_RADIUS 6
+#define tessary_edges_SIZE 21
+#define tessary_edges_RADIUS 10
 #define tessary_edges_CHUNK 64 /* output pixels computed together */
-#define tessary_edges_LINE 80 /* a chunk with its halo, in whole vectors */
-#define tessary_edges_FOLDED 1040 /* floats of the folded rows of a chunk */
-#define tessary_edges_TILE 3776 /* widest part of the picture that the ring holds */
+#define tessary_edges_LINE 96 /* a chunk with its halo, in whole vectors */
+#define tessary_edges_FOLDED 2016 /* floats of the folded rows of a chunk */
+#define tessary_edges_TILE 2304 /* widest part of the picture that the ring holds */
 #define tessary_edges_COLUMNS 1152 /* floats of products, and then columns of separable ones */
-#define tessary_edges_SCRATCH 2192 /* floats of scratch memory beside the ring */
+#define tessary_edges_SCRATCH 3168 /* floats of scratch memory beside the ring */
 #define tessary_edges_LINE_Q 96 /* the same in 16-bit codes */
-#define tessary_edges_FOLDED_Q 1248 /* codes of the folded rows of a chunk */
-#define tessary_edges_SCRATCH_Q 7360 /* bytes of scratch memory beside the ring of codes */
+#define tessary_edges_FOLDED_Q 2016 /* codes of the folded rows of a chunk */
+#define tessary_edges_SCRATCH_Q 8896 /* bytes of scratch memory beside the ring of codes */
 #define tessary_edges_LONGEST 16777216 /* pixels of a side */
 #define tessary_edges_STREAM_FROM 8388608.0 /* bytes of output from which stores pass the cache */
 
@@ -1711,179 +1801,354 @@ static const float tessary_edges_table[256] = {
     58.0081329f, 58.1595459f, 58.3106651f, 58.4614906f
 };
 
-/* 4 x 7 x 6 coefficients, even in y, odd in x */
-static const float tessary_edges_group0_taps[168] = {
-    0.496147513f, 0.470242023f, 0.384918392f, 0.223841786f, 0.143657446f, 0.148444355f,
-    0.149693847f, 0.10724318f, 0.00860130787f, 0.0102645755f, 0.0146545172f, 0.0148636103f,
-    0.000126242638f, 0.000184237957f, 0.000428020954f, 0.000706315041f, 4.76837158e-07f,
-    8.94069672e-07f, 3.93390656e-06f, 1.21593475e-05f, 0.0f, 0.0f, 0.0f, 5.96046448e-08f,
-    0.317140698f, 0.27799949f, 0.183185786f, 0.0813970268f, 0.0918267965f, 0.0904023349f,
-    0.0760205388f, 0.0405033231f, 0.00549799204f, 0.00655984879f, 0.00824275613f,
-    0.00596621633f, 8.0704689e-05f, 0.000125676394f, 0.000274777412f, 0.000307440758f,
-    2.98023224e-07f, 6.55651093e-07f, 2.95042992e-06f, 5.81145287e-06f, 0.0f, 0.0f, 0.0f,
-    2.98023224e-08f, 0.0828276277f, 0.0563555956f, 0.0117616653f, -0.0061365068f, 0.0239824057f,
-    0.0202355981f, 0.00767886639f, -0.00232839584f, 0.0014359355f, 0.00169613957f,
-    0.00131815672f, -0.000171780586f, 2.11000443e-05f, 3.85046005e-05f, 6.56545162e-05f,
-    2.86102295e-06f, 5.96046448e-08f, 2.68220901e-07f, 9.83476639e-07f, 2.98023224e-07f, 0.0f,
-    0.0f, 0.0f, 0.0f, 0.00883853436f, 0.00358572602f, -0.00196781754f, -0.00177949667f,
-    0.00255918503f, 0.00160813332f, -0.000472724438f, -0.000850111246f, 0.000153243542f,
-    0.000173032284f, 1.83582306e-05f, -0.000115931034f, 2.2649765e-06f, 4.91738319e-06f,
-    4.44054604e-06f, -5.21540642e-06f, 0.0f, 2.98023224e-08f, 1.1920929e-07f, -8.94069672e-08f,
-    0.0f, 0.0f, 0.0f, 0.0f, 0.000385344028f, 4.35113907e-05f, -0.000133633614f,
-    -5.32567501e-05f, 0.000111579895f, 4.08291817e-05f, -5.06341457e-05f, -2.75969505e-05f,
-    6.67572021e-06f, 6.70552254e-06f, -3.90410423e-06f, -4.32133675e-06f, 1.1920929e-07f,
-    2.38418579e-07f, 0.0f, -2.38418579e-07f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
-    6.85453415e-06f, -9.83476639e-07f, -1.93715096e-06f, -3.57627869e-07f, 1.96695328e-06f,
-    1.78813934e-07f, -9.23871994e-07f, -2.08616257e-07f, 1.1920929e-07f, 8.94069672e-08f,
-    -1.1920929e-07f, -2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
-    0.0f, 0.0f, 0.0f, 5.96046448e-08f, -2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+/* 4 x 9 x 8 coefficients, even in y, odd in x */
+static const float tessary_edges_group0_taps[288] = {
+    0.369287014f, 0.346790969f, 0.276101947f, 0.155440986f, 0.246892035f, 0.24350369f,
+    0.218231499f, 0.138300478f, 0.059628427f, 0.0638179779f, 0.0696688294f, 0.053780973f,
+    0.00616580248f, 0.00739890337f, 0.0106468201f, 0.0108334422f, 0.000287890434f,
+    0.00040024519f, 0.000821471214f, 0.0011922121f, 6.19888306e-06f, 1.03712082e-05f,
+    3.27825546e-05f, 7.33733177e-05f, 5.96046448e-08f, 1.1920929e-07f, 6.55651093e-07f,
+    2.56299973e-06f, 0.0f, 0.0f, 0.0f, 5.96046448e-08f, 0.286553025f, 0.256896466f,
+    0.181219727f, 0.089084357f, 0.191579044f, 0.182105213f, 0.146132499f, 0.0801168382f,
+    0.0462694168f, 0.0484818816f, 0.0482057035f, 0.0317121148f, 0.00478440523f, 0.00574424863f,
+    0.0077034831f, 0.00654605031f, 0.000223398209f, 0.000319361687f, 0.000628322363f,
+    0.000742971897f, 4.82797623e-06f, 8.5234642e-06f, 2.67624855e-05f, 4.74750996e-05f,
+    5.96046448e-08f, 1.1920929e-07f, 5.96046448e-07f, 1.69873238e-06f, 0.0f, 0.0f, 0.0f,
+    2.98023224e-08f, 0.133883774f, 0.103777915f, 0.046032697f, 0.00951752067f, 0.0895098448f,
+    0.0758557618f, 0.0405006111f, 0.00943413377f, 0.0216180682f, 0.0212071538f, 0.0151976645f,
+    0.0043066144f, 0.0022354126f, 0.0026794672f, 0.0028334558f, 0.00105246902f, 0.000104367733f,
+    0.000160783529f, 0.000272810459f, 0.00014296174f, 2.2649765e-06f, 4.67896461e-06f,
+    1.37686729e-05f, 1.09672546e-05f, 0.0f, 5.96046448e-08f, 3.57627869e-07f, 4.76837158e-07f,
+    0.0f, 0.0f, 0.0f, 0.0f, 0.0376645327f, 0.0223249197f, 0.000566631556f, -0.00472617149f,
+    0.0251811743f, 0.0173413754f, 0.00204053521f, -0.00398164988f, 0.00608164072f,
+    0.00530084968f, 0.00157493353f, -0.00139531493f, 0.000628888607f, 0.000744402409f,
+    0.000464171171f, -0.000234305859f, 2.93850899e-05f, 4.99784946e-05f, 6.16908073e-05f,
+    -1.84476376e-05f, 6.55651093e-07f, 1.60932541e-06f, 3.96370888e-06f, -5.36441803e-07f, 0.0f,
+    2.98023224e-08f, 1.1920929e-07f, 2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.00637996197f,
+    0.00239160657f, -0.00145381689f, -0.00119844079f, 0.00426542759f, 0.00209727883f,
+    -0.000936836004f, -0.00106626749f, 0.00103014708f, 0.000745415688f, -0.000162810087f,
+    -0.000413239002f, 0.0001065135f, 0.000121593475f, 1.26361847e-05f, -8.21948051e-05f,
+    4.94718552e-06f, 9.35792923e-06f, 5.9902668e-06f, -8.76188278e-06f, 1.1920929e-07f,
+    3.27825546e-07f, 5.66244125e-07f, -5.06639481e-07f, 0.0f, 0.0f, 2.98023224e-08f,
+    -2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.000650703907f, 9.75728035e-05f, -0.0002143085f,
+    -9.63807106e-05f, 0.000435054302f, 0.000120669603f, -0.000163555145f, -8.8840723e-05f,
+    0.000105082989f, 5.7131052e-05f, -4.64916229e-05f, -3.65078449e-05f, 1.08480453e-05f,
+    1.15036964e-05f, -4.85777855e-06f, -7.86781311e-06f, 5.36441803e-07f, 1.04308128e-06f,
+    2.98023224e-08f, -9.23871994e-07f, 0.0f, 2.98023224e-08f, 2.98023224e-08f, -5.96046448e-08f,
+    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 3.9935112e-05f, -2.23517418e-06f,
+    -1.23977661e-05f, -3.27825546e-06f, 2.67028809e-05f, 1.78813934e-06f, -1.04308128e-05f,
+    -3.12924385e-06f, 6.43730164e-06f, 2.20537186e-06f, -3.54647636e-06f, -1.37090683e-06f,
+    6.55651093e-07f, 6.2584877e-07f, -5.66244125e-07f, -3.27825546e-07f, 5.96046448e-08f,
+    5.96046448e-08f, -2.98023224e-08f, -2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 1.49011612e-06f, -3.27825546e-07f, -3.57627869e-07f,
+    -5.96046448e-08f, 1.01327896e-06f, -1.1920929e-07f, -2.98023224e-07f, -5.96046448e-08f,
+    2.38418579e-07f, 2.98023224e-08f, -1.1920929e-07f, -2.98023224e-08f, 0.0f, 2.98023224e-08f,
+    -2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 5.96046448e-08f, -2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f,
     0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
-    0.0f
+    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f
 };
 
-/* 4 x 6 x 7 coefficients, odd in y, even in x */
-static const float tessary_edges_group1_taps[168] = {
-    0.223841786f, 0.384918392f, 0.470242023f, 0.496147513f, 0.0813970268f, 0.183185786f,
-    0.27799949f, 0.317140698f, -0.0061365068f, 0.0117616653f, 0.0563555956f, 0.0828276277f,
-    -0.00177949667f, -0.00196781754f, 0.00358572602f, 0.00883853436f, -5.32567501e-05f,
-    -0.000133633614f, 4.35113907e-05f, 0.000385344028f, -3.57627869e-07f, -1.93715096e-06f,
-    -9.83476639e-07f, 6.85453415e-06f, 0.0f, 0.0f, -2.98023224e-08f, 5.96046448e-08f,
-    0.10724318f, 0.149693847f, 0.148444355f, 0.143657446f, 0.0405033231f, 0.0760205388f,
-    0.0904023349f, 0.0918267965f, -0.00232839584f, 0.00767886639f, 0.0202355981f, 0.0239824057f,
-    -0.000850111246f, -0.000472724438f, 0.00160813332f, 0.00255918503f, -2.75969505e-05f,
-    -5.06341457e-05f, 4.08291817e-05f, 0.000111579895f, -2.08616257e-07f, -9.23871994e-07f,
-    1.78813934e-07f, 1.96695328e-06f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0148636103f, 0.0146545172f,
-    0.0102645755f, 0.00860130787f, 0.00596621633f, 0.00824275613f, 0.00655984879f,
-    0.00549799204f, -0.000171780586f, 0.00131815672f, 0.00169613957f, 0.0014359355f,
-    -0.000115931034f, 1.83582306e-05f, 0.000173032284f, 0.000153243542f, -4.32133675e-06f,
-    -3.90410423e-06f, 6.70552254e-06f, 6.67572021e-06f, -2.98023224e-08f, -1.1920929e-07f,
-    8.94069672e-08f, 1.1920929e-07f, 0.0f, 0.0f, 0.0f, 0.0f, 0.000706315041f, 0.000428020954f,
-    0.000184237957f, 0.000126242638f, 0.000307440758f, 0.000274777412f, 0.000125676394f,
-    8.0704689e-05f, 2.86102295e-06f, 6.56545162e-05f, 3.85046005e-05f, 2.11000443e-05f,
-    -5.21540642e-06f, 4.44054604e-06f, 4.91738319e-06f, 2.2649765e-06f, -2.38418579e-07f, 0.0f,
-    2.38418579e-07f, 1.1920929e-07f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
-    1.21593475e-05f, 3.93390656e-06f, 8.94069672e-07f, 4.76837158e-07f, 5.81145287e-06f,
-    2.95042992e-06f, 6.55651093e-07f, 2.98023224e-07f, 2.98023224e-07f, 9.83476639e-07f,
-    2.68220901e-07f, 5.96046448e-08f, -8.94069672e-08f, 1.1920929e-07f, 2.98023224e-08f, 0.0f,
-    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 5.96046448e-08f,
-    0.0f, 0.0f, 0.0f, 2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
-    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f
+/* 4 x 8 x 9 coefficients, odd in y, even in x */
+static const float tessary_edges_group1_taps[288] = {
+    0.155440986f, 0.276101947f, 0.346790969f, 0.369287014f, 0.089084357f, 0.181219727f,
+    0.256896466f, 0.286553025f, 0.00951752067f, 0.046032697f, 0.103777915f, 0.133883774f,
+    -0.00472617149f, 0.000566631556f, 0.0223249197f, 0.0376645327f, -0.00119844079f,
+    -0.00145381689f, 0.00239160657f, 0.00637996197f, -9.63807106e-05f, -0.0002143085f,
+    9.75728035e-05f, 0.000650703907f, -3.27825546e-06f, -1.23977661e-05f, -2.23517418e-06f,
+    3.9935112e-05f, -5.96046448e-08f, -3.57627869e-07f, -3.27825546e-07f, 1.49011612e-06f, 0.0f,
+    0.0f, -2.98023224e-08f, 5.96046448e-08f, 0.138300478f, 0.218231499f, 0.24350369f,
+    0.246892035f, 0.0801168382f, 0.146132499f, 0.182105213f, 0.191579044f, 0.00943413377f,
+    0.0405006111f, 0.0758557618f, 0.0895098448f, -0.00398164988f, 0.00204053521f, 0.0173413754f,
+    0.0251811743f, -0.00106626749f, -0.000936836004f, 0.00209727883f, 0.00426542759f,
+    -8.8840723e-05f, -0.000163555145f, 0.000120669603f, 0.000435054302f, -3.12924385e-06f,
+    -1.04308128e-05f, 1.78813934e-06f, 2.67028809e-05f, -5.96046448e-08f, -2.98023224e-07f,
+    -1.1920929e-07f, 1.01327896e-06f, 0.0f, 0.0f, 0.0f, 0.0f, 0.053780973f, 0.0696688294f,
+    0.0638179779f, 0.059628427f, 0.0317121148f, 0.0482057035f, 0.0484818816f, 0.0462694168f,
+    0.0043066144f, 0.0151976645f, 0.0212071538f, 0.0216180682f, -0.00139531493f, 0.00157493353f,
+    0.00530084968f, 0.00608164072f, -0.000413239002f, -0.000162810087f, 0.000745415688f,
+    0.00103014708f, -3.65078449e-05f, -4.64916229e-05f, 5.7131052e-05f, 0.000105082989f,
+    -1.37090683e-06f, -3.54647636e-06f, 2.20537186e-06f, 6.43730164e-06f, -2.98023224e-08f,
+    -1.1920929e-07f, 2.98023224e-08f, 2.38418579e-07f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0108334422f,
+    0.0106468201f, 0.00739890337f, 0.00616580248f, 0.00654605031f, 0.0077034831f,
+    0.00574424863f, 0.00478440523f, 0.00105246902f, 0.0028334558f, 0.0026794672f, 0.0022354126f,
+    -0.000234305859f, 0.000464171171f, 0.000744402409f, 0.000628888607f, -8.21948051e-05f,
+    1.26361847e-05f, 0.000121593475f, 0.0001065135f, -7.86781311e-06f, -4.85777855e-06f,
+    1.15036964e-05f, 1.08480453e-05f, -3.27825546e-07f, -5.66244125e-07f, 6.2584877e-07f,
+    6.55651093e-07f, 0.0f, -2.98023224e-08f, 2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    0.0011922121f, 0.000821471214f, 0.00040024519f, 0.000287890434f, 0.000742971897f,
+    0.000628322363f, 0.000319361687f, 0.000223398209f, 0.00014296174f, 0.000272810459f,
+    0.000160783529f, 0.000104367733f, -1.84476376e-05f, 6.16908073e-05f, 4.99784946e-05f,
+    2.93850899e-05f, -8.76188278e-06f, 5.9902668e-06f, 9.35792923e-06f, 4.94718552e-06f,
+    -9.23871994e-07f, 2.98023224e-08f, 1.04308128e-06f, 5.36441803e-07f, -2.98023224e-08f,
+    -2.98023224e-08f, 5.96046448e-08f, 5.96046448e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    0.0f, 0.0f, 7.33733177e-05f, 3.27825546e-05f, 1.03712082e-05f, 6.19888306e-06f,
+    4.74750996e-05f, 2.67624855e-05f, 8.5234642e-06f, 4.82797623e-06f, 1.09672546e-05f,
+    1.37686729e-05f, 4.67896461e-06f, 2.2649765e-06f, -5.36441803e-07f, 3.96370888e-06f,
+    1.60932541e-06f, 6.55651093e-07f, -5.06639481e-07f, 5.66244125e-07f, 3.27825546e-07f,
+    1.1920929e-07f, -5.96046448e-08f, 2.98023224e-08f, 2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f,
+    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 2.56299973e-06f, 6.55651093e-07f,
+    1.1920929e-07f, 5.96046448e-08f, 1.69873238e-06f, 5.96046448e-07f, 1.1920929e-07f,
+    5.96046448e-08f, 4.76837158e-07f, 3.57627869e-07f, 5.96046448e-08f, 0.0f, 2.98023224e-08f,
+    1.1920929e-07f, 2.98023224e-08f, 0.0f, -2.98023224e-08f, 2.98023224e-08f, 0.0f, 0.0f, 0.0f,
+    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    5.96046448e-08f, 0.0f, 0.0f, 0.0f, 2.98023224e-08f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f,
+    0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f, 0.0f
 };
 
-/* 4 x 7 x 6 coefficients, even in y, odd in x */
-static const float tessary_edges_group2_taps[168] = {
-    0.270522773f, 0.252572656f, 0.198281348f, 0.110068321f, 0.267425716f, 0.257683635f,
-    0.218303204f, 0.130773067f, 0.123949051f, 0.125881612f, 0.121077955f, 0.0823479891f,
-    0.0319234729f, 0.0348978639f, 0.0400943756f, 0.0325725675f, 0.0048186779f, 0.00579053164f,
-    0.00836062431f, 0.00853574276f, 0.000436484814f, 0.00058889389f, 0.0011241436f,
-    0.00151747465f, 0.229815662f, 0.208128214f, 0.151244164f, 0.0772745013f, 0.227184594f,
-    0.213172644f, 0.167870015f, 0.0921984911f, 0.105297744f, 0.104816645f, 0.0943617523f,
-    0.0584654212f, 0.0271197557f, 0.029322356f, 0.031832546f, 0.0233523846f, 0.0040935874f,
-    0.00492200255f, 0.00679579377f, 0.00619611144f, 0.000370800495f, 0.000507622957f,
-    0.000939935446f, 0.00111824274f, 0.140898645f, 0.116152227f, 0.0645974576f, 0.0230587423f,
-    0.139285564f, 0.120445877f, 0.0739004612f, 0.0280892551f, 0.0645574331f, 0.0604324639f,
-    0.0435943902f, 0.0184205174f, 0.0166269541f, 0.0173783302f, 0.0156704783f, 0.00769644976f,
-    0.00250977278f, 0.00301870704f, 0.00360798836f, 0.0021571219f, 0.000227332115f,
-    0.000324070454f, 0.000543028116f, 0.000414550304f, 0.0623427033f, 0.0435036421f,
-    0.0123049319f, -0.0014012754f, 0.0616289377f, 0.0461631417f, 0.0155793726f, -0.00127831101f,
-    0.0285643935f, 0.024022907f, 0.0105836689f, -0.000391513109f, 0.0073568821f, 0.00724452734f,
-    0.00445142388f, 8.06152821e-05f, 0.00111049414f, 0.0013307333f, 0.00119903684f,
-    0.000103414059f, 0.00010061264f, 0.00015193224f, 0.000209361315f, 3.70740891e-05f,
-    0.0199074745f, 0.0107108355f, -0.00101259351f, -0.00289866328f, 0.0196795464f,
-    0.0118239522f, -0.000394225121f, -0.00336426497f, 0.00912123919f, 0.00652709603f,
-    0.000493198633f, -0.00203084946f, 0.00234919786f, 0.0021135211f, 0.000526547432f,
-    -0.000751376152f, 0.000354588032f, 0.000419229269f, 0.000219792128f, -0.000177800655f,
-    3.21269035e-05f, 5.17368317e-05f, 5.04255295e-05f, -2.70307064e-05f, 0.0045877099f,
-    0.00164958835f, -0.00105366111f, -0.000832825899f, 0.00453519821f, 0.00195875764f,
-    -0.00103265047f, -0.000990003347f, 0.0021020174f, 0.00119191408f, -0.000439018011f,
-    -0.000623106956f, 0.000541388988f, 0.000427961349f, -7.14957714e-05f, -0.000245541334f,
-    8.1717968e-05f, 9.36985016e-05f, 9.59634781e-06f, -6.37173653e-05f, 7.39097595e-06f,
-    1.2665987e-05f, 6.40749931e-06f, -1.10864639e-05f, 0.000762999058f, 0.000135540962f,
-    -0.000241309404f, -0.000117391348f, 0.00075429678f, 0.000192403793f, -0.000257343054f,
-    -0.000142097473f, 0.000349581242f, 0.000141143799f, -0.000132113695f, -9.22083855e-05f,
-    9.00626183e-05f, 5.93364239e-05f, -3.65972519e-05f, -3.79085541e-05f, 1.3589859e-05f,
-    1.47223473e-05f, -4.73856926e-06f, -1.04010105e-05f, 1.25169754e-06f, 2.20537186e-06f,
-    5.96046448e-08f, -1.96695328e-06f
+/* 4 x 11 x 10 coefficients, even in y, odd in x */
+static const float tessary_edges_group2_taps[440] = {
+    0.102009833f, 0.0945640802f, 0.0729695261f, 0.0398145318f, 0.162656635f, 0.152321726f,
+    0.120451868f, 0.0673519373f, 0.167248666f, 0.159292638f, 0.131212354f, 0.0764255822f,
+    0.131431937f, 0.128178149f, 0.111792207f, 0.0689435899f, 0.083254993f, 0.0837029517f,
+    0.0785683393f, 0.0521481931f, 0.0435302258f, 0.0454230011f, 0.0466426015f, 0.0338668525f,
+    0.0190255344f, 0.0207449794f, 0.0236870944f, 0.0191247165f, 0.00700369477f, 0.00803402066f,
+    0.0103684366f, 0.00946190953f, 0.00218212605f, 0.0026512444f, 0.00393101573f,
+    0.00412139297f, 0.000577330589f, 0.00074800849f, 0.00129517913f, 0.00158572197f,
+    0.0967988074f, 0.0888375938f, 0.0668847859f, 0.035588026f, 0.154347599f, 0.143155068f,
+    0.110497385f, 0.0602269173f, 0.158705056f, 0.149806678f, 0.120531514f, 0.0683874786f,
+    0.124717981f, 0.12065801f, 0.102886572f, 0.0617514998f, 0.0790020525f, 0.078886956f,
+    0.0724851936f, 0.0467656851f, 0.0413065553f, 0.0428724438f, 0.0431589782f, 0.0304169208f,
+    0.0180536509f, 0.0196141154f, 0.0219946504f, 0.0172070116f, 0.00664591789f, 0.00761125982f,
+    0.00966639817f, 0.00853055716f, 0.00207066536f, 0.00251741707f, 0.00368154049f,
+    0.00372430682f, 0.000547856092f, 0.000712051988f, 0.0012191236f, 0.00143666565f,
+    0.0827092826f, 0.0736358762f, 0.0513339043f, 0.0251452923f, 0.131881565f, 0.118804231f,
+    0.0850270092f, 0.0426133722f, 0.135604769f, 0.124578252f, 0.0931490511f, 0.0484990478f,
+    0.106564671f, 0.100624576f, 0.0799914598f, 0.0439341366f, 0.0675029457f, 0.0660294443f,
+    0.0567885488f, 0.0334096402f, 0.0352941751f, 0.0360444635f, 0.0341279507f, 0.0218391716f,
+    0.0154258609f, 0.0165766031f, 0.0175817907f, 0.0124274939f, 0.00567859411f, 0.00647115707f,
+    0.00782300532f, 0.00620275736f, 0.00176924467f, 0.00215479732f, 0.003020823f,
+    0.00272864103f, 0.000468105078f, 0.000614061952f, 0.00101563334f, 0.00106145442f,
+    0.063634783f, 0.0538061261f, 0.0325924307f, 0.0134427547f, 0.101466924f, 0.0869950056f,
+    0.0542554408f, 0.0228521079f, 0.104331493f, 0.091544196f, 0.0599304438f, 0.0261424929f,
+    0.0819886327f, 0.0743043125f, 0.052053079f, 0.0238512605f, 0.0519353449f, 0.0490624309f,
+    0.0374861509f, 0.0183024555f, 0.0271545947f, 0.0269843936f, 0.0229143947f, 0.0120947659f,
+    0.0118683279f, 0.0125190467f, 0.0120371878f, 0.00696982443f, 0.00436899066f, 0.00493599474f,
+    0.00547346473f, 0.00352860987f, 0.00136122108f, 0.00166189671f, 0.00216417015f,
+    0.00157688558f, 0.000360161066f, 0.000479355454f, 0.000746294856f, 0.000624015927f,
+    0.0440850258f, 0.0346051902f, 0.0166285783f, 0.0046569705f, 0.0702944398f, 0.0561265647f,
+    0.0279364288f, 0.00798545778f, 0.0722789466f, 0.0593686551f, 0.0313223153f, 0.0092652142f,
+    0.0568002462f, 0.0485342294f, 0.0277578235f, 0.00861696899f, 0.035979867f, 0.032337293f,
+    0.0204880834f, 0.00677105784f, 0.0188122094f, 0.0179782957f, 0.0128843039f, 0.00459997356f,
+    0.00822216272f, 0.00844481587f, 0.00698387623f, 0.00273410976f, 0.00302675366f,
+    0.00337608159f, 0.00328418612f, 0.00143145025f, 0.000943034887f, 0.00115406513f,
+    0.00134502351f, 0.000662863255f, 0.000249505043f, 0.000338360667f, 0.000480905175f,
+    0.000272199512f, 0.0275007188f, 0.0195395947f, 0.00631044805f, 0.000110059977f,
+    0.0438504219f, 0.0318309218f, 0.0108119994f, 0.000260904431f, 0.0450883806f, 0.0339127034f,
+    0.0125025064f, 0.000438123941f, 0.0354325771f, 0.0279975235f, 0.0115289688f,
+    0.000576063991f, 0.0224446058f, 0.0188835859f, 0.00891034305f, 0.000613451004f,
+    0.0117352605f, 0.0106504112f, 0.00588978827f, 0.000541329384f, 0.00512906909f,
+    0.00508451462f, 0.00336153805f, 0.000402569771f, 0.00188812613f, 0.00206913054f,
+    0.00166469812f, 0.000255480409f, 0.000588268042f, 0.000720903277f, 0.000717282295f,
+    0.000139653683f, 0.00015565753f, 0.000215634704f, 0.00026935339f, 6.62207603e-05f,
+    0.0154473186f, 0.0096475929f, 0.00128111243f, -0.00123523176f, 0.0246310234f, 0.0158113837f,
+    0.0023675859f, -0.00205130875f, 0.025326401f, 0.0170108974f, 0.00304494798f, -0.0022546649f,
+    0.0199026763f, 0.0142296404f, 0.00316219032f, -0.00194053352f, 0.0126072764f, 0.0097528398f,
+    0.00275053084f, -0.00137542188f, 0.00659176707f, 0.00560307503f, 0.00202989578f,
+    -0.00081834197f, 0.00288102031f, 0.00272984803f, 0.00127932429f, -0.000410869718f,
+    0.00106057525f, 0.00113530457f, 0.000691622496f, -0.000173151493f, 0.000330448151f,
+    0.00040461123f, 0.000321894884f, -6.00665808e-05f, 8.74400139e-05f, 0.000123873353f,
+    0.000129371881f, -1.6272068e-05f, 0.00781300664f, 0.00413881242f, -0.000391334295f,
+    -0.00107868016f, 0.0124579668f, 0.00683997571f, -0.000516325235f, -0.00181089342f,
+    0.0128096938f, 0.00745777786f, -0.000322014093f, -0.00202830136f, 0.0100664496f,
+    0.00634910166f, 2.16662884e-05f, -0.00179544091f, 0.0063765645f, 0.00444361567f,
+    0.000294074416f, -0.00132372975f, 0.00333401561f, 0.00261320174f, 0.000387459993f,
+    -0.000831440091f, 0.00145718455f, 0.00130532682f, 0.0003323704f, -0.000449880958f,
+    0.000536412001f, 0.000557050109f, 0.000218749046f, -0.000210806727f, 0.000167131424f,
+    0.000203773379f, 0.000116854906f, -8.57114792e-05f, 4.42266464e-05f, 6.40302896e-05f,
+    5.20497561e-05f, -3.01897526e-05f, 0.00355827808f, 0.00152617693f, -0.000570312142f,
+    -0.000598505139f, 0.00567373633f, 0.00255274773f, -0.00088827312f, -0.00100970268f,
+    0.00583389401f, 0.00283615291f, -0.000868082047f, -0.00114031136f, 0.00458455086f,
+    0.00247325003f, -0.000615298748f, -0.0010214597f, 0.0029040575f, 0.00177936256f,
+    -0.000313282013f, -0.000765159726f, 0.00151839852f, 0.00107783079f, -9.30726528e-05f,
+    -0.000490531325f, 0.000663638115f, 0.000554963946f, 1.33216381e-05f, -0.000272348523f,
+    0.000244289637f, 0.000244095922f, 3.94135714e-05f, -0.000131830573f, 7.61151314e-05f,
+    9.19550657e-05f, 3.09050083e-05f, -5.58197498e-05f, 2.01463699e-05f, 2.97278166e-05f,
+    1.6734004e-05f, -2.07275152e-05f, 0.00145921111f, 0.000474214554f, -0.000353246927f,
+    -0.000253126025f, 0.00232672691f, 0.000808149576f, -0.000566095114f, -0.000428587198f,
+    0.00239241123f, 0.00092355907f, -0.000584349036f, -0.00048699975f, 0.00188007951f,
+    0.000833570957f, -0.000456616282f, -0.00044003129f, 0.0011909306f, 0.000622600317f,
+    -0.000280290842f, -0.000333383679f, 0.000622689724f, 0.000391766429f, -0.000133723021f,
+    -0.000216767192f, 0.000272154808f, 0.000209331512f, -4.58955765e-05f, -0.000122442842f,
+    0.000100195408f, 9.53674316e-05f, -7.4505806e-06f, -6.05136156e-05f, 3.12030315e-05f,
+    3.71336937e-05f, 3.39746475e-06f, -2.6255846e-05f, 8.2552433e-06f, 1.23679638e-05f,
+    3.76999378e-06f, -1.00284815e-05f, 0.000538825989f, 0.000118985772f, -0.000158280134f,
+    -8.63224268e-05f, 0.000859171152f, 0.000209644437f, -0.000257402658f, -0.000146642327f,
+    0.000883430243f, 0.000251218677f, -0.000272765756f, -0.000167563558f, 0.0006942451f,
+    0.000239238143f, -0.000222221017f, -0.000152572989f, 0.000439763069f, 0.000188589096f,
+    -0.00014564395f, -0.000116750598f, 0.000229924917f, 0.000124841928f, -7.75456429e-05f,
+    -7.68750906e-05f, 0.000100493431f, 6.98566437e-05f, -3.30358744e-05f, -4.40627337e-05f,
+    3.69846821e-05f, 3.31550837e-05f, -1.06245279e-05f, -2.21580267e-05f, 1.15334988e-05f,
+    1.33961439e-05f, -2.04145908e-06f, -9.80496407e-06f, 3.03983688e-06f, 4.60445881e-06f,
+    2.08616257e-07f, -3.82959843e-06f
 };
 
-/* 4 x 6 x 7 coefficients, odd in y, even in x */
-static const float tessary_edges_group3_taps[168] = {
-    0.110068321f, 0.198281348f, 0.252572656f, 0.270522773f, 0.0772745013f, 0.151244164f,
-    0.208128214f, 0.229815662f, 0.0230587423f, 0.0645974576f, 0.116152227f, 0.140898645f,
-    -0.0014012754f, 0.0123049319f, 0.0435036421f, 0.0623427033f, -0.00289866328f,
-    -0.00101259351f, 0.0107108355f, 0.0199074745f, -0.000832825899f, -0.00105366111f,
-    0.00164958835f, 0.0045877099f, -0.000117391348f, -0.000241309404f, 0.000135540962f,
-    0.000762999058f, 0.130773067f, 0.218303204f, 0.257683635f, 0.267425716f, 0.0921984911f,
-    0.167870015f, 0.213172644f, 0.227184594f, 0.0280892551f, 0.0739004612f, 0.120445877f,
-    0.139285564f, -0.00127831101f, 0.0155793726f, 0.0461631417f, 0.0616289377f, -0.00336426497f,
-    -0.000394225121f, 0.0118239522f, 0.0196795464f, -0.000990003347f, -0.00103265047f,
-    0.00195875764f, 0.00453519821f, -0.000142097473f, -0.000257343054f, 0.000192403793f,
-    0.00075429678f, 0.0823479891f, 0.121077955f, 0.125881612f, 0.123949051f, 0.0584654212f,
-    0.0943617523f, 0.104816645f, 0.105297744f, 0.0184205174f, 0.0435943902f, 0.0604324639f,
-    0.0645574331f, -0.000391513109f, 0.0105836689f, 0.024022907f, 0.0285643935f,
-    -0.00203084946f, 0.000493198633f, 0.00652709603f, 0.00912123919f, -0.000623106956f,
-    -0.000439018011f, 0.00119191408f, 0.0021020174f, -9.22083855e-05f, -0.000132113695f,
-    0.000141143799f, 0.000349581242f, 0.0325725675f, 0.0400943756f, 0.0348978639f,
-    0.0319234729f, 0.0233523846f, 0.031832546f, 0.029322356f, 0.0271197557f, 0.00769644976f,
-    0.0156704783f, 0.0173783302f, 0.0166269541f, 8.06152821e-05f, 0.00445142388f,
-    0.00724452734f, 0.0073568821f, -0.000751376152f, 0.000526547432f, 0.0021135211f,
-    0.00234919786f, -0.000245541334f, -7.14957714e-05f, 0.000427961349f, 0.000541388988f,
-    -3.79085541e-05f, -3.65972519e-05f, 5.93364239e-05f, 9.00626183e-05f, 0.00853574276f,
-    0.00836062431f, 0.00579053164f, 0.0048186779f, 0.00619611144f, 0.00679579377f,
-    0.00492200255f, 0.0040935874f, 0.0021571219f, 0.00360798836f, 0.00301870704f,
-    0.00250977278f, 0.000103414059f, 0.00119903684f, 0.0013307333f, 0.00111049414f,
-    -0.000177800655f, 0.000219792128f, 0.000419229269f, 0.000354588032f, -6.37173653e-05f,
-    9.59634781e-06f, 9.36985016e-05f, 8.1717968e-05f, -1.04010105e-05f, -4.73856926e-06f,
-    1.47223473e-05f, 1.3589859e-05f, 0.00151747465f, 0.0011241436f, 0.00058889389f,
-    0.000436484814f, 0.00111824274f, 0.000939935446f, 0.000507622957f, 0.000370800495f,
-    0.000414550304f, 0.000543028116f, 0.000324070454f, 0.000227332115f, 3.70740891e-05f,
-    0.000209361315f, 0.00015193224f, 0.00010061264f, -2.70307064e-05f, 5.04255295e-05f,
-    5.17368317e-05f, 3.21269035e-05f, -1.10864639e-05f, 6.40749931e-06f, 1.2665987e-05f,
-    7.39097595e-06f, -1.96695328e-06f, 5.96046448e-08f, 2.20537186e-06f, 1.25169754e-06f
+/* 4 x 10 x 11 coefficients, odd in y, even in x */
+static const float tessary_edges_group3_taps[440] = {
+    0.0398145318f, 0.0729695261f, 0.0945640802f, 0.102009833f, 0.035588026f, 0.0668847859f,
+    0.0888375938f, 0.0967988074f, 0.0251452923f, 0.0513339043f, 0.0736358762f, 0.0827092826f,
+    0.0134427547f, 0.0325924307f, 0.0538061261f, 0.063634783f, 0.0046569705f, 0.0166285783f,
+    0.0346051902f, 0.0440850258f, 0.000110059977f, 0.00631044805f, 0.0195395947f, 0.0275007188f,
+    -0.00123523176f, 0.00128111243f, 0.0096475929f, 0.0154473186f, -0.00107868016f,
+    -0.000391334295f, 0.00413881242f, 0.00781300664f, -0.000598505139f, -0.000570312142f,
+    0.00152617693f, 0.00355827808f, -0.000253126025f, -0.000353246927f, 0.000474214554f,
+    0.00145921111f, -8.63224268e-05f, -0.000158280134f, 0.000118985772f, 0.000538825989f,
+    0.0673519373f, 0.120451868f, 0.152321726f, 0.162656635f, 0.0602269173f, 0.110497385f,
+    0.143155068f, 0.154347599f, 0.0426133722f, 0.0850270092f, 0.118804231f, 0.131881565f,
+    0.0228521079f, 0.0542554408f, 0.0869950056f, 0.101466924f, 0.00798545778f, 0.0279364288f,
+    0.0561265647f, 0.0702944398f, 0.000260904431f, 0.0108119994f, 0.0318309218f, 0.0438504219f,
+    -0.00205130875f, 0.0023675859f, 0.0158113837f, 0.0246310234f, -0.00181089342f,
+    -0.000516325235f, 0.00683997571f, 0.0124579668f, -0.00100970268f, -0.00088827312f,
+    0.00255274773f, 0.00567373633f, -0.000428587198f, -0.000566095114f, 0.000808149576f,
+    0.00232672691f, -0.000146642327f, -0.000257402658f, 0.000209644437f, 0.000859171152f,
+    0.0764255822f, 0.131212354f, 0.159292638f, 0.167248666f, 0.0683874786f, 0.120531514f,
+    0.149806678f, 0.158705056f, 0.0484990478f, 0.0931490511f, 0.124578252f, 0.135604769f,
+    0.0261424929f, 0.0599304438f, 0.091544196f, 0.104331493f, 0.0092652142f, 0.0313223153f,
+    0.0593686551f, 0.0722789466f, 0.000438123941f, 0.0125025064f, 0.0339127034f, 0.0450883806f,
+    -0.0022546649f, 0.00304494798f, 0.0170108974f, 0.025326401f, -0.00202830136f,
+    -0.000322014093f, 0.00745777786f, 0.0128096938f, -0.00114031136f, -0.000868082047f,
+    0.00283615291f, 0.00583389401f, -0.00048699975f, -0.000584349036f, 0.00092355907f,
+    0.00239241123f, -0.000167563558f, -0.000272765756f, 0.000251218677f, 0.000883430243f,
+    0.0689435899f, 0.111792207f, 0.128178149f, 0.131431937f, 0.0617514998f, 0.102886572f,
+    0.12065801f, 0.124717981f, 0.0439341366f, 0.0799914598f, 0.100624576f, 0.106564671f,
+    0.0238512605f, 0.052053079f, 0.0743043125f, 0.0819886327f, 0.00861696899f, 0.0277578235f,
+    0.0485342294f, 0.0568002462f, 0.000576063991f, 0.0115289688f, 0.0279975235f, 0.0354325771f,
+    -0.00194053352f, 0.00316219032f, 0.0142296404f, 0.0199026763f, -0.00179544091f,
+    2.16662884e-05f, 0.00634910166f, 0.0100664496f, -0.0010214597f, -0.000615298748f,
+    0.00247325003f, 0.00458455086f, -0.00044003129f, -0.000456616282f, 0.000833570957f,
+    0.00188007951f, -0.000152572989f, -0.000222221017f, 0.000239238143f, 0.0006942451f,
+    0.0521481931f, 0.0785683393f, 0.0837029517f, 0.083254993f, 0.0467656851f, 0.0724851936f,
+    0.078886956f, 0.0790020525f, 0.0334096402f, 0.0567885488f, 0.0660294443f, 0.0675029457f,
+    0.0183024555f, 0.0374861509f, 0.0490624309f, 0.0519353449f, 0.00677105784f, 0.0204880834f,
+    0.032337293f, 0.035979867f, 0.000613451004f, 0.00891034305f, 0.0188835859f, 0.0224446058f,
+    -0.00137542188f, 0.00275053084f, 0.0097528398f, 0.0126072764f, -0.00132372975f,
+    0.000294074416f, 0.00444361567f, 0.0063765645f, -0.000765159726f, -0.000313282013f,
+    0.00177936256f, 0.0029040575f, -0.000333383679f, -0.000280290842f, 0.000622600317f,
+    0.0011909306f, -0.000116750598f, -0.00014564395f, 0.000188589096f, 0.000439763069f,
+    0.0338668525f, 0.0466426015f, 0.0454230011f, 0.0435302258f, 0.0304169208f, 0.0431589782f,
+    0.0428724438f, 0.0413065553f, 0.0218391716f, 0.0341279507f, 0.0360444635f, 0.0352941751f,
+    0.0120947659f, 0.0229143947f, 0.0269843936f, 0.0271545947f, 0.00459997356f, 0.0128843039f,
+    0.0179782957f, 0.0188122094f, 0.000541329384f, 0.00588978827f, 0.0106504112f, 0.0117352605f,
+    -0.00081834197f, 0.00202989578f, 0.00560307503f, 0.00659176707f, -0.000831440091f,
+    0.000387459993f, 0.00261320174f, 0.00333401561f, -0.000490531325f, -9.30726528e-05f,
+    0.00107783079f, 0.00151839852f, -0.000216767192f, -0.000133723021f, 0.000391766429f,
+    0.000622689724f, -7.68750906e-05f, -7.75456429e-05f, 0.000124841928f, 0.000229924917f,
+    0.0191247165f, 0.0236870944f, 0.0207449794f, 0.0190255344f, 0.0172070116f, 0.0219946504f,
+    0.0196141154f, 0.0180536509f, 0.0124274939f, 0.0175817907f, 0.0165766031f, 0.0154258609f,
+    0.00696982443f, 0.0120371878f, 0.0125190467f, 0.0118683279f, 0.00273410976f, 0.00698387623f,
+    0.00844481587f, 0.00822216272f, 0.000402569771f, 0.00336153805f, 0.00508451462f,
+    0.00512906909f, -0.000410869718f, 0.00127932429f, 0.00272984803f, 0.00288102031f,
+    -0.000449880958f, 0.0003323704f, 0.00130532682f, 0.00145718455f, -0.000272348523f,
+    1.33216381e-05f, 0.000554963946f, 0.000663638115f, -0.000122442842f, -4.58955765e-05f,
+    0.000209331512f, 0.000272154808f, -4.40627337e-05f, -3.30358744e-05f, 6.98566437e-05f,
+    0.000100493431f, 0.00946190953f, 0.0103684366f, 0.00803402066f, 0.00700369477f,
+    0.00853055716f, 0.00966639817f, 0.00761125982f, 0.00664591789f, 0.00620275736f,
+    0.00782300532f, 0.00647115707f, 0.00567859411f, 0.00352860987f, 0.00547346473f,
+    0.00493599474f, 0.00436899066f, 0.00143145025f, 0.00328418612f, 0.00337608159f,
+    0.00302675366f, 0.000255480409f, 0.00166469812f, 0.00206913054f, 0.00188812613f,
+    -0.000173151493f, 0.000691622496f, 0.00113530457f, 0.00106057525f, -0.000210806727f,
+    0.000218749046f, 0.000557050109f, 0.000536412001f, -0.000131830573f, 3.94135714e-05f,
+    0.000244095922f, 0.000244289637f, -6.05136156e-05f, -7.4505806e-06f, 9.53674316e-05f,
+    0.000100195408f, -2.21580267e-05f, -1.06245279e-05f, 3.31550837e-05f, 3.69846821e-05f,
+    0.00412139297f, 0.00393101573f, 0.0026512444f, 0.00218212605f, 0.00372430682f,
+    0.00368154049f, 0.00251741707f, 0.00207066536f, 0.00272864103f, 0.003020823f,
+    0.00215479732f, 0.00176924467f, 0.00157688558f, 0.00216417015f, 0.00166189671f,
+    0.00136122108f, 0.000662863255f, 0.00134502351f, 0.00115406513f, 0.000943034887f,
+    0.000139653683f, 0.000717282295f, 0.000720903277f, 0.000588268042f, -6.00665808e-05f,
+    0.000321894884f, 0.00040461123f, 0.000330448151f, -8.57114792e-05f, 0.000116854906f,
+    0.000203773379f, 0.000167131424f, -5.58197498e-05f, 3.09050083e-05f, 9.19550657e-05f,
+    7.61151314e-05f, -2.6255846e-05f, 3.39746475e-06f, 3.71336937e-05f, 3.12030315e-05f,
+    -9.80496407e-06f, -2.04145908e-06f, 1.33961439e-05f, 1.15334988e-05f, 0.00158572197f,
+    0.00129517913f, 0.00074800849f, 0.000577330589f, 0.00143666565f, 0.0012191236f,
+    0.000712051988f, 0.000547856092f, 0.00106145442f, 0.00101563334f, 0.000614061952f,
+    0.000468105078f, 0.000624015927f, 0.000746294856f, 0.000479355454f, 0.000360161066f,
+    0.000272199512f, 0.000480905175f, 0.000338360667f, 0.000249505043f, 6.62207603e-05f,
+    0.00026935339f, 0.000215634704f, 0.00015565753f, -1.6272068e-05f, 0.000129371881f,
+    0.000123873353f, 8.74400139e-05f, -3.01897526e-05f, 5.20497561e-05f, 6.40302896e-05f,
+    4.42266464e-05f, -2.07275152e-05f, 1.6734004e-05f, 2.97278166e-05f, 2.01463699e-05f,
+    -1.00284815e-05f, 3.76999378e-06f, 1.23679638e-05f, 8.2552433e-06f, -3.82959843e-06f,
+    2.08616257e-07f, 4.60445881e-06f, 3.03983688e-06f
 };
 
-static const int16_t tessary_edges_group0_counts[168] = {
-    28724, 8317, 27224, 8594, 22284, 8666, 12959, 6209, 498, 7, 594, 11, 848, 25, 861, 41, 0, 0,
-    0, 0, 0, 0, 1, 0, 18360, 5316, 16094, 5234, 10605, 4401, 4712, 2345, 318, 5, 380, 7, 477,
-    16, 345, 18, 0, 0, 0, 0, 0, 0, 0, 0, 4795, 1388, 3263, 1172, 681, 445, -355, -135, 83, 1,
-    98, 2, 76, 4, -10, 0, 0, 0, 0, 0, 0, 0, 0, 0, 512, 148, 208, 93, -114, -27, -103, -49, 9, 0,
-    10, 0, 1, 0, -7, 0, 0, 0, 0, 0, 0, 0, 0, 0, 22, 6, 3, 2, -8, -3, -3, -2, 0, 0, 0, 0, 0, 0,
+static const int16_t tessary_edges_group0_counts[288] = {
+    15431, 10317, 14491, 10175, 11537, 9119, 6495, 5779, 2492, 258, 2667, 309, 2911, 445, 2247,
+    453, 12, 0, 17, 0, 34, 1, 50, 3, 0, 0, 0, 0, 0, 0, 0, 0, 11974, 8005, 10735, 7609, 7572,
+    6106, 3722, 3348, 1933, 200, 2026, 240, 2014, 322, 1325, 274, 9, 0, 13, 0, 26, 1, 31, 2, 0,
+    0, 0, 0, 0, 0, 0, 0, 5594, 3740, 4336, 3170, 1924, 1692, 398, 394, 903, 93, 886, 112, 635,
+    118, 180, 44, 4, 0, 7, 0, 11, 1, 6, 0, 0, 0, 0, 0, 0, 0, 0, 0, 1574, 1052, 933, 725, 24, 85,
+    -197, -166, 254, 26, 222, 31, 66, 19, -58, -10, 1, 0, 2, 0, 3, 0, -1, 0, 0, 0, 0, 0, 0, 0,
+    0, 0, 267, 178, 100, 88, -61, -39, -50, -45, 43, 4, 31, 5, -7, 1, -17, -3, 0, 0, 0, 0, 0, 0,
+    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 27, 18, 4, 5, -9, -7, -4, -4, 4, 0, 2, 0, -2, 0, -2, 0, 0, 0,
+    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 2, 1, 0, 0, -1, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0,
     0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0,
-    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0
+    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0,
+    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0
 };
 
-static const int16_t tessary_edges_group1_counts[168] = {
-    12959, 6209, 22284, 8666, 27224, 8594, 28724, 8317, 4712, 2345, 10605, 4401, 16094, 5234,
-    18360, 5316, -355, -135, 681, 445, 3263, 1172, 4795, 1388, -103, -49, -114, -27, 208, 93,
-    512, 148, -3, -2, -8, -3, 3, 2, 22, 6, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 861,
-    41, 848, 25, 594, 11, 498, 7, 345, 18, 477, 16, 380, 7, 318, 5, -10, 0, 76, 4, 98, 2, 83, 1,
-    -7, 0, 1, 0, 10, 0, 9, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0,
-    0, 0, 1, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0,
-    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0
+static const int16_t tessary_edges_group1_counts[288] = {
+    6495, 5779, 11537, 9119, 14491, 10175, 15431, 10317, 3722, 3348, 7572, 6106, 10735, 7609,
+    11974, 8005, 398, 394, 1924, 1692, 4336, 3170, 5594, 3740, -197, -166, 24, 85, 933, 725,
+    1574, 1052, -50, -45, -61, -39, 100, 88, 267, 178, -4, -4, -9, -7, 4, 5, 27, 18, 0, 0, -1,
+    0, 0, 0, 2, 1, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 2247, 453, 2911, 445, 2667,
+    309, 2492, 258, 1325, 274, 2014, 322, 2026, 240, 1933, 200, 180, 44, 635, 118, 886, 112,
+    903, 93, -58, -10, 66, 19, 222, 31, 254, 26, -17, -3, -7, 1, 31, 5, 43, 4, -2, 0, -2, 0, 2,
+    0, 4, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 50, 3, 34,
+    1, 17, 0, 12, 0, 31, 2, 26, 1, 13, 0, 9, 0, 6, 0, 11, 1, 7, 0, 4, 0, -1, 0, 3, 0, 2, 0, 1,
+    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0,
+    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0,
+    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0,
+    0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0, 0
 };
 
-static const int16_t tessary_edges_group2_counts[168] = {
-    8875, 8774, 8286, 8454, 6505, 7162, 3611, 4290, 4066, 1047, 4130, 1145, 3972, 1315, 2702,
-    1069, 158, 14, 190, 19, 274, 37, 280, 50, 7540, 7453, 6828, 6994, 4962, 5507, 2535, 3025,
-    3455, 890, 3439, 962, 3096, 1044, 1918, 766, 134, 12, 161, 17, 223, 31, 203, 37, 4623, 4570,
-    3811, 3952, 2119, 2424, 756, 922, 2118, 545, 1983, 570, 1430, 514, 604, 253, 82, 7, 99, 11,
-    118, 18, 71, 14, 2045, 2022, 1427, 1514, 404, 511, -46, -42, 937, 241, 788, 238, 347, 146,
-    -13, 3, 36, 3, 44, 5, 39, 7, 3, 1, 653, 646, 351, 388, -33, -13, -95, -110, 299, 77, 214,
-    69, 16, 17, -67, -25, 12, 1, 14, 2, 7, 2, -6, -1, 151, 149, 54, 64, -35, -34, -27, -32, 69,
-    18, 39, 14, -14, -2, -20, -8, 3, 0, 3, 0, 0, 0, -2, 0, 25, 25, 4, 6, -8, -8, -4, -5, 11, 3,
-    5, 2, -4, -1, -3, -1, 0, 0, 0, 0, 0, 0, 0, 0
+static const int16_t tessary_edges_group2_counts[440] = {
+    1856, 2960, 1721, 2772, 1328, 2192, 725, 1226, 3044, 2392, 2899, 2333, 2388, 2034, 1391,
+    1255, 1515, 792, 1523, 827, 1430, 849, 949, 616, 346, 127, 378, 146, 431, 189, 348, 172, 40,
+    11, 48, 14, 72, 24, 75, 29, 1762, 2809, 1617, 2605, 1217, 2011, 648, 1096, 2888, 2270, 2726,
+    2196, 2193, 1872, 1244, 1124, 1438, 752, 1436, 780, 1319, 785, 851, 554, 329, 121, 357, 139,
+    400, 176, 313, 155, 38, 10, 46, 13, 67, 22, 68, 26, 1505, 2400, 1340, 2162, 934, 1547, 458,
+    775, 2468, 1939, 2267, 1831, 1695, 1456, 883, 800, 1228, 642, 1202, 656, 1033, 621, 608,
+    397, 281, 103, 302, 118, 320, 142, 226, 113, 32, 9, 39, 11, 55, 18, 50, 19, 1158, 1846, 979,
+    1583, 593, 987, 245, 416, 1899, 1492, 1666, 1352, 1091, 947, 476, 434, 945, 494, 893, 491,
+    682, 417, 333, 220, 216, 80, 228, 90, 219, 100, 127, 64, 25, 7, 30, 9, 39, 14, 29, 11, 802,
+    1279, 630, 1021, 303, 508, 85, 145, 1315, 1034, 1080, 883, 570, 505, 169, 157, 655, 342,
+    588, 327, 373, 234, 123, 84, 150, 55, 154, 61, 127, 60, 50, 26, 17, 5, 21, 6, 24, 9, 12, 5,
+    500, 798, 356, 579, 115, 197, 2, 5, 821, 645, 617, 509, 228, 210, 8, 10, 408, 214, 344, 194,
+    162, 107, 11, 10, 93, 34, 93, 38, 61, 30, 7, 5, 11, 3, 13, 4, 13, 5, 3, 1, 281, 448, 176,
+    288, 23, 43, -22, -37, 461, 362, 310, 259, 55, 58, -41, -35, 229, 120, 177, 102, 50, 37,
+    -25, -15, 52, 19, 50, 21, 23, 13, -7, -3, 6, 2, 7, 2, 6, 2, -1, 0, 142, 227, 75, 124, -7,
+    -9, -20, -33, 233, 183, 136, 116, -6, 0, -37, -33, 116, 61, 81, 48, 5, 7, -24, -15, 27, 10,
+    24, 10, 6, 4, -8, -4, 3, 1, 4, 1, 2, 1, -2, -1, 65, 103, 28, 46, -10, -16, -11, -18, 106,
+    83, 52, 45, -16, -11, -21, -19, 53, 28, 32, 20, -6, -2, -14, -9, 12, 4, 10, 4, 0, 1, -5, -2,
+    1, 0, 2, 1, 1, 0, -1, 0, 27, 42, 9, 15, -6, -10, -5, -8, 44, 34, 17, 15, -11, -8, -9, -8,
+    22, 11, 11, 7, -5, -2, -6, -4, 5, 2, 4, 2, -1, 0, -2, -1, 1, 0, 1, 0, 0, 0, 0, 0, 10, 16, 2,
+    4, -3, -5, -2, -3, 16, 13, 5, 4, -5, -4, -3, -3, 8, 4, 3, 2, -3, -1, -2, -1, 2, 1, 1, 1, -1,
+    0, -1, 0, 0, 0, 0, 0, 0, 0, 0, 0
 };
 
-static const int16_t tessary_edges_group3_counts[168] = {
-    3611, 4290, 6505, 7162, 8286, 8454, 8875, 8774, 2535, 3025, 4962, 5507, 6828, 6994, 7540,
-    7453, 756, 922, 2119, 2424, 3811, 3952, 4623, 4570, -46, -42, 404, 511, 1427, 1514, 2045,
-    2022, -95, -110, -33, -13, 351, 388, 653, 646, -27, -32, -35, -34, 54, 64, 151, 149, -4, -5,
-    -8, -8, 4, 6, 25, 25, 2702, 1069, 3972, 1315, 4130, 1145, 4066, 1047, 1918, 766, 3096, 1044,
-    3439, 962, 3455, 890, 604, 253, 1430, 514, 1983, 570, 2118, 545, -13, 3, 347, 146, 788, 238,
-    937, 241, -67, -25, 16, 17, 214, 69, 299, 77, -20, -8, -14, -2, 39, 14, 69, 18, -3, -1, -4,
-    -1, 5, 2, 11, 3, 280, 50, 274, 37, 190, 19, 158, 14, 203, 37, 223, 31, 161, 17, 134, 12, 71,
-    14, 118, 18, 99, 11, 82, 7, 3, 1, 39, 7, 44, 5, 36, 3, -6, -1, 7, 2, 14, 2, 12, 1, -2, 0, 0,
-    0, 3, 0, 3, 0, 0, 0, 0, 0, 0, 0, 0, 0
+static const int16_t tessary_edges_group3_counts[440] = {
+    725, 1226, 1328, 2192, 1721, 2772, 1856, 2960, 648, 1096, 1217, 2011, 1617, 2605, 1762,
+    2809, 458, 775, 934, 1547, 1340, 2162, 1505, 2400, 245, 416, 593, 987, 979, 1583, 1158,
+    1846, 85, 145, 303, 508, 630, 1021, 802, 1279, 2, 5, 115, 197, 356, 579, 500, 798, -22, -37,
+    23, 43, 176, 288, 281, 448, -20, -33, -7, -9, 75, 124, 142, 227, -11, -18, -10, -16, 28, 46,
+    65, 103, -5, -8, -6, -10, 9, 15, 27, 42, -2, -3, -3, -5, 2, 4, 10, 16, 1391, 1255, 2388,
+    2034, 2899, 2333, 3044, 2392, 1244, 1124, 2193, 1872, 2726, 2196, 2888, 2270, 883, 800,
+    1695, 1456, 2267, 1831, 2468, 1939, 476, 434, 1091, 947, 1666, 1352, 1899, 1492, 169, 157,
+    570, 505, 1080, 883, 1315, 1034, 8, 10, 228, 210, 617, 509, 821, 645, -41, -35, 55, 58, 310,
+    259, 461, 362, -37, -33, -6, 0, 136, 116, 233, 183, -21, -19, -16, -11, 52, 45, 106, 83, -9,
+    -8, -11, -8, 17, 15, 44, 34, -3, -3, -5, -4, 5, 4, 16, 13, 949, 616, 1430, 849, 1523, 827,
+    1515, 792, 851, 554, 1319, 785, 1436, 780, 1438, 752, 608, 397, 1033, 621, 1202, 656, 1228,
+    642, 333, 220, 682, 417, 893, 491, 945, 494, 123, 84, 373, 234, 588, 327, 655, 342, 11, 10,
+    162, 107, 344, 194, 408, 214, -25, -15, 50, 37, 177, 102, 229, 120, -24, -15, 5, 7, 81, 48,
+    116, 61, -14, -9, -6, -2, 32, 20, 53, 28, -6, -4, -5, -2, 11, 7, 22, 11, -2, -1, -3, -1, 3,
+    2, 8, 4, 348, 172, 431, 189, 378, 146, 346, 127, 313, 155, 400, 176, 357, 139, 329, 121,
+    226, 113, 320, 142, 302, 118, 281, 103, 127, 64, 219, 100, 228, 90, 216, 80, 50, 26, 127,
+    60, 154, 61, 150, 55, 7, 5, 61, 30, 93, 38, 93, 34, -7, -3, 23, 13, 50, 21, 52, 19, -8, -4,
+    6, 4, 24, 10, 27, 10, -5, -2, 0, 1, 10, 4, 12, 4, -2, -1, -1, 0, 4, 2, 5, 2, -1, 0, -1, 0,
+    1, 1, 2, 1, 75, 29, 72, 24, 48, 14, 40, 11, 68, 26, 67, 22, 46, 13, 38, 10, 50, 19, 55, 18,
+    39, 11, 32, 9, 29, 11, 39, 14, 30, 9, 25, 7, 12, 5, 24, 9, 21, 6, 17, 5, 3, 1, 13, 5, 13, 4,
+    11, 3, -1, 0, 6, 2, 7, 2, 6, 2, -2, -1, 2, 1, 4, 1, 3, 1, -1, 0, 1, 0, 2, 1, 1, 0, 0, 0, 0,
+    0, 1, 0, 1, 0, 0, 0, 0, 0, 0, 0, 0, 0
 };
 
 /* Code of every Mono8 value. */
@@ -1906,7 +2171,7 @@ static const int16_t tessary_edges_codes[256] = {
     7657, 7676, 7694, 7712, 7729, 7746, 7763, 7779, 7795, 7811, 7828, 7845, 7862, 7880, 7899,
     7918, 7937, 7957, 7978, 7999, 8021, 8042, 8064, 8085, 8106, 8127, 8149, 8170, 8191
 };
-#define tessary_edges_FLAT_ROWS 15 /* a kernel's, one above, one below */
+#define tessary_edges_FLAT_ROWS 23 /* a kernel's, one above, one below */
 #define tessary_edges_FLAT_SPAN 2 /* stretches that a chunk depends on */
 /* ---- edge elements: tables */
 
@@ -2450,7 +2715,7 @@ static void tessary_edges_flat_row(const struct tessary_edges_code_of *code, con
     struct tessary_edges_flat *flat, const float *const *rows, const float *const *ranges,
     int from, int part, int rest, int y, float *work)
 {
-    static const float bounds[2][3] = {{1.89886081f, 0.0f, 0.000710090215f}, {3.18746829f, 0.0f, 0.00125305762f}};
+    static const float bounds[2][3] = {{2.5474112f, 0.0f, 0.00163970189f}, {5.62980509f, 0.0f, 0.00567276357f}};
     const float *const b = bounds[job->scale];
     float *const strength = (float *)(void *)(job->out + (ptrdiff_t)y * job->row_bytes) + from;
     unsigned char *const turn = job->orientation + (ptrdiff_t)y * job->orientation_row_bytes + from;
@@ -2632,10 +2897,9 @@ static int tessary_edges_walk_q(const struct tessary_edges_picture *p, const str
 float tessary_edges_q_step(int index)
 {
     static const float steps[16] = {
-        0.0040397332f, 0.0040397332f, 0.0040397332f, 0.0040397332f, 0.0040397332f,
-        0.0040397332f, 0.0040397332f, 0.0040397332f, 0.00712869735f, 0.00712869735f,
-        0.00712869735f, 0.00712869735f, 0.00712869735f, 0.00712869735f, 0.00712869735f,
-        0.00712869735f
+        0.00559698977f, 0.00559698977f, 0.00559698977f, 0.00559698977f, 0.00559698977f,
+        0.00559698977f, 0.00559698977f, 0.00559698977f, 0.0128518632f, 0.0128518632f,
+        0.0128518632f, 0.0128518632f, 0.0128518632f, 0.0128518632f, 0.0128518632f, 0.0128518632f
     };
     return index < 0 || index >= tessary_edges_KERNEL_COUNT ? 0.0f : steps[index];
 }
@@ -2939,8 +3203,8 @@ static const double tessary_edges_sine0[8] = {
     0.92387953251128674, 0.70710678118654757, 0.38268343236508989
 };
 static const double tessary_edges_slope_odd0[8] = {
-    1.3651305601670722, 1.3788711095139832, 1.3874697734110513, 1.3788711095139832,
-    1.3651305601670722, 1.3788711095139832, 1.3874697734110513, 1.3788711095139834
+    1.046577386888883, 1.046724540159238, 1.0467842200080848, 1.0467245401592382,
+    1.046577386888883, 1.046724540159238, 1.0467842200080848, 1.046724540159238
 };
 static const struct tessary_edges_along tessary_edges_ahead1[8] = {
     {0, 0, 1.0f, 0.0f, 0.0f, 1.0f},
@@ -2975,15 +3239,15 @@ static const double tessary_edges_sine1[8] = {
     0.92387953251128674, 0.70710678118654757, 0.38268343236508989
 };
 static const double tessary_edges_slope_odd1[8] = {
-    0.83944111402506505, 0.83944157734700431, 0.83944202325395323, 0.83944157734700431,
-    0.83944111402506505, 0.8394415773470042, 0.83944202325395323, 0.83944157734700431
+    0.47600028707486797, 0.4760035395156928, 0.47600897091218536, 0.4760035395156928,
+    0.47600028707486802, 0.47600353951569285, 0.47600897091218536, 0.47600353951569285
 };
 static const struct tessary_edges_map tessary_edges_maps[2] = {
     {0, 0, -1, 1, 3, 3, 0.0f, 1.25f,
      tessary_edges_ahead0, tessary_edges_behind0, 2, -1, 0, 0.0f, 0, 0,
      1.0, 0.79655233233793987, -0.22746244891788103, 1.0, 0.0,
      tessary_edges_angle0, tessary_edges_cosine0, tessary_edges_sine0, tessary_edges_slope_odd0, NULL},
-    {1, 1, -1, 1, 4, 4, 0.349999994f, 1.25f,
+    {1, 1, -1, 1, 8, 7, 0.349999994f, 1.25f,
      tessary_edges_ahead1, tessary_edges_behind1, 2, -1, 0, 0.0f, 0, 0,
      1.0, 0.79655233233793987, -0.22746244891788103, 1.0, 0.0,
      tessary_edges_angle1, tessary_edges_cosine1, tessary_edges_sine1, tessary_edges_slope_odd1, NULL}

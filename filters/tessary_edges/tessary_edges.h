@@ -1,4 +1,4 @@
-/* tessary_edges: a convolution bank, 16 kernels of 13 x 13 taps.
+/* tessary_edges: a convolution bank, 16 kernels of 21 x 21 taps.
  *
  * The content of this folder is its maker's own. The parts that come from patchlab's
  * templates are granted to everyone for any use, without conditions or attribution.
@@ -6,7 +6,7 @@
  * What it computes
  *   Every pixel goes through the bank's input table (Mono8 codes to working
  *   values), then every kernel is correlated with the working values, without
- *   flipping: r(y, x) = sum k(j, i) p(y + j - 6, x + i - 6).
+ *   flipping: r(y, x) = sum k(j, i) p(y + j - 10, x + i - 10).
  *   Border: mirror101. Outside, the picture is mirrored about its outermost pixels.
  *   Strength: the largest absolute odd response over the orientations.
  *
@@ -43,10 +43,10 @@ extern "C" {
 #endif
 
 /* Compare with tessary_edges_abi(): they differ when library and header do not belong together. */
-#define tessary_edges_ABI 195861582
+#define tessary_edges_ABI 195594573
 
 #define tessary_edges_KERNEL_COUNT 16
-#define tessary_edges_KERNEL_SIZE 13
+#define tessary_edges_KERNEL_SIZE 21
 #define tessary_edges_SCALE_COUNT 2
 
 /* Pixels: Mono8. */
@@ -57,9 +57,9 @@ typedef uint8_t tessary_edges_pixel;
  * Use them as initialisers: static const float t[] = tessary_edges_STRENGTH_THRESHOLDS; */
 #define tessary_edges_THRESHOLD_COUNT 5
 #define tessary_edges_FALSE_EDGES_PER_MEGAPIXEL {0.100000001f, 1.0f, 10.0f, 100.0f, 1000.0f}
-#define tessary_edges_STRENGTH_THRESHOLDS {5.99771309f, 5.60037518f, 5.1715889f, 4.70218897f, 4.17732525f}
+#define tessary_edges_STRENGTH_THRESHOLDS {6.01863003f, 5.6187048f, 5.18694735f, 4.71401691f, 4.1847291f}
 #define tessary_edges_HYSTERESIS 0.699999988f
-#define tessary_edges_FALSE_GROUPS_PER_MEGAPIXEL {0.0280769244f, 0.260696709f, 2.40642262f, 22.0452747f, 199.876816f}
+#define tessary_edges_FALSE_GROUPS_PER_MEGAPIXEL {0.0194079932f, 0.180935889f, 1.67743099f, 15.439353f, 140.708954f}
 
 /* What every function that returns int may return; tessary_edges_message() says it in words. */
 enum tessary_edges_code {
@@ -130,7 +130,7 @@ tessary_edges_API size_t tessary_edges_scratch_bytes(int width, int height);
 /* Responses of every kernel on the whole picture.
  *   image            first pixel of the first row
  *   row_bytes        from one row of the picture to the next
- *   width, height    pixels, each at least 13
+ *   width, height    pixels, each at least 21
  *   out              kernel k, row y, column x goes to
  *                    out + k * out_plane_bytes + y * out_row_bytes + 4 * x (in bytes)
  *   scratch          tessary_edges_scratch_bytes(width, height) bytes
