@@ -3,9 +3,9 @@
 from __future__ import annotations
 
 import dataclasses
+import functools
 import math
 from collections.abc import Callable, Iterable, Sequence
-from dataclasses import replace
 from pathlib import Path
 from typing import Any
 
@@ -67,18 +67,10 @@ def drift(
         images.list_photos(photos), read_options(bank), max_bad=max_bad, jobs=jobs,
         progress=progress,
     )  # fmt: skip
-    some = intake.thinned(camera.MAX_FRAMES)
-
-    def frames() -> Iterable[Frame]:
-        return map(images.one_plane, images.iterate(some))
-
-    form = intake.contract.format
-    mono = intake.contract
-    if form.planes > 1:
-        mono = replace(mono, pixels=f"Mono{form.bits}")
+    frames = functools.partial(images.iterate, intake.thinned(camera.MAX_FRAMES))
     found = camera.survey(
         frames,
-        mono,
+        intake.contract,
         kind="linear" if intake.contract.format.integer else "identity",
         progress=progress,
     )
