@@ -43,7 +43,7 @@ EXPOSURES = 5
 """Light levels that a bank has to serve with its one pair of sizes."""
 DIMMEST = 1 / 128
 """The lowest of them, as a share of full light: seven stops down. A bank chosen for three stops
-found a third less in eight electrons of light, and gained 0.014 in F in full light."""
+reached a third of the F in eight electrons of light, and gained 0.014 of it in full light."""
 FAINTEST = 2.5
 """Noise units between black and white below which no exposure is served: eight electrons and a
 read noise of two or three."""
